@@ -1,0 +1,48 @@
+const tsJest = (tsconfig = {}) => ({
+  '^.+\\.tsx?$': [
+    'ts-jest',
+    {
+      tsconfig: {
+        target: 'ES2022',
+        module: 'commonjs',
+        moduleResolution: 'node10',
+        ignoreDeprecations: '5.0',
+        isolatedModules: true,
+        esModuleInterop: true,
+        experimentalDecorators: true,
+        emitDecoratorMetadata: true,
+        ...tsconfig,
+      },
+      diagnostics: false,
+    },
+  ],
+});
+
+/** Packages are tested from source; only worker threads need `dist`. */
+const moduleNameMapper = {
+  '^@thudline/(contracts|dsp|measure)$': '<rootDir>/packages/$1/src/index.ts',
+  '^@thudline/fixtures$': '<rootDir>/fixtures/src/index.ts',
+};
+
+const node = (displayName, testMatch) => ({
+  displayName,
+  rootDir: import.meta.dirname,
+  testEnvironment: 'node',
+  testMatch,
+  moduleNameMapper,
+  transform: tsJest(),
+});
+
+export default {
+  projects: [
+    node('packages', ['<rootDir>/packages/*/src/**/*.spec.ts', '<rootDir>/fixtures/src/**/*.spec.ts']),
+    node('local-services', ['<rootDir>/apps/local-services/src/**/*.spec.ts']),
+    node('api', ['<rootDir>/apps/api/src/**/*.spec.ts', '<rootDir>/apps/api/test/**/*.e2e-spec.ts']),
+    {
+      ...node('web', ['<rootDir>/apps/web/src/**/*.spec.{ts,tsx}']),
+      testEnvironment: 'jsdom',
+      setupFilesAfterEnv: ['<rootDir>/apps/web/jest.setup.ts'],
+      transform: tsJest({ jsx: 'react-jsx' }),
+    },
+  ],
+};
