@@ -1,0 +1,140 @@
+/**
+ * What one measurement of a take found: facts only. Judgements that depend on the owner's target, temperature or units
+ * (level, gain change, path difference, findings, the line) are computed from these on reading.
+ */
+export interface TakeFacts {
+  readonly version: 1;
+  readonly sampleRateHz: number;
+  /** Of the shorter file. */
+  readonly durationS: number;
+  readonly tracks: readonly TrackFacts[];
+  readonly pairs: readonly PairFacts[];
+  readonly hits: readonly HitFacts[];
+  readonly notices: readonly FileNotice[];
+}
+
+export type TrackRole = 'kick' | 'overhead';
+
+export interface ClipRun {
+  readonly startSample: number;
+  readonly lengthSamples: number;
+  readonly levelDbfs: number;
+}
+
+export type NoiseFloorReason = 'too-short' | 'no-quiet-second' | 'digital-silence';
+
+export interface TrackFacts {
+  readonly role: TrackRole;
+  readonly samplePeakDbfs: number | null;
+  readonly samplePeakAtS: number | null;
+  readonly headroomDb: number | null;
+  readonly rmsDbfs: number | null;
+  readonly crestFactorDb: number | null;
+  readonly clipping: {
+    /** The first 200. */
+    readonly runs: readonly ClipRun[];
+    readonly runCount: number;
+    readonly clippedSamples: number;
+  };
+  readonly dcOffset: number;
+  readonly noiseFloorDbfs: number | null;
+  readonly noiseFloorReason: NoiseFloorReason | null;
+  /** Largest peak of this file at any hit; null without hits. */
+  readonly loudestHitDbfs: number | null;
+}
+
+export type HitKind = 'kick' | 'drum' | 'cymbal' | 'mixed';
+
+export interface HitFacts {
+  readonly timeS: number;
+  readonly kind: HitKind;
+  /** Peak of each track at this hit, dBFS, in the order of `tracks`. */
+  readonly peaksDbfs: readonly (number | null)[];
+}
+
+export type Swing = 'up' | 'down';
+export type ArrivalReason = 'no-kick-hits' | 'too-few-hits' | 'hits-disagree' | 'overhead-silent' | 'methods-disagree';
+
+export interface ArrivalFacts {
+  /** Positive: the second microphone hears the hit later. */
+  readonly arrivalMs: number | null;
+  readonly arrivalSamples: number | null;
+  readonly arrivalIqrMs: number | null;
+  readonly hitsUsed: number;
+  /** 0–1. */
+  readonly confidence: number;
+  readonly firstSwing: { readonly kick: Swing | null; readonly overhead: Swing | null };
+  readonly reason: ArrivalReason | null;
+}
+
+export type Verdict = 'keep' | 'flip' | 'either-way' | 'cannot-tell';
+export type VerdictReason = 'no-kick-hits' | 'hits-disagree' | 'arrival-spread' | 'bands-disagree' | 'overhead-silent';
+export type ChoiceName = 'as-recorded' | 'flipped' | 'shifted' | 'shifted-flipped' | 'best-shift';
+
+/** How the second microphone is played against the first. */
+export interface Choice {
+  readonly flipped: boolean;
+  /** Positive plays the overhead earlier. */
+  readonly shiftMs: number;
+  /** Positive plays the overhead louder. */
+  readonly gainDb: number;
+}
+
+export interface NamedChoiceFacts {
+  readonly name: ChoiceName;
+  readonly flipped: boolean;
+  readonly shiftMs: number;
+  /** 30–150 Hz of the two added, matched levels, against the power sum; dB, at most +3.01. */
+  readonly lowEndDb: number;
+  readonly deepest: { readonly centreHz: number; readonly levelDb: number } | null;
+}
+
+export interface AgreementFacts {
+  readonly lowCorrelation: number | null;
+  readonly flipGainRecordedDb: number | null;
+  readonly flipGainMatchedDb: number | null;
+  readonly matchGainDb: number | null;
+  readonly hitsUsed: number;
+  readonly agreeingHits: number;
+  readonly verdict: Verdict;
+  readonly sure: boolean;
+  readonly reason: VerdictReason | null;
+  readonly bands: readonly { readonly lowHz: number; readonly highHz: number; readonly flipGainDb: number }[];
+  readonly lowCut: { readonly flipGainMatchedDb: number; readonly verdict: Verdict } | null;
+  readonly contraryBands: readonly { readonly centreHz: number; readonly flipGainDb: number }[];
+  readonly choices: readonly NamedChoiceFacts[];
+}
+
+export interface PairFacts {
+  /** Indexes into `tracks`; `a` is the kick microphone. */
+  readonly a: number;
+  readonly b: number;
+  readonly arrival: ArrivalFacts;
+  readonly agreement: AgreementFacts;
+  /** Size of the pair spectrum stored beside the facts; null without kick hits. */
+  readonly spectrum: { readonly binHz: number; readonly binCount: number; readonly hitCount: number } | null;
+}
+
+/** Something about the files that a reader should know. */
+export type FileNotice =
+  | { readonly kind: 'lengths-differ'; readonly byS: number }
+  | { readonly kind: 'same-file-twice' }
+  | { readonly kind: 'unrelated-files' }
+  | { readonly kind: 'cut-short'; readonly role: TrackRole }
+  | { readonly kind: 'silent'; readonly role: TrackRole };
+
+/** Skk, Soo and Sko (kick × conj(overhead)) added up over the kick hits; bin i lies at i · binHz. */
+export interface PairSpectrum {
+  readonly binHz: number;
+  readonly hitCount: number;
+  readonly skk: Float32Array;
+  readonly soo: Float32Array;
+  readonly skoRe: Float32Array;
+  readonly skoIm: Float32Array;
+}
+
+export interface TakeMeasurement {
+  readonly facts: TakeFacts;
+  /** In the order of `facts.pairs`; null where the pair has no kick hit. */
+  readonly pairSpectra: readonly (PairSpectrum | null)[];
+}
