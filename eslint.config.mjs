@@ -52,5 +52,8 @@ export default tseslint.config(
   zone(['apps/api/src/**/*.ts'], ours('contracts', 'dsp', 'measure')),
   zone(['apps/web/src/**/*.{ts,tsx}'], ours('contracts', 'dsp')),
   { files: ['**/*.spec.ts', '**/*.spec.tsx', '**/*.e2e-spec.ts'], rules: { 'no-restricted-imports': 'off' } },
-  { files: ['**/vite.config.ts', '**/playwright.config.ts', '**/jest*.config.ts'], rules: { 'import-x/no-default-export': 'off' } },
+  {
+    files: ['**/vite.config.ts', '**/playwright.config.ts', '**/jest*.config.ts'],
+    rules: { 'import-x/no-default-export': 'off' },
+  },
 );

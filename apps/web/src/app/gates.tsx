@@ -1,0 +1,33 @@
+import { Navigate, Outlet, useLocation } from 'react-router-dom';
+import { Button } from '../components/Button';
+import { PageLoading } from '../components/PageLoading';
+import { PageMessage } from '../components/PageMessage';
+import { useMe } from '../features/auth/hooks/useMe';
+
+/** Pages for someone signed in; others sign in first and come back to where they wanted to go. */
+export function SignedIn() {
+  const { me, error, retry } = useMe();
+  const { pathname, search } = useLocation();
+  if (me) return <Outlet />;
+  if (error) return <NoAnswer message={error.message} retry={retry} />;
+  if (me === undefined) return <PageLoading />;
+  return <Navigate to="/sign-in" replace state={{ from: pathname + search }} />;
+}
+
+/** Join and sign in: someone already signed in is taken on to where they wanted to go. */
+export function GuestOnly() {
+  const { me, error, retry } = useMe();
+  const state = useLocation().state as { from?: string } | null;
+  if (me) return <Navigate to={state?.from ?? '/takes'} replace />;
+  if (error) return <NoAnswer message={error.message} retry={retry} />;
+  if (me === undefined) return <PageLoading />;
+  return <Outlet />;
+}
+
+function NoAnswer({ message, retry }: { message: string; retry: () => void }) {
+  return (
+    <PageMessage strong="This page could not be opened." rest={message}>
+      <Button onClick={retry}>Try again</Button>
+    </PageMessage>
+  );
+}

@@ -1,0 +1,46 @@
+import { createBrowserRouter } from 'react-router-dom';
+import { PageLoading } from '../components/PageLoading';
+import { ErrorPage } from '../pages/ErrorPage';
+import { NotFoundPage } from '../pages/NotFoundPage';
+import { GuestOnly, SignedIn } from './gates';
+import { Layout } from './Layout';
+
+/** Every page is loaded when it is first needed. */
+export const router = createBrowserRouter([
+  {
+    element: <Layout />,
+    errorElement: <ErrorPage />,
+    HydrateFallback: PageLoading,
+    children: [
+      { path: '/', lazy: async () => ({ Component: (await import('../pages/HomePage')).HomePage }) },
+      {
+        element: <GuestOnly />,
+        children: [
+          { path: '/join', lazy: async () => ({ Component: (await import('../pages/JoinPage')).JoinPage }) },
+          {
+            path: '/sign-in',
+            lazy: async () => ({ Component: (await import('../pages/SignInPage')).SignInPage }),
+          },
+        ],
+      },
+      {
+        element: <SignedIn />,
+        children: [
+          {
+            path: '/takes',
+            lazy: async () => ({ Component: (await import('../pages/TakesPage')).TakesPage }),
+          },
+          {
+            path: '/takes/new',
+            lazy: async () => ({ Component: (await import('../pages/NewTakePage')).NewTakePage }),
+          },
+          {
+            path: '/takes/:takeId',
+            lazy: async () => ({ Component: (await import('../pages/SheetPage')).SheetPage }),
+          },
+        ],
+      },
+      { path: '*', element: <NotFoundPage /> },
+    ],
+  },
+]);

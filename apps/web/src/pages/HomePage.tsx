@@ -1,0 +1,3 @@
+export function HomePage() {
+  return null;
+}

@@ -1,0 +1,3 @@
+export function NewTakePage() {
+  return null;
+}

@@ -1,0 +1,3 @@
+export function SignInPage() {
+  return null;
+}

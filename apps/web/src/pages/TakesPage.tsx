@@ -1,0 +1,3 @@
+export function TakesPage() {
+  return null;
+}
