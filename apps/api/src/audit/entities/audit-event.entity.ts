@@ -1,0 +1,20 @@
+import { defineEntity, InferEntity, p } from '@mikro-orm/core';
+import { identity } from '../../database/identity';
+
+export const auditKinds = ['joined', 'signed-in', 'sign-in-failed', 'signed-out', 'session-reused', 'take-deleted'] as const;
+export type AuditKind = (typeof auditKinds)[number];
+
+/** No foreign keys: what happened stays told when its user or take is gone. */
+export const AuditEvent = defineEntity({
+  name: 'AuditEvent',
+  tableName: 'audit_event',
+  indexes: [{ properties: ['userId', 'createdAt'] }],
+  properties: {
+    ...identity,
+    kind: p.string().$type<AuditKind>().length(40),
+    userId: p.uuid().nullable(),
+    subjectId: p.uuid().nullable(),
+    address: p.string().length(64).nullable(),
+  },
+});
+export type AuditEvent = InferEntity<typeof AuditEvent>;

@@ -1,0 +1,22 @@
+import { defineEntity, InferEntity, p } from '@mikro-orm/core';
+import { identity } from '../../database/identity';
+import { User } from '../../users/entities/user.entity';
+
+export const Session = defineEntity({
+  name: 'Session',
+  tableName: 'session',
+  properties: {
+    ...identity,
+    user: () => p.manyToOne(User).ref().index().deleteRule('cascade'),
+    /** Random; with the server's secret it makes the refresh tokens of this session. */
+    refreshSeed: p.string().length(64),
+    /** How often the refresh token was changed. */
+    generation: p.integer().default(0),
+    rotatedAt: p.datetime(),
+    expiresAt: p.datetime(),
+    revokedAt: p.datetime().nullable(),
+    /** False: the cookies end with the browser session. */
+    stay: p.boolean(),
+  },
+});
+export type Session = InferEntity<typeof Session>;

@@ -1,0 +1,23 @@
+import { AuditEvent } from '../audit/entities/audit-event.entity';
+import { Session } from '../auth/entities/session.entity';
+import { Measurement } from '../measuring/entities/measurement.entity';
+import { PairSpectrum } from '../reports/entities/pair-spectrum.entity';
+import { Report } from '../reports/entities/report.entity';
+import { TakeFile } from '../takes/entities/take-file.entity';
+import { TakeTrack } from '../takes/entities/take-track.entity';
+import { Take } from '../takes/entities/take.entity';
+import { Throttle } from '../throttle/entities/throttle.entity';
+import { User } from '../users/entities/user.entity';
+
+export const entities = [
+  User,
+  Session,
+  Take,
+  TakeFile,
+  TakeTrack,
+  Measurement,
+  Report,
+  PairSpectrum,
+  AuditEvent,
+  Throttle,
+];

@@ -1,0 +1,30 @@
+import { defineEntity, InferEntity, p } from '@mikro-orm/core';
+import { Verdict } from '@thudline/contracts';
+import { ClipRun, HitFacts, TakeFacts } from '@thudline/dsp';
+import { Measurement } from '../../measuring/entities/measurement.entity';
+import { Take } from '../../takes/entities/take.entity';
+
+/** Facts only; judgements are computed on reading. What lists show or sort by has its own column. */
+export const Report = defineEntity({
+  name: 'Report',
+  tableName: 'report',
+  properties: {
+    measurement: () => p.oneToOne(Measurement).ref().primary().deleteRule('cascade'),
+    take: () => p.manyToOne(Take).ref().index().deleteRule('cascade'),
+    createdAt: p.datetime().onCreate(() => new Date()),
+    /** Hardest hit, null where there is none or it clipped. */
+    kickPeakDbfs: p.double().$type<number>().nullable(),
+    kickClipped: p.boolean(),
+    overheadPeakDbfs: p.double().$type<number>().nullable(),
+    overheadClipped: p.boolean(),
+    lowEndDb: p.double().$type<number>().nullable(),
+    flipGainDb: p.double().$type<number>().nullable(),
+    verdict: p.string().$type<Verdict>().length(20),
+    /** The facts without hits and clipping runs: small, so that lists can read it. */
+    summary: p.json<TakeFacts>(),
+    hits: p.json<readonly HitFacts[]>().lazy(),
+    /** One list a track. */
+    clipRuns: p.json<readonly (readonly ClipRun[])[]>().lazy(),
+  },
+});
+export type Report = InferEntity<typeof Report>;

@@ -1,0 +1,29 @@
+import { defineEntity, InferEntity, p } from '@mikro-orm/core';
+import { identity } from '../../database/identity';
+import { Take } from './take.entity';
+
+export const TakeFile = defineEntity({
+  name: 'TakeFile',
+  tableName: 'take_file',
+  properties: {
+    ...identity,
+    take: () => p.manyToOne(Take).ref().index().deleteRule('cascade'),
+    /** Order in the upload. */
+    position: p.smallint(),
+    /** As the client called it, made safe; our own name is the object key. */
+    name: p.string().length(255),
+    objectKey: p.string().length(255).unique(),
+    sha256: p.string().length(64),
+    bytes: p.bigint('number'),
+    /** For people: `24-bit PCM`. */
+    encoding: p.string().length(60),
+    dataOffset: p.bigint('number'),
+    blockAlign: p.integer(),
+    frames: p.bigint('number'),
+    channels: p.integer(),
+    sampleRateHz: p.integer(),
+    /** The header claimed more than the file holds. */
+    cutShort: p.boolean(),
+  },
+});
+export type TakeFile = InferEntity<typeof TakeFile>;

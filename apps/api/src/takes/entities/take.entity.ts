@@ -1,0 +1,31 @@
+import { defineEntity, InferEntity, p } from '@mikro-orm/core';
+import { identity } from '../../database/identity';
+import { User } from '../../users/entities/user.entity';
+
+export const Take = defineEntity({
+  name: 'Take',
+  tableName: 'take',
+  uniques: [{ properties: ['owner', 'uploadKey'] }, { properties: ['owner', 'number'] }],
+  indexes: [
+    {
+      name: 'take_newest_first_index',
+      expression:
+        'create index "take_newest_first_index" on "take" ("owner_id", "recorded_at" desc, "id" desc) where "deleted_at" is null',
+    },
+  ],
+  properties: {
+    ...identity,
+    owner: () => p.manyToOne(User).ref().deleteRule('cascade'),
+    /** Counts a player's takes from 1. */
+    number: p.integer(),
+    title: p.string().length(120),
+    note: p.text(),
+    recordedAt: p.datetime(),
+    uploadKey: p.uuid(),
+    tickedActions: p.json<string[]>().onCreate((): string[] => []),
+    /** The report the sheet shows; it belongs to a measurement of this take. */
+    currentReportId: p.uuid().nullable(),
+    deletedAt: p.datetime().nullable(),
+  },
+});
+export type Take = InferEntity<typeof Take>;

@@ -1,0 +1,21 @@
+import { defineEntity, InferEntity, p } from '@mikro-orm/core';
+import { defaultUserSettings, Role, UserSettings } from '@thudline/contracts';
+import { identity } from '../../database/identity';
+
+export const User = defineEntity({
+  name: 'User',
+  tableName: 'user',
+  properties: {
+    ...identity,
+    name: p.string().length(60),
+    email: p.string().length(254),
+    emailLower: p.string().length(254).unique(),
+    passwordHash: p.text(),
+    roles: p.array<Role>().columnType('text[]').onCreate((): Role[] => ['player']),
+    settings: p.json<UserSettings>().onCreate(() => defaultUserSettings),
+    /** Number of the next take; raised inside the transaction that makes a take, whose row lock it is. */
+    nextTakeNumber: p.integer().default(1),
+    lockedAt: p.datetime().nullable(),
+  },
+});
+export type User = InferEntity<typeof User>;
