@@ -1,0 +1,135 @@
+import { SignalError } from '../assert';
+import type { ByteSource, TrackSource } from '../trackSource';
+import { ascii, byteWindow } from './byteWindow';
+import { walkChunks } from './chunkWalk';
+import { decodeSamples } from './decodeSamples';
+import { foreignFormat } from './foreignFormat';
+import { sampleFormat } from './formatChunk';
+import { WavError } from './wavError';
+import type { SampleFormat, WavFacts } from './wavFacts';
+
+export interface WavFile {
+  readonly facts: WavFacts;
+  /**
+   * @param channel - from 0
+   * @throws {SignalError} a channel that isn't in the file
+   */
+  track(channel: number): TrackSource;
+  /** All channels in blocks of bounded size; the arrays are used again for the next block. */
+  blocks(): AsyncIterable<Float32Array[]>;
+}
+
+/** Read from the source at once: large enough for a disk, small enough for many measurements side by side. */
+const blockBytes = 256 * 1024;
+
+/**
+ * Opens a WAV file: PCM 8–32 bits, float 32 and 64, extensible, RF64 and BW64, with any order of chunks.
+ *
+ * Only the header is read here; the sound is read in blocks, never as a whole.
+ *
+ * @throws {WavError} a file that can't be measured, with one sentence for people
+ * @see check-values.md section 10 for the sources of each field
+ */
+export async function openWav(source: ByteSource): Promise<WavFile> {
+  if (source.sizeBytes === 0) throw new WavError('empty', 'This file is empty; export the take again.');
+  const bytes = byteWindow(source);
+  const head = await bytes.at(0, 12);
+  const container = ascii(head, 0, 4);
+  if (!['RIFF', 'RF64', 'BW64'].includes(container)) throw foreignFormat(head);
+  if (head.byteLength < 12) {
+    throw new WavError('cut-off', "This WAV's header is cut off; copy the file again or export it anew.");
+  }
+  if (ascii(head, 8, 4) !== 'WAVE') {
+    throw new WavError(
+      'not-wav',
+      `This is a ${container} file but no WAV; export the take as WAV, 24-bit if you can.`,
+    );
+  }
+  const chunks = await walkChunks(bytes);
+  const facts = wavFacts(sampleFormat(chunks.format), chunks);
+  return {
+    facts,
+    track: (channel) => track(source, facts, channel),
+    blocks: () => frameBlocks(source, facts),
+  };
+}
+
+function wavFacts(
+  format: SampleFormat,
+  data: { dataOffset: number; dataBytes: number; cutShort: boolean },
+): WavFacts {
+  const frames = Math.floor(data.dataBytes / format.blockAlign);
+  if (frames === 0) {
+    throw new WavError('no-frames', 'This WAV holds not one whole frame of sound; export the take again.');
+  }
+  const { dataOffset, cutShort } = data;
+  const encodingName = `${format.validBits}-bit ${format.encoding === 'pcm' ? 'PCM' : 'float'}`;
+  return { ...format, frames, dataOffset, cutShort, durationS: frames / format.sampleRateHz, encodingName };
+}
+
+function track(source: ByteSource, facts: WavFacts, channel: number): TrackSource {
+  if (!Number.isInteger(channel) || channel < 0 || channel >= facts.channels) {
+    throw new SignalError('option', `There is no channel ${channel} in a file of ${facts.channels}.`);
+  }
+  return {
+    sampleRateHz: facts.sampleRateHz,
+    frames: facts.frames,
+    quantisationStep: facts.encoding === 'pcm' ? 2 ** (1 - facts.validBits) : null,
+    async *blocks() {
+      const out = new Float32Array(blockFrames(facts));
+      for await (const block of byteBlocks(source, facts)) {
+        decodeSamples({ ...block, format: facts, channel, out, outStart: 0 });
+        yield out.subarray(0, block.frames);
+      }
+    },
+    read: (start, end) => excerpt({ source, facts, channel, start, end }),
+  };
+}
+
+async function excerpt(from: {
+  source: ByteSource;
+  facts: WavFacts;
+  channel: number;
+  start: number;
+  end: number;
+}): Promise<Float32Array> {
+  const { source, facts, channel, start, end } = from;
+  const out = new Float32Array(Math.max(0, end - start));
+  const first = Math.max(start, 0);
+  const frames = Math.min(end, facts.frames) - first;
+  if (frames <= 0) return out;
+  const at = facts.dataOffset + first * facts.blockAlign;
+  const bytes = await source.read(at, at + frames * facts.blockAlign);
+  const whole = Math.min(frames, Math.floor(bytes.length / facts.blockAlign));
+  decodeSamples({ bytes, format: facts, channel, frames: whole, out, outStart: first - start });
+  return out;
+}
+
+async function* frameBlocks(source: ByteSource, facts: WavFacts): AsyncGenerator<Float32Array[]> {
+  const outs = Array.from({ length: facts.channels }, () => new Float32Array(blockFrames(facts)));
+  for await (const block of byteBlocks(source, facts)) {
+    outs.forEach((out, channel) => decodeSamples({ ...block, format: facts, channel, out, outStart: 0 }));
+    yield outs.map((out) => out.subarray(0, block.frames));
+  }
+}
+
+function blockFrames(facts: WavFacts): number {
+  return Math.min(facts.frames, Math.max(1, Math.floor(blockBytes / facts.blockAlign)));
+}
+
+/** Whole frames in order. A source that has become shorter since it was opened is an error, not silence. */
+async function* byteBlocks(
+  source: ByteSource,
+  facts: WavFacts,
+): AsyncGenerator<{ bytes: Uint8Array; frames: number }> {
+  const step = blockFrames(facts);
+  for (let first = 0; first < facts.frames; first += step) {
+    const frames = Math.min(step, facts.frames - first);
+    const at = facts.dataOffset + first * facts.blockAlign;
+    const bytes = await source.read(at, at + frames * facts.blockAlign);
+    if (bytes.length < frames * facts.blockAlign) {
+      throw new WavError('cut-off', 'This file became shorter while it was read; copy it again.');
+    }
+    yield { bytes, frames };
+  }
+}

@@ -1,0 +1,61 @@
+import { assertBetween, assertPositive } from '../assert';
+
+export type WavBitDepth = 16 | 24 | 'float32';
+
+export interface WavHeaderOptions {
+  readonly channels: number;
+  readonly sampleRateHz: number;
+  readonly bitDepth: WavBitDepth;
+  readonly frames: number;
+}
+
+/** The largest size that fits a RIFF header (32 bits). */
+const largestRiffBytes = 0xffffffff;
+
+/** @returns bytes of one sample in a file of this depth */
+export function sampleBytes(bitDepth: WavBitDepth): number {
+  return bitDepth === 'float32' ? 4 : bitDepth / 8;
+}
+
+/**
+ * The header that stands before the frames of a WAV file: 44 bytes for 16 and 24 bits, 58 for float (with `fact`).
+ *
+ * @returns bytes to be followed by `frames` frames, and one 0 byte where their size is odd
+ * @throws {SignalError} no channel, a rate of 0, or more than 4 GiB
+ * @see learn.microsoft.com mmreg.h, WAVEFORMATEX
+ */
+export function wavHeader(options: WavHeaderOptions): Uint8Array {
+  const { channels, sampleRateHz, bitDepth, frames } = options;
+  assertBetween(channels, 1, 0xffff, 'channels');
+  assertPositive(sampleRateHz, 'sampleRateHz');
+  const isFloat = bitDepth === 'float32';
+  const headerBytes = isFloat ? 58 : 44;
+  const blockAlign = channels * sampleBytes(bitDepth);
+  const dataBytes = frames * blockAlign;
+  const riffBytes = headerBytes - 8 + dataBytes + (dataBytes % 2);
+  assertBetween(riffBytes, 0, largestRiffBytes, 'size of the file in bytes');
+
+  const view = new DataView(new ArrayBuffer(headerBytes));
+  text(view, 0, 'RIFF');
+  view.setUint32(4, riffBytes, true);
+  text(view, 8, 'WAVEfmt ');
+  view.setUint32(16, isFloat ? 18 : 16, true);
+  view.setUint16(20, isFloat ? 3 : 1, true);
+  view.setUint16(22, channels, true);
+  view.setUint32(24, sampleRateHz, true);
+  view.setUint32(28, sampleRateHz * blockAlign, true);
+  view.setUint16(32, blockAlign, true);
+  view.setUint16(34, sampleBytes(bitDepth) * 8, true);
+  if (isFloat) {
+    text(view, 38, 'fact');
+    view.setUint32(42, 4, true);
+    view.setUint32(46, frames, true);
+  }
+  text(view, headerBytes - 8, 'data');
+  view.setUint32(headerBytes - 4, dataBytes, true);
+  return new Uint8Array(view.buffer);
+}
+
+function text(view: DataView, offset: number, ascii: string): void {
+  for (let i = 0; i < ascii.length; i++) view.setUint8(offset + i, ascii.charCodeAt(i));
+}
