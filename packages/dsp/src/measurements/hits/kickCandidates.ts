@@ -1,0 +1,111 @@
+import { butterworthBand } from '../filters/butterworth';
+import { createHopEnergy, HOP_MS, hopSamples } from './hopMeter';
+import { createLevelHistogram, flooredPowerDb } from './levelHistogram';
+import { createRiseFinder } from './riseFinder';
+
+/** A place where the kick microphone's low band rises like a hit. */
+export interface KickCandidate {
+  /** Where the low band rises most steeply; some milliseconds after the hit began. */
+  readonly atSample: number;
+  /** Highest 30–150 Hz level of the kick microphone in the 60 ms after the rise began, dB. */
+  readonly kickDb: number;
+  /** The same of the overhead. */
+  readonly overheadDb: number;
+}
+
+export interface KickCandidates {
+  readonly candidates: readonly KickCandidate[];
+  /** 10th percentile of the kick microphone's 30–150 Hz level, dB. */
+  readonly floorDb: number;
+}
+
+export interface KickCandidateFinder {
+  /** The same stretch of both microphones. */
+  push(kick: Float32Array, overhead: Float32Array): void;
+  result(): KickCandidates;
+}
+
+/** The band a kick is found in (section 3). */
+const LOW_HZ = 30;
+const HIGH_HZ = 150;
+/** A rise of more than 6 dB in 30 ms; tried on 2,231 real channels. */
+const RISE = { riseDb: 6, withinMs: 30 };
+/**
+ * About half a period of 30 Hz, so that the level hardly ripples with the wave itself. Tried from 8 to 36 ms on real hits
+ * strung to sixteenths: 8 ms takes ringing for hits, from 24 ms on hits 68 ms apart begin to be missed.
+ */
+const WINDOW_MS = 16;
+const PEAK_AFTER_HOPS = 60 / HOP_MS;
+const FLOOR_SHARE = 0.1;
+
+interface OpenCandidate {
+  readonly startHop: number;
+  steepestHop: number;
+  steepest: number;
+  kickDb: number;
+  overheadDb: number;
+}
+
+/**
+ * Finds where kick hits may be, in one pass over both microphones and with memory for nothing but the candidates.
+ *
+ * Which of them are hits is decided by {@link selectKicks} once the whole take is known.
+ */
+export function createKickCandidates(sampleRateHz: number): KickCandidateFinder {
+  const sections = butterworthBand({ sampleRateHz, lowHz: LOW_HZ, highHz: HIGH_HZ });
+  const meters = [createHopEnergy(sampleRateHz, sections), createHopEnergy(sampleRateHz, sections)];
+  const kickRises = createRiseFinder({ windowMs: WINDOW_MS, ...RISE });
+  const overheadLevel = createRiseFinder({ windowMs: WINDOW_MS, ...RISE });
+  const histogram = createLevelHistogram();
+  const candidates: KickCandidate[] = [];
+  const samplesPerHop = hopSamples(sampleRateHz);
+  let open: OpenCandidate | null = null;
+  let hop = 0;
+  const close = (): void => {
+    if (!open) return;
+    const { kickDb, overheadDb, steepestHop } = open;
+    candidates.push({ atSample: steepestHop * samplesPerHop, kickDb, overheadDb });
+    open = null;
+  };
+  const next = (kickPower: number, overheadPower: number): void => {
+    const rise = kickRises.push(kickPower);
+    const overheadDb = overheadLevel.push(overheadPower).levelDb;
+    histogram.add(rise.levelDb);
+    if (rise.begins || (open && hop - open.startHop > PEAK_AFTER_HOPS)) close();
+    if (rise.begins) {
+      open = { ...nothingYet, startHop: hop, steepestHop: hop };
+    }
+    if (open) follow(open, { hop, overheadDb, ...rise });
+    hop += 1;
+  };
+  return {
+    push(kick, overhead) {
+      const kickHops = meters[0].push(kick);
+      const overheadHops = meters[1].push(overhead);
+      kickHops.forEach((power, index) => next(power, overheadHops[index]));
+    },
+    result() {
+      close();
+      return { candidates, floorDb: histogram.percentileDb(FLOOR_SHARE) };
+    },
+  };
+}
+
+const nothingYet = { steepest: 0, kickDb: flooredPowerDb(0), overheadDb: flooredPowerDb(0) };
+
+interface Now {
+  readonly hop: number;
+  readonly levelDb: number;
+  readonly overheadDb: number;
+  readonly rising: boolean;
+  readonly addedPower: number;
+}
+
+function follow(open: OpenCandidate, now: Now): void {
+  open.kickDb = Math.max(open.kickDb, now.levelDb);
+  open.overheadDb = Math.max(open.overheadDb, now.overheadDb);
+  if (now.rising && now.addedPower > open.steepest) {
+    open.steepest = now.addedPower;
+    open.steepestHop = now.hop;
+  }
+}

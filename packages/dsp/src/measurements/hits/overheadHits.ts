@@ -1,0 +1,157 @@
+import type { HitKind } from '../../facts';
+import { butterworthBand } from '../filters/butterworth';
+import { median } from '../statistics';
+import { createHopEnergy, createHopPeak, HOP_MS, hopSamples } from './hopMeter';
+import { createLevelHistogram, flooredPowerDb } from './levelHistogram';
+import { createRiseFinder } from './riseFinder';
+
+/** Something struck, as the overhead hears it. */
+export interface OverheadHit {
+  readonly atSample: number;
+  readonly kind: Exclude<HitKind, 'kick'>;
+  readonly levelDb: number;
+  /** Largest |x| of each microphone in the 100 ms after, linear. */
+  readonly kickPeak: number;
+  readonly overheadPeak: number;
+}
+
+export interface OverheadHitFinder {
+  /** The same stretch of both microphones. */
+  push(kick: Float32Array, overhead: Float32Array): void;
+  /** @returns in order of time; kick hits are among them */
+  result(): OverheadHit[];
+}
+
+/** Bands and limits of section 3: over 12 dB a drum, under 0 dB a cymbal, between them told as mixed. */
+const BODY_BAND = { lowHz: 100, highHz: 1000 };
+const BRIGHT_BAND = { lowHz: 5000, highHz: 15000 };
+const DRUM_OVER_DB = 12;
+const CYMBAL_UNDER_DB = 0;
+/** Below this rate too little of the bright band is left to judge by. */
+const LOWEST_RATE_FOR_KINDS_HZ = 32000;
+/** Our choice, simple on purpose: a rise of more than 6 dB in 20 ms, as a stick makes it and ringing seldom does. */
+const RISE = { windowMs: 10, riseDb: 6, withinMs: 20 };
+/** A much softer rise this soon after a hit is that hit's own ringing, unless the bright band rises with it. */
+const RINGING_WITHIN_HOPS = 400 / HOP_MS;
+const RINGING_BELOW_DB = 6;
+const BRIGHT_WITHIN_HOPS = 20 / HOP_MS;
+const OVER_FLOOR_DB = 15;
+const BELOW_REFERENCE_DB = 30;
+const REFERENCE_SHARE = 0.25;
+const FOLLOW_HOPS = 100 / HOP_MS;
+const APART_HOPS = 50 / HOP_MS;
+
+interface OpenHit {
+  readonly startHop: number;
+  body: number;
+  bright: number;
+  levelDb: number;
+  kickPeak: number;
+  overheadPeak: number;
+  /** True where the bright band rose too, as it does under a stick or a beater. */
+  struck: boolean;
+}
+
+const nothingYet = {
+  body: 0,
+  bright: 0,
+  levelDb: flooredPowerDb(0),
+  kickPeak: 0,
+  overheadPeak: 0,
+  struck: false,
+};
+
+/** Finds what the overhead hears struck, in the one pass over both microphones; memory only for the hits. */
+export function createOverheadHits(sampleRateHz: number): OverheadHitFinder {
+  const body = createHopEnergy(sampleRateHz, butterworthBand({ sampleRateHz, ...BODY_BAND }));
+  const bright = createHopEnergy(sampleRateHz, butterworthBand({ sampleRateHz, ...BRIGHT_BAND }));
+  const peaks = [createHopPeak(sampleRateHz), createHopPeak(sampleRateHz)];
+  const rises = createRiseFinder(RISE);
+  const brightRises = createRiseFinder(RISE);
+  const histogram = createLevelHistogram();
+  const hits: OpenHit[] = [];
+  let hop = 0;
+  const next = (powers: HopPowers): void => {
+    const rise = rises.push(powers.body + powers.bright);
+    histogram.add(rise.levelDb);
+    const brightRising = brightRises.push(powers.bright).rising;
+    const last = hits.at(-1);
+    if (rise.begins && (!last || hop - last.startHop >= APART_HOPS)) {
+      hits.push({ ...nothingYet, startHop: hop });
+    }
+    const open = hits.at(-1);
+    if (open && hop - open.startHop < FOLLOW_HOPS)
+      follow(open, { ...powers, hop, brightRising, levelDb: rise.levelDb });
+    hop += 1;
+  };
+  return {
+    push(kick, overhead) {
+      const bodyHops = body.push(overhead);
+      const brightHops = bright.push(overhead);
+      const kickPeaks = peaks[0].push(kick);
+      const overheadPeaks = peaks[1].push(overhead);
+      for (let i = 0; i < bodyHops.length; i += 1) {
+        next({
+          body: bodyHops[i],
+          bright: brightHops[i],
+          kickPeak: kickPeaks[i],
+          overheadPeak: overheadPeaks[i],
+        });
+      }
+    },
+    result: () => select(hits, histogram.percentileDb(0.1)).map((hit) => told(hit, sampleRateHz)),
+  };
+}
+
+interface HopPowers {
+  readonly body: number;
+  readonly bright: number;
+  readonly kickPeak: number;
+  readonly overheadPeak: number;
+}
+
+function follow(
+  open: OpenHit,
+  now: HopPowers & { readonly hop: number; readonly levelDb: number; readonly brightRising: boolean },
+): void {
+  if (now.brightRising && now.hop - open.startHop <= BRIGHT_WITHIN_HOPS) open.struck = true;
+  open.body += now.body;
+  open.bright += now.bright;
+  open.levelDb = Math.max(open.levelDb, now.levelDb);
+  open.kickPeak = Math.max(open.kickPeak, now.kickPeak);
+  open.overheadPeak = Math.max(open.overheadPeak, now.overheadPeak);
+}
+
+function select(hits: readonly OpenHit[], floorDb: number): OpenHit[] {
+  const sorted = hits.map((hit) => hit.levelDb).sort((a, b) => b - a);
+  const referenceDb = median(sorted.slice(0, Math.ceil(sorted.length * REFERENCE_SHARE))) ?? 0;
+  const limitDb = Math.max(floorDb + OVER_FLOOR_DB, referenceDb - BELOW_REFERENCE_DB);
+  let lastStruck: OpenHit | null = null;
+  return hits.filter((hit) => {
+    if (hit.levelDb < limitDb || (!hit.struck && lastStruck && isRinging(hit, lastStruck))) return false;
+    lastStruck = hit;
+    return true;
+  });
+}
+
+function isRinging(hit: OpenHit, of: OpenHit): boolean {
+  return hit.startHop - of.startHop < RINGING_WITHIN_HOPS && hit.levelDb < of.levelDb - RINGING_BELOW_DB;
+}
+
+function told(hit: OpenHit, sampleRateHz: number): OverheadHit {
+  return {
+    atSample: hit.startHop * hopSamples(sampleRateHz),
+    kind:
+      sampleRateHz < LOWEST_RATE_FOR_KINDS_HZ
+        ? 'mixed'
+        : kindOf(flooredPowerDb(hit.body) - flooredPowerDb(hit.bright)),
+    levelDb: hit.levelDb,
+    kickPeak: hit.kickPeak,
+    overheadPeak: hit.overheadPeak,
+  };
+}
+
+function kindOf(bodyOverBrightDb: number): OverheadHit['kind'] {
+  if (bodyOverBrightDb > DRUM_OVER_DB) return 'drum';
+  return bodyOverBrightDb < CYMBAL_UNDER_DB ? 'cymbal' : 'mixed';
+}

@@ -1,0 +1,54 @@
+import { HOP_MS } from './hopMeter';
+import { flooredPowerDb } from './levelHistogram';
+
+export interface RiseOptions {
+  /** Span the level is averaged over. */
+  readonly windowMs: number;
+  /** The level must rise by more than `riseDb` … */
+  readonly riseDb: number;
+  /** … within this time. */
+  readonly withinMs: number;
+}
+
+/** What a rise finder says after each hop. */
+export interface RiseState {
+  /** Level now, dB. */
+  readonly levelDb: number;
+  /** True at the first hop of a rise. */
+  readonly begins: boolean;
+  /** True while the level is rising by more than asked. */
+  readonly rising: boolean;
+  /** How much power the last two hops added; largest where the rise is steepest. */
+  readonly addedPower: number;
+}
+
+/** Watches one band's power hop by hop for rises. */
+export interface RiseFinder {
+  push(hopPower: number): RiseState;
+}
+
+/** Steepness is looked at over this many hops. */
+const STEEPNESS_HOPS = 2;
+
+/** Before the first sample there is silence, so a take that begins with a hit has its rise too. */
+export function createRiseFinder({ windowMs, riseDb, withinMs }: RiseOptions): RiseFinder {
+  const window = new Float64Array(Math.max(1, Math.round(windowMs / HOP_MS)));
+  const past = new Float64Array(Math.max(1, Math.round(withinMs / HOP_MS)));
+  let hop = 0;
+  let wasRising = false;
+  return {
+    push(hopPower) {
+      window[hop % window.length] = hopPower;
+      const power = window.reduce((sum, value) => sum + value, 0) / window.length;
+      const before = past[hop % past.length];
+      const justBefore = past[(hop - STEEPNESS_HOPS + past.length * STEEPNESS_HOPS) % past.length];
+      past[hop % past.length] = power;
+      hop += 1;
+      const levelDb = flooredPowerDb(power);
+      const rising = levelDb - flooredPowerDb(before) > riseDb;
+      const begins = rising && !wasRising;
+      wasRising = rising;
+      return { levelDb, begins, rising, addedPower: power - justBefore };
+    },
+  };
+}
