@@ -5,6 +5,6 @@ export * from './decibel';
 export * from './wav/bytesSource';
 export * from './wav/encodeWav';
 export * from './wav/openWav';
-export * from './wav/wavError';
+export { WavError, type WavRefusal } from './wav/wavError';
 export * from './wav/wavFacts';
 export * from './wav/wavHeader';

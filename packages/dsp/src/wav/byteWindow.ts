@@ -25,9 +25,9 @@ export function byteWindow(source: ByteSource): ByteWindow {
       const end = Math.min(start + length, source.sizeBytes);
       if (end <= start) return new DataView(new ArrayBuffer(0));
       if (start < windowStart || end > windowStart + bytes.length) {
-        bytes = Uint8Array.from(
-          await source.read(start, Math.min(start + Math.max(length, windowBytes), source.sizeBytes)),
-        );
+        bytes = (
+          await source.read(start, Math.min(start + Math.max(length, windowBytes), source.sizeBytes))
+        ).slice();
         windowStart = start;
       }
       const from = start - windowStart;

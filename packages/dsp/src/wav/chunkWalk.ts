@@ -1,5 +1,5 @@
 import { ascii, type ByteWindow } from './byteWindow';
-import { WavError } from './wavError';
+import { WavError, cutOffHeader } from './wavError';
 
 export interface WavChunks {
   /** Body of the `fmt ` chunk, at most its first 40 bytes. */
@@ -47,6 +47,7 @@ export async function walkChunks(bytes: ByteWindow): Promise<WavChunks> {
     if (chunk.id === 'ds64') longDataBytes = await dataBytesOf64(bytes, chunk);
     if (chunk.id === 'fmt ' && !format) {
       const body = await bytes.at(chunk.bodyStart, Math.min(chunk.declaredBytes, 40));
+      if (body.byteLength < 16) throw cutOffHeader();
       format = new DataView(body.buffer.slice(body.byteOffset, body.byteOffset + body.byteLength));
     }
     if (chunk.id === 'data' && !data) data = await dataExtent(bytes, chunk, longDataBytes);
@@ -115,5 +116,5 @@ function missing(hasFormat: boolean, hasData: boolean): WavError {
   if (hasFormat && !hasData) {
     return new WavError('no-frames', 'This WAV holds a header but no sound; export the take again.');
   }
-  return new WavError('cut-off', "This WAV's header is cut off; copy the file again or export it anew.");
+  return cutOffHeader();
 }

@@ -44,5 +44,6 @@ function mpegStream(head: DataView): string | null {
   if (head.byteLength < 2 || head.getUint8(0) !== 0xff) return null;
   const second = head.getUint8(1);
   if ((second & 0xf6) === 0xf0) return 'an AAC file';
-  return (second & 0xe0) === 0xe0 && (second & 0x06) !== 0 ? 'an MP3 file' : null;
+  // Layers III and II only: 0xFF 0xFE would be layer I, but also opens every UTF-16 text.
+  return (second & 0xe0) === 0xe0 && [0x02, 0x04].includes(second & 0x06) ? 'an MP3 file' : null;
 }

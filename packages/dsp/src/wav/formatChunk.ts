@@ -1,5 +1,5 @@
 import type { SampleFormat } from './wavFacts';
-import { WavError } from './wavError';
+import { WavError, cutOffHeader } from './wavError';
 
 /** Limits of what is read (design: 8 kHz–384 kHz, 1–32 channels). */
 export const wavLimits = { lowestRateHz: 8000, highestRateHz: 384_000, channels: 32 } as const;
@@ -33,7 +33,7 @@ const guidTail = [0, 0, 0, 0, 0x10, 0, 0x80, 0, 0, 0xaa, 0, 0x38, 0x9b, 0x71];
  * @throws {WavError} what can't be read, by name
  */
 export function sampleFormat(body: DataView): SampleFormat {
-  if (body.byteLength < 16) throw cutOff();
+  if (body.byteLength < 16) throw cutOffHeader();
   const channels = body.getUint16(2, true);
   const sampleRateHz = body.getUint32(4, true);
   const blockAlign = body.getUint16(12, true);
@@ -49,7 +49,7 @@ export function sampleFormat(body: DataView): SampleFormat {
 function formatTag(body: DataView): number {
   const tag = body.getUint16(0, true);
   if (tag !== extensibleTag) return tag;
-  if (body.byteLength < 40) throw cutOff();
+  if (body.byteLength < 40) throw cutOffHeader();
   if (!guidTail.every((byte, i) => body.getUint8(26 + i) === byte)) {
     throw new WavError(
       'encoding',
@@ -117,8 +117,4 @@ function validBitsOf(body: DataView, encoding: 'pcm' | 'float', declaredBits: nu
   if (encoding === 'float' || body.getUint16(0, true) !== extensibleTag) return declaredBits;
   const valid = body.getUint16(18, true);
   return valid > 0 && valid <= declaredBits ? valid : declaredBits;
-}
-
-function cutOff(): WavError {
-  return new WavError('cut-off', "This WAV's header is cut off; copy the file again or export it anew.");
 }

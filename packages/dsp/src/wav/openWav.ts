@@ -5,7 +5,7 @@ import { walkChunks } from './chunkWalk';
 import { decodeSamples } from './decodeSamples';
 import { foreignFormat } from './foreignFormat';
 import { sampleFormat } from './formatChunk';
-import { WavError } from './wavError';
+import { WavError, cutOffHeader } from './wavError';
 import type { SampleFormat, WavFacts } from './wavFacts';
 
 export interface WavFile {
@@ -37,12 +37,12 @@ export async function openWav(source: ByteSource): Promise<WavFile> {
   const container = ascii(head, 0, 4);
   if (!['RIFF', 'RF64', 'BW64'].includes(container)) throw foreignFormat(head);
   if (head.byteLength < 12) {
-    throw new WavError('cut-off', "This WAV's header is cut off; copy the file again or export it anew.");
+    throw cutOffHeader();
   }
   if (ascii(head, 8, 4) !== 'WAVE') {
     throw new WavError(
       'not-wav',
-      `This is a ${container} file but no WAV; export the take as WAV, 24-bit if you can.`,
+      `This ${container} file holds no WAV sound; export the take as WAV, 24-bit if you can.`,
     );
   }
   const chunks = await walkChunks(bytes);

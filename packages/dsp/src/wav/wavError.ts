@@ -25,3 +25,8 @@ export class WavError extends Error {
     super(message);
   }
 }
+
+/** @returns the refusal of a file that ends before its header does */
+export function cutOffHeader(): WavError {
+  return new WavError('cut-off', "This WAV's header is cut off; copy the file again or export it anew.");
+}
