@@ -14,14 +14,15 @@ export function SignedIn() {
   return <Navigate to="/sign-in" replace state={{ from: pathname + search }} />;
 }
 
-/** Join and sign in: someone already signed in is taken on to where they wanted to go. */
+/** Join and sign in: someone signed in is taken on to where they wanted to go; who just joined, to the first take. */
 export function GuestOnly() {
   const { me, error, retry } = useMe();
-  const state = useLocation().state as { from?: string } | null;
-  if (me) return <Navigate to={state?.from ?? '/takes'} replace />;
+  const { pathname, state: given } = useLocation();
+  const state = given as { from?: string } | null;
+  if (me) return <Navigate to={state?.from ?? (pathname === '/join' ? '/takes/new' : '/takes')} replace />;
+  if (me === null) return <Outlet />;
   if (error) return <NoAnswer message={error.message} retry={retry} />;
-  if (me === undefined) return <PageLoading />;
-  return <Outlet />;
+  return <PageLoading />;
 }
 
 function NoAnswer({ message, retry }: { message: string; retry: () => void }) {

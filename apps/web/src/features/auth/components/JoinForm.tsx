@@ -1,0 +1,63 @@
+import { chakra } from '@chakra-ui/react';
+import { joinRequest } from '@thudline/contracts';
+import { PasswordField } from '../../../components/PasswordField';
+import { TextField } from '../../../components/TextField';
+import { useAuthActions } from '../hooks/useAuthActions';
+import { useAuthForm } from '../hooks/useAuthForm';
+import { SubmitRow } from './SubmitRow';
+
+export function JoinForm() {
+  const { join } = useAuthActions();
+  const { form, values, errors, formError, busy, set, submit } = useAuthForm({
+    schema: joinRequest,
+    initial: { name: '', email: '', password: '' },
+    send: join,
+    place: (error) =>
+      error.code === 'email-taken' ? { email: error.message } : (error.details?.fields ?? null),
+  });
+  return (
+    <chakra.form
+      ref={form}
+      noValidate
+      aria-label="Join"
+      display="grid"
+      gap="16px"
+      onSubmit={(event) => {
+        event.preventDefault();
+        void submit();
+      }}
+    >
+      <TextField
+        label="Name"
+        name="name"
+        autoComplete="name"
+        value={values.name}
+        onChange={(name) => set('name', name)}
+        error={errors.name}
+      />
+      <TextField
+        label="E-mail"
+        name="email"
+        type="email"
+        autoComplete="username"
+        autoCapitalize="none"
+        spellCheck={false}
+        value={values.email}
+        onChange={(email) => set('email', email)}
+        error={errors.email}
+      />
+      <PasswordField
+        label="Password"
+        name="password"
+        autoComplete="new-password"
+        hint="At least 10 characters"
+        value={values.password}
+        onChange={(password) => set('password', password)}
+        error={errors.password}
+      />
+      <chakra.div marginTop="6px">
+        <SubmitRow label="Join" busyLabel="Joining…" busy={busy} error={formError} />
+      </chakra.div>
+    </chakra.form>
+  );
+}

@@ -1,0 +1,63 @@
+import { chakra } from '@chakra-ui/react';
+import { signInRequest } from '@thudline/contracts';
+import { CheckBox } from '../../../components/CheckBox';
+import { PasswordField } from '../../../components/PasswordField';
+import { TextField } from '../../../components/TextField';
+import { useAuthActions } from '../hooks/useAuthActions';
+import { useAuthForm } from '../hooks/useAuthForm';
+import { SubmitRow } from './SubmitRow';
+
+/** Never says which half is wrong: that would tell a stranger who has an account. */
+const wrongSignIn = 'E-mail and password don’t go together. Try again.';
+
+export function SignInForm() {
+  const { signIn } = useAuthActions();
+  const { form, values, errors, formError, busy, set, submit } = useAuthForm({
+    schema: signInRequest,
+    initial: { email: '', password: '', stay: true },
+    send: signIn,
+    place: (error) => {
+      if (error.code === 'wrong-sign-in') return { password: wrongSignIn };
+      return error.details?.fields ?? null;
+    },
+  });
+  return (
+    <chakra.form
+      ref={form}
+      noValidate
+      aria-label="Sign in"
+      display="grid"
+      gap="16px"
+      onSubmit={(event) => {
+        event.preventDefault();
+        void submit();
+      }}
+    >
+      <TextField
+        label="E-mail"
+        name="email"
+        type="email"
+        autoComplete="username"
+        autoCapitalize="none"
+        spellCheck={false}
+        value={values.email}
+        onChange={(email) => set('email', email)}
+        error={errors.email}
+      />
+      <PasswordField
+        label="Password"
+        name="password"
+        autoComplete="current-password"
+        value={values.password}
+        onChange={(password) => set('password', password)}
+        error={errors.password}
+      />
+      <chakra.div marginTop="2px" marginBottom="4px">
+        <CheckBox checked={values.stay} onChange={(stay) => set('stay', stay)}>
+          Stay signed in on this device
+        </CheckBox>
+      </chakra.div>
+      <SubmitRow label="Sign in" busyLabel="Signing in…" busy={busy} error={formError} />
+    </chakra.form>
+  );
+}
