@@ -8,3 +8,4 @@ export * from './wav/openWav';
 export { WavError, type WavRefusal } from './wav/wavError';
 export * from './wav/wavFacts';
 export * from './wav/wavHeader';
+export * from './measurements/level/trackLevel';

@@ -1,0 +1,44 @@
+import { assertBetween, assertPositive } from '../../assert';
+import type { TrackFacts } from '../../facts';
+import { createClipping } from './clipping';
+import { createNoiseFloor } from './noiseFloor';
+import { createPeakAndPower } from './peakAndPower';
+
+export interface TrackLevelOptions {
+  readonly sampleRateHz: number;
+  /** One quantisation step of the file (2^-15 for 16-bit); null for float files. */
+  readonly quantisationStep: number | null;
+}
+
+export type TrackLevelFacts = Omit<TrackFacts, 'role' | 'loudestHitDbfs'>;
+
+/** Sees a track once, in blocks of any size; the figures don't depend on how it was cut. */
+export interface TrackLevel {
+  /** @throws {SignalError} `not-finite` */
+  push(block: Float32Array): void;
+  result(): TrackLevelFacts;
+}
+
+/**
+ * Every level of one microphone that needs no hits: peak, power, offset, clipping and noise floor, in one pass.
+ *
+ * @throws {SignalError} a rate or a step that can't be
+ * @see 2-measurements.md section 2, whose names and definitions these are
+ */
+export function createTrackLevel(options: TrackLevelOptions): TrackLevel {
+  assertPositive(options.sampleRateHz, 'sampleRateHz');
+  if (options.quantisationStep !== null)
+    assertBetween(options.quantisationStep, 2 ** -31, 0.5, 'quantisationStep');
+  const peakAndPower = createPeakAndPower(options);
+  const clipping = createClipping(options);
+  const noiseFloor = createNoiseFloor(options);
+
+  return {
+    push(block) {
+      peakAndPower.push(block);
+      clipping.push(block);
+      noiseFloor.push(block);
+    },
+    result: () => ({ ...peakAndPower.result(), clipping: clipping.result(), ...noiseFloor.result() }),
+  };
+}
