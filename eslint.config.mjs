@@ -47,7 +47,7 @@ export default tseslint.config(
   zone(['packages/dsp/**/*.ts'], [...ours(), 'node:*', 'fs', 'path']),
   zone(['packages/contracts/**/*.ts'], ours()),
   zone(['packages/measure/**/*.ts'], ours('contracts', 'dsp')),
-  zone(['fixtures/**/*.ts'], ours('dsp')),
+  zone(['fixtures/**/*.ts'], ours('contracts', 'dsp')),
   zone(['apps/local-services/**/*.ts'], ours()),
   zone(['apps/api/src/**/*.ts'], ours('contracts', 'dsp', 'measure')),
   zone(['apps/web/src/**/*.{ts,tsx}'], ours('contracts', 'dsp')),
