@@ -4,6 +4,9 @@ import { WavError, cutOffHeader } from './wavError';
 /** Limits of what is read (design: 8 kHz–384 kHz, 1–32 channels). */
 export const wavLimits = { lowestRateHz: 8000, highestRateHz: 384_000, channels: 32 } as const;
 
+/** Fewer bits a sample are no recording of a drum, but a damaged header. */
+const leastBits = 8;
+
 const pcmTag = 0x0001;
 const floatTag = 0x0003;
 const extensibleTag = 0xfffe;
@@ -97,7 +100,11 @@ function containerBits(format: {
 }): number {
   const bytes = Math.ceil(format.declaredBits / 8);
   const readable = format.encoding === 'pcm' ? [1, 2, 3, 4] : [4, 8];
-  if (!readable.includes(bytes) || (format.encoding === 'float' && format.declaredBits % 8 !== 0)) {
+  if (
+    !readable.includes(bytes) ||
+    format.declaredBits < leastBits ||
+    (format.encoding === 'float' && format.declaredBits % 8 !== 0)
+  ) {
     throw new WavError(
       'encoding',
       `This WAV holds ${format.declaredBits}-bit ${format.encoding === 'pcm' ? 'PCM' : 'float'} samples; export it as 24-bit PCM instead.`,
@@ -116,5 +123,5 @@ function containerBits(format: {
 function validBitsOf(body: DataView, encoding: 'pcm' | 'float', declaredBits: number): number {
   if (encoding === 'float' || body.getUint16(0, true) !== extensibleTag) return declaredBits;
   const valid = body.getUint16(18, true);
-  return valid > 0 && valid <= declaredBits ? valid : declaredBits;
+  return valid >= leastBits && valid <= declaredBits ? valid : declaredBits;
 }

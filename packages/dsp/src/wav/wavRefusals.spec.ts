@@ -33,6 +33,7 @@ const refusals: [string, Uint8Array, string, RegExp][] = [
     /unknown kind/,
   ],
   ['36-bit samples', riff([fmt({ bits: 36 }), sound]), 'encoding', /36-bit/],
+  ['4-bit samples', riff([fmt({ bits: 4 }), sound]), 'encoding', /4-bit/],
   ['0-bit samples', riff([fmt({ bits: 0 }), sound]), 'encoding', /0-bit/],
   ['16-bit float', riff([fmt({ bits: 16, tag: 3 }), sound]), 'encoding', /16-bit float/],
   ['65,535 channels', riff([fmt({ channels: 65535 }), sound]), 'channels', /65535 channels/],
