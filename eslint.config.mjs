@@ -53,7 +53,7 @@ export default tseslint.config(
   zone(['apps/web/src/**/*.{ts,tsx}'], ours('contracts', 'dsp')),
   { files: ['**/*.spec.ts', '**/*.spec.tsx', '**/*.e2e-spec.ts'], rules: { 'no-restricted-imports': 'off' } },
   {
-    files: ['**/vite.config.ts', '**/playwright.config.ts', '**/jest*.config.ts'],
+    files: ['**/vite.config.ts', '**/playwright.config.ts', '**/e2e/harness/startApplication.ts'],
     rules: { 'import-x/no-default-export': 'off' },
   },
 );
