@@ -9,3 +9,5 @@ export { WavError, type WavRefusal } from './wav/wavError';
 export * from './wav/wavFacts';
 export * from './wav/wavHeader';
 export * from './measurements/level/trackLevel';
+export * from './roles/guessRoles';
+export * from './roles/lowEndRatio';
