@@ -17,8 +17,9 @@ export function SignedIn() {
 /** Join and sign in: someone signed in is taken on to where they wanted to go; who just joined, to the first take. */
 export function GuestOnly() {
   const { me, error, retry } = useMe();
-  const { pathname, state: given } = useLocation();
-  const state = given as { from?: string } | null;
+  const location = useLocation();
+  const { pathname } = location;
+  const state = location.state as { from?: string } | null;
   if (me) return <Navigate to={state?.from ?? (pathname === '/join' ? '/takes/new' : '/takes')} replace />;
   if (me === null) return <Outlet />;
   if (error) return <NoAnswer message={error.message} retry={retry} />;

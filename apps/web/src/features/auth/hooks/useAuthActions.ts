@@ -8,17 +8,17 @@ export function useAuthActions() {
   const clear = () => mutate((key) => key !== paths.me, undefined, { revalidate: false });
 
   return {
-    async join(body: JoinRequest) {
+    join: async (body: JoinRequest) => {
       const me = await requestJson(paths.join, meResponse, { method: 'POST', body });
       await clear();
       await mutate(paths.me, me, { revalidate: false });
     },
-    async signIn(body: SignInRequest) {
+    signIn: async (body: SignInRequest) => {
       const me = await requestJson(paths.signIn, meResponse, { method: 'POST', body });
       await clear();
       await mutate(paths.me, me, { revalidate: false });
     },
-    async signOut() {
+    signOut: async () => {
       await requestNothing(paths.signOut, { method: 'POST' });
       await mutate(paths.me, null, { revalidate: false });
       await clear();

@@ -1,0 +1,121 @@
+import { Box, Flex, chakra } from '@chakra-ui/react';
+import type { FindingStatus, TakeListItem, Target } from '@thudline/contracts';
+import type { ReactNode, Ref } from 'react';
+import { TextButton } from '../../../components/Button';
+import { StatusMark } from '../../../components/StatusMark';
+import { takeName, unmeasuredWords } from '../rowWords';
+import { LevelPicture } from './LevelPicture';
+import { LowEndPicture } from './LowEndPicture';
+import { rowGrid, rowMinHeight } from './tableGrid';
+import { TakeCell } from './TakeCell';
+
+const statusWords: Record<FindingStatus, string> = {
+  good: 'Good',
+  watch: 'Watch',
+  fix: 'Fix',
+  'cannot-tell': 'Can’t tell',
+};
+
+/** One measured take, or one that could not be. */
+export function TakeRow({
+  take,
+  target,
+  now,
+  deleteRef,
+  onDelete,
+}: {
+  take: TakeListItem;
+  target: Target;
+  now: Date;
+  deleteRef?: Ref<HTMLButtonElement>;
+  onDelete: () => void;
+}) {
+  return (
+    <RuledRow>
+      <TakeCell take={take} now={now} />
+      <Says take={take} />
+      <Box role="cell" gridArea="level" position="relative" minHeight={{ base: '44px', lg: 'auto' }}>
+        <LevelPicture take={take} target={target} />
+      </Box>
+      <Box role="cell" gridArea="low" position="relative">
+        <LowEndPicture lowEndDb={take.lowEndDb} />
+      </Box>
+      <ActionCell>
+        <RowAction ref={deleteRef} aria-label={`delete ${takeName(take)}`} onClick={onDelete}>
+          delete
+        </RowAction>
+      </ActionCell>
+    </RuledRow>
+  );
+}
+
+export function RuledRow({ grid = rowGrid, children }: { grid?: object; children: ReactNode }) {
+  return (
+    <Box
+      role="row"
+      position="relative"
+      {...grid}
+      minHeight={rowMinHeight}
+      borderBottom="1px solid"
+      borderColor="rule"
+      paddingY={{ base: '10px', lg: 0 }}
+      _hover={{ bg: 'target' }}
+    >
+      {children}
+    </Box>
+  );
+}
+
+function Says({ take }: { take: TakeListItem }) {
+  const { status, strong, rest } = take.summary ?? {
+    status: 'fix' as const,
+    ...unmeasuredWords(take.measurement),
+  };
+  return (
+    <Flex
+      role="cell"
+      gridArea="says"
+      alignItems={{ base: 'flex-start', lg: 'center' }}
+      gap="10px"
+      paddingRight="16px"
+      paddingY={{ base: '6px', lg: '2px' }}
+      minWidth={0}
+      fontSize="16px"
+      lineHeight="21px"
+    >
+      <StatusMark status={status} sizePx={22} />
+      <chakra.span srOnly>{statusWords[status]}: </chakra.span>
+      <span>
+        {status !== 'good' && <b>{strong}</b>}
+        {status === 'good' && strong} {rest}
+      </span>
+    </Flex>
+  );
+}
+
+export function ActionCell({ children }: { children: ReactNode }) {
+  return (
+    <Flex
+      role="cell"
+      gridArea="action"
+      justifyContent="flex-end"
+      alignItems={{ base: 'flex-start', lg: 'center' }}
+    >
+      {children}
+    </Flex>
+  );
+}
+
+/** Lies above the row's link; its touch area is larger than the word. */
+export const RowAction = chakra(TextButton, {
+  base: {
+    position: 'relative',
+    zIndex: 1,
+    fontSize: 'caption',
+    color: 'ink.muted',
+    borderColor: 'transparent',
+    marginRight: { base: 0, lg: '12px' },
+    _hover: { color: 'ink', borderColor: 'currentColor' },
+    _after: { content: '""', position: 'absolute', inset: '-13px -12px' },
+  },
+});

@@ -1,0 +1,27 @@
+/**
+ * The columns of the takes table. On a wide page: take, what it says, hardest hit, low end, what can be done. On a
+ * narrow one each row stacks: take, sentence, then the two pictures side by side.
+ */
+export const rowGrid = {
+  display: 'grid',
+  gridTemplateColumns: {
+    base: 'minmax(0, 1.8fr) minmax(0, 1fr)',
+    lg: 'minmax(150px, 270px) minmax(190px, 1fr) 226px 128px 72px',
+  },
+  gridTemplateAreas: {
+    base: '"take action" "says says" "level low"',
+    lg: '"take says level low action"',
+  },
+} as const;
+
+/** A row that has something to say instead of pictures. */
+export const wideRowGrid = {
+  ...rowGrid,
+  gridTemplateAreas: {
+    base: '"take action" "says says"',
+    lg: '"take says says says action"',
+  },
+} as const;
+
+/** 48 px with its rule, as in every ruled table. */
+export const rowMinHeight = { base: 'auto', lg: '48px' } as const;
