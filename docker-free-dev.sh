@@ -2,6 +2,9 @@
 # Runs or tests Thudline on one machine, without containers. The parts are in apps/local-services/bin.
 set -Eeuo pipefail
 
+# Started in the background by another script, Ctrl-C's signal would be ignored, and bash can't undo that from inside.
+if [[ $(trap -p INT) == "trap -- '' SIGINT" ]]; then exec env --default-signal=INT "$BASH" "${BASH_SOURCE[0]}" "$@"; fi
+
 root=$(cd "$(dirname "${BASH_SOURCE[0]}")" && pwd -P)
 data=$root/.data
 parts=$root/apps/local-services/bin

@@ -8,6 +8,7 @@ stop_order=(tests web api worker local-services postgres)
 start_child() {
   local name=$1
   shift
+  : >"$log_dir/$name.log"
   setsid setpriv --pdeathsig TERM -- "$@" </dev/null >"$log_dir/$name.log" 2>&1 8>&- 9>&- &
   child_pid[$name]=$!
 }

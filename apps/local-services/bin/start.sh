@@ -103,7 +103,8 @@ watch_children() {
   local ended name code worker_starts=()
   while :; do
     code=0
-    wait -n -p ended "${child_pid[@]}" || code=$?
+    # Bash would print a line of its own about a child that was killed.
+    { wait -n -p ended "${child_pid[@]}" || code=$?; } 2>/dev/null
     for name in "${!child_pid[@]}"; do [[ ${child_pid[$name]} != "${ended:-}" ]] || break; done
     unset "child_pid[$name]"
     worker_starts+=("$SECONDS")
