@@ -1,0 +1,94 @@
+import type { ArrivalFacts, Swing } from '../../facts';
+import { butterworthBand } from '../filters/butterworth';
+import { filtered } from '../filters/filterChain';
+import { interquartileRange, median } from '../statistics';
+import { chooseArrival } from './chooseArrival';
+import { firstArrival, type FirstArrival } from './firstArrival';
+import { createPhaseTransform, PHASE_STRETCH_MS } from './phaseTransform';
+
+/** One kick hit in both microphones. */
+export interface HitStretch {
+  readonly kick: Float32Array;
+  readonly overhead: Float32Array;
+  /** Index of the hit's onset in both. */
+  readonly onsetAt: number;
+}
+
+export interface ArrivalMeter {
+  add(hit: HitStretch): void;
+  result(): ArrivalFacts;
+}
+
+/** What a {@link HitStretch} must hold around its onset for the arrival. */
+export const arrivalStretch = { beforeMs: 60, afterMs: 32 };
+
+/** Both microphones alike, so that the filter delays both alike (section 4). */
+const BAND = { lowHz: 100, highHz: 1500 };
+/** The onset is where the energy rises most, up to 8 ms after the sound began; an overhead is seldom 9 m away. */
+const FROM_MS = -20;
+const TO_MS = 30;
+/** Fewer hits than this whose beginning nothing hides, and the hidden ones are used as well. */
+const CLEAR_HITS_WANTED = 3;
+/** The first swing is told where this share of the hits agree on it; the share the verdict asks for too. */
+const SWING_SHARE = 0.75;
+
+interface HitArrival {
+  readonly kick: FirstArrival;
+  readonly overhead: FirstArrival;
+}
+
+/** Gathers how much later the overhead hears each kick hit, and tells what holds over all of them. */
+export function createArrivalMeter(sampleRateHz: number): ArrivalMeter {
+  const sections = butterworthBand({ sampleRateHz, ...BAND });
+  const phase = createPhaseTransform(sampleRateHz);
+  const samplesPerMs = sampleRateHz / 1000;
+  const arrivals: HitArrival[] = [];
+  let hits = 0;
+  let overheadSounds = false;
+  return {
+    add({ kick, overhead, onsetAt }) {
+      hits += 1;
+      const bands = { kick: filtered(kick, sections), overhead: filtered(overhead, sections) };
+      const range = {
+        sampleRateHz,
+        from: onsetAt + Math.round(FROM_MS * samplesPerMs),
+        to: onsetAt + Math.round(TO_MS * samplesPerMs),
+      };
+      const first = { kick: firstArrival(bands.kick, range), overhead: firstArrival(bands.overhead, range) };
+      if (first.kick && first.overhead) arrivals.push({ kick: first.kick, overhead: first.overhead });
+      overheadSounds ||= overhead.some((sample) => sample !== 0);
+      const start = onsetAt - Math.round(PHASE_STRETCH_MS.before * samplesPerMs);
+      const end = onsetAt + Math.round(PHASE_STRETCH_MS.after * samplesPerMs);
+      phase.add(
+        Float64Array.from(kick.subarray(start, end)),
+        Float64Array.from(overhead.subarray(start, end)),
+      );
+    },
+    result() {
+      const clear = arrivals.filter((arrival) => arrival.kick.clear && arrival.overhead.clear);
+      const used = clear.length >= CLEAR_HITS_WANTED ? clear : arrivals;
+      const delaysMs = used.map((arrival) => (arrival.overhead.at - arrival.kick.at) / samplesPerMs);
+      const chosen = chooseArrival({
+        hits,
+        overheadSounds,
+        first: { medianMs: median(delaysMs), iqrMs: interquartileRange(delaysMs), hits: used.length },
+        phase,
+      });
+      return {
+        ...chosen,
+        arrivalSamples: chosen.arrivalMs === null ? null : chosen.arrivalMs * samplesPerMs,
+        firstSwing: {
+          kick: commonSwing(used.map((arrival) => arrival.kick.swing)),
+          overhead: commonSwing(used.map((arrival) => arrival.overhead.swing)),
+        },
+      };
+    },
+  };
+}
+
+function commonSwing(swings: readonly Swing[]): Swing | null {
+  const up = swings.filter((swing) => swing === 'up').length;
+  if (swings.length === 0) return null;
+  if (up >= SWING_SHARE * swings.length) return 'up';
+  return swings.length - up >= SWING_SHARE * swings.length ? 'down' : null;
+}

@@ -1,0 +1,48 @@
+import type { TrackSource } from '../../trackSource';
+import type { KickCandidate } from './kickCandidates';
+import { onset, onsetStretch } from './onset';
+
+/** A kick hit read from both microphones around its onset. */
+export interface KickHitRead {
+  /** Where the onset lies in the file. */
+  readonly onsetSample: number;
+  readonly kick: Float32Array;
+  readonly overhead: Float32Array;
+  /** Where the onset lies in `kick` and `overhead`. */
+  readonly onsetAt: number;
+}
+
+export interface ReadKickHitsOptions {
+  readonly kick: TrackSource;
+  readonly overhead: TrackSource;
+  readonly candidates: readonly KickCandidate[];
+  /** What is needed around each onset. */
+  readonly beforeMs: number;
+  readonly afterMs: number;
+}
+
+/** Reads the hits one after the other, each once, so that memory holds a single hit however many there are. */
+export async function* readKickHits(options: ReadKickHitsOptions): AsyncGenerator<KickHitRead> {
+  const { kick, overhead, candidates } = options;
+  const { sampleRateHz } = kick;
+  const samples = (ms: number): number => Math.ceil((ms / 1000) * sampleRateHz);
+  const before = samples(options.beforeMs);
+  const after = samples(options.afterMs);
+  for (const { atSample } of candidates) {
+    const start = atSample - before - samples(onsetStretch.beforeMs);
+    const end = atSample + after + samples(onsetStretch.afterMs);
+    const [kickStretch, overheadStretch] = await Promise.all([
+      kick.read(start, end),
+      overhead.read(start, end),
+    ]);
+    const around = kickStretch.subarray(before, kickStretch.length - after);
+    const candidateAt = atSample - start - before;
+    const onsetAt = before + onset(around, { sampleRateHz, candidateAt });
+    const onsetSample = Math.max(0, start + onsetAt);
+    const from = onsetSample - start - before;
+    const cut = (stretch: Float32Array): Float32Array =>
+      stretch.subarray(Math.max(0, from), from + before + after);
+    const missing = Math.max(0, -from);
+    yield { onsetSample, kick: cut(kickStretch), overhead: cut(overheadStretch), onsetAt: before - missing };
+  }
+}
