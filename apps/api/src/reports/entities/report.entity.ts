@@ -22,9 +22,9 @@ export const Report = defineEntity({
     verdict: p.string().$type<Verdict>().length(20),
     /** The facts without hits and clipping runs: small, so that lists can read it. */
     summary: p.json<TakeFacts>(),
-    hits: p.json<readonly HitFacts[]>().lazy(),
+    hits: p.json<HitFacts[]>().lazy(true, false),
     /** One list a track. */
-    clipRuns: p.json<readonly (readonly ClipRun[])[]>().lazy(),
+    clipRuns: p.json<ClipRun[][]>().lazy(true, false),
   },
 });
 export type Report = InferEntity<typeof Report>;

@@ -1,0 +1,26 @@
+import { applyDecorators, SetMetadata } from '@nestjs/common';
+import { ApiCookieAuth, ApiExtension } from '@nestjs/swagger';
+import { Role } from '@thudline/contracts';
+import type { TakeRight } from './access.service';
+
+export const ACCESS = Symbol('access');
+
+export type AccessRule =
+  | { kind: 'anyone' }
+  | { kind: 'signed-in' }
+  | { kind: 'role'; role: Role }
+  | { kind: 'take'; right: TakeRight };
+
+function access(rule: AccessRule, told: string) {
+  const decorators = [SetMetadata(ACCESS, rule), ApiExtension('x-access', told)];
+  return applyDecorators(...decorators, ...(rule.kind === 'anyone' ? [] : [ApiCookieAuth('access')]));
+}
+
+/** Who may call a route. Each route declares exactly one; a route that declares none is refused. */
+export const Access = {
+  anyone: () => access({ kind: 'anyone' }, 'anyone'),
+  signedIn: () => access({ kind: 'signed-in' }, 'signed in'),
+  role: (role: Role) => access({ kind: 'role', role }, `role ${role}`),
+  /** The take is the one whose id is the route's `:id`. */
+  take: (right: TakeRight) => access({ kind: 'take', right }, `right to ${right} the take`),
+};

@@ -1,0 +1,22 @@
+import { CanActivate, ExecutionContext, Inject, Injectable } from '@nestjs/common';
+import { appHeader } from '@thudline/contracts';
+import { Request } from 'express';
+import { Config } from '../config/config';
+import { CONFIG } from '../config/config.module';
+import { AppError } from '../errors/app-error';
+
+const readMethods = new Set(['GET', 'HEAD', 'OPTIONS']);
+
+/** Writes come from our own pages: they carry the app's header and an Origin equal to PUBLIC_URL. */
+@Injectable()
+export class OriginGuard implements CanActivate {
+  constructor(@Inject(CONFIG) private readonly config: Config) {}
+
+  canActivate(context: ExecutionContext): boolean {
+    const request = context.switchToHttp().getRequest<Request>();
+    if (readMethods.has(request.method)) return true;
+    const hasHeader = request.get(appHeader.name) === appHeader.value;
+    if (hasHeader && request.get('Origin') === this.config.publicOrigin) return true;
+    throw new AppError('forbidden', 'This request did not come from a page of this site.');
+  }
+}

@@ -1,0 +1,43 @@
+import { DynamicModule, Module } from '@nestjs/common';
+import { APP_FILTER, APP_INTERCEPTOR, APP_PIPE } from '@nestjs/core';
+import { ZodSerializerInterceptor, ZodValidationPipe } from 'nestjs-zod';
+import { AccessModule } from './access/access.module';
+import { AuthModule } from './auth/auth.module';
+import { Config } from './config/config';
+import { ConfigModule } from './config/config.module';
+import { databaseModule } from './database/database.module';
+import { AppErrorFilter } from './errors/app-error.filter';
+import { HealthModule } from './health/health.module';
+import { loggerModule } from './logging/logger.module';
+import { MeasurementsModule } from './measuring/measurements.module';
+import { ReportsModule } from './reports/reports.module';
+import { SoundModule } from './sound/sound.module';
+import { TakesModule } from './takes/takes.module';
+import { UsersModule } from './users/users.module';
+
+@Module({})
+export class AppModule {
+  static of(config: Config): DynamicModule {
+    return {
+      module: AppModule,
+      imports: [
+        ConfigModule.of(config),
+        loggerModule,
+        databaseModule,
+        AccessModule,
+        AuthModule,
+        UsersModule,
+        TakesModule,
+        MeasurementsModule,
+        ReportsModule,
+        SoundModule,
+        HealthModule,
+      ],
+      providers: [
+        { provide: APP_FILTER, useClass: AppErrorFilter },
+        { provide: APP_PIPE, useClass: ZodValidationPipe },
+        { provide: APP_INTERCEPTOR, useClass: ZodSerializerInterceptor },
+      ],
+    };
+  }
+}

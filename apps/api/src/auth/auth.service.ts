@@ -1,0 +1,59 @@
+import { EntityManager, UniqueConstraintViolationException } from '@mikro-orm/postgresql';
+import { Inject, Injectable } from '@nestjs/common';
+import { JoinRequest, SignInRequest } from '@thudline/contracts';
+import { AuditService } from '../audit/audit.service';
+import { Config } from '../config/config';
+import { CONFIG } from '../config/config.module';
+import { AppError } from '../errors/app-error';
+import { ThrottleService } from '../throttle/throttle.service';
+import { User } from '../users/entities/user.entity';
+import { PasswordsService } from './passwords.service';
+
+@Injectable()
+export class AuthService {
+  constructor(
+    private readonly em: EntityManager,
+    private readonly passwords: PasswordsService,
+    private readonly throttle: ThrottleService,
+    private readonly audit: AuditService,
+    @Inject(CONFIG) private readonly config: Config,
+  ) {}
+
+  async join(request: JoinRequest, address: string): Promise<User> {
+    await this.throttle.count({ key: `join:${address}`, limit: this.config.limits.joinPerAddress, windowS: 3_600 });
+    const { name, email, password } = request;
+    const passwordHash = await this.passwords.hash(password);
+    const user = this.em.create(User, { name, email, emailLower: email.toLowerCase(), passwordHash });
+    try {
+      await this.em.flush();
+    } catch (error) {
+      if (error instanceof UniqueConstraintViolationException) throw emailTaken();
+      throw error;
+    }
+    this.audit.record({ kind: 'joined', userId: user.id, address });
+    return user;
+  }
+
+  async signIn(request: SignInRequest, address: string): Promise<User> {
+    const emailLower = request.email.toLowerCase();
+    const { signInPerAccount, signInPerAddress } = this.config.limits;
+    const account = `sign-in:account:${this.throttle.hashed(emailLower)}`;
+    await this.throttle.count({ key: `sign-in:${address}`, limit: signInPerAddress, windowS: 900 });
+    await this.throttle.count({ key: account, limit: signInPerAccount, windowS: 900 });
+    const user = await this.em.findOne(User, { emailLower });
+    const isRight = await this.passwords.matches(user?.passwordHash ?? null, request.password);
+    if (!user || !isRight || user.lockedAt) {
+      this.audit.record({ kind: 'sign-in-failed', userId: user?.id, address });
+      await this.em.flush();
+      throw new AppError('wrong-sign-in', 'That e-mail address and password do not belong together.');
+    }
+    await this.throttle.clear(account);
+    this.audit.record({ kind: 'signed-in', userId: user.id, address });
+    return user;
+  }
+}
+
+const emailTaken = () =>
+  new AppError('email-taken', 'This e-mail address has an account already. Sign in instead.', {
+    details: { fields: { email: 'This e-mail address has an account already.' } },
+  });

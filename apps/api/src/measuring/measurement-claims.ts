@@ -1,0 +1,90 @@
+import { EntityManager } from '@mikro-orm/postgresql';
+import { Injectable } from '@nestjs/common';
+import { TakeMeasurement } from '@thudline/dsp';
+import { pairSpectrumColumns, reportColumns } from '../reports/report-columns';
+import { PairSpectrum } from '../reports/entities/pair-spectrum.entity';
+import { Report } from '../reports/entities/report.entity';
+import { Take } from '../takes/entities/take.entity';
+import { Measurement, MeasurementStage } from './entities/measurement.entity';
+import { MeasureQueue } from './measure-queue';
+
+/** A measurement that this worker took up; everything it writes holds only while `attempt` still matches. */
+export interface Claim {
+  measurementId: string;
+  attempt: number;
+  takeId: string;
+}
+
+/** After this many a measurement has failed (common practice, no source). */
+export const mostAttempts = 3;
+
+const running = ({ measurementId, attempt }: Claim) => ({ id: measurementId, attempt, state: 'running' as const });
+
+/** The worker's side of `measurement`. Times are the database's, so that workers' clocks don't matter. */
+@Injectable()
+export class MeasurementClaims {
+  constructor(
+    private readonly em: EntityManager,
+    private readonly queue: MeasureQueue,
+  ) {}
+
+  /** @returns null when somebody else has it, or it is over */
+  async claim(measurementId: string): Promise<Claim | null> {
+    const [row] = await this.em.getConnection().execute<{ attempt: number; take_id: string }[]>(
+      `update measurement set state = 'running', stage = 'fetching', progress = 0, attempt = attempt + 1,
+         heartbeat_at = now() where id = ? and state = 'queued' returning attempt, take_id`,
+      [measurementId],
+    );
+    return row ? { measurementId, attempt: row.attempt, takeId: row.take_id } : null;
+  }
+
+  /** @returns false when the measurement isn't this worker's any more: cancelled, or given to another */
+  async beat(claim: Claim, stage: MeasurementStage, progress: number): Promise<boolean> {
+    const rows = await this.em.getConnection().execute<unknown[]>(
+      `update measurement set heartbeat_at = now(), stage = ?, progress = ?
+       where id = ? and attempt = ? and state = 'running' returning id`,
+      [stage, progress, claim.measurementId, claim.attempt],
+    );
+    return rows.length === 1;
+  }
+
+  /** Report, pair spectra and state in one transaction. @returns false when nothing was written, see `beat` */
+  async finish(claim: Claim, measured: TakeMeasurement): Promise<boolean> {
+    return this.em.fork().transactional(async (em) => {
+      const done = { state: 'done', stage: null, progress: 1 } as const;
+      if ((await em.nativeUpdate(Measurement, running(claim), done)) === 0) return false;
+      const report = em.create(Report, {
+        measurement: claim.measurementId,
+        take: claim.takeId,
+        ...reportColumns(measured.facts),
+      });
+      for (const columns of pairSpectrumColumns(measured)) em.create(PairSpectrum, { report, ...columns });
+      await em.flush();
+      await em.nativeUpdate(Take, { id: claim.takeId }, { currentReportId: claim.measurementId });
+      return true;
+    });
+  }
+
+  async fail(claim: Claim, reason: string): Promise<void> {
+    await this.em.fork().nativeUpdate(Measurement, running(claim), { state: 'failed', stage: null, reason });
+  }
+
+  /** Hands a measurement back unmeasured; this try doesn't count. */
+  async giveBack(claim: Claim): Promise<void> {
+    await this.requeue(claim, { attempt: claim.attempt - 1, afterS: 0 });
+  }
+
+  /** Tries again after a while, or gives up after the last attempt. */
+  async retryLater(claim: Claim, reason: string): Promise<void> {
+    if (claim.attempt >= mostAttempts) return this.fail(claim, reason);
+    await this.requeue(claim, { attempt: claim.attempt, afterS: 15 * claim.attempt });
+  }
+
+  private async requeue(claim: Claim, { attempt, afterS }: { attempt: number; afterS: number }): Promise<void> {
+    await this.em.fork().transactional(async (em) => {
+      const queued = { state: 'queued', stage: null, progress: 0, attempt } as const;
+      const changed = await em.nativeUpdate(Measurement, running(claim), queued);
+      if (changed > 0) await this.queue.send(em, { measurementId: claim.measurementId, afterS });
+    });
+  }
+}

@@ -1,0 +1,28 @@
+import { Controller, Get, HttpCode, Param, Post } from '@nestjs/common';
+import { ApiNoContentResponse, ApiTags } from '@nestjs/swagger';
+import { ZodResponse } from 'nestjs-zod';
+import { Access } from '../access/access.decorator';
+import { MeasurementResponseDto } from './dto/measurement.dto';
+import { measurementResponseOf } from './measurement.mapper';
+import { MeasurementsService } from './measurements.service';
+
+@ApiTags('measuring')
+@Controller('api/takes/:id/measurement')
+export class MeasurementsController {
+  constructor(private readonly measurements: MeasurementsService) {}
+
+  @Get()
+  @Access.take('read')
+  @ZodResponse({ status: 200, type: MeasurementResponseDto })
+  async get(@Param('id') takeId: string) {
+    return measurementResponseOf(await this.measurements.getLatest(takeId));
+  }
+
+  @Post('cancel')
+  @Access.take('change')
+  @HttpCode(204)
+  @ApiNoContentResponse({ description: 'It is not measured any further; what has ended already stays as it is.' })
+  cancel(@Param('id') takeId: string): Promise<void> {
+    return this.measurements.cancel(takeId);
+  }
+}

@@ -1,0 +1,25 @@
+import { NestExpressApplication } from '@nestjs/platform-express';
+import { DocumentBuilder, OpenAPIObject, SwaggerModule } from '@nestjs/swagger';
+import { appHeader, paths } from '@thudline/contracts';
+import { cleanupOpenApiDoc } from 'nestjs-zod';
+
+export function openApiDocument(app: NestExpressApplication): OpenAPIObject {
+  const description =
+    `Writes carry the header ${appHeader.name}: ${appHeader.value} and an Origin equal to the site's address. ` +
+    'Every error is { code, message, details? }. `x-access` tells who may call a route.';
+  const builder = new DocumentBuilder()
+    .setTitle('Thudline')
+    .setDescription(description)
+    .setVersion('1')
+    .addCookieAuth('thudline_access', { type: 'apiKey', in: 'cookie' }, 'access')
+    .build();
+  return cleanupOpenApiDoc(SwaggerModule.createDocument(app, builder));
+}
+
+export function documentApi(app: NestExpressApplication): void {
+  SwaggerModule.setup(paths.docs, app, () => openApiDocument(app), {
+    jsonDocumentUrl: `${paths.docs}/openapi.json`,
+    raw: ['json'],
+    customSiteTitle: 'Thudline API',
+  });
+}

@@ -1,0 +1,53 @@
+import { ClipRun, encodePairSpectrum, HitFacts, TakeFacts, TakeMeasurement, TrackFacts, TrackRole } from '@thudline/dsp';
+
+const withoutRuns = (track: TrackFacts): TrackFacts => ({ ...track, clipping: { ...track.clipping, runs: [] } });
+
+/** What a report row holds of the facts; `storedFacts` is the way back. */
+export function reportColumns(facts: TakeFacts) {
+  const agreement = facts.pairs[0]?.agreement;
+  const kick = hardest(facts, 'kick');
+  const overhead = hardest(facts, 'overhead');
+  return {
+    kickPeakDbfs: kick.peakDbfs,
+    kickClipped: kick.clipped,
+    overheadPeakDbfs: overhead.peakDbfs,
+    overheadClipped: overhead.clipped,
+    lowEndDb: agreement?.choices.find((choice) => choice.name === 'as-recorded')?.lowEndDb ?? null,
+    flipGainDb: agreement?.flipGainMatchedDb ?? null,
+    verdict: agreement?.verdict ?? 'cannot-tell',
+    summary: { ...facts, hits: [], tracks: facts.tracks.map(withoutRuns) },
+    hits: [...facts.hits],
+    clipRuns: facts.tracks.map((track) => [...track.clipping.runs]),
+  };
+}
+
+function hardest(facts: TakeFacts, role: TrackRole): { peakDbfs: number | null; clipped: boolean } {
+  const track = facts.tracks.find((candidate) => candidate.role === role);
+  const clipped = (track?.clipping.runCount ?? 0) > 0;
+  return { peakDbfs: clipped ? null : (track?.loudestHitDbfs ?? null), clipped };
+}
+
+interface StoredParts {
+  summary: TakeFacts;
+  hits: HitFacts[];
+  clipRuns: ClipRun[][];
+}
+
+/** The whole facts again. */
+export function storedFacts({ summary, hits, clipRuns }: StoredParts): TakeFacts {
+  const tracks = summary.tracks.map((track, index) => ({
+    ...track,
+    clipping: { ...track.clipping, runs: clipRuns[index] ?? [] },
+  }));
+  return { ...summary, hits, tracks };
+}
+
+/** One row a pair that has kick hits. */
+export function pairSpectrumColumns({ facts, pairSpectra }: TakeMeasurement) {
+  return facts.pairs.flatMap(({ a, b, spectrum: layout }, index) => {
+    const spectrum = pairSpectra[index];
+    if (!layout || !spectrum) return [];
+    const { binHz, binCount, hitCount } = layout;
+    return [{ trackA: a, trackB: b, binHz, binCount, hitCount, data: encodePairSpectrum(spectrum) }];
+  });
+}

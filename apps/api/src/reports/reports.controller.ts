@@ -1,0 +1,33 @@
+import { Controller, Get, Header, Param, Res } from '@nestjs/common';
+import { ApiOkResponse, ApiProduces, ApiTags } from '@nestjs/swagger';
+import { Response } from 'express';
+import { ZodResponse } from 'nestjs-zod';
+import { Access } from '../access/access.decorator';
+import { CurrentViewer, Viewer } from '../access/viewer';
+import { ReportResponseDto } from './dto/report.dto';
+import { ReportsService } from './reports.service';
+
+@ApiTags('reports')
+@Controller('api/takes/:id')
+export class ReportsController {
+  constructor(private readonly reports: ReportsService) {}
+
+  @Get('report')
+  @Access.take('read')
+  @ZodResponse({ status: 200, type: ReportResponseDto })
+  get(@Param('id') takeId: string, @CurrentViewer() viewer: Viewer) {
+    return this.reports.get(takeId, viewer.user.settings);
+  }
+
+  @Get('pair-spectrum')
+  @Access.take('read')
+  @ApiProduces('application/octet-stream')
+  @ApiOkResponse({ description: 'Little-endian float32: Skk, Soo, Re Sko, Im Sko; the report names the bins.' })
+  @Header('Cache-Control', 'private, no-cache')
+  async pairSpectrum(@Param('id') takeId: string, @Res() response: Response): Promise<void> {
+    const spectrum = await this.reports.getPairSpectrum(takeId);
+    // A report never changes, so its id names the bytes.
+    response.set('ETag', `"${spectrum.report.measurement.id}"`).type('application/octet-stream');
+    response.send(Buffer.from(spectrum.data));
+  }
+}

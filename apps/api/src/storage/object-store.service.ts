@@ -1,0 +1,112 @@
+import { createHash } from 'node:crypto';
+import { createReadStream } from 'node:fs';
+import { Readable } from 'node:stream';
+import { pipeline } from 'node:stream/promises';
+import {
+  DeleteObjectsCommand,
+  GetObjectCommand,
+  HeadBucketCommand,
+  PutObjectCommand,
+  S3Client,
+} from '@aws-sdk/client-s3';
+import { Inject, Injectable, Logger, OnApplicationShutdown } from '@nestjs/common';
+import { Config } from '../config/config';
+import { CONFIG } from '../config/config.module';
+import { AppError } from '../errors/app-error';
+import { createS3Client } from './s3-client';
+
+interface StoredFile {
+  key: string;
+  path: string;
+  bytes: number;
+  sha256: string;
+}
+
+/** Where the bytes of recordings are kept. Every failure of the service is `storage-unavailable`. */
+@Injectable()
+export class ObjectStoreService implements OnApplicationShutdown {
+  private readonly logger = new Logger(ObjectStoreService.name);
+  private readonly client: S3Client;
+  private readonly bucket: string;
+
+  constructor(@Inject(CONFIG) config: Config) {
+    this.client = createS3Client(config.objectStore);
+    this.bucket = config.objectStore.bucket;
+  }
+
+  /** Puts a file and reads it back: what is stored has the file's SHA-256, or this throws. */
+  async putVerified({ key, path, bytes, sha256 }: StoredFile): Promise<void> {
+    await this.answered(() =>
+      this.client.send(
+        new PutObjectCommand({
+          Bucket: this.bucket,
+          Key: key,
+          Body: createReadStream(path),
+          ContentLength: bytes,
+          ContentType: 'audio/wav',
+        }),
+      ),
+    );
+    const hash = createHash('sha256');
+    await this.answered(async () => pipeline(await this.body(key), hash));
+    if (hash.digest('hex') !== sha256) throw unavailable(new Error(`${key} was stored with other bytes`));
+  }
+
+  /** @returns the bytes from `start` to `end` (exclusive) */
+  async read(key: string, start: number, end: number): Promise<Uint8Array> {
+    if (end <= start) return new Uint8Array(0);
+    return this.answered(async () => Buffer.concat(await (await this.body(key, start, end)).toArray()));
+  }
+
+  async stream(key: string): Promise<Readable> {
+    return this.answered(() => this.body(key));
+  }
+
+  /** Best effort: what can't be removed now is logged, and found later as an object without a row. */
+  async remove(keys: readonly string[]): Promise<void> {
+    if (keys.length === 0) return;
+    const objects = keys.map((key) => ({ Key: key }));
+    try {
+      await this.client.send(new DeleteObjectsCommand({ Bucket: this.bucket, Delete: { Objects: objects } }));
+    } catch (error) {
+      this.logger.warn({ keys, cause: error }, 'Objects of an upload that failed could not be removed');
+    }
+  }
+
+  async answers(): Promise<boolean> {
+    try {
+      await this.client.send(new HeadBucketCommand({ Bucket: this.bucket }), {
+        abortSignal: AbortSignal.timeout(3_000),
+      });
+      return true;
+    } catch {
+      return false;
+    }
+  }
+
+  onApplicationShutdown(): void {
+    this.client.destroy();
+  }
+
+  private async body(key: string, start?: number, end?: number): Promise<Readable> {
+    const range = start === undefined || end === undefined ? undefined : `bytes=${start}-${end - 1}`;
+    const answer = await this.client.send(new GetObjectCommand({ Bucket: this.bucket, Key: key, Range: range }));
+    return answer.Body as Readable;
+  }
+
+  private async answered<T>(request: () => Promise<T>): Promise<T> {
+    try {
+      return await request();
+    } catch (error) {
+      throw error instanceof AppError ? error : unavailable(error);
+    }
+  }
+}
+
+function unavailable(cause: unknown): AppError {
+  return new AppError(
+    'storage-unavailable',
+    'The place where recordings are kept does not answer. Nothing was stored or lost; try again in a minute.',
+    { cause },
+  );
+}

@@ -1,0 +1,119 @@
+import { createHash } from 'node:crypto';
+import { EntityManager, LockMode } from '@mikro-orm/postgresql';
+import { Injectable } from '@nestjs/common';
+import { CreateTakeRequest, trackRoles } from '@thudline/contracts';
+import { v7 } from 'uuid';
+import { Viewer } from '../access/viewer';
+import { AppError } from '../errors/app-error';
+import { MeasurementsService } from '../measuring/measurements.service';
+import { objectKeys } from '../storage/object-keys';
+import { ObjectStoreService } from '../storage/object-store.service';
+import { User } from '../users/entities/user.entity';
+import { TakeFile } from './entities/take-file.entity';
+import { TakeTrack } from './entities/take-track.entity';
+import { Take } from './entities/take.entity';
+import { CheckedFile, checkedFiles } from './upload/checked-files';
+import { TakeUpload } from './upload/take-uploads.service';
+
+interface StoredFile extends CheckedFile {
+  id: string;
+  key: string;
+}
+
+export interface CreatedTake {
+  take: Take;
+  isNew: boolean;
+}
+
+/** From files in scratch to a take that waits to be measured: all of it or nothing. */
+@Injectable()
+export class TakeCreationService {
+  constructor(
+    private readonly em: EntityManager,
+    private readonly objects: ObjectStoreService,
+    private readonly measurements: MeasurementsService,
+  ) {}
+
+  async create(viewer: Viewer, { request, files }: TakeUpload): Promise<CreatedTake> {
+    const earlier = await findUploaded(this.em, viewer, request.uploadKey);
+    if (earlier) return { take: earlier, isNew: false };
+    const checked = await checkedFiles(files, request.tracks);
+    const takeId = v7();
+    const stored = checked.map((file) => stamped(file, takeId));
+    return this.keepingNothingOnFailure(stored, async () => {
+      await Promise.all(stored.map((file) => this.objects.putVerified(file)));
+      return this.write(viewer, { takeId, request, files: stored });
+    });
+  }
+
+  private async keepingNothingOnFailure(
+    files: StoredFile[],
+    work: () => Promise<CreatedTake>,
+  ): Promise<CreatedTake> {
+    let isKept = false;
+    try {
+      const created = await work();
+      isKept = created.isNew;
+      return created;
+    } finally {
+      if (!isKept) await this.objects.remove(files.map((file) => file.key));
+    }
+  }
+
+  private async write(
+    viewer: Viewer,
+    { takeId, request, files }: { takeId: string; request: CreateTakeRequest; files: StoredFile[] },
+  ): Promise<CreatedTake> {
+    return this.em.transactional(async (em) => {
+      // Uploads of one player queue here: the second of two with the same key finds what the first has written.
+      const owner = await em.findOneOrFail(User, viewer.user.id, {
+        lockMode: LockMode.PESSIMISTIC_WRITE,
+        refresh: true,
+      });
+      const earlier = await findUploaded(em, viewer, request.uploadKey);
+      if (earlier) return { take: earlier, isNew: false };
+      const take = em.create(Take, {
+        id: takeId,
+        owner,
+        number: owner.nextTakeNumber++,
+        title: request.title,
+        note: request.note,
+        recordedAt: request.recordedAt ? new Date(request.recordedAt) : new Date(),
+        uploadKey: request.uploadKey,
+      });
+      const fileRows = files.map((file, position) => em.create(TakeFile, { take, position, ...fileColumns(file) }));
+      for (const track of request.tracks) {
+        const file = fileRows[track.fileIndex];
+        if (!file) throw new Error(`Track ${track.role} names file ${track.fileIndex}, which was checked before.`);
+        const { role, channel } = track;
+        em.create(TakeTrack, { take, file, channel, role, position: trackRoles.indexOf(role) });
+      }
+      await em.flush();
+      await this.measurements.queue(em, { take, ownerId: owner.id, inputHash: inputHash(request, files) });
+      return { take, isNew: true };
+    });
+  }
+}
+
+async function findUploaded(em: EntityManager, viewer: Viewer, uploadKey: string): Promise<Take | null> {
+  const take = await em.findOne(Take, { owner: viewer.user.id, uploadKey });
+  if (take?.deletedAt) throw new AppError('conflict', 'This take was uploaded before and has been deleted since.');
+  return take;
+}
+
+function stamped(file: CheckedFile, takeId: string): StoredFile {
+  const id = v7();
+  return { ...file, id, key: objectKeys.takeFile(takeId, id) };
+}
+
+function fileColumns({ id, key, name, sha256, bytes, facts }: StoredFile) {
+  const { encodingName: encoding, dataOffset, blockAlign, frames, channels, sampleRateHz, cutShort } = facts;
+  const format = { encoding, dataOffset, blockAlign, frames, channels, sampleRateHz, cutShort };
+  return { id, objectKey: key, name, sha256, bytes, ...format };
+}
+
+/** Names what is measured: the same sounds in the same roles need no second measurement. */
+function inputHash({ tracks }: CreateTakeRequest, files: StoredFile[]): string {
+  const inputs = tracks.map(({ role, fileIndex, channel }) => `${role}:${files[fileIndex]?.sha256}:${channel}`);
+  return createHash('sha256').update(inputs.sort().join('\n')).digest('hex');
+}

@@ -1,0 +1,64 @@
+import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post, Query, Req, Res } from '@nestjs/common';
+import { ApiNoContentResponse, ApiTags } from '@nestjs/swagger';
+import { Request, Response } from 'express';
+import { ZodResponse } from 'nestjs-zod';
+import { Access } from '../access/access.decorator';
+import { CurrentViewer, Viewer } from '../access/viewer';
+import { ListTakesDto, ListTakesResponseDto, TakeResponseDto, UpdateTakeDto } from './dto/take.dto';
+import { TakeCreationService } from './take-creation.service';
+import { TakesService } from './takes.service';
+import { ApiTakeUpload } from './upload/api-take-upload.decorator';
+import { TakeUploadsService } from './upload/take-uploads.service';
+
+@ApiTags('takes')
+@Controller('api/takes')
+export class TakesController {
+  constructor(
+    private readonly takes: TakesService,
+    private readonly creation: TakeCreationService,
+    private readonly uploads: TakeUploadsService,
+  ) {}
+
+  @Get()
+  @Access.signedIn()
+  @ZodResponse({ status: 200, type: ListTakesResponseDto })
+  list(@CurrentViewer() viewer: Viewer, @Query() query: ListTakesDto) {
+    return this.takes.list(viewer, query);
+  }
+
+  @Post()
+  @Access.signedIn()
+  @ApiTakeUpload()
+  @ZodResponse({ status: 201, type: TakeResponseDto })
+  async create(
+    @CurrentViewer() viewer: Viewer,
+    @Req() request: Request,
+    @Res({ passthrough: true }) response: Response,
+  ) {
+    const created = await this.uploads.receive(request, response, (upload) => this.creation.create(viewer, upload));
+    response.status(created.isNew ? 201 : 200);
+    return this.takes.whole(created.take);
+  }
+
+  @Get(':id')
+  @Access.take('read')
+  @ZodResponse({ status: 200, type: TakeResponseDto })
+  get(@Param('id') id: string) {
+    return this.takes.get(id);
+  }
+
+  @Patch(':id')
+  @Access.take('change')
+  @ZodResponse({ status: 200, type: TakeResponseDto })
+  update(@Param('id') id: string, @Body() body: UpdateTakeDto) {
+    return this.takes.update(id, body);
+  }
+
+  @Delete(':id')
+  @Access.take('change')
+  @HttpCode(204)
+  @ApiNoContentResponse({ description: 'The take is gone from every list; it can be brought back for 30 days.' })
+  remove(@CurrentViewer() viewer: Viewer, @Param('id') id: string): Promise<void> {
+    return this.takes.remove(viewer, id);
+  }
+}

@@ -1,0 +1,16 @@
+import { Module } from '@nestjs/common';
+import { AuditModule } from '../audit/audit.module';
+import { MeasurementsModule } from '../measuring/measurements.module';
+import { ReportsModule } from '../reports/reports.module';
+import { StorageModule } from '../storage/storage.module';
+import { TakeCreationService } from './take-creation.service';
+import { TakesController } from './takes.controller';
+import { TakesService } from './takes.service';
+import { TakeUploadsService } from './upload/take-uploads.service';
+
+@Module({
+  imports: [AuditModule, MeasurementsModule, ReportsModule, StorageModule],
+  controllers: [TakesController],
+  providers: [TakesService, TakeCreationService, TakeUploadsService],
+})
+export class TakesModule {}
