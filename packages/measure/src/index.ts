@@ -1,0 +1,3 @@
+export * from './fileByteSource';
+export * from './measureRefusal';
+export type { TrackChoice } from './trackChoice';
