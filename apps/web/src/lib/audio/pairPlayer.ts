@@ -1,0 +1,104 @@
+import { createChoiceMixer, type ChoiceMixer } from './choiceMixer';
+import { loopEnds } from './loopBuffer';
+import type { MixBranch } from './mixPlan';
+
+export interface LoopExcerpt {
+  sampleRateHz: number;
+  kick: Float32Array;
+  overhead: Float32Array;
+}
+
+/** Loops start quiet: from about −14 dB to full in this time. Common practice for protecting ears, no source. */
+const quietStart = { gain: 0.2, riseS: 2.5 };
+const stopS = 0.02;
+
+/** Plays one thing at a time, a hit on repeat or a whole take, through every choice at once. */
+export class PairPlayer {
+  private context: AudioContext | null = null;
+  private mixer: ChoiceMixer | null = null;
+  private halt: (() => void) | null = null;
+
+  constructor(
+    private plan: readonly MixBranch[],
+    private selected: number,
+  ) {}
+
+  async playLoop(excerpt: LoopExcerpt): Promise<void> {
+    const { context, mixer } = await this.start();
+    const buffer = new AudioBuffer({
+      numberOfChannels: 2,
+      length: excerpt.kick.length,
+      sampleRate: excerpt.sampleRateHz,
+    });
+    buffer.copyToChannel(loopEnds(excerpt.kick, excerpt.sampleRateHz), 0);
+    buffer.copyToChannel(loopEnds(excerpt.overhead, excerpt.sampleRateHz), 1);
+    const source = new AudioBufferSourceNode(context, { buffer, loop: true });
+    source.connect(mixer.input);
+    source.start();
+    this.halt = () => source.stop(context.currentTime + stopS);
+  }
+
+  /** @param onEnd - called when the take has been played to its end */
+  async playTake(url: string, onEnd: () => void): Promise<void> {
+    const { context, mixer } = await this.start();
+    const element = new Audio();
+    element.src = url;
+    const source = context.createMediaElementSource(element);
+    source.connect(mixer.input);
+    element.addEventListener('ended', onEnd);
+    this.halt = () => {
+      element.pause();
+      element.removeAttribute('src');
+    };
+    await element.play();
+  }
+
+  select(index: number) {
+    this.selected = index;
+    this.mixer?.select(index);
+  }
+
+  update(plan: readonly MixBranch[]) {
+    this.plan = plan;
+    this.mixer?.update(plan);
+  }
+
+  stop() {
+    const { context, mixer, halt } = this;
+    this.mixer = null;
+    this.halt = null;
+    if (!context || !mixer || !halt) return;
+    fadeOut(context, mixer);
+    halt();
+    setTimeout(() => mixer.dispose(), stopS * 2000);
+  }
+
+  async close() {
+    this.stop();
+    await this.context?.close();
+    this.context = null;
+  }
+
+  private async start() {
+    this.stop();
+    const context = (this.context ??= new AudioContext({ latencyHint: 'interactive' }));
+    await context.resume();
+    const mixer = createChoiceMixer(context, this.plan, this.selected);
+    const now = context.currentTime;
+    const level = mixer.output.gain;
+    level.setValueAtTime(0, now);
+    level.linearRampToValueAtTime(quietStart.gain, now + 0.03);
+    level.linearRampToValueAtTime(1, now + quietStart.riseS);
+    mixer.output.connect(context.destination);
+    this.mixer = mixer;
+    return { context, mixer };
+  }
+}
+
+function fadeOut(context: AudioContext, mixer: ChoiceMixer) {
+  const level = mixer.output.gain;
+  const now = context.currentTime;
+  level.cancelScheduledValues(now);
+  level.setValueAtTime(level.value, now);
+  level.linearRampToValueAtTime(0, now + stopS);
+}
