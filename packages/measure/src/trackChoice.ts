@@ -1,4 +1,4 @@
-import type { FileNotice, TrackRole, TrackSource } from '@thudline/dsp';
+import type { FileNotice, TrackRole, TrackSource, WavFile } from '@thudline/dsp';
 import { MeasureRefusal } from './measureRefusal';
 import type { OpenFile } from './openFiles';
 
@@ -25,7 +25,10 @@ const lengthWorthMentioningS = 0.01;
  * @throws {MeasureRefusal} `no-such-channel`, `same-channel` or `rates-differ`
  */
 export function chosenTracks(files: readonly OpenFile[], choices: readonly TrackChoice[]): ChosenTrack[] {
-  const whole = choices.map((choice) => ({ role: choice.role, source: trackOf(files, choice) }));
+  const whole = choices.map((choice) => ({
+    role: choice.role,
+    source: wavOf(files, choice).track(choice.channel),
+  }));
   if (new Set(choices.map(({ fileIndex, channel }) => `${fileIndex}:${channel}`)).size < choices.length) {
     throw new MeasureRefusal({
       code: 'same-channel',
@@ -50,7 +53,7 @@ export function chosenTracks(files: readonly OpenFile[], choices: readonly Track
  * @param choices - already found good by `chosenTracks`
  */
 export function headerNotices(files: readonly OpenFile[], choices: readonly TrackChoice[]): FileNotice[] {
-  const facts = choices.map(({ role, fileIndex }) => ({ role, ...files[fileIndex]!.wav.facts }));
+  const facts = choices.map((choice) => ({ role: choice.role, ...wavOf(files, choice).facts }));
   const lengthsS = facts.map(({ durationS }) => durationS);
   const byS = Math.max(...lengthsS) - Math.min(...lengthsS);
   return [
@@ -59,9 +62,9 @@ export function headerNotices(files: readonly OpenFile[], choices: readonly Trac
   ];
 }
 
-function trackOf(files: readonly OpenFile[], { fileIndex, channel }: TrackChoice): TrackSource {
-  const wav = files[fileIndex]?.wav;
-  if (!wav || channel >= wav.facts.channels || channel < 0) {
+function wavOf(files: readonly OpenFile[], { fileIndex, channel }: TrackChoice): WavFile {
+  const wav = files.at(fileIndex)?.wav;
+  if (!wav || !Number.isInteger(channel) || channel < 0 || channel >= wav.facts.channels) {
     const count = wav?.facts.channels ?? 0;
     throw new MeasureRefusal({
       code: 'no-such-channel',
@@ -69,7 +72,7 @@ function trackOf(files: readonly OpenFile[], { fileIndex, channel }: TrackChoice
       fileIndex,
     });
   }
-  return wav.track(channel);
+  return wav;
 }
 
 function shortened(source: TrackSource, frames: number): TrackSource {

@@ -47,7 +47,7 @@ export async function walkChunks(bytes: ByteWindow): Promise<WavChunks> {
     if (chunk.id === 'ds64') longDataBytes = await dataBytesOf64(bytes, chunk);
     if (chunk.id === 'fmt ' && !format) {
       const body = await bytes.at(chunk.bodyStart, Math.min(chunk.declaredBytes, 40));
-      if (body.byteLength < 16) throw cutOffHeader();
+      if (body.byteLength < Math.max(16, Math.min(chunk.declaredBytes, 40))) throw cutOffHeader();
       format = new DataView(body.buffer.slice(body.byteOffset, body.byteOffset + body.byteLength));
     }
     if (chunk.id === 'data' && !data) data = await dataExtent(bytes, chunk, longDataBytes);
