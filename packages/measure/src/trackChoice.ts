@@ -16,16 +16,13 @@ export interface ChosenTrack {
   readonly source: TrackSource;
 }
 
-/** A difference in length below this is how recorders stop, and no news; common practice, no source. */
-const lengthWorthMentioningS = 0.01;
-
 /**
- * The tracks to measure, all as long as the shortest of them.
+ * The tracks to measure.
  *
  * @throws {MeasureRefusal} `no-such-channel`, `same-channel` or `rates-differ`
  */
 export function chosenTracks(files: readonly OpenFile[], choices: readonly TrackChoice[]): ChosenTrack[] {
-  const whole = choices.map((choice) => ({
+  const tracks = choices.map((choice) => ({
     role: choice.role,
     source: wavOf(files, choice).track(choice.channel),
   }));
@@ -36,30 +33,25 @@ export function chosenTracks(files: readonly OpenFile[], choices: readonly Track
         'The kick and the overhead are the same channel of the same file; choose one channel for each.',
     });
   }
-  const rates = [...new Set(whole.map(({ source }) => source.sampleRateHz))];
+  const rates = [...new Set(tracks.map(({ source }) => source.sampleRateHz))];
   if (rates.length > 1) {
     throw new MeasureRefusal({
       code: 'rates-differ',
       message: `The files have different sample rates (${rates.join(' and ')} Hz); export both from one session at one rate.`,
     });
   }
-  const frames = Math.min(...whole.map(({ source }) => source.frames));
-  return whole.map(({ role, source }) => ({ role, source: shortened(source, frames) }));
+  return tracks;
 }
 
 /**
- * What the files alone have to say: different lengths, headers that claimed too much.
+ * What only the headers show: that they claimed more than the files hold. The rest is seen while measuring.
  *
- * @param choices - already found good by `chosenTracks`
+ * @throws {MeasureRefusal} `no-such-channel`
  */
 export function headerNotices(files: readonly OpenFile[], choices: readonly TrackChoice[]): FileNotice[] {
-  const facts = choices.map((choice) => ({ role: choice.role, ...wavOf(files, choice).facts }));
-  const lengthsS = facts.map(({ durationS }) => durationS);
-  const byS = Math.max(...lengthsS) - Math.min(...lengthsS);
-  return [
-    ...(byS > lengthWorthMentioningS ? [{ kind: 'lengths-differ' as const, byS }] : []),
-    ...facts.filter(({ cutShort }) => cutShort).map(({ role }) => ({ kind: 'cut-short' as const, role })),
-  ];
+  return choices
+    .filter((choice) => wavOf(files, choice).facts.cutShort)
+    .map(({ role }) => ({ kind: 'cut-short', role }));
 }
 
 function wavOf(files: readonly OpenFile[], { fileIndex, channel }: TrackChoice): WavFile {
@@ -73,24 +65,4 @@ function wavOf(files: readonly OpenFile[], { fileIndex, channel }: TrackChoice):
     });
   }
   return wav;
-}
-
-function shortened(source: TrackSource, frames: number): TrackSource {
-  if (source.frames === frames) return source;
-  return {
-    ...source,
-    frames,
-    async *blocks() {
-      let given = 0;
-      for await (const block of source.blocks()) {
-        yield block.subarray(0, frames - given);
-        given += block.length;
-        if (given >= frames) return;
-      }
-    },
-    async read(startFrame, endFrame) {
-      const samples = await source.read(startFrame, endFrame);
-      return samples.fill(0, Math.max(0, Math.min(samples.length, frames - startFrame)));
-    },
-  };
 }
