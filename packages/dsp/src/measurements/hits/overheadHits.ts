@@ -10,14 +10,13 @@ export interface OverheadHit {
   readonly atSample: number;
   readonly kind: Exclude<HitKind, 'kick'>;
   readonly levelDb: number;
-  /** Largest |x| of each microphone in the 100 ms after, linear. */
-  readonly kickPeak: number;
-  readonly overheadPeak: number;
+  /** Largest |x| of each track in the 100 ms after, linear. */
+  readonly peaks: readonly number[];
 }
 
 export interface OverheadHitFinder {
-  /** The same stretch of both microphones. */
-  push(kick: Float32Array, overhead: Float32Array): void;
+  /** The same stretch of every track. */
+  push(tracks: readonly Float32Array[]): void;
   /** @returns in order of time; kick hits are among them */
   result(): OverheadHit[];
 }
@@ -46,8 +45,7 @@ interface OpenHit {
   body: number;
   bright: number;
   levelDb: number;
-  kickPeak: number;
-  overheadPeak: number;
+  readonly peaks: number[];
   /** True where the bright band rose too, as it does under a stick or a beater. */
   struck: boolean;
 }
@@ -56,16 +54,22 @@ const nothingYet = {
   body: 0,
   bright: 0,
   levelDb: flooredPowerDb(0),
-  kickPeak: 0,
-  overheadPeak: 0,
   struck: false,
 };
 
-/** Finds what the overhead hears struck, in the one pass over both microphones; memory only for the hits. */
-export function createOverheadHits(sampleRateHz: number): OverheadHitFinder {
+export interface OverheadHitsOptions {
+  readonly sampleRateHz: number;
+  readonly trackCount: number;
+  /** Which of the tracks is the overhead. */
+  readonly overhead: number;
+}
+
+/** Finds what the overhead hears struck, in the one pass over all tracks; memory only for the hits. */
+export function createOverheadHits(options: OverheadHitsOptions): OverheadHitFinder {
+  const { sampleRateHz, trackCount, overhead } = options;
   const body = createHopEnergy(sampleRateHz, butterworthBand({ sampleRateHz, ...BODY_BAND }));
   const bright = createHopEnergy(sampleRateHz, butterworthBand({ sampleRateHz, ...BRIGHT_BAND }));
-  const peaks = [createHopPeak(sampleRateHz), createHopPeak(sampleRateHz)];
+  const peakMeters = Array.from({ length: trackCount }, () => createHopPeak(sampleRateHz));
   const rises = createRiseFinder(RISE);
   const brightRises = createRiseFinder(RISE);
   const histogram = createLevelHistogram();
@@ -77,7 +81,7 @@ export function createOverheadHits(sampleRateHz: number): OverheadHitFinder {
     const brightRising = brightRises.push(powers.bright).rising;
     const last = hits.at(-1);
     if (rise.begins && (!last || hop - last.startHop >= APART_HOPS)) {
-      hits.push({ ...nothingYet, startHop: hop });
+      hits.push({ ...nothingYet, startHop: hop, peaks: powers.peaks.map(() => 0) });
     }
     const open = hits.at(-1);
     if (open && hop - open.startHop < FOLLOW_HOPS)
@@ -85,18 +89,12 @@ export function createOverheadHits(sampleRateHz: number): OverheadHitFinder {
     hop += 1;
   };
   return {
-    push(kick, overhead) {
-      const bodyHops = body.push(overhead);
-      const brightHops = bright.push(overhead);
-      const kickPeaks = peaks[0].push(kick);
-      const overheadPeaks = peaks[1].push(overhead);
+    push(tracks) {
+      const bodyHops = body.push(tracks[overhead]);
+      const brightHops = bright.push(tracks[overhead]);
+      const peakHops = peakMeters.map((meter, track) => meter.push(tracks[track]));
       for (let i = 0; i < bodyHops.length; i += 1) {
-        next({
-          body: bodyHops[i],
-          bright: brightHops[i],
-          kickPeak: kickPeaks[i],
-          overheadPeak: overheadPeaks[i],
-        });
+        next({ body: bodyHops[i], bright: brightHops[i], peaks: peakHops.map((hops) => hops[i]) });
       }
     },
     result: () => select(hits, histogram.percentileDb(0.1)).map((hit) => told(hit, sampleRateHz)),
@@ -106,8 +104,7 @@ export function createOverheadHits(sampleRateHz: number): OverheadHitFinder {
 interface HopPowers {
   readonly body: number;
   readonly bright: number;
-  readonly kickPeak: number;
-  readonly overheadPeak: number;
+  readonly peaks: readonly number[];
 }
 
 function follow(
@@ -118,8 +115,9 @@ function follow(
   open.body += now.body;
   open.bright += now.bright;
   open.levelDb = Math.max(open.levelDb, now.levelDb);
-  open.kickPeak = Math.max(open.kickPeak, now.kickPeak);
-  open.overheadPeak = Math.max(open.overheadPeak, now.overheadPeak);
+  now.peaks.forEach((peak, track) => {
+    open.peaks[track] = Math.max(open.peaks[track], peak);
+  });
 }
 
 function select(hits: readonly OpenHit[], floorDb: number): OpenHit[] {
@@ -146,8 +144,7 @@ function told(hit: OpenHit, sampleRateHz: number): OverheadHit {
         ? 'mixed'
         : kindOf(flooredPowerDb(hit.body) - flooredPowerDb(hit.bright)),
     levelDb: hit.levelDb,
-    kickPeak: hit.kickPeak,
-    overheadPeak: hit.overheadPeak,
+    peaks: hit.peaks,
   };
 }
 

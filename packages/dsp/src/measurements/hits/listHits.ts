@@ -1,0 +1,43 @@
+import { amplitudeDb } from '../../decibel';
+import type { HitFacts } from '../../facts';
+import type { OverheadHit } from './overheadHits';
+
+/** A kick hit with the largest |x| of each track around it. */
+export interface KickHit {
+  readonly onsetSample: number;
+  readonly peaks: readonly number[];
+}
+
+/** What the overhead hears within this of a kick's onset is that kick, or something struck with it. */
+const SAME_INSTANT_MS = 40;
+
+/** One list of what was struck, in order of time; a kick with something else on the same instant is told as a kick. */
+export function listHits(
+  kicks: readonly KickHit[],
+  others: readonly OverheadHit[],
+  sampleRateHz: number,
+): HitFacts[] {
+  const near = (SAME_INSTANT_MS / 1000) * sampleRateHz;
+  let next = 0;
+  const alone = others.filter(({ atSample }) => {
+    while (next < kicks.length && kicks[next].onsetSample < atSample - near) next += 1;
+    return next >= kicks.length || kicks[next].onsetSample > atSample + near;
+  });
+  const told = (sample: number, kind: HitFacts['kind'], peaks: readonly number[]): HitFacts => ({
+    timeS: sample / sampleRateHz,
+    kind,
+    peaksDbfs: peaks.map(amplitudeDb),
+  });
+  return [
+    ...kicks.map((hit) => told(hit.onsetSample, 'kick', hit.peaks)),
+    ...alone.map((hit) => told(hit.atSample, hit.kind, hit.peaks)),
+  ].sort((a, b) => a.timeS - b.timeS);
+}
+
+/** @returns the largest peak of one track at any hit; null without hits */
+export function loudestHitDbfs(hits: readonly HitFacts[], track: number): number | null {
+  return hits.reduce<number | null>((loudest, hit) => {
+    const peak = hit.peaksDbfs[track] ?? null;
+    return peak !== null && (loudest === null || peak > loudest) ? peak : loudest;
+  }, null);
+}

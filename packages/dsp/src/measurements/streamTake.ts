@@ -1,0 +1,55 @@
+import type { TrackSource } from '../trackSource';
+import { createKickCandidates } from './hits/kickCandidates';
+import { createOverheadHits, type OverheadHit } from './hits/overheadHits';
+import { selectKicks } from './hits/selectKicks';
+import type { KickCandidate } from './hits/kickCandidates';
+import { createTrackLevel, type TrackLevelFacts } from './level/trackLevel';
+import { lockstep } from './lockstep';
+
+export interface StreamedTake {
+  readonly levels: readonly TrackLevelFacts[];
+  readonly kicks: readonly KickCandidate[];
+  readonly overheadHits: readonly OverheadHit[];
+  /** True where two tracks hold exactly the same samples, and not silence. */
+  readonly sameTwice: boolean;
+}
+
+export interface StreamTakeOptions {
+  readonly sources: readonly TrackSource[];
+  /** Places of the kick microphone and of the overhead that hits are looked for in. */
+  readonly kick: number;
+  readonly overhead: number;
+  readonly onProgress: (progress01: number) => void;
+}
+
+/** The one pass over all tracks: levels, and where hits may be. */
+export async function streamTake(options: StreamTakeOptions): Promise<StreamedTake> {
+  const { sources, kick, overhead, onProgress } = options;
+  const { sampleRateHz } = sources[kick];
+  const levels = sources.map(({ quantisationStep }) => createTrackLevel({ sampleRateHz, quantisationStep }));
+  const candidates = createKickCandidates(sampleRateHz);
+  const struck = createOverheadHits({ sampleRateHz, trackCount: sources.length, overhead });
+  const frames = Math.min(...sources.map((source) => source.frames));
+  let same = kick !== overhead;
+  let read = 0;
+  for await (const pieces of lockstep(sources)) {
+    pieces.forEach((piece, track) => levels[track].push(piece));
+    candidates.push(pieces[kick], pieces[overhead]);
+    struck.push(pieces);
+    same &&= alike(pieces[kick], pieces[overhead]);
+    read += pieces[kick].length;
+    onProgress(read / frames);
+  }
+  const results = levels.map((level) => level.result());
+  return {
+    levels: results,
+    kicks: selectKicks(candidates.result(), sampleRateHz),
+    overheadHits: struck.result(),
+    sameTwice: same && results[kick].samplePeakDbfs !== null,
+  };
+}
+
+function alike(a: Float32Array, b: Float32Array): boolean {
+  for (let i = 0; i < a.length; i += 1) if (a[i] !== b[i]) return false;
+  return true;
+}
