@@ -1,0 +1,47 @@
+import { Box, Flex, chakra } from '@chakra-ui/react';
+import { TextButton } from '../../../components/Button';
+
+const parts = [
+  { time: '0–3 s', strong: 'Sit still.', rest: ' That measures the noise.' },
+  { time: '3–11 s', strong: 'Kick alone', rest: ', eight hits, the last two as hard as you ever play.' },
+  { time: '11–27 s', strong: 'Eight hard snare hits', rest: ', two seconds apart. They measure the room.' },
+  { time: '27–45 s', strong: 'Your loudest groove', rest: ', crashes and all. Let it ring.' },
+];
+
+/** What a first take should hold, so that nothing stays untold. */
+export function CheckTake() {
+  return (
+    <Box as="section" aria-labelledby="check-take">
+      <chakra.h2 id="check-take" fontWeight={600} lineHeight="26px" marginBottom="9px">
+        The check take
+      </chakra.h2>
+      <chakra.ol borderTop="1px solid" borderColor="rule">
+        {parts.map(({ time, strong, rest }) => (
+          <Flex
+            as="li"
+            key={time}
+            borderBottom="1px solid"
+            borderColor="rule"
+            paddingY="9px"
+            lineHeight="26px"
+          >
+            <Box width="84px" flexShrink={0} color="ink.muted">
+              {time}
+            </Box>
+            <Box>
+              <b>{strong}</b>
+              {rest}
+            </Box>
+          </Flex>
+        ))}
+      </chakra.ol>
+      <Box marginTop="10px" fontSize="caption" lineHeight="20px" color="ink.muted">
+        Protect your ears while you play, and take breaks. Export WAV, 24-bit if you can, without fades or
+        normalising.
+      </Box>
+      <TextButton type="button" marginTop="14px" onClick={() => window.print()}>
+        Print this
+      </TextButton>
+    </Box>
+  );
+}

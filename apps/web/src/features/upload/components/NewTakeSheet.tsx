@@ -1,0 +1,72 @@
+import { chakra } from '@chakra-ui/react';
+import { Headline } from '../../../components/Headline';
+import { PageLoading } from '../../../components/PageLoading';
+import { SheetPaper } from '../../../components/SheetPaper';
+import { headline } from '../headline';
+import { useNewTake, type NewTake } from '../hooks/useNewTake';
+import { fileProgress } from '../uploadProgress';
+import { AboutTake } from './AboutTake';
+import { DropAnywhere, type ChooseFiles } from './DropAnywhere';
+import { DropBox } from './DropBox';
+import { FileRows } from './FileRows';
+import { FirstRun } from './FirstRun';
+import { LeaveQuestion } from './LeaveQuestion';
+import { SendRow } from './SendRow';
+
+/** `firstTake` is undefined while it isn't known whether there are takes already. */
+export function NewTakeSheet({ firstTake }: { firstTake: boolean | undefined }) {
+  const newTake = useNewTake();
+  const empty = newTake.state.files.length === 0;
+  return (
+    <DropAnywhere onFiles={newTake.pick}>
+      {(choose) => {
+        if (empty && firstTake === undefined) return <PageLoading />;
+        return (
+          <SheetPaper>
+            {empty && firstTake ? (
+              <FirstRun onChoose={() => choose()} />
+            ) : (
+              <Upload newTake={newTake} choose={choose} />
+            )}
+            {newTake.leaving.asking && <LeaveQuestion {...newTake.leaving} />}
+          </SheetPaper>
+        );
+      }}
+    </DropAnywhere>
+  );
+}
+
+function Upload({ newTake, choose }: { newTake: NewTake; choose: ChooseFiles }) {
+  const { strong, rest } = wordsFor(newTake);
+  return (
+    <>
+      <Headline marginTop={{ base: '4px', lg: '5px' }}>
+        <b>{strong}</b> {rest}
+      </Headline>
+      <chakra.span role="status" srOnly>
+        {strong}
+      </chakra.span>
+      {newTake.state.files.length === 0 ? (
+        <chakra.div marginTop="20px">
+          <DropBox onChoose={() => choose()} minHeight="200px" />
+        </chakra.div>
+      ) : (
+        <FileRows newTake={newTake} choose={choose} />
+      )}
+      <AboutTake newTake={newTake} />
+      <SendRow newTake={newTake} />
+    </>
+  );
+}
+
+function wordsFor({ state, arranged }: NewTake) {
+  const { sending } = state;
+  const sizesBytes = arranged.used.map(({ file }) => file.size);
+  const last = sending.phase === 'sending' ? fileProgress(sizesBytes, sending.progress).at(-1) : undefined;
+  return headline({
+    arranged,
+    sending,
+    secondsLeft: last?.secondsLeft ?? null,
+    pickedCount: state.files.length,
+  });
+}

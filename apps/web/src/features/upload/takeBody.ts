@@ -1,0 +1,39 @@
+import type { CreateTakeRequest } from '@thudline/contracts';
+import type { Arrangement } from './arrangement';
+import { recordedAt } from './recordedAt';
+import type { UploadState } from './uploadState';
+
+/** The text fields of one upload. */
+export function takeRequest(
+  state: UploadState,
+  { slots, used }: Arrangement,
+  nowMs: number,
+): CreateTakeRequest {
+  if (!state.uploadKey) throw new Error('An upload needs its key before it is sent.');
+  return {
+    uploadKey: state.uploadKey,
+    title: state.title.trim(),
+    note: state.note.trim(),
+    recordedAt: recordedAt(
+      used.map(({ file }) => file),
+      nowMs,
+    ),
+    tracks: slots.map(({ role, channel, fileId }) => ({
+      role,
+      channel,
+      fileIndex: used.findIndex(({ id }) => id === fileId),
+    })),
+  };
+}
+
+/** Text first, so that the server can refuse a take before its files travel. */
+export function takeForm(request: CreateTakeRequest, files: readonly File[]): FormData {
+  const form = new FormData();
+  form.append('uploadKey', request.uploadKey);
+  form.append('title', request.title);
+  form.append('note', request.note);
+  if (request.recordedAt) form.append('recordedAt', request.recordedAt);
+  form.append('tracks', JSON.stringify(request.tracks));
+  for (const file of files) form.append('files', file, file.name);
+  return form;
+}
