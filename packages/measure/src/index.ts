@@ -1,3 +1,5 @@
 export * from './fileByteSource';
+export * from './measureFiles';
 export * from './measureRefusal';
 export type { TrackChoice } from './trackChoice';
+export type { MeasureJob, MeasureJobResult, MeasureProgress } from './worker';
