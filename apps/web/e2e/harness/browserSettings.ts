@@ -5,6 +5,8 @@ export interface BrowserSettings {
   publicUrl: string;
   resultsDir: string;
   demoPassword: string;
+  /** File with the cookies of the demo player, signed in. */
+  playerState: string;
 }
 
 /**
@@ -22,12 +24,14 @@ export function browserSettings(): BrowserSettings {
     }
     return value;
   };
+  const resultsDir = setting('TEST_RESULTS_DIR');
   const apiPort = setting('BROWSER_API_PORT');
   return {
     databaseUrl: setting('BROWSER_DATABASE_URL'),
     apiPort,
     publicUrl: `http://127.0.0.1:${apiPort}`,
-    resultsDir: setting('TEST_RESULTS_DIR'),
+    resultsDir,
     demoPassword: setting('DEMO_PASSWORD'),
+    playerState: `${resultsDir}/player.json`,
   };
 }

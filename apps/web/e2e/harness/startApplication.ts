@@ -2,6 +2,7 @@ import { spawn, type ChildProcess } from 'node:child_process';
 import { mkdirSync, openSync } from 'node:fs';
 import { join, resolve } from 'node:path';
 import { browserSettings } from './browserSettings';
+import { keepPlayerState } from './playerState';
 
 const root = resolve(import.meta.dirname, '../../../..');
 const startedWithinMs = 60_000;
@@ -18,6 +19,7 @@ export default async function startApplication(): Promise<() => Promise<void>> {
     const api = start('api', 'apps/api/dist/main.js');
     await healthy(`${publicUrl}/api/health`, api);
     await finished('seed', 'fixtures/dist/seedDemo.js');
+    await keepPlayerState();
   } catch (error) {
     await stopAll();
     throw error;
