@@ -44,11 +44,10 @@ start_services() {
   start_local_services "$data/objects"
 }
 
-# With Vite's server in front (the default), the address people use is Vite's; the built application has one process less.
+# People use one address: Vite's server stands there (the default), or the API itself, with the built application.
 start_application() {
-  local public_port=$WEB_PORT
-  [[ $production_build == no ]] || public_port=$API_PORT
-  address=http://127.0.0.1:$public_port
+  address=http://127.0.0.1:$WEB_PORT
+  [[ $production_build == no ]] || API_PORT=$WEB_PORT
   api=http://127.0.0.1:$API_PORT
   describe_object_store
   application=(env "${object_store[@]}" DATABASE_URL="$(database_url thudline)" JWT_SECRET="$JWT_SECRET"
