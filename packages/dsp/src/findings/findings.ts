@@ -1,0 +1,23 @@
+import type { Finding, Reader, ReportFigures } from '../report/reportTypes';
+import { addingUpFinding } from './addingUpFinding';
+import { arrivalFinding } from './arrivalFinding';
+import { dcOffsetFindings } from './dcOffsetFindings';
+import { levelFinding } from './levelFinding';
+import { noiseFinding } from './noiseFinding';
+
+/**
+ * Everything the sheet says, in the order of the sheet.
+ *
+ * What was said about the files is kept as it is in `figures`: the same for every reader.
+ */
+export function findings(figures: ReportFigures, reader: Reader): Finding[] {
+  return [
+    ...figures.findings.filter((finding) => finding.topic === 'files'),
+    levelFinding(figures, 'kick'),
+    levelFinding(figures, 'overhead'),
+    noiseFinding(figures),
+    ...dcOffsetFindings(figures),
+    arrivalFinding(figures, reader),
+    addingUpFinding(figures),
+  ];
+}

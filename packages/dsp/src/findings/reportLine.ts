@@ -1,0 +1,98 @@
+import { levelStatus, NOISE_WATCH_DBFS } from '../report/level';
+import type { LineSentence, Reader, ReportFigures } from '../report/reportTypes';
+import { addingUpStatus } from './addingUpFinding';
+import { clippedHits } from './clippedHits';
+import { noisierMicrophone } from './noiseFinding';
+import { countText, decimalText, wholeDbfsText, wholeDbText } from './words';
+
+const ROLES = ['kick', 'overhead'] as const;
+const SENTENCES = 2;
+
+/**
+ * The one or two sentences a sheet opens with: what to do, most important first, or that the take is good.
+ *
+ * Order: clipped, silent or without hits, flip, hot, low, noise, what can't be told.
+ */
+export function reportLine(figures: ReportFigures, _reader: Reader): LineSentence[] {
+  const sentences = [
+    ...clipped(figures),
+    ...missing(figures),
+    ...flip(figures),
+    ...hot(figures),
+    ...low(figures),
+    ...noise(figures),
+    ...unsure(figures),
+  ].slice(0, SENTENCES);
+  return sentences.length > 0 ? sentences : [goodTake(figures)];
+}
+
+function clipped(figures: ReportFigures): LineSentence[] {
+  return ROLES.filter((role) => figures[role].level === 'clipped').map((role) => {
+    const hits = clippedHits(figures, figures[role]);
+    const what = hits > 0 ? `${countText(hits)} hit${hits === 1 ? ' is' : 's are'}` : 'its peaks are';
+    return {
+      action: `Turn the ${role} down at least ${wholeDbText(figures[role].gainChangeDb ?? 0)} dB:`,
+      reason: `${what} flattened, and that can’t be repaired.`,
+    };
+  });
+}
+
+function missing(figures: ReportFigures): LineSentence[] {
+  const silent = ROLES.filter((role) => figures[role].samplePeakDbfs === null);
+  if (silent.length > 0) {
+    return silent.map((role) => ({ action: `Check the ${role} microphone:`, reason: 'its file is silent.' }));
+  }
+  return figures.agreement.reason === 'no-kick-hits'
+    ? [{ action: 'Record eight hard kicks:', reason: 'no kick hit was found in this take.' }]
+    : [];
+}
+
+function flip({ agreement }: ReportFigures): LineSentence[] {
+  if (addingUpStatus(agreement) !== 'fix') return [];
+  const gain = decimalText(agreement.flipGainMatchedDb ?? 0);
+  return [{ action: 'Flip the overhead:', reason: `the kick gets ${gain} dB of its low end back.` }];
+}
+
+function hot(figures: ReportFigures): LineSentence[] {
+  return ROLES.filter((role) => figures[role].level === 'hot').map((role) => ({
+    action: `Turn the ${role} down:`,
+    reason: 'a harder hit would clip.',
+  }));
+}
+
+function low(figures: ReportFigures): LineSentence[] {
+  return ROLES.filter((role) => figures[role].level === 'low' && levelStatus(figures[role]) === 'watch').map(
+    (role) => ({
+      action: `Turn the ${role} up:`,
+      reason: 'raising it later would raise the noise as well.',
+    }),
+  );
+}
+
+function noise(figures: ReportFigures): LineSentence[] {
+  const noisier = noisierMicrophone(figures);
+  if (!noisier || noisier.noiseDbfs <= NOISE_WATCH_DBFS) return [];
+  const level = wholeDbfsText(noisier.noiseDbfs);
+  return [
+    { action: 'Look for the noise:', reason: `the ${noisier.role} never gets quieter than ${level} dBFS.` },
+  ];
+}
+
+function unsure(figures: ReportFigures): LineSentence[] {
+  const { agreement } = figures;
+  const status = addingUpStatus(agreement);
+  if (agreement.reason === 'no-kick-hits' || ROLES.some((role) => figures[role].samplePeakDbfs === null))
+    return [];
+  if (status === 'cannot-tell') {
+    return [{ action: 'Record eight hard kicks:', reason: 'this take can’t tell which polarity adds.' }];
+  }
+  return status === 'watch'
+    ? [{ action: 'Compare both polarities by ear:', reason: 'the low end leans too little to be sure.' }]
+    : [];
+}
+
+function goodTake({ agreement }: ReportFigures): LineSentence {
+  return agreement.verdict === 'either-way'
+    ? { action: 'Good take.', reason: 'Levels are right, and the polarity is either way.' }
+    : { action: 'Good take.', reason: 'Keep everything where it is.' };
+}

@@ -1,0 +1,56 @@
+import type { LengthUnit } from '../report/reportTypes';
+
+/** One decimal in sentences (conventions), with the real minus sign. */
+export function decimalText(value: number, digits = 1): string {
+  const text = Math.abs(value).toFixed(digits);
+  return value < 0 && Number(text) !== 0 ? `−${text}` : text;
+}
+
+/** Whole dB in advice ("about"), without a sign: the words say up or down. At least 1, so that nothing is turned by 0. */
+export function wholeDbText(valueDb: number): string {
+  return String(Math.max(1, Math.round(Math.abs(valueDb))));
+}
+
+/** Half-decibel steps for a preamp, without a sign: 6.5 or 6. */
+export function halfDbText(valueDb: number): string {
+  return String(Math.max(0.5, Math.round(Math.abs(valueDb) * 2) / 2));
+}
+
+/** A level rounded to whole dB, with the real minus sign. */
+export function wholeDbfsText(levelDbfs: number): string {
+  return decimalText(levelDbfs, 0);
+}
+
+const NUMBERS = 'no one two three four five six seven eight nine ten eleven twelve'.split(' ');
+
+/** Small counts in words, larger ones in figures. */
+export function countText(count: number): string {
+  return NUMBERS[count] ?? String(count);
+}
+
+/** "one hit", "8 hits": the noun follows the count. */
+export function counted(count: number, noun: string): string {
+  return `${countText(count)} ${noun}${count === 1 ? '' : 's'}`;
+}
+
+export function capitalised(text: string): string {
+  return text.charAt(0).toUpperCase() + text.slice(1);
+}
+
+const INCHES_IN_A_METRE = 39.3701;
+const INCHES_IN_A_FOOT = 12;
+
+/** A distance as one says it: 56 cm, 1.2 m, 1 ft 10 in. Never signed. */
+export function lengthText(metres: number, unit: LengthUnit): string {
+  const size = Math.abs(metres);
+  if (unit === 'metre') return size < 0.995 ? `${Math.round(size * 100)} cm` : `${size.toFixed(1)} m`;
+  const inches = Math.round(size * INCHES_IN_A_METRE);
+  const feet = Math.floor(inches / INCHES_IN_A_FOOT);
+  const rest = `${inches % INCHES_IN_A_FOOT} in`;
+  return feet > 0 ? `${feet} ft ${rest}` : rest;
+}
+
+/** A frequency as one says it: 80 Hz, 2 kHz. */
+export function frequencyText(hz: number): string {
+  return hz < 1000 ? `${Math.round(hz)} Hz` : `${Number((hz / 1000).toFixed(1))} kHz`;
+}

@@ -1,0 +1,122 @@
+import type {
+  ArrivalReason,
+  ChoiceName,
+  ClipRun,
+  HitKind,
+  NoiseFloorReason,
+  Swing,
+  Verdict,
+  VerdictReason,
+} from '../facts';
+
+/** Where the hardest hit should peak, and the level to set the preamp for; dBFS. Common practice, no source. */
+export interface Target {
+  readonly lowDbfs: number;
+  readonly highDbfs: number;
+  readonly aimDbfs: number;
+}
+
+/** What −12 … −6 dBFS with an aim of −9 stands for until the user changes it; common practice, no published source. */
+export const defaultTarget: Target = { lowDbfs: -12, highDbfs: -6, aimDbfs: -9 };
+
+export type LengthUnit = 'metre' | 'foot';
+
+/** Whom a sentence is for. */
+export interface Reader {
+  readonly lengthUnit: LengthUnit;
+  readonly target: Target;
+}
+
+export type Level = 'clipped' | 'hot' | 'on-target' | 'low';
+export type FindingStatus = 'good' | 'watch' | 'fix' | 'cannot-tell';
+export type FindingTopic =
+  'files' | 'kick-level' | 'overhead-level' | 'noise' | 'dc-offset' | 'arrival' | 'adding-up';
+
+export interface TrackReport {
+  samplePeakDbfs: number | null;
+  samplePeakAtS: number | null;
+  headroomDb: number | null;
+  rmsDbfs: number | null;
+  crestFactorDb: number | null;
+  clipping: { runs: ClipRun[]; runCount: number; clippedSamples: number };
+  dcOffset: number;
+  noiseFloorDbfs: number | null;
+  noiseFloorReason: NoiseFloorReason | null;
+  loudestHitDbfs: number | null;
+  level: Level | null;
+  gainChangeDb: number | null;
+}
+
+export interface ArrivalReport {
+  arrivalMs: number | null;
+  arrivalSamples: number | null;
+  arrivalIqrMs: number | null;
+  hitsUsed: number;
+  /** About: arrival times the speed of sound. */
+  pathDifferenceM: number | null;
+  confidence: number;
+  firstSwing: { kick: Swing | null; overhead: Swing | null };
+  reason: ArrivalReason | null;
+}
+
+export interface AgreementReport {
+  lowCorrelation: number | null;
+  flipGainRecordedDb: number | null;
+  flipGainMatchedDb: number | null;
+  matchGainDb: number | null;
+  hitsUsed: number;
+  agreeingHits: number;
+  verdict: Verdict;
+  sure: boolean;
+  reason: VerdictReason | null;
+  bands: { lowHz: number; highHz: number; flipGainDb: number }[];
+  lowCut: { flipGainMatchedDb: number; verdict: Verdict } | null;
+  contraryBands: { centreHz: number; flipGainDb: number }[];
+  choices: {
+    name: ChoiceName;
+    flipped: boolean;
+    shiftMs: number;
+    lowEndDb: number;
+    deepest: { centreHz: number; levelDb: number } | null;
+  }[];
+}
+
+export interface Finding {
+  topic: FindingTopic;
+  status: FindingStatus;
+  /** At most 25 words. */
+  sentence: string;
+  why: string;
+  next: string;
+}
+
+/** What the command line prints and the API sends; the same shape as the contract of that name. */
+export interface ReportFigures {
+  version: 1;
+  sampleRateHz: number;
+  durationS: number;
+  kick: TrackReport;
+  overhead: TrackReport;
+  hits: { timeS: number; kind: HitKind; kickPeakDbfs: number | null; overheadPeakDbfs: number | null }[];
+  arrival: ArrivalReport;
+  agreement: AgreementReport;
+  findings: Finding[];
+}
+
+export interface LineSentence {
+  action: string;
+  reason: string;
+}
+
+export interface NextAction {
+  id: string;
+  action: string;
+  detail: string;
+  leave: boolean;
+}
+
+export interface TakeSummary {
+  status: FindingStatus;
+  strong: string;
+  rest: string;
+}
