@@ -1,3 +1,42 @@
+import { useParams } from 'react-router-dom';
+import { Button } from '../components/Button';
+import { ButtonLink } from '../components/ButtonLink';
+import { PageLoading } from '../components/PageLoading';
+import { PageMessage } from '../components/PageMessage';
+import { useMe } from '../features/auth/hooks/useMe';
+import { MeasuredSheet } from '../features/sheet/components/MeasuredSheet';
+import { MeasuringSheet } from '../features/sheet/components/MeasuringSheet';
+import { useReport } from '../features/sheet/hooks/useReport';
+import { useTake } from '../features/sheet/hooks/useTake';
+import { ApiError } from '../lib/apiClient';
+import { usePageTitle } from '../lib/usePageTitle';
+
+/** One take's sheet: being measured, not measured, or read. */
 export function SheetPage() {
-  return null;
+  const { takeId = '' } = useParams();
+  const { me } = useMe();
+  const { take, error: takeError, retry: retryTake } = useTake(takeId);
+  const { report, error: reportError, retry: retryReport } = useReport(takeId, take?.hasReport ?? false);
+  usePageTitle(take ? `Take ${take.number}${take.title && `, ${take.title}`}` : 'Sheet');
+  const error = takeError ?? reportError;
+  if (error) return <SheetError error={error} retry={takeError ? retryTake : retryReport} />;
+  if (!take || !me || (take.hasReport && !report)) return <PageLoading />;
+  return report ? <MeasuredSheet key={take.id} {...{ take, report, me }} /> : <MeasuringSheet take={take} />;
+}
+
+function SheetError({ error, retry }: { error: Error; retry: () => void }) {
+  if (error instanceof ApiError && error.code === 'not-found')
+    return (
+      <PageMessage
+        strong="There is no such sheet here."
+        rest="It may have been deleted, or it belongs to somebody else."
+      >
+        <ButtonLink to="/takes">Go to your takes</ButtonLink>
+      </PageMessage>
+    );
+  return (
+    <PageMessage strong="The sheet could not be opened." rest={error.message}>
+      <Button onClick={retry}>Try again</Button>
+    </PageMessage>
+  );
 }

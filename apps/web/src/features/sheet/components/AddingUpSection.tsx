@@ -1,0 +1,63 @@
+import { Box } from '@chakra-ui/react';
+import type { ReportResponse } from '@thudline/contracts';
+import { hertz, signedDecibels } from '../../../lib/format';
+import { MarginNote } from './RuledSheet';
+import { addingUpTopics, findingsOf, paragraph, verdictWord, worstStatus } from './sectionWords';
+import { SectionText, SheetSection } from './SheetSection';
+import { PairBench, type PairBenchProps } from './PairBench';
+
+type AddingUpProps = Omit<PairBenchProps, 'chosenHit'> & { chosenHit: number | null };
+
+/** Adding up: whether the two microphones help or cancel, seen and heard. */
+export function AddingUpSection({ chosenHit, ...props }: AddingUpProps) {
+  const { report } = props;
+  const findings = findingsOf(report, addingUpTopics);
+  const verdictFinding = findings.find((finding) => finding.topic === 'adding-up');
+  return (
+    <SheetSection
+      id="adding-up"
+      title="Adding up"
+      word={verdictWord(report)}
+      status={verdictFinding?.status ?? worstStatus(findings)}
+      note={<Caveats report={report} />}
+    >
+      <SectionText>{paragraph(findings)}</SectionText>
+      {report.pairSpectrum && chosenHit !== null ? (
+        <PairBench {...props} chosenHit={chosenHit} />
+      ) : (
+        <Box marginTop="12px" color="ink.muted">
+          {verdictFinding?.next}
+        </Box>
+      )}
+    </SheetSection>
+  );
+}
+
+/** Remarks that belong to the verdict: what would change it, and what is no fault. */
+function Caveats({ report: { agreement, arrival } }: { report: ReportResponse }) {
+  const { lowCut, contraryBands, verdict } = agreement;
+  const opposite =
+    arrival.firstSwing.kick !== null &&
+    arrival.firstSwing.overhead !== null &&
+    arrival.firstSwing.kick !== arrival.firstSwing.overhead;
+  return (
+    <>
+      {lowCut && lowCut.verdict !== verdict && verdict !== 'cannot-tell' && (
+        <MarginNote from="Thudline" about="low cut">
+          This holds without a low cut on the overhead. With one at 80 Hz the flip would change the low end by{' '}
+          {signedDecibels(lowCut.flipGainMatchedDb)}.
+        </MarginNote>
+      )}
+      {contraryBands.map((band) => (
+        <MarginNote key={band.centreHz} from="Thudline" about={`${hertz(band.centreHz)} Hz`}>
+          Here a flip goes the other way, by {signedDecibels(band.flipGainDb)}. Compare by ear.
+        </MarginNote>
+      ))}
+      {opposite && (
+        <MarginNote from="Thudline" about="first swing">
+          The two first swing in opposite directions. Many kits do so by nature; that alone is no fault.
+        </MarginNote>
+      )}
+    </>
+  );
+}

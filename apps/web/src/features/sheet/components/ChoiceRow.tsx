@@ -1,0 +1,149 @@
+import { Box, Flex, chakra } from '@chakra-ui/react';
+import type { KeyboardEvent } from 'react';
+import { Button, TextButton } from '../../../components/Button';
+import { Swell } from '../../../components/Swell';
+import { signedDecibels } from '../../../lib/format';
+import type { useHitExcerpt } from '../hooks/useHitExcerpt';
+import type { PairBenchProps } from './PairBench';
+import { PlayMark } from './PlayMark';
+
+interface ChoiceRowProps extends Omit<PairBenchProps, 'pair'> {
+  hitExcerpt: ReturnType<typeof useHitExcerpt>;
+  hitNumber: number;
+}
+
+/**
+ * Play a hit on repeat and go through the choices. Keys work while the focus is in this row: Space plays, 1 to 5
+ * choose, arrows walk through the hits.
+ */
+export function ChoiceRow(props: ChoiceRowProps) {
+  const { bench, listening, hitExcerpt, hitNumber } = props;
+  const { excerpt } = hitExcerpt;
+  const playsHit = listening.playing === 'hit';
+  const onKeyDown = rowKeys(props);
+  return (
+    <Box onKeyDown={onKeyDown} marginTop="14px" _print={{ display: 'none' }}>
+      <Flex gap={{ base: '14px', lg: '24px' }} rowGap="10px" alignItems="center" wrap="wrap">
+        <Button
+          look="outline"
+          disabled={!excerpt}
+          aria-pressed={playsHit}
+          onClick={() => (playsHit ? listening.stop() : excerpt && void listening.playHit(excerpt))}
+        >
+          <PlayMark playing={playsHit} />
+          {playsHit ? `Stop hit ${hitNumber}` : `Hit ${hitNumber}, on repeat`}
+        </Button>
+        <HitSteps {...props} />
+        <Choices bench={bench} />
+      </Flex>
+      <Box fontSize="caption" color="ink.muted" marginTop="10px" lineHeight="19px">
+        <MatchWords bench={bench} matchDb={listening.matchDb} /> Listen on headphones, not too loud: small
+        speakers can’t play this low.
+      </Box>
+      {listening.failure && (
+        <Box role="alert" color="fix" fontSize="small" marginTop="6px">
+          {listening.failure}
+        </Box>
+      )}
+    </Box>
+  );
+}
+
+function Choices({ bench: { choices, chosen, choose } }: { bench: ChoiceRowProps['bench'] }) {
+  return (
+    <Flex role="group" aria-label="Choice" gap={{ base: '16px', lg: '22px' }} rowGap="8px" wrap="wrap">
+      {choices.map((choice) => {
+        const on = choice === chosen;
+        return (
+          <chakra.button
+            key={choice.name}
+            aria-pressed={on}
+            position="relative"
+            cursor="pointer"
+            minHeight="32px"
+            color={on ? 'ink' : 'ink.muted'}
+            fontWeight={on ? 600 : 400}
+            onClick={() => choose(choice.name)}
+          >
+            {choice.label}
+            {on && <Swell depthPx={5.5} linePx={1.5} />}
+          </chakra.button>
+        );
+      })}
+    </Flex>
+  );
+}
+
+function HitSteps({
+  kickHits,
+  chosenHit,
+  onChooseHit,
+}: Pick<ChoiceRowProps, 'kickHits' | 'chosenHit' | 'onChooseHit'>) {
+  const at = kickHits.indexOf(chosenHit);
+  const step = (by: number, label: string, path: string) => (
+    <chakra.button
+      aria-label={label}
+      disabled={kickHits[at + by] === undefined}
+      width="32px"
+      height="44px"
+      display="inline-flex"
+      alignItems="center"
+      justifyContent="center"
+      cursor="pointer"
+      _disabled={{ opacity: 0.35, cursor: 'not-allowed' }}
+      onClick={() => onChooseHit(kickHits[at + by])}
+    >
+      <svg
+        width="12"
+        height="14"
+        viewBox="0 0 12 14"
+        fill="none"
+        stroke="currentColor"
+        strokeWidth="2"
+        aria-hidden
+      >
+        <path d={path} />
+      </svg>
+    </chakra.button>
+  );
+  return (
+    <Flex marginLeft={{ base: '-8px', lg: '-18px' }}>
+      {step(-1, 'Hit before', 'M9 1 3 7l6 6')}
+      {step(1, 'Hit after', 'M3 1l6 6-6 6')}
+    </Flex>
+  );
+}
+
+/** How the choices are made comparable, with the gains, and the switch between the two balances. */
+function MatchWords({ bench, matchDb }: { bench: ChoiceRowProps['bench']; matchDb: number }) {
+  const { balance, setBalance, chosen } = bench;
+  return (
+    <>
+      Choices are matched from 1 to 8 kHz, so that the low end can differ
+      {Math.abs(matchDb) >= 0.05 ? ` (this one ${signedDecibels(matchDb)})` : ''}.{' '}
+      {balance === 'matched'
+        ? `Overhead ${signedDecibels(chosen.gainDb)}, levels matched: `
+        : 'Levels as recorded: '}
+      <TextButton onClick={() => setBalance(balance === 'matched' ? 'recorded' : 'matched')}>
+        {balance === 'matched' ? 'use them as recorded' : 'match them'}
+      </TextButton>
+      .
+    </>
+  );
+}
+
+function rowKeys({ bench, listening, hitExcerpt, kickHits, chosenHit, onChooseHit }: ChoiceRowProps) {
+  return (event: KeyboardEvent) => {
+    if (event.ctrlKey || event.metaKey || event.altKey) return;
+    const choice = bench.choices[Number(event.key) - 1];
+    const walk = event.key === 'ArrowRight' ? 1 : event.key === 'ArrowLeft' ? -1 : 0;
+    const next = kickHits[kickHits.indexOf(chosenHit) + walk];
+    if (choice) bench.choose(choice.name);
+    else if (walk !== 0 && next !== undefined) onChooseHit(next);
+    else if (event.key === ' ' && !(event.target instanceof HTMLButtonElement)) {
+      if (listening.playing === 'hit') listening.stop();
+      else if (hitExcerpt.excerpt) void listening.playHit(hitExcerpt.excerpt);
+    } else return;
+    event.preventDefault();
+  };
+}

@@ -1,0 +1,89 @@
+import { Box, chakra } from '@chakra-ui/react';
+import type { ReportResponse, TakeResponse, UserSettings } from '@thudline/contracts';
+import { figureGroups, type FigureGroup, type FigureRow } from './figureRows';
+import { FileFacts } from './FileFacts';
+import { PictureTitle, SheetSection } from './SheetSection';
+
+/** Everything that was measured, with unit, definition and source. */
+export function FiguresSection({
+  take,
+  report,
+  settings,
+}: {
+  take: TakeResponse;
+  report: ReportResponse;
+  settings: UserSettings;
+}) {
+  return (
+    <SheetSection id="figures" title="All figures">
+      {figureGroups(report, settings).map((group) => (
+        <FigureTable key={group.title} group={group} />
+      ))}
+      <PictureTitle>Files</PictureTitle>
+      <FileFacts take={take} dspVersion={report.dspVersion} />
+    </SheetSection>
+  );
+}
+
+const cell = { textAlign: 'right', paddingY: '7px', verticalAlign: 'top', whiteSpace: 'nowrap' } as const;
+
+function FigureTable({ group }: { group: FigureGroup }) {
+  return (
+    <>
+      <PictureTitle>{group.title}</PictureTitle>
+      <chakra.table width="100%" fontSize="small" marginTop="4px">
+        <thead>
+          <chakra.tr borderBottom="1px solid" borderColor="rule" color="ink.muted" fontSize="caption">
+            <chakra.th scope="col" textAlign="left" fontWeight={400} paddingY="4px">
+              Figure
+            </chakra.th>
+            {group.columns.map((column) => (
+              <chakra.th key={column} scope="col" fontWeight={400} {...cell} paddingY="4px">
+                {column}
+              </chakra.th>
+            ))}
+            <chakra.th
+              scope="col"
+              textAlign="left"
+              fontWeight={400}
+              paddingLeft="12px"
+              width={{ base: '64px', md: '120px' }}
+            >
+              unit
+            </chakra.th>
+          </chakra.tr>
+        </thead>
+        <tbody>
+          {group.rows.map((row) => (
+            <Row key={row.label + row.unit} row={row} />
+          ))}
+        </tbody>
+      </chakra.table>
+    </>
+  );
+}
+
+function Row({ row }: { row: FigureRow }) {
+  return (
+    <chakra.tr borderBottom="1px solid" borderColor="rule">
+      <chakra.th scope="row" textAlign="left" fontWeight={400} paddingY="3px" paddingRight="12px">
+        <details>
+          <chakra.summary cursor="pointer" paddingY="4px" listStylePosition="outside" title="What is this?">
+            {row.label}
+          </chakra.summary>
+          <Box color="ink.muted" fontSize="caption" maxWidth="380px" paddingBottom="6px">
+            {row.definition} Source: {row.source}.
+          </Box>
+        </details>
+      </chakra.th>
+      {row.values.map((value, i) => (
+        <chakra.td key={i} fontWeight={600} {...cell}>
+          {value}
+        </chakra.td>
+      ))}
+      <chakra.td color="ink.muted" paddingLeft="12px" paddingY="7px" verticalAlign="top" fontSize="caption">
+        {row.unit}
+      </chakra.td>
+    </chakra.tr>
+  );
+}

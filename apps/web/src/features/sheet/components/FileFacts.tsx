@@ -1,0 +1,32 @@
+import { Box, chakra } from '@chakra-ui/react';
+import { paths, type TakeResponse } from '@thudline/contracts';
+import { bytes, clock, plural } from '../../../lib/format';
+
+/** The files as they came: kept and given back bit for bit. */
+export function FileFacts({ take, dspVersion }: { take: TakeResponse; dspVersion: string }) {
+  return (
+    <chakra.ul listStyleType="none" fontSize="small" marginTop="4px">
+      {take.files.map((file) => {
+        const roles = take.tracks.filter((track) => track.fileId === file.id);
+        const named = roles.map((track) =>
+          file.channels > 1 ? `${track.role} on channel ${track.channel + 1}` : track.role,
+        );
+        return (
+          <chakra.li key={file.id} borderBottom="1px solid" borderColor="rule" paddingY="7px">
+            <a href={paths.takeFile(take.id, file.id)} download>
+              {file.name}
+            </a>
+            : {named.join(', ')}. {file.encoding}, {file.sampleRateHz / 1000} kHz,{' '}
+            {plural(file.channels, 'channel')}, {clock(file.durationS, true)}, {bytes(file.bytes)}
+            <Box color="ink.muted" fontSize="caption" overflowWrap="anywhere">
+              SHA-256 {file.sha256}
+            </Box>
+          </chakra.li>
+        );
+      })}
+      <chakra.li color="ink.muted" fontSize="caption" paddingY="7px">
+        Kept bit for bit. Measured by measurements {dspVersion}.
+      </chakra.li>
+    </chakra.ul>
+  );
+}

@@ -1,0 +1,75 @@
+import { Box, Flex, chakra } from '@chakra-ui/react';
+import type { NextAction, TakeResponse } from '@thudline/contracts';
+import { useState } from 'react';
+import { CheckBox } from '../../../components/CheckBox';
+import { useTakeEdits } from '../hooks/useTakeEdits';
+
+/** "Before the next take": what to do, in order of what matters, to tick as you go. */
+export function NextActions({ take, actions }: { take: TakeResponse; actions: NextAction[] }) {
+  const { update } = useTakeEdits(take);
+  const [failure, setFailure] = useState('');
+  const toggle = async (id: string, done: boolean) => {
+    const others = take.tickedActions.filter((each) => each !== id);
+    setFailure('');
+    try {
+      await update({ tickedActions: done ? [...others, id] : others });
+    } catch (error) {
+      setFailure(error instanceof Error ? error.message : 'The tick could not be kept. Try again.');
+    }
+  };
+  if (actions.length === 0) return null;
+  return (
+    <Box as="section" aria-labelledby="next-head" marginTop="18px">
+      <Flex justifyContent="space-between" alignItems="baseline" gap="16px" paddingBottom="7px">
+        <chakra.h2 id="next-head" fontWeight={600} fontSize="body">
+          Before the next take
+        </chakra.h2>
+        <Box
+          color="ink.muted"
+          fontSize="caption"
+          display={{ base: 'none', sm: 'block' }}
+          _print={{ display: 'none' }}
+        >
+          Tick as you go.
+        </Box>
+      </Flex>
+      <chakra.ul listStyleType="none" borderTop="1px solid" borderColor="rule">
+        {actions.map((action) => (
+          <ActionRow
+            key={action.id}
+            action={action}
+            done={take.tickedActions.includes(action.id)}
+            onToggle={(done) => void toggle(action.id, done)}
+          />
+        ))}
+      </chakra.ul>
+      {failure && (
+        <Box role="alert" color="fix" fontSize="small" marginTop="8px">
+          {failure}
+        </Box>
+      )}
+    </Box>
+  );
+}
+
+function ActionRow({
+  action,
+  done,
+  onToggle,
+}: {
+  action: NextAction;
+  done: boolean;
+  onToggle: (done: boolean) => void;
+}) {
+  const quiet = done || action.leave;
+  return (
+    <chakra.li borderBottom="1px solid" borderColor="rule" paddingY="8px">
+      <CheckBox checked={done} onChange={onToggle}>
+        <chakra.span color={quiet ? 'ink.muted' : 'ink'} fontWeight={quiet ? 400 : 600}>
+          {action.action}
+        </chakra.span>{' '}
+        <chakra.span color="ink.muted">{action.detail}</chakra.span>
+      </CheckBox>
+    </chakra.li>
+  );
+}

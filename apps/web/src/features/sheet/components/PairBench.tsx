@@ -1,0 +1,78 @@
+import { Box } from '@chakra-ui/react';
+import type { ReportResponse } from '@thudline/contracts';
+import { choiceLowEnd, type PairSpectrum } from '@thudline/dsp';
+import { useState } from 'react';
+import { TextButton } from '../../../components/Button';
+import type { Bench, NamedChoice } from '../hooks/useChoice';
+import { useHitExcerpt } from '../hooks/useHitExcerpt';
+import type { Listening } from '../hooks/useListening';
+import type { usePairSpectrum } from '../hooks/usePairSpectrum';
+import { LowEndLine } from '../pictures/LowEndLine';
+import type { TraceBand } from '../pictures/pairTraceLayout';
+import { WhereItHelps } from '../pictures/WhereItHelps';
+import { ChoiceRow } from './ChoiceRow';
+import { HitTrace } from './HitTrace';
+import { PictureTitle } from './SheetSection';
+import { WhereKey } from './WhereKey';
+
+export interface PairBenchProps {
+  report: ReportResponse;
+  pair: ReturnType<typeof usePairSpectrum>;
+  bench: Bench;
+  listening: Listening;
+  /** Indexes of the kick hits in the report's hits. */
+  kickHits: number[];
+  chosenHit: number;
+  onChooseHit: (hitIndex: number) => void;
+}
+
+/** Where choices are looked at and heard: everything below follows the one that is chosen. */
+export function PairBench(props: PairBenchProps) {
+  const { spectrum, error, retry } = props.pair;
+  if (error)
+    return (
+      <Box role="alert" marginTop="14px">
+        The pictures could not be loaded. {error.message}{' '}
+        <TextButton fontWeight={600} onClick={retry}>
+          Try again
+        </TextButton>
+      </Box>
+    );
+  if (!spectrum)
+    return <Box height={{ base: '860px', lg: '760px' }} role="status" aria-label="Loading the pictures" />;
+  return <LoadedBench {...props} spectrum={spectrum} />;
+}
+
+/** Without any low end in either file the two neither help nor harm. */
+const lowEndDb = (spectrum: PairSpectrum, choice: NamedChoice) => choiceLowEnd(spectrum, choice) ?? 0;
+
+const tick = (spectrum: PairSpectrum, choice: NamedChoice) => ({
+  levelDb: lowEndDb(spectrum, choice),
+  label: choice.tickLabel,
+});
+
+function LoadedBench({ spectrum, ...props }: PairBenchProps & { spectrum: PairSpectrum }) {
+  const { report, bench, kickHits, chosenHit } = props;
+  const { chosen, asRecorded, choices } = bench;
+  const hitExcerpt = useHitExcerpt(report, chosenHit);
+  const [band, setBand] = useState<TraceBand>('low');
+  const hitNumber = kickHits.indexOf(chosenHit) + 1;
+  const others = choices.filter((choice) => choice !== chosen && choice !== asRecorded);
+  return (
+    <>
+      <ChoiceRow {...props} hitExcerpt={hitExcerpt} hitNumber={hitNumber} />
+      <PictureTitle>Low end of the two added</PictureTitle>
+      <LowEndLine
+        recordedDb={lowEndDb(spectrum, asRecorded)}
+        chosen={{ ...tick(spectrum, chosen), label: chosen.label }}
+        others={others.map((choice) => tick(spectrum, choice))}
+      />
+      <HitTrace
+        {...{ report, chosen, hitExcerpt, hitNumber, band, setBand, hitS: report.hits[chosenHit].timeS }}
+      />
+      <PictureTitle>Where it helps, from low to high</PictureTitle>
+      <WhereItHelps {...{ spectrum, asRecorded, chosen }} />
+      <WhereKey {...{ spectrum, asRecorded, chosen }} />
+    </>
+  );
+}

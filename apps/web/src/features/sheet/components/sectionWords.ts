@@ -1,0 +1,45 @@
+import type { Finding, FindingStatus, ReportResponse } from '@thudline/contracts';
+
+const severity: readonly FindingStatus[] = ['fix', 'watch', 'cannot-tell', 'good'];
+
+/** Findings of some topics, the most pressing first. */
+export function findingsOf(report: ReportResponse, topics: readonly Finding['topic'][]): Finding[] {
+  return report.findings
+    .filter((finding) => topics.includes(finding.topic))
+    .sort((a, b) => severity.indexOf(a.status) - severity.indexOf(b.status));
+}
+
+export const worstStatus = (findings: readonly Finding[]): FindingStatus => findings[0]?.status ?? 'good';
+
+const levelWords = { clipped: 'clipped', hot: 'hot', 'on-target': 'on target', low: 'low' } as const;
+const levelOrder = ['clipped', 'hot', 'low', 'on-target'] as const;
+
+/** One word for both microphones' levels: the one that asks for most. */
+export function levelsWord({ kick, overhead }: ReportResponse): string {
+  const worst = levelOrder.find((level) => kick.level === level || overhead.level === level);
+  return worst ? levelWords[worst] : 'can’t tell';
+}
+
+const verdictWords = {
+  keep: 'keep',
+  flip: 'flip',
+  'either-way': 'either way',
+  'cannot-tell': 'can’t tell',
+} as const;
+
+export const verdictWord = ({ agreement }: ReportResponse): string => verdictWords[agreement.verdict];
+
+export const levelTopics = ['kick-level', 'overhead-level', 'noise', 'dc-offset'] as const;
+export const addingUpTopics = ['adding-up', 'arrival'] as const;
+
+/**
+ * A section's paragraph: every finding's sentence; the reason only of what asks for something, since a good finding
+ * folds to its sentence.
+ */
+export function paragraph(findings: readonly Finding[]): string {
+  return findings
+    .map((finding) =>
+      finding.status === 'good' ? finding.sentence : [finding.sentence, finding.why].join(' ').trim(),
+    )
+    .join(' ');
+}

@@ -1,0 +1,71 @@
+import type { Target } from '@thudline/contracts';
+import { number } from '../../../lib/format';
+import { Hatch } from './Hatch';
+import type { StripScale } from './HitStrip';
+import { ink } from './ink';
+
+const axisY = 155;
+const bandTop = 24;
+
+/** Target band, aim, axis and the hatched edge where it clips. */
+export function HitStripAxis({
+  widthPx,
+  x,
+  hatchId,
+  target,
+  ticks,
+}: {
+  widthPx: number;
+  x: StripScale;
+  hatchId: string;
+  target: Target;
+  ticks: number[];
+}) {
+  const low = x(target.lowDbfs);
+  const high = x(target.highDbfs);
+  return (
+    <>
+      <defs>
+        <Hatch id={hatchId} color={ink.fix} />
+      </defs>
+      <rect x={low} y={bandTop} width={high - low} height={axisY - bandTop} fill={ink.target} />
+      <path
+        d={`M${low} ${bandTop - 6}V${axisY}M${high} ${bandTop - 6}V${axisY}`}
+        stroke={ink.ink}
+        strokeWidth="1.2"
+      />
+      <text x={(low + high) / 2} y={14} textAnchor="middle" fontSize="13" fontWeight="600" fill={ink.ink}>
+        target
+      </text>
+      <rect
+        x={x(0)}
+        y={bandTop}
+        width={widthPx - x(0)}
+        height={axisY - bandTop}
+        fill={`url(#${hatchId})`}
+        opacity="0.55"
+      />
+      <path d={`M${x(0)} ${bandTop - 6}V${axisY}`} stroke={ink.fix} strokeWidth="1.6" />
+      <text x={widthPx} y={14} textAnchor="end" fontSize="13" fontWeight="600" fill={ink.fix}>
+        clips
+      </text>
+      <path d={`M${x.left} ${axisY}H${x.right}`} stroke={ink.edge} strokeWidth="1.4" />
+      {ticks.map((tick) => (
+        <g key={tick}>
+          <path d={`M${x(tick)} ${axisY - 4}v8`} stroke={ink.edge} strokeWidth="1.2" />
+          <text x={x(tick)} y={172} textAnchor="middle" fontSize="13" fill={ink.muted}>
+            {number(tick, 0)}
+            {tick === 0 && widthPx >= 480 ? ' dBFS' : ''}
+          </text>
+        </g>
+      ))}
+      <path d={`M${x(target.aimDbfs)} ${axisY - 10}l4 6.5h-8z`} fill={ink.ink} />
+      <text x={x(target.aimDbfs)} y={172} textAnchor="middle" fontSize="13" fontWeight="600" fill={ink.ink}>
+        aim
+      </text>
+      <text x={0} y={172} fontSize="13" fill={ink.muted}>
+        {widthPx < 480 ? 'dot = hit' : 'a dot = a hit'}
+      </text>
+    </>
+  );
+}

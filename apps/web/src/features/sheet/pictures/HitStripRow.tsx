@@ -1,0 +1,227 @@
+import { Box, chakra } from '@chakra-ui/react';
+import type { Target, TrackReport } from '@thudline/contracts';
+import { useId, useMemo, useState, type KeyboardEvent } from 'react';
+import { number, plural } from '../../../lib/format';
+import type { StripScale } from './HitStrip';
+import { changeLabel, dotSizes, rowHeightPx, stackDots, type Dot, type StripHit } from './hitStripLayout';
+import { ink } from './ink';
+
+interface RowProps {
+  role: 'kick' | 'overhead';
+  y: number;
+  hits: StripHit[];
+  track: TrackReport;
+  target: Target;
+  widthPx: number;
+  x: StripScale;
+  chosenHit: number | null;
+  onChoose: (hitIndex: number) => void;
+}
+
+/** One microphone's line: its name, its dots, and the arrow from the hardest hit to the aim. */
+export function HitStripRow({ role, y, hits, track, target, widthPx, x, chosenHit, onChoose }: RowProps) {
+  const dots = useMemo(() => stackDots(hits, x), [hits, x]);
+  const hardest = dots.find((dot) => dot.hardest);
+  const clipped = track.level === 'clipped';
+  return (
+    <>
+      <chakra.svg
+        position="absolute"
+        inset="0"
+        width={`${widthPx}px`}
+        height="180px"
+        aria-hidden
+        pointerEvents="none"
+      >
+        <text x={0} y={y - 4} fontSize="15" fontWeight="600" fill={ink[role]}>
+          {role}
+        </text>
+        <text x={0} y={y + 13} fontSize="13" fill={ink.muted}>
+          {hits.length === 0 ? 'no hit' : plural(hits.length, 'hit')}
+        </text>
+        <path d={`M${x.left} ${y}H${x.right}`} stroke={ink.rule} strokeWidth="1.2" />
+        {clipped && <ClipCrosses x={x(0) + 14} y={y} count={track.clipping.runCount} role={role} />}
+        {dots.map((dot) => (
+          <DotMark key={dot.index} dot={dot} y={y} role={role} chosen={dot.index === chosenHit} />
+        ))}
+        {hardest && !clipped && (
+          <HardestLabel dot={hardest} y={y} role={role} x={x} stacked={hasDotRight(dots, hardest)} />
+        )}
+        {hardest && (
+          <GainArrow {...{ y, x, track, target, clipped, fromDbfs: clipped ? 0 : hardest.peakDbfs }} />
+        )}
+      </chakra.svg>
+      <DotButtons {...{ dots, y, role, chosenHit, onChoose }} />
+    </>
+  );
+}
+
+const hasDotRight = (dots: readonly Dot[], hardest: Dot) =>
+  dots.some((dot) => dot !== hardest && dot.row > 0 && dot.x > hardest.x - 14);
+
+function DotMark({
+  dot,
+  y,
+  role,
+  chosen,
+}: {
+  dot: Dot;
+  y: number;
+  role: 'kick' | 'overhead';
+  chosen: boolean;
+}) {
+  const r = dot.hardest ? dotSizes.hardestRadiusPx : dotSizes.dotRadiusPx;
+  const cy = y + dot.row * rowHeightPx;
+  const ring = role === 'overhead';
+  return (
+    <>
+      {chosen && <circle cx={dot.x} cy={cy} r={r + 3.4} fill="none" stroke={ink.ink} strokeWidth="1.6" />}
+      <circle
+        cx={dot.x}
+        cy={cy}
+        r={ring ? r - 0.9 : r}
+        fill={ring ? ink.sheet : ink.kick}
+        stroke={ring ? ink.overhead : 'none'}
+        strokeWidth={ring ? 1.9 : 0}
+      />
+    </>
+  );
+}
+
+function ClipCrosses({
+  x,
+  y,
+  count,
+  role,
+}: {
+  x: number;
+  y: number;
+  count: number;
+  role: 'kick' | 'overhead';
+}) {
+  return (
+    <>
+      <path d={`M${x - 6} ${y - 6}l12 12m0-12l-12 12`} stroke={ink[role]} strokeWidth="2.8" />
+      <text x={x} y={y + 22} fontSize="13" fontWeight="600" fill={ink.fix} textAnchor="middle" {...halo}>
+        ×{count}
+      </text>
+    </>
+  );
+}
+
+const halo = { paintOrder: 'stroke', stroke: ink.sheet, strokeWidth: 5, strokeLinejoin: 'round' } as const;
+
+function HardestLabel({
+  dot,
+  y,
+  role,
+  x,
+  stacked,
+}: {
+  dot: Dot;
+  y: number;
+  role: 'kick' | 'overhead';
+  x: StripScale;
+  stacked: boolean;
+}) {
+  const fitsRight = dot.x + 46 < x.right;
+  const below = stacked || !fitsRight;
+  return (
+    <text
+      x={fitsRight ? dot.x + 10 : x.right - 4}
+      y={below ? y + 19 : y + 5}
+      textAnchor={fitsRight ? 'start' : 'end'}
+      fontSize="15"
+      fontWeight="600"
+      fill={ink[role]}
+      {...halo}
+    >
+      {number(dot.peakDbfs)}
+    </text>
+  );
+}
+
+/** From the hardest hit to the aim, above the dots; nothing where the preamp stays where it is. */
+function GainArrow({
+  y,
+  x,
+  track,
+  target,
+  clipped,
+  fromDbfs,
+}: Pick<RowProps, 'y' | 'x' | 'track' | 'target'> & { clipped: boolean; fromDbfs: number }) {
+  if (track.gainChangeDb === null || track.level === null || track.level === 'on-target') return null;
+  const from = x(fromDbfs);
+  const to = x(target.aimDbfs);
+  const way = Math.sign(to - from);
+  const color = track.level === 'low' ? ink.watch : ink.fix;
+  const arrowY = y - 23;
+  const labelLeft = way < 0;
+  return (
+    <>
+      <path
+        d={`M${from} ${y - 8}V${arrowY - 4}M${from} ${arrowY}H${to}m${-6 * way}-5l${6 * way} 5l${-6 * way} 5`}
+        fill="none"
+        stroke={color}
+        strokeWidth="1.9"
+      />
+      <text
+        x={to + 7 * way}
+        y={arrowY + 4.5}
+        textAnchor={labelLeft ? 'end' : 'start'}
+        fontSize="13"
+        fontWeight="600"
+        fill={color}
+        {...halo}
+      >
+        {changeLabel(track.gainChangeDb, clipped)}
+      </text>
+    </>
+  );
+}
+
+/** The dots as targets of 24 px for pointer and keys: one stop for Tab, arrows walk from hit to hit by level. */
+function DotButtons({
+  dots,
+  y,
+  role,
+  chosenHit,
+  onChoose,
+}: Pick<RowProps, 'y' | 'role' | 'chosenHit' | 'onChoose'> & { dots: Dot[] }) {
+  const id = useId();
+  const ordered = useMemo(() => [...dots].sort((a, b) => a.peakDbfs - b.peakDbfs), [dots]);
+  const [focused, setFocused] = useState<number | null>(null);
+  const tabStop = ordered.find((dot) => dot.index === (focused ?? chosenHit)) ?? ordered.at(-1);
+  const onKeyDown = (event: KeyboardEvent<HTMLElement>, at: number) => {
+    const step = event.key === 'ArrowRight' ? 1 : event.key === 'ArrowLeft' ? -1 : 0;
+    const next = ordered[at + step];
+    if (step === 0 || !next) return;
+    event.preventDefault();
+    setFocused(next.index);
+    document.getElementById(`${id}-${next.index}`)?.focus();
+  };
+  return (
+    <Box role="group" aria-label={`${role} hits by level`} _print={{ display: 'none' }}>
+      {ordered.map((dot, at) => (
+        <chakra.button
+          key={dot.index}
+          id={`${id}-${dot.index}`}
+          position="absolute"
+          left={`${dot.x - 12}px`}
+          top={`${y + dot.row * rowHeightPx - 12}px`}
+          width="24px"
+          height="24px"
+          borderRadius="50%"
+          cursor="pointer"
+          tabIndex={dot === tabStop ? 0 : -1}
+          aria-pressed={dot.index === chosenHit}
+          aria-label={`${role} hit ${number(dot.peakDbfs)} dBFS`}
+          title={`${number(dot.peakDbfs)} dBFS`}
+          onKeyDown={(event) => onKeyDown(event, at)}
+          onFocus={() => setFocused(dot.index)}
+          onClick={() => onChoose(dot.index)}
+        />
+      ))}
+    </Box>
+  );
+}

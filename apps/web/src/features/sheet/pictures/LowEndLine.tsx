@@ -1,0 +1,147 @@
+import { Box } from '@chakra-ui/react';
+import { useId } from 'react';
+import { signedDecibels } from '../../../lib/format';
+import { useWidth } from '../../../lib/useWidth';
+import { Hatch } from './Hatch';
+import { ink } from './ink';
+import { arcPath, axisDb, placeTicks, type LineTick } from './lowEndLineLayout';
+
+const lineY = 57;
+
+/** As recorded (ring) to chosen (disc) between pulling apart and adding fully; the other choices as ticks. */
+export function LowEndLine({
+  recordedDb,
+  chosen,
+  others,
+}: {
+  recordedDb: number;
+  chosen: LineTick;
+  others: LineTick[];
+}) {
+  const { ref, widthPx } = useWidth<HTMLDivElement>();
+  const hatchId = useId();
+  const left = 6;
+  const right = widthPx - 6;
+  const x = (db: number) => {
+    const inside = Math.min(axisDb.max, Math.max(axisDb.min, db));
+    return left + ((inside - axisDb.min) / (axisDb.max - axisDb.min)) * (right - left);
+  };
+  const ticks = placeTicks(others, x, widthPx);
+  const rows = Math.max(0, ...ticks.map((tick) => tick.row));
+  const endsY = 97 + rows * 16;
+  const narrow = widthPx < 480;
+  return (
+    <Box ref={ref}>
+      <svg
+        width={widthPx}
+        height={endsY + 8}
+        role="img"
+        aria-label={describe(recordedDb, chosen)}
+        style={{ display: 'block' }}
+      >
+        <defs>
+          <Hatch id={hatchId} color={ink.hatch} gapPx={6} />
+        </defs>
+        <rect x={left} y={lineY - 3.5} width={x(0) - left} height={7} fill={`url(#${hatchId})`} />
+        <rect x={x(0)} y={lineY - 3.5} width={right - x(0)} height={7} fill={ink.together} />
+        <path d={`M${x(0)} ${lineY - 15}v30`} stroke={ink.ink} strokeWidth="1.6" />
+        {ticks.map((tick) => (
+          <g key={tick.label}>
+            <path d={`M${tick.x} ${lineY - 7}v${28 + tick.row * 16}`} stroke={ink.ink} strokeWidth="1.6" />
+            <text
+              x={tick.x + (tick.side === 'left' ? -5 : 5)}
+              y={lineY + 23 + tick.row * 16}
+              textAnchor={tick.side === 'left' ? 'end' : 'start'}
+              fontSize="13"
+              fill={ink.muted}
+            >
+              {tick.label}
+            </text>
+          </g>
+        ))}
+        <EndPoints
+          {...{ recordedX: x(recordedDb), chosenX: x(chosen.levelDb), recordedDb, chosen, widthPx }}
+        />
+        <text x={left} y={endsY} fontSize="13" fill={ink.muted}>
+          {narrow ? 'apart −3 dB' : 'pull apart −3 dB'}
+        </text>
+        <text x={x(0)} y={endsY} fontSize="13" fill={ink.muted} textAnchor="middle">
+          {narrow ? '0' : '0 = no help, no harm'}
+        </text>
+        <text x={right} y={endsY} fontSize="13" fill={ink.muted} textAnchor="end">
+          add fully +3 dB
+        </text>
+      </svg>
+    </Box>
+  );
+}
+
+interface EndPointsProps {
+  recordedX: number;
+  chosenX: number;
+  recordedDb: number;
+  chosen: LineTick;
+  widthPx: number;
+}
+
+function EndPoints({ recordedX, chosenX, recordedDb, chosen, widthPx }: EndPointsProps) {
+  const moved = Math.abs(chosenX - recordedX) > 16;
+  const outward = chosenX >= recordedX ? 1 : -1;
+  const fits = (x: number, way: number, text: string) =>
+    way < 0 ? x - text.length * 7.2 > 0 : x + text.length * 7.2 < widthPx;
+  const label = (x: number, way: number, text: string) => {
+    const side = fits(x, way, text) ? way : -way;
+    return (
+      <text
+        x={x + 15 * side}
+        y={lineY - 13}
+        textAnchor={side < 0 ? 'end' : 'start'}
+        fontSize="13"
+        fontWeight="600"
+        fill={ink.ink}
+      >
+        {text}
+      </text>
+    );
+  };
+  return (
+    <>
+      {moved && (
+        <>
+          <path d={arcPath(recordedX, chosenX, lineY)} fill="none" stroke={ink.ink} strokeWidth="1.8" />
+          <path
+            d={`M${chosenX - 7} ${lineY - 19}l7 8l6-8.5`}
+            fill="none"
+            stroke={ink.ink}
+            strokeWidth="1.8"
+          />
+          <text
+            x={(recordedX + chosenX) / 2}
+            y={14}
+            textAnchor="middle"
+            fontSize="15"
+            fontWeight="600"
+            fill={ink.ink}
+          >
+            {signedDecibels(chosen.levelDb - recordedDb)}
+          </text>
+        </>
+      )}
+      <circle cx={recordedX} cy={lineY} r={7} fill={ink.sheet} stroke={ink.ink} strokeWidth="2.2" />
+      {label(recordedX, -outward, 'as recorded')}
+      {chosen.label !== 'as recorded' && (
+        <>
+          <circle cx={chosenX} cy={lineY} r={moved ? 8 : 4} fill={ink.ink} />
+          {label(chosenX, outward, chosen.label)}
+        </>
+      )}
+    </>
+  );
+}
+
+function describe(recordedDb: number, chosen: LineTick): string {
+  return (
+    `Low end of the two added, against no help and no harm: as recorded ${signedDecibels(recordedDb)}; ` +
+    `${chosen.label} ${signedDecibels(chosen.levelDb)}, a difference of ${signedDecibels(chosen.levelDb - recordedDb)}.`
+  );
+}

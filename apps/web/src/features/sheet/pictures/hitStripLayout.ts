@@ -1,0 +1,74 @@
+import type { Target } from '@thudline/contracts';
+
+export interface StripHit {
+  /** Index into the report's hits. */
+  index: number;
+  peakDbfs: number;
+}
+
+export interface Dot extends StripHit {
+  x: number;
+  /** Rows from the line: 0 on it, 1 below, −1 above, and so on. */
+  row: number;
+  hardest: boolean;
+}
+
+const dotRadiusPx = 4.6;
+const hardestRadiusPx = 6;
+const gapPx = 1.4;
+export const rowHeightPx = 9.6;
+export const dotSizes = { dotRadiusPx, hardestRadiusPx };
+
+/** The axis ends at −24 dBFS and goes lower, in steps of 6 dB, only where a hit or the target needs it. */
+export function axisStartDbfs(peaksDbfs: readonly number[], target: Target): number {
+  const lowest = Math.min(target.lowDbfs - 6, -24, ...peaksDbfs);
+  return Math.max(-60, Math.floor(lowest / 6) * 6);
+}
+
+export function ticksDbfs(startDbfs: number, widthPx: number): number[] {
+  const stepDb = (-startDbfs / 6) * 54 > widthPx ? 12 : 6;
+  const ticks: number[] = [];
+  for (let at = 0; at >= startDbfs; at -= stepDb) ticks.push(at === 0 ? 0 : at);
+  return ticks.reverse();
+}
+
+/**
+ * Where each hit's dot stands: on the line at its level, stacked below and above where dots would cover each other.
+ * Never jittered: x is the level and nothing else.
+ */
+export function stackDots(hits: readonly StripHit[], xOf: (dbfs: number) => number): Dot[] {
+  const hardestIndex = hits.reduce(
+    (best, hit, i) => (hit.peakDbfs > (hits[best]?.peakDbfs ?? -Infinity) ? i : best),
+    0,
+  );
+  const placed: Dot[] = [];
+  const order = hits
+    .map((hit, i) => ({ hit, hardest: i === hardestIndex }))
+    .sort((a, b) => b.hit.peakDbfs - a.hit.peakDbfs);
+  for (const { hit, hardest } of order) {
+    const x = xOf(hit.peakDbfs);
+    placed.push({ ...hit, x, hardest, row: freeRow(placed, x, hardest) });
+  }
+  return placed;
+}
+
+const radius = (hardest: boolean) => (hardest ? hardestRadiusPx : dotRadiusPx);
+
+function freeRow(placed: readonly Dot[], x: number, hardest: boolean): number {
+  for (let distance = 0; ; distance++) {
+    for (const row of distance === 0 ? [0] : [distance, -distance]) {
+      const crowded = placed.some(
+        (dot) => dot.row === row && Math.abs(dot.x - x) < radius(dot.hardest) + radius(hardest) + gapPx,
+      );
+      // More than three rows either way would run into the next line: dots may cover each other there.
+      if (!crowded || distance === 3) return row;
+    }
+  }
+}
+
+/** "down 6.5 dB", "up 5 dB"; whole and half decibels without a needless zero. */
+export function changeLabel(gainChangeDb: number, clipped: boolean): string {
+  const size = String(Math.round(Math.abs(gainChangeDb) * 2) / 2);
+  if (clipped) return `down at least ${size} dB`;
+  return `${gainChangeDb < 0 ? 'down' : 'up'} ${size} dB`;
+}

@@ -1,0 +1,159 @@
+import { ChakraProvider } from '@chakra-ui/react';
+import { paths } from '@thudline/contracts';
+import { render, screen, waitFor, within } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
+import { createMemoryRouter, RouterProvider } from 'react-router-dom';
+import { SWRConfig } from 'swr';
+import { fakeServer, json, refusal, type FakeRoutes } from '../testing/fakeServer';
+import {
+  measurement,
+  sampleExcerpt,
+  sampleMe,
+  samplePairSpectrumBytes,
+  sampleReport,
+  sampleTake,
+  takeId,
+} from '../testing/sampleData';
+import { system } from '../theme/system';
+import { SheetPage } from './SheetPage';
+
+const report = sampleReport();
+const served: FakeRoutes = {
+  [`GET ${paths.me}`]: json(sampleMe),
+  [`GET ${paths.take(takeId)}`]: json(sampleTake()),
+  [`GET ${paths.report(takeId)}`]: json(report),
+  [`GET ${paths.pairSpectrum(takeId)}`]: () => ({ bytes: samplePairSpectrumBytes(report.pairSpectrum!) }),
+  [`GET ${paths.excerpt(takeId)}`]: () => sampleExcerpt(),
+};
+
+function open(routes: FakeRoutes) {
+  const server = fakeServer({ ...served, ...routes });
+  const router = createMemoryRouter([{ path: '/takes/:takeId', element: <SheetPage /> }], {
+    initialEntries: [`/takes/${takeId}`],
+  });
+  render(
+    <ChakraProvider value={system}>
+      <SWRConfig value={{ provider: () => new Map(), shouldRetryOnError: false, dedupingInterval: 0 }}>
+        <RouterProvider router={router} />
+      </SWRConfig>
+    </ChakraProvider>,
+  );
+  return server;
+}
+
+describe('the sheet', () => {
+  it('waits without jumping while it is loading', () => {
+    open({ [`GET ${paths.take(takeId)}`]: () => new Promise(() => undefined) });
+    expect(screen.getByRole('status', { name: 'Loading' })).toBeInTheDocument();
+  });
+
+  it('opens with the line, then what to do before the next take', async () => {
+    open({});
+    const line = await screen.findByRole('heading', { level: 1 });
+    expect(line).toHaveTextContent(
+      'Flip the overhead: the kick gets 1.4 dB of its low end back. Turn the kick down:',
+    );
+    const boxes = screen.getAllByRole('checkbox');
+    expect(boxes).toHaveLength(3);
+    expect(screen.getByRole('heading', { name: 'Levels: hot' })).toBeInTheDocument();
+    expect(screen.getByRole('heading', { name: 'Adding up: flip' })).toBeInTheDocument();
+  });
+
+  it('tells the levels in words where the picture can’t be seen', async () => {
+    open({});
+    const strip = await screen.findByRole('img', { name: /Kick: hardest hit -2.7 dBFS, hot/ });
+    expect(strip).toBeInTheDocument();
+    expect(
+      within(screen.getByRole('group', { name: 'kick hits by level' })).getAllByRole('button'),
+    ).toHaveLength(3);
+    expect(
+      within(screen.getByRole('group', { name: 'overhead hits by level' })).getAllByRole('button'),
+    ).toHaveLength(4);
+  });
+
+  it('keeps a tick', async () => {
+    const server = open({
+      [`PATCH ${paths.take(takeId)}`]: (body) => ({ json: { ...sampleTake(), ...(body as object) } }),
+    });
+    await userEvent.click(await screen.findByRole('checkbox', { name: /Press the polarity switch/ }));
+    await waitFor(() =>
+      expect(server.requests).toContainEqual({
+        method: 'PATCH',
+        path: paths.take(takeId),
+        body: { tickedActions: ['flip-overhead'] },
+      }),
+    );
+    expect(screen.getByRole('checkbox', { name: /Press the polarity switch/ })).toBeChecked();
+  });
+
+  it('takes a tick back and says so when it could not be kept', async () => {
+    open({ [`PATCH ${paths.take(takeId)}`]: refusal(500, 'internal', 'Something went wrong here.') });
+    await userEvent.click(await screen.findByRole('checkbox', { name: /Press the polarity switch/ }));
+    expect(await screen.findByRole('alert')).toHaveTextContent('Something went wrong here.');
+    expect(screen.getByRole('checkbox', { name: /Press the polarity switch/ })).not.toBeChecked();
+  });
+
+  it('lets every picture follow the choice', async () => {
+    open({});
+    const asRecorded = await screen.findByRole('button', { name: 'as recorded' });
+    expect(
+      await screen.findByRole('img', { name: /Low end of the two added.*flipped \+/ }),
+    ).toBeInTheDocument();
+    await userEvent.click(asRecorded);
+    expect(asRecorded).toHaveAttribute('aria-pressed', 'true');
+    expect(screen.getByRole('img', { name: /as recorded −[\d.]+ dB; as recorded/ })).toBeInTheDocument();
+    expect(
+      await screen.findByRole('img', { name: /Kick and overhead around this hit, as recorded/ }),
+    ).toBeInTheDocument();
+  });
+
+  it('walks from kick hit to kick hit', async () => {
+    open({});
+    expect(await screen.findByRole('heading', { name: 'Hit 2, low end only' })).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Hit after' }));
+    expect(screen.getByRole('heading', { name: 'Hit 3, low end only' })).toBeInTheDocument();
+    expect(screen.getByRole('button', { name: 'Hit after' })).toBeDisabled();
+  });
+
+  it('shows how far a measurement has come', async () => {
+    open({
+      [`GET ${paths.take(takeId)}`]: json(
+        sampleTake({
+          hasReport: false,
+          measurement: measurement({ state: 'running', stage: 'hits', progress: 0.5 }),
+        }),
+      ),
+    });
+    expect(await screen.findByRole('progressbar', { name: 'Measuring' })).toHaveAttribute(
+      'aria-valuenow',
+      '50',
+    );
+    expect(screen.getByText('Measuring: finding the hits, step 3 of 5')).toBeInTheDocument();
+  });
+
+  it('says why there is no sheet', async () => {
+    const failed = measurement({ state: 'failed', progress: 0, reason: 'the files could not be read.' });
+    open({ [`GET ${paths.take(takeId)}`]: json(sampleTake({ hasReport: false, measurement: failed })) });
+    expect(await screen.findByRole('heading', { level: 1 })).toHaveTextContent(
+      'the files could not be read.',
+    );
+    expect(screen.getByRole('link', { name: 'Add it again' })).toHaveAttribute('href', '/takes/new');
+  });
+
+  it('says that a take of somebody else is not here', async () => {
+    open({ [`GET ${paths.take(takeId)}`]: refusal(404, 'not-found', 'There is no such take.') });
+    expect(await screen.findByRole('alert')).toHaveTextContent('There is no such sheet here.');
+  });
+
+  it('offers to try again after an error', async () => {
+    let answers = 0;
+    open({
+      [`GET ${paths.report(takeId)}`]: () =>
+        answers++ === 0
+          ? { status: 503, json: { code: 'storage-unavailable', message: 'Try again soon.' } }
+          : { json: report },
+    });
+    await userEvent.click(await screen.findByRole('button', { name: 'Try again' }));
+    expect(await screen.findByRole('heading', { name: 'Levels: hot' })).toBeInTheDocument();
+  });
+});
