@@ -20,7 +20,11 @@ export class AuthService {
   ) {}
 
   async join(request: JoinRequest, address: string): Promise<User> {
-    await this.throttle.count({ key: `join:${address}`, limit: this.config.limits.joinPerAddress, windowS: 3_600 });
+    await this.throttle.count({
+      key: `join:${address}`,
+      limit: this.config.limits.joinPerAddress,
+      windowS: 3_600,
+    });
     const { name, email, password } = request;
     const passwordHash = await this.passwords.hash(password);
     const user = this.em.create(User, { name, email, emailLower: email.toLowerCase(), passwordHash });

@@ -15,10 +15,17 @@ export interface RefreshToken {
 export const refreshSeed = (): string => randomBytes(32).toString('hex');
 
 function macOf(secret: string, seed: string, sessionId: string, generation: number): string {
-  return createHmac('sha256', secret).update(`refresh.${seed}.${sessionId}.${generation}`).digest('base64url');
+  return createHmac('sha256', secret)
+    .update(`refresh.${seed}.${sessionId}.${generation}`)
+    .digest('base64url');
 }
 
-export function refreshTokenText(secret: string, seed: string, sessionId: string, generation: number): string {
+export function refreshTokenText(
+  secret: string,
+  seed: string,
+  sessionId: string,
+  generation: number,
+): string {
   return `${sessionId}.${generation}.${macOf(secret, seed, sessionId, generation)}`;
 }
 

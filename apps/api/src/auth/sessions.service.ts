@@ -22,7 +22,8 @@ interface AccessClaims {
   sid: string;
 }
 
-const sessionEnded = () => new AppError('session-ended', 'You have been signed out here. Sign in again to go on.');
+const sessionEnded = () =>
+  new AppError('session-ended', 'You have been signed out here. Sign in again to go on.');
 
 @Injectable()
 export class SessionsService {

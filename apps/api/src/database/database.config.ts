@@ -15,6 +15,7 @@ export function databaseConfig(databaseUrl: string): Options {
       migrationsList: migrations,
       path: `${__dirname}/migrations`,
       snapshot: false,
+      silent: true,
       disableForeignKeys: false,
     },
     schemaGenerator: { disableForeignKeys: false, ignoreSchema: ['pgboss'] },

@@ -6,7 +6,8 @@ import { databaseConfig } from './database.config';
 /** For developers: writes the migration (and the snapshot) that brings the tables to what the entities say. */
 async function main(): Promise<void> {
   const name = process.argv[2];
-  if (!name || !/^[a-z][a-zA-Z]+$/.test(name)) throw new Error('Say what the migration does: takesAndSheets, for example.');
+  if (!name || !/^[a-z][a-zA-Z]+$/.test(name))
+    throw new Error('Say what the migration does: takesAndSheets, for example.');
   const orm = await MikroORM.init({
     ...databaseConfig(loadConfig().databaseUrl),
     migrations: {

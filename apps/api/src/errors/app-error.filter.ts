@@ -28,20 +28,36 @@ export class AppErrorFilter implements ExceptionFilter {
     }
     const { code, message, details } = error;
     const body: ErrorResponse = details ? { code, message, details } : { code, message };
-    response.status(error.status).set(error.headers).json(body);
+    response.removeHeader('ETag');
+    response.status(error.status).set(error.headers).type('json').send(JSON.stringify(body));
   }
 }
 
 function appErrorOf(thrown: unknown): AppError {
   if (thrown instanceof AppError) return thrown;
   if (thrown instanceof ZodValidationException) return invalidInput(thrown.getZodError() as ZodError);
-  if (thrown instanceof HttpException && thrown.getStatus() < 500) return clientError(thrown);
+  if (thrown instanceof HttpException && thrown.getStatus() < 500) return clientError(thrown.getStatus());
+  if (isParserError(thrown)) return clientError(thrown.statusCode);
   return new AppError('internal', 'Something went wrong here. Nothing was changed; try again in a moment.', {
     cause: thrown,
   });
 }
 
-function clientError(exception: HttpException): AppError {
-  if (exception.getStatus() === 404) return notFound();
-  return new AppError(codeOfStatus[exception.getStatus()] ?? 'bad-request', exception.message);
+const sentences: Record<number, string> = {
+  401: 'Sign in to go on.',
+  403: 'This is not open to you.',
+  413: 'This request is larger than it may be.',
+};
+
+/** The framework's own refusals speak of JSON and parsers; people get a sentence. */
+function clientError(status: number): AppError {
+  if (status === 404) return notFound();
+  const message = sentences[status] ?? 'This request could not be read.';
+  return new AppError(codeOfStatus[status] ?? 'bad-request', message);
+}
+
+/** What the body parsers throw before a route is found. */
+function isParserError(thrown: unknown): thrown is { statusCode: number } {
+  if (!(thrown instanceof Error) || !('statusCode' in thrown) || !('expose' in thrown)) return false;
+  return thrown.expose === true && typeof thrown.statusCode === 'number' && thrown.statusCode < 500;
 }

@@ -1,6 +1,6 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
-import { TakeMeasurement } from '@thudline/dsp';
+import { TakeFacts } from '@thudline/dsp';
 import { pairSpectrumColumns, reportColumns } from '../reports/report-columns';
 import { PairSpectrum } from '../reports/entities/pair-spectrum.entity';
 import { Report } from '../reports/entities/report.entity';
@@ -15,10 +15,21 @@ export interface Claim {
   takeId: string;
 }
 
+/** What a worker thread found. */
+export interface Measured {
+  facts: TakeFacts;
+  /** Encoded, in the order of the pairs; null where a pair has no kick hit. */
+  spectra: readonly (Uint8Array | null)[];
+}
+
 /** After this many a measurement has failed (common practice, no source). */
 export const mostAttempts = 3;
 
-const running = ({ measurementId, attempt }: Claim) => ({ id: measurementId, attempt, state: 'running' as const });
+const running = ({ measurementId, attempt }: Claim) => ({
+  id: measurementId,
+  attempt,
+  state: 'running' as const,
+});
 
 /** The worker's side of `measurement`. Times are the database's, so that workers' clocks don't matter. */
 @Injectable()
@@ -49,16 +60,17 @@ export class MeasurementClaims {
   }
 
   /** Report, pair spectra and state in one transaction. @returns false when nothing was written, see `beat` */
-  async finish(claim: Claim, measured: TakeMeasurement): Promise<boolean> {
+  async finish(claim: Claim, { facts, spectra }: Measured): Promise<boolean> {
     return this.em.fork().transactional(async (em) => {
       const done = { state: 'done', stage: null, progress: 1 } as const;
       if ((await em.nativeUpdate(Measurement, running(claim), done)) === 0) return false;
       const report = em.create(Report, {
         measurement: claim.measurementId,
         take: claim.takeId,
-        ...reportColumns(measured.facts),
+        ...reportColumns(facts),
       });
-      for (const columns of pairSpectrumColumns(measured)) em.create(PairSpectrum, { report, ...columns });
+      for (const columns of pairSpectrumColumns(facts, spectra))
+        em.create(PairSpectrum, { report, ...columns });
       await em.flush();
       await em.nativeUpdate(Take, { id: claim.takeId }, { currentReportId: claim.measurementId });
       return true;
@@ -80,7 +92,10 @@ export class MeasurementClaims {
     await this.requeue(claim, { attempt: claim.attempt, afterS: 15 * claim.attempt });
   }
 
-  private async requeue(claim: Claim, { attempt, afterS }: { attempt: number; afterS: number }): Promise<void> {
+  private async requeue(
+    claim: Claim,
+    { attempt, afterS }: { attempt: number; afterS: number },
+  ): Promise<void> {
     await this.em.fork().transactional(async (em) => {
       const queued = { state: 'queued', stage: null, progress: 0, attempt } as const;
       const changed = await em.nativeUpdate(Measurement, running(claim), queued);

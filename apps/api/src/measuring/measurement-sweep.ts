@@ -5,7 +5,8 @@ import { CONFIG } from '../config/config.module';
 import { mostAttempts } from './measurement-claims';
 import { MeasureQueue } from './measure-queue';
 
-const gaveUp = 'Measuring this take was broken off three times. Upload it again, or tell whoever runs this site.';
+const gaveUp =
+  'Measuring this take was broken off three times. Upload it again, or tell whoever runs this site.';
 
 /** Silent for `?` milliseconds, by the database's clock. */
 const silent = `heartbeat_at < now() - ? * interval '1 millisecond'`;

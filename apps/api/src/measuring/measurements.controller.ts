@@ -21,7 +21,9 @@ export class MeasurementsController {
   @Post('cancel')
   @Access.take('change')
   @HttpCode(204)
-  @ApiNoContentResponse({ description: 'It is not measured any further; what has ended already stays as it is.' })
+  @ApiNoContentResponse({
+    description: 'It is not measured any further; what has ended already stays as it is.',
+  })
   cancel(@Param('id') takeId: string): Promise<void> {
     return this.measurements.cancel(takeId);
   }

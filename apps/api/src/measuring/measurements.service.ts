@@ -14,7 +14,10 @@ export class MeasurementsService {
   ) {}
 
   /** Adds a measurement and its job, in the transaction of `em`. */
-  async queue(em: EntityManager, { take, ownerId, inputHash }: { take: Take; ownerId: string; inputHash: string }) {
+  async queue(
+    em: EntityManager,
+    { take, ownerId, inputHash }: { take: Take; ownerId: string; inputHash: string },
+  ) {
     const waiting = await em.count(Measurement, { take: { owner: ownerId }, state: 'queued' });
     const measurement = em.create(Measurement, {
       take,

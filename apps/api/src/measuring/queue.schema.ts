@@ -6,7 +6,12 @@ export const measureQueue = 'measure';
  * A job is only the knock on the door: state, attempts and progress live on `measurement`. So pg-boss retries nothing,
  * and a job that takes longer than an hour is given up (common practice, no source: ten minutes of sound take seconds).
  */
-const queueOptions = { name: measureQueue, policy: 'standard', retryLimit: 0, expireInSeconds: 3_600 } as const;
+const queueOptions = {
+  name: measureQueue,
+  policy: 'standard',
+  retryLimit: 0,
+  expireInSeconds: 3_600,
+} as const;
 
 export function createBoss(databaseUrl: string, part: 'sends' | 'works' | 'migrates'): PgBoss {
   return new PgBoss({

@@ -1,6 +1,9 @@
-import { ClipRun, encodePairSpectrum, HitFacts, TakeFacts, TakeMeasurement, TrackFacts, TrackRole } from '@thudline/dsp';
+import { ClipRun, HitFacts, TakeFacts, TrackFacts, TrackRole } from '@thudline/dsp';
 
-const withoutRuns = (track: TrackFacts): TrackFacts => ({ ...track, clipping: { ...track.clipping, runs: [] } });
+const withoutRuns = (track: TrackFacts): TrackFacts => ({
+  ...track,
+  clipping: { ...track.clipping, runs: [] },
+});
 
 /** What a report row holds of the facts; `storedFacts` is the way back. */
 export function reportColumns(facts: TakeFacts) {
@@ -42,12 +45,12 @@ export function storedFacts({ summary, hits, clipRuns }: StoredParts): TakeFacts
   return { ...summary, hits, tracks };
 }
 
-/** One row a pair that has kick hits. */
-export function pairSpectrumColumns({ facts, pairSpectra }: TakeMeasurement) {
+/** One row a pair that has kick hits. @param spectra - encoded, in the order of the pairs */
+export function pairSpectrumColumns(facts: TakeFacts, spectra: readonly (Uint8Array | null)[]) {
   return facts.pairs.flatMap(({ a, b, spectrum: layout }, index) => {
-    const spectrum = pairSpectra[index];
-    if (!layout || !spectrum) return [];
+    const data = spectra[index];
+    if (!layout || !data) return [];
     const { binHz, binCount, hitCount } = layout;
-    return [{ trackA: a, trackB: b, binHz, binCount, hitCount, data: encodePairSpectrum(spectrum) }];
+    return [{ trackA: a, trackB: b, binHz, binCount, hitCount, data }];
   });
 }

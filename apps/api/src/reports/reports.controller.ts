@@ -22,7 +22,9 @@ export class ReportsController {
   @Get('pair-spectrum')
   @Access.take('read')
   @ApiProduces('application/octet-stream')
-  @ApiOkResponse({ description: 'Little-endian float32: Skk, Soo, Re Sko, Im Sko; the report names the bins.' })
+  @ApiOkResponse({
+    description: 'Little-endian float32: Skk, Soo, Re Sko, Im Sko; the report names the bins.',
+  })
   @Header('Cache-Control', 'private, no-cache')
   async pairSpectrum(@Param('id') takeId: string, @Res() response: Response): Promise<void> {
     const spectrum = await this.reports.getPairSpectrum(takeId);

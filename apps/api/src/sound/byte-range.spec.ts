@@ -26,7 +26,10 @@ describe('byteRange', () => {
   it('refuses a range beyond the end and an empty suffix, and tells the size', () => {
     for (const header of ['bytes=100-', 'bytes=100-200', 'bytes=-0']) {
       expect(() => byteRange(header, 100)).toThrow(
-        expect.objectContaining({ code: 'range-not-satisfiable', headers: { 'Content-Range': 'bytes */100' } }),
+        expect.objectContaining({
+          code: 'range-not-satisfiable',
+          headers: { 'Content-Range': 'bytes */100' },
+        }),
       );
     }
   });

@@ -2,7 +2,8 @@ import { encodeWav, openWav, bytesSource, TrackSource } from '@thudline/dsp';
 import { ListenWav } from './listen-wav';
 
 const sampleRateHz = 48_000;
-const ramp = (frames: number, step: number) => Float32Array.from({ length: frames }, (_, i) => ((i * step) % 199) / 200);
+const ramp = (frames: number, step: number) =>
+  Float32Array.from({ length: frames }, (_, i) => ((i * step) % 199) / 200);
 
 async function trackOf(samples: Float32Array): Promise<TrackSource> {
   const bytes = encodeWav({ channels: [samples], sampleRateHz, bitDepth: 24 });
@@ -31,7 +32,14 @@ describe('ListenWav', () => {
     const wav = new ListenWav([await trackOf(kick), await trackOf(overhead)]);
     const whole = await bytesOf(wav, 0, wav.sizeBytes);
     const seam = 44 + 32_768 * 4;
-    for (const [start, end] of [[0, 1], [3, 44], [40, 51], [seam - 3, seam + 5], [seam, seam + 1], [279_999, wav.sizeBytes]]) {
+    for (const [start, end] of [
+      [0, 1],
+      [3, 44],
+      [40, 51],
+      [seam - 3, seam + 5],
+      [seam, seam + 1],
+      [279_999, wav.sizeBytes],
+    ]) {
       expect((await bytesOf(wav, start, end)).equals(whole.subarray(start, end))).toBe(true);
     }
   });

@@ -23,7 +23,11 @@ export class SoundController {
   @Access.take('listen')
   @ApiProduces('application/octet-stream')
   @ApiOkResponse({ description: 'Little-endian float32, one track after the other: kick, overhead.' })
-  async excerpt(@Param('id') takeId: string, @Query() query: ExcerptDto, @Res() response: Response): Promise<void> {
+  async excerpt(
+    @Param('id') takeId: string,
+    @Query() query: ExcerptDto,
+    @Res() response: Response,
+  ): Promise<void> {
     const { sampleRateHz, startFrame, frames, trackCount, bytes } = await this.sound.excerpt(takeId, query);
     response.set({
       'Cache-Control': cacheControl,
@@ -42,7 +46,11 @@ export class SoundController {
   @ApiResponse({ status: 206, description: 'The one range that was asked for.' })
   @ApiResponse({ status: 304, description: 'The caller has it already.' })
   @ApiResponse({ status: 416, description: 'The range begins after the end.' })
-  async listen(@Param('id') takeId: string, @Req() request: Request, @Res() response: Response): Promise<void> {
+  async listen(
+    @Param('id') takeId: string,
+    @Req() request: Request,
+    @Res() response: Response,
+  ): Promise<void> {
     const { wav, etag } = await this.sound.listenWav(takeId);
     response.set({ 'Cache-Control': cacheControl, ETag: etag, 'Accept-Ranges': 'bytes' }).type('audio/wav');
     if (request.fresh) {
@@ -69,7 +77,11 @@ export class SoundController {
     const file = await this.sound.getFile(takeId, fileId);
     const bytes = await this.objects.stream(file.objectKey);
     response.attachment(file.name).type('audio/wav');
-    response.set({ 'Cache-Control': cacheControl, 'Content-Length': String(file.bytes), ETag: `"${file.sha256}"` });
+    response.set({
+      'Cache-Control': cacheControl,
+      'Content-Length': String(file.bytes),
+      ETag: `"${file.sha256}"`,
+    });
     await sendUntilClosed(bytes, response);
   }
 }

@@ -90,7 +90,9 @@ export class ObjectStoreService implements OnApplicationShutdown {
 
   private async body(key: string, start?: number, end?: number): Promise<Readable> {
     const range = start === undefined || end === undefined ? undefined : `bytes=${start}-${end - 1}`;
-    const answer = await this.client.send(new GetObjectCommand({ Bucket: this.bucket, Key: key, Range: range }));
+    const answer = await this.client.send(
+      new GetObjectCommand({ Bucket: this.bucket, Key: key, Range: range }),
+    );
     return answer.Body as Readable;
   }
 

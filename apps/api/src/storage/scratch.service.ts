@@ -31,7 +31,8 @@ export class ScratchService {
     await mkdir(this.root, { recursive: true });
     for (const name of await readdir(this.root)) {
       const owner = /^(?:upload|measuring)-(\d+)-/.exec(name)?.[1];
-      if (owner && (await isAbandoned(join(this.root, name), Number(owner)))) await this.remove(join(this.root, name));
+      if (owner && (await isAbandoned(join(this.root, name), Number(owner))))
+        await this.remove(join(this.root, name));
     }
   }
 }

@@ -81,10 +81,13 @@ export class TakeCreationService {
         recordedAt: request.recordedAt ? new Date(request.recordedAt) : new Date(),
         uploadKey: request.uploadKey,
       });
-      const fileRows = files.map((file, position) => em.create(TakeFile, { take, position, ...fileColumns(file) }));
+      const fileRows = files.map((file, position) =>
+        em.create(TakeFile, { take, position, ...fileColumns(file) }),
+      );
       for (const track of request.tracks) {
         const file = fileRows[track.fileIndex];
-        if (!file) throw new Error(`Track ${track.role} names file ${track.fileIndex}, which was checked before.`);
+        if (!file)
+          throw new Error(`Track ${track.role} names file ${track.fileIndex}, which was checked before.`);
         const { role, channel } = track;
         em.create(TakeTrack, { take, file, channel, role, position: trackRoles.indexOf(role) });
       }
@@ -97,7 +100,8 @@ export class TakeCreationService {
 
 async function findUploaded(em: EntityManager, viewer: Viewer, uploadKey: string): Promise<Take | null> {
   const take = await em.findOne(Take, { owner: viewer.user.id, uploadKey });
-  if (take?.deletedAt) throw new AppError('conflict', 'This take was uploaded before and has been deleted since.');
+  if (take?.deletedAt)
+    throw new AppError('conflict', 'This take was uploaded before and has been deleted since.');
   return take;
 }
 
@@ -114,6 +118,8 @@ function fileColumns({ id, key, name, sha256, bytes, facts }: StoredFile) {
 
 /** Names what is measured: the same sounds in the same roles need no second measurement. */
 function inputHash({ tracks }: CreateTakeRequest, files: StoredFile[]): string {
-  const inputs = tracks.map(({ role, fileIndex, channel }) => `${role}:${files[fileIndex]?.sha256}:${channel}`);
+  const inputs = tracks.map(
+    ({ role, fileIndex, channel }) => `${role}:${files[fileIndex]?.sha256}:${channel}`,
+  );
   return createHash('sha256').update(inputs.sort().join('\n')).digest('hex');
 }

@@ -35,7 +35,9 @@ export class TakesController {
     @Req() request: Request,
     @Res({ passthrough: true }) response: Response,
   ) {
-    const created = await this.uploads.receive(request, response, (upload) => this.creation.create(viewer, upload));
+    const created = await this.uploads.receive(request, response, (upload) =>
+      this.creation.create(viewer, upload),
+    );
     response.status(created.isNew ? 201 : 200);
     return this.takes.whole(created.take);
   }
@@ -57,7 +59,9 @@ export class TakesController {
   @Delete(':id')
   @Access.take('change')
   @HttpCode(204)
-  @ApiNoContentResponse({ description: 'The take is gone from every list; it can be brought back for 30 days.' })
+  @ApiNoContentResponse({
+    description: 'The take is gone from every list; it can be brought back for 30 days.',
+  })
   remove(@CurrentViewer() viewer: Viewer, @Param('id') id: string): Promise<void> {
     return this.takes.remove(viewer, id);
   }

@@ -98,5 +98,8 @@ export class TakesService {
 function below(cursor: string): FilterQuery<Take> {
   const { recordedAt, id } = parseCursor(cursor);
   // The first condition alone lets the index begin at the right row.
-  return { recordedAt: { $lte: recordedAt }, $or: [{ recordedAt: { $lt: recordedAt } }, { id: { $lt: id } }] };
+  return {
+    recordedAt: { $lte: recordedAt },
+    $or: [{ recordedAt: { $lt: recordedAt } }, { id: { $lt: id } }],
+  };
 }

@@ -1,7 +1,14 @@
 import { defineEntity, InferEntity, p } from '@mikro-orm/core';
 import { identity } from '../../database/identity';
 
-export const auditKinds = ['joined', 'signed-in', 'sign-in-failed', 'signed-out', 'session-reused', 'take-deleted'] as const;
+export const auditKinds = [
+  'joined',
+  'signed-in',
+  'sign-in-failed',
+  'signed-out',
+  'session-reused',
+  'take-deleted',
+] as const;
 export type AuditKind = (typeof auditKinds)[number];
 
 /** No foreign keys: what happened stays told when its user or take is gone. */

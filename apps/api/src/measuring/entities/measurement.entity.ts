@@ -14,8 +14,7 @@ export const Measurement = defineEntity({
   indexes: [
     {
       name: 'measurement_unfinished_index',
-      expression:
-        `create index "measurement_unfinished_index" on "measurement" ("state", "heartbeat_at") where "state" in ('queued', 'running')`,
+      expression: `create index "measurement_unfinished_index" on "measurement" ("state", "heartbeat_at") where "state" in ('queued', 'running')`,
     },
   ],
   properties: {

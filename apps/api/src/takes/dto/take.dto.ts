@@ -1,9 +1,4 @@
-import {
-  listTakesRequest,
-  listTakesResponse,
-  takeResponse,
-  updateTakeRequest,
-} from '@thudline/contracts';
+import { listTakesRequest, listTakesResponse, takeResponse, updateTakeRequest } from '@thudline/contracts';
 import { createZodDto } from 'nestjs-zod';
 
 export class UpdateTakeDto extends createZodDto(updateTakeRequest) {}

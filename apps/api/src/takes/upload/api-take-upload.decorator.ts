@@ -12,7 +12,11 @@ export function ApiTakeUpload() {
         type: 'object',
         required: ['uploadKey', 'tracks', 'files'],
         properties: {
-          uploadKey: { type: 'string', format: 'uuid', description: 'The same key again gives the same take.' },
+          uploadKey: {
+            type: 'string',
+            format: 'uuid',
+            description: 'The same key again gives the same take.',
+          },
           title: { type: 'string', maxLength: 120 },
           note: { type: 'string', maxLength: 4000 },
           recordedAt: { type: 'string', format: 'date-time' },

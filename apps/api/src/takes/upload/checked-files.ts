@@ -1,7 +1,7 @@
 import { TrackRole, UploadTrack } from '@thudline/contracts';
 import { openWav, WavError, WavFacts } from '@thudline/dsp';
+import { fileByteSource } from '@thudline/measure';
 import { AppError } from '../../errors/app-error';
-import { DiskSource } from '../../storage/disk-source';
 import { ReceivedFile } from './scratch-storage';
 
 export interface CheckedFile extends ReceivedFile {
@@ -24,7 +24,7 @@ export async function checkedFiles(files: ReceivedFile[], tracks: UploadTrack[])
 }
 
 async function checkedFile(file: ReceivedFile, fileIndex: number): Promise<CheckedFile> {
-  const source = await DiskSource.open(file.path);
+  const source = await fileByteSource(file.path);
   try {
     return { ...file, facts: (await openWav(source)).facts };
   } catch (error) {
@@ -52,7 +52,10 @@ const roleNames: Record<TrackRole, string> = { kick: 'kick', overhead: 'overhead
 function checkTrack({ role, fileIndex, channel }: UploadTrack, files: CheckedFile[]): void {
   const file = files[fileIndex];
   if (!file) {
-    throw new AppError('bad-request', `The ${roleNames[role]} should be in file ${fileIndex + 1}, which was not sent.`);
+    throw new AppError(
+      'bad-request',
+      `The ${roleNames[role]} should be in file ${fileIndex + 1}, which was not sent.`,
+    );
   }
   if (channel < file.facts.channels) return;
   throw new AppError(

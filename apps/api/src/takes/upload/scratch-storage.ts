@@ -19,7 +19,11 @@ export class ScratchStorage implements StorageEngine {
 
   constructor(private readonly folder: string) {}
 
-  _handleFile(_request: Request, file: Express.Multer.File, done: (error?: unknown, info?: object) => void): void {
+  _handleFile(
+    _request: Request,
+    file: Express.Multer.File,
+    done: (error?: unknown, info?: object) => void,
+  ): void {
     const path = join(this.folder, `${this.received++}.wav`);
     this.write(file.stream, path).then(
       (written) => done(null, { path, ...written }),
@@ -32,7 +36,10 @@ export class ScratchStorage implements StorageEngine {
     done(null);
   }
 
-  private async write(stream: NodeJS.ReadableStream, path: string): Promise<{ bytes: number; sha256: string }> {
+  private async write(
+    stream: NodeJS.ReadableStream,
+    path: string,
+  ): Promise<{ bytes: number; sha256: string }> {
     const hash = createHash('sha256');
     let bytes = 0;
     async function* counted(chunks: AsyncIterable<Buffer>) {

@@ -27,7 +27,11 @@ export class TakeUploadsService {
     @Inject(CONFIG) private readonly config: Config,
   ) {}
 
-  async receive<T>(request: Request, response: Response, use: (upload: TakeUpload) => Promise<T>): Promise<T> {
+  async receive<T>(
+    request: Request,
+    response: Response,
+    use: (upload: TakeUpload) => Promise<T>,
+  ): Promise<T> {
     this.refuseByLength(request);
     const folder = await this.scratch.make('upload');
     try {
@@ -68,7 +72,7 @@ export class TakeUploadsService {
     }).array('files');
     await new Promise<void>((resolve, reject) => {
       receive(request, response, (error: unknown) => {
-        if (error) reject(uploadError(error, this.config.maxFileBytes, filesSoFar - 1) as Error);
+        if (error) reject(uploadError(error, this.config.maxFileBytes, filesSoFar - 1));
         else resolve();
       });
     });

@@ -20,7 +20,11 @@ export function uploadError(thrown: unknown, maxFileBytes: number, filesSoFar: n
   return thrown;
 }
 
-function limitError(error: MulterError & { filename?: string }, maxFileBytes: number, fileIndex: number): AppError {
+function limitError(
+  error: MulterError & { filename?: string },
+  maxFileBytes: number,
+  fileIndex: number,
+): AppError {
   switch (error.code) {
     case 'LIMIT_FILE_SIZE':
       return tooLarge(maxFileBytes, error.filename, fileIndex);
@@ -29,9 +33,13 @@ function limitError(error: MulterError & { filename?: string }, maxFileBytes: nu
     case 'LIMIT_UNEXPECTED_FILE':
       return new AppError('bad-request', 'The recordings go into the field named files.');
     default:
-      return new AppError('bad-request', 'The fields of this upload are not as they should be.', { cause: error });
+      return new AppError('bad-request', 'The fields of this upload are not as they should be.', {
+        cause: error,
+      });
   }
 }
 
 const notWholeUpload = (cause: Error) =>
-  new AppError('bad-request', 'The upload did not arrive whole, so nothing was stored. Try again.', { cause });
+  new AppError('bad-request', 'The upload did not arrive whole, so nothing was stored. Try again.', {
+    cause,
+  });

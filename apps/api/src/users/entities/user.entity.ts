@@ -11,7 +11,10 @@ export const User = defineEntity({
     email: p.string().length(254),
     emailLower: p.string().length(254).unique(),
     passwordHash: p.text(),
-    roles: p.array<Role>().columnType('text[]').onCreate((): Role[] => ['player']),
+    roles: p
+      .array<Role>()
+      .columnType('text[]')
+      .onCreate((): Role[] => ['player']),
     settings: p.json<UserSettings>().onCreate(() => defaultUserSettings),
     /** Number of the next take; raised inside the transaction that makes a take, whose row lock it is. */
     nextTakeNumber: p.integer().default(1),

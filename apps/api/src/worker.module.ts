@@ -1,0 +1,33 @@
+import { DynamicModule, Module } from '@nestjs/common';
+import { Config } from './config/config';
+import { ConfigModule } from './config/config.module';
+import { databaseModule } from './database/database.module';
+import { loggerModule } from './logging/logger.module';
+import { MeasurePool } from './measuring/measure-pool';
+import { MeasureQueue } from './measuring/measure-queue';
+import { MeasurementClaims } from './measuring/measurement-claims';
+import { MeasurementSweep } from './measuring/measurement-sweep';
+import { MeasuringRuns } from './measuring/measuring-runs';
+import { MeasuringWorker } from './measuring/measuring-worker';
+import { TakeFetcher } from './measuring/take-fetcher';
+import { StorageModule } from './storage/storage.module';
+
+/** The worker process: no HTTP, only what measures. */
+@Module({})
+export class WorkerModule {
+  static of(config: Config): DynamicModule {
+    return {
+      module: WorkerModule,
+      imports: [ConfigModule.of(config), loggerModule, databaseModule, StorageModule],
+      providers: [
+        MeasureQueue,
+        MeasurePool,
+        MeasurementClaims,
+        MeasurementSweep,
+        TakeFetcher,
+        MeasuringRuns,
+        MeasuringWorker,
+      ],
+    };
+  }
+}

@@ -1,0 +1,135 @@
+import { listTakesResponse, ListTakesResponse, paths, TakeResponse } from '@thudline/contracts';
+import { AuditEvent } from '../src/audit/entities/audit-event.entity';
+import { Take } from '../src/takes/entities/take.entity';
+import { joined, Person } from './support/person';
+import { startTestApp, TestApp } from './support/test-app';
+
+describe('takes', () => {
+  let test: TestApp;
+  let juno: Person;
+
+  beforeAll(async () => {
+    test = await startTestApp();
+  });
+  beforeEach(async () => {
+    juno = await joined(test);
+  });
+  afterAll(async () => test?.close());
+
+  const list = async (query = ''): Promise<ListTakesResponse> => {
+    const response = await juno.get(`${paths.takes}${query}`).expect(200);
+    return listTakesResponse.parse(response.body);
+  };
+
+  describe('the list', () => {
+    it('is empty for a new player', async () => {
+      expect(await list()).toEqual({ items: [], nextCursor: null, total: 0 });
+    });
+
+    it('shows only the player’s own takes, newest recording first', async () => {
+      await (await joined(test, 'Oda')).makeTake();
+      await juno.makeTake({ title: 'middle', recordedAt: '2026-05-02T10:00:00Z' });
+      await juno.makeTake({ title: 'old', recordedAt: '2025-05-02T10:00:00+02:00' });
+      await juno.makeTake({ title: 'new', recordedAt: '2026-11-02T10:00:00Z' });
+      const { items, total } = await list();
+      expect(items.map((item) => item.title)).toEqual(['new', 'middle', 'old']);
+      expect(items[2].recordedAt).toBe('2025-05-02T08:00:00.000Z');
+      expect(total).toBe(3);
+      expect(items[0]).toMatchObject({
+        measurement: { state: 'queued' },
+        summary: null,
+        kickPeakDbfs: null,
+        lowEndDb: null,
+      });
+    });
+
+    it('pages without losing or repeating a take, also when many were recorded at the same moment', async () => {
+      const recordedAt = '2026-05-02T10:00:00.123Z';
+      for (let i = 0; i < 5; i++) await juno.makeTake({ recordedAt });
+      await juno.makeTake({ recordedAt: '2026-05-01T10:00:00Z' });
+      const seen: string[] = [];
+      let cursor: string | null = '';
+      while (cursor !== null) {
+        const page: ListTakesResponse = await list(`?limit=2${cursor ? `&cursor=${cursor}` : ''}`);
+        expect(page.total).toBe(6);
+        seen.push(...page.items.map((item) => item.id));
+        cursor = page.nextCursor;
+      }
+      expect(seen).toHaveLength(6);
+      expect(new Set(seen).size).toBe(6);
+    });
+
+    it('refuses a limit and a cursor that make no sense', async () => {
+      await juno.get(`${paths.takes}?limit=0`).expect(400);
+      await juno.get(`${paths.takes}?limit=many`).expect(400);
+      const response = await juno.get(`${paths.takes}?cursor=nonsense`).expect(400);
+      expect(response.body).toMatchObject({ code: 'bad-request' });
+    });
+  });
+
+  describe('changing a take', () => {
+    it('changes what is named and leaves the rest', async () => {
+      const take = await juno.makeTake({ title: 'Before', note: 'Kept.' });
+      const changed = await juno
+        .patch(paths.take(take.id), { title: ' After ', tickedActions: ['flip-overhead'] })
+        .expect(200);
+      expect(changed.body).toMatchObject({ title: 'After', note: 'Kept.', tickedActions: ['flip-overhead'] });
+      const read = await juno.get(paths.take(take.id)).expect(200);
+      expect(read.body).toEqual(changed.body);
+      await juno.patch(paths.take(take.id), { tickedActions: [] }).expect(200);
+      expect((await juno.get(paths.take(take.id))).body).toMatchObject({ title: 'After', tickedActions: [] });
+    });
+
+    it('refuses a title that is too long, in a sentence', async () => {
+      const take = await juno.makeTake({ title: 'Before' });
+      const response = await juno.patch(paths.take(take.id), { title: 'x'.repeat(121) }).expect(400);
+      expect(response.body).toMatchObject({
+        message: 'A title has at most 120 characters.',
+        details: { fields: { title: 'A title has at most 120 characters.' } },
+      });
+      expect(((await juno.get(paths.take(take.id))).body as TakeResponse).title).toBe('Before');
+    });
+
+    it('refuses a body that is not JSON', async () => {
+      const take = await juno.makeTake();
+      const response = await juno
+        .written(juno.agent.patch(paths.take(take.id)))
+        .type('json')
+        .send('{"title":')
+        .expect(400);
+      expect(response.body).toMatchObject({ code: 'bad-request' });
+    });
+  });
+
+  describe('deleting a take', () => {
+    it('takes it out of the list and the count, keeps its row and its number', async () => {
+      const take = await juno.makeTake();
+      await juno.delete(paths.take(take.id)).expect(204);
+      expect(await list()).toEqual({ items: [], nextCursor: null, total: 0 });
+      await juno.get(paths.take(take.id)).expect(404);
+      const row = await test.em().findOneOrFail(Take, { id: take.id });
+      expect(row.deletedAt).toBeInstanceOf(Date);
+      expect((await juno.makeTake()).number).toBe(2);
+      expect(await test.em().count(AuditEvent, { kind: 'take-deleted', subjectId: take.id })).toBe(1);
+    });
+  });
+
+  describe('a measurement', () => {
+    it('can be read, and cancelled for good while it waits', async () => {
+      const take = await juno.makeTake();
+      const waiting = await juno.get(paths.measurement(take.id)).expect(200);
+      expect(waiting.body).toEqual({ state: 'queued', stage: null, progress: 0, attempt: 0, reason: null });
+      await juno.post(paths.cancelMeasurement(take.id)).expect(204);
+      await juno.post(paths.cancelMeasurement(take.id)).expect(204);
+      expect((await juno.get(paths.measurement(take.id))).body).toMatchObject({ state: 'cancelled' });
+    });
+
+    it('that is not done has no report and no pair spectrum', async () => {
+      const take = await juno.makeTake();
+      for (const path of [paths.report(take.id), paths.pairSpectrum(take.id)]) {
+        const response = await juno.get(path).expect(404);
+        expect(response.body).toMatchObject({ code: 'not-measured-yet' });
+      }
+    });
+  });
+});
