@@ -1,6 +1,6 @@
 import type { VerdictReason } from '../facts';
 import type { AgreementReport, Finding, FindingStatus, ReportFigures } from '../report/reportTypes';
-import { counted, decimalText, frequencyText } from './words';
+import { counted, decimalText, bandText } from './words';
 
 type Said = Pick<Finding, 'sentence' | 'why' | 'next'>;
 
@@ -98,7 +98,7 @@ function mixed(agreement: AgreementReport): Said {
   const does = (band?.flipGainDb ?? 0) > 0 ? 'gains' : 'loses';
   const size = decimalText(Math.abs(band?.flipGainDb ?? 0));
   return {
-    sentence: `Mixed: flipping changes the low end little but ${does} ${size} dB at ${frequencyText(band?.centreHz ?? 0)}; compare by ear, then move the overhead slightly.`,
+    sentence: `Mixed: flipping changes the low end little but ${does} ${size} dB at ${bandText(band?.centreHz ?? 0)}; compare by ear, then move the overhead slightly.`,
     why: 'Some low bands add and others cancel, whichever the polarity.',
     next: 'Compare both by ear, move the overhead a hand’s width and measure again.',
   };
@@ -130,7 +130,7 @@ function cutMatters({ lowCut, verdict }: AgreementReport): boolean {
 function also(agreement: AgreementReport): string {
   const band = strongest(agreement.contraryBands);
   if (!band) return '';
-  return ` At ${frequencyText(band.centreHz)} a flip ${band.flipGainDb > 0 ? 'gains' : 'loses'} ${decimalText(Math.abs(band.flipGainDb))} dB.`;
+  return ` At ${bandText(band.centreHz)} a flip ${band.flipGainDb > 0 ? 'gains' : 'loses'} ${decimalText(Math.abs(band.flipGainDb))} dB.`;
 }
 
 function strongest(

@@ -83,7 +83,7 @@ function low(figures: ReportFigures, role: Role): Said {
   const next = `Lower the headphones, then turn the ${role} preamp up about ${change} dB.`;
   if (levelStatus(track) === 'good') {
     return {
-      sentence: `${capitalised(role)} peaks at ${peak} dBFS, below target but clear of the noise: this take is fine, and about ${change} dB more would fit.`,
+      sentence: `${capitalised(role)} peaks at ${peak} dBFS, below target but ${noise === null ? 'loud enough' : 'clear of the noise'}: this take is fine, and about ${change} dB more would fit.`,
       why: 'It can be raised later without harm.',
       next: `${next} It can also stay where it is.`,
     };

@@ -13,7 +13,14 @@ export function nextActions(figures: ReportFigures, reader: Reader): NextAction[
     ROLES.filter((role) => (figures[role].level === 'clipped') === clipped).flatMap((role) =>
       gainActions(figures, role, reader),
     );
-  const actions = [...gains(true), ...polarityActions(figures), ...gains(false), ...noiseActions(figures)];
+  const polarity = polarityActions(figures);
+  const actions = [
+    ...gains(true),
+    ...polarity.filter((action) => action.id === 'flip-overhead'),
+    ...gains(false),
+    ...noiseActions(figures),
+    ...polarity.filter((action) => action.id !== 'flip-overhead'),
+  ];
   return [...actions.filter((action) => !action.leave), ...actions.filter((action) => action.leave)];
 }
 

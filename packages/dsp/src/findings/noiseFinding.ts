@@ -40,7 +40,7 @@ export function noisierMicrophone(
 
 const whyNot: Record<NoiseFloorReason, string> = {
   'too-short': 'this take is too short to hold a quiet second',
-  'no-quiet-second': 'the drums never stop, so there’s no quiet second to measure',
+  'no-quiet-second': 'something always sounds, so there’s no quiet second to measure',
   'digital-silence': 'the quiet parts hold no sound at all, as after a gate or a cut',
 };
 

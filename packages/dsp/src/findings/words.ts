@@ -1,3 +1,4 @@
+import { thirdOctaves } from '../measurements/agreement/thirdOctaves';
 import type { LengthUnit } from '../report/reportTypes';
 
 /** One decimal in sentences (conventions), with the real minus sign. */
@@ -50,7 +51,10 @@ export function lengthText(metres: number, unit: LengthUnit): string {
   return feet > 0 ? `${feet} ft ${rest}` : rest;
 }
 
-/** A frequency as one says it: 80 Hz, 2 kHz. */
-export function frequencyText(hz: number): string {
-  return hz < 1000 ? `${Math.round(hz)} Hz` : `${Number((hz / 1000).toFixed(1))} kHz`;
+/** A third-octave by its nominal name: 80 Hz, 1.25 kHz. */
+export function bandText(centreHz: number): string {
+  const nearest = thirdOctaves.reduce((best, band) =>
+    Math.abs(band.centreHz - centreHz) < Math.abs(best.centreHz - centreHz) ? band : best,
+  );
+  return nearest.nominal.endsWith('k') ? `${nearest.nominal.slice(0, -1)} kHz` : `${nearest.nominal} Hz`;
 }
