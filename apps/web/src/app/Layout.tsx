@@ -12,7 +12,7 @@ function NavLink({ to, children }: { to: string; children: string }) {
   const here = useLocation().pathname.startsWith(to);
   return (
     <chakra.span position="relative" fontWeight={600}>
-      <Link to={to} aria-current={here ? 'page' : undefined}>
+      <Link to={to} aria-current={here ? 'page' : undefined} style={{ textDecoration: 'none' }}>
         {children}
       </Link>
       {here && <Swell depthPx={5} linePx={1.5} />}
@@ -37,15 +37,15 @@ export function Layout() {
         alignItems="flex-end"
         paddingBottom={{ base: '11px', lg: '17px' }}
         paddingX={{ base: '18px', lg: 0 }}
-        gap={{ base: '20px', lg: '28px' }}
+        gap={{ base: '20px', lg: '30px' }}
         _print={{ display: 'none' }}
       >
-        <Box asChild marginBottom={{ base: '-4px', lg: '-3px' }}>
+        <Box asChild marginBottom={{ base: '-4px', lg: '-2px' }}>
           <Link to="/" aria-label="thudline, first page">
             <Wordmark />
           </Link>
         </Box>
-        <Flex as="nav" aria-label="Places" gap="26px" lineHeight="26px">
+        <Flex as="nav" aria-label="Places" gap="26px" lineHeight="26px" marginBottom={{ lg: '2px' }}>
           {me && <NavLink to="/takes">Takes</NavLink>}
         </Flex>
         <Box marginLeft="auto" lineHeight="26px">

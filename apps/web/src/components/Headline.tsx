@@ -6,7 +6,7 @@ export const Headline = chakra('h1', {
     fontSize: { base: 'linePhone', lg: 'line' },
     lineHeight: { base: '33px', lg: '41px' },
     fontWeight: 400,
-    letterSpacing: '-0.1px',
+    letterSpacing: '-0.012em',
     textWrap: 'pretty',
     '& b': { fontWeight: 900 },
   },

@@ -17,6 +17,8 @@ const FieldInput = chakra('input', {
     fontSize: 'body',
     fontWeight: 600,
     borderRadius: '0',
+    // The rule under the field shows the focus, across its whole width.
+    _focusVisible: { outline: 'none' },
     _placeholder: { color: 'ink.muted', fontWeight: 400, opacity: 1 },
   },
 });
@@ -35,7 +37,7 @@ export interface TextFieldProps extends Omit<HTMLChakraProps<'input'>, 'onChange
 /** One line to write on: a label, the text, a rule under it. */
 export function TextField({ label, value, onChange, hint, error, end, ...input }: TextFieldProps) {
   const id = useId();
-  const described = [hint && `${id}-hint`, error && `${id}-error`].filter(Boolean).join(' ') || undefined;
+  const described = error ? `${id}-error` : hint ? `${id}-hint` : undefined;
   return (
     <Box>
       <FieldLabel htmlFor={id}>{label}</FieldLabel>
@@ -43,7 +45,12 @@ export function TextField({ label, value, onChange, hint, error, end, ...input }
         alignItems="center"
         borderBottom="2px solid"
         borderColor={error ? 'fix' : 'edge'}
-        _focusWithin={{ borderColor: error ? 'fix' : 'ink' }}
+        css={{
+          '&:has(input:focus-visible)': {
+            borderColor: 'overhead',
+            boxShadow: '0 2px 0 var(--chakra-colors-overhead)',
+          },
+        }}
       >
         <FieldInput
           {...input}
@@ -55,7 +62,7 @@ export function TextField({ label, value, onChange, hint, error, end, ...input }
         />
         {end}
       </Flex>
-      {hint && (
+      {hint && !error && (
         <Box id={`${id}-hint`} fontSize="caption" color="ink.muted" marginTop="6px">
           {hint}
         </Box>

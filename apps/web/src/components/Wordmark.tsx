@@ -5,7 +5,7 @@ import { swellPath } from './swellPath';
 export function Wordmark() {
   return (
     <Box as="span" display="inline-block" width="112px" lineHeight="30px">
-      <Box as="span" display="block" fontWeight={900} fontSize="27px" letterSpacing="-0.2px">
+      <Box as="span" display="block" fontWeight={900} fontSize="27px" letterSpacing="0.05px">
         thudline
       </Box>
       <chakra.svg
@@ -15,7 +15,7 @@ export function Wordmark() {
         height="9px"
         viewBox="0 0 112 9"
         fill="currentColor"
-        marginTop="1px"
+        marginTop="0"
       >
         <path d={swellPath({ widthPx: 112, depthPx: 6.5, linePx: 2, endPx: 100 })} />
       </chakra.svg>

@@ -27,6 +27,8 @@ export const clippedPercent = 91.6;
 export interface AxisLabel {
   text: string;
   percent: number;
+  /** Which part of the text stands at that place. */
+  anchor?: 'start' | 'end';
 }
 
 /** Closer than this two numbers would touch (caption size, at the narrowest column). */
@@ -40,7 +42,9 @@ export function levelLabels(target: Target): AxisLabel[] {
   return shown.map((db) => ({ text: number(db, Number.isInteger(db) ? 0 : 1), percent: levelPercent(db) }));
 }
 
-export const lowEndLabels: AxisLabel[] = [-3, 0, 3].map((db) => ({
-  text: db === 3 ? `${signed(db, 0)} dB` : signed(db, 0),
-  percent: lowEndPercent(db),
-}));
+/** The outer two stay inside the column. */
+export const lowEndLabels: AxisLabel[] = [
+  { text: signed(-3, 0), percent: lowEndPercent(-3), anchor: 'start' },
+  { text: signed(0, 0), percent: lowEndPercent(0) },
+  { text: `${signed(3, 0)} dB`, percent: lowEndPercent(3), anchor: 'end' },
+];

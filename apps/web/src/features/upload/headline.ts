@@ -66,7 +66,7 @@ function choosingWords({ kind, ratesDiffer, reading, slots }: Arrangement): Head
   }
   return {
     strong: 'Drop in a kick file and an overhead file.',
-    rest: 'Or one stereo file with a microphone on each side.',
+    rest: 'Recorded together.',
   };
 }
 

@@ -22,7 +22,7 @@ export function AuthSheet({
 }) {
   return (
     <SheetPaper margin={<AuthMargin texts={margin} />}>
-      <Headline marginTop={{ base: '8px', lg: '19px' }} marginBottom="22px">
+      <Headline marginTop={{ base: '8px', lg: '19px' }} marginBottom="23px">
         <b>{strong}</b> {rest}
       </Headline>
       <Box maxWidth="400px">{children}</Box>

@@ -52,7 +52,7 @@ export function SignInForm() {
         onChange={(password) => set('password', password)}
         error={errors.password}
       />
-      <chakra.div marginTop="2px" marginBottom="4px">
+      <chakra.div marginTop="2px" marginBottom="-1px">
         <CheckBox checked={values.stay} onChange={(stay) => set('stay', stay)}>
           Stay signed in on this device
         </CheckBox>

@@ -92,13 +92,9 @@ function OverheadMark({ peakDbfs, clipped }: Mark) {
 function Cross({ color, offsetPx }: { color: string; offsetPx: number }) {
   return (
     <svg x={`${clippedPercent}%`} y="50%" overflow="visible">
-      <chakra.path
-        d="M-5-5 5 5M-5 5 5-5"
-        transform={`translate(0 ${offsetPx})`}
-        stroke={color}
-        strokeWidth="2.6"
-        strokeLinecap="round"
-      />
+      <g transform={`translate(0 ${offsetPx})`}>
+        <chakra.path d="M-5-5 5 5M-5 5 5-5" stroke={color} strokeWidth="2.6" strokeLinecap="round" />
+      </g>
     </svg>
   );
 }

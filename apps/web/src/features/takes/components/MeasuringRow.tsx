@@ -52,7 +52,7 @@ export function MeasuringRow({ take, now }: { take: TakeListItem; now: Date }) {
         <RowAction
           fontSize="16px"
           color="ink"
-          borderColor="currentColor"
+          textDecoration="underline"
           marginRight={{ base: 0, lg: '22px' }}
           disabled={stopping}
           aria-label={`stop measuring ${takeName(take)}`}

@@ -3,6 +3,10 @@ import type { TakeListItem } from '@thudline/contracts';
 import { Link } from 'react-router-dom';
 import { relativeDate } from '../relativeDate';
 
+const RowLink = chakra(Link, {
+  base: { textDecoration: 'none', '[role=row]:hover &': { textDecoration: 'underline' } },
+});
+
 /** Number, title and date; the link to the sheet reaches over the whole row. */
 export function TakeCell({ take, now }: { take: TakeListItem; now: Date }) {
   return (
@@ -15,11 +19,11 @@ export function TakeCell({ take, now }: { take: TakeListItem; now: Date }) {
         lineClamp={{ base: 2, lg: 1 }}
         title={take.title}
       >
-        <Link to={`/takes/${take.id}`}>
+        <RowLink to={`/takes/${take.id}`}>
           <chakra.b marginRight="9px">{take.number}</chakra.b>
           {take.title || 'no title'}
           <Box as="span" position="absolute" inset="0" />
-        </Link>
+        </RowLink>
       </chakra.span>
       <chakra.time
         display="block"

@@ -77,7 +77,7 @@ function Says({ take }: { take: TakeListItem }) {
       gridArea="says"
       alignItems={{ base: 'flex-start', lg: 'center' }}
       gap="10px"
-      paddingRight="16px"
+      paddingRight="6px"
       paddingY={{ base: '6px', lg: '2px' }}
       minWidth={0}
       fontSize="16px"
@@ -113,9 +113,9 @@ export const RowAction = chakra(TextButton, {
     zIndex: 1,
     fontSize: 'caption',
     color: 'ink.muted',
-    borderColor: 'transparent',
+    textDecoration: 'none',
     marginRight: { base: 0, lg: '12px' },
-    _hover: { color: 'ink', borderColor: 'currentColor' },
+    _hover: { color: 'ink', textDecoration: 'underline' },
     _after: { content: '""', position: 'absolute', inset: '-13px -12px' },
   },
 });

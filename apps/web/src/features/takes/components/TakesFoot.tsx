@@ -19,10 +19,9 @@ export function TakesFoot({
       as="nav"
       aria-label="Pages of takes"
       justifyContent="flex-end"
-      alignItems="center"
+      alignItems="baseline"
       gap="8px"
-      minHeight="44px"
-      marginTop="10px"
+      marginTop="20px"
       fontSize="16px"
       color="ink.muted"
     >

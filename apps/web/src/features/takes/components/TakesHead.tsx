@@ -95,7 +95,7 @@ function AxisNumber({
       position="absolute"
       top={top}
       left={`${label.percent}%`}
-      transform="translateX(-50%)"
+      transform={`translateX(${label.anchor === 'start' ? -2 : label.anchor === 'end' ? -98 : -50}%)`}
       whiteSpace="nowrap"
       color={color}
     >

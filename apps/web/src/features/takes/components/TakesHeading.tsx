@@ -17,7 +17,7 @@ export function TakesHeading({ headingRef }: { headingRef?: Ref<HTMLHeadingEleme
       >
         Takes
       </chakra.h1>
-      <Box fontSize="16px" color="ink.muted" display={{ base: 'none', lg: 'block' }}>
+      <Box fontSize="small" color="ink.muted" display={{ base: 'none', lg: 'block' }}>
         Drop WAV files anywhere on this page
       </Box>
       <ButtonLink to="/takes/new">Add a take</ButtonLink>

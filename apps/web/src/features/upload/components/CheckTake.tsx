@@ -22,7 +22,8 @@ export function CheckTake() {
             key={time}
             borderBottom="1px solid"
             borderColor="rule"
-            paddingY="9px"
+            paddingTop="8px"
+            paddingBottom="9px"
             lineHeight="26px"
           >
             <Box width="84px" flexShrink={0} color="ink.muted">

@@ -11,7 +11,7 @@ export function DropBox({ onChoose, minHeight = '236px' }: { onChoose: () => voi
       justifyContent="center"
       textAlign="center"
       minHeight={minHeight}
-      padding="28px 16px 24px"
+      padding="24px 16px 26px"
       border="2px dashed"
       borderColor="edge"
       borderRadius="3px"

@@ -32,16 +32,21 @@ export function FileRow({
       borderBottom="1px solid"
       borderColor="rule"
     >
-      <Box gridArea="name" minWidth={0} paddingRight="18px">
+      <Box gridArea="name" minWidth={0} paddingRight="18px" marginTop={{ lg: '-5px' }}>
         <Box fontWeight={600} lineHeight="24px" overflowWrap="anywhere" lineClamp={2} title={name}>
           {name}
         </Box>
-        <Box fontSize="caption" lineHeight="20px" marginTop="3px" color="ink.muted">
+        <Box fontSize="caption" lineHeight="20px" marginTop="4px" color="ink.muted">
           {facts}
         </Box>
       </Box>
       {children}
-      <Box gridArea="action" justifySelf="end" alignSelf={{ base: 'start', lg: 'center' }}>
+      <Box
+        gridArea="action"
+        justifySelf="end"
+        alignSelf={{ base: 'start', lg: 'center' }}
+        marginTop={{ lg: '-3px' }}
+      >
         {action && (
           <TextButton
             type="button"
@@ -63,5 +68,5 @@ export function FileRow({
 export const sentenceAreas = { base: '"name action" "says says"', lg: '"name says says action"' };
 
 export const Sentence = chakra('div', {
-  base: { gridArea: 'says', minWidth: 0, paddingRight: { lg: '24px' } },
+  base: { gridArea: 'says', minWidth: 0, paddingRight: { lg: '24px' }, '& [role=alert]': { gap: '14px' } },
 });

@@ -23,31 +23,29 @@ export function FileRows({ newTake, choose }: { newTake: NewTake; choose: Choose
           <Row key={picked.id} picked={picked} newTake={newTake} />
         ))}
       </chakra.ul>
-      {!sending && (
-        <Flex
-          justifyContent="space-between"
-          columnGap="24px"
-          rowGap="8px"
-          wrap="wrap"
-          marginTop="10px"
-          fontSize="caption"
-          lineHeight="20px"
-          color="ink.muted"
-        >
-          <Box>
-            Drop more WAV files anywhere on this page, or{' '}
-            <TextButton type="button" color="ink" onClick={() => choose()}>
-              choose files
-            </TextButton>
-            . Up to {limitWords} each, kept bit for bit, seen by nobody but you.
-          </Box>
-          {newTake.arranged.kind !== 'stereo' && (
-            <TextButton type="button" onClick={() => choose('replaced')}>
-              one stereo file instead
-            </TextButton>
-          )}
-        </Flex>
-      )}
+      <Flex
+        justifyContent="space-between"
+        columnGap="24px"
+        rowGap="8px"
+        wrap="wrap"
+        marginTop="10px"
+        fontSize="caption"
+        lineHeight="20px"
+        color="ink.muted"
+      >
+        <Box>
+          Drop more WAV files anywhere on this page, or{' '}
+          <TextButton type="button" color="ink" onClick={() => choose()}>
+            choose files
+          </TextButton>
+          . Up to {limitWords} each, kept bit for bit, seen by nobody but you.
+        </Box>
+        {!sending && newTake.arranged.kind !== 'stereo' && (
+          <TextButton type="button" onClick={() => choose('replaced')}>
+            one stereo file instead
+          </TextButton>
+        )}
+      </Flex>
     </>
   );
 }

@@ -12,7 +12,7 @@ export function FirstRun({ onChoose }: { onChoose: () => void }) {
         them.
       </Headline>
       <Box
-        marginTop="20px"
+        marginTop="21px"
         display="grid"
         gridTemplateColumns={{ base: '1fr', lg: 'minmax(0, 1fr) minmax(0, 1fr)' }}
         columnGap="56px"

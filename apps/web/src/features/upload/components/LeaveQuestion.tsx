@@ -16,6 +16,7 @@ export function LeaveQuestion({ stay, leave }: Omit<NewTake['leaving'], 'asking'
       left={{ base: '12px', md: '50%' }}
       right={{ base: '12px', md: 'auto' }}
       bottom="24px"
+      width={{ md: 'max-content' }}
       transform={{ base: 'none', md: 'translateX(-50%)' }}
       alignItems="center"
       wrap="wrap"

@@ -34,7 +34,8 @@ export function RoleChooser({
         as="fieldset"
         aria-label={`Microphone of ${of}${side ? `, ${side} side` : ''}`}
         alignItems="baseline"
-        gap="20px"
+        gap="22px"
+        paddingLeft="2px"
         lineHeight="22px"
         marginBottom="11px"
       >
@@ -77,7 +78,6 @@ function Role({
   return (
     <chakra.label
       position="relative"
-      paddingX="2px"
       fontSize="16px"
       fontWeight={checked ? 600 : 400}
       color={checked ? 'ink' : 'ink.muted'}
