@@ -23,8 +23,7 @@ export const semanticTokens = defineSemanticTokens({
   colors: {
     paper: both('#F0F2EE', '#131517'),
     sheet: both('#FFFFFF', '#1B1E20'),
-    ink: both('#1A1D21', '#ECEEEA'),
-    'ink.muted': both('#565D62', '#A3AAAD'),
+    ink: { DEFAULT: both('#1A1D21', '#ECEEEA'), muted: both('#565D62', '#A3AAAD') },
     rule: both('#DADDD6', '#31373D'),
     /** Edges of controls: 3:1 on the sheet. */
     edge: both('#7B8286', '#7C8589'),

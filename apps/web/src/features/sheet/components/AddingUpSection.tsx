@@ -1,5 +1,6 @@
 import { Box } from '@chakra-ui/react';
 import type { ReportResponse } from '@thudline/contracts';
+import { thirdOctaves } from '@thudline/dsp';
 import { hertz, signedDecibels } from '../../../lib/format';
 import { MarginNote } from './RuledSheet';
 import { addingUpTopics, findingsOf, paragraph, verdictWord, worstStatus } from './sectionWords';
@@ -33,6 +34,9 @@ export function AddingUpSection({ chosenHit, ...props }: AddingUpProps) {
   );
 }
 
+const nominal = (centreHz: number) =>
+  thirdOctaves.find((band) => Math.abs(band.centreHz / centreHz - 1) < 0.01)?.nominal ?? hertz(centreHz);
+
 /** Remarks that belong to the verdict: what would change it, and what is no fault. */
 function Caveats({ report: { agreement, arrival } }: { report: ReportResponse }) {
   const { lowCut, contraryBands, verdict } = agreement;
@@ -48,11 +52,16 @@ function Caveats({ report: { agreement, arrival } }: { report: ReportResponse })
           {signedDecibels(lowCut.flipGainMatchedDb)}.
         </MarginNote>
       )}
-      {contraryBands.map((band) => (
-        <MarginNote key={band.centreHz} from="Thudline" about={`${hertz(band.centreHz)} Hz`}>
-          Here a flip goes the other way, by {signedDecibels(band.flipGainDb)}. Compare by ear.
+      {contraryBands.length > 0 && (
+        <MarginNote from="Thudline" about="the other way">
+          {contraryBands.length === 1 ? 'One third-octave goes' : 'Some third-octaves go'} the other way with
+          a flip:{' '}
+          {contraryBands
+            .map((band) => `${nominal(band.centreHz)} Hz by ${signedDecibels(band.flipGainDb)}`)
+            .join(', ')}
+          . Compare by ear.
         </MarginNote>
-      ))}
+      )}
       {opposite && (
         <MarginNote from="Thudline" about="first swing">
           The two first swing in opposite directions. Many kits do so by nature; that alone is no fault.

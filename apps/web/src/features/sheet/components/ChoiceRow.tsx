@@ -23,7 +23,7 @@ export function ChoiceRow(props: ChoiceRowProps) {
   const onKeyDown = rowKeys(props);
   return (
     <Box onKeyDown={onKeyDown} marginTop="14px" _print={{ display: 'none' }}>
-      <Flex gap={{ base: '14px', lg: '24px' }} rowGap="10px" alignItems="center" wrap="wrap">
+      <Flex columnGap={{ base: '14px', lg: '16px' }} rowGap="10px" alignItems="center" wrap="wrap">
         <Button
           look="outline"
           disabled={!excerpt}
@@ -51,7 +51,7 @@ export function ChoiceRow(props: ChoiceRowProps) {
 
 function Choices({ bench: { choices, chosen, choose } }: { bench: ChoiceRowProps['bench'] }) {
   return (
-    <Flex role="group" aria-label="Choice" gap={{ base: '16px', lg: '22px' }} rowGap="8px" wrap="wrap">
+    <Flex role="group" aria-label="Choice" columnGap="17px" rowGap="8px" wrap="wrap">
       {choices.map((choice) => {
         const on = choice === chosen;
         return (

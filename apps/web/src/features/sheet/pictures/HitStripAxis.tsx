@@ -3,6 +3,7 @@ import { number } from '../../../lib/format';
 import { Hatch } from './Hatch';
 import type { StripScale } from './HitStrip';
 import { ink } from './ink';
+import { PictureText } from './PictureText';
 
 const axisY = 155;
 const bandTop = 24;
@@ -34,9 +35,9 @@ export function HitStripAxis({
         stroke={ink.ink}
         strokeWidth="1.2"
       />
-      <text x={(low + high) / 2} y={14} textAnchor="middle" fontSize="13" fontWeight="600" fill={ink.ink}>
+      <PictureText x={(low + high) / 2} y={14} textAnchor="middle" bold fill={ink.ink}>
         target
-      </text>
+      </PictureText>
       <rect
         x={x(0)}
         y={bandTop}
@@ -46,26 +47,26 @@ export function HitStripAxis({
         opacity="0.55"
       />
       <path d={`M${x(0)} ${bandTop - 6}V${axisY}`} stroke={ink.fix} strokeWidth="1.6" />
-      <text x={widthPx} y={14} textAnchor="end" fontSize="13" fontWeight="600" fill={ink.fix}>
+      <PictureText x={widthPx} y={14} textAnchor="end" bold fill={ink.fix}>
         clips
-      </text>
+      </PictureText>
       <path d={`M${x.left} ${axisY}H${x.right}`} stroke={ink.edge} strokeWidth="1.4" />
       {ticks.map((tick) => (
         <g key={tick}>
           <path d={`M${x(tick)} ${axisY - 4}v8`} stroke={ink.edge} strokeWidth="1.2" />
-          <text x={x(tick)} y={172} textAnchor="middle" fontSize="13" fill={ink.muted}>
+          <PictureText x={x(tick)} y={172} textAnchor="middle" fill={ink.muted}>
             {number(tick, 0)}
             {tick === 0 && widthPx >= 480 ? ' dBFS' : ''}
-          </text>
+          </PictureText>
         </g>
       ))}
       <path d={`M${x(target.aimDbfs)} ${axisY - 10}l4 6.5h-8z`} fill={ink.ink} />
-      <text x={x(target.aimDbfs)} y={172} textAnchor="middle" fontSize="13" fontWeight="600" fill={ink.ink}>
+      <PictureText x={x(target.aimDbfs)} y={172} textAnchor="middle" bold fill={ink.ink}>
         aim
-      </text>
-      <text x={0} y={172} fontSize="13" fill={ink.muted}>
+      </PictureText>
+      <PictureText x={0} y={172} fill={ink.muted}>
         {widthPx < 480 ? 'dot = hit' : 'a dot = a hit'}
-      </text>
+      </PictureText>
     </>
   );
 }

@@ -5,6 +5,7 @@ import { number, plural } from '../../../lib/format';
 import type { StripScale } from './HitStrip';
 import { changeLabel, dotSizes, rowHeightPx, stackDots, type Dot, type StripHit } from './hitStripLayout';
 import { ink } from './ink';
+import { halo, PictureText } from './PictureText';
 
 interface RowProps {
   role: 'kick' | 'overhead';
@@ -33,19 +34,19 @@ export function HitStripRow({ role, y, hits, track, target, widthPx, x, chosenHi
         aria-hidden
         pointerEvents="none"
       >
-        <text x={0} y={y - 4} fontSize="15" fontWeight="600" fill={ink[role]}>
+        <PictureText x={0} y={y - 4} fontSize={15} bold fill={ink[role]}>
           {role}
-        </text>
-        <text x={0} y={y + 13} fontSize="13" fill={ink.muted}>
+        </PictureText>
+        <PictureText x={0} y={y + 13} fill={ink.muted}>
           {hits.length === 0 ? 'no hit' : plural(hits.length, 'hit')}
-        </text>
+        </PictureText>
         <path d={`M${x.left} ${y}H${x.right}`} stroke={ink.rule} strokeWidth="1.2" />
         {clipped && <ClipCrosses x={x(0) + 14} y={y} count={track.clipping.runCount} role={role} />}
         {dots.map((dot) => (
           <DotMark key={dot.index} dot={dot} y={y} role={role} chosen={dot.index === chosenHit} />
         ))}
         {hardest && !clipped && (
-          <HardestLabel dot={hardest} y={y} role={role} x={x} stacked={hasDotRight(dots, hardest)} />
+          <HardestLabel dot={hardest} y={y} role={role} x={x} rowsBelow={rowsUnder(dots, hardest)} />
         )}
         {hardest && (
           <GainArrow {...{ y, x, track, target, clipped, fromDbfs: clipped ? 0 : hardest.peakDbfs }} />
@@ -56,8 +57,9 @@ export function HitStripRow({ role, y, hits, track, target, widthPx, x, chosenHi
   );
 }
 
-const hasDotRight = (dots: readonly Dot[], hardest: Dot) =>
-  dots.some((dot) => dot !== hardest && dot.row > 0 && dot.x > hardest.x - 14);
+/** How many rows hang under the hardest hit, where its label may have to go. */
+const rowsUnder = (dots: readonly Dot[], hardest: Dot) =>
+  Math.max(0, ...dots.filter((dot) => Math.abs(dot.x - hardest.x) < 44).map((dot) => dot.row));
 
 function DotMark({
   dot,
@@ -102,42 +104,39 @@ function ClipCrosses({
   return (
     <>
       <path d={`M${x - 6} ${y - 6}l12 12m0-12l-12 12`} stroke={ink[role]} strokeWidth="2.8" />
-      <text x={x} y={y + 22} fontSize="13" fontWeight="600" fill={ink.fix} textAnchor="middle" {...halo}>
+      <PictureText x={x} y={y + 22} bold fill={ink.fix} textAnchor="middle" {...halo}>
         ×{count}
-      </text>
+      </PictureText>
     </>
   );
 }
-
-const halo = { paintOrder: 'stroke', stroke: ink.sheet, strokeWidth: 5, strokeLinejoin: 'round' } as const;
 
 function HardestLabel({
   dot,
   y,
   role,
   x,
-  stacked,
+  rowsBelow,
 }: {
   dot: Dot;
   y: number;
   role: 'kick' | 'overhead';
   x: StripScale;
-  stacked: boolean;
+  rowsBelow: number;
 }) {
-  const fitsRight = dot.x + 46 < x.right;
-  const below = stacked || !fitsRight;
+  const fitsRight = dot.x + 42 < x.right;
   return (
-    <text
+    <PictureText
       x={fitsRight ? dot.x + 10 : x.right - 4}
-      y={below ? y + 19 : y + 5}
+      y={fitsRight ? y + 5 : y + 20 + rowsBelow * rowHeightPx}
       textAnchor={fitsRight ? 'start' : 'end'}
-      fontSize="15"
-      fontWeight="600"
+      fontSize={15}
+      bold
       fill={ink[role]}
       {...halo}
     >
       {number(dot.peakDbfs)}
-    </text>
+    </PictureText>
   );
 }
 
@@ -165,17 +164,16 @@ function GainArrow({
         stroke={color}
         strokeWidth="1.9"
       />
-      <text
+      <PictureText
         x={to + 7 * way}
         y={arrowY + 4.5}
         textAnchor={labelLeft ? 'end' : 'start'}
-        fontSize="13"
-        fontWeight="600"
+        bold
         fill={color}
         {...halo}
       >
         {changeLabel(track.gainChangeDb, clipped)}
-      </text>
+      </PictureText>
     </>
   );
 }

@@ -4,6 +4,7 @@ import { signedDecibels } from '../../../lib/format';
 import { useWidth } from '../../../lib/useWidth';
 import { Hatch } from './Hatch';
 import { ink } from './ink';
+import { halo, PictureText } from './PictureText';
 import { arcPath, axisDb, placeTicks, type LineTick } from './lowEndLineLayout';
 
 const lineY = 57;
@@ -46,31 +47,37 @@ export function LowEndLine({
         <rect x={x(0)} y={lineY - 3.5} width={right - x(0)} height={7} fill={ink.together} />
         <path d={`M${x(0)} ${lineY - 15}v30`} stroke={ink.ink} strokeWidth="1.6" />
         {ticks.map((tick) => (
-          <g key={tick.label}>
-            <path d={`M${tick.x} ${lineY - 7}v${28 + tick.row * 16}`} stroke={ink.ink} strokeWidth="1.6" />
-            <text
-              x={tick.x + (tick.side === 'left' ? -5 : 5)}
-              y={lineY + 23 + tick.row * 16}
-              textAnchor={tick.side === 'left' ? 'end' : 'start'}
-              fontSize="13"
-              fill={ink.muted}
-            >
-              {tick.label}
-            </text>
-          </g>
+          <path
+            key={tick.label}
+            d={`M${tick.x} ${lineY - 7}v${28 + tick.row * 16}`}
+            stroke={ink.ink}
+            strokeWidth="1.6"
+          />
+        ))}
+        {ticks.map((tick) => (
+          <PictureText
+            key={tick.label}
+            x={tick.x + (tick.side === 'left' ? -5 : 5)}
+            y={lineY + 23 + tick.row * 16}
+            textAnchor={tick.side === 'left' ? 'end' : 'start'}
+            fill={ink.muted}
+            {...halo}
+          >
+            {tick.label}
+          </PictureText>
         ))}
         <EndPoints
           {...{ recordedX: x(recordedDb), chosenX: x(chosen.levelDb), recordedDb, chosen, widthPx }}
         />
-        <text x={left} y={endsY} fontSize="13" fill={ink.muted}>
+        <PictureText x={left} y={endsY} fill={ink.muted}>
           {narrow ? 'apart −3 dB' : 'pull apart −3 dB'}
-        </text>
-        <text x={x(0)} y={endsY} fontSize="13" fill={ink.muted} textAnchor="middle">
+        </PictureText>
+        <PictureText x={x(0)} y={endsY} fill={ink.muted} textAnchor="middle">
           {narrow ? '0' : '0 = no help, no harm'}
-        </text>
-        <text x={right} y={endsY} fontSize="13" fill={ink.muted} textAnchor="end">
+        </PictureText>
+        <PictureText x={right} y={endsY} fill={ink.muted} textAnchor="end">
           add fully +3 dB
-        </text>
+        </PictureText>
       </svg>
     </Box>
   );
@@ -92,16 +99,15 @@ function EndPoints({ recordedX, chosenX, recordedDb, chosen, widthPx }: EndPoint
   const label = (x: number, way: number, text: string) => {
     const side = fits(x, way, text) ? way : -way;
     return (
-      <text
+      <PictureText
         x={x + 15 * side}
         y={lineY - 13}
         textAnchor={side < 0 ? 'end' : 'start'}
-        fontSize="13"
-        fontWeight="600"
+        bold
         fill={ink.ink}
       >
         {text}
-      </text>
+      </PictureText>
     );
   };
   return (
@@ -115,16 +121,16 @@ function EndPoints({ recordedX, chosenX, recordedDb, chosen, widthPx }: EndPoint
             stroke={ink.ink}
             strokeWidth="1.8"
           />
-          <text
+          <PictureText
             x={(recordedX + chosenX) / 2}
             y={14}
             textAnchor="middle"
-            fontSize="15"
-            fontWeight="600"
+            fontSize={15}
+            bold
             fill={ink.ink}
           >
             {signedDecibels(chosen.levelDb - recordedDb)}
-          </text>
+          </PictureText>
         </>
       )}
       <circle cx={recordedX} cy={lineY} r={7} fill={ink.sheet} stroke={ink.ink} strokeWidth="2.2" />

@@ -6,6 +6,7 @@ import { useWidth } from '../../../lib/useWidth';
 import type { Excerpt } from '../hooks/useExcerpt';
 import { Hatch } from './Hatch';
 import { ink } from './ink';
+import { PictureText } from './PictureText';
 import {
   apartPath,
   areaPath,
@@ -121,12 +122,12 @@ function AddedWave({
   const changed = choice.flipped || choice.shiftMs !== 0;
   return (
     <>
-      <text x={0} y={sizes.captionY} fontSize="13" fill={ink.muted}>
-        <tspan fontWeight="600" fill={ink.ink}>
+      <PictureText x={0} y={sizes.captionY} fill={ink.muted}>
+        <tspan style={{ fontWeight: 600 }} fill={ink.ink}>
           the two added
         </tspan>
         {changed ? ` solid: ${choice.label} · dotted: as recorded` : ' as recorded'}
-      </text>
+      </PictureText>
       <path d={areaPath(now, scale)} fill={ink.together} />
       <path d={`M0 ${sizes.addedMiddle}H${widthPx}`} stroke={ink.edge} strokeWidth="1" />
       {changed && (
@@ -152,16 +153,16 @@ const xOfMs = (band: TraceBand, widthPx: number) => (ms: number) => {
 function TimeAxis({ band, widthPx }: { band: TraceBand; widthPx: number }) {
   const { toMs, tickMs } = traceWindows[band];
   const x = xOfMs(band, widthPx);
-  const ticks = Array.from({ length: Math.floor((toMs - tickMs / 2) / tickMs) + 1 }, (_, i) => i * tickMs);
+  const ticks = Array.from({ length: Math.floor((toMs - tickMs / 4) / tickMs) + 1 }, (_, i) => i * tickMs);
   return (
     <>
       {ticks.map((ms) => (
         <g key={ms}>
           <path d={`M${x(ms)} ${sizes.axisY - 8}v5`} stroke={ink.edge} strokeWidth="1.4" />
-          <text x={x(ms)} y={sizes.axisY + 11} textAnchor="middle" fontSize="13" fill={ink.muted}>
+          <PictureText x={x(ms)} y={sizes.axisY + 11} textAnchor="middle" fill={ink.muted}>
             {ms}
             {ms === ticks.at(-1) ? ' ms' : ''}
-          </text>
+          </PictureText>
         </g>
       ))}
     </>
@@ -185,18 +186,17 @@ function ArrivalBracket({
   return (
     <>
       <path d={`M${x(0)} 16v-8H${to}v8`} fill="none" stroke={ink.ink} strokeWidth="1.5" />
-      <text
+      <PictureText
         x={Math.max(x(0), to) + 8}
         y={13}
-        fontSize="13"
-        fontWeight="600"
+        bold
         fill={ink.ink}
         paintOrder="stroke"
         stroke={ink.sheet}
         strokeWidth="5"
       >
         {milliseconds(Math.abs(arrivalMs - shiftMs))} later
-      </text>
+      </PictureText>
     </>
   );
 }

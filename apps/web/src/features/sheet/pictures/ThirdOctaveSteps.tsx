@@ -5,6 +5,7 @@ import { signed } from '../../../lib/format';
 import { useWidth } from '../../../lib/useWidth';
 import { Hatch } from './Hatch';
 import { ink } from './ink';
+import { PictureText } from './PictureText';
 import type { Beside } from './WhereItHelps';
 
 export type Step = Beside<ThirdOctaveLevel>;
@@ -36,9 +37,9 @@ export function ThirdOctaveSteps({ steps, label }: { steps: Step[]; label: strin
         <defs>
           <Hatch id={hatchId} color={ink.hatch} />
         </defs>
-        <text x={box.left} y={13} fontSize="13" fill={ink.muted}>
+        <PictureText x={box.left} y={13} fill={ink.muted}>
           third-octaves: {label === 'as recorded' ? 'as recorded' : `${label} (filled), as recorded (dotted)`}
-        </text>
+        </PictureText>
         <rect
           x={box.left}
           y={box.top - 6}
@@ -71,23 +72,22 @@ export function ThirdOctaveSteps({ steps, label }: { steps: Step[]; label: strin
         />
         <path d={outline((step) => step.levelDb)} fill="none" stroke={ink.ink} strokeWidth="2" />
         {[3, 0, -3].map((db) => (
-          <text key={db} x={box.left - 8} y={y(db) + 5} textAnchor="end" fontSize="13" fill={ink.muted}>
+          <PictureText key={db} x={box.left - 8} y={y(db) + 5} textAnchor="end" fill={ink.muted}>
             {signed(db, 0)}
-          </text>
+          </PictureText>
         ))}
         {steps.map((step, i) =>
           labelled.includes(step.nominal) ? (
-            <text
+            <PictureText
               key={step.nominal}
               x={step.nominal === '10k' ? widthPx : x(i + 0.5)}
               y={box.top + box.height + 22}
               textAnchor={step.nominal === '10k' ? 'end' : 'middle'}
-              fontSize="13"
               fill={ink.muted}
             >
               {step.nominal}
               {step.nominal === '10k' ? ' Hz' : ''}
-            </text>
+            </PictureText>
           ) : null,
         )}
       </svg>

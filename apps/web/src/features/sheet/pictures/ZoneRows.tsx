@@ -3,6 +3,7 @@ import type { ZoneLevel } from '@thudline/dsp';
 import { signed } from '../../../lib/format';
 import { useWidth } from '../../../lib/useWidth';
 import { ink } from './ink';
+import { PictureText } from './PictureText';
 import type { Beside } from './WhereItHelps';
 
 export type Zone = Beside<ZoneLevel>;
@@ -30,15 +31,15 @@ export function ZoneRows({ zones, label }: { zones: Zone[]; label: string }) {
         aria-label={describe(zones, label)}
         style={{ display: 'block' }}
       >
-        <text x={x(0) - 8} y={13} textAnchor="end" fontSize="13" fill={ink.muted}>
+        <PictureText x={x(0) - 8} y={13} textAnchor="end" fill={ink.muted}>
           pull apart
-        </text>
-        <text x={x(0) + 8} y={13} fontSize="13" fill={ink.muted}>
+        </PictureText>
+        <PictureText x={x(0) + 8} y={13} fill={ink.muted}>
           add up
-        </text>
-        <rect x={0} y={topPx - 6} width={widthPx} height={lowRows * rowPx} fill={ink.target} />
+        </PictureText>
+        <rect x={0} y={topPx - 7} width={widthPx} height={lowRows * rowPx + 1} fill={ink.target} />
         {zones.map((zone, i) => (
-          <ZoneRow key={zone.name} zone={zone} y={topPx + i * rowPx + 11} left={left} right={right} x={x} />
+          <ZoneRow key={zone.name} zone={zone} y={topPx + i * rowPx + 9} left={left} right={right} x={x} />
         ))}
         <path
           d={`M${x(0)} ${topPx - 10}V${topPx + zones.length * rowPx - 4}`}
@@ -46,16 +47,15 @@ export function ZoneRows({ zones, label }: { zones: Zone[]; label: string }) {
           strokeWidth="1.4"
         />
         {([-3, 0, 3] as const).map((db) => (
-          <text
+          <PictureText
             key={db}
             x={db === 3 ? right : x(db)}
             y={height - 6}
             textAnchor={db === 3 ? 'end' : 'middle'}
-            fontSize="13"
             fill={ink.muted}
           >
             {db === 3 ? '+3 dB' : signed(db, 0)}
-          </text>
+          </PictureText>
         ))}
       </svg>
     </Box>
@@ -89,12 +89,12 @@ function ZoneRow({
   const way = Math.sign(to - from);
   return (
     <>
-      <text x={6} y={y + 1} fontSize="15" fontWeight="600" fill={ink.ink}>
+      <PictureText x={6} y={y} fontSize={15} bold fill={ink.ink}>
         {zone.name}
-      </text>
-      <text x={6} y={y + 15} fontSize="13" fill={ink.muted}>
+      </PictureText>
+      <PictureText x={6} y={y + 14} fill={ink.muted}>
         {ranges[zone.name]}
-      </text>
+      </PictureText>
       <path d={`M${left} ${y}H${right}`} stroke={ink.rule} strokeWidth="1.4" />
       {Math.abs(to - from) > 11 && (
         <path

@@ -54,16 +54,16 @@ export function stackDots(hits: readonly StripHit[], xOf: (dbfs: number) => numb
 
 const radius = (hardest: boolean) => (hardest ? hardestRadiusPx : dotRadiusPx);
 
+/** Nearest to the line first; the axis is closer below than the next line is above. */
+const rows = [0, 1, -1, 2, -2, -3];
+
 function freeRow(placed: readonly Dot[], x: number, hardest: boolean): number {
-  for (let distance = 0; ; distance++) {
-    for (const row of distance === 0 ? [0] : [distance, -distance]) {
-      const crowded = placed.some(
-        (dot) => dot.row === row && Math.abs(dot.x - x) < radius(dot.hardest) + radius(hardest) + gapPx,
-      );
-      // More than three rows either way would run into the next line: dots may cover each other there.
-      if (!crowded || distance === 3) return row;
-    }
-  }
+  const crowded = (row: number) =>
+    placed.some(
+      (dot) => dot.row === row && Math.abs(dot.x - x) < radius(dot.hardest) + radius(hardest) + gapPx,
+    );
+  // Where every row is taken, dots may cover each other: there are as many as can be seen.
+  return rows.find((row) => !crowded(row)) ?? 0;
 }
 
 /** "down 6.5 dB", "up 5 dB"; whole and half decibels without a needless zero. */
