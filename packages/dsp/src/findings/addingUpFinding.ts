@@ -22,6 +22,11 @@ export function addingUpStatus(agreement: AgreementReport): FindingStatus {
   return agreement.verdict === 'flip' ? 'fix' : 'good';
 }
 
+/** Section 5: with fewer than three hits nothing is sure. */
+export function hasFewHits({ hitsUsed }: AgreementReport): boolean {
+  return hitsUsed < FEW_HITS;
+}
+
 function said(agreement: AgreementReport): Said {
   switch (agreement.verdict) {
     case 'flip':
@@ -69,7 +74,7 @@ function unsure(agreement: AgreementReport): Said {
 }
 
 function doubt(agreement: AgreementReport): string {
-  if (agreement.hitsUsed < FEW_HITS)
+  if (hasFewHits(agreement))
     return `only ${counted(agreement.hitsUsed, 'kick hit')} ${agreement.hitsUsed === 1 ? 'says' : 'say'} so`;
   const oneSign = new Set(agreement.bands.map((band) => Math.sign(band.flipGainDb))).size <= 1;
   return oneSign ? 'that is little' : 'the lowest octaves don’t all say so';

@@ -1,6 +1,6 @@
 import { levelStatus, NOISE_WATCH_DBFS } from '../report/level';
 import type { NextAction, Reader, ReportFigures } from '../report/reportTypes';
-import { addingUpStatus } from './addingUpFinding';
+import { addingUpStatus, hasFewHits } from './addingUpFinding';
 import { noisierMicrophone } from './noiseFinding';
 import { halfDbText, wholeDbfsText } from './words';
 
@@ -69,6 +69,16 @@ function polarityActions({ agreement }: ReportFigures): NextAction[] {
     return [{ id: 'polarity-leave', action: 'Leave the polarity switches alone.', detail: '', leave: true }];
   }
   if (status === 'good') return [];
+  if (status === 'watch' && !hasFewHits(agreement)) {
+    return [
+      {
+        id: 'compare-polarities',
+        action: 'Compare both polarities by ear.',
+        detail: 'The low end differs little, so either will do.',
+        leave: false,
+      },
+    ];
+  }
   return [
     {
       id: 'record-kicks',

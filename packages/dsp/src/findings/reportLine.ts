@@ -1,9 +1,9 @@
 import { levelStatus, NOISE_WATCH_DBFS } from '../report/level';
 import type { LineSentence, Reader, ReportFigures } from '../report/reportTypes';
-import { addingUpStatus } from './addingUpFinding';
+import { addingUpStatus, hasFewHits } from './addingUpFinding';
 import { clippedHits } from './clippedHits';
 import { noisierMicrophone } from './noiseFinding';
-import { countText, decimalText, wholeDbfsText, wholeDbText } from './words';
+import { counted, countText, decimalText, wholeDbfsText, wholeDbText } from './words';
 
 const ROLES = ['kick', 'overhead'] as const;
 const SENTENCES = 2;
@@ -86,9 +86,15 @@ function unsure(figures: ReportFigures): LineSentence[] {
   if (status === 'cannot-tell') {
     return [{ action: 'Record eight hard kicks:', reason: 'this take can’t tell which polarity adds.' }];
   }
-  return status === 'watch'
-    ? [{ action: 'Compare both polarities by ear:', reason: 'the low end leans too little to be sure.' }]
-    : [];
+  if (status !== 'watch') return [];
+  return hasFewHits(agreement)
+    ? [
+        {
+          action: 'Record eight hard kicks:',
+          reason: `${counted(agreement.hitsUsed, 'kick hit')} can’t settle the polarity.`,
+        },
+      ]
+    : [{ action: 'Compare both polarities by ear:', reason: 'the low end leans too little to be sure.' }];
 }
 
 function goodTake({ agreement }: ReportFigures): LineSentence {

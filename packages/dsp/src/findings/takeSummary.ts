@@ -44,7 +44,8 @@ function flip(figures: ReportFigures): TakeSummary | null {
 
 function gainRest(figures: ReportFigures): string {
   const role = ROLES.find((each) => levelStatus(figures[each]) === 'watch');
-  return role ? turn(role, figures[role]) : 'Levels are right.';
+  if (role) return turn(role, figures[role]);
+  return noise(figures) ? 'Look for the noise.' : 'Levels are right.';
 }
 
 function turn(what: string, track: TrackReport): string {

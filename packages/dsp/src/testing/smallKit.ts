@@ -63,8 +63,10 @@ function kickWave(random: () => number): (seconds: number) => number {
   return (s) => {
     if (s < 0) return 0;
     const phase = 2 * Math.PI * (52 * s + 60 * 0.03 * (1 - Math.exp(-s / 0.03)));
+    const body = Math.exp(-s / BODY_S) * Math.sin(phase);
+    if (s > 10 * CLICK_S) return body;
     const click = tones.reduce((sum, tone) => sum + Math.sin(2 * Math.PI * tone.hz * s + tone.phase), 0);
-    return Math.exp(-s / BODY_S) * Math.sin(phase) + 0.08 * Math.exp(-s / CLICK_S) * click;
+    return body + 0.08 * Math.exp(-s / CLICK_S) * click;
   };
 }
 
