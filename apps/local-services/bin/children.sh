@@ -59,7 +59,8 @@ remove_throwaway() {
   if [[ -n ${throwaway_files:-} && $code != 0 && -d $throwaway_files/log ]]; then
     rm -rf -- "$data/log/test"
     mv -- "$throwaway_files/log" "$data/log/test"
-    say "The logs of this test run are in $data/log/test."
+    [[ ! -d $throwaway_files/results ]] || mv -- "$throwaway_files/results" "$data/log/test/results"
+    say "The logs, pictures and traces of this test run are in $data/log/test."
   fi
   rm -rf -- ${throwaway_cluster:+"$throwaway_cluster"} ${throwaway_files:+"$throwaway_files"}
 }

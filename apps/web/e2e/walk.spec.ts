@@ -91,7 +91,7 @@ async function findInList(page: Page): Promise<void> {
   await expect(row).toContainText('Flip the overhead');
   await expectAccessibleInBothThemes(page, 'takes');
   await row.getByRole('link').click();
-  await expect(page.getByRole('heading', { name: /^Adding up/ })).toBeVisible();
+  await expect(page.getByRole('heading', { name: /^Adding up: flip/ })).toBeVisible();
 }
 
 async function signOut(page: Page): Promise<void> {

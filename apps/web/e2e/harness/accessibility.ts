@@ -8,6 +8,7 @@ const wcagTags = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'];
 export async function expectAccessibleInBothThemes(page: Page, name: string): Promise<void> {
   for (const colorScheme of ['dark', 'light'] as const) {
     await page.emulateMedia({ colorScheme, reducedMotion: 'reduce' });
+    await expect(page.locator('html')).toHaveClass(colorScheme === 'dark' ? /dark/ : /^(?!.*dark)/);
     const { violations } = await new AxeBuilder({ page }).withTags(wcagTags).analyze();
     const found = violations.map(({ id, help, nodes }) => ({
       id,

@@ -1,10 +1,11 @@
 import { spawn, type ChildProcess } from 'node:child_process';
-import { mkdirSync, openSync } from 'node:fs';
+import { existsSync, mkdirSync, openSync } from 'node:fs';
 import { join, resolve } from 'node:path';
 import { browserSettings } from './browserSettings';
 import { keepPlayerState } from './playerState';
 
 const root = resolve(import.meta.dirname, '../../../..');
+const webDist = join(root, 'apps/web/dist');
 const startedWithinMs = 60_000;
 const pauseMs = 150;
 
@@ -13,6 +14,8 @@ const children: ChildProcess[] = [];
 /** Playwright's global setup: the built application on a fresh database, with the demo in it; gives back its end. */
 export default async function startApplication(): Promise<() => Promise<void>> {
   const { publicUrl } = browserSettings();
+  if (!existsSync(join(webDist, 'index.html')))
+    throw new Error('The web application is not built: npm run build.');
   try {
     await finished('migrate', 'apps/api/dist/database/migrate.js');
     start('worker', 'apps/api/dist/worker-main.js');
@@ -42,7 +45,7 @@ function start(name: string, script: string): ChildProcess {
       PORT: apiPort,
       PUBLIC_URL: publicUrl,
       API_URL: publicUrl,
-      WEB_DIST: join(root, 'apps/web/dist'),
+      WEB_DIST: webDist,
       // The least argon2 takes: these passwords guard nothing, and every sign-in waits for it.
       ARGON2_MEMORY_KIB: '1024',
       ARGON2_TIME: '1',
