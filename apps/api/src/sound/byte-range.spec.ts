@@ -25,12 +25,18 @@ describe('byteRange', () => {
 
   it('refuses a range beyond the end and an empty suffix, and tells the size', () => {
     for (const header of ['bytes=100-', 'bytes=100-200', 'bytes=-0']) {
-      expect(() => byteRange(header, 100)).toThrow(
-        expect.objectContaining({
-          code: 'range-not-satisfiable',
-          headers: { 'Content-Range': 'bytes */100' },
-        }),
-      );
+      expect(refusalOf(header)).toMatchObject({
+        code: 'range-not-satisfiable',
+        headers: { 'Content-Range': 'bytes */100' },
+      });
     }
   });
 });
+
+function refusalOf(header: string): unknown {
+  try {
+    return byteRange(header, 100);
+  } catch (error) {
+    return error;
+  }
+}

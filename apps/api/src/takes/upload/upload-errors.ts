@@ -13,11 +13,11 @@ export function tooLarge(maxFileBytes: number, fileName?: string, fileIndex?: nu
 }
 
 /** What went wrong while an upload was received, as a sentence; faults of ours stay as they are. */
-export function uploadError(thrown: unknown, maxFileBytes: number, filesSoFar: number): unknown {
+export function uploadError(thrown: unknown, maxFileBytes: number, fileIndex: number): Error {
   if (thrown instanceof AppError) return thrown;
-  if (thrown instanceof MulterError) return limitError(thrown, maxFileBytes, filesSoFar);
-  if (thrown instanceof Error && !('syscall' in thrown)) return notWholeUpload(thrown);
-  return thrown;
+  if (thrown instanceof MulterError) return limitError(thrown, maxFileBytes, fileIndex);
+  if (isParserError(thrown)) return notWholeUpload(thrown);
+  return new Error('An upload could not be received.', { cause: thrown });
 }
 
 function limitError(
@@ -43,3 +43,8 @@ const notWholeUpload = (cause: Error) =>
   new AppError('bad-request', 'The upload did not arrive whole, so nothing was stored. Try again.', {
     cause,
   });
+
+/** Multer and busboy throw plain errors at bodies that are malformed or cut off; the system's errors name a call. */
+function isParserError(thrown: unknown): thrown is Error {
+  return thrown instanceof Error && thrown.name === 'Error' && !('syscall' in thrown);
+}

@@ -1,0 +1,8 @@
+/** Looks again and again until there is something to see; jest's own time limit ends it. */
+export async function until<T>(look: () => Promise<T | null | false>): Promise<T> {
+  for (;;) {
+    const seen = await look();
+    if (seen) return seen;
+    await new Promise((resolve) => setImmediate(resolve));
+  }
+}
