@@ -347,7 +347,7 @@ function multipart(bytes: Uint8Array): Buffer {
 }
 
 /** Sends part of a body, waits until the server is writing it to scratch, then cuts the line. */
-async function brokenUpload(test: TestApp, person: Person, body: Buffer, sentBytes: number): Promise<void> {
+async function brokenUpload(test: TestApp, body: Buffer, sentBytes: number): Promise<void> {
   const socket = connect((test.server.address() as AddressInfo).port, '127.0.0.1');
   const cookie = await cookieOf(test);
   socket.write(
