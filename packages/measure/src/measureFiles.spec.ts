@@ -23,7 +23,7 @@ afterAll(() => folder?.remove());
 
 const measure = (paths: string[], tracks = twoFiles, options: Partial<MeasureFilesOptions> = {}) =>
   measureFiles({ files: paths.map((path) => ({ path })), tracks, ...options });
-const takePaths = async (name: string, take = simpleTake({ seconds: 6 })) => [
+const takePaths = async (name: string, take = simpleTake({ seconds: 4 })) => [
   await folder.wav(`${name}-kick.wav`, [take.kick]),
   await folder.wav(`${name}-overhead.wav`, [take.overhead]),
 ];
@@ -33,20 +33,20 @@ describe('measureFiles', () => {
     const paths = await takePaths('plain');
     const { take, files } = await measure(paths);
     expect(files.map(({ path, facts }) => [path, facts.encodingName, facts.frames])).toEqual(
-      paths.map((path) => [path, '24-bit PCM', 6 * sampleRateHz]),
+      paths.map((path) => [path, '24-bit PCM', 4 * sampleRateHz]),
     );
-    expect(take.facts).toMatchObject({ sampleRateHz, durationS: 6, notices: [] });
+    expect(take.facts).toMatchObject({ sampleRateHz, durationS: 4, notices: [] });
     expect(take.facts.tracks.map(({ role }) => role)).toEqual(['kick', 'overhead']);
-    // Kicks at 1.0, 1.5 … 5.0 s; the onset lies within a few ms of each.
+    // Kicks at 1.0, 1.5 … 3.0 s; the onset lies within a few ms of each.
     const kicks = take.facts.hits
       .filter(({ kind }) => kind === 'kick')
       .map(({ timeS }) => Math.round(timeS * 100) / 100);
-    expect(kicks).toEqual([1, 1.5, 2, 2.5, 3, 3.5, 4, 4.5, 5]);
+    expect(kicks).toEqual([1, 1.5, 2, 2.5, 3]);
     expect(take.facts.pairs[0].agreement.verdict).toBe('flip');
   });
 
   it('finds the same in one stereo file as in two, whichever side is the kick', async () => {
-    const { kick, overhead } = simpleTake({ seconds: 6 });
+    const { kick, overhead } = simpleTake({ seconds: 4 });
     const two = await measure(await takePaths('two'));
     const stereo = await folder.wav('stereo.wav', [overhead, kick]);
     const one = await measure([stereo], sides(1, 0));
@@ -54,15 +54,15 @@ describe('measureFiles', () => {
   });
 
   it('measures over the shorter file and says by how much', async () => {
-    const { kick, overhead } = simpleTake({ seconds: 6 });
+    const { kick, overhead } = simpleTake({ seconds: 4 });
     const loudEnd = kick.slice();
     loudEnd[loudEnd.length - 10] = 0.99;
     const paths = [
       await folder.wav('long.wav', [loudEnd]),
-      await folder.wav('short.wav', [overhead.subarray(0, 5 * sampleRateHz)]),
+      await folder.wav('short.wav', [overhead.subarray(0, 3 * sampleRateHz)]),
     ];
     const { take } = await measure(paths);
-    expect(take.facts.durationS).toBe(5);
+    expect(take.facts.durationS).toBe(3);
     expect(take.facts.notices).toEqual([{ kind: 'lengths-differ', byS: 1 }]);
     expect(take.facts.tracks[0].samplePeakDbfs).toBeLessThan(-3);
   });

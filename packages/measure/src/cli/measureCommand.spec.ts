@@ -9,7 +9,7 @@ let both: string;
 
 beforeAll(async () => {
   folder = await takeFolder();
-  const take = simpleTake({ seconds: 6 });
+  const take = simpleTake({ seconds: 4 });
   kick = await folder.wav('kick.wav', [take.kick]);
   overhead = await folder.wav('overhead.wav', [take.overhead]);
   both = await folder.wav('both.wav', [take.overhead.map((x, i) => x + 0.2 * Math.sin(i)), take.kick]);
@@ -27,7 +27,7 @@ describe('npm run measure', () => {
     ]);
     expect([exitCode, stderr]).toEqual([0, '']);
     const report = reportFigures.parse(JSON.parse(stdout));
-    expect(report).toMatchObject({ version: 1, sampleRateHz: 48000, durationS: 6 });
+    expect(report).toMatchObject({ version: 1, sampleRateHz: 48000, durationS: 4 });
     expect(report.agreement.verdict).toBe('flip');
     expect(stdout).not.toMatch(/-?\d+\.\d{7}/);
   });
