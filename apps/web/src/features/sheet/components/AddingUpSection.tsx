@@ -2,9 +2,10 @@ import { Box } from '@chakra-ui/react';
 import type { ReportResponse } from '@thudline/contracts';
 import { thirdOctaves } from '@thudline/dsp';
 import { hertz, signedDecibels } from '../../../lib/format';
+import { Findings } from './Findings';
 import { MarginNote } from './RuledSheet';
-import { addingUpTopics, findingsOf, paragraph, verdictWord, worstStatus } from './sectionWords';
-import { SectionText, SheetSection } from './SheetSection';
+import { addingUpTopics, findingsOf, verdictWord, worstStatus } from './sectionWords';
+import { SheetSection } from './SheetSection';
 import { PairBench, type PairBenchProps } from './PairBench';
 
 type AddingUpProps = Omit<PairBenchProps, 'chosenHit'> & { chosenHit: number | null };
@@ -22,7 +23,7 @@ export function AddingUpSection({ chosenHit, ...props }: AddingUpProps) {
       status={verdictFinding?.status ?? worstStatus(findings)}
       note={<Caveats report={report} />}
     >
-      <SectionText>{paragraph(findings)}</SectionText>
+      <Findings findings={findings} />
       {report.pairSpectrum && chosenHit !== null ? (
         <PairBench {...props} chosenHit={chosenHit} />
       ) : (

@@ -1,9 +1,10 @@
 import type { ReportResponse } from '@thudline/contracts';
 import { number } from '../../../lib/format';
 import { HitStrip } from '../pictures/HitStrip';
+import { Findings } from './Findings';
 import { MarginNote } from './RuledSheet';
-import { findingsOf, levelTopics, levelsWord, paragraph, worstStatus } from './sectionWords';
-import { SectionText, SheetSection } from './SheetSection';
+import { findingsOf, levelTopics, levelsWord, worstStatus } from './sectionWords';
+import { SheetSection } from './SheetSection';
 
 /** Levels: both microphones' hits against the target, and what to turn at the preamp. */
 export function LevelsSection({
@@ -30,7 +31,7 @@ export function LevelsSection({
         </MarginNote>
       }
     >
-      <SectionText>{paragraph(findings)}</SectionText>
+      <Findings findings={findings} />
       <HitStrip report={report} chosenHit={chosenHit} onChoose={onChooseHit} />
     </SheetSection>
   );

@@ -2,11 +2,15 @@ import type { Finding, FindingStatus, ReportResponse } from '@thudline/contracts
 
 const severity: readonly FindingStatus[] = ['fix', 'watch', 'cannot-tell', 'good'];
 
-/** Findings of some topics, the most pressing first. */
+/** Findings of some topics: the most pressing first, then in the order of the topics. */
 export function findingsOf(report: ReportResponse, topics: readonly Finding['topic'][]): Finding[] {
   return report.findings
     .filter((finding) => topics.includes(finding.topic))
-    .sort((a, b) => severity.indexOf(a.status) - severity.indexOf(b.status));
+    .sort(
+      (a, b) =>
+        severity.indexOf(a.status) - severity.indexOf(b.status) ||
+        topics.indexOf(a.topic) - topics.indexOf(b.topic),
+    );
 }
 
 export const worstStatus = (findings: readonly Finding[]): FindingStatus => findings[0]?.status ?? 'good';
@@ -31,15 +35,3 @@ export const verdictWord = ({ agreement }: ReportResponse): string => verdictWor
 
 export const levelTopics = ['kick-level', 'overhead-level', 'noise', 'dc-offset'] as const;
 export const addingUpTopics = ['adding-up', 'arrival'] as const;
-
-/**
- * A section's paragraph: every finding's sentence; the reason only of what asks for something, since a good finding
- * folds to its sentence.
- */
-export function paragraph(findings: readonly Finding[]): string {
-  return findings
-    .map((finding) =>
-      finding.status === 'good' ? finding.sentence : [finding.sentence, finding.why].join(' ').trim(),
-    )
-    .join(' ');
-}

@@ -50,9 +50,11 @@ export function namedChoices(agreement: Agreement, balance: Balance): NamedChoic
   }));
 }
 
-/** Which choice is looked at and heard, at which balance. Starts with the flip, the first thing to try. */
+/** Which choice is looked at and heard, at which balance. Starts with what the verdict says. */
 export function useChoice(agreement: Agreement) {
-  const [name, setName] = useState<NamedChoice['name']>('flipped');
+  const [name, setName] = useState<NamedChoice['name']>(
+    agreement.verdict === 'flip' ? 'flipped' : 'as-recorded',
+  );
   const [balance, setBalance] = useState<Balance>('matched');
   const choices = useMemo(() => namedChoices(agreement, balance), [agreement, balance]);
   const asRecorded = choices.find((each) => each.name === 'as-recorded') ?? choices[0];

@@ -124,10 +124,10 @@ function HardestLabel({
   x: StripScale;
   rowsBelow: number;
 }) {
-  const fitsRight = dot.x + 42 < x.right;
+  const fitsRight = dot.x + 45 < x.right;
   return (
     <PictureText
-      x={fitsRight ? dot.x + 10 : x.right - 4}
+      x={fitsRight ? dot.x + 13 : x.right - 4}
       y={fitsRight ? y + 5 : y + 20 + rowsBelow * rowHeightPx}
       textAnchor={fitsRight ? 'start' : 'end'}
       fontSize={15}

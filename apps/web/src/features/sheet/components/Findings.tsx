@@ -1,0 +1,35 @@
+import { Box, Flex } from '@chakra-ui/react';
+import type { Finding } from '@thudline/contracts';
+import { StatusMark } from '../../../components/StatusMark';
+import { SectionText } from './SheetSection';
+
+/**
+ * The sentences of a section: the most pressing finding first, with its reason; others that ask for something each with
+ * their mark; what is good folds to its sentences.
+ */
+export function Findings({ findings }: { findings: Finding[] }) {
+  const [first, ...others] = findings;
+  if (!first) return null;
+  const asking = others.filter((finding) => finding.status !== 'good');
+  const good = others.filter((finding) => finding.status === 'good');
+  return (
+    <>
+      <SectionText>
+        {first.sentence} {first.status !== 'good' && first.why}
+      </SectionText>
+      {asking.map((finding) => (
+        <Flex key={finding.topic} gap="10px" marginTop="8px" alignItems="flex-start">
+          <Box paddingTop="3px">
+            <StatusMark status={finding.status} sizePx={18} />
+          </Box>
+          <Box>{finding.sentence}</Box>
+        </Flex>
+      ))}
+      {good.length > 0 && (
+        <Box color="ink.muted" fontSize="small" lineHeight="22px" marginTop="8px">
+          {good.map((finding) => finding.sentence).join(' ')}
+        </Box>
+      )}
+    </>
+  );
+}
