@@ -9,7 +9,20 @@ class NoResizeObserver {
   disconnect() {}
 }
 
+/** The router makes one for every navigation and reads only these of it. */
+class NavigationRequest {
+  readonly url: string;
+  readonly method: string;
+  readonly signal: AbortSignal | null;
+  constructor(url: string | URL, { method = 'GET', signal = null }: RequestInit = {}) {
+    this.url = String(url);
+    this.method = method;
+    this.signal = signal;
+  }
+}
+
 Object.assign(globalThis, {
+  Request: NavigationRequest,
   TextEncoder,
   TextDecoder,
   ReadableStream,
@@ -18,12 +31,22 @@ Object.assign(globalThis, {
     globalThis.structuredClone ?? ((value: unknown) => JSON.parse(JSON.stringify(value)) as unknown),
   ResizeObserver: NoResizeObserver,
 });
-window.matchMedia ??= (query: string) =>
-  ({
-    matches: false,
-    media: query,
-    onchange: null,
-    addEventListener() {},
-    removeEventListener() {},
-    dispatchEvent: () => false,
-  }) as unknown as MediaQueryList;
+const noMedia = (query: string) => ({
+  matches: false,
+  media: query,
+  onchange: null,
+  addEventListener() {},
+  removeEventListener() {},
+  dispatchEvent: () => false,
+});
+if (!('matchMedia' in window)) Object.assign(window, { matchMedia: noMedia });
+
+function readWhole(this: Blob) {
+  return new Promise<ArrayBuffer>((resolve, reject) => {
+    const reader = new FileReader();
+    reader.onload = () => resolve(reader.result as ArrayBuffer);
+    reader.onerror = () => reject(new Error('The blob could not be read.'));
+    reader.readAsArrayBuffer(this);
+  });
+}
+if (!('arrayBuffer' in Blob.prototype)) Object.assign(Blob.prototype, { arrayBuffer: readWhole });

@@ -40,7 +40,7 @@ export function foreignFileWords({ name, size }: { name: string; size: number })
 
 /** "This is …" → "this is …" behind a colon; names such as "RIFF" stay as they are. */
 export const afterColon = (sentence: string) =>
-  /^[A-Z][a-z']/.test(sentence) ? sentence[0].toLowerCase() + sentence.slice(1) : sentence;
+  /^[A-Z][a-z' ]/.test(sentence) ? sentence[0].toLowerCase() + sentence.slice(1) : sentence;
 
 /** "9 s left", "2 min left". */
 export function shortTimeLeft(secondsLeft: number | null): string {

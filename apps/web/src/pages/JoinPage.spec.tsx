@@ -1,0 +1,62 @@
+import { paths } from '@thudline/contracts';
+import { screen, waitFor } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
+import { GuestOnly } from '../app/gates';
+import { fakeServer, json, refusal, type FakeRoutes } from '../testing/fakeServer';
+import { renderPage } from '../testing/renderPage';
+import { sampleMe } from '../testing/sampleData';
+import { JoinPage } from './JoinPage';
+
+function open(routes: FakeRoutes) {
+  const server = fakeServer({
+    [`GET ${paths.me}`]: refusal(401, 'not-signed-in', 'Sign in first.'),
+    [`POST ${paths.refresh}`]: refusal(401, 'session-ended', 'Sign in again.'),
+    ...routes,
+  });
+  const pages = [{ element: <GuestOnly />, children: [{ path: '/join', element: <JoinPage /> }] }];
+  return { ...server, ...renderPage(pages, '/join') };
+}
+
+async function join(password = 'drumsdrums') {
+  await userEvent.type(await screen.findByLabelText('Name'), 'Juno');
+  await userEvent.type(screen.getByLabelText('E-mail'), 'juno@example.org');
+  await userEvent.type(screen.getByLabelText('Password'), password);
+  await userEvent.click(screen.getByRole('button', { name: 'Join' }));
+}
+
+describe('joining', () => {
+  it('leads to the first take', async () => {
+    const { requests, address } = open({ [`POST ${paths.join}`]: json(sampleMe, 201) });
+    await join();
+    await waitFor(() => expect(address()).toBe('/takes/new'));
+    expect(requests.at(-1)?.body).toEqual({
+      name: 'Juno',
+      email: 'juno@example.org',
+      password: 'drumsdrums',
+    });
+  });
+
+  it('tells the rule for passwords beforehand and holds to it', async () => {
+    const { requests } = open({});
+    expect(await screen.findByLabelText('Password')).toHaveAccessibleDescription('At least 10 characters');
+    await join('short');
+    expect(screen.getByLabelText('Password')).toHaveAccessibleDescription(
+      'A password needs at least 10 characters.',
+    );
+    expect(requests.some(({ path }) => path === paths.join)).toBe(false);
+  });
+
+  it('puts a taken address beside the address', async () => {
+    const taken = 'This address has an account already. Sign in instead.';
+    open({ [`POST ${paths.join}`]: refusal(409, 'email-taken', taken) });
+    await join();
+    await waitFor(() => expect(screen.getByLabelText('E-mail')).toHaveAccessibleDescription(taken));
+    expect(screen.getByLabelText('Name')).toHaveValue('Juno');
+  });
+
+  it('says above the button what belongs to no field', async () => {
+    open({ [`POST ${paths.join}`]: refusal(429, 'too-many-requests', 'Too many tries. Wait a minute.') });
+    await join();
+    expect(await screen.findByRole('alert')).toHaveTextContent('Too many tries. Wait a minute.');
+  });
+});
