@@ -29,7 +29,7 @@ export interface KickCandidateFinder {
 const LOW_HZ = 30;
 const HIGH_HZ = 150;
 /** A rise of more than 6 dB in 30 ms; tried on 2,231 real channels. */
-const RISE = { riseDb: 6, withinMs: 30 };
+const RISE = { riseDb: 6, withinMs: 30, over: 'lowest' } as const;
 /**
  * About half a period of 30 Hz, so that the level hardly ripples with the wave itself. Tried from 8 to 36 ms on real hits
  * strung to sixteenths: 8 ms takes ringing for hits, from 24 ms on hits 68 ms apart begin to be missed.

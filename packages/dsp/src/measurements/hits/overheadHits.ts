@@ -29,7 +29,7 @@ const CYMBAL_UNDER_DB = 0;
 /** Below this rate too little of the bright band is left to judge by. */
 const LOWEST_RATE_FOR_KINDS_HZ = 32000;
 /** Our choice, simple on purpose: a rise of more than 6 dB in 20 ms, as a stick makes it and ringing seldom does. */
-const RISE = { windowMs: 10, riseDb: 6, withinMs: 20 };
+const RISE = { windowMs: 10, riseDb: 6, withinMs: 20, over: 'earliest' } as const;
 /** A much softer rise this soon after a hit is that hit's own ringing, unless the bright band rises with it. */
 const RINGING_WITHIN_HOPS = 400 / HOP_MS;
 const RINGING_BELOW_DB = 6;

@@ -6,8 +6,10 @@ export interface RiseOptions {
   readonly windowMs: number;
   /** The level must rise by more than `riseDb` … */
   readonly riseDb: number;
-  /** … within this time. */
+  /** … within this time: */
   readonly withinMs: number;
+  /** over its lowest level in that time, or over its level that long ago, which ripple deceives less. */
+  readonly over: 'lowest' | 'earliest';
 }
 
 /** What a rise finder says after each hop. */
@@ -31,7 +33,7 @@ export interface RiseFinder {
 const STEEPNESS_HOPS = 2;
 
 /** Before the first sample there is silence, so a take that begins with a hit has its rise too. */
-export function createRiseFinder({ windowMs, riseDb, withinMs }: RiseOptions): RiseFinder {
+export function createRiseFinder({ windowMs, riseDb, withinMs, over }: RiseOptions): RiseFinder {
   const window = new Float64Array(Math.max(1, Math.round(windowMs / HOP_MS)));
   const past = new Float64Array(Math.max(1, Math.round(withinMs / HOP_MS)));
   let hop = 0;
@@ -39,8 +41,10 @@ export function createRiseFinder({ windowMs, riseDb, withinMs }: RiseOptions): R
   return {
     push(hopPower) {
       window[hop % window.length] = hopPower;
-      const power = window.reduce((sum, value) => sum + value, 0) / window.length;
-      const before = past[hop % past.length];
+      let sum = 0;
+      for (let i = 0; i < window.length; i += 1) sum += window[i];
+      const power = sum / window.length;
+      const before = over === 'lowest' ? lowest(past) : past[hop % past.length];
       const justBefore = past[(hop - STEEPNESS_HOPS + past.length * STEEPNESS_HOPS) % past.length];
       past[hop % past.length] = power;
       hop += 1;
@@ -51,4 +55,10 @@ export function createRiseFinder({ windowMs, riseDb, withinMs }: RiseOptions): R
       return { levelDb, begins, rising, addedPower: power - justBefore };
     },
   };
+}
+
+function lowest(powers: Float64Array): number {
+  let least = powers[0];
+  for (let i = 1; i < powers.length; i += 1) if (powers[i] < least) least = powers[i];
+  return least;
 }

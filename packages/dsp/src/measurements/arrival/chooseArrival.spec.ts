@@ -1,0 +1,75 @@
+import { chooseArrival, type ArrivalEvidence } from './chooseArrival';
+
+const evidence = (
+  change: Partial<ArrivalEvidence> = {},
+  peaks: [number, number][] = [[5, 0.3]],
+): ArrivalEvidence => ({
+  hits: 8,
+  overheadSounds: true,
+  first: { medianMs: 1.6, iqrMs: 0.1, hits: 8 },
+  phase: {
+    peaks: () => peaks.map(([lagMs, height]) => ({ lagMs, height })),
+    lagsPerHit: (lagMs) => [lagMs, lagMs, lagMs],
+  },
+  ...change,
+});
+
+describe('the choice of an arrival', () => {
+  it('is the first arrivals where no peak is high, as on real kits', () => {
+    expect(chooseArrival(evidence())).toMatchObject({
+      arrivalMs: 1.6,
+      arrivalIqrMs: 0.1,
+      hitsUsed: 8,
+      reason: null,
+    });
+  });
+
+  it('is surer where a peak agrees', () => {
+    const alone = chooseArrival(evidence()).confidence;
+    expect(chooseArrival(evidence({}, [[1.7, -0.3]])).confidence).toBeGreaterThan(alone);
+    expect(alone).toBeGreaterThan(0.5);
+  });
+
+  it('is a high peak, also where a hat came first', () => {
+    expect(chooseArrival(evidence({}, [[3, 0.8]])).arrivalMs).toBe(3);
+  });
+
+  it('takes of two peaks nearly as high the one near the first arrivals', () => {
+    expect(
+      chooseArrival(
+        evidence({}, [
+          [6.5, 0.8],
+          [1.5, 0.75],
+        ]),
+      ).arrivalMs,
+    ).toBe(1.5);
+    expect(
+      chooseArrival(
+        evidence({}, [
+          [2.5, 0.8],
+          [1.5, 0.6],
+        ]),
+      ).arrivalMs,
+    ).toBe(2.5);
+  });
+
+  it('is null with a reason rather than a wild number', () => {
+    const reason = (change: Partial<ArrivalEvidence>, peaks?: [number, number][]) => {
+      const { arrivalMs, confidence, reason: why } = chooseArrival(evidence(change, peaks));
+      expect([arrivalMs, confidence]).toEqual([null, 0]);
+      return why;
+    };
+    const none = { medianMs: null, iqrMs: null, hits: 0 };
+    expect(reason({ hits: 0, first: none })).toBe('no-kick-hits');
+    expect(reason({ overheadSounds: false, first: none })).toBe('overhead-silent');
+    expect(reason({ first: none })).toBe('too-few-hits');
+    expect(reason({ first: { medianMs: 3, iqrMs: 1.2, hits: 8 } })).toBe('hits-disagree');
+    expect(reason({ first: { medianMs: 9, iqrMs: 0.1, hits: 8 } }, [[2, 0.8]])).toBe('methods-disagree');
+  });
+
+  it('is not confident on one hit', () => {
+    const one = chooseArrival(evidence({ hits: 1, first: { medianMs: 1.6, iqrMs: null, hits: 1 } }));
+    expect(one.arrivalMs).toBe(1.6);
+    expect(one.confidence).toBeLessThan(0.5);
+  });
+});
