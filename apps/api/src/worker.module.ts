@@ -2,6 +2,7 @@ import { DynamicModule, Module } from '@nestjs/common';
 import { Config } from './config/config';
 import { ConfigModule } from './config/config.module';
 import { databaseModule } from './database/database.module';
+import { HousekeepingService } from './housekeeping/housekeeping.service';
 import { loggerModule } from './logging/logger.module';
 import { MeasurePool } from './measuring/measure-pool';
 import { MeasureQueue } from './measuring/measure-queue';
@@ -27,6 +28,7 @@ export class WorkerModule {
         TakeFetcher,
         MeasuringRuns,
         MeasuringWorker,
+        HousekeepingService,
       ],
     };
   }

@@ -5,17 +5,17 @@ import {
   reportResponse,
   TakeResponse,
 } from '@thudline/contracts';
-import { decodePairSpectrum, encodeWav, takeSummary } from '@thudline/dsp';
+import { bytesSource, decodePairSpectrum, encodeWav, measureTake, openWav, takeSummary } from '@thudline/dsp';
 import { getScenario, synthesiseTake } from '@thudline/fixtures';
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Measurement } from '../src/measuring/entities/measurement.entity';
-import { MeasurementClaims } from '../src/measuring/measurement-claims';
+import { Measured, MeasurementClaims } from '../src/measuring/measurement-claims';
 import { MeasureQueue } from '../src/measuring/measure-queue';
 import { MeasurementSweep } from '../src/measuring/measurement-sweep';
 import { Report } from '../src/reports/entities/report.entity';
 import { TakeFile } from '../src/takes/entities/take-file.entity';
 import { joined, Person } from './support/person';
-import { monoTracks, UploadFile, wav } from './support/recordings';
+import { monoTracks, shortTake, UploadFile, wav } from './support/recordings';
 import { startTestApp, TestApp } from './support/test-app';
 import { until } from './support/until';
 import { startWorker, WorkerProcess } from './support/worker-process';
@@ -37,6 +37,17 @@ function repeated(samples: Float32Array, times: number): Float32Array {
   const long = new Float32Array(samples.length * times);
   for (let i = 0; i < times; i++) long.set(samples, i * samples.length);
   return long;
+}
+
+/** What a worker would find in the short take: hardly anything, but whole facts. */
+async function measuredTones(): Promise<Measured> {
+  const tracks = await Promise.all(
+    shortTake().files.map(async ({ bytes }, index) => ({
+      role: monoTracks[index].role,
+      source: (await openWav(bytesSource(bytes))).track(0),
+    })),
+  );
+  return { facts: (await measureTake({ tracks })).facts, spectra: [null] };
 }
 
 const groove = { files: filesOf([kick, overhead]), tracks: monoTracks };
@@ -232,7 +243,20 @@ describe('measuring', () => {
       expect(second?.attempt).toBe(2);
       expect(await parts().claims.beat(claim, 'hits', 0.5)).toBe(false);
       await parts().claims.fail(claim, 'Too late.');
+      expect(await parts().claims.finish(claim, await measuredTones())).toBe(false);
+      expect(await reportsOf(take)).toBe(0);
       expect(await measurementOf(take)).toMatchObject({ state: 'running', attempt: 2, reason: null });
+    });
+
+    it('writes one report, however often it finishes', async () => {
+      const { take, claim } = await claimed();
+      const measured = await measuredTones();
+      const finish = () => parts().claims.finish(claim, measured);
+      expect((await Promise.all([finish(), finish(), finish()])).filter(Boolean)).toHaveLength(1);
+      expect(await reportsOf(take)).toBe(1);
+      const report = await test.em().findOneOrFail(Report, { take: take.id });
+      expect((await juno.get(paths.take(take.id))).body).toMatchObject({ hasReport: true });
+      expect(report.verdict).toBe('cannot-tell');
     });
 
     it('fails after the third attempt that went silent', async () => {

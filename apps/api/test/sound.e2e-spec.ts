@@ -133,6 +133,11 @@ describe('the sound of a take', () => {
       expect(response.headers['content-type']).toMatch(/^audio\/(x-)?wav/);
     });
 
+    it('tells its length without being read', async () => {
+      const response = await juno.agent.head(paths.listen(take.id)).expect(200);
+      expect(response.headers['content-length']).toBe(String((await expected()).length));
+    });
+
     it('gives a range as it lies in the whole', async () => {
       const whole = await expected();
       for (const [range, start, end] of [

@@ -21,5 +21,6 @@ export function documentApi(app: NestExpressApplication): void {
     jsonDocumentUrl: `${paths.docs}/openapi.json`,
     raw: ['json'],
     customSiteTitle: 'Thudline API',
+    customCss: '.topbar { display: none }',
   });
 }

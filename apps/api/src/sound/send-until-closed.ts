@@ -2,8 +2,12 @@ import { Readable } from 'node:stream';
 import { pipeline } from 'node:stream/promises';
 import { Response } from 'express';
 
-/** Streams an answer. A listener who goes away in the middle is no error: players do it at every jump. */
+/** Streams an answer; for HEAD only its headers. A listener who goes away in the middle is no error: players do it at every jump. */
 export async function sendUntilClosed(bytes: AsyncIterable<Uint8Array>, response: Response): Promise<void> {
+  if (response.req.method === 'HEAD') {
+    response.end();
+    return;
+  }
   try {
     await pipeline(Readable.from(bytes), response);
   } catch (error) {

@@ -22,6 +22,7 @@ export function helmetOptions(isHttps: boolean): HelmetOptions {
       },
     },
     strictTransportSecurity: isHttps,
+    xFrameOptions: { action: 'deny' },
     referrerPolicy: { policy: 'same-origin' },
   };
 }
