@@ -1,4 +1,4 @@
-import { inverseReal } from '../spectrum/inverseReal';
+import { createInverseReal } from '../spectrum/inverseReal';
 import { createRealTransform, powerOfTwoFrom } from '../spectrum/realSpectrum';
 
 /** One place where the two microphones' sound lines up. */
@@ -37,6 +37,8 @@ const NEAR_MS = 2;
 export function createPhaseTransform(sampleRateHz: number): PhaseTransform {
   const stretch = ((PHASE_STRETCH_MS.before + PHASE_STRETCH_MS.after) / 1000) * sampleRateHz;
   const transform = createRealTransform(powerOfTwoFrom(2 * stretch));
+  const fineSize = transform.size * FINER;
+  const inverse = createInverseReal(fineSize);
   const binHz = sampleRateHz / transform.size;
   const bins = Math.min(transform.size / 2, Math.ceil(HIGH_HZ / binHz));
   const first = Math.ceil(LOW_HZ / binHz);
@@ -56,8 +58,10 @@ export function createPhaseTransform(sampleRateHz: number): PhaseTransform {
       weighted.im[i] = (coherence * im[i]) / size;
       weights += coherence;
     }
-    const size = transform.size * FINER;
-    return inverseReal(weighted, size).map((value) => (weights > 0 ? (value * size) / (2 * weights) : 0));
+    const correlated = inverse(weighted);
+    const scale = weights > 0 ? fineSize / (2 * weights) : 0;
+    for (let i = 0; i < correlated.length; i += 1) correlated[i] *= scale;
+    return correlated;
   };
   const maxima = (values: Float64Array, fromMs: number, toMs: number): PhasePeak[] =>
     peaksOf(values, { fromMs, toMs, stepMs: 1000 / (sampleRateHz * FINER) });

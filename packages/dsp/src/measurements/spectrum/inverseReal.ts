@@ -2,24 +2,27 @@ import FFT from 'fft.js';
 import type { RealSpectrum } from './realSpectrum';
 
 /**
- * The real signal that has this half spectrum, with 1/N scaling.
+ * A backward transform of fixed size, 1/N scaled, that reuses its tables.
  *
- * @param spectrum - bins 0 … M of a spectrum of `size` points, M < size/2; what is missing counts as zero, so a larger
- *   `size` interpolates between samples
  * @param size - a power of two
+ * @returns a function from bins 0 … M, M < size/2, to the real signal that has them; what is missing counts as zero, so a
+ *   larger `size` interpolates between samples. Results are new arrays.
  */
-export function inverseReal({ re, im }: RealSpectrum, size: number): Float64Array {
+export function createInverseReal(size: number): (spectrum: RealSpectrum) => Float64Array {
   const fft = new FFT(size);
   const bins = new Float64Array(2 * size);
-  for (let i = 0; i < re.length; i += 1) {
-    bins[2 * i] = re[i];
-    bins[2 * i + 1] = im[i];
-    if (i > 0) {
-      bins[2 * (size - i)] = re[i];
-      bins[2 * (size - i) + 1] = -im[i];
-    }
-  }
   const output = new Float64Array(2 * size);
-  fft.inverseTransform(output, bins);
-  return Float64Array.from({ length: size }, (_, i) => output[2 * i]);
+  return ({ re, im }) => {
+    bins.fill(0);
+    bins[0] = re[0];
+    // Twice the lower half instead of both halves: the real part of the result is the same.
+    for (let i = 1; i < re.length; i += 1) {
+      bins[2 * i] = 2 * re[i];
+      bins[2 * i + 1] = 2 * im[i];
+    }
+    fft.inverseTransform(output, bins);
+    const samples = new Float64Array(size);
+    for (let i = 0; i < size; i += 1) samples[i] = output[2 * i];
+    return samples;
+  };
 }
