@@ -34,6 +34,8 @@ const node = (displayName, testMatch) => ({
 });
 
 export default {
+  /** Fails what hangs, and nothing else: a busy machine takes several times as long as a free one. */
+  testTimeout: 60_000,
   projects: [
     node('packages', ['<rootDir>/packages/*/src/**/*.spec.ts', '<rootDir>/fixtures/src/**/*.spec.ts']),
     node('local-services', ['<rootDir>/apps/local-services/src/**/*.spec.ts']),
