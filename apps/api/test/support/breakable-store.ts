@@ -28,9 +28,15 @@ export async function startBreakableStore(): Promise<BreakableStore> {
     }
     client.on('data', (chunk) => {
       budgetBytes -= chunk.length;
-      if (budgetBytes < 0) client.destroy();
+      if (budgetBytes < 0) {
+        client.destroy();
+      } else if (!store.write(chunk)) {
+        client.pause();
+        store.once('drain', () => client.resume());
+      }
     });
-    client.pipe(store).pipe(client);
+    client.on('end', () => store.end());
+    store.pipe(client);
   });
   await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
   return {
