@@ -23,7 +23,12 @@ export function headline(facts: Facts): HeadlineWords {
     case 'arrived':
       return { strong: 'The take is kept.', rest: 'Its sheet opens now.' };
     case 'stopped':
-      return { strong: 'Stopped.', rest: 'Nothing was kept. Send it again whenever you like.' };
+      return {
+        strong: 'Stopped.',
+        rest: facts.sending.allSent
+          ? 'The files had arrived already: look under Takes, or send them again.'
+          : 'Nothing was kept. Send it again whenever you like.',
+      };
     case 'lost':
       return { strong: 'The connection was lost.', rest: 'Send it again: a take is never kept twice.' };
     case 'refused':

@@ -121,6 +121,14 @@ describe('sending', () => {
     const late: UploadAction = { type: 'progressed', report: { atMs: 5, loadedBytes: 1, totalBytes: 2 } };
     expect(after(...pair, start, { type: 'stopped' }, late).sending.phase).toBe('stopped');
   });
+  it('knows whether a stop came too late', () => {
+    const sent = (loadedBytes: number): UploadAction => ({
+      type: 'progressed',
+      report: { atMs: 5, loadedBytes, totalBytes: 20 },
+    });
+    expect(after(...pair, start, sent(19), { type: 'stopped' }).sending).toMatchObject({ allSent: false });
+    expect(after(...pair, start, sent(20), { type: 'stopped' }).sending).toMatchObject({ allSent: true });
+  });
   it('puts a refusal beside the file it speaks of', () => {
     const state = after(...pair, start, {
       type: 'refused',

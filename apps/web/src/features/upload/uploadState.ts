@@ -7,7 +7,8 @@ export type Sending =
   | { phase: 'choosing' }
   | { phase: 'sending'; progress: UploadProgress }
   | { phase: 'arrived'; takeId: string }
-  | { phase: 'stopped' }
+  /** `allSent`: the server had every byte by then and may have kept the take. */
+  | { phase: 'stopped'; allSent: boolean }
   /** The connection broke: the same upload can be tried again. */
   | { phase: 'lost' }
   /** The server said no to the take as a whole; what it says of one file stands beside that file. */
@@ -98,12 +99,18 @@ function sendingReducer(state: UploadState, action: SendingAction): UploadState 
     case 'arrived':
       return { ...state, sending: { phase: 'arrived', takeId: action.takeId } };
     case 'stopped':
-      return { ...state, sending: { phase: 'stopped' } };
+      return { ...state, sending: { phase: 'stopped', allSent: everythingSent(state.sending) } };
     case 'lost':
       return { ...state, sending: { phase: 'lost' } };
     case 'refused':
       return refused(state, action);
   }
+}
+
+function everythingSent(sending: Sending): boolean {
+  if (sending.phase !== 'sending') return false;
+  const { loadedBytes, totalBytes } = sending.progress;
+  return totalBytes > 0 && loadedBytes >= totalBytes;
 }
 
 /** A change while files are on their way leaves that upload alone: it can only concern files that aren't part of it. */

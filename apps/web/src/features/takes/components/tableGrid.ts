@@ -6,7 +6,8 @@ export const rowGrid = {
   display: 'grid',
   gridTemplateColumns: {
     base: 'minmax(0, 1.8fr) minmax(0, 1fr)',
-    lg: 'minmax(150px, 270px) minmax(190px, 1fr) 226px 128px 72px',
+    lg: 'minmax(140px, 1fr) minmax(190px, 1.4fr) 190px 112px 64px',
+    xl: '270px minmax(0, 1fr) 226px 128px 72px',
   },
   gridTemplateAreas: {
     base: '"take action" "says says" "level low"',

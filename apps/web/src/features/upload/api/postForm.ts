@@ -13,6 +13,8 @@ interface PostForm {
   onProgress: (progress: { loadedBytes: number; totalBytes: number }) => void;
 }
 
+const stopped = () => new DOMException('The upload was stopped.', 'AbortError');
+
 /**
  * Sends a form and tells how much has left; `fetch` can't tell that, so this is the one XMLHttpRequest.
  *
@@ -20,6 +22,7 @@ interface PostForm {
  * @throws {DOMException} `AbortError` when stopped
  */
 export function postForm({ path, form, signal, onProgress }: PostForm): Promise<FormAnswer> {
+  if (signal.aborted) return Promise.reject(stopped());
   return new Promise((resolve, reject) => {
     const request = new XMLHttpRequest();
     request.open('POST', path);
@@ -27,7 +30,7 @@ export function postForm({ path, form, signal, onProgress }: PostForm): Promise<
     request.upload.onprogress = (event) => onProgress({ loadedBytes: event.loaded, totalBytes: event.total });
     request.onload = () => resolve({ status: request.status, text: request.responseText });
     request.onerror = () => reject(new ApiError('offline', 'The connection was lost while sending.'));
-    request.onabort = () => reject(new DOMException('The upload was stopped.', 'AbortError'));
+    request.onabort = () => reject(stopped());
     signal.addEventListener('abort', () => request.abort(), { once: true });
     request.send(form);
   });

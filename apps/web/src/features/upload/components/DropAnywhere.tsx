@@ -38,6 +38,7 @@ export function DropAnywhere({
         zIndex={20}
         display={dragging ? 'grid' : 'none'}
         placeItems="center"
+        alignContent="center"
         bg="sheet"
         opacity={0.94}
       >

@@ -1,12 +1,8 @@
-import { updateTakeRequest } from '@thudline/contracts';
-import { useEffect, useReducer, useRef, useState, type Dispatch } from 'react';
+import { useEffect, useReducer, useRef, type Dispatch } from 'react';
 import { useNavigate } from 'react-router-dom';
-import { ApiError } from '../../../lib/apiClient';
-import { arrangement, canSend, type ChosenRole } from '../arrangement';
+import { arrangement, type ChosenRole } from '../arrangement';
 import { takeHandedOverFiles } from '../droppedFiles';
-import { whyNotYet } from '../headline';
 import { readPickedFile } from '../readPickedFile';
-import { takeRequest } from '../takeBody';
 import { newUploadKey } from '../uploadKey';
 import {
   emptyUpload,
@@ -16,44 +12,20 @@ import {
   type UploadState,
 } from '../uploadState';
 import { useLeaveGuard } from './useLeaveGuard';
-import { useTakeUpload } from './useTakeUpload';
+import { useSending } from './useSending';
 
 /** The upload page: what was dropped, what is written about it, and sending it. */
 export function useNewTake() {
   const [state, dispatch] = useReducer(uploadReducer, emptyUpload, withHandedOverFiles);
-  const [notYet, setNotYet] = useState('');
-  const { send, stop } = useTakeUpload();
   const leaving = useLeaveGuard(state.sending.phase === 'sending');
   useOpenSheet(state.sending);
-  const arranged = arrangement(state.files, state.chosen);
-  const latest = useLatest(state);
-
   useReading(state.files, dispatch);
+  const arranged = arrangement(state.files, state.chosen);
+  const { notYet, upload, stop, forget } = useSending(state, arranged, dispatch);
 
   const pick = (files: readonly File[], how: 'added' | 'replaced' = 'added') => {
-    setNotYet('');
+    forget();
     if (files.length > 0) dispatch({ type: how, files: files.map(withId) });
-  };
-
-  const upload = async () => {
-    if (state.sending.phase === 'sending') return;
-    setNotYet('');
-    if (!canSend(arranged)) return setNotYet(whyNotYet(arranged));
-    const words = updateTakeRequest.safeParse({ title: state.title, note: state.note });
-    if (!words.success) return setNotYet(words.error.issues[0].message);
-    const newKey = newUploadKey();
-    dispatch({ type: 'sendStarted', newKey, atMs: Date.now() });
-    try {
-      const take = await send({
-        request: takeRequest({ ...state, uploadKey: state.uploadKey ?? newKey }, arranged, Date.now()),
-        files: arranged.used.map(({ file }) => file),
-        onProgress: (sent) => dispatch({ type: 'progressed', report: { ...sent, atMs: Date.now() } }),
-        wordsNow: () => ({ title: latest.current.title, note: latest.current.note }),
-      });
-      dispatch({ type: 'arrived', takeId: take.id });
-    } catch (error) {
-      dispatch(outcome(error));
-    }
   };
 
   return {
@@ -100,20 +72,4 @@ function useOpenSheet(sending: Sending) {
   useEffect(() => {
     if (takeId) void navigate(`/takes/${takeId}`);
   }, [takeId, navigate]);
-}
-
-function useLatest(state: UploadState) {
-  const latest = useRef(state);
-  useEffect(() => {
-    latest.current = state;
-  });
-  return latest;
-}
-
-function outcome(error: unknown): UploadAction {
-  if (error instanceof DOMException && error.name === 'AbortError') return { type: 'stopped' };
-  if (!(error instanceof ApiError))
-    return { type: 'refused', message: 'That did not work. Try again in a moment.' };
-  if (error.code === 'offline') return { type: 'lost' };
-  return { type: 'refused', message: error.message, details: error.details };
 }
