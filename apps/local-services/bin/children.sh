@@ -50,6 +50,7 @@ on_exit() {
   set +e
   ((${#child_pid[@]} == 0)) || say "Stopping."
   stop_children
+  discard_half_made_cluster
   remove_throwaway
   exit "$code"
 }

@@ -47,7 +47,8 @@ make_cluster() {
   local cluster=$1 making=$1.making
   shift
   ! as_cluster_user test -f "$cluster/PG_VERSION" || return 0
-  as_cluster_user rm -rf -- "$making"
+  half_made_cluster=$making
+  discard_half_made_cluster
   as_cluster_user mkdir -m 0700 -- "$making"
   printf '%s\n' "$POSTGRES_ADMIN_PASSWORD" | as_cluster_user sh -c 'umask 077; cat >"$1"' - "$making.password"
   local made=yes
@@ -58,6 +59,12 @@ make_cluster() {
   [[ $made == yes ]] || fail_with_log "$log_dir/initdb.log" "The database could not be made."
   printf '%s\n' "${CLUSTER_ID:-throwaway}" | as_cluster_user sh -c 'cat >"$1"' - "$making/thudline-id"
   as_cluster_user mv -- "$making" "$cluster"
+  half_made_cluster=
+}
+
+# Its password file goes first; this also runs when the script is interrupted.
+discard_half_made_cluster() {
+  [[ -z ${half_made_cluster:-} ]] || as_cluster_user rm -rf -- "$half_made_cluster.password" "$half_made_cluster"
 }
 
 # A server left by a script that was killed outright is on its way out; two on one folder would not start.
