@@ -20,7 +20,8 @@ fail_with_log() {
 }
 
 make_data_dir() {
-  (umask 077 && mkdir -p "$data" "$log_dir") || fail "The folder $data can't be made; is the checkout writable for you?"
+  (umask 077 && mkdir -p "$data" "$log_dir" 2>/dev/null) ||
+    fail "The folder $data can't be made; is the checkout writable for you?"
   [[ -w $data && -w $log_dir ]] || fail "The folder $data belongs to somebody else; run this as its owner."
 }
 

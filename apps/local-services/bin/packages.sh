@@ -1,14 +1,6 @@
 # Installs what is missing, from Debian and npm only, and builds.
 
-as_root() {
-  if ((EUID == 0)); then
-    "$@"
-  elif command -v sudo >/dev/null; then
-    sudo "$@"
-  else
-    fail "Something has to be installed ($wanted_packages), and you are neither root nor have sudo; ask an administrator to install it."
-  fi
-}
+as_root() { if ((EUID == 0)); then "$@"; else sudo "$@"; fi; }
 
 apt_get() {
   as_root env DEBIAN_FRONTEND=noninteractive apt-get -y --no-install-recommends -o DPkg::Lock::Timeout=120 "$@" \
@@ -17,13 +9,15 @@ apt_get() {
 
 # Each argument is `package:file that shows it is there`; the file may be a pattern.
 install_missing_packages() {
-  local missing=() pair
+  local missing=() pair wanted_packages
   for pair in "$@"; do
     compgen -G "${pair#*:}" >/dev/null || missing+=("${pair%%:*}")
   done
   ((${#missing[@]})) || return 0
   wanted_packages=${missing[*]}
   command -v apt-get >/dev/null || fail "Missing: $wanted_packages. Install it; without apt-get this script can't."
+  ((EUID == 0)) || command -v sudo >/dev/null ||
+    fail "Missing: $wanted_packages. You are not root and have no sudo; ask an administrator to install it."
   say "Installing $wanted_packages. This takes a minute or two."
   [[ " $wanted_packages " != *' postgresql '* ]] || forbid_main_cluster
   apt_get update || fail_with_log "$log_dir/apt.log" "The package lists could not be fetched; is the network there?"
