@@ -1,6 +1,5 @@
 import { createHash, randomUUID } from 'node:crypto';
 import { readdir } from 'node:fs/promises';
-import { AddressInfo, connect } from 'node:net';
 import { paths, takeResponse, TakeResponse } from '@thudline/contracts';
 import { badFiles } from '@thudline/fixtures';
 import { Measurement } from '../src/measuring/entities/measurement.entity';
@@ -8,9 +7,9 @@ import { Take } from '../src/takes/entities/take.entity';
 import { TakeFile } from '../src/takes/entities/take-file.entity';
 import { BreakableStore, startBreakableStore } from './support/breakable-store';
 import { Browser, joined, origin, Person } from './support/person';
+import { brokenUpload, cookieOf, multipart, rawRequest } from './support/raw-upload';
 import { monoTracks, shortTake, stereoTracks, tone, wav } from './support/recordings';
 import { startTestApp, TestApp } from './support/test-app';
-import { until } from './support/until';
 
 const sha256 = (bytes: Uint8Array) => createHash('sha256').update(bytes).digest('hex');
 
@@ -312,59 +311,3 @@ describe('uploading a take', () => {
     expect(await readdir(test.config.scratchDir)).toEqual([]);
   });
 });
-
-async function cookieOf(test: TestApp): Promise<string> {
-  const person = await joined(test);
-  const response = await person.post(paths.refresh);
-  const lines = response.headers['set-cookie'] as unknown as string[];
-  return lines.map((line) => line.split(';')[0]).join('; ');
-}
-
-/** Sends a request's head and no body, and gives what comes back. */
-async function rawRequest({ server }: TestApp, head: string[]): Promise<string> {
-  const socket = connect((server.address() as AddressInfo).port, '127.0.0.1');
-  socket.write(`${head.join('\r\n')}\r\n\r\n`);
-  const answer = await new Promise<string>((resolve, reject) => {
-    let text = '';
-    socket.on('error', reject);
-    socket.on('data', (chunk: Buffer) => {
-      text += chunk.toString();
-      if (text.includes('}')) resolve(text);
-    });
-  });
-  socket.destroy();
-  return answer;
-}
-
-function multipart(bytes: Uint8Array): Buffer {
-  const field = (name: string, value: string) =>
-    `--x\r\nContent-Disposition: form-data; name="${name}"\r\n\r\n${value}\r\n`;
-  const head =
-    field('uploadKey', randomUUID()) +
-    field('tracks', JSON.stringify(monoTracks)) +
-    '--x\r\nContent-Disposition: form-data; name="files"; filename="kick.wav"\r\nContent-Type: audio/wav\r\n\r\n';
-  return Buffer.concat([Buffer.from(head), bytes, Buffer.from('\r\n--x--\r\n')]);
-}
-
-/** Sends part of a body, waits until the server is writing it to scratch, then cuts the line. */
-async function brokenUpload(test: TestApp, body: Buffer, sentBytes: number): Promise<void> {
-  const socket = connect((test.server.address() as AddressInfo).port, '127.0.0.1');
-  const cookie = await cookieOf(test);
-  socket.write(
-    [
-      `POST ${paths.takes} HTTP/1.1`,
-      'Host: thudline.test',
-      `Origin: ${origin}`,
-      'X-Thudline: 1',
-      `Cookie: ${cookie}`,
-      'Content-Type: multipart/form-data; boundary=x',
-      `Content-Length: ${body.length}`,
-      '',
-      '',
-    ].join('\r\n'),
-  );
-  socket.write(body.subarray(0, sentBytes));
-  await until(async () => (await readdir(test.config.scratchDir)).length === 1);
-  socket.destroy();
-  await until(async () => (await readdir(test.config.scratchDir)).length === 0);
-}

@@ -7,7 +7,7 @@ import { CONFIG } from '../config/config.module';
 /** What belongs to nobody any more: longer than any upload or measurement takes (common practice, no source). */
 const abandonedAfterMs = 6 * 60 * 60 * 1000;
 
-/** Short-lived files of one upload or one measurement. API and worker may share the folder. */
+/** Short-lived files of one upload or one measurement. API and worker of one machine may share the folder. */
 @Injectable()
 export class ScratchService {
   private readonly root: string;
