@@ -20,7 +20,7 @@ export function arrivalFinding(figures: ReportFigures, reader: Pick<Reader, 'len
     return {
       topic: 'arrival',
       status: 'watch',
-      sentence: `The overhead seems to hear the kick ${ms} ms ${when}, ${where}, but few hits show it; record eight hard kicks.`,
+      sentence: `The overhead seems to hear the kick ${ms} ms ${when}, ${where}, but few hits show it; record eight kicks.`,
       why: `It was seen clearly in ${counted(hitsUsed, 'hit')}.`,
       next: 'Record eight hard kicks with nothing else.',
     };
