@@ -1,6 +1,7 @@
 import { expect, test, type Page } from '@playwright/test';
 import { badFiles, getScenario, takeFiles } from '@thudline/fixtures';
 import { expectAccessibleInBothThemes } from './harness/accessibility';
+import { expectFitsPhone } from './harness/phone';
 
 const scenario = getScenario('hot-kick-opposite-overhead');
 const bad = badFiles().find((file) => file.answer === 'refused')!;
@@ -20,24 +21,29 @@ test('join, add a take, read its sheet, flip, find it in the list, sign out', as
   await test.step('after signing out the sheet is closed', () => signOut(page));
 });
 
+async function expectReadable(page: Page, name: string): Promise<void> {
+  await expectAccessibleInBothThemes(page, name);
+  await expectFitsPhone(page, name);
+}
+
 async function joinAsNewPlayer(page: Page): Promise<void> {
   await page.goto('/');
   await expect(page.getByRole('link', { name: 'Join' }).first()).toBeVisible();
-  await expectAccessibleInBothThemes(page, 'first page');
+  await expectReadable(page, 'first page');
   await page.goto('/join');
-  await expectAccessibleInBothThemes(page, 'join');
+  await expectReadable(page, 'join');
   await page.getByLabel('Name').fill('Mika');
   await page.getByLabel('E-mail').fill('mika@example.org');
   await page.getByLabel('Password', { exact: true }).fill('a-quiet-kit-7');
   await page.getByRole('button', { name: 'Join' }).click();
   await expect(page).toHaveURL(/\/takes/);
   await expect(page.getByRole('heading', { name: /Your first take/ })).toBeVisible();
-  await expectAccessibleInBothThemes(page, 'no takes yet');
+  await expectReadable(page, 'no takes yet');
 }
 
 async function meetRefusal(page: Page): Promise<void> {
   await page.goto('/takes/new');
-  await expectAccessibleInBothThemes(page, 'new take, nothing chosen');
+  await expectReadable(page, 'new take, nothing chosen');
   await page.getByLabel('WAV files').setInputFiles([wav(bad.name, bad.bytes)]);
   await expect(page.getByText(bad.name).first()).toBeVisible();
   await expect(page.getByRole('alert').first()).toBeVisible();
@@ -54,7 +60,7 @@ async function addTake(page: Page): Promise<void> {
     page.getByRole('group', { name: 'Microphone of oh.wav' }).getByLabel('overhead'),
   ).toBeChecked();
   await page.getByLabel('Title').fill(scenario.title);
-  await expectAccessibleInBothThemes(page, 'new take, two files');
+  await expectReadable(page, 'new take, two files');
   await page.getByRole('button', { name: 'Measure this take' }).click();
   await expect(page).toHaveURL(/\/takes\/[0-9a-f-]{36}$/);
 }
@@ -65,7 +71,7 @@ async function readSheet(page: Page): Promise<void> {
   await expect(line).toBeVisible();
   await expect(page.getByRole('heading', { name: /^Adding up: flip/ })).toBeVisible();
   await expect(page.getByRole('img', { name: /^Low end of the two added/ })).toBeVisible();
-  await expectAccessibleInBothThemes(page, 'sheet');
+  await expectReadable(page, 'sheet');
   const action = page.getByRole('checkbox').first();
   await action.check();
   await page.reload();
@@ -89,7 +95,7 @@ async function findInList(page: Page): Promise<void> {
   await page.getByRole('navigation', { name: 'Places' }).getByRole('link', { name: 'Takes' }).click();
   const row = page.getByRole('table', { name: 'Takes' }).getByRole('row', { name: scenario.title });
   await expect(row).toContainText('Flip the overhead');
-  await expectAccessibleInBothThemes(page, 'takes');
+  await expectReadable(page, 'takes');
   await row.getByRole('link').click();
   await expect(page.getByRole('heading', { name: /^Adding up: flip/ })).toBeVisible();
 }
@@ -99,7 +105,7 @@ async function signOut(page: Page): Promise<void> {
   await page.getByRole('button', { name: 'Mika' }).click();
   await page.getByRole('button', { name: 'Sign out' }).click();
   await expect(page).toHaveURL(/\/sign-in/);
-  await expectAccessibleInBothThemes(page, 'sign in');
+  await expectReadable(page, 'sign in');
   await page.goto(sheetUrl);
   await expect(page).toHaveURL(/\/sign-in/);
 }
