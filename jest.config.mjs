@@ -27,6 +27,8 @@ const moduleNameMapper = {
 const node = (displayName, testMatch) => ({
   displayName,
   rootDir: import.meta.dirname,
+  /** Not in the temporary folder, which `npm test` throws away. */
+  cacheDirectory: '<rootDir>/node_modules/.cache/jest',
   testEnvironment: 'node',
   testMatch,
   moduleNameMapper,

@@ -16,8 +16,8 @@ test_thudline() {
 # The cluster's user makes one folder, so that it may enter; the rest lies in another, which is ours.
 make_throwaway() {
   remove_older_throwaways
-  throwaway_cluster=$(as_cluster_user mktemp -d "/tmp/thudline-test-$$.XXXXXX")
-  throwaway_files=$(mktemp -d "/tmp/thudline-test-$$.XXXXXX")
+  throwaway_cluster=$(as_cluster_user mktemp -d "/tmp/thudline-throwaway-$$.XXXXXX")
+  throwaway_files=$(mktemp -d "/tmp/thudline-throwaway-$$.XXXXXX")
   log_dir=$throwaway_files/log
   mkdir "$log_dir"
 }
@@ -25,9 +25,9 @@ make_throwaway() {
 # What a run that was killed outright left behind.
 remove_older_throwaways() {
   local folder pid
-  for folder in /tmp/thudline-test-*; do
+  for folder in /tmp/thudline-throwaway-*; do
     [[ -O $folder || $EUID == 0 ]] || continue
-    pid=${folder#/tmp/thudline-test-}
+    pid=${folder#/tmp/thudline-throwaway-}
     is_alive "${pid%%.*}" || rm -rf -- "$folder"
   done
 }
@@ -46,10 +46,10 @@ start_test_services() {
 # The API's tests clone databases through TEST_DATABASE_URL; the browser's have one application on one database.
 describe_test_environment() {
   describe_object_store
-  mkdir -p "$throwaway_files/scratch"
+  mkdir -p "$throwaway_files/scratch" "$throwaway_files/tmp"
   test_environment=(env "${object_store[@]}" TEST_DATABASE_URL="$(admin_database_url)"
     BROWSER_DATABASE_URL="$(database_url thudline_browser)" BROWSER_API_PORT="$API_PORT" JWT_SECRET="$JWT_SECRET"
-    SCRATCH_DIR="$throwaway_files/scratch" DEMO_PASSWORD="$DEMO_PASSWORD"
+    SCRATCH_DIR="$throwaway_files/scratch" TMPDIR="$throwaway_files/tmp" DEMO_PASSWORD="$DEMO_PASSWORD"
     TEST_RESULTS_DIR="${TEST_RESULTS_DIR:-$throwaway_files/results}")
 }
 

@@ -13,7 +13,7 @@ export function serveWebApp(app: NestExpressApplication, webDist: string): void 
   );
   app.use((request: Request, response: Response, next: NextFunction) => {
     if (!isPage(request)) return next();
-    response.set('Cache-Control', 'no-cache').sendFile(join(root, 'index.html'));
+    response.set('Cache-Control', 'no-cache').sendFile('index.html', { root });
   });
 }
 
