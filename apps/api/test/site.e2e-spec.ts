@@ -1,7 +1,7 @@
 import { mkdir, mkdtemp, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { healthResponse, paths } from '@thudline/contracts';
+import { appHeader, healthResponse, paths } from '@thudline/contracts';
 import request from 'supertest';
 import { BreakableStore, startBreakableStore } from './support/breakable-store';
 import { Browser } from './support/person';
@@ -53,6 +53,21 @@ describe('the site', () => {
       const body = response.body as { info: { title: string }; paths: Record<string, unknown> };
       expect(body.info.title).toBe('Thudline');
       expect(Object.keys(body.paths)).toContain('/api/takes/{id}/report');
+      expect(body.paths['/api/takes/{id}/report']).toMatchObject({
+        get: {
+          responses: {
+            default: { content: { 'application/json': { schema: { $ref: expect.any(String) as string } } } },
+          },
+        },
+      });
+    });
+
+    it('refers to nothing that is not in it', async () => {
+      const { text } = await get(`${paths.docs}/openapi.json`).expect(200);
+      const { components } = JSON.parse(text) as { components: { schemas: Record<string, unknown> } };
+      const named = [...text.matchAll(/"#\/components\/schemas\/([^"]+)"/g)].map(([, name]) => name);
+      expect(named).toContain('ErrorResponseDto');
+      expect(named.filter((name) => !(name in components.schemas))).toEqual([]);
     });
 
     it('is a page that works without inline script', async () => {
@@ -99,6 +114,29 @@ describe('the site', () => {
     it.each(['/api', '/api/nothing', '/api/takes/x/y/z'])('%s is 404 as JSON', async (path) => {
       const response = await get(path).expect(404);
       expect(response.body).toMatchObject({ code: 'not-found', message: expect.any(String) as string });
+    });
+  });
+
+  describe('behind https', () => {
+    const publicUrl = 'https://drums.thudline.test';
+    let secure: TestApp;
+
+    beforeAll(async () => {
+      secure = await startTestApp({ PUBLIC_URL: publicUrl });
+    });
+    afterAll(async () => secure?.close());
+
+    it('sends its cookies over https only, and asks browsers to stay there', async () => {
+      const response = await request(secure.server)
+        .post(paths.join)
+        .set(appHeader.name, appHeader.value)
+        .set('Origin', publicUrl)
+        .send({ name: 'Juno', email: 'juno@example.org', password: 'correct horse battery' })
+        .expect(201);
+      const cookies = response.headers['set-cookie'] as unknown as string[];
+      expect(cookies).toHaveLength(2);
+      for (const cookie of cookies) expect(cookie).toMatch(/; Secure/);
+      expect(response.headers['strict-transport-security']).toMatch(/max-age=\d+/);
     });
   });
 

@@ -1,7 +1,9 @@
 import { NestExpressApplication } from '@nestjs/platform-express';
 import { DocumentBuilder, OpenAPIObject, SwaggerModule } from '@nestjs/swagger';
-import { appHeader, paths } from '@thudline/contracts';
-import { cleanupOpenApiDoc } from 'nestjs-zod';
+import { appHeader, errorResponse, paths } from '@thudline/contracts';
+import { cleanupOpenApiDoc, createZodDto } from 'nestjs-zod';
+
+class ErrorResponseDto extends createZodDto(errorResponse) {}
 
 export function openApiDocument(app: NestExpressApplication): OpenAPIObject {
   const description =
@@ -12,8 +14,9 @@ export function openApiDocument(app: NestExpressApplication): OpenAPIObject {
     .setDescription(description)
     .setVersion('1')
     .addCookieAuth('thudline_access', { type: 'apiKey', in: 'cookie' }, 'access')
+    .addGlobalResponse({ status: 'default', description: 'What went wrong.', type: ErrorResponseDto })
     .build();
-  return cleanupOpenApiDoc(SwaggerModule.createDocument(app, builder));
+  return cleanupOpenApiDoc(SwaggerModule.createDocument(app, builder, { extraModels: [ErrorResponseDto] }));
 }
 
 export function documentApi(app: NestExpressApplication): void {

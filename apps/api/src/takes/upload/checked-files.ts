@@ -1,4 +1,4 @@
-import { TrackRole, UploadTrack } from '@thudline/contracts';
+import { UploadTrack } from '@thudline/contracts';
 import { openWav, WavError, WavFacts } from '@thudline/dsp';
 import { fileByteSource } from '@thudline/measure';
 import { AppError } from '../../errors/app-error';
@@ -47,20 +47,15 @@ function checkRates([first, second]: CheckedFile[]): void {
   );
 }
 
-const roleNames: Record<TrackRole, string> = { kick: 'kick', overhead: 'overhead' };
-
 function checkTrack({ role, fileIndex, channel }: UploadTrack, files: CheckedFile[]): void {
   const file = files[fileIndex];
   if (!file) {
-    throw new AppError(
-      'bad-request',
-      `The ${roleNames[role]} should be in file ${fileIndex + 1}, which was not sent.`,
-    );
+    throw new AppError('bad-request', `The ${role} should be in file ${fileIndex + 1}, which was not sent.`);
   }
   if (channel < file.facts.channels) return;
   throw new AppError(
     'bad-request',
-    `The ${roleNames[role]} should be channel ${channel + 1} of ${file.name}, which has ${file.facts.channels}.`,
+    `The ${role} should be channel ${channel + 1} of ${file.name}, which has ${file.facts.channels}.`,
     { details: { fileIndex, fileName: file.name } },
   );
 }
