@@ -1,4 +1,3 @@
-import { Box } from '@chakra-ui/react';
 import type { ReportResponse } from '@thudline/contracts';
 import { thirdOctaves } from '@thudline/dsp';
 import { hertz, signedDecibels } from '../../../lib/format';
@@ -24,13 +23,7 @@ export function AddingUpSection({ chosenHit, ...props }: AddingUpProps) {
       note={<Caveats report={report} />}
     >
       <Findings findings={findings} />
-      {report.pairSpectrum && chosenHit !== null ? (
-        <PairBench {...props} chosenHit={chosenHit} />
-      ) : (
-        <Box marginTop="12px" color="ink.muted">
-          {verdictFinding?.next}
-        </Box>
-      )}
+      {report.pairSpectrum && chosenHit !== null && <PairBench {...props} chosenHit={chosenHit} />}
     </SheetSection>
   );
 }

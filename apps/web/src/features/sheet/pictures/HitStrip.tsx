@@ -2,7 +2,7 @@ import { Box } from '@chakra-ui/react';
 import type { ReportResponse, Target } from '@thudline/contracts';
 import { useId, useMemo } from 'react';
 import { useWidth } from '../../../lib/useWidth';
-import { axisStartDbfs, ticksDbfs, type StripHit } from './hitStripLayout';
+import { axisStartDbfs, isClippedHit, ticksDbfs, type StripHit } from './hitStripLayout';
 import { HitStripAxis } from './HitStripAxis';
 import { HitStripRow } from './HitStripRow';
 
@@ -71,11 +71,15 @@ function stripScale(widthPx: number, startDbfs: number): StripScale {
 
 /** The kick line shows kick hits; the overhead's line every hit, since all of them share its preamp. */
 function stripHits(report: ReportResponse): { kick: StripHit[]; overhead: StripHit[] } {
-  const withLevel = (peakDbfs: number | null, index: number) =>
-    peakDbfs === null ? [] : [{ index, peakDbfs }];
+  const withLevel = (peakDbfs: number | null, index: number, role: 'kick' | 'overhead') =>
+    peakDbfs === null
+      ? []
+      : [{ index, peakDbfs, clipped: isClippedHit(peakDbfs, report[role].level === 'clipped') }];
   return {
-    kick: report.hits.flatMap((hit, i) => (hit.kind === 'kick' ? withLevel(hit.kickPeakDbfs, i) : [])),
-    overhead: report.hits.flatMap((hit, i) => withLevel(hit.overheadPeakDbfs, i)),
+    kick: report.hits.flatMap((hit, i) =>
+      hit.kind === 'kick' ? withLevel(hit.kickPeakDbfs, i, 'kick') : [],
+    ),
+    overhead: report.hits.flatMap((hit, i) => withLevel(hit.overheadPeakDbfs, i, 'overhead')),
   };
 }
 

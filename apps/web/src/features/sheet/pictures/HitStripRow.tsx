@@ -41,7 +41,6 @@ export function HitStripRow({ role, y, hits, track, target, widthPx, x, chosenHi
           {hits.length === 0 ? 'no hit' : plural(hits.length, 'hit')}
         </PictureText>
         <path d={`M${x.left} ${y}H${x.right}`} stroke={ink.rule} strokeWidth="1.2" />
-        {clipped && <ClipCrosses x={x(0) + 14} y={y} count={track.clipping.runCount} role={role} />}
         {dots.map((dot) => (
           <DotMark key={dot.index} dot={dot} y={y} role={role} chosen={dot.index === chosenHit} />
         ))}
@@ -75,6 +74,13 @@ function DotMark({
   const r = dot.hardest ? dotSizes.hardestRadiusPx : dotSizes.dotRadiusPx;
   const cy = y + dot.row * rowHeightPx;
   const ring = role === 'overhead';
+  if (dot.clipped)
+    return (
+      <>
+        {chosen && <circle cx={dot.x} cy={cy} r={9} fill="none" stroke={ink.ink} strokeWidth="1.6" />}
+        <path d={`M${dot.x - 4.6} ${cy - 4.6}l9.2 9.2m0-9.2l-9.2 9.2`} stroke={ink[role]} strokeWidth="2.6" />
+      </>
+    );
   return (
     <>
       {chosen && <circle cx={dot.x} cy={cy} r={r + 3.4} fill="none" stroke={ink.ink} strokeWidth="1.6" />}
@@ -86,27 +92,6 @@ function DotMark({
         stroke={ring ? ink.overhead : 'none'}
         strokeWidth={ring ? 1.9 : 0}
       />
-    </>
-  );
-}
-
-function ClipCrosses({
-  x,
-  y,
-  count,
-  role,
-}: {
-  x: number;
-  y: number;
-  count: number;
-  role: 'kick' | 'overhead';
-}) {
-  return (
-    <>
-      <path d={`M${x - 6} ${y - 6}l12 12m0-12l-12 12`} stroke={ink[role]} strokeWidth="2.8" />
-      <PictureText x={x} y={y + 22} bold fill={ink.fix} textAnchor="middle" {...halo}>
-        ×{count}
-      </PictureText>
     </>
   );
 }
@@ -213,8 +198,8 @@ function DotButtons({
           cursor="pointer"
           tabIndex={dot === tabStop ? 0 : -1}
           aria-pressed={dot.index === chosenHit}
-          aria-label={`${role} hit ${number(dot.peakDbfs)} dBFS`}
-          title={`${number(dot.peakDbfs)} dBFS`}
+          aria-label={`${role} hit ${dot.clipped ? 'clipped' : `${number(dot.peakDbfs)} dBFS`}`}
+          title={dot.clipped ? 'clipped' : `${number(dot.peakDbfs)} dBFS`}
           onKeyDown={(event) => onKeyDown(event, at)}
           onFocus={() => setFocused(dot.index)}
           onClick={() => onChoose(dot.index)}

@@ -1,4 +1,12 @@
-import { axisStartDbfs, changeLabel, dotSizes, rowHeightPx, stackDots, ticksDbfs } from './hitStripLayout';
+import {
+  axisStartDbfs,
+  changeLabel,
+  dotSizes,
+  isClippedHit,
+  rowHeightPx,
+  stackDots,
+  ticksDbfs,
+} from './hitStripLayout';
 
 const target = { lowDbfs: -12, highDbfs: -6, aimDbfs: -9 };
 const x = (dbfs: number) => 96 + ((dbfs + 24) / 24) * 574;
@@ -16,7 +24,7 @@ describe('the hit line', () => {
   });
 
   it('puts every dot at its own level and stacks those that would cover each other', () => {
-    const hits = [-6, -6.05, -6.1, -14, -2.7].map((peakDbfs, index) => ({ index, peakDbfs }));
+    const hits = [-6, -6.05, -6.1, -14, -2.7].map((peakDbfs, index) => ({ index, peakDbfs, clipped: false }));
     const dots = stackDots(hits, x);
     for (const dot of dots) expect(dot.x).toBe(x(dot.peakDbfs));
     for (const a of dots)
@@ -30,12 +38,28 @@ describe('the hit line', () => {
   it('makes the hardest hit the large dot, on the line', () => {
     const dots = stackDots(
       [
-        { index: 0, peakDbfs: -9 },
-        { index: 1, peakDbfs: -2.7 },
+        { index: 0, peakDbfs: -9, clipped: false },
+        { index: 1, peakDbfs: -2.7, clipped: false },
       ],
       x,
     );
     expect(dots.filter((dot) => dot.hardest)).toEqual([expect.objectContaining({ index: 1, row: 0 })]);
+  });
+
+  it('puts clipped hits beyond the edge, since their level is not known', () => {
+    const hits = [0, -0.05, -3].map((peakDbfs, index) => ({
+      index,
+      peakDbfs,
+      clipped: isClippedHit(peakDbfs, true),
+    }));
+    const dots = stackDots(hits, x);
+    expect(
+      dots
+        .filter((dot) => dot.x > x(0))
+        .map((dot) => dot.index)
+        .sort(),
+    ).toEqual([0, 1]);
+    expect(isClippedHit(-0.05, false)).toBe(false);
   });
 
   it('tells the change in half decibels, and at least for a clipped take', () => {

@@ -4,7 +4,18 @@ export interface StripHit {
   /** Index into the report's hits. */
   index: number;
   peakDbfs: number;
+  /** It reached full scale in a take that clipped: how loud it was can't be told. */
+  clipped: boolean;
 }
+
+/** In a clipped take, a hit this near to full scale is one of the clipped ones. */
+const clippedFromDbfs = -0.1;
+
+export const isClippedHit = (peakDbfs: number, trackClipped: boolean) =>
+  trackClipped && peakDbfs >= clippedFromDbfs;
+
+/** Clipped hits stand beyond the edge: their level is not known. */
+export const beyondEdgePx = 15;
 
 export interface Dot extends StripHit {
   x: number;
@@ -46,7 +57,7 @@ export function stackDots(hits: readonly StripHit[], xOf: (dbfs: number) => numb
     .map((hit, i) => ({ hit, hardest: i === hardestIndex }))
     .sort((a, b) => b.hit.peakDbfs - a.hit.peakDbfs);
   for (const { hit, hardest } of order) {
-    const x = xOf(hit.peakDbfs);
+    const x = hit.clipped ? xOf(0) + beyondEdgePx : xOf(hit.peakDbfs);
     placed.push({ ...hit, x, hardest, row: freeRow(placed, x, hardest) });
   }
   return placed;
