@@ -1,18 +1,15 @@
 import { ChildProcess, spawn } from 'node:child_process';
 import { once } from 'node:events';
 import { resolve } from 'node:path';
-import { requireFreshBuild } from './built';
 import { TestApp } from './test-app';
 import { testEnvironment } from './test-config';
-
-requireFreshBuild();
 
 export interface WorkerProcess {
   /** @returns how it ended */
   stop(signal: 'SIGTERM' | 'SIGKILL'): Promise<{ code: number | null; signal: string | null }>;
 }
 
-/** A worker of its own process, as in production but with a faster pulse, on the database of `test`. */
+/** A worker of its own process, as in production but with a faster pulse, on the database of `test`. It runs `dist`. */
 export function startWorker(test: TestApp, changed: NodeJS.ProcessEnv = {}): WorkerProcess {
   const env = testEnvironment(test.database.url, {
     S3_BUCKET: test.bucket.name,
