@@ -54,6 +54,23 @@ describe('joining', () => {
     expect(screen.getByLabelText('Name')).toHaveValue('Juno');
   });
 
+  it('puts what the server says of a field beside it, and never loses what it says of none', async () => {
+    let fields: Record<string, string> = { name: 'That name is taken by the house.' };
+    open({
+      [`POST ${paths.join}`]: () => ({
+        status: 400,
+        json: { code: 'bad-request', message: 'Something is missing.', details: { fields } },
+      }),
+    });
+    await join();
+    await waitFor(() =>
+      expect(screen.getByLabelText('Name')).toHaveAccessibleDescription(/taken by the house/),
+    );
+    fields = { shoeSize: 'Too large.' };
+    await userEvent.click(screen.getByRole('button', { name: 'Join' }));
+    expect(await screen.findByText('Something is missing.')).toBeInTheDocument();
+  });
+
   it('says above the button what belongs to no field', async () => {
     open({ [`POST ${paths.join}`]: refusal(429, 'too-many-requests', 'Too many tries. Wait a minute.') });
     await join();

@@ -1,4 +1,4 @@
-import { levelLabels, levelPercent, lowEndLabels, lowEndPercent } from './pictureScale';
+import { isBelowAxis, levelLabels, levelPercent, lowEndLabels, lowEndPercent } from './pictureScale';
 
 const target = (lowDbfs: number, highDbfs: number) => ({ lowDbfs, highDbfs, aimDbfs: lowDbfs });
 const texts = (lowDbfs: number, highDbfs: number) =>
@@ -11,6 +11,7 @@ describe('the level axis', () => {
   it('keeps what lies outside at its ends', () => {
     expect(levelPercent(-60)).toBe(levelPercent(-24));
     expect(levelPercent(3)).toBe(levelPercent(0));
+    expect([-24.1, -24, -12].map(isBelowAxis)).toEqual([true, false, false]);
   });
   it('names both ends and the target', () => {
     expect(texts(-12, -6)).toEqual(['−24', '−12', '−6', '0']);

@@ -18,6 +18,8 @@ function at(valueDb: number, { lowDb, highDb, startPercent, endPercent }: Scale)
 
 /** dBFS on the −24 … 0 axis; what lies outside stands at its end. */
 export const levelPercent = (levelDbfs: number) => at(levelDbfs, levelScale);
+/** Lower than the axis reaches: drawn at its end, pointing off. */
+export const isBelowAxis = (levelDbfs: number) => levelDbfs < levelScale.lowDb;
 /** Low end on the −3 … +3 dB axis. */
 export const lowEndPercent = (lowEndDb: number) => at(lowEndDb, lowEndScale);
 

@@ -35,8 +35,8 @@ export function useAuthForm<Values extends object, S extends z.ZodType>({
     try {
       await send(parsed.data);
     } catch (error) {
-      const placed = error instanceof ApiError ? place(error) : null;
-      if (placed) setErrors(placed);
+      const placed = error instanceof ApiError ? ofThisForm(place(error), initial) : {};
+      if (Object.keys(placed).length > 0) setErrors(placed);
       else setFormError(error instanceof ApiError ? error.message : 'That did not work. Try again.');
     } finally {
       setBusy(false);
@@ -48,6 +48,12 @@ export function useAuthForm<Values extends object, S extends z.ZodType>({
     setErrors((now) => ({ ...now, [field]: undefined }));
   };
   return { form, values, errors, formError, busy, set, submit };
+}
+
+/** What speaks of a field that isn't here would be seen by nobody. */
+function ofThisForm<Values extends object>(errors: Errors<Values> | null, initial: Values): Errors<Values> {
+  const known = Object.entries(errors ?? {}).filter(([field, message]) => field in initial && message);
+  return Object.fromEntries(known) as Errors<Values>;
 }
 
 function firstIssues<Values>(error: z.ZodError): Errors<Values> {

@@ -1,6 +1,6 @@
 import { chakra } from '@chakra-ui/react';
 import type { TakeListItem, Target } from '@thudline/contracts';
-import { clippedPercent, levelPercent } from '../pictureScale';
+import { clippedPercent, isBelowAxis, levelPercent } from '../pictureScale';
 import { levelsInWords } from '../rowWords';
 
 const Picture = chakra('svg', {
@@ -65,6 +65,7 @@ interface Mark {
 function KickMark({ peakDbfs, clipped }: Mark) {
   if (clipped) return <Cross color="kick" offsetPx={-6.5} />;
   if (peakDbfs === null) return null;
+  if (isBelowAxis(peakDbfs)) return <Below color="kick" fill="kick" offsetPx={-6.5} />;
   return (
     <g transform="translate(0 -6.5)">
       <chakra.circle cx={`${levelPercent(peakDbfs)}%`} cy="50%" r="5.5" fill="kick" />
@@ -75,6 +76,7 @@ function KickMark({ peakDbfs, clipped }: Mark) {
 function OverheadMark({ peakDbfs, clipped }: Mark) {
   if (clipped) return <Cross color="overhead" offsetPx={6.5} />;
   if (peakDbfs === null) return null;
+  if (isBelowAxis(peakDbfs)) return <Below color="overhead" fill="sheet" offsetPx={6.5} />;
   return (
     <g transform="translate(0 6.5)">
       <chakra.circle
@@ -86,6 +88,17 @@ function OverheadMark({ peakDbfs, clipped }: Mark) {
         strokeWidth="2.2"
       />
     </g>
+  );
+}
+
+/** Points off the axis: this hit lies still lower. */
+function Below({ color, fill, offsetPx }: { color: string; fill: string; offsetPx: number }) {
+  return (
+    <svg x={`${levelPercent(-24)}%`} y="50%" overflow="visible">
+      <g transform={`translate(0 ${offsetPx})`}>
+        <chakra.path d="M-6 0 4-4.6V4.6Z" fill={fill} stroke={color} strokeWidth="2" strokeLinejoin="round" />
+      </g>
+    </svg>
   );
 }
 

@@ -12,7 +12,7 @@ export function TakesHead({ target }: { target: Target }) {
       <Box
         role="row"
         {...rowGrid}
-        gridTemplateAreas={{ base: '"level low"', lg: rowGrid.gridTemplateAreas.lg }}
+        gridTemplateAreas={{ base: '"level low low"', lg: rowGrid.gridTemplateAreas.lg }}
         height="58px"
         borderBottom="1px solid"
         borderColor="rule"

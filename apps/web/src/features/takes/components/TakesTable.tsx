@@ -46,7 +46,7 @@ export function TableFrame({ target, children }: { target: Target; children: Rea
   return (
     <Box role="table" aria-label="Takes" marginTop="16px" borderBottom="2px solid" borderColor="ink">
       <TakesHead target={target} />
-      <Box role="rowgroup" marginBottom="-1px">
+      <Box role="rowgroup" css={{ '& > :last-child': { borderBottomWidth: 0 } }}>
         {children}
       </Box>
     </Box>

@@ -5,12 +5,12 @@
 export const rowGrid = {
   display: 'grid',
   gridTemplateColumns: {
-    base: 'minmax(0, 1.8fr) minmax(0, 1fr)',
+    base: 'minmax(0, 3.2fr) minmax(0, 1fr) 52px',
     lg: 'minmax(140px, 1fr) minmax(190px, 1.4fr) 190px 112px 64px',
     xl: '270px minmax(0, 1fr) 226px 128px 72px',
   },
   gridTemplateAreas: {
-    base: '"take action" "says says" "level low"',
+    base: '"take take action" "says says says" "level low low"',
     lg: '"take says level low action"',
   },
 } as const;
@@ -19,7 +19,7 @@ export const rowGrid = {
 export const wideRowGrid = {
   ...rowGrid,
   gridTemplateAreas: {
-    base: '"take action" "says says"',
+    base: '"take take action" "says says says"',
     lg: '"take says says says action"',
   },
 } as const;

@@ -93,20 +93,25 @@ export function TakeFileRow({
             onChoose={(role) => onChooseRole({ slotKey: slot.key, role })}
           />
         ))}
-        {usedPart(picked, stereo) && (
-          <Box fontSize="caption" lineHeight="18px" color="ink.muted">
-            {usedPart(picked, stereo)}
+        {remarks(picked, stereo).map((remark) => (
+          <Box key={remark} fontSize="caption" lineHeight="18px" color="ink.muted">
+            {remark}
           </Box>
-        )}
+        ))}
       </Box>
       <SentSoFar name={name} sizeBytes={picked.file.size} progress={progress} />
     </FileRow>
   );
 }
 
+/** What is worth knowing of a file before it is sent. */
+function remarks({ reading }: ReadyFile, stereo: boolean): string[] {
+  const { channels, cutShort } = reading.facts;
+  return [usedPart(channels, stereo), cutShort ? 'Shorter than its header says.' : ''].filter(Boolean);
+}
+
 /** Says so where not everything in a file is measured. */
-function usedPart({ reading }: ReadyFile, stereo: boolean): string {
-  const { channels } = reading.facts;
+function usedPart(channels: number, stereo: boolean): string {
   if (stereo) return channels > 2 ? `Channels 1 and 2 of ${channels} are measured.` : '';
   if (channels === 2) return 'Its left side is measured.';
   return channels > 2 ? `Channel 1 of ${channels} is measured.` : '';
