@@ -50,7 +50,7 @@ export function MeasuringRow({ take, now }: { take: TakeListItem; now: Date }) {
       </Flex>
       <ActionCell>
         <RowAction
-          fontSize="16px"
+          fontSize="small"
           color="ink"
           textDecoration="underline"
           marginRight={{ base: 0, lg: '22px' }}

@@ -50,7 +50,7 @@ export function FileRow({
         {action && (
           <TextButton
             type="button"
-            fontSize="16px"
+            fontSize="small"
             aria-label={action.label}
             position="relative"
             _after={{ content: '""', position: 'absolute', inset: '-11px -8px' }}
@@ -68,5 +68,5 @@ export function FileRow({
 export const sentenceAreas = { base: '"name action" "says says"', lg: '"name says says action"' };
 
 export const Sentence = chakra('div', {
-  base: { gridArea: 'says', minWidth: 0, paddingRight: { lg: '24px' }, '& [role=alert]': { gap: '14px' } },
+  base: { gridArea: 'says', minWidth: 0, paddingRight: { lg: '24px' }, '& [role=alert]': { gap: '16px' } },
 });

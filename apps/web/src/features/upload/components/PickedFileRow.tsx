@@ -82,7 +82,7 @@ export function TakeFileRow({
     : { word: 'Clear', label: `Clear ${name}`, onAct: onClear };
   return (
     <FileRow name={name} facts={factsWords(picked.reading.facts)} action={action}>
-      <Box gridArea="role" display="grid" gap="10px" paddingTop={{ lg: '1px' }}>
+      <Box gridArea="role" display="grid" gap="10px" paddingTop={{ lg: '2px' }}>
         {slots.map((slot, index) => (
           <RoleChooser
             key={slot.key}

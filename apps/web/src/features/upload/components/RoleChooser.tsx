@@ -36,8 +36,8 @@ export function RoleChooser({
         alignItems="baseline"
         gap="22px"
         paddingLeft="2px"
-        lineHeight="22px"
-        marginBottom="11px"
+        lineHeight="23px"
+        marginBottom="12px"
       >
         {side && (
           <Box width="32px" fontSize="caption" color="ink.muted">
