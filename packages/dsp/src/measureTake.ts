@@ -40,11 +40,8 @@ export async function measureTake({
     onProgress: (progress) => onStage('levels', progress),
   });
   const readings = await readPairs({ sources, kick, others, candidates: streamed.kicks, onStage });
-  const hits = listHits(
-    kickHitsOfTake(readings, { kick, others, tracks: tracks.length }),
-    streamed.overheadHits,
-    sampleRateHz,
-  );
+  const kickHits = kickHitsOfTake(readings, { kick, others, tracks: tracks.length });
+  const hits = listHits(kickHits, streamed.overheadHits, sampleRateHz);
   onStage('arrival', 1);
   const pairs = readings.map((reading, index) => pairFacts(reading, hits, { a: kick, b: others[index] }));
   onStage('adding-up', 1);

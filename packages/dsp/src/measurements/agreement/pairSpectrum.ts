@@ -54,17 +54,17 @@ export interface PairGathererOptions {
  * stays in the phase of Sko.
  */
 export function createPairGatherer({ sampleRateHz, lowCross }: PairGathererOptions): PairGatherer {
-  const transform = createRealTransform(pairTransformSize(sampleRateHz));
-  const binHz = sampleRateHz / transform.size;
-  const binCount = Math.min(transform.size / 2 + 1, Math.floor(HIGHEST_KEPT_HZ / binHz) + 1);
+  const size = pairTransformSize(sampleRateHz);
+  const transforms = { kick: createRealTransform(size), overhead: createRealTransform(size) };
+  const binHz = sampleRateHz / size;
+  const binCount = Math.min(size / 2 + 1, Math.floor(HIGHEST_KEPT_HZ / binHz) + 1);
   const [skk, soo, skoRe, skoIm] = Array.from({ length: 4 }, () => new Float64Array(binCount));
+  const [re, im] = [new Float64Array(binCount), new Float64Array(binCount)];
   let hitCount = 0;
   return {
     add(hit) {
-      const k = transform.spectrum(windowed(hit.kick, hit, sampleRateHz));
-      const o = transform.spectrum(windowed(hit.overhead, hit, sampleRateHz));
-      const re = new Float64Array(binCount);
-      const im = new Float64Array(binCount);
+      const k = transforms.kick.spectrum(windowed(hit.kick, hit, sampleRateHz));
+      const o = transforms.overhead.spectrum(windowed(hit.overhead, hit, sampleRateHz));
       for (let i = 0; i < binCount; i += 1) {
         re[i] = k.re[i] * o.re[i] + k.im[i] * o.im[i];
         im[i] = k.im[i] * o.re[i] - k.re[i] * o.im[i];

@@ -2,7 +2,7 @@ import type { ArrivalFacts, Swing } from '../../facts';
 import { butterworthBand } from '../filters/butterworth';
 import { filtered } from '../filters/filterChain';
 import { interquartileRange, median } from '../statistics';
-import { chooseArrival } from './chooseArrival';
+import { chooseArrival, type ArrivalEvidence } from './chooseArrival';
 import { firstArrival, type FirstArrival } from './firstArrival';
 import { createPhaseTransform, PHASE_STRETCH_MS } from './phaseTransform';
 
@@ -45,43 +45,51 @@ export function createArrivalMeter(sampleRateHz: number): ArrivalMeter {
   const arrivals: HitArrival[] = [];
   let hits = 0;
   let overheadSounds = false;
+  const cut = (samples: Float32Array, onsetAt: number, { before, after }: Around): Float32Array =>
+    samples.subarray(
+      Math.max(0, onsetAt - Math.round(before * samplesPerMs)),
+      onsetAt + Math.round(after * samplesPerMs),
+    );
+  const first = (samples: Float32Array, onsetAt: number): FirstArrival | null => {
+    const around = { before: arrivalStretch.beforeMs, after: arrivalStretch.afterMs };
+    const band = filtered(cut(samples, onsetAt, around), sections);
+    const at = Math.min(onsetAt, Math.round(around.before * samplesPerMs));
+    const [from, to] = [FROM_MS, TO_MS].map((ms) => at + Math.round(ms * samplesPerMs));
+    return firstArrival(band, { sampleRateHz, from, to });
+  };
   return {
     add({ kick, overhead, onsetAt }) {
       hits += 1;
-      const bands = { kick: filtered(kick, sections), overhead: filtered(overhead, sections) };
-      const range = {
-        sampleRateHz,
-        from: onsetAt + Math.round(FROM_MS * samplesPerMs),
-        to: onsetAt + Math.round(TO_MS * samplesPerMs),
-      };
-      const first = { kick: firstArrival(bands.kick, range), overhead: firstArrival(bands.overhead, range) };
-      if (first.kick && first.overhead) arrivals.push({ kick: first.kick, overhead: first.overhead });
+      const arrival = { kick: first(kick, onsetAt), overhead: first(overhead, onsetAt) };
+      if (arrival.kick && arrival.overhead) arrivals.push({ kick: arrival.kick, overhead: arrival.overhead });
       overheadSounds ||= overhead.some((sample) => sample !== 0);
-      const start = onsetAt - Math.round(PHASE_STRETCH_MS.before * samplesPerMs);
-      const end = onsetAt + Math.round(PHASE_STRETCH_MS.after * samplesPerMs);
-      phase.add(
-        Float64Array.from(kick.subarray(start, end)),
-        Float64Array.from(overhead.subarray(start, end)),
-      );
+      const [k, o] = [kick, overhead].map((samples) => cut(samples, onsetAt, PHASE_STRETCH_MS));
+      phase.add(Float64Array.from(k), Float64Array.from(o));
     },
-    result() {
-      const clear = arrivals.filter((arrival) => arrival.kick.clear && arrival.overhead.clear);
-      const used = clear.length >= CLEAR_HITS_WANTED ? clear : arrivals;
-      const delaysMs = used.map((arrival) => (arrival.overhead.at - arrival.kick.at) / samplesPerMs);
-      const chosen = chooseArrival({
-        hits,
-        overheadSounds,
-        first: { medianMs: median(delaysMs), iqrMs: interquartileRange(delaysMs), hits: used.length },
-        phase,
-      });
-      return {
-        ...chosen,
-        arrivalSamples: chosen.arrivalMs === null ? null : chosen.arrivalMs * samplesPerMs,
-        firstSwing: {
-          kick: commonSwing(used.map((arrival) => arrival.kick.swing)),
-          overhead: commonSwing(used.map((arrival) => arrival.overhead.swing)),
-        },
-      };
+    result: () => told(arrivals, { hits, overheadSounds, phase, samplesPerMs }),
+  };
+}
+
+interface Around {
+  readonly before: number;
+  readonly after: number;
+}
+
+function told(
+  arrivals: readonly HitArrival[],
+  { samplesPerMs, ...evidence }: Omit<ArrivalEvidence, 'first'> & { readonly samplesPerMs: number },
+): ArrivalFacts {
+  const clear = arrivals.filter((arrival) => arrival.kick.clear && arrival.overhead.clear);
+  const used = clear.length >= CLEAR_HITS_WANTED ? clear : arrivals;
+  const delaysMs = used.map((arrival) => (arrival.overhead.at - arrival.kick.at) / samplesPerMs);
+  const first = { medianMs: median(delaysMs), iqrMs: interquartileRange(delaysMs), hits: used.length };
+  const chosen = chooseArrival({ ...evidence, first });
+  return {
+    ...chosen,
+    arrivalSamples: chosen.arrivalMs === null ? null : chosen.arrivalMs * samplesPerMs,
+    firstSwing: {
+      kick: commonSwing(used.map((arrival) => arrival.kick.swing)),
+      overhead: commonSwing(used.map((arrival) => arrival.overhead.swing)),
     },
   };
 }

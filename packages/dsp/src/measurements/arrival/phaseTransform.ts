@@ -1,5 +1,5 @@
 import { createInverseReal } from '../spectrum/inverseReal';
-import { createRealTransform, powerOfTwoFrom } from '../spectrum/realSpectrum';
+import { createRealTransform, powerOfTwoFrom, type RealSpectrum } from '../spectrum/realSpectrum';
 
 /** One place where the two microphones' sound lines up. */
 export interface PhasePeak {
@@ -36,60 +36,81 @@ const NEAR_MS = 2;
  */
 export function createPhaseTransform(sampleRateHz: number): PhaseTransform {
   const stretch = ((PHASE_STRETCH_MS.before + PHASE_STRETCH_MS.after) / 1000) * sampleRateHz;
-  const transform = createRealTransform(powerOfTwoFrom(2 * stretch));
-  const fineSize = transform.size * FINER;
-  const inverse = createInverseReal(fineSize);
-  const binHz = sampleRateHz / transform.size;
-  const bins = Math.min(transform.size / 2, Math.ceil(HIGH_HZ / binHz));
-  const first = Math.ceil(LOW_HZ / binHz);
-  const sums = { kick: new Float64Array(bins), overhead: new Float64Array(bins) };
-  const total = { re: new Float64Array(bins), im: new Float64Array(bins) };
-  const single: { re: Float32Array; im: Float32Array }[] = [];
+  const size = powerOfTwoFrom(2 * stretch);
+  const transforms = { kick: createRealTransform(size), overhead: createRealTransform(size) };
+  const inverse = createInverseReal(size * FINER);
+  const bins = Math.min(size / 2, Math.ceil((HIGH_HZ * size) / sampleRateHz));
+  const first = Math.ceil((LOW_HZ * size) / sampleRateHz);
+  const sums = emptySums(bins);
+  const single: CrossSpectrum[] = [];
   let hits = 0;
-  const correlation = (re: ArrayLike<number>, im: ArrayLike<number>): Float64Array => {
-    const weighted = { re: new Float64Array(bins), im: new Float64Array(bins) };
-    let weights = 0;
-    for (let i = first; i < bins; i += 1) {
-      const both = sums.kick[i] * sums.overhead[i];
-      const coherence = both > 0 ? (total.re[i] ** 2 + total.im[i] ** 2) / both : 0;
-      const size = Math.hypot(re[i], im[i]);
-      if (size === 0) continue;
-      weighted.re[i] = (coherence * re[i]) / size;
-      weighted.im[i] = (coherence * im[i]) / size;
-      weights += coherence;
-    }
-    const correlated = inverse(weighted);
-    const scale = weights > 0 ? fineSize / (2 * weights) : 0;
-    for (let i = 0; i < correlated.length; i += 1) correlated[i] *= scale;
-    return correlated;
+  const maxima = (cross: CrossSpectrum, fromMs: number, toMs: number): PhasePeak[] => {
+    const values = inverse(weighted(cross, sums, first));
+    return peaksOf(values, { fromMs, toMs, stepMs: 1000 / (sampleRateHz * FINER) });
   };
-  const maxima = (values: Float64Array, fromMs: number, toMs: number): PhasePeak[] =>
-    peaksOf(values, { fromMs, toMs, stepMs: 1000 / (sampleRateHz * FINER) });
   return {
     add(kick, overhead) {
-      const k = transform.spectrum(tapered(kick));
-      const o = transform.spectrum(tapered(overhead));
-      const re = new Float32Array(bins);
-      const im = new Float32Array(bins);
-      for (let i = 0; i < bins; i += 1) {
-        // conj(kick) × overhead: a later overhead shows at a positive lag.
-        re[i] = k.re[i] * o.re[i] + k.im[i] * o.im[i];
-        im[i] = k.re[i] * o.im[i] - k.im[i] * o.re[i];
-        total.re[i] += re[i];
-        total.im[i] += im[i];
-        sums.kick[i] += k.re[i] ** 2 + k.im[i] ** 2;
-        sums.overhead[i] += o.re[i] ** 2 + o.im[i] ** 2;
-      }
+      const cross = addHit(sums, {
+        kick: transforms.kick.spectrum(tapered(kick)),
+        overhead: transforms.overhead.spectrum(tapered(overhead)),
+      });
       hits += 1;
-      if (single.length < HITS_KEPT) single.push({ re, im });
+      if (single.length < HITS_KEPT) single.push(cross);
     },
-    peaks: ({ fromMs, toMs }) => (hits === 0 ? [] : maxima(correlation(total.re, total.im), fromMs, toMs)),
+    peaks: ({ fromMs, toMs }) => (hits === 0 ? [] : maxima(sums, fromMs, toMs)),
     lagsPerHit: (lagMs) =>
-      single.flatMap(({ re, im }) => {
-        const best = maxima(correlation(re, im), lagMs - NEAR_MS, lagMs + NEAR_MS).at(0);
-        return best ? [best.lagMs] : [];
-      }),
+      single.flatMap((cross) => maxima(cross, lagMs - NEAR_MS, lagMs + NEAR_MS).at(0)?.lagMs ?? []),
   };
+}
+
+interface CrossSpectrum {
+  readonly re: Float32Array | Float64Array;
+  readonly im: Float32Array | Float64Array;
+}
+
+interface Sums extends CrossSpectrum {
+  readonly kick: Float64Array;
+  readonly overhead: Float64Array;
+}
+
+function emptySums(bins: number): Sums {
+  const [re, im, kick, overhead] = Array.from({ length: 4 }, () => new Float64Array(bins));
+  return { re, im, kick, overhead };
+}
+
+/** Adds conj(kick) × overhead, so that a later overhead shows at a positive lag. @returns this hit's own */
+function addHit(
+  sums: Sums,
+  { kick, overhead }: { readonly kick: RealSpectrum; readonly overhead: RealSpectrum },
+): CrossSpectrum {
+  const re = new Float32Array(sums.re.length);
+  const im = new Float32Array(sums.re.length);
+  for (let i = 0; i < re.length; i += 1) {
+    re[i] = kick.re[i] * overhead.re[i] + kick.im[i] * overhead.im[i];
+    im[i] = kick.re[i] * overhead.im[i] - kick.im[i] * overhead.re[i];
+    sums.re[i] += re[i];
+    sums.im[i] += im[i];
+    sums.kick[i] += kick.re[i] ** 2 + kick.im[i] ** 2;
+    sums.overhead[i] += overhead.re[i] ** 2 + overhead.im[i] ** 2;
+  }
+  return { re, im };
+}
+
+/** Phases alone, weighted by coherence; the weights add up to 1, so that a pure delay gives a height of 1. */
+function weighted({ re, im }: CrossSpectrum, sums: Sums, first: number): RealSpectrum {
+  const result = { re: new Float64Array(re.length), im: new Float64Array(re.length) };
+  let weights = 0;
+  for (let i = first; i < re.length; i += 1) {
+    const both = sums.kick[i] * sums.overhead[i];
+    const coherence = both > 0 ? (sums.re[i] ** 2 + sums.im[i] ** 2) / both : 0;
+    const size = Math.hypot(re[i], im[i]);
+    if (size === 0) continue;
+    result.re[i] = (coherence * re[i]) / size;
+    result.im[i] = (coherence * im[i]) / size;
+    weights += coherence;
+  }
+  if (weights === 0) return result;
+  return { re: result.re.map((value) => value / weights), im: result.im.map((value) => value / weights) };
 }
 
 function tapered(samples: Float64Array): Float64Array {
@@ -97,6 +118,7 @@ function tapered(samples: Float64Array): Float64Array {
   return samples.map((sample, i) => sample * Math.sin((Math.PI * (i + 0.5)) / samples.length));
 }
 
+/** @param values - with the 1/N of the inverse transform, which the heights don't have */
 function peaksOf(
   values: Float64Array,
   { fromMs, toMs, stepMs }: { fromMs: number; toMs: number; stepMs: number },
@@ -108,7 +130,8 @@ function peaksOf(
     if (Math.abs(here) <= Math.abs(left) || Math.abs(here) < Math.abs(right)) continue;
     // Parabola through three points (J. O. Smith, "Spectral Audio Signal Processing").
     const offset = (0.5 * (left - right)) / (left - 2 * here + right);
-    found.push({ lagMs: (i + offset) * stepMs, height: here - 0.25 * (left - right) * offset });
+    const height = here - 0.25 * (left - right) * offset;
+    found.push({ lagMs: (i + offset) * stepMs, height: (height * values.length) / 2 });
   }
   return found.sort((a, b) => Math.abs(b.height) - Math.abs(a.height));
 }

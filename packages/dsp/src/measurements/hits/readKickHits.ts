@@ -39,10 +39,9 @@ export async function* readKickHits(options: ReadKickHitsOptions): AsyncGenerato
     const candidateAt = atSample - start - before;
     const onsetAt = before + onset(around, { sampleRateHz, candidateAt });
     const onsetSample = Math.max(0, start + onsetAt);
+    // The onset was looked for behind `before` samples, so `from` is never negative.
     const from = onsetSample - start - before;
-    const cut = (stretch: Float32Array): Float32Array =>
-      stretch.subarray(Math.max(0, from), from + before + after);
-    const missing = Math.max(0, -from);
-    yield { onsetSample, kick: cut(kickStretch), overhead: cut(overheadStretch), onsetAt: before - missing };
+    const cut = (stretch: Float32Array): Float32Array => stretch.subarray(from, from + before + after);
+    yield { onsetSample, kick: cut(kickStretch), overhead: cut(overheadStretch), onsetAt: before };
   }
 }

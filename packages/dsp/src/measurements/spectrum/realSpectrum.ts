@@ -8,12 +8,15 @@ export interface RealSpectrum {
 
 export interface RealTransform {
   readonly size: number;
-  /** @returns the spectrum of `samples`, followed by zeros up to `size`; unscaled (a unit impulse has 1 everywhere) */
+  /**
+   * @returns the spectrum of `samples`, followed by zeros up to `size`; unscaled (a unit impulse has 1 everywhere).
+   *   Valid until the next call: one transform for each spectrum that is needed at the same time
+   */
   spectrum(samples: Float64Array): RealSpectrum;
 }
 
 /**
- * A forward transform of fixed size that reuses its tables and buffers; results are new arrays.
+ * A forward transform of fixed size that reuses its tables, its buffers and its result.
  *
  * @param size - a power of two
  */
@@ -21,14 +24,14 @@ export function createRealTransform(size: number): RealTransform {
   const fft = new FFT(size);
   const input = new Float64Array(size);
   const output = new Float64Array(2 * size);
+  const re = new Float64Array(size / 2 + 1);
+  const im = new Float64Array(size / 2 + 1);
   return {
     size,
     spectrum(samples) {
       input.fill(0);
       input.set(samples.length > size ? samples.subarray(0, size) : samples);
       fft.realTransform(output, input);
-      const re = new Float64Array(size / 2 + 1);
-      const im = new Float64Array(size / 2 + 1);
       for (let i = 0; i < re.length; i += 1) {
         re[i] = output[2 * i];
         im[i] = output[2 * i + 1];
