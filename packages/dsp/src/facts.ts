@@ -53,7 +53,8 @@ export interface HitFacts {
 }
 
 export type Swing = 'up' | 'down';
-export type ArrivalReason = 'no-kick-hits' | 'too-few-hits' | 'hits-disagree' | 'overhead-silent' | 'methods-disagree';
+export type ArrivalReason =
+  'no-kick-hits' | 'too-few-hits' | 'hits-disagree' | 'overhead-silent' | 'methods-disagree';
 
 export interface ArrivalFacts {
   /** Positive: the second microphone hears the hit later. */
@@ -68,7 +69,8 @@ export interface ArrivalFacts {
 }
 
 export type Verdict = 'keep' | 'flip' | 'either-way' | 'cannot-tell';
-export type VerdictReason = 'no-kick-hits' | 'hits-disagree' | 'arrival-spread' | 'bands-disagree' | 'overhead-silent';
+export type VerdictReason =
+  'no-kick-hits' | 'hits-disagree' | 'arrival-spread' | 'bands-disagree' | 'overhead-silent';
 export type ChoiceName = 'as-recorded' | 'flipped' | 'shifted' | 'shifted-flipped' | 'best-shift';
 
 /** How the second microphone is played against the first. */
