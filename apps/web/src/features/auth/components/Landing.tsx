@@ -10,8 +10,8 @@ const columns = [
   },
   { strong: 'Adding up.', rest: 'Whether the two microphones help or cancel, and what a flip does.' },
   {
-    strong: 'What the change did.',
-    rest: 'Take against take, or room before and after, with how sure we are.',
+    strong: 'How sure we are.',
+    rest: 'Every figure with its unit and definition, and “can’t tell” where it can’t be told.',
   },
 ];
 
@@ -41,8 +41,7 @@ export function Landing() {
         lineHeight="21px"
         color="ink.muted"
       >
-        Files are kept bit for bit and come back the same. Nobody hears a take until you send it. Everything
-        can be exported, and everything can be deleted.
+        Files are kept bit for bit and come back the same. Nobody sees or hears a take but you.
       </Box>
     </SheetPaper>
   );
