@@ -1,7 +1,7 @@
 import { butterworthBand } from '../filters/butterworth';
 import { createHopEnergy, HOP_MS, hopSamples } from './hopMeter';
 import { createLevelHistogram, flooredPowerDb } from './levelHistogram';
-import { createRiseFinder } from './riseFinder';
+import { createRiseFinder, type RiseState } from './riseFinder';
 
 /** A place where the kick microphone's low band rises like a hit. */
 export interface KickCandidate {
@@ -75,14 +75,14 @@ export function createKickCandidates(sampleRateHz: number): KickCandidateFinder 
     if (rise.begins) {
       open = { ...nothingYet, startHop: hop, steepestHop: hop };
     }
-    if (open) follow(open, { hop, overheadDb, ...rise });
+    if (open) follow(open, rise, { hop, overheadDb });
     hop += 1;
   };
   return {
     push(kick, overhead) {
       const kickHops = meters[0].push(kick);
       const overheadHops = meters[1].push(overhead);
-      kickHops.forEach((power, index) => next(power, overheadHops[index]));
+      for (let i = 0; i < kickHops.length; i += 1) next(kickHops[i], overheadHops[i]);
     },
     result() {
       close();
@@ -93,19 +93,15 @@ export function createKickCandidates(sampleRateHz: number): KickCandidateFinder 
 
 const nothingYet = { steepest: 0, kickDb: flooredPowerDb(0), overheadDb: flooredPowerDb(0) };
 
-interface Now {
-  readonly hop: number;
-  readonly levelDb: number;
-  readonly overheadDb: number;
-  readonly rising: boolean;
-  readonly addedPower: number;
-}
-
-function follow(open: OpenCandidate, now: Now): void {
-  open.kickDb = Math.max(open.kickDb, now.levelDb);
-  open.overheadDb = Math.max(open.overheadDb, now.overheadDb);
-  if (now.rising && now.addedPower > open.steepest) {
-    open.steepest = now.addedPower;
-    open.steepestHop = now.hop;
+function follow(
+  open: OpenCandidate,
+  kick: Readonly<RiseState>,
+  { hop, overheadDb }: { readonly hop: number; readonly overheadDb: number },
+): void {
+  open.kickDb = Math.max(open.kickDb, kick.levelDb);
+  open.overheadDb = Math.max(open.overheadDb, overheadDb);
+  if (kick.rising && kick.addedPower > open.steepest) {
+    open.steepest = kick.addedPower;
+    open.steepestHop = hop;
   }
 }

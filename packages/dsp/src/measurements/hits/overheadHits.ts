@@ -75,49 +75,49 @@ export function createOverheadHits(options: OverheadHitsOptions): OverheadHitFin
   const histogram = createLevelHistogram();
   const hits: OpenHit[] = [];
   let hop = 0;
-  const next = (powers: HopPowers): void => {
-    const rise = rises.push(powers.body + powers.bright);
+  const next = (hops: Hops, index: number): void => {
+    const rise = rises.push(hops.body[index] + hops.bright[index]);
     histogram.add(rise.levelDb);
-    const brightRising = brightRises.push(powers.bright).rising;
+    const brightRising = brightRises.push(hops.bright[index]).rising;
     const last = hits.at(-1);
     if (rise.begins && (!last || hop - last.startHop >= APART_HOPS)) {
-      hits.push({ ...nothingYet, startHop: hop, peaks: powers.peaks.map(() => 0) });
+      hits.push({ ...nothingYet, startHop: hop, peaks: hops.peaks.map(() => 0) });
     }
     const open = hits.at(-1);
-    if (open && hop - open.startHop < FOLLOW_HOPS)
-      follow(open, { ...powers, hop, brightRising, levelDb: rise.levelDb });
+    const age = open ? hop - open.startHop : Infinity;
+    if (open && age < FOLLOW_HOPS) {
+      follow(open, hops, index);
+      open.levelDb = Math.max(open.levelDb, rise.levelDb);
+      open.struck ||= brightRising && age <= BRIGHT_WITHIN_HOPS;
+    }
     hop += 1;
   };
   return {
     push(tracks) {
-      const bodyHops = body.push(tracks[overhead]);
-      const brightHops = bright.push(tracks[overhead]);
-      const peakHops = peakMeters.map((meter, track) => meter.push(tracks[track]));
-      for (let i = 0; i < bodyHops.length; i += 1) {
-        next({ body: bodyHops[i], bright: brightHops[i], peaks: peakHops.map((hops) => hops[i]) });
-      }
+      const hops = {
+        body: body.push(tracks[overhead]),
+        bright: bright.push(tracks[overhead]),
+        peaks: peakMeters.map((meter, track) => meter.push(tracks[track])),
+      };
+      for (let i = 0; i < hops.body.length; i += 1) next(hops, i);
     },
     result: () => select(hits, histogram.percentileDb(0.1)).map((hit) => told(hit, sampleRateHz)),
   };
 }
 
-interface HopPowers {
-  readonly body: number;
-  readonly bright: number;
-  readonly peaks: readonly number[];
+/** What the hops of one block hold, band by band and track by track. */
+interface Hops {
+  readonly body: Float64Array;
+  readonly bright: Float64Array;
+  readonly peaks: readonly Float64Array[];
 }
 
-function follow(
-  open: OpenHit,
-  now: HopPowers & { readonly hop: number; readonly levelDb: number; readonly brightRising: boolean },
-): void {
-  if (now.brightRising && now.hop - open.startHop <= BRIGHT_WITHIN_HOPS) open.struck = true;
-  open.body += now.body;
-  open.bright += now.bright;
-  open.levelDb = Math.max(open.levelDb, now.levelDb);
-  now.peaks.forEach((peak, track) => {
-    open.peaks[track] = Math.max(open.peaks[track], peak);
-  });
+function follow(open: OpenHit, { body, bright, peaks }: Hops, index: number): void {
+  open.body += body[index];
+  open.bright += bright[index];
+  for (let track = 0; track < peaks.length; track += 1) {
+    open.peaks[track] = Math.max(open.peaks[track], peaks[track][index]);
+  }
 }
 
 function select(hits: readonly OpenHit[], floorDb: number): OpenHit[] {

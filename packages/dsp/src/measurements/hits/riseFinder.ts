@@ -15,18 +15,19 @@ export interface RiseOptions {
 /** What a rise finder says after each hop. */
 export interface RiseState {
   /** Level now, dB. */
-  readonly levelDb: number;
+  levelDb: number;
   /** True at the first hop of a rise. */
-  readonly begins: boolean;
+  begins: boolean;
   /** True while the level is rising by more than asked. */
-  readonly rising: boolean;
+  rising: boolean;
   /** How much power the last two hops added; largest where the rise is steepest. */
-  readonly addedPower: number;
+  addedPower: number;
 }
 
 /** Watches one band's power hop by hop for rises. */
 export interface RiseFinder {
-  push(hopPower: number): RiseState;
+  /** @returns the same object each time: a new one every 2 ms would be most of what a long take allocates */
+  push(hopPower: number): Readonly<RiseState>;
 }
 
 /** Steepness is looked at over this many hops. */
@@ -37,7 +38,7 @@ export function createRiseFinder({ windowMs, riseDb, withinMs, over }: RiseOptio
   const window = new Float64Array(Math.max(1, Math.round(windowMs / HOP_MS)));
   const past = new Float64Array(Math.max(1, Math.round(withinMs / HOP_MS)));
   let hop = 0;
-  let wasRising = false;
+  const state: RiseState = { levelDb: flooredPowerDb(0), begins: false, rising: false, addedPower: 0 };
   return {
     push(hopPower) {
       window[hop % window.length] = hopPower;
@@ -48,11 +49,12 @@ export function createRiseFinder({ windowMs, riseDb, withinMs, over }: RiseOptio
       const justBefore = past[(hop - STEEPNESS_HOPS + past.length * STEEPNESS_HOPS) % past.length];
       past[hop % past.length] = power;
       hop += 1;
-      const levelDb = flooredPowerDb(power);
-      const rising = levelDb - flooredPowerDb(before) > riseDb;
-      const begins = rising && !wasRising;
-      wasRising = rising;
-      return { levelDb, begins, rising, addedPower: power - justBefore };
+      state.levelDb = flooredPowerDb(power);
+      const rising = state.levelDb - flooredPowerDb(before) > riseDb;
+      state.begins = rising && !state.rising;
+      state.rising = rising;
+      state.addedPower = power - justBefore;
+      return state;
     },
   };
 }
