@@ -4,10 +4,11 @@
 declare -A child_pid=()
 stop_order=(tests web api worker local-services postgres)
 
-# start_child <name> <command...>; its output goes to .data/log/<name>.log
+# start_child <name> <command...>; its output goes to <name>.log, the last one's stays beside it
 start_child() {
   local name=$1
   shift
+  [[ ! -s $log_dir/$name.log ]] || mv -f -- "$log_dir/$name.log" "$log_dir/$name.previous.log"
   : >"$log_dir/$name.log"
   setsid setpriv --pdeathsig TERM -- "$@" </dev/null >"$log_dir/$name.log" 2>&1 8>&- 9>&- &
   child_pid[$name]=$!

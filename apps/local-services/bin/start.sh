@@ -97,27 +97,27 @@ greet() {
   say "Logs are in $log_dir. Ctrl-C stops everything."
 }
 
-# A worker that was killed is replaced, as a service manager would do it; any other death ends the whole.
+# What keeps nothing in its memory is replaced, as a service manager would do it; any other death ends the whole.
 watch_children() {
-  local ended name code worker_starts=()
+  local ended name code deaths_s=()
   while :; do
     code=0
     # Bash would print a line of its own about a child that was killed.
     { wait -n -p ended "${child_pid[@]}" || code=$?; } 2>/dev/null
     for name in "${!child_pid[@]}"; do [[ ${child_pid[$name]} != "${ended:-}" ]] || break; done
     unset "child_pid[$name]"
-    worker_starts+=("$SECONDS")
-    if [[ $name == worker ]] && ! worker_dies_too_often; then
-      say "The worker ended (code $code); starting another."
-      start_worker
-      continue
+    deaths_s+=("$SECONDS")
+    if [[ $name == worker || $name == local-services ]] && ! deaths_are_too_many; then
+      say "The $name process ended (code $code); starting another."
+      if [[ $name == worker ]]; then start_worker; else start_local_services "$data/objects"; fi
+    else
+      fail_with_log "$log_dir/$name.log" "The $name process ended by itself (code $code), so everything is stopped."
     fi
-    fail_with_log "$log_dir/$name.log" "The $name process ended by itself (code $code), so everything is stopped."
   done
 }
 
 # Five deaths within a minute: common practice for service managers, no source.
-worker_dies_too_often() {
-  local starts=${#worker_starts[@]}
-  ((starts >= 5 && worker_starts[starts - 1] - worker_starts[starts - 5] < 60))
+deaths_are_too_many() {
+  local count=${#deaths_s[@]}
+  ((count >= 5 && deaths_s[count - 1] - deaths_s[count - 5] < 60))
 }
