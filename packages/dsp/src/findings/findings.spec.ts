@@ -29,7 +29,7 @@ describe('the level finding', () => {
       topic: 'kick-level',
       status: 'watch',
       sentence:
-        'Kick peaks at −2.7 dBFS, unclipped: this take is fine, but a harder hit would clip; turn the kick preamp down about 6 dB.',
+        'Kick peaks at −2.7 dBFS, unclipped: this take is fine, but a harder hit would clip; turn the kick preamp down 6.5 dB.',
     });
   });
 

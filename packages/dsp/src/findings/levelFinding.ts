@@ -1,12 +1,15 @@
 import { levelStatus, raisedNoiseDbfs } from '../report/level';
 import type { Finding, ReportFigures } from '../report/reportTypes';
 import { clippedHits } from './clippedHits';
-import { capitalised, counted, decimalText, wholeDbfsText, wholeDbText } from './words';
+import { capitalised, counted, decimalText, halfDbText, wholeDbfsText } from './words';
 
 type Said = Pick<Finding, 'sentence' | 'why' | 'next'>;
 type Role = 'kick' | 'overhead';
 
-/** How loud one microphone was recorded, and what to turn its preamp by. */
+/**
+ * How loud one microphone was recorded, and what to turn its preamp by: in the half-decibel steps of the tick box and the
+ * picture, so that one fault has one number everywhere.
+ */
 export function levelFinding(figures: ReportFigures, role: Role): Finding {
   return { topic: `${role}-level`, status: levelStatus(figures[role]), ...said(figures, role) };
 }
@@ -46,7 +49,7 @@ function clipped(figures: ReportFigures, role: Role): Said {
     hits > 0
       ? `${capitalised(counted(hits, `${role} hit`))} ${hits === 1 ? 'is' : 'are'} flattened`
       : `The ${role} is flattened in ${counted(track.clipping.runCount, 'place')}`;
-  const least = wholeDbText(track.gainChangeDb ?? 0);
+  const least = halfDbText(track.gainChangeDb ?? 0);
   return {
     sentence: `${which} because the input overloaded; turn the ${role} preamp down at least ${least} dB and play again.`,
     why: 'A flattened peak can’t be repaired, and how far over the top it went can’t be seen.',
@@ -57,11 +60,11 @@ function clipped(figures: ReportFigures, role: Role): Said {
 function hot(figures: ReportFigures, role: Role): Said {
   const track = figures[role];
   const peak = decimalText(track.loudestHitDbfs ?? 0);
-  const change = wholeDbText(track.gainChangeDb ?? 0);
+  const change = halfDbText(track.gainChangeDb ?? 0);
   return {
-    sentence: `${capitalised(role)} peaks at ${peak} dBFS, unclipped: this take is fine, but a harder hit would clip; turn the ${role} preamp down about ${change} dB.`,
+    sentence: `${capitalised(role)} peaks at ${peak} dBFS, unclipped: this take is fine, but a harder hit would clip; turn the ${role} preamp down ${change} dB.`,
     why: 'Nothing is lost in this take. A clipped hit could not be repaired.',
-    next: `Turn the ${role} preamp down about ${change} dB before the next take.`,
+    next: `Turn the ${role} preamp down ${change} dB before the next take.`,
   };
 }
 
@@ -78,12 +81,12 @@ function onTarget(figures: ReportFigures, role: Role): Said {
 function low(figures: ReportFigures, role: Role): Said {
   const track = figures[role];
   const peak = decimalText(track.loudestHitDbfs ?? 0);
-  const change = wholeDbText(track.gainChangeDb ?? 0);
+  const change = halfDbText(track.gainChangeDb ?? 0);
   const noise = raisedNoiseDbfs(track);
-  const next = `Lower the headphones, then turn the ${role} preamp up about ${change} dB.`;
+  const next = `Lower the headphones, then turn the ${role} preamp up ${change} dB.`;
   if (levelStatus(track) === 'good') {
     return {
-      sentence: `${capitalised(role)} peaks at ${peak} dBFS, below target but ${noise === null ? 'loud enough' : 'clear of the noise'}: this take is fine, and about ${change} dB more would fit.`,
+      sentence: `${capitalised(role)} peaks at ${peak} dBFS, below target but ${noise === null ? 'loud enough' : 'clear of the noise'}: this take is fine, and ${change} dB more would fit.`,
       why: 'It can be raised later without harm.',
       next: `${next} It can also stay where it is.`,
     };
@@ -92,7 +95,7 @@ function low(figures: ReportFigures, role: Role): Said {
   return {
     sentence:
       noise === null
-        ? `${name} peaks at only ${peak} dBFS; raising it later lifts the noise too, so turn the ${role} preamp up about ${change} dB now.`
+        ? `${name} peaks at only ${peak} dBFS; raising it later lifts the noise too, so turn the ${role} preamp up ${change} dB now.`
         : `${name} peaks at ${peak} dBFS; raising it ${change} dB later lifts noise to ${wholeDbfsText(noise)}, so turn the ${role} preamp up ${change} dB now.`,
     why: 'Gain at the preamp raises the drum above the noise that comes after it; gain later raises both.',
     next,

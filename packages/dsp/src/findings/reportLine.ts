@@ -3,7 +3,7 @@ import type { LineSentence, Reader, ReportFigures } from '../report/reportTypes'
 import { addingUpStatus, hasFewHits } from './addingUpFinding';
 import { clippedHits } from './clippedHits';
 import { noisierMicrophone } from './noiseFinding';
-import { counted, countText, decimalText, wholeDbfsText, wholeDbText } from './words';
+import { counted, countText, decimalText, halfDbText, wholeDbfsText } from './words';
 
 const ROLES = ['kick', 'overhead'] as const;
 const SENTENCES = 2;
@@ -31,7 +31,7 @@ function clipped(figures: ReportFigures): LineSentence[] {
     const hits = clippedHits(figures, figures[role]);
     const what = hits > 0 ? `${countText(hits)} hit${hits === 1 ? ' is' : 's are'}` : 'its peaks are';
     return {
-      action: `Turn the ${role} down at least ${wholeDbText(figures[role].gainChangeDb ?? 0)} dB:`,
+      action: `Turn the ${role} down at least ${halfDbText(figures[role].gainChangeDb ?? 0)} dB:`,
       reason: `${what} flattened, and that can’t be repaired.`,
     };
   });

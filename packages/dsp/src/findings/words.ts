@@ -7,12 +7,7 @@ export function decimalText(value: number, digits = 1): string {
   return value < 0 && Number(text) !== 0 ? `−${text}` : text;
 }
 
-/** Whole dB in advice ("about"), without a sign: the words say up or down. At least 1, so that nothing is turned by 0. */
-export function wholeDbText(valueDb: number): string {
-  return String(Math.max(1, Math.round(Math.abs(valueDb))));
-}
-
-/** Half-decibel steps for a preamp, without a sign: 6.5 or 6. */
+/** Half-decibel steps for a preamp, without a sign: the words say up or down. At least 0.5, so that nothing is turned by 0. */
 export function halfDbText(valueDb: number): string {
   return String(Math.max(0.5, Math.round(Math.abs(valueDb) * 2) / 2));
 }
