@@ -15,8 +15,10 @@ export const sampleMe: MeResponse = {
   id: '01890000-0000-7000-8000-0000000000ff',
   name: 'Juno',
   email: 'juno@example.org',
+  emailVerified: true,
   roles: ['player'],
   settings: defaultUserSettings,
+  readOnly: false,
 };
 
 export const measurement = (overrides: Partial<MeasurementResponse> = {}): MeasurementResponse => ({
@@ -52,6 +54,11 @@ export const sampleTake = (overrides: Partial<TakeResponse> = {}): TakeResponse 
   measurement: measurement(),
   hasReport: true,
   tickedActions: [],
+  tags: [],
+  follows: null,
+  followedBy: null,
+  rights: { change: true, listen: true, download: true },
+  player: 'Juno',
   ...overrides,
 });
 
@@ -164,6 +171,7 @@ export const sampleReport = (overrides: Partial<ReportResponse> = {}): ReportRes
     { action: 'Flip the overhead:', reason: 'the kick gets 1.4 dB of its low end back.' },
     { action: 'Turn the kick down:', reason: 'a harder hit would clip.' },
   ],
+  outcomes: [],
   actions: [
     {
       id: 'flip-overhead',

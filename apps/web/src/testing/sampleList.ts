@@ -16,10 +16,20 @@ export const sampleListItem = (overrides: Partial<TakeListItem> = {}): TakeListI
   overheadPeakDbfs: -8.4,
   overheadClipped: false,
   lowEndDb: -0.7,
+  tags: [],
+  deletedAt: null,
   ...overrides,
 });
 
 export const sampleList = (
   items: TakeListItem[],
-  { total = items.length, nextCursor = null as string | null } = {},
-): ListTakesResponse => ({ items, total, nextCursor });
+  overrides: Partial<Omit<ListTakesResponse, 'items'>> = {},
+): ListTakesResponse => ({
+  items,
+  total: items.length,
+  everyTotal: items.length,
+  deletedTotal: 0,
+  tags: [],
+  nextCursor: null,
+  ...overrides,
+});
