@@ -7,6 +7,7 @@ import { startTestApp, TestApp } from './support/test-app';
 describe('takes', () => {
   let test: TestApp;
   let juno: Person;
+  const nothing = { items: [], nextCursor: null, total: 0, everyTotal: 0, deletedTotal: 0, tags: [] };
 
   beforeAll(async () => {
     test = await startTestApp();
@@ -23,7 +24,7 @@ describe('takes', () => {
 
   describe('the list', () => {
     it('is empty for a new player', async () => {
-      expect(await list()).toEqual({ items: [], nextCursor: null, total: 0 });
+      expect(await list()).toEqual(nothing);
     });
 
     it('shows only the player’s own takes, newest recording first', async () => {
@@ -105,7 +106,7 @@ describe('takes', () => {
     it('takes it out of the list and the count, keeps its row and its number', async () => {
       const take = await juno.makeTake();
       await juno.delete(paths.take(take.id)).expect(204);
-      expect(await list()).toEqual({ items: [], nextCursor: null, total: 0 });
+      expect(await list()).toEqual({ ...nothing, deletedTotal: 1 });
       await juno.get(paths.take(take.id)).expect(404);
       const row = await test.em().findOneOrFail(Take, { id: take.id });
       expect(row.deletedAt).toBeInstanceOf(Date);

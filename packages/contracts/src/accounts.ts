@@ -16,12 +16,14 @@ const password = z
   .min(10, 'A password needs at least 10 characters.')
   .max(200, 'A password has at most 200 characters.');
 
+const personName = z
+  .string({ error: 'Write the name others should see.' })
+  .trim()
+  .min(1, 'Write the name others should see.')
+  .max(60, 'A name has at most 60 characters.');
+
 export const joinRequest = z.object({
-  name: z
-    .string({ error: 'Write the name others should see.' })
-    .trim()
-    .min(1, 'Write the name others should see.')
-    .max(60, 'A name has at most 60 characters.'),
+  name: personName,
   email,
   password,
 });
@@ -52,6 +54,8 @@ export const userSettings = z.object({
   /** Air temperature while recording, for the speed of sound. */
   temperatureC: z.number().min(-20).max(50),
   target,
+  /** Single keys act (Space, 1, 2, 3 …); some people need them off (WCAG 2.1.4). */
+  singleKeys: z.boolean(),
 });
 export type UserSettings = z.infer<typeof userSettings>;
 
@@ -61,13 +65,49 @@ export const defaultUserSettings: UserSettings = {
   temperatureUnit: 'celsius',
   temperatureC: 20,
   target: { lowDbfs: -12, highDbfs: -6, aimDbfs: -9 },
+  singleKeys: true,
 };
+
+/** PATCH: absent leaves as it is. */
+export const updateMeRequest = z.object({
+  name: personName.optional(),
+  settings: userSettings.partial().optional(),
+});
+export type UpdateMeRequest = z.infer<typeof updateMeRequest>;
 
 export const meResponse = z.object({
   id: z.uuid(),
   name: z.string(),
   email: z.string(),
+  emailVerified: z.boolean(),
   roles: z.array(role),
   settings: userSettings,
+  /** True on a phone that was let in to read along: nothing can be changed from it. */
+  readOnly: z.boolean(),
 });
 export type MeResponse = z.infer<typeof meResponse>;
+
+const oneTimeToken = z.string().min(20, 'This link is not whole. Open it again from the mail.').max(200);
+
+/** Answers alike whether there is such an account or not. */
+export const forgotRequest = z.object({ email });
+export type ForgotRequest = z.infer<typeof forgotRequest>;
+
+export const resetRequest = z.object({ token: oneTimeToken, password });
+export type ResetRequest = z.infer<typeof resetRequest>;
+
+export const verifyRequest = z.object({ token: oneTimeToken });
+export type VerifyRequest = z.infer<typeof verifyRequest>;
+
+export const changePasswordRequest = z.object({
+  oldPassword: z.string({ error: 'Write your password.' }).min(1, 'Write your password.').max(200),
+  password,
+});
+export type ChangePasswordRequest = z.infer<typeof changePasswordRequest>;
+
+/** "Show on my phone": a code to scan. The link works once, within minutes, and signs in to read only. */
+export const phoneLinkResponse = z.object({ url: z.url(), expiresAt: z.iso.datetime() });
+export type PhoneLinkResponse = z.infer<typeof phoneLinkResponse>;
+
+export const openPhoneLinkRequest = z.object({ token: oneTimeToken });
+export type OpenPhoneLinkRequest = z.infer<typeof openPhoneLinkRequest>;

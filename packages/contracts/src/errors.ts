@@ -10,6 +10,8 @@ export const errorCodes = [
   'email-taken',
   'wrong-sign-in',
   'session-ended',
+  'link-ended',
+  'read-only',
   'too-large',
   'too-many-files',
   'too-many-requests',

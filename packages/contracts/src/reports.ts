@@ -140,6 +140,15 @@ export const nextAction = z.object({
 });
 export type NextAction = z.infer<typeof nextAction>;
 
+/** What became of one action of the take before: "**The flip worked:** 1.3 dB of low end came back; we expected 1.4." */
+export const outcome = z.object({
+  actionId: z.string(),
+  status: findingStatus,
+  strong: z.string(),
+  rest: z.string(),
+});
+export type Outcome = z.infer<typeof outcome>;
+
 export const reportFigures = z.object({
   version: z.literal(1),
   sampleRateHz: z.number().positive(),
@@ -162,6 +171,8 @@ export const reportResponse = reportFigures.extend({
   temperatureC: z.number(),
   line: z.array(lineSentence),
   actions: z.array(nextAction),
+  /** Empty unless this take follows one whose actions were ticked, and both are measured. */
+  outcomes: z.array(outcome),
   /**
    * Layout of `GET /api/takes/:id/pair-spectrum`: little-endian float32, `binCount` values each of
    * Skk, Soo, Re Sko, Im Sko; bin i lies at i · binHz. Null where no kick hit was found.

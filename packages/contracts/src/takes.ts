@@ -13,6 +13,18 @@ export const uploadTrack = z.object({
 });
 export type UploadTrack = z.infer<typeof uploadTrack>;
 
+const tag = z
+  .string()
+  .trim()
+  .min(1)
+  .max(30, 'A tag has at most 30 characters.')
+  .regex(/^[^,\n]+$/, 'A tag has no comma in it.');
+const tags = z
+  .array(tag)
+  .max(10, 'A take has at most 10 tags.')
+  .transform((all) => [...new Set(all)]);
+const actionIds = z.array(z.string().max(60)).max(40);
+
 /** The text fields of the upload; they are sent before the files. `tracks` travels as JSON text. */
 export const createTakeRequest = z.object({
   /** Made by the client once per upload: sending the same key again gives the same take. */
@@ -20,6 +32,12 @@ export const createTakeRequest = z.object({
   title: z.string().trim().max(120, 'A title has at most 120 characters.').default(''),
   note: z.string().trim().max(4000, 'A note has at most 4,000 characters.').default(''),
   recordedAt: z.iso.datetime({ offset: true }).optional(),
+  /** The player's earlier take that this one follows. */
+  followsTakeId: z.uuid().optional(),
+  /** Which actions of that take were carried out before this one; travels as JSON text. */
+  doneActions: actionIds.default([]),
+  /** Travels as JSON text. */
+  tags: tags.default([]),
   tracks: z
     .array(uploadTrack)
     .length(2, 'A take has one kick microphone and one overhead microphone.')
@@ -36,7 +54,8 @@ export const updateTakeRequest = z.object({
   title: z.string().trim().max(120, 'A title has at most 120 characters.').optional(),
   note: z.string().trim().max(4000, 'A note has at most 4,000 characters.').optional(),
   /** Ids of the actions under "before the next take" that are ticked. */
-  tickedActions: z.array(z.string().max(60)).max(40).optional(),
+  tickedActions: actionIds.optional(),
+  tags: tags.optional(),
 });
 export type UpdateTakeRequest = z.infer<typeof updateTakeRequest>;
 
@@ -81,6 +100,15 @@ export const takeResponse = z.object({
   measurement: measurementResponse,
   hasReport: z.boolean(),
   tickedActions: z.array(z.string()),
+  tags: z.array(z.string()),
+  /** The take this one follows, while it is there. */
+  follows: z.object({ id: z.uuid(), number: z.int().positive(), title: z.string() }).nullable(),
+  /** The take that was added after this one, if any: Big print goes on to it. */
+  followedBy: z.object({ id: z.uuid(), number: z.int().positive() }).nullable(),
+  /** What the one who asks may do. */
+  rights: z.object({ change: z.boolean(), listen: z.boolean(), download: z.boolean() }),
+  /** Who recorded it, as others see them. */
+  player: z.string(),
 });
 export type TakeResponse = z.infer<typeof takeResponse>;
 
@@ -99,10 +127,31 @@ export const takeListItem = z.object({
   overheadClipped: z.boolean(),
   /** Low end of the two added as recorded, matched levels, against no help and no harm; dB, at most +3.01. */
   lowEndDb: z.number().nullable(),
+  tags: z.array(z.string()),
+  /** Set for takes that were deleted and can still be brought back; they go for good after 30 days. */
+  deletedAt: z.iso.datetime().nullable(),
 });
 export type TakeListItem = z.infer<typeof takeListItem>;
 
+/** The filter sentence: "Show **every take** tagged **any tag**, **newest first**." */
+export const takeFilters = [
+  'every',
+  'good',
+  'clipped',
+  'hot',
+  'low',
+  'to-flip',
+  'cannot-tell',
+  'deleted',
+] as const;
+export const takeOrders = ['newest', 'oldest', 'hardest-kick', 'fullest-low-end'] as const;
+
 export const listTakesRequest = z.object({
+  show: z.enum(takeFilters).default('every'),
+  order: z.enum(takeOrders).default('newest'),
+  tag: z.string().max(30).optional(),
+  /** Words looked for in title, note and what the sheet says. */
+  find: z.string().trim().max(100).optional(),
   cursor: z.string().max(200).optional(),
   limit: z.coerce.number().int().min(1).max(100).default(11),
 });
@@ -112,7 +161,13 @@ export const listTakesResponse = z.object({
   items: z.array(takeListItem),
   /** Null on the last page. */
   nextCursor: z.string().nullable(),
+  /** Takes that fit the sentence. */
   total: z.int().nonnegative(),
+  /** The player's takes in all, deleted ones not counted. */
+  everyTotal: z.int().nonnegative(),
+  deletedTotal: z.int().nonnegative(),
+  /** Every tag the player uses, in alphabetical order. */
+  tags: z.array(z.string()),
 });
 export type ListTakesResponse = z.infer<typeof listTakesResponse>;
 
@@ -130,3 +185,11 @@ export const uploadLimits = {
   maxFileBytes: 512 * 1024 * 1024,
   maxFiles: 2,
 } as const;
+
+/**
+ * Outline of a track for the whole-take picture: little-endian int8, for each step the lowest and the highest sample
+ * (−127 … 127 is full scale), one track after the other in the order kick, overhead. The server picks the resolution
+ * that has at least `steps` steps where the take is long enough. Headers: `X-Steps`, `X-Tracks`, `X-Duration-S`.
+ */
+export const peaksRequest = z.object({ steps: z.coerce.number().int().min(100).max(8000).default(1500) });
+export type PeaksRequest = z.infer<typeof peaksRequest>;

@@ -1,7 +1,7 @@
 import { applyDecorators, SetMetadata } from '@nestjs/common';
 import { ApiCookieAuth, ApiExtension } from '@nestjs/swagger';
 import { Role } from '@thudline/contracts';
-import type { TakeRight } from './access.service';
+import type { TakeRight } from './take-rights';
 
 export const ACCESS = Symbol('access');
 

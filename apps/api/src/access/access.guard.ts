@@ -5,7 +5,8 @@ import { SessionsService } from '../auth/sessions.service';
 import { accessCookieOf } from '../auth/auth-cookies';
 import { AppError, notFound } from '../errors/app-error';
 import { ACCESS, AccessRule } from './access.decorator';
-import { AccessService, TakeRight } from './access.service';
+import { AccessService } from './access.service';
+import { TakeRight, TakeRights } from './take-rights';
 import { notSignedIn, Viewer, ViewerRequest } from './viewer';
 
 /** Holds every route to the access it declares. */
@@ -26,7 +27,8 @@ export class AccessGuard implements CanActivate {
     const viewer = await this.viewerOf(request);
     request.viewer = viewer;
     if (rule.kind === 'role') this.checkRole(viewer, rule.role);
-    if (rule.kind === 'take') await this.checkTake(viewer, String(request.params.id), rule.right);
+    if (rule.kind === 'take')
+      request.rights = await this.checkTake(viewer, String(request.params.id), rule.right);
     return true;
   }
 
@@ -41,10 +43,11 @@ export class AccessGuard implements CanActivate {
     if (!viewer.user.roles.includes(role)) throw forbidden();
   }
 
-  private async checkTake(viewer: Viewer, takeId: string, right: TakeRight): Promise<void> {
+  private async checkTake(viewer: Viewer, takeId: string, right: TakeRight): Promise<TakeRights> {
     const rights = await this.access.take(viewer, takeId);
     if (!rights.read) throw notFound();
     if (!rights[right]) throw forbidden();
+    return rights;
   }
 }
 

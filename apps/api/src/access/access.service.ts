@@ -2,13 +2,8 @@ import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { validate } from 'uuid';
 import { Take } from '../takes/entities/take.entity';
+import { everything, nothing, TakeRights } from './take-rights';
 import { Viewer } from './viewer';
-
-export type TakeRight = 'read' | 'listen' | 'download' | 'note' | 'change';
-export type TakeRights = Record<TakeRight, boolean>;
-
-const everything: TakeRights = { read: true, listen: true, download: true, note: true, change: true };
-const nothing: TakeRights = { read: false, listen: false, download: false, note: false, change: false };
 
 /** The one place that knows who may see what. */
 @Injectable()

@@ -2,15 +2,20 @@ import { createParamDecorator, ExecutionContext } from '@nestjs/common';
 import { Request } from 'express';
 import { AppError } from '../errors/app-error';
 import { User } from '../users/entities/user.entity';
+import type { TakeRights } from './take-rights';
 
-/** Who asks: a user, and later the grants of shares they opened. */
+/** Somebody signed in. */
 export interface Viewer {
   user: User;
   sessionId: string;
+  /** A phone that was let in to read along. */
+  readOnly: boolean;
 }
 
 export interface ViewerRequest extends Request {
   viewer?: Viewer;
+  /** What may be done with the take the route is about; set by the guard. */
+  rights?: TakeRights;
 }
 
 export const notSignedIn = () => new AppError('not-signed-in', 'Sign in to go on.');
@@ -19,4 +24,11 @@ export const CurrentViewer = createParamDecorator((_: unknown, context: Executio
   const { viewer } = context.switchToHttp().getRequest<ViewerRequest>();
   if (!viewer) throw notSignedIn();
   return viewer;
+});
+
+/** For routes that declare a right to a take. */
+export const CurrentRights = createParamDecorator((_: unknown, context: ExecutionContext): TakeRights => {
+  const { rights } = context.switchToHttp().getRequest<ViewerRequest>();
+  if (!rights) throw new Error('This route declares no right to a take.');
+  return rights;
 });

@@ -66,6 +66,6 @@ export class AuthController {
 
   private async signedIn(user: User, stay: boolean, response: Response) {
     setSessionCookies(response, await this.sessions.start(user, stay), this.config.isHttps);
-    return meResponseOf(user);
+    return meResponseOf(user, { readOnly: false });
   }
 }

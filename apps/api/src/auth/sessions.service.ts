@@ -58,7 +58,9 @@ export class SessionsService {
       { populate: ['user'] },
     );
     const user = session?.user.unwrap();
-    return session && user && !user.lockedAt ? { user, sessionId: session.id } : null;
+    return session && user && !user.lockedAt
+      ? { user, sessionId: session.id, readOnly: session.readOnly }
+      : null;
   }
 
   /** Changes the refresh token. The one before is good for a minute more; anything older ends the session. */

@@ -2,9 +2,11 @@ import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { TakeFacts } from '@thudline/dsp';
 import { pairSpectrumColumns, reportColumns } from '../reports/report-columns';
+import { saidBy } from '../reports/reports.mapper';
 import { PairSpectrum } from '../reports/entities/pair-spectrum.entity';
 import { Report } from '../reports/entities/report.entity';
 import { Take } from '../takes/entities/take.entity';
+import { settingsOf } from '../users/user-settings';
 import { Measurement, MeasurementStage } from './entities/measurement.entity';
 import { MeasureQueue } from './measure-queue';
 
@@ -64,13 +66,16 @@ export class MeasurementClaims {
     return this.em.fork().transactional(async (em) => {
       const done = { state: 'done', stage: null, progress: 1 } as const;
       if ((await em.nativeUpdate(Measurement, running(claim), done)) === 0) return false;
+      const { owner } = await em.findOneOrFail(Take, { id: claim.takeId }, { populate: ['owner'] });
+      const columns = reportColumns(facts);
       const report = em.create(Report, {
         measurement: claim.measurementId,
         take: claim.takeId,
-        ...reportColumns(facts),
+        ...columns,
+        says: saidBy(columns.summary, settingsOf(owner.unwrap())),
       });
-      for (const columns of pairSpectrumColumns(facts, spectra))
-        em.create(PairSpectrum, { report, ...columns });
+      for (const spectrum of pairSpectrumColumns(facts, spectra))
+        em.create(PairSpectrum, { report, ...spectrum });
       await em.flush();
       await em.nativeUpdate(Take, { id: claim.takeId }, { currentReportId: claim.measurementId });
       return true;

@@ -1,4 +1,5 @@
-import { ClipRun, HitFacts, TakeFacts, TrackFacts, TrackRole } from '@thudline/dsp';
+import { defaultUserSettings, FindingStatus } from '@thudline/contracts';
+import { ClipRun, HitFacts, reportFigures, TakeFacts, TrackFacts, TrackRole } from '@thudline/dsp';
 
 const withoutRuns = (track: TrackFacts): TrackFacts => ({
   ...track,
@@ -15,19 +16,35 @@ export function reportColumns(facts: TakeFacts) {
     kickClipped: kick.clipped,
     overheadPeakDbfs: overhead.peakDbfs,
     overheadClipped: overhead.clipped,
+    kickNoiseDbfs: kick.noiseDbfs,
+    overheadNoiseDbfs: overhead.noiseDbfs,
     lowEndDb: agreement?.choices.find((choice) => choice.name === 'as-recorded')?.lowEndDb ?? null,
     flipGainDb: agreement?.flipGainMatchedDb ?? null,
     verdict: agreement?.verdict ?? 'cannot-tell',
+    addingUp: addingUp(facts),
     summary: { ...facts, hits: [], tracks: facts.tracks.map(withoutRuns) },
     hits: [...facts.hits],
     clipRuns: facts.tracks.map((track) => [...track.clipping.runs]),
   };
 }
 
-function hardest(facts: TakeFacts, role: TrackRole): { peakDbfs: number | null; clipped: boolean } {
+/** Status of the finding on adding up, which is the same for every target. */
+function addingUp(facts: TakeFacts): FindingStatus {
+  const { findings } = reportFigures(facts, defaultUserSettings);
+  return findings.find(({ topic }) => topic === 'adding-up')?.status ?? 'cannot-tell';
+}
+
+interface LoudestHit {
+  peakDbfs: number | null;
+  clipped: boolean;
+  noiseDbfs: number | null;
+}
+
+function hardest(facts: TakeFacts, role: TrackRole): LoudestHit {
   const track = facts.tracks.find((candidate) => candidate.role === role);
   const clipped = (track?.clipping.runCount ?? 0) > 0;
-  return { peakDbfs: clipped ? null : (track?.loudestHitDbfs ?? null), clipped };
+  const peakDbfs = clipped ? null : (track?.loudestHitDbfs ?? null);
+  return { peakDbfs, clipped, noiseDbfs: track?.noiseFloorDbfs ?? null };
 }
 
 interface StoredParts {

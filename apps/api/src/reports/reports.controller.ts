@@ -4,6 +4,7 @@ import { Response } from 'express';
 import { ZodResponse } from 'nestjs-zod';
 import { Access } from '../access/access.decorator';
 import { CurrentViewer, Viewer } from '../access/viewer';
+import { settingsOf } from '../users/user-settings';
 import { ReportResponseDto } from './dto/report.dto';
 import { ReportsService } from './reports.service';
 
@@ -16,7 +17,7 @@ export class ReportsController {
   @Access.take('read')
   @ZodResponse({ status: 200, type: ReportResponseDto })
   get(@Param('id') takeId: string, @CurrentViewer() viewer: Viewer) {
-    return this.reports.get(takeId, viewer.user.settings);
+    return this.reports.get(takeId, settingsOf(viewer.user));
   }
 
   @Get('pair-spectrum')

@@ -1,5 +1,5 @@
 import { ReportResponse, TakeListItem, UserSettings } from '@thudline/contracts';
-import { findings, nextActions, reportFigures, reportLine, takeSummary } from '@thudline/dsp';
+import { findings, nextActions, reportFigures, reportLine, TakeFacts, takeSummary } from '@thudline/dsp';
 import { Report } from './entities/report.entity';
 import { storedFacts } from './report-columns';
 
@@ -16,6 +16,18 @@ export const noListFigures: ListFigures = {
   overheadClipped: false,
   lowEndDb: null,
 };
+
+/** What the sheet says, in its owner's words: for finding a take by them. What is good names what isn't, so it's left out. */
+export function saidBy(summary: TakeFacts, { target, temperatureC, lengthUnit }: UserSettings): string {
+  const figures = reportFigures(summary, { target, temperatureC });
+  const { strong, rest } = takeSummary(figures);
+  const told = { lengthUnit, target };
+  const sentences = findings(figures, told).flatMap(({ status, sentence }) =>
+    status === 'good' ? [] : sentence,
+  );
+  const line = reportLine(figures, told).map(({ action, reason }) => `${action} ${reason}`);
+  return [strong, rest, ...line, ...sentences].filter(Boolean).join('\n');
+}
 
 export function listFiguresOf(report: Report, { target, temperatureC }: UserSettings): ListFigures {
   const { kickPeakDbfs, kickClipped, overheadPeakDbfs, overheadClipped, lowEndDb } = report;
@@ -52,6 +64,7 @@ export function reportResponseOf({ report, owner, reader }: ReportParts): Report
     temperatureC,
     line: reportLine(figures, told),
     actions: nextActions(figures, told),
+    outcomes: [],
     pairSpectrum: facts.pairs[0]?.spectrum ?? null,
   };
 }

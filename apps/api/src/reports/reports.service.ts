@@ -5,7 +5,9 @@ import { AppError } from '../errors/app-error';
 import { PairSpectrum } from './entities/pair-spectrum.entity';
 import { Report } from './entities/report.entity';
 import { Take } from '../takes/entities/take.entity';
-import { ListFigures, listFiguresOf, reportResponseOf } from './reports.mapper';
+import { User } from '../users/entities/user.entity';
+import { settingsOf } from '../users/user-settings';
+import { ListFigures, listFiguresOf, reportResponseOf, saidBy } from './reports.mapper';
 
 const notMeasuredYet = () => new AppError('not-measured-yet', 'This take has not been measured yet.');
 
@@ -32,6 +34,16 @@ export class ReportsService {
     return new Map(reports.map((report) => [report.measurement.id, listFiguresOf(report, owner)]));
   }
 
+  /** What sheets say was written with the owner's target of then; after it changed they are told anew. */
+  async tellAnew(owner: User): Promise<void> {
+    const takes = await this.em.find(Take, { owner, currentReportId: { $ne: null } });
+    const ids = takes.flatMap((take) => take.currentReportId ?? []);
+    const settings = settingsOf(owner);
+    for (const report of await this.em.find(Report, { measurement: { $in: ids } }))
+      report.says = saidBy(report.summary, settings);
+    await this.em.flush();
+  }
+
   private async currentReport(takeId: string) {
     const take = await this.em.findOneOrFail(Take, { id: takeId }, { populate: ['owner'] });
     if (!take.currentReportId) throw notMeasuredYet();
@@ -40,6 +52,6 @@ export class ReportsService {
       { measurement: take.currentReportId },
       { populate: ['measurement', 'hits', 'clipRuns'] },
     );
-    return { report, owner: take.owner.unwrap().settings };
+    return { report, owner: settingsOf(take.owner.unwrap()) };
   }
 }

@@ -37,6 +37,7 @@ export class TakeCreationService {
   async create(viewer: Viewer, { request, files }: TakeUpload): Promise<CreatedTake> {
     const earlier = await findUploaded(this.em, viewer, request.uploadKey);
     if (earlier) return { take: earlier, isNew: false };
+    await findFollowed(this.em, viewer, request);
     const checked = await checkedFiles(files, request.tracks);
     const takeId = v7();
     const stored = checked.map((file) => stamped(file, takeId));
@@ -80,6 +81,9 @@ export class TakeCreationService {
         note: request.note,
         recordedAt: request.recordedAt ? new Date(request.recordedAt) : new Date(),
         uploadKey: request.uploadKey,
+        tags: request.tags,
+        followsTake: await findFollowed(em, viewer, request),
+        doneActions: request.doneActions,
       });
       const fileRows = files.map((file, position) =>
         em.create(TakeFile, { take, position, ...fileColumns(file) }),
@@ -103,6 +107,20 @@ async function findUploaded(em: EntityManager, viewer: Viewer, uploadKey: string
   if (take?.deletedAt)
     throw new AppError('conflict', 'This take was uploaded before and has been deleted since.');
   return take;
+}
+
+/** @returns the take that the new one follows, null where none is named */
+async function findFollowed(
+  em: EntityManager,
+  viewer: Viewer,
+  { followsTakeId }: CreateTakeRequest,
+): Promise<Take | null> {
+  if (!followsTakeId) return null;
+  const take = await em.findOne(Take, { id: followsTakeId, owner: viewer.user.id, deletedAt: null });
+  if (take) return take;
+  throw new AppError('bad-request', 'The take that this one follows is not there any more.', {
+    details: { fields: { followsTakeId: 'This take is not there any more.' } },
+  });
 }
 
 function stamped(file: CheckedFile, takeId: string): StoredFile {

@@ -3,9 +3,11 @@ import { ApiNoContentResponse, ApiTags } from '@nestjs/swagger';
 import { Request, Response } from 'express';
 import { ZodResponse } from 'nestjs-zod';
 import { Access } from '../access/access.decorator';
-import { CurrentViewer, Viewer } from '../access/viewer';
+import { everything, TakeRights } from '../access/take-rights';
+import { CurrentRights, CurrentViewer, Viewer } from '../access/viewer';
 import { ListTakesDto, ListTakesResponseDto, TakeResponseDto, UpdateTakeDto } from './dto/take.dto';
 import { TakeCreationService } from './take-creation.service';
+import { TakeListsService } from './take-lists.service';
 import { TakesService } from './takes.service';
 import { ApiTakeUpload } from './upload/api-take-upload.decorator';
 import { TakeUploadsService } from './upload/take-uploads.service';
@@ -15,6 +17,7 @@ import { TakeUploadsService } from './upload/take-uploads.service';
 export class TakesController {
   constructor(
     private readonly takes: TakesService,
+    private readonly lists: TakeListsService,
     private readonly creation: TakeCreationService,
     private readonly uploads: TakeUploadsService,
   ) {}
@@ -23,7 +26,7 @@ export class TakesController {
   @Access.signedIn()
   @ZodResponse({ status: 200, type: ListTakesResponseDto })
   list(@CurrentViewer() viewer: Viewer, @Query() query: ListTakesDto) {
-    return this.takes.list(viewer, query);
+    return this.lists.list(viewer, query);
   }
 
   @Post()
@@ -39,21 +42,21 @@ export class TakesController {
       this.creation.create(viewer, upload),
     );
     response.status(created.isNew ? 201 : 200);
-    return this.takes.whole(created.take);
+    return this.takes.whole(created.take, everything);
   }
 
   @Get(':id')
   @Access.take('read')
   @ZodResponse({ status: 200, type: TakeResponseDto })
-  get(@Param('id') id: string) {
-    return this.takes.get(id);
+  get(@Param('id') id: string, @CurrentRights() rights: TakeRights) {
+    return this.takes.get(id, rights);
   }
 
   @Patch(':id')
   @Access.take('change')
   @ZodResponse({ status: 200, type: TakeResponseDto })
-  update(@Param('id') id: string, @Body() body: UpdateTakeDto) {
-    return this.takes.update(id, body);
+  update(@Param('id') id: string, @Body() body: UpdateTakeDto, @CurrentRights() rights: TakeRights) {
+    return this.takes.update(id, body, rights);
   }
 
   @Delete(':id')

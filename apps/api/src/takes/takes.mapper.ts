@@ -1,4 +1,5 @@
 import { TakeResponse } from '@thudline/contracts';
+import { TakeRights } from '../access/take-rights';
 import { Measurement } from '../measuring/entities/measurement.entity';
 import { measurementResponseOf } from '../measuring/measurement.mapper';
 import { TakeFile } from './entities/take-file.entity';
@@ -6,13 +7,20 @@ import { TakeTrack } from './entities/take-track.entity';
 import { Take } from './entities/take.entity';
 
 export interface WholeTake {
+  /** With its owner. */
   take: Take;
   files: TakeFile[];
   tracks: TakeTrack[];
   measurement: Measurement;
+  /** Take before and take after, where they are there. */
+  follows: Take | null;
+  followedBy: Take | null;
+  rights: TakeRights;
 }
 
-export function takeResponseOf({ take, files, tracks, measurement }: WholeTake): TakeResponse {
+export function takeResponseOf(whole: WholeTake): TakeResponse {
+  const { take, files, tracks, measurement, rights } = whole;
+  const { change, listen, download } = rights;
   return {
     id: take.id,
     number: take.number,
@@ -24,9 +32,25 @@ export function takeResponseOf({ take, files, tracks, measurement }: WholeTake):
     tracks: tracks.map(({ role, file, channel }) => ({ role, fileId: file.id, channel })),
     measurement: measurementResponseOf(measurement),
     hasReport: take.currentReportId != null,
-    tickedActions: take.tickedActions,
+    ...(change ? ownersPart(whole) : othersPart),
+    rights: { change, listen, download },
+    player: take.owner.unwrap().name,
   };
 }
+
+type OwnersPart = Pick<TakeResponse, 'tickedActions' | 'tags' | 'follows' | 'followedBy'>;
+
+function ownersPart({ take, follows, followedBy }: WholeTake): OwnersPart {
+  return {
+    tickedActions: take.tickedActions,
+    tags: take.tags,
+    follows: follows && { id: follows.id, number: follows.number, title: follows.title },
+    followedBy: followedBy && { id: followedBy.id, number: followedBy.number },
+  };
+}
+
+/** What whoever only reads a sheet isn't told: it leads to takes that were not shown to them. */
+const othersPart: OwnersPart = { tickedActions: [], tags: [], follows: null, followedBy: null };
 
 function takeFileResponseOf(file: TakeFile): TakeResponse['files'][number] {
   const { id, name, bytes, sha256, encoding, sampleRateHz, channels, frames } = file;

@@ -4,6 +4,7 @@ import { MeasurementsModule } from '../measuring/measurements.module';
 import { ReportsModule } from '../reports/reports.module';
 import { StorageModule } from '../storage/storage.module';
 import { TakeCreationService } from './take-creation.service';
+import { TakeListsService } from './take-lists.service';
 import { TakesController } from './takes.controller';
 import { TakesService } from './takes.service';
 import { TakeUploadsService } from './upload/take-uploads.service';
@@ -11,6 +12,6 @@ import { TakeUploadsService } from './upload/take-uploads.service';
 @Module({
   imports: [AuditModule, MeasurementsModule, ReportsModule, StorageModule],
   controllers: [TakesController],
-  providers: [TakesService, TakeCreationService, TakeUploadsService],
+  providers: [TakesService, TakeListsService, TakeCreationService, TakeUploadsService],
 })
 export class TakesModule {}

@@ -1,5 +1,7 @@
 import { Module } from '@nestjs/common';
+import { ReportsModule } from '../reports/reports.module';
 import { MeController } from './me.controller';
+import { MeService } from './me.service';
 
-@Module({ controllers: [MeController] })
+@Module({ imports: [ReportsModule], controllers: [MeController], providers: [MeService] })
 export class UsersModule {}

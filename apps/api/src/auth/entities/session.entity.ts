@@ -17,6 +17,8 @@ export const Session = defineEntity({
     revokedAt: p.datetime().nullable(),
     /** False: the cookies end with the browser session. */
     stay: p.boolean(),
+    /** A phone that was let in to read along: nothing can be changed from it. */
+    readOnly: p.boolean().default(false),
   },
 });
 export type Session = InferEntity<typeof Session>;

@@ -1,5 +1,5 @@
 import { defineEntity, InferEntity, p } from '@mikro-orm/core';
-import { Verdict } from '@thudline/contracts';
+import { FindingStatus, Verdict } from '@thudline/contracts';
 import { ClipRun, HitFacts, TakeFacts } from '@thudline/dsp';
 import { Measurement } from '../../measuring/entities/measurement.entity';
 import { Take } from '../../takes/entities/take.entity';
@@ -17,9 +17,15 @@ export const Report = defineEntity({
     kickClipped: p.boolean(),
     overheadPeakDbfs: p.double().$type<number>().nullable(),
     overheadClipped: p.boolean(),
+    kickNoiseDbfs: p.double().$type<number>().nullable(),
+    overheadNoiseDbfs: p.double().$type<number>().nullable(),
     lowEndDb: p.double().$type<number>().nullable(),
     flipGainDb: p.double().$type<number>().nullable(),
     verdict: p.string().$type<Verdict>().length(20),
+    /** How the two add up, as the finding says it; it depends on no target. */
+    addingUp: p.string().$type<FindingStatus>().length(20),
+    /** What the sheet says in words, judged by the owner's target: looked through by "find". */
+    says: p.text(),
     /** The facts without hits and clipping runs: small, so that lists can read it. */
     summary: p.json<TakeFacts>(),
     hits: p.json<HitFacts[]>().lazy(true, false),

@@ -12,6 +12,15 @@ export const Take = defineEntity({
       expression:
         'create index "take_newest_first_index" on "take" ("owner_id", "recorded_at" desc, "id" desc) where "deleted_at" is null',
     },
+    {
+      name: 'take_deleted_index',
+      expression:
+        'create index "take_deleted_index" on "take" ("owner_id", "deleted_at") where "deleted_at" is not null',
+    },
+    {
+      name: 'take_tags_index',
+      expression: 'create index "take_tags_index" on "take" using gin ("tags")',
+    },
   ],
   properties: {
     ...identity,
@@ -23,6 +32,18 @@ export const Take = defineEntity({
     recordedAt: p.datetime(),
     uploadKey: p.uuid(),
     tickedActions: p.json<string[]>().onCreate((): string[] => []),
+    tags: p
+      .array<string>()
+      .columnType('text[]')
+      .default([])
+      .onCreate((): string[] => []),
+    /** The player's earlier take that this one follows. */
+    followsTake: () => p.manyToOne(Take).ref().nullable().index().deleteRule('set null'),
+    /** Which actions of that take were carried out before this one. */
+    doneActions: p
+      .json<string[]>()
+      .default('[]')
+      .onCreate((): string[] => []),
     /** The report the sheet shows; it belongs to a measurement of this take. */
     currentReportId: p.uuid().nullable(),
     deletedAt: p.datetime().nullable(),

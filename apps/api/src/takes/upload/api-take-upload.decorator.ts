@@ -20,6 +20,13 @@ export function ApiTakeUpload() {
           title: { type: 'string', maxLength: 120 },
           note: { type: 'string', maxLength: 4000 },
           recordedAt: { type: 'string', format: 'date-time' },
+          followsTakeId: {
+            type: 'string',
+            format: 'uuid',
+            description: 'The player’s earlier take that this one follows.',
+          },
+          doneActions: { type: 'string', description: 'JSON: ids of the actions carried out before it' },
+          tags: { type: 'string', description: 'JSON: ["…", …]' },
           tracks: { type: 'string', description: 'JSON: [{ role, fileIndex, channel }, …]' },
           files: {
             type: 'array',

@@ -82,16 +82,22 @@ export class TakeUploadsService {
 
 function parseFields(body: unknown): CreateTakeRequest {
   const texts = (body ?? {}) as Record<string, unknown>;
-  const parsed = createTakeRequest.safeParse({ ...texts, tracks: parseJson(texts.tracks) });
+  const parsed = createTakeRequest.safeParse({
+    ...texts,
+    tracks: parseJson(texts.tracks),
+    doneActions: parseJson(texts.doneActions),
+    tags: parseJson(texts.tags),
+  });
   if (!parsed.success) throw invalidInput(parsed.error);
   return parsed.data;
 }
 
+/** What is no JSON stays the text it is, for the contract to refuse. */
 function parseJson(text: unknown): unknown {
   try {
     return typeof text === 'string' ? JSON.parse(text) : undefined;
   } catch {
-    return undefined;
+    return text;
   }
 }
 

@@ -1,4 +1,5 @@
-import { meResponse } from '@thudline/contracts';
+import { meResponse, updateMeRequest } from '@thudline/contracts';
 import { createZodDto } from 'nestjs-zod';
 
 export class MeResponseDto extends createZodDto(meResponse) {}
+export class UpdateMeDto extends createZodDto(updateMeRequest) {}

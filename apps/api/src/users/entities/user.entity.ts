@@ -10,12 +10,15 @@ export const User = defineEntity({
     name: p.string().length(60),
     email: p.string().length(254),
     emailLower: p.string().length(254).unique(),
+    /** When somebody opened the link that was sent to the address. */
+    emailVerifiedAt: p.datetime().nullable(),
     passwordHash: p.text(),
     roles: p
       .array<Role>()
       .columnType('text[]')
       .onCreate((): Role[] => ['player']),
-    settings: p.json<UserSettings>().onCreate(() => defaultUserSettings),
+    /** As they were written; read through `settingsOf`, which knows what older rows lack. */
+    settings: p.json<Partial<UserSettings>>().onCreate((): Partial<UserSettings> => defaultUserSettings),
     /** Number of the next take; raised inside the transaction that makes a take, whose row lock it is. */
     nextTakeNumber: p.integer().default(1),
     lockedAt: p.datetime().nullable(),
