@@ -10,12 +10,19 @@ import {
   sampleExcerpt,
   sampleMe,
   samplePairSpectrumBytes,
+  samplePeaks,
   sampleReport,
   sampleTake,
   takeId,
 } from '../testing/sampleData';
 import { system } from '../theme/system';
 import { SheetPage } from './SheetPage';
+
+/** jsdom has no canvas to draw outlines on. */
+jest.mock('wavesurfer.js', () => ({
+  __esModule: true,
+  default: { create: () => ({ on() {}, destroy() {} }) },
+}));
 
 const report = sampleReport();
 const served: FakeRoutes = {
@@ -24,6 +31,7 @@ const served: FakeRoutes = {
   [`GET ${paths.report(takeId)}`]: json(report),
   [`GET ${paths.pairSpectrum(takeId)}`]: () => ({ bytes: samplePairSpectrumBytes(report.pairSpectrum!) }),
   [`GET ${paths.excerpt(takeId)}`]: () => sampleExcerpt(),
+  [`GET ${paths.peaks(takeId)}`]: () => samplePeaks(),
 };
 
 function open(routes: FakeRoutes) {
@@ -155,5 +163,78 @@ describe('the sheet', () => {
     });
     await userEvent.click(await screen.findByRole('button', { name: 'Try again' }));
     expect(await screen.findByRole('heading', { name: 'Levels: hot' })).toBeInTheDocument();
+  });
+
+  it('lets the choice be set as a sentence, and knows a named one again', async () => {
+    open({});
+    const shift = await screen.findByRole('spinbutton', { name: 'Overhead earlier, ms' });
+    await userEvent.clear(shift);
+    await userEvent.type(shift, '1.0');
+    expect(screen.getByRole('img', { name: /Low end of the two added.*flipped, 1.0 ms earlier/ })).toBeInTheDocument();
+    await userEvent.clear(shift);
+    await userEvent.type(shift, '1,62');
+    expect(screen.getByRole('button', { name: 'flipped, 1.6 ms earlier' })).toHaveAttribute(
+      'aria-pressed',
+      'true',
+    );
+    await userEvent.selectOptions(screen.getByRole('combobox', { name: 'Unit of the shift' }), 'samples');
+    expect(screen.getByRole('spinbutton', { name: 'Overhead earlier, samples' })).toHaveValue('78');
+  });
+
+  it('chooses and walks by single keys, and only while they are switched on', async () => {
+    open({});
+    await screen.findByRole('img', { name: /Low end of the two added/ });
+    await userEvent.keyboard('1');
+    expect(screen.getByRole('button', { name: 'as recorded' })).toHaveAttribute('aria-pressed', 'true');
+    await userEvent.keyboard('{ArrowLeft}');
+    expect(screen.getByRole('heading', { name: 'Hit 1, low end only' })).toBeInTheDocument();
+  });
+
+  it('leaves single keys alone for those who switched them off', async () => {
+    open({
+      [`GET ${paths.me}`]: json({ ...sampleMe, settings: { ...sampleMe.settings, singleKeys: false } }),
+    });
+    await screen.findByRole('img', { name: /Low end of the two added/ });
+    await userEvent.keyboard('1');
+    expect(screen.getByRole('button', { name: 'flipped' })).toHaveAttribute('aria-pressed', 'true');
+  });
+
+  it('zooms the pair trace by key and shows it as it was again', async () => {
+    open({});
+    const trace = await screen.findByRole('group', { name: /Pair trace/ });
+    trace.focus();
+    await userEvent.keyboard('+');
+    await userEvent.click(screen.getByRole('button', { name: 'as it was' }));
+    expect(screen.queryByRole('button', { name: 'as it was' })).not.toBeInTheDocument();
+  });
+
+  it('says what became of the changes since the take before', async () => {
+    const outcomes = [
+      {
+        actionId: 'flip-overhead',
+        status: 'good' as const,
+        strong: 'The flip worked:',
+        rest: '1.3 dB of low end came back; we expected 1.4.',
+      },
+    ];
+    const follows = { id: takeId, number: 13, title: '' };
+    open({
+      [`GET ${paths.take(takeId)}`]: json(sampleTake({ follows })),
+      [`GET ${paths.report(takeId)}`]: json(sampleReport({ outcomes })),
+    });
+    expect(await screen.findByRole('heading', { name: 'Since take 13' })).toBeInTheDocument();
+    expect(screen.getByText('The flip worked:')).toBeInTheDocument();
+  });
+
+  it('offers nothing to change to a reader who may only read', async () => {
+    open({
+      [`GET ${paths.take(takeId)}`]: json(
+        sampleTake({ rights: { change: false, listen: false, download: false } }),
+      ),
+    });
+    await screen.findByRole('heading', { name: 'Levels: hot' });
+    expect(screen.queryByRole('checkbox')).not.toBeInTheDocument();
+    expect(screen.queryByRole('link', { name: 'Add the next take' })).not.toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: /Hear this take/ })).not.toBeInTheDocument();
   });
 });

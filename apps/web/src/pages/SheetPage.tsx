@@ -21,7 +21,11 @@ export function SheetPage() {
   const error = takeError ?? reportError;
   if (error) return <SheetError error={error} retry={takeError ? retryTake : retryReport} />;
   if (!take || !me || (take.hasReport && !report)) return <PageLoading />;
-  return report ? <MeasuredSheet key={take.id} {...{ take, report, me }} /> : <MeasuringSheet take={take} />;
+  return report ? (
+    <MeasuredSheet key={take.id} {...{ take, report }} settings={me.settings} />
+  ) : (
+    <MeasuringSheet take={take} />
+  );
 }
 
 function SheetError({ error, retry }: { error: Error; retry: () => void }) {

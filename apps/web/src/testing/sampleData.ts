@@ -228,3 +228,18 @@ export function sampleExcerpt(): { bytes: Uint8Array; headers: Record<string, st
     },
   };
 }
+
+/** Outlines of both tracks as the server sends them: a burst a second. */
+export function samplePeaks(): { bytes: Uint8Array; headers: Record<string, string> } {
+  const steps = 160;
+  const values = new Int8Array(steps * 4);
+  for (let i = 0; i < values.length; i += 2) {
+    const size = Math.round(100 * Math.exp(-((i / 2) % 10) / 3));
+    values[i] = -size;
+    values[i + 1] = size;
+  }
+  return {
+    bytes: new Uint8Array(values.buffer),
+    headers: { 'X-Steps': String(steps), 'X-Tracks': '2', 'X-Duration-S': '16' },
+  };
+}

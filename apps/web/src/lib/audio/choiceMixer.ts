@@ -38,8 +38,8 @@ export function createChoiceMixer(
         if (!to) return;
         ramp(context, branch.kickGain.gain, to.kickGain);
         ramp(context, branch.overheadGain.gain, to.overheadGain);
-        branch.kickDelay.delayTime.value = to.kickDelayS;
-        branch.overheadDelay.delayTime.value = to.overheadDelayS;
+        ramp(context, branch.kickDelay.delayTime, to.kickDelayS);
+        ramp(context, branch.overheadDelay.delayTime, to.overheadDelayS);
       });
     },
     dispose() {

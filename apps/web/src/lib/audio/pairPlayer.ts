@@ -12,13 +12,16 @@ export interface LoopExcerpt {
 const quietStart = { gain: 0.2, riseS: 2.5 };
 const stopS = 0.02;
 
-/** Plays one thing at a time, a hit on repeat or a whole take, through every choice at once. */
+/** Plays one thing at a time, a hit on repeat or the whole take, through every choice at once. */
 export class PairPlayer {
   private context: AudioContext | null = null;
   private mixer: ChoiceMixer | null = null;
   private halt: (() => void) | null = null;
+  private mediaSource: MediaElementAudioSourceNode | null = null;
 
   constructor(
+    /** The whole take, two channels; whoever draws it may seek it. */
+    private readonly media: HTMLAudioElement,
     private plan: readonly MixBranch[],
     private selected: number,
   ) {}
@@ -38,19 +41,16 @@ export class PairPlayer {
     this.halt = () => source.stop(context.currentTime + stopS);
   }
 
-  /** @param onEnd - called when the take has been played to its end */
-  async playTake(url: string, onEnd: () => void): Promise<void> {
+  /** Goes on from where the take stands. */
+  async playTake(): Promise<void> {
     const { context, mixer } = await this.start();
-    const element = new Audio();
-    element.src = url;
-    const source = context.createMediaElementSource(element);
+    const source = (this.mediaSource ??= context.createMediaElementSource(this.media));
     source.connect(mixer.input);
-    element.addEventListener('ended', onEnd);
     this.halt = () => {
-      element.pause();
-      element.removeAttribute('src');
+      this.media.pause();
+      source.disconnect();
     };
-    await element.play();
+    await this.media.play();
   }
 
   select(index: number) {

@@ -1,6 +1,5 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
-import type { KeyboardEvent } from 'react';
-import { Button, TextButton } from '../../../components/Button';
+import { Button } from '../../../components/Button';
 import { Swell } from '../../../components/Swell';
 import { signedDecibels } from '../../../lib/format';
 import type { useHitExcerpt } from '../hooks/useHitExcerpt';
@@ -12,17 +11,13 @@ interface ChoiceRowProps extends Omit<PairBenchProps, 'pair'> {
   hitNumber: number;
 }
 
-/**
- * Play a hit on repeat and go through the choices. Keys work while the focus is in this row: Space plays, 1 to 5
- * choose, arrows walk through the hits.
- */
+/** Play a hit on repeat, go to another, and go through the choices. */
 export function ChoiceRow(props: ChoiceRowProps) {
   const { bench, listening, hitExcerpt, hitNumber } = props;
   const { excerpt } = hitExcerpt;
   const playsHit = listening.playing === 'hit';
-  const onKeyDown = rowKeys(props);
   return (
-    <Box onKeyDown={onKeyDown} marginTop="14px" _print={{ display: 'none' }}>
+    <Box marginTop="14px" _print={{ display: 'none' }}>
       <Flex columnGap={{ base: '14px', lg: '16px' }} rowGap="10px" alignItems="center" wrap="wrap">
         <Button
           look="outline"
@@ -37,8 +32,9 @@ export function ChoiceRow(props: ChoiceRowProps) {
         <Choices bench={bench} />
       </Flex>
       <Box fontSize="caption" color="ink.muted" marginTop="10px" lineHeight="19px">
-        <MatchWords bench={bench} matchDb={listening.matchDb} /> Listen on headphones, not too loud: small
-        speakers can’t play this low.
+        Choices are matched from 1 to 8 kHz, so that the low end can differ
+        {Math.abs(listening.matchDb) >= 0.05 ? ` (this one ${signedDecibels(listening.matchDb)})` : ''}.
+        Listen on headphones, not too loud: small speakers can’t play this low.
       </Box>
       {listening.failure && (
         <Box role="alert" color="fix" fontSize="small" marginTop="6px">
@@ -49,7 +45,7 @@ export function ChoiceRow(props: ChoiceRowProps) {
   );
 }
 
-function Choices({ bench: { choices, chosen, choose } }: { bench: ChoiceRowProps['bench'] }) {
+function Choices({ bench: { choices, chosen, set } }: { bench: ChoiceRowProps['bench'] }) {
   return (
     <Flex role="group" aria-label="Choice" columnGap="17px" rowGap="8px" wrap="wrap">
       {choices.map((choice) => {
@@ -63,7 +59,7 @@ function Choices({ bench: { choices, chosen, choose } }: { bench: ChoiceRowProps
             minHeight="32px"
             color={on ? 'ink' : 'ink.muted'}
             fontWeight={on ? 600 : 400}
-            onClick={() => choose(choice.name)}
+            onClick={() => set({ flipped: choice.flipped, shiftMs: choice.shiftMs })}
           >
             {choice.label}
             {on && <Swell depthPx={5.5} linePx={1.5} />}
@@ -112,38 +108,4 @@ function HitSteps({
       {step(1, 'Hit after', 'M3 1l6 6-6 6')}
     </Flex>
   );
-}
-
-/** How the choices are made comparable, with the gains, and the switch between the two balances. */
-function MatchWords({ bench, matchDb }: { bench: ChoiceRowProps['bench']; matchDb: number }) {
-  const { balance, setBalance, chosen } = bench;
-  return (
-    <>
-      Choices are matched from 1 to 8 kHz, so that the low end can differ
-      {Math.abs(matchDb) >= 0.05 ? ` (this one ${signedDecibels(matchDb)})` : ''}.{' '}
-      {balance === 'matched'
-        ? `Overhead ${signedDecibels(chosen.gainDb)}, levels matched: `
-        : 'Levels as recorded: '}
-      <TextButton onClick={() => setBalance(balance === 'matched' ? 'recorded' : 'matched')}>
-        {balance === 'matched' ? 'use them as recorded' : 'match them'}
-      </TextButton>
-      .
-    </>
-  );
-}
-
-function rowKeys({ bench, listening, hitExcerpt, kickHits, chosenHit, onChooseHit }: ChoiceRowProps) {
-  return (event: KeyboardEvent) => {
-    if (event.ctrlKey || event.metaKey || event.altKey) return;
-    const choice = bench.choices[Number(event.key) - 1];
-    const walk = event.key === 'ArrowRight' ? 1 : event.key === 'ArrowLeft' ? -1 : 0;
-    const next = kickHits[kickHits.indexOf(chosenHit) + walk];
-    if (choice) bench.choose(choice.name);
-    else if (walk !== 0 && next !== undefined) onChooseHit(next);
-    else if (event.key === ' ' && !(event.target instanceof HTMLButtonElement)) {
-      if (listening.playing === 'hit') listening.stop();
-      else if (hitExcerpt.excerpt) void listening.playHit(hitExcerpt.excerpt);
-    } else return;
-    event.preventDefault();
-  };
 }

@@ -5,14 +5,22 @@ import type { Listening } from '../hooks/useListening';
 import { PlayMark } from './PlayMark';
 
 /** Plays the whole take with the choice that stands on the sheet. */
-export function HearTake({ listening, durationS }: { listening: Listening; durationS: number }) {
+export function HearTake({
+  listening,
+  durationS,
+  look,
+}: {
+  listening: Listening;
+  durationS: number;
+  look: 'solid' | 'outline';
+}) {
   const plays = listening.playing === 'take';
   return (
     <>
       <Button
-        look="outline"
+        look={look}
         aria-pressed={plays}
-        onClick={() => (plays ? listening.stop() : void listening.playWholeTake())}
+        onClick={() => (plays ? listening.stop() : void listening.playTake())}
       >
         <PlayMark playing={plays} />
         {plays ? 'Stop' : `Hear this take, ${clock(durationS)}`}

@@ -2,7 +2,7 @@ import { Box, Flex, chakra } from '@chakra-ui/react';
 import type { ReportResponse } from '@thudline/contracts';
 import type { ReactNode } from 'react';
 import { TextButton } from '../../../components/Button';
-import type { NamedChoice } from '../hooks/useChoice';
+import type { NamedChoice } from '../hooks/choiceNames';
 import type { useHitExcerpt } from '../hooks/useHitExcerpt';
 import { ink } from '../pictures/ink';
 import { PairTrace } from '../pictures/PairTrace';

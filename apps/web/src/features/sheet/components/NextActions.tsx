@@ -18,6 +18,7 @@ export function NextActions({ take, actions }: { take: TakeResponse; actions: Ne
     }
   };
   if (actions.length === 0) return null;
+  const { change } = take.rights;
   return (
     <Box as="section" aria-labelledby="next-head" marginTop="18px">
       <Flex justifyContent="space-between" alignItems="baseline" gap="16px" paddingBottom="7px">
@@ -27,10 +28,10 @@ export function NextActions({ take, actions }: { take: TakeResponse; actions: Ne
         <Box
           color="ink.muted"
           fontSize="caption"
-          display={{ base: 'none', sm: 'block' }}
+          display={{ base: 'none', sm: change ? 'block' : 'none' }}
           _print={{ display: 'none' }}
         >
-          Tick as you go.
+          Tick as you go: the next take then knows what you changed.
         </Box>
       </Flex>
       <chakra.ul listStyleType="none" borderTop="1px solid" borderColor="rule">
@@ -39,7 +40,7 @@ export function NextActions({ take, actions }: { take: TakeResponse; actions: Ne
             key={action.id}
             action={action}
             done={take.tickedActions.includes(action.id)}
-            onToggle={(done) => void toggle(action.id, done)}
+            onToggle={change ? (done) => void toggle(action.id, done) : undefined}
           />
         ))}
       </chakra.ul>
@@ -59,17 +60,27 @@ function ActionRow({
 }: {
   action: NextAction;
   done: boolean;
-  onToggle: (done: boolean) => void;
+  /** Left out for a reader who may not tick. */
+  onToggle?: (done: boolean) => void;
 }) {
   const quiet = done || action.leave;
+  const words = (
+    <>
+      <chakra.span color={quiet ? 'ink.muted' : 'ink'} fontWeight={quiet ? 400 : 600}>
+        {action.action}
+      </chakra.span>{' '}
+      <chakra.span color="ink.muted">{action.detail}</chakra.span>
+    </>
+  );
   return (
     <chakra.li borderBottom="1px solid" borderColor="rule" paddingY="8px">
-      <CheckBox checked={done} onChange={onToggle}>
-        <chakra.span color={quiet ? 'ink.muted' : 'ink'} fontWeight={quiet ? 400 : 600}>
-          {action.action}
-        </chakra.span>{' '}
-        <chakra.span color="ink.muted">{action.detail}</chakra.span>
-      </CheckBox>
+      {onToggle ? (
+        <CheckBox checked={done} onChange={onToggle}>
+          {words}
+        </CheckBox>
+      ) : (
+        words
+      )}
     </chakra.li>
   );
 }

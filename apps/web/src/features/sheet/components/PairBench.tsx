@@ -3,14 +3,18 @@ import type { ReportResponse } from '@thudline/contracts';
 import { choiceLowEnd, type PairSpectrum } from '@thudline/dsp';
 import { useState } from 'react';
 import { TextButton } from '../../../components/Button';
-import type { Bench, NamedChoice } from '../hooks/useChoice';
+import type { NamedChoice } from '../hooks/choiceNames';
+import type { Bench } from '../hooks/useChoice';
 import { useHitExcerpt } from '../hooks/useHitExcerpt';
+import { useSheetKeys } from '../hooks/useSheetKeys';
 import type { Listening } from '../hooks/useListening';
 import type { usePairSpectrum } from '../hooks/usePairSpectrum';
 import { LowEndLine } from '../pictures/LowEndLine';
 import type { TraceBand } from '../pictures/pairTraceLayout';
 import { WhereItHelps } from '../pictures/WhereItHelps';
+import { ChoiceFigures } from './ChoiceFigures';
 import { ChoiceRow } from './ChoiceRow';
+import { ChoiceSentence } from './ChoiceSentence';
 import { HitTrace } from './HitTrace';
 import { PictureTitle } from './SheetSection';
 import { WhereKey } from './WhereKey';
@@ -24,6 +28,8 @@ export interface PairBenchProps {
   kickHits: number[];
   chosenHit: number;
   onChooseHit: (hitIndex: number) => void;
+  /** Whether single keys act. */
+  singleKeys: boolean;
 }
 
 /** Where choices are looked at and heard: everything below follows the one that is chosen. */
@@ -53,14 +59,16 @@ const tick = (spectrum: PairSpectrum, choice: NamedChoice) => ({
 
 function LoadedBench({ spectrum, ...props }: PairBenchProps & { spectrum: PairSpectrum }) {
   const { report, bench, kickHits, chosenHit } = props;
-  const { chosen, asRecorded, choices } = bench;
+  const { chosen, asRecorded, named } = bench;
   const hitExcerpt = useHitExcerpt(report, chosenHit);
   const [band, setBand] = useState<TraceBand>('low');
   const hitNumber = kickHits.indexOf(chosenHit) + 1;
-  const others = choices.filter((choice) => choice !== chosen && choice !== asRecorded);
+  const others = named.filter((choice) => choice !== chosen && choice !== asRecorded);
+  useSheetKeys({ ...props, excerpt: hitExcerpt.excerpt });
   return (
     <>
       <ChoiceRow {...props} hitExcerpt={hitExcerpt} hitNumber={hitNumber} />
+      <ChoiceSentence bench={bench} sampleRateHz={report.sampleRateHz} temperatureC={report.temperatureC} />
       <PictureTitle>Low end of the two added</PictureTitle>
       <LowEndLine
         recordedDb={lowEndDb(spectrum, asRecorded)}
@@ -70,6 +78,7 @@ function LoadedBench({ spectrum, ...props }: PairBenchProps & { spectrum: PairSp
       <HitTrace
         {...{ report, chosen, hitExcerpt, hitNumber, band, setBand, hitS: report.hits[chosenHit].timeS }}
       />
+      <ChoiceFigures {...{ spectrum, asRecorded, chosen }} />
       <PictureTitle>Where it helps, from low to high</PictureTitle>
       <WhereItHelps {...{ spectrum, asRecorded, chosen }} />
       <WhereKey {...{ spectrum, asRecorded, chosen }} />

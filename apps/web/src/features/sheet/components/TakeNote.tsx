@@ -8,23 +8,25 @@ import { useTakeEdits } from '../hooks/useTakeEdits';
 import { MarginNote } from './RuledSheet';
 
 /** What the player wrote about the take, at the head of the margin, and the way to change it. */
-export function TakeNote({ take, author }: { take: TakeResponse; author: string }) {
+export function TakeNote({ take }: { take: TakeResponse }) {
   const [editing, setEditing] = useState(false);
   if (editing) return <TakeNoteForm take={take} onDone={() => setEditing(false)} />;
   return (
     <Box>
       {take.note && (
-        <MarginNote from={author} about="about this take">
+        <MarginNote from={take.player} about="about this take">
           <Box whiteSpace="pre-wrap" overflowWrap="anywhere">
             {take.note}
           </Box>
         </MarginNote>
       )}
-      <Box paddingLeft={{ base: 0, lg: '20px' }} marginTop="6px" fontSize="small" color="ink.muted">
-        <TextButton onClick={() => setEditing(true)}>
-          {take.note ? 'change title or note' : 'add a title or note'}
-        </TextButton>
-      </Box>
+      {take.rights.change && (
+        <Box paddingLeft={{ base: 0, lg: '20px' }} marginTop="6px" fontSize="small" color="ink.muted">
+          <TextButton onClick={() => setEditing(true)}>
+            {take.note ? 'change title or note' : 'add a title or note'}
+          </TextButton>
+        </Box>
+      )}
     </Box>
   );
 }

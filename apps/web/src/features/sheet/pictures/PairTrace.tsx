@@ -1,7 +1,8 @@
-import { Box } from '@chakra-ui/react';
+import { Box, Flex } from '@chakra-ui/react';
 import type { Choice } from '@thudline/dsp';
 import { useId, useMemo } from 'react';
-import { milliseconds } from '../../../lib/format';
+import { TextButton } from '../../../components/Button';
+import { milliseconds, number } from '../../../lib/format';
 import { useWidth } from '../../../lib/useWidth';
 import type { Excerpt } from '../hooks/useExcerpt';
 import { Hatch } from './Hatch';
@@ -16,11 +17,12 @@ import {
   sampleTrace,
   togetherPath,
   togetherShare,
-  traceWindows,
   type TraceBand,
   type TracePoints,
   type TraceScale,
 } from './pairTraceLayout';
+import { ticksMs, type TraceView } from './traceView';
+import { useTraceView } from './useTraceView';
 import { useTurn } from './useTurn';
 
 const sizes = {
@@ -50,7 +52,8 @@ export function PairTrace({ excerpt, hitS, band, choice, arrivalMs }: PairTraceP
   const gain = 10 ** (choice.gainDb / 20);
   const count = Math.max(120, Math.round(widthPx / 2));
   const signals = useMemo(() => filtered(excerpt, band), [excerpt, band]);
-  const at = (shift: number) => sampleTrace({ signals, excerpt, hitS, band, shiftMs: shift, count });
+  const { view, moved, reset, zoomBy, surface } = useTraceView(band, widthPx);
+  const at = (shift: number) => sampleTrace({ signals, excerpt, hitS, view, shiftMs: shift, count });
 
   const recorded = withGain(at(0), gain);
   const shown = withGain(at(shiftMs), gain * polarity);
@@ -62,39 +65,50 @@ export function PairTrace({ excerpt, hitS, band, choice, arrivalMs }: PairTraceP
     y: (v) => sizes.addedMiddle - (v / half) * sizes.pairHalf * sizes.addedScale,
   };
   return (
-    <Box ref={ref} marginTop="10px">
-      <svg
-        width={widthPx}
-        height={sizes.height}
-        role="img"
-        aria-label={describe(shown, choice.label)}
-        style={{ display: 'block' }}
+    <Box ref={ref} marginTop="10px" position="relative">
+      <Box
+        {...surface}
+        tabIndex={0}
+        role="group"
+        aria-label="Pair trace. Plus and minus zoom, Shift with the arrows moves, 0 shows it as it was."
+        cursor="grab"
+        touchAction="pan-y"
+        _active={{ cursor: 'grabbing' }}
       >
-        <defs>
-          <Hatch id={hatchId} color={ink.hatch} gapPx={7} />
-        </defs>
-        <path d={togetherPath(shown, pair)} fill={ink.together} />
-        <path d={apartPath(shown, pair)} fill={`url(#${hatchId})`} />
-        <path d={`M0 ${sizes.pairMiddle}H${widthPx}`} stroke={ink.edge} strokeWidth="1.2" />
-        <path
-          d={linePath(shown.kick, pair)}
-          fill="none"
-          stroke={ink.kick}
-          strokeWidth="2.6"
-          strokeLinejoin="round"
-        />
-        <path
-          d={linePath(shown.overhead, pair)}
-          fill="none"
-          stroke={ink.overhead}
-          strokeWidth="1.9"
-          strokeLinejoin="round"
-          strokeDasharray={choice.flipped ? '7 4' : undefined}
-        />
-        {band === 'every' && <ArrivalBracket {...{ arrivalMs, shiftMs: choice.shiftMs, widthPx }} />}
-        <AddedWave {...{ shown, recorded, scale: addedScale, widthPx, choice }} />
-        <TimeAxis band={band} widthPx={widthPx} />
-      </svg>
+        <svg
+          width={widthPx}
+          height={sizes.height}
+          role="img"
+          aria-label={describe(shown, choice.label)}
+          style={{ display: 'block' }}
+        >
+          <defs>
+            <Hatch id={hatchId} color={ink.hatch} gapPx={7} />
+          </defs>
+          <path d={togetherPath(shown, pair)} fill={ink.together} />
+          <path d={apartPath(shown, pair)} fill={`url(#${hatchId})`} />
+          <path d={`M0 ${sizes.pairMiddle}H${widthPx}`} stroke={ink.edge} strokeWidth="1.2" />
+          <path
+            d={linePath(shown.kick, pair)}
+            fill="none"
+            stroke={ink.kick}
+            strokeWidth="2.6"
+            strokeLinejoin="round"
+          />
+          <path
+            d={linePath(shown.overhead, pair)}
+            fill="none"
+            stroke={ink.overhead}
+            strokeWidth="1.9"
+            strokeLinejoin="round"
+            strokeDasharray={choice.flipped ? '7 4' : undefined}
+          />
+          {band === 'every' && <ArrivalBracket {...{ arrivalMs, shiftMs: choice.shiftMs, view, widthPx }} />}
+          <AddedWave {...{ shown, recorded, scale: addedScale, widthPx, choice }} />
+          <TimeAxis view={view} widthPx={widthPx} />
+        </svg>
+      </Box>
+      <ZoomButtons {...{ moved, reset, zoomBy }} />
     </Box>
   );
 }
@@ -145,22 +159,21 @@ function AddedWave({
   );
 }
 
-const xOfMs = (band: TraceBand, widthPx: number) => (ms: number) => {
-  const { fromMs, toMs } = traceWindows[band];
-  return ((ms - fromMs) / (toMs - fromMs)) * widthPx;
-};
+const xOfMs =
+  ({ fromMs, toMs }: TraceView, widthPx: number) =>
+  (ms: number) =>
+    ((ms - fromMs) / (toMs - fromMs)) * widthPx;
 
-function TimeAxis({ band, widthPx }: { band: TraceBand; widthPx: number }) {
-  const { toMs, tickMs } = traceWindows[band];
-  const x = xOfMs(band, widthPx);
-  const ticks = Array.from({ length: Math.floor((toMs - tickMs / 4) / tickMs) + 1 }, (_, i) => i * tickMs);
+function TimeAxis({ view, widthPx }: { view: TraceView; widthPx: number }) {
+  const x = xOfMs(view, widthPx);
+  const ticks = ticksMs(view, 5);
   return (
     <>
       {ticks.map((ms) => (
         <g key={ms}>
           <path d={`M${x(ms)} ${sizes.axisY - 8}v5`} stroke={ink.edge} strokeWidth="1.4" />
           <PictureText x={x(ms)} y={sizes.axisY + 11} textAnchor="middle" fill={ink.muted}>
-            {ms}
+            {number(ms, Number.isInteger(ms) ? 0 : 1)}
             {ms === ticks.at(-1) ? ' ms' : ''}
           </PictureText>
         </g>
@@ -169,18 +182,35 @@ function TimeAxis({ band, widthPx }: { band: TraceBand; widthPx: number }) {
   );
 }
 
+/** For those who neither pinch nor know the keys. */
+function ZoomButtons({
+  moved,
+  reset,
+  zoomBy,
+}: Pick<ReturnType<typeof useTraceView>, 'moved' | 'reset' | 'zoomBy'>) {
+  return (
+    <Flex gap="14px" justifyContent="flex-end" fontSize="caption" color="ink.muted">
+      <TextButton onClick={() => zoomBy(0.6)}>closer</TextButton>
+      <TextButton onClick={() => zoomBy(1 / 0.6)}>wider</TextButton>
+      {moved && <TextButton onClick={reset}>as it was</TextButton>}
+    </Flex>
+  );
+}
+
 /** From the kick microphone's first arrival to the overhead's. */
 function ArrivalBracket({
   arrivalMs,
   shiftMs,
+  view,
   widthPx,
 }: {
   arrivalMs: number | null;
   shiftMs: number;
+  view: TraceView;
   widthPx: number;
 }) {
   if (arrivalMs === null) return null;
-  const x = xOfMs('every', widthPx);
+  const x = xOfMs(view, widthPx);
   const to = x(arrivalMs - shiftMs);
   if (Math.abs(to - x(0)) < 6) return null;
   return (

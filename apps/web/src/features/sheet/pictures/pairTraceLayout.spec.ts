@@ -8,7 +8,14 @@ const scale = { x: (i: number) => i, y: (v: number) => -v };
 describe('the pair trace', () => {
   it('reads both microphones at the same times of the take', () => {
     const signals = { kick: ramp(1), overhead: ramp(2) };
-    const points = sampleTrace({ signals, excerpt, hitS: 1.02, band: 'low', shiftMs: 0, count: 51 });
+    const points = sampleTrace({
+      signals,
+      excerpt,
+      hitS: 1.02,
+      view: { fromMs: -6, toMs: 44 },
+      shiftMs: 0,
+      count: 51,
+    });
     // The window begins 6 ms before the hit: 14 ms into the excerpt, sample 672.
     expect(points.kick[0]).toBeCloseTo(672, 6);
     expect(points.overhead[0]).toBeCloseTo(1344, 6);
@@ -17,13 +24,27 @@ describe('the pair trace', () => {
 
   it('shows a shifted overhead earlier and leaves the kick', () => {
     const signals = { kick: ramp(1), overhead: ramp(1) };
-    const points = sampleTrace({ signals, excerpt, hitS: 1.02, band: 'low', shiftMs: 1.6, count: 51 });
+    const points = sampleTrace({
+      signals,
+      excerpt,
+      hitS: 1.02,
+      view: { fromMs: -6, toMs: 44 },
+      shiftMs: 1.6,
+      count: 51,
+    });
     expect(points.overhead[0] - points.kick[0]).toBeCloseTo(0.0016 * sampleRateHz, 6);
   });
 
   it('is silent outside the excerpt rather than wrong', () => {
     const signals = { kick: ramp(1), overhead: ramp(1) };
-    const points = sampleTrace({ signals, excerpt, hitS: 1, band: 'low', shiftMs: 0, count: 51 });
+    const points = sampleTrace({
+      signals,
+      excerpt,
+      hitS: 1,
+      view: { fromMs: -6, toMs: 44 },
+      shiftMs: 0,
+      count: 51,
+    });
     expect(points.kick[0]).toBe(0);
   });
 

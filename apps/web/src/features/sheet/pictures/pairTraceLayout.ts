@@ -1,10 +1,11 @@
 import { lowPass } from '@thudline/dsp';
 import type { Excerpt } from '../hooks/useExcerpt';
+import type { TraceView } from './traceView';
 
-/** What a trace shows, in ms around the hit. Low end needs two periods of 50 Hz; the first arrival needs a close look. */
+/** What a trace shows at first, in ms around the hit. Low end needs two periods of 50 Hz; the first arrival needs a close look. */
 export const traceWindows = {
-  low: { fromMs: -6, toMs: 44, tickMs: 10 },
-  every: { fromMs: -1.5, toMs: 10, tickMs: 2 },
+  low: { fromMs: -6, toMs: 44 },
+  every: { fromMs: -1.5, toMs: 10 },
 } as const;
 export type TraceBand = keyof typeof traceWindows;
 
@@ -32,18 +33,18 @@ export function sampleTrace({
   signals,
   excerpt,
   hitS,
-  band,
+  view,
   shiftMs,
   count,
 }: {
   signals: { kick: Float32Array; overhead: Float32Array };
   excerpt: Pick<Excerpt, 'sampleRateHz' | 'startS'>;
   hitS: number;
-  band: TraceBand;
+  view: TraceView;
   shiftMs: number;
   count: number;
 }): TracePoints {
-  const { fromMs, toMs } = traceWindows[band];
+  const { fromMs, toMs } = view;
   const at = (samples: Float32Array, timeS: number) => {
     const position = (timeS - excerpt.startS) * excerpt.sampleRateHz;
     const index = Math.floor(position);

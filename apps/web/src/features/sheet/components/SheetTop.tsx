@@ -1,0 +1,69 @@
+import { Flex } from '@chakra-ui/react';
+import type { ReportResponse } from '@thudline/contracts';
+import { ButtonLink } from '../../../components/ButtonLink';
+import type { Listening } from '../hooks/useListening';
+import { FilesFindings } from './FilesFindings';
+import { HearTake } from './HearTake';
+import type { MeasuredSheetProps } from './MeasuredSheet';
+import { NextActions } from './NextActions';
+import { Outcomes } from './Outcomes';
+import { SheetRow } from './RuledSheet';
+import {
+  addingUpTopics,
+  findingsOf,
+  levelTopics,
+  levelsWord,
+  verdictWord,
+  worstStatus,
+} from './sectionWords';
+import { SheetContents, type ContentsEntry } from './SheetContents';
+import { TakeLine } from './TakeLine';
+import { TakeNote } from './TakeNote';
+
+type SheetTopProps = Omit<MeasuredSheetProps, 'settings'> & { listening: Listening };
+
+/** The line, what became of the last changes, what to do before the next take, and what the sheet holds. */
+export function SheetTop({ take, report, listening, above, marginHead, moreButtons }: SheetTopProps) {
+  const { change, listen } = take.rights;
+  return (
+    <SheetRow
+      note={
+        <>
+          {marginHead}
+          <TakeNote take={take} />
+        </>
+      }
+    >
+      {above}
+      <TakeLine take={take} report={report} />
+      <Outcomes take={take} report={report} />
+      <NextActions take={take} actions={report.actions} />
+      <Flex gap="14px" marginTop="14px" wrap="wrap" _print={{ display: 'none' }}>
+        {change && <ButtonLink to={`/takes/new?follows=${take.id}`}>Add the next take</ButtonLink>}
+        {listen && (
+          <HearTake listening={listening} durationS={report.durationS} look={change ? 'outline' : 'solid'} />
+        )}
+        {moreButtons}
+      </Flex>
+      <SheetContents entries={contents(report)} />
+      <FilesFindings report={report} />
+    </SheetRow>
+  );
+}
+
+function contents(report: ReportResponse): ContentsEntry[] {
+  const levels = findingsOf(report, levelTopics);
+  const addingUp = findingsOf(report, addingUpTopics);
+  const verdictStatus = addingUp.find((finding) => finding.topic === 'adding-up')?.status;
+  return [
+    { id: 'levels', title: 'Levels', word: levelsWord(report), status: worstStatus(levels) },
+    {
+      id: 'adding-up',
+      title: 'Adding up',
+      word: verdictWord(report),
+      status: verdictStatus ?? worstStatus(addingUp),
+    },
+    { id: 'whole-take', title: 'Whole take' },
+    { id: 'figures', title: 'All figures' },
+  ];
+}

@@ -1,0 +1,63 @@
+import { useEffect } from 'react';
+import type { Excerpt } from './useExcerpt';
+import type { Bench } from './useChoice';
+import type { Listening } from './useListening';
+
+interface SheetKeys {
+  singleKeys: boolean;
+  bench: Bench;
+  listening: Listening;
+  excerpt: Excerpt | undefined;
+  kickHits: number[];
+  chosenHit: number;
+  onChooseHit: (hitIndex: number) => void;
+}
+
+/** What every single key of the sheet does, for the list of keys. */
+export const sheetKeyWords: [keys: string, does: string][] = [
+  ['Space', 'play the hit on repeat, and stop it'],
+  ['1 2 3 …', 'the choices, from left to right'],
+  ['← →', 'the hit before, the hit after'],
+];
+
+/** Fields, lists and whatever acts on its own keys keep them. */
+const keepsItsKeys =
+  'input, textarea, select, button, a, summary, [contenteditable], [role="group"], [role="slider"], dialog *';
+
+/** Single keys of the sheet; they can be switched off (WCAG 2.1.4). */
+export function useSheetKeys(keys: SheetKeys) {
+  useEffect(() => {
+    if (!keys.singleKeys) return;
+    const onKeyDown = (event: KeyboardEvent) => {
+      if (event.ctrlKey || event.metaKey || event.altKey || event.defaultPrevented) return;
+      const inField = event.target instanceof Element && event.target.closest(keepsItsKeys) !== null;
+      const onButton = event.target instanceof Element && event.target.closest('button') !== null;
+      // A choice just clicked keeps the focus: digits and arrows still act there, Space presses the button itself.
+      if (inField && !(onButton && event.key !== ' ')) return;
+      if (act(event.key, keys)) event.preventDefault();
+    };
+    document.addEventListener('keydown', onKeyDown);
+    return () => document.removeEventListener('keydown', onKeyDown);
+  });
+}
+
+/** @returns whether the key meant something */
+function act(
+  key: string,
+  { bench, listening, excerpt, kickHits, chosenHit, onChooseHit }: SheetKeys,
+): boolean {
+  if (key === ' ') {
+    if (listening.playing !== 'nothing') listening.stop();
+    else if (excerpt) void listening.playHit(excerpt);
+    return true;
+  }
+  const walk = key === 'ArrowRight' ? 1 : key === 'ArrowLeft' ? -1 : 0;
+  if (walk !== 0) {
+    const next = kickHits[kickHits.indexOf(chosenHit) + walk];
+    if (next !== undefined) onChooseHit(next);
+    return next !== undefined;
+  }
+  const choice = /^[1-9]$/.test(key) ? bench.named[Number(key) - 1] : undefined;
+  if (choice) bench.set({ flipped: choice.flipped, shiftMs: choice.shiftMs });
+  return choice !== undefined;
+}
