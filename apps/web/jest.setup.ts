@@ -41,6 +41,14 @@ const noMedia = (query: string) => ({
 });
 if (!('matchMedia' in window)) Object.assign(window, { matchMedia: noMedia });
 
+/** jsdom knows the element, but not how to open it. */
+HTMLDialogElement.prototype.showModal ??= function (this: HTMLDialogElement) {
+  this.open = true;
+};
+HTMLDialogElement.prototype.close ??= function (this: HTMLDialogElement) {
+  this.open = false;
+};
+
 function readWhole(this: Blob) {
   return new Promise<ArrayBuffer>((resolve, reject) => {
     const reader = new FileReader();
