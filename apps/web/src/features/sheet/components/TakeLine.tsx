@@ -1,5 +1,5 @@
 import { Box } from '@chakra-ui/react';
-import type { ReportResponse, TakeResponse } from '@thudline/contracts';
+import type { LineSentence, ReportResponse, TakeResponse } from '@thudline/contracts';
 import { Fragment } from 'react';
 import { Headline } from '../../../components/Headline';
 import { dateTime } from '../../../lib/format';
@@ -19,13 +19,17 @@ export function TakeLine({ take, report }: { take: TakeResponse; report: ReportR
     <>
       <TakeCaption take={take} />
       <Headline marginTop="8px" maxWidth="704px">
-        {report.line.map((sentence, i) => (
-          <Fragment key={sentence.action}>
-            {i > 0 && ' '}
-            <b>{sentence.action}</b> {sentence.reason}
-          </Fragment>
-        ))}
+        <LineWords line={report.line} />
       </Headline>
     </>
   );
+}
+
+export function LineWords({ line }: { line: LineSentence[] }) {
+  return line.map((sentence, i) => (
+    <Fragment key={sentence.action}>
+      {i > 0 && ' '}
+      <b>{sentence.action}</b> {sentence.reason}
+    </Fragment>
+  ));
 }
