@@ -6,7 +6,8 @@ start_thudline() {
   rm -f "$data/address"
   prepare_start
   read_settings "$data/settings.json" --port WEB_PORT=4700 --port API_PORT=4701 --port S3_PORT=4702 \
-    --port POSTGRES_PORT=4703 --secret S3_ACCESS_KEY --secret S3_SECRET_KEY --secret JWT_SECRET --secret CLUSTER_ID \
+    --port POSTGRES_PORT=4703 --port SMTP_PORT=4704 --port MAIL_PAGE_PORT=4705 \
+    --secret S3_ACCESS_KEY --secret S3_SECRET_KEY --secret JWT_SECRET --secret CLUSTER_ID \
     --secret POSTGRES_ADMIN_PASSWORD --secret DATABASE_PASSWORD --password DEMO_PASSWORD
   start_services
   start_application
@@ -41,7 +42,7 @@ start_services() {
   make_cluster "$cluster"
   start_postgres "$cluster"
   make_database thudline
-  start_local_services "$data/objects"
+  start_local_services "$data"
 }
 
 # People use one address: Vite's server stands there (the default), or the API itself, with the built application.
@@ -50,8 +51,9 @@ start_application() {
   [[ $production_build == no ]] || API_PORT=$WEB_PORT
   api=http://127.0.0.1:$API_PORT
   describe_object_store
-  application=(env "${object_store[@]}" DATABASE_URL="$(database_url thudline)" JWT_SECRET="$JWT_SECRET"
-    PUBLIC_URL="$address" SCRATCH_DIR="$data/scratch" HOST=127.0.0.1 PORT="$API_PORT")
+  describe_mail_service
+  application=(env "${object_store[@]}" "${mail_service[@]}" DATABASE_URL="$(database_url thudline)"
+    JWT_SECRET="$JWT_SECRET" PUBLIC_URL="$address" SCRATCH_DIR="$data/scratch" HOST=127.0.0.1 PORT="$API_PORT")
   mkdir -p "$data/scratch"
   migrate
   start_api
@@ -94,6 +96,7 @@ greet() {
     say "Sign in as the player  juno@example.org  or the teacher  oda@example.org"
     say "with the password      $DEMO_PASSWORD"
   fi
+  say "Mail it sends is shown at $mail_sink"
   say "Logs are in $log_dir. Ctrl-C stops everything."
 }
 
@@ -109,7 +112,7 @@ watch_children() {
     deaths_s+=("$SECONDS")
     if [[ $name == worker || $name == local-services ]] && ! deaths_are_too_many; then
       say "The $name process ended (code $code); starting another."
-      if [[ $name == worker ]]; then start_worker; else start_local_services "$data/objects"; fi
+      if [[ $name == worker ]]; then start_worker; else start_local_services "$data"; fi
     else
       fail_with_log "$log_dir/$name.log" "The $name process ended by itself (code $code), so everything is stopped."
     fi

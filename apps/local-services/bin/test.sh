@@ -1,4 +1,4 @@
-# `./docker-free-dev.sh test`: a throwaway database and object store on free ports, then every test, or the command given.
+# `./docker-free-dev.sh test`: throwaway services on free ports, then every test, or the command given.
 
 test_thudline() {
   install_missing_packages 'postgresql:/usr/lib/postgresql/*/bin/postgres' 'chromium:/usr/bin/chromium'
@@ -34,20 +34,22 @@ remove_older_throwaways() {
 
 start_test_services() {
   read_settings "$throwaway_files/settings.json" --port S3_PORT=0 --port POSTGRES_PORT=0 --port API_PORT=0 \
-    --secret S3_ACCESS_KEY --secret S3_SECRET_KEY --secret JWT_SECRET --secret POSTGRES_ADMIN_PASSWORD \
-    --secret DATABASE_PASSWORD --password DEMO_PASSWORD
+    --port SMTP_PORT=0 --port MAIL_PAGE_PORT=0 --secret S3_ACCESS_KEY --secret S3_SECRET_KEY \
+    --secret JWT_SECRET --secret POSTGRES_ADMIN_PASSWORD --secret DATABASE_PASSWORD --password DEMO_PASSWORD
   cluster=$throwaway_cluster/cluster
   make_cluster "$cluster" --no-sync
   start_postgres "$cluster" -c fsync=off -c synchronous_commit=off -c full_page_writes=off -c max_connections=200
   make_database thudline_browser
-  start_local_services "$throwaway_files/objects"
+  start_local_services "$throwaway_files"
 }
 
 # The API's tests clone databases through TEST_DATABASE_URL; the browser's have one application on one database.
 describe_test_environment() {
   describe_object_store
+  describe_mail_service
   mkdir -p "$throwaway_files/scratch" "$throwaway_files/tmp"
-  test_environment=(env "${object_store[@]}" TEST_DATABASE_URL="$(admin_database_url)"
+  test_environment=(env "${object_store[@]}" "${mail_service[@]}" MAIL_SINK_URL="$mail_sink"
+    TEST_DATABASE_URL="$(admin_database_url)"
     BROWSER_DATABASE_URL="$(database_url thudline_browser)" BROWSER_API_PORT="$API_PORT" JWT_SECRET="$JWT_SECRET"
     SCRATCH_DIR="$throwaway_files/scratch" TMPDIR="$throwaway_files/tmp" DEMO_PASSWORD="$DEMO_PASSWORD"
     TEST_RESULTS_DIR="${TEST_RESULTS_DIR:-$throwaway_files/results}")

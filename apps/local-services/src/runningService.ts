@@ -1,7 +1,8 @@
 import { createServer, type RequestListener } from 'node:http';
 import { type AddressInfo } from 'node:net';
 
-const loopback = '127.0.0.1';
+/** The only address our services listen on. */
+export const loopback = '127.0.0.1';
 
 export interface RunningService {
   /** Such as `http://127.0.0.1:4702`. */
