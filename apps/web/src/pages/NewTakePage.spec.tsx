@@ -6,7 +6,7 @@ import { handOverFiles } from '../features/upload/droppedFiles';
 import { fakeServer, json, refusal, type FakeRoutes } from '../testing/fakeServer';
 import { fakeUploads } from '../testing/fakeXhr';
 import { renderPage } from '../testing/renderPage';
-import { measurement, sampleTake, takeId } from '../testing/sampleData';
+import { measurement, sampleReport, sampleTake, takeId } from '../testing/sampleData';
 import { sampleList, sampleListItem } from '../testing/sampleList';
 import { toneFile } from '../testing/sampleWav';
 import { NewTakePage } from './NewTakePage';
@@ -51,6 +51,11 @@ async function sendPair(page: ReturnType<typeof open>) {
   await waitFor(() => expect(page.uploads).toHaveLength(1));
   return page.uploads[0];
 }
+
+const fromJson = (fields: Record<string, FormDataEntryValue>) =>
+  Object.fromEntries(
+    ['tracks', 'doneActions', 'tags'].map((name) => [name, JSON.parse(fields[name] as string) as unknown]),
+  );
 
 describe('the page that adds a take', () => {
   it('shows someone new the check take, with the caution for their ears', async () => {
@@ -174,15 +179,14 @@ describe('sending', () => {
       'title',
       'note',
       'recordedAt',
+      'doneActions',
+      'tags',
       'tracks',
       'files',
       'files',
     ]);
     const fields = Object.fromEntries([...form!.entries()].filter(([name]) => name !== 'files'));
-    const request = createTakeRequest.parse({
-      ...fields,
-      tracks: JSON.parse(fields.tracks as string) as unknown,
-    });
+    const request = createTakeRequest.parse({ ...fields, ...fromJson(fields) });
     expect(request).toMatchObject({ title: 'overhead at 100', note: 'Same groove.' });
     expect(form!.getAll('files').map((file) => (file as File).name)).toEqual([
       'kick_0412.wav',
@@ -191,6 +195,39 @@ describe('sending', () => {
     await page.uploads[0].answer(201, { ...kept, title: 'overhead at 100', note: 'Same groove.' });
     await waitFor(() => expect(page.address()).toBe(`/takes/${takeId}`));
     expect(page.requests.some(({ method }) => method === 'PATCH')).toBe(false);
+  });
+
+  it('carries the ticks of the sheet before over, corrected here', async () => {
+    const before = sampleTake({ tickedActions: ['flip-overhead'] });
+    const page = open({
+      [`GET ${paths.take(takeId)}`]: json(before),
+      [`GET ${paths.takes}`]: json(sampleList([sampleListItem({ id: takeId })])),
+      [`GET ${paths.report(takeId)}`]: json(sampleReport()),
+    });
+    await pick(page.container, kick(), overhead());
+    expect(
+      await screen.findByRole('heading', { name: 'What you changed since take 14' }),
+    ).toBeInTheDocument();
+    expect(screen.getByRole('checkbox', { name: /Press the polarity switch/ })).toBeChecked();
+    await userEvent.click(screen.getByRole('checkbox', { name: /Turn the kick preamp down/ }));
+    await measure();
+    await waitFor(() => expect(page.uploads).toHaveLength(1));
+    const form = page.uploads[0].form!;
+    expect(form.get('followsTakeId')).toBe(takeId);
+    expect(JSON.parse(form.get('doneActions') as string)).toEqual(['flip-overhead', 'kick-gain']);
+  });
+
+  it('lets a take follow no other', async () => {
+    const page = open({
+      [`GET ${paths.take(takeId)}`]: json(sampleTake()),
+      [`GET ${paths.takes}`]: json(sampleList([sampleListItem({ id: takeId })])),
+      [`GET ${paths.report(takeId)}`]: json(sampleReport()),
+    });
+    await pick(page.container, kick(), overhead());
+    await userEvent.click(await screen.findByRole('button', { name: 'it doesn’t follow take 14' }));
+    await measure();
+    await waitFor(() => expect(page.uploads).toHaveLength(1));
+    expect(page.uploads[0].form!.get('followsTakeId')).toBeNull();
   });
 
   it('shows how much of each file is there', async () => {

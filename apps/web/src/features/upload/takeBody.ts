@@ -1,13 +1,14 @@
 import type { CreateTakeRequest } from '@thudline/contracts';
 import type { Arrangement } from './arrangement';
 import { recordedAt } from './recordedAt';
+import { doneActions, type PreviousTake } from './previousTake';
 import type { UploadState } from './uploadState';
 
 /** The text fields of one upload. */
 export function takeRequest(
   state: UploadState,
   { slots, used }: Arrangement,
-  nowMs: number,
+  { previous, nowMs }: { previous: PreviousTake | null; nowMs: number },
 ): CreateTakeRequest {
   if (!state.uploadKey) throw new Error('An upload needs its key before it is sent.');
   return {
@@ -18,6 +19,10 @@ export function takeRequest(
       used.map(({ file }) => file),
       nowMs,
     ),
+    ...(previous && state.follows
+      ? { followsTakeId: previous.take.id, doneActions: doneActions(previous, state.tickedHere) }
+      : { doneActions: [] }),
+    tags: [],
     tracks: slots.map(({ role, channel, fileId }) => ({
       role,
       channel,
@@ -33,6 +38,9 @@ export function takeForm(request: CreateTakeRequest, files: readonly File[]): Fo
   form.append('title', request.title);
   form.append('note', request.note);
   if (request.recordedAt) form.append('recordedAt', request.recordedAt);
+  if (request.followsTakeId) form.append('followsTakeId', request.followsTakeId);
+  form.append('doneActions', JSON.stringify(request.doneActions));
+  form.append('tags', JSON.stringify(request.tags));
   form.append('tracks', JSON.stringify(request.tracks));
   for (const file of files) form.append('files', file, file.name);
   return form;

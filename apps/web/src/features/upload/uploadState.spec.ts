@@ -61,7 +61,9 @@ describe('which file is which', () => {
       ['take.wav:0', 'overhead', 'low-end'],
       ['take.wav:1', 'kick', 'low-end'],
     ]);
-    expect(takeRequest({ ...state, uploadKey: key }, arranged(state), 1).tracks).toEqual([
+    expect(
+      takeRequest({ ...state, uploadKey: key }, arranged(state), { previous: null, nowMs: 1 }).tracks,
+    ).toEqual([
       { role: 'overhead', fileIndex: 0, channel: 0 },
       { role: 'kick', fileIndex: 0, channel: 1 },
     ]);

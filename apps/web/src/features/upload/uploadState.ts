@@ -20,6 +20,10 @@ export interface UploadState {
   chosen: ChosenRole | null;
   title: string;
   note: string;
+  /** Whether the take follows the one before it. */
+  follows: boolean;
+  /** Ids of the earlier sheet's actions as ticked on this page; null until something was ticked here. */
+  tickedHere: string[] | null;
   /** The same until files or roles change, so that a take whose answer was lost is not kept twice. */
   uploadKey: string | null;
   sending: Sending;
@@ -33,6 +37,8 @@ export type UploadAction =
   | { type: 'roleChosen'; chosen: ChosenRole }
   | { type: 'titleWritten'; title: string }
   | { type: 'noteWritten'; note: string }
+  | { type: 'followsChosen'; follows: boolean }
+  | { type: 'changesTicked'; actionIds: string[] }
   | { type: 'sendStarted'; newKey: string; atMs: number }
   | { type: 'progressed'; report: ProgressReport }
   | { type: 'arrived'; takeId: string }
@@ -45,6 +51,8 @@ export const emptyUpload: UploadState = {
   chosen: null,
   title: '',
   note: '',
+  follows: true,
+  tickedHere: null,
   uploadKey: null,
   sending: { phase: 'choosing' },
 };
@@ -72,6 +80,10 @@ export function uploadReducer(state: UploadState, action: UploadAction): UploadS
       return { ...state, title: action.title };
     case 'noteWritten':
       return { ...state, note: action.note };
+    case 'followsChosen':
+      return changed(state, { follows: action.follows });
+    case 'changesTicked':
+      return changed(state, { tickedHere: action.actionIds });
     default:
       return sendingReducer(state, action);
   }

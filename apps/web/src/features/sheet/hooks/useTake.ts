@@ -1,16 +1,17 @@
 import { paths, takeResponse, type TakeResponse } from '@thudline/contracts';
 import useSWR from 'swr';
 import { requestJson } from '../../../lib/apiClient';
+import { useMeasurementEvents } from '../../takes/hooks/useMeasurementEvents';
 import { isMeasuring } from '../../takes/rowWords';
 
-const pollMs = 700;
-
-/** One take; asked again while it is being measured. */
-export function useTake(takeId: string) {
-  const { data, error, mutate } = useSWR<TakeResponse, Error>(
-    paths.take(takeId),
-    (path: string) => requestJson(path, takeResponse),
-    { refreshInterval: (take) => (take && isMeasuring(take.measurement) ? pollMs : 0) },
+/** One take, followed while it is being measured; null asks for none. */
+export function useTake(takeId: string | null) {
+  const { data, error, mutate } = useSWR<TakeResponse, Error>(takeId && paths.take(takeId), (path: string) =>
+    requestJson(path, takeResponse),
   );
+  useMeasurementEvents({
+    takeIds: data && isMeasuring(data.measurement) ? [data.id] : [],
+    askAgain: () => void mutate(),
+  });
   return { take: data, error, retry: () => void mutate() };
 }

@@ -3,22 +3,28 @@ import { TextArea } from '../../../components/TextArea';
 import { TextField } from '../../../components/TextField';
 import type { NewTake } from '../hooks/useNewTake';
 
-/** Title and note; both may still be written while the files travel. */
+/** What the take is called; it may still be written while the files travel. */
 export function AboutTake({ newTake }: { newTake: NewTake }) {
   return (
-    <Box as="section" aria-labelledby="about-take" marginTop="26px">
+    <Box as="section" aria-labelledby="about-take" marginTop="26px" maxWidth={{ base: 'none', lg: '484px' }}>
       <chakra.h2 id="about-take" fontSize="20px" lineHeight="27px" fontWeight={600} marginBottom="8px">
         About this take
       </chakra.h2>
-      <Box maxWidth={{ base: 'none', lg: '484px' }} marginBottom="16px">
-        <TextField
-          label="Title"
-          value={newTake.state.title}
-          onChange={newTake.writeTitle}
-          maxLength={120}
-          autoComplete="off"
-        />
-      </Box>
+      <TextField
+        label="Title"
+        value={newTake.state.title}
+        onChange={newTake.writeTitle}
+        maxLength={120}
+        autoComplete="off"
+      />
+    </Box>
+  );
+}
+
+/** What is worth remembering; it, too, may still be written while the files travel. */
+export function NewTakeNote({ newTake }: { newTake: NewTake }) {
+  return (
+    <Box marginTop="16px">
       <TextArea label="Note" value={newTake.state.note} onChange={newTake.writeNote} maxLength={4000} />
     </Box>
   );

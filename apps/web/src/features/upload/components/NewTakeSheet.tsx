@@ -4,18 +4,26 @@ import { PageLoading } from '../../../components/PageLoading';
 import { SheetPaper } from '../../../components/SheetPaper';
 import { headline } from '../headline';
 import { useNewTake, type NewTake } from '../hooks/useNewTake';
+import { usePreviousTake } from '../hooks/usePreviousTake';
 import { fileProgress } from '../uploadProgress';
-import { AboutTake } from './AboutTake';
+import { AboutTake, NewTakeNote } from './AboutTake';
 import { DropAnywhere, type ChooseFiles } from './DropAnywhere';
 import { DropBox } from './DropBox';
 import { FileRows } from './FileRows';
 import { FirstRun } from './FirstRun';
 import { LeaveQuestion } from './LeaveQuestion';
 import { SendRow } from './SendRow';
+import { WhatChanged } from './WhatChanged';
 
 /** `firstTake` is undefined while it isn't known whether there are takes already. */
-export function NewTakeSheet({ firstTake }: { firstTake: boolean | undefined }) {
-  const newTake = useNewTake();
+export function NewTakeSheet({
+  firstTake,
+  followsTakeId,
+}: {
+  firstTake: boolean | undefined;
+  followsTakeId: string | null;
+}) {
+  const newTake = useNewTake(usePreviousTake(followsTakeId));
   const empty = newTake.state.files.length === 0;
   return (
     <DropAnywhere onFiles={newTake.pick}>
@@ -53,7 +61,15 @@ function Upload({ newTake, choose }: { newTake: NewTake; choose: ChooseFiles }) 
       ) : (
         <FileRows newTake={newTake} choose={choose} />
       )}
-      <AboutTake newTake={newTake} />
+      <chakra.div
+        display="grid"
+        gridTemplateColumns={{ base: '1fr', lg: newTake.previous ? '1fr 1fr' : '1fr' }}
+        columnGap="56px"
+      >
+        <WhatChanged newTake={newTake} />
+        <AboutTake newTake={newTake} />
+      </chakra.div>
+      <NewTakeNote newTake={newTake} />
       <SendRow newTake={newTake} />
     </>
   );

@@ -2,6 +2,7 @@ import { useEffect, useReducer, useRef, type Dispatch } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { arrangement, type ChosenRole } from '../arrangement';
 import { takeHandedOverFiles } from '../droppedFiles';
+import { doneActions, type PreviousTake } from '../previousTake';
 import { readPickedFile } from '../readPickedFile';
 import { newUploadKey } from '../uploadKey';
 import {
@@ -15,22 +16,29 @@ import { useLeaveGuard } from './useLeaveGuard';
 import { useSending } from './useSending';
 
 /** The upload page: what was dropped, what is written about it, and sending it. */
-export function useNewTake() {
+export function useNewTake(previous: PreviousTake | null) {
   const [state, dispatch] = useReducer(uploadReducer, emptyUpload, withHandedOverFiles);
   const leaving = useLeaveGuard(state.sending.phase === 'sending');
   useOpenSheet(state.sending);
   useReading(state.files, dispatch);
   const arranged = arrangement(state.files, state.chosen);
-  const { notYet, upload, stop, forget } = useSending(state, arranged, dispatch);
+  const { notYet, upload, stop, forget } = useSending({ state, arranged, previous, dispatch });
 
   const pick = (files: readonly File[], how: 'added' | 'replaced' = 'added') => {
     forget();
     if (files.length > 0) dispatch({ type: how, files: files.map(withId) });
   };
 
+  const done = previous ? doneActions(previous, state.tickedHere) : [];
   return {
     state,
     arranged,
+    previous,
+    follows: state.follows,
+    done,
+    setFollows: (follows: boolean) => dispatch({ type: 'followsChosen', follows }),
+    tick: (id: string, on: boolean) =>
+      dispatch({ type: 'changesTicked', actionIds: on ? [...done, id] : done.filter((each) => each !== id) }),
     notYet,
     leaving,
     pick,

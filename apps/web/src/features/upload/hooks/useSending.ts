@@ -3,13 +3,24 @@ import { useEffect, useRef, useState, type Dispatch } from 'react';
 import { ApiError } from '../../../lib/apiClient';
 import { canSend, type Arrangement } from '../arrangement';
 import { whyNotYet } from '../headline';
+import type { PreviousTake } from '../previousTake';
 import { takeRequest } from '../takeBody';
 import { newUploadKey } from '../uploadKey';
 import type { UploadAction, UploadState } from '../uploadState';
 import { useTakeUpload } from './useTakeUpload';
 
 /** Sends what is arranged, and says why not where that can't be done yet. */
-export function useSending(state: UploadState, arranged: Arrangement, dispatch: Dispatch<UploadAction>) {
+export function useSending({
+  state,
+  arranged,
+  previous,
+  dispatch,
+}: {
+  state: UploadState;
+  arranged: Arrangement;
+  previous: PreviousTake | null;
+  dispatch: Dispatch<UploadAction>;
+}) {
   const [notYet, setNotYet] = useState('');
   const { send, stop } = useTakeUpload();
   const latest = useLatest(state);
@@ -18,7 +29,7 @@ export function useSending(state: UploadState, arranged: Arrangement, dispatch: 
     const uploadKey = state.uploadKey ?? newUploadKey();
     dispatch({ type: 'sendStarted', newKey: uploadKey, atMs: Date.now() });
     const take = await send({
-      request: takeRequest({ ...state, uploadKey }, arranged, Date.now()),
+      request: takeRequest({ ...state, uploadKey }, arranged, { previous, nowMs: Date.now() }),
       files: arranged.used.map(({ file }) => file),
       onProgress: (sent) => dispatch({ type: 'progressed', report: { ...sent, atMs: Date.now() } }),
       wordsNow: () => ({ title: latest.current.title, note: latest.current.note }),
