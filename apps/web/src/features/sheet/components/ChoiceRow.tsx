@@ -6,42 +6,49 @@ import type { useHitExcerpt } from '../hooks/useHitExcerpt';
 import type { PairBenchProps } from './PairBench';
 import { PlayMark } from './PlayMark';
 
-interface ChoiceRowProps extends Omit<PairBenchProps, 'pair'> {
+interface ChoiceRowProps extends Omit<PairBenchProps, 'pair' | 'singleKeys'> {
   hitExcerpt: ReturnType<typeof useHitExcerpt>;
   hitNumber: number;
 }
 
 /** Play a hit on repeat, go to another, and go through the choices. */
 export function ChoiceRow(props: ChoiceRowProps) {
-  const { bench, listening, hitExcerpt, hitNumber } = props;
-  const { excerpt } = hitExcerpt;
-  const playsHit = listening.playing === 'hit';
+  const { bench, listening, canListen } = props;
   return (
     <Box marginTop="14px" _print={{ display: 'none' }}>
       <Flex columnGap={{ base: '14px', lg: '16px' }} rowGap="10px" alignItems="center" wrap="wrap">
-        <Button
-          look="outline"
-          disabled={!excerpt}
-          aria-pressed={playsHit}
-          onClick={() => (playsHit ? listening.stop() : excerpt && void listening.playHit(excerpt))}
-        >
-          <PlayMark playing={playsHit} />
-          {playsHit ? `Stop hit ${hitNumber}` : `Hit ${hitNumber}, on repeat`}
-        </Button>
-        <HitSteps {...props} />
+        {canListen && <PlayHit {...props} />}
+        {canListen && <HitSteps {...props} />}
         <Choices bench={bench} />
       </Flex>
-      <Box fontSize="caption" color="ink.muted" marginTop="10px" lineHeight="19px">
-        Choices are matched from 1 to 8 kHz, so that the low end can differ
-        {Math.abs(listening.matchDb) >= 0.05 ? ` (this one ${signedDecibels(listening.matchDb)})` : ''}.
-        Listen on headphones, not too loud: small speakers can’t play this low.
-      </Box>
+      {canListen && (
+        <Box fontSize="caption" color="ink.muted" marginTop="10px" lineHeight="19px">
+          Choices are matched from 1 to 8 kHz, so that the low end can differ
+          {Math.abs(listening.matchDb) >= 0.05 ? ` (this one ${signedDecibels(listening.matchDb)})` : ''}.
+          Listen on headphones, not too loud: small speakers can’t play this low.
+        </Box>
+      )}
       {listening.failure && (
         <Box role="alert" color="fix" fontSize="small" marginTop="6px">
           {listening.failure}
         </Box>
       )}
     </Box>
+  );
+}
+
+function PlayHit({ listening, hitExcerpt: { excerpt }, hitNumber }: ChoiceRowProps) {
+  const plays = listening.playing === 'hit';
+  return (
+    <Button
+      look="outline"
+      disabled={!excerpt}
+      aria-pressed={plays}
+      onClick={() => (plays ? listening.stop() : excerpt && void listening.playHit(excerpt))}
+    >
+      <PlayMark playing={plays} />
+      {plays ? `Stop hit ${hitNumber}` : `Hit ${hitNumber}, on repeat`}
+    </Button>
   );
 }
 

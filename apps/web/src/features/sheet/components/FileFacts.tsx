@@ -13,9 +13,13 @@ export function FileFacts({ take, dspVersion }: { take: TakeResponse; dspVersion
         );
         return (
           <chakra.li key={file.id} borderBottom="1px solid" borderColor="rule" paddingY="7px">
-            <a href={paths.takeFile(take.id, file.id)} download>
-              {file.name}
-            </a>
+            {take.rights.download ? (
+              <a href={paths.takeFile(take.id, file.id)} download>
+                {file.name}
+              </a>
+            ) : (
+              file.name
+            )}
             : {named.join(', ')}. {file.encoding}, {file.sampleRateHz / 1000} kHz,{' '}
             {plural(file.channels, 'channel')}, {clock(file.durationS, true)}, {bytes(file.bytes)}
             <Box color="ink.muted" fontSize="caption" overflowWrap="anywhere">

@@ -43,6 +43,7 @@ export function MeasuredSheet({ take, report, settings, ...slots }: MeasuredShee
       <AddingUpSection
         {...{ report, pair, bench, listening, kickHits, chosenHit }}
         singleKeys={settings.singleKeys}
+        canListen={take.rights.listen}
         onChooseHit={setChosenHit}
       />
       <WholeTakeSection {...{ report, listening, chosenHit }} canListen={take.rights.listen} />

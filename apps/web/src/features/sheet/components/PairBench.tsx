@@ -1,21 +1,20 @@
 import { Box } from '@chakra-ui/react';
 import type { ReportResponse } from '@thudline/contracts';
-import { choiceLowEnd, type PairSpectrum } from '@thudline/dsp';
+import type { PairSpectrum } from '@thudline/dsp';
 import { useState } from 'react';
 import { TextButton } from '../../../components/Button';
-import type { NamedChoice } from '../hooks/choiceNames';
 import type { Bench } from '../hooks/useChoice';
 import { useHitExcerpt } from '../hooks/useHitExcerpt';
 import { useSheetKeys } from '../hooks/useSheetKeys';
 import type { Listening } from '../hooks/useListening';
 import type { usePairSpectrum } from '../hooks/usePairSpectrum';
-import { LowEndLine } from '../pictures/LowEndLine';
 import type { TraceBand } from '../pictures/pairTraceLayout';
 import { WhereItHelps } from '../pictures/WhereItHelps';
 import { ChoiceFigures } from './ChoiceFigures';
 import { ChoiceRow } from './ChoiceRow';
 import { ChoiceSentence } from './ChoiceSentence';
 import { HitTrace } from './HitTrace';
+import { LowEndOfChoices } from './LowEndOfChoices';
 import { PictureTitle } from './SheetSection';
 import { WhereKey } from './WhereKey';
 
@@ -30,6 +29,8 @@ export interface PairBenchProps {
   onChooseHit: (hitIndex: number) => void;
   /** Whether single keys act. */
   singleKeys: boolean;
+  /** Without it there is nothing to hear, nor the samples of a hit to look at. */
+  canListen: boolean;
 }
 
 /** Where choices are looked at and heard: everything below follows the one that is chosen. */
@@ -49,35 +50,24 @@ export function PairBench(props: PairBenchProps) {
   return <LoadedBench {...props} spectrum={spectrum} />;
 }
 
-/** Without any low end in either file the two neither help nor harm. */
-const lowEndDb = (spectrum: PairSpectrum, choice: NamedChoice) => choiceLowEnd(spectrum, choice) ?? 0;
-
-const tick = (spectrum: PairSpectrum, choice: NamedChoice) => ({
-  levelDb: lowEndDb(spectrum, choice),
-  label: choice.tickLabel,
-});
-
 function LoadedBench({ spectrum, ...props }: PairBenchProps & { spectrum: PairSpectrum }) {
-  const { report, bench, kickHits, chosenHit } = props;
-  const { chosen, asRecorded, named } = bench;
-  const hitExcerpt = useHitExcerpt(report, chosenHit);
+  const { report, bench, kickHits, chosenHit, canListen } = props;
+  const { chosen, asRecorded } = bench;
+  const hitExcerpt = useHitExcerpt(report, chosenHit, canListen);
   const [band, setBand] = useState<TraceBand>('low');
   const hitNumber = kickHits.indexOf(chosenHit) + 1;
-  const others = named.filter((choice) => choice !== chosen && choice !== asRecorded);
   useSheetKeys({ ...props, excerpt: hitExcerpt.excerpt });
   return (
     <>
       <ChoiceRow {...props} hitExcerpt={hitExcerpt} hitNumber={hitNumber} />
       <ChoiceSentence bench={bench} sampleRateHz={report.sampleRateHz} temperatureC={report.temperatureC} />
       <PictureTitle>Low end of the two added</PictureTitle>
-      <LowEndLine
-        recordedDb={lowEndDb(spectrum, asRecorded)}
-        chosen={{ ...tick(spectrum, chosen), label: chosen.label }}
-        others={others.map((choice) => tick(spectrum, choice))}
-      />
-      <HitTrace
-        {...{ report, chosen, hitExcerpt, hitNumber, band, setBand, hitS: report.hits[chosenHit].timeS }}
-      />
+      <LowEndOfChoices spectrum={spectrum} bench={bench} />
+      {canListen && (
+        <HitTrace
+          {...{ report, chosen, hitExcerpt, hitNumber, band, setBand, hitS: report.hits[chosenHit].timeS }}
+        />
+      )}
       <ChoiceFigures {...{ spectrum, asRecorded, chosen }} />
       <PictureTitle>Where it helps, from low to high</PictureTitle>
       <WhereItHelps {...{ spectrum, asRecorded, chosen }} />

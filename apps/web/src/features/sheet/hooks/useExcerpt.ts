@@ -26,13 +26,16 @@ export function decodeExcerpt(bytes: Uint8Array, headers: Headers): Excerpt {
 }
 
 /** Both microphones' samples around one hit. */
-export function useExcerpt(takeId: string, { startS, durationS }: { startS: number; durationS: number }) {
+export function useExcerpt(
+  takeId: string | null,
+  { startS, durationS }: { startS: number; durationS: number },
+) {
   const query = new URLSearchParams({
     startS: startS.toFixed(4),
     durationS: durationS.toFixed(4),
   }).toString();
   const { data, error, mutate } = useSWR<Excerpt, Error>(
-    `${paths.excerpt(takeId)}?${query}`,
+    takeId && `${paths.excerpt(takeId)}?${query}`,
     async (path: string) => {
       const { bytes, headers } = await requestBytes(path);
       return decodeExcerpt(bytes, headers);

@@ -5,10 +5,10 @@ import { useExcerpt } from './useExcerpt';
 const beforeS = 0.06;
 const afterS = 0.94;
 
-/** The samples around one of the report's hits. */
-export function useHitExcerpt(report: ReportResponse, hitIndex: number) {
+/** The samples around one of the report's hits; not asked for by those who may not listen. */
+export function useHitExcerpt(report: ReportResponse, hitIndex: number, canListen = true) {
   const hitS = report.hits[hitIndex].timeS;
   const startS = Math.max(0, hitS - beforeS);
   const endS = Math.min(report.durationS, hitS + afterS);
-  return useExcerpt(report.takeId, { startS, durationS: endS - startS });
+  return useExcerpt(canListen ? report.takeId : null, { startS, durationS: endS - startS });
 }
