@@ -1,0 +1,47 @@
+import type { ShareResponse } from '@thudline/contracts';
+import { isOpen, openedWords, openUntilWords, rightsWords } from './shareWords';
+
+const now = new Date('2026-12-04T20:00:00');
+const share = (overrides: Partial<ShareResponse> = {}): ShareResponse => ({
+  id: '01890000-0000-7000-8000-000000000101',
+  takeId: '01890000-0000-7000-8000-000000000001',
+  question: '',
+  canListen: true,
+  canDownload: false,
+  createdAt: '2026-12-02T19:00:00.000Z',
+  expiresAt: '2026-12-11T12:00:00.000Z',
+  revokedAt: null,
+  openedAt: null,
+  openCount: 0,
+  ...overrides,
+});
+
+describe('words about a link', () => {
+  it('says until when it opens', () => {
+    expect(openUntilWords(share())).toBe('open until 11 Dec');
+    expect(openUntilWords(share({ expiresAt: null }))).toBe('open until it is ended');
+  });
+
+  it('says whether it was opened, when last and how often', () => {
+    const openedAt = new Date('2026-12-04T18:15:00').toISOString();
+    expect(openedWords(share(), now)).toBe('Not opened yet.');
+    expect(openedWords(share({ openedAt, openCount: 1 }), now)).toBe('Opened today 18:15.');
+    expect(openedWords(share({ openedAt, openCount: 2 }), now)).toBe('Opened today 18:15, twice so far.');
+    expect(openedWords(share({ openedAt, openCount: 5 }), now)).toBe('Opened today 18:15, 5 times so far.');
+  });
+
+  it('says what it allows', () => {
+    expect(rightsWords(share())).toBe('Open until 11 Dec, with listening.');
+    expect(rightsWords(share({ canDownload: true }))).toBe(
+      'Open until 11 Dec, with listening and the files.',
+    );
+    expect(rightsWords(share({ canListen: false }))).toBe('Open until 11 Dec, to read only.');
+  });
+
+  it('knows an ended and a timed-out link from an open one', () => {
+    expect(isOpen(share(), now)).toBe(true);
+    expect(isOpen(share({ expiresAt: null }), now)).toBe(true);
+    expect(isOpen(share({ expiresAt: '2026-12-03T12:00:00.000Z' }), now)).toBe(false);
+    expect(isOpen(share({ revokedAt: '2026-12-03T12:00:00.000Z' }), now)).toBe(false);
+  });
+});

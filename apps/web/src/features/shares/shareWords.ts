@@ -1,0 +1,33 @@
+import type { OpenedShareResponse, ShareResponse } from '@thudline/contracts';
+import { relativeDate } from '../takes/relativeDate';
+
+export const exampleQuestion = 'What would you change first?';
+
+const dayMonth = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'short' });
+
+/** "open until 11 Dec", or until somebody ends it. */
+export function openUntilWords({ expiresAt }: Pick<OpenedShareResponse, 'expiresAt'>): string {
+  return expiresAt ? `open until ${dayMonth.format(new Date(expiresAt))}` : 'open until it is ended';
+}
+
+export const isOpen = ({ revokedAt, expiresAt }: ShareResponse, now: Date): boolean =>
+  revokedAt === null && (expiresAt === null || new Date(expiresAt) > now);
+
+function timesWords(count: number): string {
+  if (count <= 1) return '';
+  return count === 2 ? ', twice so far' : `, ${count} times so far`;
+}
+
+/** "Opened today 20:15, twice so far." */
+export function openedWords({ openedAt, openCount }: ShareResponse, now: Date): string {
+  if (!openedAt) return 'Not opened yet.';
+  return `Opened ${relativeDate(openedAt, now)}${timesWords(openCount)}.`;
+}
+
+/** "Open until 11 Dec, with listening." */
+export function rightsWords(share: ShareResponse): string {
+  const rights = [share.canListen && 'listening', share.canDownload && 'the files'].filter(Boolean);
+  const until = openUntilWords(share);
+  const capital = until.charAt(0).toUpperCase() + until.slice(1);
+  return `${capital}, ${rights.length > 0 ? `with ${rights.join(' and ')}` : 'to read only'}.`;
+}
