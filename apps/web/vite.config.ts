@@ -12,5 +12,5 @@ export default defineConfig({
     strictPort: true,
     proxy: { '/api': { target: apiUrl } },
   },
-  build: { target: 'es2022', sourcemap: false },
+  build: { target: 'es2022', sourcemap: false, manifest: true },
 });
