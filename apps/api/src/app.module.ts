@@ -11,6 +11,7 @@ import { HealthModule } from './health/health.module';
 import { loggerModule } from './logging/logger.module';
 import { MeasurementsModule } from './measuring/measurements.module';
 import { ReportsModule } from './reports/reports.module';
+import { SharesModule } from './shares/shares.module';
 import { SoundModule } from './sound/sound.module';
 import { TakesModule } from './takes/takes.module';
 import { UsersModule } from './users/users.module';
@@ -31,6 +32,7 @@ export class AppModule {
         MeasurementsModule,
         ReportsModule,
         SoundModule,
+        SharesModule,
         HealthModule,
       ],
       providers: [

@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import { paths } from '@thudline/contracts';
 import { openApiDocument } from '../src/open-api/open-api';
 import { Browser, joined, Person } from './support/person';
+import { openedBy, sharedBy } from './support/shares';
 import { startTestApp, TestApp } from './support/test-app';
 
 interface Route {
@@ -26,6 +27,7 @@ const openToAnyone = new Set([
   `post ${paths.refresh}`,
   `post ${paths.signOut}`,
   `get ${paths.health}`,
+  `post ${paths.openShare}`,
 ]);
 const isDocumentation = ({ path }: Route) => path.startsWith(paths.docs);
 /** How Nest hangs middleware (logging, the identity map) into the router: it passes every request on. */
@@ -96,6 +98,40 @@ describe('every route there is', () => {
       expect([route, others.body]).toEqual([route, none.body]);
     }
     await juno.get(paths.take(take.id)).expect(200);
+  });
+
+  it('of a take answers 404 to a guest who opened a link to another take', async () => {
+    const [shown, hidden] = [await juno.makeTake(), await juno.makeTake()];
+    const guest = new Browser(test);
+    await openedBy(guest, await sharedBy(juno, shown, { canDownload: true }));
+    for (const route of takeRoutes()) {
+      const response = await send(guest, filled(route, hidden.id, hidden.files[0].id));
+      expect([route, response.status]).toEqual([route, 404]);
+    }
+    await guest.get(paths.take(shown.id)).expect(200);
+  });
+
+  it('that a guest with every permission may call is one that only reads', async () => {
+    const take = await juno.makeTake();
+    const guest = new Browser(test);
+    await openedBy(guest, await sharedBy(juno, take, { canDownload: true }));
+    const open: string[] = [];
+    for (const route of routes.filter(({ method, path }) => !openToAnyone.has(`${method} ${path}`))) {
+      const response = await send(guest, filled(route, take.id, take.files[0].id));
+      if (![401, 403].includes(response.status)) open.push(`${route.method} ${route.path}`);
+    }
+    expect(open.sort()).toEqual(
+      [
+        paths.take(':id'),
+        paths.report(':id'),
+        paths.pairSpectrum(':id'),
+        paths.excerpt(':id'),
+        paths.listen(':id'),
+        paths.takeFile(':id', ':fileId'),
+      ]
+        .map((path) => `get ${path}`)
+        .sort(),
+    );
   });
 
   it('of a take answers 404 to its owner once it is deleted', async () => {

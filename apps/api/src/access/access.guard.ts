@@ -1,13 +1,16 @@
-import { CanActivate, ExecutionContext, Injectable } from '@nestjs/common';
+import { CanActivate, ExecutionContext, Inject, Injectable } from '@nestjs/common';
 import { Reflector } from '@nestjs/core';
 import { Role } from '@thudline/contracts';
 import { SessionsService } from '../auth/sessions.service';
 import { accessCookieOf } from '../auth/auth-cookies';
+import { Config } from '../config/config';
+import { CONFIG } from '../config/config.module';
 import { AppError, notFound } from '../errors/app-error';
+import { shareIdsOf } from '../shares/share-cookie';
 import { ACCESS, AccessRule } from './access.decorator';
 import { AccessService } from './access.service';
 import { TakeRight, TakeRights } from './take-rights';
-import { notSignedIn, Viewer, ViewerRequest } from './viewer';
+import { Asker, notSignedIn, Viewer, ViewerRequest } from './viewer';
 
 /** Holds every route to the access it declares. */
 @Injectable()
@@ -16,6 +19,7 @@ export class AccessGuard implements CanActivate {
     private readonly reflector: Reflector,
     private readonly sessions: SessionsService,
     private readonly access: AccessService,
+    @Inject(CONFIG) private readonly config: Config,
   ) {}
 
   async canActivate(context: ExecutionContext): Promise<boolean> {
@@ -24,28 +28,33 @@ export class AccessGuard implements CanActivate {
     if (!rule) throw forbidden();
     if (rule.kind === 'anyone') return true;
     const request = context.switchToHttp().getRequest<ViewerRequest>();
-    const viewer = await this.viewerOf(request);
-    request.viewer = viewer;
-    if (rule.kind === 'role') this.checkRole(viewer, rule.role);
-    if (rule.kind === 'take')
-      request.rights = await this.checkTake(viewer, String(request.params.id), rule.right);
+    const asker = await this.askerOf(request);
+    if (asker.viewer) request.viewer = asker.viewer;
+    if (rule.kind === 'take') {
+      request.rights = await this.rightsTo(String(request.params.id), asker, rule.right);
+      return true;
+    }
+    if (!asker.viewer) throw notSignedIn();
+    if (rule.kind === 'role') this.checkRole(asker.viewer, rule.role);
     return true;
   }
 
-  private async viewerOf(request: ViewerRequest): Promise<Viewer> {
+  private async askerOf(request: ViewerRequest): Promise<Asker> {
     const token = accessCookieOf(request);
-    const viewer = token ? await this.sessions.findViewer(token) : null;
-    if (!viewer) throw notSignedIn();
-    return viewer;
+    return {
+      viewer: token ? await this.sessions.findViewer(token) : null,
+      shareIds: shareIdsOf(request, this.config.jwtSecret),
+    };
   }
 
   private checkRole(viewer: Viewer, role: Role): void {
     if (!viewer.user.roles.includes(role)) throw forbidden();
   }
 
-  private async checkTake(viewer: Viewer, takeId: string, right: TakeRight): Promise<TakeRights> {
-    const rights = await this.access.take(viewer, takeId);
-    if (!rights.read) throw notFound();
+  private async rightsTo(takeId: string, asker: Asker, right: TakeRight): Promise<TakeRights> {
+    const rights = await this.access.take(asker, takeId);
+    const isStranger = !asker.viewer && asker.shareIds.length === 0;
+    if (!rights.read) throw isStranger ? notSignedIn() : notFound();
     if (!rights[right]) throw forbidden();
     return rights;
   }

@@ -1,18 +1,37 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { validate } from 'uuid';
+import { Share } from '../shares/entities/share.entity';
+import { isOpen } from '../shares/open-shares';
 import { Take } from '../takes/entities/take.entity';
-import { everything, nothing, TakeRights } from './take-rights';
-import { Viewer } from './viewer';
+import { added, everything, nothing, TakeRights } from './take-rights';
+import { Asker } from './viewer';
 
 /** The one place that knows who may see what. */
 @Injectable()
 export class AccessService {
   constructor(private readonly em: EntityManager) {}
 
-  async take(viewer: Viewer, takeId: string): Promise<TakeRights> {
+  async take({ viewer, shareIds }: Asker, takeId: string): Promise<TakeRights> {
     if (!validate(takeId)) return nothing;
-    const take = await this.em.findOne(Take, { id: takeId, owner: viewer.user.id, deletedAt: null });
-    return take ? everything : nothing;
+    const take = await this.em.findOne(Take, { id: takeId, deletedAt: null });
+    if (!take) return nothing;
+    if (viewer && take.owner.id === viewer.user.id) return everything;
+    return this.grants(shareIds, takeId);
+  }
+
+  /** Asked of the database every time, so that a link that has ended ends for those who have it open. */
+  private async grants(shareIds: string[], takeId: string): Promise<TakeRights> {
+    if (shareIds.length === 0) return nothing;
+    const shares = await this.em.find(Share, {
+      id: { $in: shareIds },
+      ...(isOpen() as object),
+      take: { id: takeId, deletedAt: null },
+    });
+    return shares.reduce<TakeRights>(
+      (rights, { canListen, canDownload }) =>
+        added(rights, { ...nothing, read: true, listen: canListen, download: canDownload }),
+      nothing,
+    );
   }
 }

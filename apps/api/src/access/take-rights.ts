@@ -9,3 +9,14 @@ export const nothing: TakeRights = {
   note: false,
   change: false,
 };
+
+/** Whatever one of the two allows. */
+export function added(one: TakeRights, other: TakeRights): TakeRights {
+  return {
+    read: one.read || other.read,
+    listen: one.listen || other.listen,
+    download: one.download || other.download,
+    note: one.note || other.note,
+    change: one.change || other.change,
+  };
+}

@@ -12,6 +12,12 @@ export interface Viewer {
   readOnly: boolean;
 }
 
+/** Who asks: somebody signed in or nobody, with the links that their browser has opened. */
+export interface Asker {
+  viewer: Viewer | null;
+  shareIds: string[];
+}
+
 export interface ViewerRequest extends Request {
   viewer?: Viewer;
   /** What may be done with the take the route is about; set by the guard. */
@@ -25,6 +31,12 @@ export const CurrentViewer = createParamDecorator((_: unknown, context: Executio
   if (!viewer) throw notSignedIn();
   return viewer;
 });
+
+/** For routes that guests may call too. */
+export const OptionalViewer = createParamDecorator(
+  (_: unknown, context: ExecutionContext): Viewer | null =>
+    context.switchToHttp().getRequest<ViewerRequest>().viewer ?? null,
+);
 
 /** For routes that declare a right to a take. */
 export const CurrentRights = createParamDecorator((_: unknown, context: ExecutionContext): TakeRights => {

@@ -33,6 +33,8 @@ const environment = z.object({
   SIGN_IN_LIMIT_PER_ACCOUNT: count.default(10),
   SIGN_IN_LIMIT_PER_ADDRESS: count.default(100),
   JOIN_LIMIT_PER_ADDRESS: count.default(100),
+  /** Links opened in a quarter of an hour; common practice, no source. */
+  OPEN_LINK_LIMIT_PER_ADDRESS: count.default(120),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent']).default('info'),
 });
 
@@ -73,6 +75,7 @@ function grouped(env: z.output<typeof environment>) {
       signInPerAccount: env.SIGN_IN_LIMIT_PER_ACCOUNT,
       signInPerAddress: env.SIGN_IN_LIMIT_PER_ADDRESS,
       joinPerAddress: env.JOIN_LIMIT_PER_ADDRESS,
+      openLinkPerAddress: env.OPEN_LINK_LIMIT_PER_ADDRESS,
     },
     logLevel: env.LOG_LEVEL,
   };

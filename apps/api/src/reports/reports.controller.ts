@@ -3,8 +3,7 @@ import { ApiOkResponse, ApiProduces, ApiTags } from '@nestjs/swagger';
 import { Response } from 'express';
 import { ZodResponse } from 'nestjs-zod';
 import { Access } from '../access/access.decorator';
-import { CurrentViewer, Viewer } from '../access/viewer';
-import { settingsOf } from '../users/user-settings';
+import { OptionalViewer, Viewer } from '../access/viewer';
 import { ReportResponseDto } from './dto/report.dto';
 import { ReportsService } from './reports.service';
 
@@ -16,8 +15,8 @@ export class ReportsController {
   @Get('report')
   @Access.take('read')
   @ZodResponse({ status: 200, type: ReportResponseDto })
-  get(@Param('id') takeId: string, @CurrentViewer() viewer: Viewer) {
-    return this.reports.get(takeId, settingsOf(viewer.user));
+  get(@Param('id') takeId: string, @OptionalViewer() viewer: Viewer | null) {
+    return this.reports.get(takeId, viewer?.user ?? null);
   }
 
   @Get('pair-spectrum')

@@ -15,10 +15,10 @@ const notMeasuredYet = () => new AppError('not-measured-yet', 'This take has not
 export class ReportsService {
   constructor(private readonly em: EntityManager) {}
 
-  /** Judged by the owner's target and temperature, told in the reader's units. */
-  async get(takeId: string, reader: UserSettings): Promise<ReportResponse> {
+  /** Judged by the owner's target and temperature, told in the reader's units; a guest's are the owner's. */
+  async get(takeId: string, reader: User | null): Promise<ReportResponse> {
     const { report, owner } = await this.currentReport(takeId);
-    return reportResponseOf({ report, owner, reader });
+    return reportResponseOf({ report, owner, reader: reader ? settingsOf(reader) : owner });
   }
 
   async getPairSpectrum(takeId: string): Promise<PairSpectrum> {

@@ -19,8 +19,9 @@ export class SoundController {
     private readonly objects: ObjectStoreService,
   ) {}
 
+  /** A picture more than a sound: whoever reads the sheet sees the two waves. */
   @Get('excerpt')
-  @Access.take('listen')
+  @Access.take('read')
   @ApiProduces('application/octet-stream')
   @ApiOkResponse({ description: 'Little-endian float32, one track after the other: kick, overhead.' })
   async excerpt(

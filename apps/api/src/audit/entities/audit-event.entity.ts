@@ -8,6 +8,8 @@ export const auditKinds = [
   'signed-out',
   'session-reused',
   'take-deleted',
+  'share-made',
+  'share-ended',
 ] as const;
 export type AuditKind = (typeof auditKinds)[number];
 

@@ -1,0 +1,14 @@
+import {
+  createdShareResponse,
+  createShareRequest,
+  listSharesResponse,
+  openedShareResponse,
+  openShareRequest,
+} from '@thudline/contracts';
+import { createZodDto } from 'nestjs-zod';
+
+export class CreateShareDto extends createZodDto(createShareRequest) {}
+export class CreatedShareResponseDto extends createZodDto(createdShareResponse) {}
+export class ListSharesResponseDto extends createZodDto(listSharesResponse) {}
+export class OpenShareDto extends createZodDto(openShareRequest) {}
+export class OpenedShareResponseDto extends createZodDto(openedShareResponse) {}

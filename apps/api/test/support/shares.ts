@@ -1,0 +1,26 @@
+import {
+  CreatedShareResponse,
+  createdShareResponse,
+  CreateShareRequest,
+  OpenedShareResponse,
+  openedShareResponse,
+  paths,
+  TakeResponse,
+} from '@thudline/contracts';
+import { Browser, Person } from './person';
+
+export async function sharedBy(
+  person: Person,
+  take: TakeResponse,
+  request: CreateShareRequest = {},
+): Promise<CreatedShareResponse> {
+  const response = await person.post(paths.shares(take.id), request).expect(201);
+  return createdShareResponse.parse(response.body);
+}
+
+export const tokenOf = ({ url }: { url: string }) => url.split('/').at(-1) ?? '';
+
+export async function openedBy(browser: Browser, share: { url: string }): Promise<OpenedShareResponse> {
+  const response = await browser.post(paths.openShare, { token: tokenOf(share) }).expect(200);
+  return openedShareResponse.parse(response.body);
+}
