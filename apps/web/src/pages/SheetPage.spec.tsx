@@ -28,6 +28,7 @@ const report = sampleReport();
 const served: FakeRoutes = {
   [`GET ${paths.me}`]: json(sampleMe),
   [`GET ${paths.take(takeId)}`]: json(sampleTake()),
+  [`GET ${paths.shares(takeId)}`]: json({ items: [] }),
   [`GET ${paths.report(takeId)}`]: json(report),
   [`GET ${paths.pairSpectrum(takeId)}`]: () => ({ bytes: samplePairSpectrumBytes(report.pairSpectrum!) }),
   [`GET ${paths.excerpt(takeId)}`]: () => sampleExcerpt(),
@@ -170,7 +171,9 @@ describe('the sheet', () => {
     const shift = await screen.findByRole('spinbutton', { name: 'Overhead earlier, ms' });
     await userEvent.clear(shift);
     await userEvent.type(shift, '1.0');
-    expect(screen.getByRole('img', { name: /Low end of the two added.*flipped, 1.0 ms earlier/ })).toBeInTheDocument();
+    expect(
+      screen.getByRole('img', { name: /Low end of the two added.*flipped, 1.0 ms earlier/ }),
+    ).toBeInTheDocument();
     await userEvent.clear(shift);
     await userEvent.type(shift, '1,62');
     expect(screen.getByRole('button', { name: 'flipped, 1.6 ms earlier' })).toHaveAttribute(

@@ -4,6 +4,9 @@ import { ButtonLink } from '../components/ButtonLink';
 import { PageLoading } from '../components/PageLoading';
 import { PageMessage } from '../components/PageMessage';
 import { useMe } from '../features/auth/hooks/useMe';
+import { BigPrintButton } from '../features/big-print/components/BigPrintButton';
+import { BigPrintLinks } from '../features/big-print/components/BigPrintLinks';
+import { SendSheet } from '../features/shares/components/SendSheet';
 import { MeasuredSheet } from '../features/sheet/components/MeasuredSheet';
 import { MeasuringSheet } from '../features/sheet/components/MeasuringSheet';
 import { useReport } from '../features/sheet/hooks/useReport';
@@ -22,7 +25,18 @@ export function SheetPage() {
   if (error) return <SheetError error={error} retry={takeError ? retryTake : retryReport} />;
   if (!take || !me || (take.hasReport && !report)) return <PageLoading />;
   return report ? (
-    <MeasuredSheet key={take.id} {...{ take, report }} settings={me.settings} />
+    <MeasuredSheet
+      key={take.id}
+      {...{ take, report }}
+      settings={me.settings}
+      marginHead={
+        <>
+          {take.rights.change && <SendSheet takeId={take.id} />}
+          <BigPrintLinks takeId={take.id} mayAddPhone={take.rights.change} />
+        </>
+      }
+      moreButtons={<BigPrintButton takeId={take.id} />}
+    />
   ) : (
     <MeasuringSheet take={take} />
   );
