@@ -2,7 +2,7 @@ import { Navigate } from 'react-router-dom';
 import { Button } from '../components/Button';
 import { PageLoading } from '../components/PageLoading';
 import { PageMessage } from '../components/PageMessage';
-import { Landing } from '../features/auth/components/Landing';
+import { Landing } from '../features/landing/components/Landing';
 import { useMe } from '../features/auth/hooks/useMe';
 
 /** Someone signed in goes on to their takes; a guest reads what this is. */

@@ -1,6 +1,9 @@
-import { Box, chakra } from '@chakra-ui/react';
+import { Box, Flex, chakra } from '@chakra-ui/react';
 import { Headline } from '../../../components/Headline';
-import { CheckTake } from './CheckTake';
+import { ShowOnPhone } from '../../big-print/components/ShowOnPhone';
+import { CheckTake } from '../../first-run/components/CheckTake';
+import { PrintButton } from '../../first-run/components/PrintButton';
+import { ReadSample } from '../../first-run/components/ReadSample';
 import { DropBox } from './DropBox';
 
 /** The upload page for someone who has no take yet: what to play, then where to drop it. */
@@ -17,15 +20,26 @@ export function FirstRun({ onChoose }: { onChoose: () => void }) {
         gridTemplateColumns={{ base: '1fr', lg: 'minmax(0, 1fr) minmax(0, 1fr)' }}
         columnGap="56px"
         rowGap="28px"
+        _print={{ display: 'block' }}
       >
-        <CheckTake />
+        <Box as="section" aria-labelledby="check-take">
+          <Head id="check-take">The check take</Head>
+          <CheckTake />
+          <Flex marginTop="6px" columnGap="17px" wrap="wrap">
+            <PrintButton />
+            <ShowOnPhone>Send it to my phone</ShowOnPhone>
+          </Flex>
+        </Box>
         <Box as="section" aria-labelledby="drop-here" _print={{ display: 'none' }}>
-          <chakra.h2 id="drop-here" fontWeight={600} lineHeight="26px" marginBottom="9px">
-            Then drop the files here
-          </chakra.h2>
+          <Head id="drop-here">Then drop the files here</Head>
           <DropBox onChoose={onChoose} />
+          <Box marginTop="15px">
+            <ReadSample />
+          </Box>
         </Box>
       </Box>
     </>
   );
 }
+
+const Head = chakra('h2', { base: { fontWeight: 600, lineHeight: '26px', marginBottom: '9px' } });

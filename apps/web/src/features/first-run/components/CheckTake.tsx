@@ -1,5 +1,4 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
-import { TextButton } from '../../../components/Button';
 
 const parts = [
   { time: '0–3 s', strong: 'Sit still.', rest: ' That measures the noise.' },
@@ -11,11 +10,8 @@ const parts = [
 /** What a first take should hold, so that nothing stays untold. */
 export function CheckTake() {
   return (
-    <Box as="section" aria-labelledby="check-take">
-      <chakra.h2 id="check-take" fontWeight={600} lineHeight="26px" marginBottom="9px">
-        The check take
-      </chakra.h2>
-      <chakra.ol borderTop="1px solid" borderColor="rule">
+    <>
+      <chakra.ol borderTop="1px solid" borderColor="rule" listStyleType="none">
         {parts.map(({ time, strong, rest }) => (
           <Flex
             as="li"
@@ -40,9 +36,6 @@ export function CheckTake() {
         Protect your ears while you play, and take breaks. Export WAV, 24-bit if you can, without fades or
         normalising.
       </Box>
-      <TextButton type="button" marginTop="14px" onClick={() => window.print()}>
-        Print this
-      </TextButton>
-    </Box>
+    </>
   );
 }
