@@ -1,6 +1,7 @@
 import { Box, chakra } from '@chakra-ui/react';
 import type { ReportResponse, TakeResponse, UserSettings } from '@thudline/contracts';
 import { figureGroups, type FigureGroup, type FigureRow } from './figureRows';
+import { FiguresOut } from './FiguresOut';
 import { FileFacts } from './FileFacts';
 import { PictureTitle, SheetSection } from './SheetSection';
 
@@ -14,9 +15,11 @@ export function FiguresSection({
   report: ReportResponse;
   settings: UserSettings;
 }) {
+  const groups = figureGroups(report, settings);
   return (
     <SheetSection id="figures" title="All figures">
-      {figureGroups(report, settings).map((group) => (
+      <FiguresOut {...{ take, report, groups }} />
+      {groups.map((group) => (
         <FigureTable key={group.title} group={group} />
       ))}
       <PictureTitle>Files</PictureTitle>
