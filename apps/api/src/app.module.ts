@@ -11,6 +11,7 @@ import { HealthModule } from './health/health.module';
 import { loggerModule } from './logging/logger.module';
 import { MeasurementsModule } from './measuring/measurements.module';
 import { ReportsModule } from './reports/reports.module';
+import { SampleSheetModule } from './sample-sheet/sample-sheet.module';
 import { SharesModule } from './shares/shares.module';
 import { SoundModule } from './sound/sound.module';
 import { TakesModule } from './takes/takes.module';
@@ -33,6 +34,7 @@ export class AppModule {
         ReportsModule,
         SoundModule,
         SharesModule,
+        SampleSheetModule,
         HealthModule,
       ],
       providers: [

@@ -28,6 +28,7 @@ const openToAnyone = new Set([
   `post ${paths.signOut}`,
   `get ${paths.health}`,
   `post ${paths.openShare}`,
+  `get ${paths.sampleSheet}`,
 ]);
 const isDocumentation = ({ path }: Route) => path.startsWith(paths.docs);
 /** How Nest hangs middleware (logging, the identity map) into the router: it passes every request on. */

@@ -1,11 +1,15 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { validate } from 'uuid';
+import { sampleTakeId } from '../sample-sheet/sample-take';
 import { Share } from '../shares/entities/share.entity';
 import { isOpen } from '../shares/open-shares';
 import { Take } from '../takes/entities/take.entity';
 import { added, everything, nothing, TakeRights } from './take-rights';
 import { Asker } from './viewer';
+
+/** The sheet that shows what this site does. */
+const forEverybody: TakeRights = { ...nothing, read: true, listen: true };
 
 /** The one place that knows who may see what. */
 @Injectable()
@@ -17,7 +21,8 @@ export class AccessService {
     const take = await this.em.findOne(Take, { id: takeId, deletedAt: null });
     if (!take) return nothing;
     if (viewer && take.owner.id === viewer.user.id) return everything;
-    return this.grants(shareIds, takeId);
+    const granted = await this.grants(shareIds, takeId);
+    return (await sampleTakeId(this.em)) === takeId ? added(granted, forEverybody) : granted;
   }
 
   /** Asked of the database every time, so that a link that has ended ends for those who have it open. */

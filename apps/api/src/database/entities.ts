@@ -3,6 +3,7 @@ import { Session } from '../auth/entities/session.entity';
 import { Measurement } from '../measuring/entities/measurement.entity';
 import { PairSpectrum } from '../reports/entities/pair-spectrum.entity';
 import { Report } from '../reports/entities/report.entity';
+import { Setting } from '../settings/entities/setting.entity';
 import { Share } from '../shares/entities/share.entity';
 import { TakeFile } from '../takes/entities/take-file.entity';
 import { TakeTrack } from '../takes/entities/take-track.entity';
@@ -22,4 +23,5 @@ export const entities = [
   AuditEvent,
   Throttle,
   Share,
+  Setting,
 ];
