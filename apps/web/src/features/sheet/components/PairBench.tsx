@@ -14,6 +14,7 @@ import { ChoiceFigures } from './ChoiceFigures';
 import { ChoiceRow } from './ChoiceRow';
 import { ChoiceSentence } from './ChoiceSentence';
 import { HitTrace } from './HitTrace';
+import { KeysDialog } from './KeysDialog';
 import { LowEndOfChoices } from './LowEndOfChoices';
 import { PictureTitle } from './SheetSection';
 import { WhereKey } from './WhereKey';
@@ -56,7 +57,8 @@ function LoadedBench({ spectrum, ...props }: PairBenchProps & { spectrum: PairSp
   const hitExcerpt = useHitExcerpt(report, chosenHit, canListen);
   const [band, setBand] = useState<TraceBand>('low');
   const hitNumber = kickHits.indexOf(chosenHit) + 1;
-  useSheetKeys({ ...props, excerpt: hitExcerpt.excerpt });
+  const [helping, setHelping] = useState(false);
+  useSheetKeys({ ...props, excerpt: hitExcerpt.excerpt, onHelp: () => setHelping(true) });
   return (
     <>
       <ChoiceRow {...props} hitExcerpt={hitExcerpt} hitNumber={hitNumber} />
@@ -72,6 +74,7 @@ function LoadedBench({ spectrum, ...props }: PairBenchProps & { spectrum: PairSp
       <PictureTitle>Where it helps, from low to high</PictureTitle>
       <WhereItHelps {...{ spectrum, asRecorded, chosen }} />
       <WhereKey {...{ spectrum, asRecorded, chosen }} />
+      {helping && <KeysDialog onClose={() => setHelping(false)} />}
     </>
   );
 }

@@ -11,6 +11,7 @@ interface SheetKeys {
   kickHits: number[];
   chosenHit: number;
   onChooseHit: (hitIndex: number) => void;
+  onHelp: () => void;
 }
 
 /** What every single key of the sheet does, for the list of keys. */
@@ -18,6 +19,9 @@ export const sheetKeyWords: [keys: string, does: string][] = [
   ['Space', 'play the hit on repeat, and stop it'],
   ['1 2 3 …', 'the choices, from left to right'],
   ['← →', 'the hit before, the hit after'],
+  ['?', 'this list'],
+  ['+ − 0', 'in the pair trace: closer, wider, as it was; Shift with the arrows moves it'],
+  ['↑ ↓', 'in a number of the choice: more, less'],
 ];
 
 /** Fields, lists and whatever acts on its own keys keep them. */
@@ -44,8 +48,12 @@ export function useSheetKeys(keys: SheetKeys) {
 /** @returns whether the key meant something */
 function act(
   key: string,
-  { bench, listening, excerpt, kickHits, chosenHit, onChooseHit }: SheetKeys,
+  { bench, listening, excerpt, kickHits, chosenHit, onChooseHit, onHelp }: SheetKeys,
 ): boolean {
+  if (key === '?') {
+    onHelp();
+    return true;
+  }
   if (key === ' ') {
     if (listening.playing !== 'nothing') listening.stop();
     else if (excerpt) void listening.playHit(excerpt);
