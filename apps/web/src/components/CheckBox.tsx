@@ -22,12 +22,15 @@ export function CheckBox({
   checked,
   onChange,
   disabled,
+  label,
   children,
 }: {
   checked: boolean;
   onChange: (checked: boolean) => void;
   disabled?: boolean;
-  children: ReactNode;
+  /** Its name where no text stands beside it. */
+  label?: string;
+  children?: ReactNode;
 }) {
   return (
     <chakra.label
@@ -42,11 +45,12 @@ export function CheckBox({
           type="checkbox"
           checked={checked}
           disabled={disabled}
+          aria-label={label}
           onChange={(event) => onChange(event.target.checked)}
         />
         {checked && <PenTick />}
       </chakra.span>
-      <span>{children}</span>
+      {children && <span>{children}</span>}
     </chakra.label>
   );
 }

@@ -15,32 +15,46 @@ export function InlineSelect<T extends string>({
   onChange: (value: T) => void;
 }) {
   return (
-    <chakra.select
-      aria-label={label}
-      value={value}
-      // As wide as the word that is chosen, not as the longest of the list; a letter is about 0.92 of ch on average.
-      width={`${words(value).length * 0.92 + 1.1}ch`}
-      appearance="none"
+    <chakra.span
+      display="inline-grid"
+      position="relative"
+      maxWidth="100%"
       minHeight="32px"
-      paddingX="3px"
-      bg="transparent"
-      color="ink"
-      fontWeight={600}
-      borderRadius="0"
       borderBottom="2px solid"
       borderColor="edge"
-      cursor="pointer"
-      css={{ '& option': { background: 'sheet', color: 'ink' } }}
-      onChange={(event) => {
-        const chosen = options.find((option) => option === event.target.value);
-        if (chosen) onChange(chosen);
-      }}
+      fontWeight={600}
     >
-      {options.map((option) => (
-        <option key={option} value={option}>
-          {words(option)}
-        </option>
-      ))}
-    </chakra.select>
+      {/* As wide as the word that is chosen, not as the longest of the list. */}
+      <chakra.span aria-hidden visibility="hidden" whiteSpace="pre" truncate paddingX="3px">
+        {words(value)}
+      </chakra.span>
+      <chakra.select
+        aria-label={label}
+        value={value}
+        // Reaches beyond the word, so that a finger finds it.
+        position="absolute"
+        insetX="0"
+        insetY="-6px"
+        width="100%"
+        appearance="none"
+        paddingX="3px"
+        bg="transparent"
+        color="ink"
+        textOverflow="ellipsis"
+        borderRadius="0"
+        cursor="pointer"
+        css={{ '& option': { background: 'sheet', color: 'ink' } }}
+        onChange={(event) => {
+          const chosen = options.find((option) => option === event.target.value);
+          if (chosen !== undefined) onChange(chosen);
+        }}
+      >
+        {options.map((option) => (
+          <option key={option} value={option}>
+            {words(option)}
+          </option>
+        ))}
+      </chakra.select>
+    </chakra.span>
   );
 }

@@ -1,5 +1,5 @@
 import { Box, Flex, chakra, type HTMLChakraProps } from '@chakra-ui/react';
-import { useId, type ReactNode } from 'react';
+import { useId, type ReactNode, type Ref } from 'react';
 import { FieldError } from './FieldError';
 
 export const FieldLabel = chakra('label', {
@@ -24,6 +24,7 @@ const FieldInput = chakra('input', {
 });
 
 export interface TextFieldProps extends Omit<HTMLChakraProps<'input'>, 'onChange'> {
+  ref?: Ref<HTMLInputElement>;
   label: string;
   value: string;
   onChange: (value: string) => void;

@@ -4,7 +4,7 @@ import userEvent from '@testing-library/user-event';
 import { takeHandedOverFiles } from '../features/upload/droppedFiles';
 import { fakeServer, json, refusal, type FakeRoutes } from '../testing/fakeServer';
 import { renderPage } from '../testing/renderPage';
-import { measurement, sampleMe } from '../testing/sampleData';
+import { measurement, sampleMe, sampleTake } from '../testing/sampleData';
 import { listId, sampleList, sampleListItem } from '../testing/sampleList';
 import { TakesPage } from './TakesPage';
 
@@ -121,35 +121,100 @@ describe('a take that is being measured', () => {
   });
 });
 
-describe('deleting a take', () => {
-  const deletable = () => {
-    let takes = twoTakes.items;
-    return open({
-      [`GET ${paths.takes}`]: () => list(sampleList(takes))(),
-      [`DELETE ${paths.take(listId(14))}`]: () => {
-        takes = takes.slice(1);
-        return { status: 204 };
-      },
-    });
-  };
+const chooseBox = (name: RegExp) => screen.findByRole('checkbox', { name });
 
-  it('asks first, and keeps the take when told so', async () => {
-    const { requests } = deletable();
-    await userEvent.click(await screen.findByRole('button', { name: 'delete take 14, 8 cm inside, again' }));
-    expect(screen.getByRole('alert')).toHaveTextContent('Delete take 14, 8 cm inside, again?');
-    expect(screen.getByRole('button', { name: 'Keep it' })).toHaveFocus();
-    await userEvent.keyboard('{Escape}');
-    expect(screen.getByRole('button', { name: 'delete take 14, 8 cm inside, again' })).toHaveFocus();
-    expect(requests.some(({ method }) => method === 'DELETE')).toBe(false);
+describe('choosing takes', () => {
+  it('says which are chosen, and clears them', async () => {
+    open({ [`GET ${paths.takes}`]: list(twoTakes) });
+    await userEvent.click(await chooseBox(/^choose take 14/));
+    expect(screen.getByText('1 chosen:').parentElement).toHaveTextContent('1 chosen: take 14');
+    await userEvent.click(await chooseBox(/^choose take 13/));
+    expect(screen.getByText('2 chosen:').parentElement).toHaveTextContent('2 chosen: takes 13 and 14');
+    await userEvent.click(screen.getByRole('button', { name: 'Clear' }));
+    expect(await chooseBox(/^choose take 14/)).not.toBeChecked();
+    expect(screen.queryByText(/chosen:/)).not.toBeInTheDocument();
   });
 
-  it('takes it from the list and the count', async () => {
-    deletable();
-    await userEvent.click(await screen.findByRole('button', { name: 'delete take 14, 8 cm inside, again' }));
+  it('keeps the choice on another page', async () => {
+    open({
+      [`GET ${paths.takes}?cursor=c1`]: list(sampleList([sampleListItem({ number: 3, title: 'third' })])),
+      [`GET ${paths.takes}`]: list({ ...twoTakes, nextCursor: 'c1' }),
+    });
+    await userEvent.click(await chooseBox(/^choose take 14/));
+    await userEvent.click(screen.getByRole('link', { name: 'older' }));
+    await userEvent.click(await chooseBox(/^choose take 3/));
+    expect(screen.getByText('2 chosen:').parentElement).toHaveTextContent('takes 3 and 14');
+  });
+
+  it('is not offered on a phone that may only read', async () => {
+    open({
+      [`GET ${paths.me}`]: json({ ...sampleMe, readOnly: true }),
+      [`GET ${paths.takes}`]: list(twoTakes),
+    });
+    expect(await screen.findByRole('row', { name: /8 cm inside, again/ })).toBeInTheDocument();
+    await waitFor(() => expect(screen.queryByRole('checkbox')).not.toBeInTheDocument());
+    expect(screen.queryByRole('button', { name: /^tags of/ })).not.toBeInTheDocument();
+  });
+});
+
+describe('deleting takes', () => {
+  /** A server that deletes and restores, take by take. */
+  const deletable = () => {
+    let gone: number[] = [];
+    const page = () => {
+      const items = twoTakes.items.filter(({ number }) => !gone.includes(number));
+      return list(sampleList(items, { everyTotal: items.length, deletedTotal: gone.length }))();
+    };
+    const routes: FakeRoutes = { [`GET ${paths.takes}`]: page };
+    for (const number of [13, 14]) {
+      routes[`DELETE ${paths.take(listId(number))}`] = () => {
+        gone = [...gone, number];
+        return { status: 204 };
+      };
+      routes[`POST ${paths.restoreTake(listId(number))}`] = () => {
+        gone = gone.filter((each) => each !== number);
+        return { status: 204 };
+      };
+    }
+    return open(routes);
+  };
+  const deleteTake14 = async () => {
+    await userEvent.click(await chooseBox(/^choose take 14/));
     await userEvent.click(screen.getByRole('button', { name: 'Delete it' }));
-    expect(await screen.findByText('1 of 1')).toBeInTheDocument();
+  };
+
+  it('takes it from the list at once, and undo brings it back', async () => {
+    deletable();
+    await deleteTake14();
+    expect(await screen.findByText('Take 14 is deleted.')).toBeInTheDocument();
+    expect(screen.getByText('1 of 1')).toBeInTheDocument();
     expect(screen.queryByText('8 cm inside, again')).not.toBeInTheDocument();
-    expect(screen.getByRole('heading', { name: 'Takes' })).toHaveFocus();
+    expect(screen.getByRole('button', { name: 'Undo' })).toHaveFocus();
+    await userEvent.click(screen.getByRole('button', { name: 'Undo' }));
+    expect(await screen.findByText('Take 14 is back.')).toBeInTheDocument();
+    expect(screen.getByText('8 cm inside, again')).toBeInTheDocument();
+  });
+
+  it('leaves the way back until it is dismissed', async () => {
+    deletable();
+    await deleteTake14();
+    await userEvent.click(await screen.findByRole('button', { name: 'Dismiss' }));
+    expect(screen.queryByText('Take 14 is deleted.')).not.toBeInTheDocument();
+    expect(screen.getByRole('link', { name: 'restore something deleted' })).toHaveAttribute(
+      'href',
+      '/takes?show=deleted',
+    );
+  });
+
+  it('still offers undo when the last take is gone', async () => {
+    deletable();
+    await userEvent.click(await chooseBox(/^choose take 14/));
+    await userEvent.click(await chooseBox(/^choose take 13/));
+    await userEvent.click(screen.getByRole('button', { name: 'Delete them' }));
+    expect(await screen.findByText('Takes 13 and 14 are deleted.')).toBeInTheDocument();
+    expect(screen.getByRole('heading', { name: /^Your first take/ })).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Undo' }));
+    expect(await screen.findByText('8 cm inside, again')).toBeInTheDocument();
   });
 
   it('says so when it did not work, with the take still there', async () => {
@@ -157,10 +222,193 @@ describe('deleting a take', () => {
       [`GET ${paths.takes}`]: list(twoTakes),
       [`DELETE ${paths.take(listId(14))}`]: refusal(500, 'internal', 'Try again in a moment.'),
     });
-    await userEvent.click(await screen.findByRole('button', { name: 'delete take 14, 8 cm inside, again' }));
-    await userEvent.click(screen.getByRole('button', { name: 'Delete it' }));
+    await deleteTake14();
     expect(await screen.findByText('Try again in a moment.')).toBeInTheDocument();
-    expect(screen.getByRole('button', { name: 'Keep it' })).toBeEnabled();
+    expect(screen.getByText('8 cm inside, again')).toBeInTheDocument();
+    expect(screen.getByText('1 chosen:')).toBeInTheDocument();
+  });
+
+  it('brings a take back from the list of deleted ones', async () => {
+    let items = [sampleListItem({ deletedAt: '2026-11-30T20:00:00.000Z' })];
+    open(
+      {
+        [`GET ${paths.takes}`]: () =>
+          list(sampleList(items, { everyTotal: 3, deletedTotal: items.length }))(),
+        [`POST ${paths.restoreTake(listId(14))}`]: () => {
+          items = [];
+          return { status: 204 };
+        },
+      },
+      '/takes?show=deleted',
+    );
+    const row = await screen.findByRole('row', { name: /8 cm inside, again/ });
+    expect(within(row).queryByRole('link')).not.toBeInTheDocument();
+    await userEvent.click(within(row).getByRole('button', { name: 'restore take 14, 8 cm inside, again' }));
+    expect(await screen.findByText('Take 14 is back.')).toBeInTheDocument();
+    expect(screen.getByText(/Nothing you recorded is deleted\./)).toBeInTheDocument();
+  });
+});
+
+describe('tags', () => {
+  const tagged = sampleList(
+    [sampleListItem({ tags: ['rug'] }), sampleListItem({ number: 13, title: 'port' })],
+    {
+      tags: ['blankets', 'rug'],
+    },
+  );
+  /** Keeps what is sent, so that the list tells it. */
+  const taggable = () => {
+    let items = tagged.items;
+    const routes: FakeRoutes = {
+      [`GET ${paths.takes}`]: () => list(sampleList(items, { tags: tagged.tags }))(),
+    };
+    for (const number of [13, 14]) {
+      const asTake = () =>
+        sampleTake({ id: listId(number), tags: items.find((each) => each.number === number)!.tags });
+      routes[`GET ${paths.take(listId(number))}`] = () => ({ json: asTake() });
+      routes[`PATCH ${paths.take(listId(number))}`] = (body) => {
+        const { tags } = body as { tags: string[] };
+        items = items.map((each) => (each.number === number ? { ...each, tags } : each));
+        return { json: asTake() };
+      };
+    }
+    return open(routes);
+  };
+
+  it('stand under the title and are written in the row', async () => {
+    taggable();
+    expect(await screen.findByRole('row', { name: /8 cm inside, again.* · rug/ })).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'tags of take 14, 8 cm inside, again' }));
+    const field = screen.getByRole('textbox', {
+      name: 'Tags of take 14, 8 cm inside, again, with commas between',
+    });
+    expect(field).toHaveFocus();
+    expect(field).toHaveValue('rug');
+    await userEvent.click(screen.getByRole('button', { name: 'blankets' }));
+    await userEvent.type(field, ', second day');
+    await userEvent.click(screen.getByRole('button', { name: 'Keep them' }));
+    expect(await screen.findByText(/· rug · blankets · second day/)).toBeInTheDocument();
+    expect(screen.getByRole('button', { name: 'tags of take 14, 8 cm inside, again' })).toHaveFocus();
+  });
+
+  it('are left as they were with Escape', async () => {
+    const { requests } = taggable();
+    await userEvent.click(await screen.findByRole('button', { name: 'tags of take 14, 8 cm inside, again' }));
+    await userEvent.keyboard('x{Escape}');
+    expect(screen.getByRole('button', { name: 'tags of take 14, 8 cm inside, again' })).toHaveFocus();
+    expect(requests.some(({ method }) => method === 'PATCH')).toBe(false);
+  });
+
+  it('say under the field what is wrong with them', async () => {
+    const { requests } = taggable();
+    await userEvent.click(await screen.findByRole('button', { name: 'tags of take 14, 8 cm inside, again' }));
+    await userEvent.keyboard('{Control>}a{/Control}' + 'x'.repeat(31) + '{Enter}');
+    expect(await screen.findByRole('alert')).toHaveTextContent('A tag has at most 30 characters.');
+    expect(requests.some(({ method }) => method === 'PATCH')).toBe(false);
+  });
+
+  it('are added to all chosen takes, which keep the ones they have', async () => {
+    const { requests } = taggable();
+    await userEvent.click(await chooseBox(/^choose take 14/));
+    await userEvent.click(await chooseBox(/^choose take 13/));
+    await userEvent.click(screen.getByRole('button', { name: 'Tag them' }));
+    await userEvent.type(screen.getByRole('textbox', { name: /^Tags for takes 13 and 14/ }), 'garage');
+    await userEvent.click(screen.getByRole('button', { name: 'Tag them' }));
+    await waitFor(() =>
+      expect(requests.filter(({ method }) => method === 'PATCH').map(({ body }) => body)).toEqual([
+        { tags: ['rug', 'garage'] },
+        { tags: ['garage'] },
+      ]),
+    );
+    expect(await screen.findByText(/· rug · garage/)).toBeInTheDocument();
+  });
+});
+
+describe('the filter sentence', () => {
+  const some = sampleList([sampleListItem()], { tags: ['blankets', 'rug'], everyTotal: 20, total: 1 });
+  const choose = (label: string, words: string) =>
+    userEvent.selectOptions(screen.getByRole('combobox', { name: label }), words);
+
+  it('asks for what it says, keeps it in the address, and back takes it back', async () => {
+    const { address, requests, router } = open({ [`GET ${paths.takes}`]: list(some) });
+    await screen.findByRole('table', { name: 'Takes' });
+    await choose('Show', 'clipped takes');
+    await choose('Tagged', 'rug');
+    await choose('In which order', 'hardest kick first');
+    expect(address()).toBe('/takes?show=clipped&order=hardest-kick&tag=rug');
+    await waitFor(() =>
+      expect(requests.at(-1)?.path).toBe(`${paths.takes}?show=clipped&order=hardest-kick&tag=rug`),
+    );
+    await act(() => router.navigate(-1));
+    expect(screen.getByRole('combobox', { name: 'In which order' })).toHaveDisplayValue('newest first');
+    expect(address()).toBe('/takes?show=clipped&tag=rug');
+  });
+
+  it('opens as the address says', async () => {
+    open({ [`GET ${paths.takes}`]: list(some) }, '/takes?show=to-flip&tag=old&find=port');
+    expect(await screen.findByRole('table', { name: 'Takes' })).toBeInTheDocument();
+    expect(screen.getByRole('combobox', { name: 'Show' })).toHaveDisplayValue('takes to flip');
+    expect(screen.getByRole('combobox', { name: 'Tagged' })).toHaveDisplayValue('old');
+    expect(screen.getByRole('searchbox')).toHaveValue('port');
+  });
+
+  it('looks for words a moment after they are typed, as one step for back', async () => {
+    const { address, requests, router } = open({ [`GET ${paths.takes}`]: list(some) });
+    await screen.findByRole('table', { name: 'Takes' });
+    await userEvent.type(screen.getByRole('searchbox', { name: 'Find a title, note or finding' }), 'port ');
+    expect(screen.getByRole('searchbox')).toHaveValue('port ');
+    await waitFor(() => expect(address()).toBe('/takes?find=port'));
+    expect(screen.getByRole('searchbox')).toHaveValue('port ');
+    await waitFor(() => expect(requests.at(-1)?.path).toBe(`${paths.takes}?find=port`));
+    await userEvent.type(screen.getByRole('searchbox'), 'again{Enter}');
+    await waitFor(() => expect(address()).toBe('/takes?find=port+again'));
+    await act(() => router.navigate(-1));
+    expect(address()).toBe('/takes');
+    expect(screen.getByRole('searchbox')).toHaveValue('');
+  });
+
+  it('that fits nothing offers wider ones with what they hold', async () => {
+    const none = (total: number) =>
+      list(sampleList([], { total, everyTotal: 20, tags: ['rug'], deletedTotal: 1 }));
+    open(
+      {
+        [`GET ${paths.takes}?show=clipped&tag=rug`]: none(0),
+        [`GET ${paths.takes}?tag=rug&limit=1`]: none(7),
+        [`GET ${paths.takes}?show=clipped&limit=1`]: none(2),
+      },
+      '/takes?show=clipped&tag=rug',
+    );
+    expect(
+      await screen.findByText(
+        (_, element) =>
+          element?.textContent === 'No take fits that sentence. Nothing you tagged rug has clipped.' &&
+          element.tagName === 'H2',
+      ),
+    ).toBeInTheDocument();
+    const offers = within(screen.getByRole('list'));
+    await waitFor(() => expect(offers.getAllByRole('listitem')).toHaveLength(3));
+    expect(offers.getAllByRole('listitem').map((item) => item.textContent)).toEqual([
+      'Every take tagged rug 7 takes',
+      'Clipped takes 2 takes',
+      'Every take 20 takes',
+    ]);
+    expect(offers.getByRole('link', { name: 'Clipped takes' })).toHaveAttribute(
+      'href',
+      '/takes?show=clipped',
+    );
+    expect(screen.getByText('0 of 20 takes')).toBeInTheDocument();
+    expect(screen.getByRole('link', { name: 'restore something deleted' })).toBeInTheDocument();
+  });
+
+  it('that could not be asked does not show the rows of the one before', async () => {
+    open({
+      [`GET ${paths.takes}?show=hot`]: refusal(503, 'storage-unavailable', 'The store is away.'),
+      [`GET ${paths.takes}`]: list(some),
+    });
+    await screen.findByRole('table', { name: 'Takes' });
+    await choose('Show', 'hot takes');
+    expect(await screen.findByRole('alert')).toHaveTextContent('The store is away.');
+    expect(screen.queryByRole('table')).not.toBeInTheDocument();
   });
 });
 

@@ -1,6 +1,8 @@
+import { queryParams, type TakesQuery } from './takesQuery';
+
 /** Where in the list a page lies; kept in the address, so that back and reload find it again. */
 export interface PagePlace {
-  /** Null: the newest. */
+  /** Null: the first page. */
   cursor: string | null;
   /** Number of the first row, from 1. A keyset cursor does not know it, so it travels along. */
   firstRow: number;
@@ -14,8 +16,15 @@ export function pagePlace(params: URLSearchParams): PagePlace {
 }
 
 /** The address of the page after this one. */
-export const olderPage = (nextCursor: string, { firstRow }: PagePlace, shownRows: number) =>
-  `/takes?${new URLSearchParams({ after: nextCursor, from: String(firstRow + shownRows) }).toString()}`;
+export function pageAfter(
+  query: TakesQuery,
+  { nextCursor, place, shownRows }: { nextCursor: string; place: PagePlace; shownRows: number },
+): string {
+  const params = queryParams(query);
+  params.set('after', nextCursor);
+  params.set('from', String(place.firstRow + shownRows));
+  return `/takes?${params.toString()}`;
+}
 
 /** "1–11 of 15"; "15 of 15" for a single row. */
 export function rangeWords({ firstRow }: PagePlace, shownRows: number, total: number): string {

@@ -4,12 +4,13 @@ import { useState } from 'react';
 import { ProgressSwell } from '../../../components/ProgressSwell';
 import { useTakeActions } from '../hooks/useTakeActions';
 import { measuringWords, takeName } from '../rowWords';
+import { ChooseCell } from './ChooseCell';
 import { wideRowGrid } from './tableGrid';
 import { TakeCell } from './TakeCell';
 import { ActionCell, RowAction, RuledRow } from './TakeRow';
 
 /** A take that is being measured: which step, how far, and a way to stop it. */
-export function MeasuringRow({ take, now }: { take: TakeListItem; now: Date }) {
+export function MeasuringRow({ take, now, canStop }: { take: TakeListItem; now: Date; canStop: boolean }) {
   const { stopMeasuring } = useTakeActions();
   const [failure, setFailure] = useState('');
   const [stopping, setStopping] = useState(false);
@@ -26,6 +27,7 @@ export function MeasuringRow({ take, now }: { take: TakeListItem; now: Date }) {
   const words = measuringWords(take.measurement);
   return (
     <RuledRow grid={wideRowGrid}>
+      <ChooseCell take={take} chosen={false} />
       <TakeCell take={take} now={now} />
       <Flex
         role="cell"
@@ -49,17 +51,19 @@ export function MeasuringRow({ take, now }: { take: TakeListItem; now: Date }) {
         </Box>
       </Flex>
       <ActionCell>
-        <RowAction
-          fontSize="small"
-          color="ink"
-          textDecoration="underline"
-          marginRight={{ base: 0, lg: '22px' }}
-          disabled={stopping}
-          aria-label={`stop measuring ${takeName(take)}`}
-          onClick={() => void stop()}
-        >
-          Stop
-        </RowAction>
+        {canStop && (
+          <RowAction
+            fontSize="small"
+            color="ink"
+            textDecoration="underline"
+            marginRight={{ base: 0, lg: '22px' }}
+            disabled={stopping}
+            aria-label={`stop measuring ${takeName(take)}`}
+            onClick={() => void stop()}
+          >
+            Stop
+          </RowAction>
+        )}
       </ActionCell>
     </RuledRow>
   );

@@ -7,8 +7,14 @@ const RowLink = chakra(Link, {
   base: { textDecoration: 'none', '[role=row]:hover &': { textDecoration: 'underline' } },
 });
 
-/** Number, title and date; the link to the sheet reaches over the whole row. */
+/** Number, title, date and tags; the link to the sheet reaches over the whole row. */
 export function TakeCell({ take, now }: { take: TakeListItem; now: Date }) {
+  const name = (
+    <>
+      <chakra.b marginRight="9px">{take.number}</chakra.b>
+      {take.title || 'no title'}
+    </>
+  );
   return (
     <Box role="cell" gridArea="take" alignSelf="center" paddingRight="16px" minWidth={0} paddingY="2px">
       <chakra.span
@@ -19,21 +25,27 @@ export function TakeCell({ take, now }: { take: TakeListItem; now: Date }) {
         lineClamp={{ base: 2, lg: 1 }}
         title={take.title}
       >
-        <RowLink to={`/takes/${take.id}`}>
-          <chakra.b marginRight="9px">{take.number}</chakra.b>
-          {take.title || 'no title'}
-          <Box as="span" position="absolute" inset="0" />
-        </RowLink>
+        {take.deletedAt ? (
+          name
+        ) : (
+          <RowLink to={`/takes/${take.id}`}>
+            {name}
+            <Box as="span" position="absolute" inset="0" />
+          </RowLink>
+        )}
       </chakra.span>
-      <chakra.time
+      <chakra.span
         display="block"
-        dateTime={take.recordedAt}
         fontSize="caption"
         lineHeight="18px"
         color="ink.muted"
+        overflowWrap="anywhere"
+        lineClamp={{ base: 2, lg: 1 }}
+        title={take.tags.join(', ') || undefined}
       >
-        {relativeDate(take.recordedAt, now)}
-      </chakra.time>
+        <time dateTime={take.recordedAt}>{relativeDate(take.recordedAt, now)}</time>
+        {take.tags.map((tag) => ` · ${tag}`)}
+      </chakra.span>
     </Box>
   );
 }

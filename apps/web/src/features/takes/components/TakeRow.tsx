@@ -1,9 +1,9 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
 import type { FindingStatus, TakeListItem, Target } from '@thudline/contracts';
-import type { ReactNode, Ref } from 'react';
+import type { ReactNode } from 'react';
 import { TextButton } from '../../../components/Button';
 import { StatusMark } from '../../../components/StatusMark';
-import { takeName, unmeasuredWords } from '../rowWords';
+import { unmeasuredWords } from '../rowWords';
 import { LevelPicture } from './LevelPicture';
 import { LowEndPicture } from './LowEndPicture';
 import { rowGrid, rowMinHeight } from './tableGrid';
@@ -21,17 +21,20 @@ export function TakeRow({
   take,
   target,
   now,
-  deleteRef,
-  onDelete,
+  chosen = false,
+  box,
+  action,
 }: {
   take: TakeListItem;
   target: Target;
   now: Date;
-  deleteRef?: Ref<HTMLButtonElement>;
-  onDelete: () => void;
+  chosen?: boolean;
+  box?: ReactNode;
+  action?: ReactNode;
 }) {
   return (
-    <RuledRow>
+    <RuledRow chosen={chosen}>
+      {box}
       <TakeCell take={take} now={now} />
       <Says take={take} />
       <Box role="cell" gridArea="level" position="relative" minHeight={{ base: '44px', lg: 'auto' }}>
@@ -40,16 +43,21 @@ export function TakeRow({
       <Box role="cell" gridArea="low" position="relative">
         <LowEndPicture lowEndDb={take.lowEndDb} />
       </Box>
-      <ActionCell>
-        <RowAction ref={deleteRef} aria-label={`delete ${takeName(take)}`} onClick={onDelete}>
-          delete
-        </RowAction>
-      </ActionCell>
+      <ActionCell>{action}</ActionCell>
     </RuledRow>
   );
 }
 
-export function RuledRow({ grid = rowGrid, children }: { grid?: object; children: ReactNode }) {
+/** A chosen row is told by the bar at its left, not by its tint alone. */
+export function RuledRow({
+  grid = rowGrid,
+  chosen = false,
+  children,
+}: {
+  grid?: object;
+  chosen?: boolean;
+  children: ReactNode;
+}) {
   return (
     <Box
       role="row"
@@ -59,6 +67,8 @@ export function RuledRow({ grid = rowGrid, children }: { grid?: object; children
       borderBottom="1px solid"
       borderColor="rule"
       paddingY={{ base: '10px', lg: 0 }}
+      bg={chosen ? 'target' : undefined}
+      boxShadow={chosen ? 'inset 4px 0 0 var(--chakra-colors-ink)' : undefined}
       _hover={{ bg: 'target' }}
     >
       {children}

@@ -1,9 +1,11 @@
-import { Flex } from '@chakra-ui/react';
+import { Flex, chakra } from '@chakra-ui/react';
 import { ButtonLink } from '../../../components/ButtonLink';
 import { Headline } from '../../../components/Headline';
+import { TextLink } from '../../../components/TextLink';
+import { everyTake, takesAddress } from '../takesQuery';
 
 /** Nothing recorded yet: what a first take needs, and the way there. */
-export function TakesEmpty() {
+export function TakesEmpty({ deletedTotal }: { deletedTotal: number }) {
   return (
     <>
       <Headline marginTop={{ base: '8px', lg: '17px' }} maxWidth="704px">
@@ -14,6 +16,11 @@ export function TakesEmpty() {
         <ButtonLink to="/takes/new">Add your first take</ButtonLink>
         or drop WAV files anywhere on this page
       </Flex>
+      {deletedTotal > 0 && (
+        <chakra.p marginTop="22px">
+          <TextLink to={takesAddress({ ...everyTake, show: 'deleted' })}>restore something deleted</TextLink>
+        </chakra.p>
+      )}
     </>
   );
 }

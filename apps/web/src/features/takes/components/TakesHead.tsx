@@ -12,7 +12,7 @@ export function TakesHead({ target }: { target: Target }) {
       <Box
         role="row"
         {...rowGrid}
-        gridTemplateAreas={{ base: '"level low low"', lg: rowGrid.gridTemplateAreas.lg }}
+        gridTemplateAreas={{ base: '"level level low low"', lg: rowGrid.gridTemplateAreas.lg }}
         height="58px"
         borderBottom="1px solid"
         borderColor="rule"
@@ -20,6 +20,9 @@ export function TakesHead({ target }: { target: Target }) {
         lineHeight="18px"
         fontWeight={600}
       >
+        <Box role="columnheader" gridArea={{ lg: 'box' }} srOnly>
+          Chosen
+        </Box>
         <ColumnName area="take">Take</ColumnName>
         <ColumnName area="says">What it says</ColumnName>
         <LevelAxis target={target} />

@@ -1,20 +1,11 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
-import type { Ref } from 'react';
 import { ButtonLink } from '../../../components/ButtonLink';
 
 /** The name of the page and the way to another take. */
-export function TakesHeading({ headingRef }: { headingRef?: Ref<HTMLHeadingElement> }) {
+export function TakesHeading() {
   return (
     <Flex alignItems="center" gap="18px" minHeight="44px">
-      <chakra.h1
-        ref={headingRef}
-        tabIndex={-1}
-        outline="none"
-        fontSize="28px"
-        lineHeight="34px"
-        fontWeight={900}
-        flex="1"
-      >
+      <chakra.h1 fontSize="28px" lineHeight="34px" fontWeight={900} flex="1">
         Takes
       </chakra.h1>
       <Box fontSize="small" color="ink.muted" display={{ base: 'none', lg: 'block' }}>

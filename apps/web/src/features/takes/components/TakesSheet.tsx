@@ -1,72 +1,83 @@
 import { Box, chakra } from '@chakra-ui/react';
-import { defaultUserSettings, type TakeListItem } from '@thudline/contracts';
-import { useRef, useState } from 'react';
-import { useNavigate, useSearchParams } from 'react-router-dom';
+import { defaultUserSettings } from '@thudline/contracts';
 import { TextLink } from '../../../components/TextLink';
 import { useMe } from '../../auth/hooks/useMe';
-import { useTakeActions } from '../hooks/useTakeActions';
 import { useTakes } from '../hooks/useTakes';
-import { pagePlace } from '../paging';
-import { takeName } from '../rowWords';
+import { useTakesAddress } from '../hooks/useTakesAddress';
+import { useTakesBench } from '../hooks/useTakesBench';
+import { takesAddress, type TakesQuery } from '../takesQuery';
+import { ChosenBar } from './ChosenBar';
+import { FilterSentence } from './FilterSentence';
+import { NoTakeFits } from './NoTakeFits';
 import { TakesEmpty } from './TakesEmpty';
 import { TakesError } from './TakesError';
 import { TakesFoot } from './TakesFoot';
 import { TakesHeading } from './TakesHeading';
 import { TakesLoading } from './TakesLoading';
 import { TakesTable } from './TakesTable';
+import { UndoBar } from './UndoBar';
 
-/** All the player's takes, a page at a time. */
+/** All the player's takes, as a sentence asks for them, a page at a time. */
 export function TakesSheet() {
   const { me } = useMe();
   const target = (me?.settings ?? defaultUserSettings).target;
-  const place = pagePlace(useSearchParams()[0]);
-  const { page, error, retry } = useTakes(place.cursor);
-  const { said, heading, deleteTake } = useDeleteTake(page?.items.length === 1 && place.cursor !== null);
-
-  if (page && page.total === 0) return <TakesEmpty />;
+  const { query, place, change, firstPage } = useTakesAddress();
+  const { page, error, stale, retry } = useTakes(query, place.cursor);
+  const bench = useTakesBench(page?.items ?? [], place.cursor === null ? undefined : firstPage);
+  const { undo } = bench;
+  const bar = undo.words && (
+    <UndoBar words={undo.words} failure={undo.failure} onUndo={undo.undo} onDismiss={undo.dismiss} />
+  );
+  if (page && page.everyTotal === 0 && query.show !== 'deleted')
+    return (
+      <>
+        <TakesEmpty deletedTotal={page.deletedTotal} />
+        {bar}
+      </>
+    );
   return (
     <Box marginX={{ base: 0, lg: '-24px' }} marginTop={{ base: 0, lg: '-3px' }}>
-      <TakesHeading headingRef={heading} />
-      <chakra.span role="status" srOnly>
-        {said}
-      </chakra.span>
-      {!page && error && <TakesError message={error.message} onRetry={retry} />}
+      <TakesHeading />
+      <FilterSentence query={query} tags={page?.tags ?? []} onChange={change} />
+      {error && <TakesError message={error.message} onRetry={retry} />}
       {!page && !error && <TakesLoading target={target} />}
-      {page && page.items.length === 0 && <NothingOlder />}
-      {page && page.items.length > 0 && (
+      {page && (
         <>
-          <TakesTable takes={page.items} target={target} onDelete={deleteTake} />
+          {page.items.length > 0 && (
+            <TakesTable
+              takes={page.items}
+              knownTags={page.tags}
+              actions={me?.readOnly ? undefined : bench.actions}
+              {...{ target, stale }}
+            />
+          )}
+          {page.items.length === 0 && place.cursor && <NothingFurther query={query} />}
+          {page.items.length === 0 && !place.cursor && <NoTakeFits {...{ query, page, target }} />}
           <TakesFoot
-            place={place}
-            shownRows={page.items.length}
-            total={page.total}
-            nextCursor={page.nextCursor}
+            {...{ query, place, page }}
+            chosenBar={
+              bench.chosen.length > 0 && (
+                <ChosenBar
+                  chosen={bench.chosen}
+                  knownTags={page.tags}
+                  onDelete={bench.removeChosen}
+                  onTag={bench.tagChosen}
+                  onClear={bench.clear}
+                />
+              )
+            }
           />
         </>
       )}
+      {bar}
     </Box>
   );
 }
 
-function NothingOlder() {
+function NothingFurther({ query }: { query: TakesQuery }) {
   return (
     <chakra.p marginTop="24px" paddingTop="16px" borderTop="1px solid" borderColor="rule">
-      There is nothing older than this. <TextLink to="/takes">Go to the newest takes</TextLink>
+      There is nothing further on. <TextLink to={takesAddress(query)}>Go to the first page</TextLink>
     </chakra.p>
   );
-}
-
-/** After a take is gone the focus rests on the heading, and a page that lost its last row gives way to the newest. */
-function useDeleteTake(lastOfPage: boolean) {
-  const { remove } = useTakeActions();
-  const navigate = useNavigate();
-  const heading = useRef<HTMLHeadingElement>(null);
-  const [said, setSaid] = useState('');
-  const deleteTake = async (take: TakeListItem) => {
-    await remove(take.id);
-    setSaid(`${takeName(take)} is deleted.`);
-    heading.current?.focus();
-    if (lastOfPage) await navigate('/takes', { replace: true });
-  };
-  return { said, heading, deleteTake };
 }

@@ -2,49 +2,114 @@ import { Box } from '@chakra-ui/react';
 import type { TakeListItem, Target } from '@thudline/contracts';
 import { useEffect, useRef, useState, type ReactNode } from 'react';
 import { useNow } from '../hooks/useNow';
-import { isMeasuring } from '../rowWords';
-import { DeleteRow } from './DeleteRow';
+import { isMeasuring, takeName } from '../rowWords';
+import { ChooseCell } from './ChooseCell';
+import { DeletedRow } from './DeletedRow';
 import { MeasuringRow } from './MeasuringRow';
-import { TakeRow } from './TakeRow';
+import { TagsRow } from './TagsRow';
+import { RowAction, TakeRow } from './TakeRow';
 import { TakesHead } from './TakesHead';
 
-/** The ruled table: one row a take, its pictures under one axis. */
+export interface RowActions {
+  isChosen: (take: TakeListItem) => boolean;
+  choose: (take: TakeListItem, chosen: boolean) => void;
+  setTags: (takeId: string, tags: string[]) => Promise<void>;
+  restore: (take: TakeListItem) => Promise<void>;
+}
+
+/** The ruled table: one row a take, its pictures under one axis. Without `actions` it can only be read. */
 export function TakesTable({
   takes,
   target,
-  onDelete,
+  knownTags,
+  actions,
+  stale = false,
 }: {
   takes: TakeListItem[];
   target: Target;
-  onDelete: (take: TakeListItem) => Promise<void>;
+  knownTags: readonly string[];
+  actions?: RowActions;
+  /** These rows belong to the sentence before; the new ones are on their way. */
+  stale?: boolean;
 }) {
   const now = useNow();
-  const { askedId, ask, keep, deleteButton } = useDeleteQuestion();
+  const tagging = useTagging();
   return (
-    <TableFrame target={target}>
+    <TableFrame target={target} stale={stale}>
       {takes.map((take) => {
-        if (take.id === askedId) {
-          return <DeleteRow key={take.id} take={take} onDelete={() => onDelete(take)} onKeep={keep} />;
-        }
-        if (isMeasuring(take.measurement)) return <MeasuringRow key={take.id} take={take} now={now} />;
-        return (
-          <TakeRow
-            key={take.id}
-            take={take}
-            target={target}
-            now={now}
-            deleteRef={deleteButton(take.id)}
-            onDelete={() => ask(take.id)}
-          />
-        );
+        const shared = { take, target, now };
+        if (take.deletedAt)
+          return (
+            <DeletedRow key={take.id} {...shared} onRestore={actions && (() => actions.restore(take))} />
+          );
+        if (isMeasuring(take.measurement))
+          return <MeasuringRow key={take.id} {...{ take, now }} canStop={!!actions} />;
+        if (actions && take.id === tagging.takeId)
+          return (
+            <TagsRow
+              key={take.id}
+              {...{ take, knownTags }}
+              onSave={(tags) => actions.setTags(take.id, tags).then(tagging.leave)}
+              onLeave={tagging.leave}
+            />
+          );
+        return <ReadyRow key={take.id} {...shared} actions={actions} tagging={tagging} />;
       })}
     </TableFrame>
   );
 }
 
-export function TableFrame({ target, children }: { target: Target; children: ReactNode }) {
+function ReadyRow({
+  take,
+  target,
+  now,
+  actions,
+  tagging,
+}: {
+  take: TakeListItem;
+  target: Target;
+  now: Date;
+  actions?: RowActions;
+  tagging: ReturnType<typeof useTagging>;
+}) {
+  if (!actions) return <TakeRow {...{ take, target, now }} box={<Box role="cell" gridArea="box" />} />;
+  const chosen = actions.isChosen(take);
   return (
-    <Box role="table" aria-label="Takes" marginTop="16px" borderBottom="2px solid" borderColor="ink">
+    <TakeRow
+      {...{ take, target, now, chosen }}
+      box={<ChooseCell {...{ take, chosen }} onChoose={(next) => actions.choose(take, next)} />}
+      action={
+        <RowAction
+          ref={tagging.button(take.id)}
+          aria-label={`tags of ${takeName(take)}`}
+          onClick={() => tagging.start(take.id)}
+        >
+          tags
+        </RowAction>
+      }
+    />
+  );
+}
+
+export function TableFrame({
+  target,
+  stale = false,
+  children,
+}: {
+  target: Target;
+  stale?: boolean;
+  children: ReactNode;
+}) {
+  return (
+    <Box
+      role="table"
+      aria-label="Takes"
+      aria-busy={stale}
+      marginTop="10px"
+      borderBottom="2px solid"
+      borderColor="ink"
+      opacity={stale ? 0.6 : 1}
+    >
       <TakesHead target={target} />
       <Box role="rowgroup" css={{ '& > :last-child': { borderBottomWidth: 0 } }}>
         {children}
@@ -53,25 +118,25 @@ export function TableFrame({ target, children }: { target: Target; children: Rea
   );
 }
 
-/** Which row asks before deleting; keeping the take gives the focus back to where the question came from. */
-function useDeleteQuestion() {
-  const [askedId, setAskedId] = useState<string | null>(null);
-  const keptId = useRef<string | null>(null);
-  const keptButton = useRef<HTMLButtonElement | null>(null);
+/** Which take's tags are being written; after that the focus goes back to where it came from. */
+function useTagging() {
+  const [takeId, setTakeId] = useState<string | null>(null);
+  const leftId = useRef<string | null>(null);
+  const leftButton = useRef<HTMLButtonElement | null>(null);
   useEffect(() => {
-    if (askedId === null) keptButton.current?.focus();
-    keptButton.current = null;
-    keptId.current = null;
-  }, [askedId]);
+    if (takeId === null) leftButton.current?.focus();
+    leftButton.current = null;
+    leftId.current = null;
+  }, [takeId]);
   return {
-    askedId,
-    ask: (takeId: string) => setAskedId(takeId),
-    keep: () => {
-      keptId.current = askedId;
-      setAskedId(null);
+    takeId,
+    start: (id: string) => setTakeId(id),
+    leave: () => {
+      leftId.current = takeId;
+      setTakeId(null);
     },
-    deleteButton: (takeId: string) => (button: HTMLButtonElement | null) => {
-      if (button && takeId === keptId.current) keptButton.current = button;
+    button: (id: string) => (button: HTMLButtonElement | null) => {
+      if (button && id === leftId.current) leftButton.current = button;
     },
   };
 }

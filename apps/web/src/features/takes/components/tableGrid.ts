@@ -1,17 +1,17 @@
 /**
- * The columns of the takes table. On a wide page: take, what it says, hardest hit, low end, what can be done. On a
- * narrow one each row stacks: take, sentence, then the two pictures side by side.
+ * The columns of the takes table. On a wide page: box to choose it, take, what it says, hardest hit, low end, what can
+ * be done. On a narrow one each row stacks: take, sentence, then the two pictures side by side.
  */
 export const rowGrid = {
   display: 'grid',
   gridTemplateColumns: {
-    base: 'minmax(0, 3.2fr) minmax(0, 1fr) 52px',
-    lg: 'minmax(140px, 1fr) minmax(190px, 1.4fr) 190px 112px 64px',
-    xl: '270px minmax(0, 1fr) 226px 128px 72px',
+    base: '38px minmax(0, 2.4fr) minmax(0, 1fr) 62px',
+    lg: '40px minmax(140px, 1fr) minmax(190px, 1.4fr) 190px 112px 66px',
+    xl: '48px 222px minmax(0, 1fr) 226px 128px 72px',
   },
   gridTemplateAreas: {
-    base: '"take take action" "says says says" "level low low"',
-    lg: '"take says level low action"',
+    base: '"box take take action" "box says says says" "level level low low"',
+    lg: '"box take says level low action"',
   },
 } as const;
 
@@ -19,8 +19,8 @@ export const rowGrid = {
 export const wideRowGrid = {
   ...rowGrid,
   gridTemplateAreas: {
-    base: '"take take action" "says says says"',
-    lg: '"take says says says action"',
+    base: '"box take take action" "box says says says"',
+    lg: '"box take says says says action"',
   },
 } as const;
 

@@ -1,26 +1,56 @@
-import { paths } from '@thudline/contracts';
+import { paths, takeResponse } from '@thudline/contracts';
 import { useSWRConfig } from 'swr';
-import { requestNothing } from '../../../lib/apiClient';
-import { isTakesKey } from './takesKeys';
+import { requestJson, requestNothing } from '../../../lib/apiClient';
+import { isKeyOfTake, isTakesKey } from './takesKeys';
 
-/** What can be done to a take from the list. */
+/** What can be done to takes from the list; the list is stale after each, and so is what is known of the take. */
 export function useTakeActions() {
   const { mutate } = useSWRConfig();
+  const forget = (takeIds: readonly string[]) =>
+    mutate((key) => takeIds.some((takeId) => isKeyOfTake(takeId)(key)), undefined, { revalidate: false });
+
+  const setTags = async (takeId: string, tags: string[]) => {
+    const path = paths.take(takeId);
+    await mutate(path, requestJson(path, takeResponse, { method: 'PATCH', body: { tags } }), {
+      populateCache: true,
+      revalidate: false,
+    });
+  };
+
   return {
-    /** Makes stale: every page of the list; the take's own answers are forgotten. */
-    remove: async (takeId: string) => {
-      await requestNothing(paths.take(takeId), { method: 'DELETE' });
-      await mutate((key) => typeof key === 'string' && key.startsWith(paths.take(takeId)), undefined, {
-        revalidate: false,
-      });
-      await mutate(isTakesKey);
-    },
-    /** Makes stale: every page of the list and the take's own answers. */
-    stopMeasuring: async (takeId: string) => {
-      await requestNothing(paths.cancelMeasurement(takeId), { method: 'POST' });
-      await mutate(
-        (key) => isTakesKey(key) || (typeof key === 'string' && key.startsWith(paths.take(takeId))),
+    /** They can be brought back for 30 days. */
+    remove: async (takeIds: readonly string[]) => {
+      await eachOf(takeIds, (takeId) => requestNothing(paths.take(takeId), { method: 'DELETE' })).finally(
+        async () => {
+          await forget(takeIds);
+          await mutate(isTakesKey);
+        },
       );
     },
+    restore: async (takeIds: readonly string[]) => {
+      await eachOf(takeIds, (takeId) =>
+        requestNothing(paths.restoreTake(takeId), { method: 'POST' }),
+      ).finally(() => mutate(isTakesKey));
+    },
+    setTags: async (takeId: string, tags: string[]) => {
+      await setTags(takeId, tags);
+      await mutate(isTakesKey);
+    },
+    /** Each keeps the tags it has; they are read first, since the list may be older than they are. */
+    addTags: async (takeIds: readonly string[], tags: readonly string[]) => {
+      await eachOf(takeIds, async (takeId) => {
+        const take = await requestJson(paths.take(takeId), takeResponse);
+        await setTags(takeId, [...new Set([...take.tags, ...tags])]);
+      }).finally(() => mutate(isTakesKey));
+    },
+    stopMeasuring: async (takeId: string) => {
+      await requestNothing(paths.cancelMeasurement(takeId), { method: 'POST' });
+      await mutate((key) => isTakesKey(key) || isKeyOfTake(takeId)(key));
+    },
   };
+}
+
+/** One after the other; the first that fails is told, with those before it done. */
+async function eachOf(takeIds: readonly string[], act: (takeId: string) => Promise<void>): Promise<void> {
+  for (const takeId of takeIds) await act(takeId);
 }

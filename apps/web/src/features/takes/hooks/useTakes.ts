@@ -1,18 +1,39 @@
 import { listTakesResponse, type ListTakesResponse } from '@thudline/contracts';
-import useSWR from 'swr';
+import useSWR, { useSWRConfig } from 'swr';
 import { requestJson } from '../../../lib/apiClient';
 import { isMeasuring } from '../rowWords';
+import type { TakesQuery } from '../takesQuery';
 import { takesKey } from './takesKeys';
+import { useMeasurementEvents } from './useMeasurementEvents';
 
-/** While something is being measured the list is asked again this often; a stage takes about a second. */
-const pollMs = 1500;
+const readPage = (path: string) => requestJson(path, listTakesResponse);
 
-/** One page of the player's takes, newest first; followed while any of them is being measured. */
-export function useTakes(cursor: string | null = null) {
+/** One page of the player's takes; followed while any of them is being measured. */
+export function useTakes(query: TakesQuery, cursor: string | null) {
+  const key = takesKey({ query, cursor });
+  const { cache } = useSWRConfig();
   const { data, error, mutate } = useSWR<ListTakesResponse, Error>(
-    takesKey(cursor),
-    (path: string) => requestJson(path, listTakesResponse),
-    { refreshInterval: (page) => (page?.items.some((take) => isMeasuring(take.measurement)) ? pollMs : 0) },
+    key,
+    readPage,
+    // While another sentence is being asked for, the rows of the last one stay where they are.
+    { keepPreviousData: true },
   );
-  return { page: data, error, retry: () => void mutate() };
+  const measuring = data?.items.filter((take) => isMeasuring(take.measurement)) ?? [];
+  useMeasurementEvents({
+    takeIds: measuring.map(({ id }) => id),
+    askAgain: () => void mutate(),
+  });
+  const stale = data !== undefined && cache.get(key)?.data === undefined;
+  return {
+    page: stale && error ? undefined : data,
+    error: stale || !data ? error : undefined,
+    stale,
+    retry: () => void mutate(),
+  };
+}
+
+/** How many takes fit a sentence, and up to `limit` of them. Null asks nothing. */
+export function useTakesFitting(query: TakesQuery | null, limit: number) {
+  const { data, error } = useSWR<ListTakesResponse, Error>(query && takesKey({ query, limit }), readPage);
+  return { page: data, error };
 }
