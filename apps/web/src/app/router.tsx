@@ -24,6 +24,18 @@ export const router = createBrowserRouter([
         ],
       },
       {
+        path: '/forgot',
+        lazy: async () => ({ Component: (await import('../pages/ForgotPage')).ForgotPage }),
+      },
+      {
+        path: '/reset/:token',
+        lazy: async () => ({ Component: (await import('../pages/ResetPage')).ResetPage }),
+      },
+      {
+        path: '/verify/:token',
+        lazy: async () => ({ Component: (await import('../pages/VerifyPage')).VerifyPage }),
+      },
+      {
         element: <SignedIn />,
         children: [
           {

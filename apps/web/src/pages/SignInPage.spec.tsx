@@ -56,8 +56,9 @@ describe('signing in', () => {
     await fill('juno@example.org', 'wrong one');
     await signIn();
     expect(await screen.findByRole('alert')).toHaveTextContent(
-      'E-mail and password don’t go together. Try again.',
+      'E-mail and password don’t go together. Try again, or set a new password.',
     );
+    expect(screen.getByRole('link', { name: 'set a new password' })).toHaveAttribute('href', '/forgot');
     expect(screen.getByLabelText('E-mail')).toHaveValue('juno@example.org');
     expect(screen.getByLabelText('Password')).toHaveValue('wrong one');
     expect(screen.getByLabelText('Password')).toHaveFocus();
@@ -91,6 +92,14 @@ describe('signing in', () => {
     await fill('juno@example.org', 'drumsdrums');
     await signIn();
     expect(await screen.findByRole('alert')).toHaveTextContent('The server did not answer.');
+  });
+
+  it('has a way on for who forgot the password', async () => {
+    open({});
+    expect(await screen.findByRole('link', { name: 'Forgot the password?' })).toHaveAttribute(
+      'href',
+      '/forgot',
+    );
   });
 
   it('lets a password be seen and filled in by the browser', async () => {

@@ -3,12 +3,13 @@ import { signInRequest } from '@thudline/contracts';
 import { CheckBox } from '../../../components/CheckBox';
 import { PasswordField } from '../../../components/PasswordField';
 import { TextField } from '../../../components/TextField';
+import { TextLink } from '../../../components/TextLink';
 import { useAuthActions } from '../hooks/useAuthActions';
 import { useAuthForm } from '../hooks/useAuthForm';
 import { SubmitRow } from './SubmitRow';
 
 /** Never says which half is wrong: that would tell a stranger who has an account. */
-const wrongSignIn = 'E-mail and password don’t go together. Try again.';
+const wrongSignIn = 'wrong sign-in';
 
 export function SignInForm() {
   const { signIn } = useAuthActions();
@@ -50,14 +51,22 @@ export function SignInForm() {
         autoComplete="current-password"
         value={values.password}
         onChange={(password) => set('password', password)}
-        error={errors.password}
+        error={errors.password === wrongSignIn ? <WrongSignIn /> : errors.password}
       />
       <chakra.div marginTop="2px" marginBottom="-1px">
         <CheckBox checked={values.stay} onChange={(stay) => set('stay', stay)}>
           Stay signed in on this device
         </CheckBox>
       </chakra.div>
-      <SubmitRow label="Sign in" busyLabel="Signing in…" busy={busy} error={formError} />
+      <SubmitRow label="Sign in" busyLabel="Signing in…" busy={busy} error={formError}>
+        <TextLink to="/forgot">Forgot the password?</TextLink>
+      </SubmitRow>
     </chakra.form>
   );
 }
+
+const WrongSignIn = () => (
+  <>
+    E-mail and password don’t go together. Try again, or <TextLink to="/forgot">set a new password</TextLink>.
+  </>
+);

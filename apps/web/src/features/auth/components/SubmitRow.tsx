@@ -1,4 +1,5 @@
-import { Box } from '@chakra-ui/react';
+import { Box, Flex } from '@chakra-ui/react';
+import type { ReactNode } from 'react';
 import { Button } from '../../../components/Button';
 import { FieldError } from '../../../components/FieldError';
 
@@ -8,11 +9,14 @@ export function SubmitRow({
   busyLabel,
   busy,
   error,
+  children,
 }: {
   label: string;
   busyLabel: string;
   busy: boolean;
   error: string;
+  /** Stands beside the button. */
+  children?: ReactNode;
 }) {
   return (
     <Box>
@@ -21,9 +25,12 @@ export function SubmitRow({
           <FieldError>{error}</FieldError>
         </Box>
       )}
-      <Button type="submit" aria-disabled={busy} minWidth="121px" paddingX="14px" opacity={busy ? 0.7 : 1}>
-        {busy ? busyLabel : label}
-      </Button>
+      <Flex wrap="wrap" alignItems="center" columnGap="15px" rowGap="10px">
+        <Button type="submit" aria-disabled={busy} minWidth="121px" paddingX="14px" opacity={busy ? 0.7 : 1}>
+          {busy ? busyLabel : label}
+        </Button>
+        {children}
+      </Flex>
     </Box>
   );
 }

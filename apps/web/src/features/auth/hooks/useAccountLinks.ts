@@ -1,0 +1,41 @@
+import { paths, type ForgotRequest, type ResetRequest } from '@thudline/contracts';
+import useSWR, { useSWRConfig } from 'swr';
+import { requestNothing } from '../../../lib/apiClient';
+
+/** What is done with the links that come by mail. */
+export function useAccountLinks() {
+  const { mutate } = useSWRConfig();
+  return {
+    /** Answered alike whether there is such an account or not. */
+    forgot: (body: ForgotRequest) => requestNothing(paths.forgot, { method: 'POST', body }),
+    /** Ends every session: makes stale who is signed in. */
+    reset: async (body: ResetRequest) => {
+      await requestNothing(paths.reset, { method: 'POST', body });
+      await mutate(() => true, undefined, { revalidate: false });
+      await mutate(paths.me);
+    },
+    /** Sends the mail that says an address is right once more. */
+    resendVerification: () => requestNothing(paths.resendVerification, { method: 'POST' }),
+  };
+}
+
+/** Redeems the link of a mail, once, however often the page is drawn. */
+export function useVerification(token: string) {
+  const { mutate } = useSWRConfig();
+  const verify = async ([path]: [string, string]) => {
+    await requestNothing(path, { method: 'POST', body: { token } });
+    await mutate(paths.me);
+    return 'verified' as const;
+  };
+  const {
+    data,
+    error,
+    mutate: again,
+  } = useSWR<'verified', Error, [string, string]>([paths.verify, token], verify, {
+    revalidateIfStale: false,
+    revalidateOnReconnect: false,
+    revalidateOnFocus: false,
+    shouldRetryOnError: false,
+  });
+  return { verified: data === 'verified', error, retry: () => void again() };
+}
