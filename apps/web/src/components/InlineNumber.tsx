@@ -34,7 +34,8 @@ export function InlineNumber({ label, value, digits, step, min, max, onChange }:
       aria-invalid={typed !== null && parseNumber(typed) === null ? true : undefined}
       value={shown}
       width={`${Math.max(3, shown.length) + 1}ch`}
-      minHeight="32px"
+      height="28px"
+      lineHeight="26px"
       textAlign="center"
       bg="transparent"
       color="ink"

@@ -8,7 +8,7 @@ import { usePeaks } from '../hooks/usePeaks';
 import { SectionText, SheetSection } from './SheetSection';
 
 const WholeTake = lazy(async () => ({ default: (await import('../pictures/WholeTake')).WholeTake }));
-const pictureHeight = '176px';
+const pictureHeight = '226px';
 
 /** The whole take: both outlines on one time axis, with the hits, what clipped, and where it plays. */
 export function WholeTakeSection({
@@ -28,7 +28,7 @@ export function WholeTakeSection({
     <SheetSection id="whole-take" title="Whole take">
       <SectionText>
         {plural(kicks, 'kick hit')} among {plural(report.hits.length, 'hit')}. Click or drag to play from
-        there.
+        there. Each microphone is drawn to its own peak.
       </SectionText>
       {error ? (
         <Box role="alert" minHeight={pictureHeight} paddingTop="14px">

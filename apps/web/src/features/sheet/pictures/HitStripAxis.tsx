@@ -1,12 +1,14 @@
 import type { Target } from '@thudline/contracts';
 import { number } from '../../../lib/format';
 import { Hatch } from './Hatch';
-import type { StripScale } from './HitStrip';
+import type { StripScale } from './hitStripLayout';
 import { ink } from './ink';
 import { PictureText } from './PictureText';
 
-const axisY = 155;
+export const axisY = 155;
 const bandTop = 24;
+/** Between grips closer than this the word "target" has no room. */
+const besideGripsPx = 72;
 
 /** Target band, aim, axis and the hatched edge where it clips. */
 export function HitStripAxis({
@@ -15,12 +17,18 @@ export function HitStripAxis({
   hatchId,
   target,
   ticks,
+  caption = widthPx < 480 ? 'dot = hit' : 'a dot = a hit',
+  grips = false,
 }: {
   widthPx: number;
   x: StripScale;
   hatchId: string;
   target: Target;
   ticks: number[];
+  /** Stands at the left below the axis. */
+  caption?: string;
+  /** The ends of the target and the aim are drawn by something that can be moved. */
+  grips?: boolean;
 }) {
   const low = x(target.lowDbfs);
   const high = x(target.highDbfs);
@@ -35,9 +43,11 @@ export function HitStripAxis({
         stroke={ink.ink}
         strokeWidth="1.2"
       />
-      <PictureText x={(low + high) / 2} y={14} textAnchor="middle" bold fill={ink.ink}>
-        target
-      </PictureText>
+      {(!grips || high - low > besideGripsPx) && (
+        <PictureText x={(low + high) / 2} y={14} textAnchor="middle" bold fill={ink.ink}>
+          target
+        </PictureText>
+      )}
       <rect
         x={x(0)}
         y={bandTop}
@@ -60,12 +70,12 @@ export function HitStripAxis({
           </PictureText>
         </g>
       ))}
-      <path d={`M${x(target.aimDbfs)} ${axisY - 10}l4 6.5h-8z`} fill={ink.ink} />
+      {!grips && <path d={`M${x(target.aimDbfs)} ${axisY - 10}l4 6.5h-8z`} fill={ink.ink} />}
       <PictureText x={x(target.aimDbfs)} y={172} textAnchor="middle" bold fill={ink.ink}>
         aim
       </PictureText>
       <PictureText x={0} y={172} fill={ink.muted}>
-        {widthPx < 480 ? 'dot = hit' : 'a dot = a hit'}
+        {caption}
       </PictureText>
     </>
   );

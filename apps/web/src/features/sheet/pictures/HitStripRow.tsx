@@ -1,9 +1,17 @@
 import { Box, chakra } from '@chakra-ui/react';
 import type { Target, TrackReport } from '@thudline/contracts';
 import { useId, useMemo, useState, type KeyboardEvent } from 'react';
-import { number, plural } from '../../../lib/format';
-import type { StripScale } from './HitStrip';
-import { changeLabel, dotSizes, rowHeightPx, stackDots, type Dot, type StripHit } from './hitStripLayout';
+import { number } from '../../../lib/format';
+import { HitDots } from './HitDots';
+import {
+  changeLabel,
+  rowHeightPx,
+  stackDots,
+  stripHeightPx,
+  type Dot,
+  type StripHit,
+  type StripScale,
+} from './hitStripLayout';
 import { ink } from './ink';
 import { halo, PictureText } from './PictureText';
 
@@ -19,7 +27,7 @@ interface RowProps {
   onChoose: (hitIndex: number) => void;
 }
 
-/** One microphone's line: its name, its dots, and the arrow from the hardest hit to the aim. */
+/** One microphone's line with dots that can be chosen, and the arrow from the hardest hit to the aim. */
 export function HitStripRow({ role, y, hits, track, target, widthPx, x, chosenHit, onChoose }: RowProps) {
   const dots = useMemo(() => stackDots(hits, x), [hits, x]);
   const hardest = dots.find((dot) => dot.hardest);
@@ -30,98 +38,17 @@ export function HitStripRow({ role, y, hits, track, target, widthPx, x, chosenHi
         position="absolute"
         inset="0"
         width={`${widthPx}px`}
-        height="180px"
+        height={`${stripHeightPx}px`}
         aria-hidden
         pointerEvents="none"
       >
-        <PictureText x={0} y={y - 4} fontSize={15} bold fill={ink[role]}>
-          {role}
-        </PictureText>
-        <PictureText x={0} y={y + 13} fill={ink.muted}>
-          {hits.length === 0 ? 'no hit' : plural(hits.length, 'hit')}
-        </PictureText>
-        <path d={`M${x.left} ${y}H${x.right}`} stroke={ink.rule} strokeWidth="1.2" />
-        {dots.map((dot) => (
-          <DotMark key={dot.index} dot={dot} y={y} role={role} chosen={dot.index === chosenHit} />
-        ))}
-        {hardest && !clipped && (
-          <HardestLabel dot={hardest} y={y} role={role} x={x} rowsBelow={rowsUnder(dots, hardest)} />
-        )}
+        <HitDots {...{ role, y, x, dots, clipped, chosenHit }} />
         {hardest && (
           <GainArrow {...{ y, x, track, target, clipped, fromDbfs: clipped ? 0 : hardest.peakDbfs }} />
         )}
       </chakra.svg>
       <DotButtons {...{ dots, y, role, chosenHit, onChoose }} />
     </>
-  );
-}
-
-/** How many rows hang under the hardest hit, where its label may have to go. */
-const rowsUnder = (dots: readonly Dot[], hardest: Dot) =>
-  Math.max(0, ...dots.filter((dot) => Math.abs(dot.x - hardest.x) < 44).map((dot) => dot.row));
-
-function DotMark({
-  dot,
-  y,
-  role,
-  chosen,
-}: {
-  dot: Dot;
-  y: number;
-  role: 'kick' | 'overhead';
-  chosen: boolean;
-}) {
-  const r = dot.hardest ? dotSizes.hardestRadiusPx : dotSizes.dotRadiusPx;
-  const cy = y + dot.row * rowHeightPx;
-  const ring = role === 'overhead';
-  if (dot.clipped)
-    return (
-      <>
-        {chosen && <circle cx={dot.x} cy={cy} r={9} fill="none" stroke={ink.ink} strokeWidth="1.6" />}
-        <path d={`M${dot.x - 4.6} ${cy - 4.6}l9.2 9.2m0-9.2l-9.2 9.2`} stroke={ink[role]} strokeWidth="2.6" />
-      </>
-    );
-  return (
-    <>
-      {chosen && <circle cx={dot.x} cy={cy} r={r + 3.4} fill="none" stroke={ink.ink} strokeWidth="1.6" />}
-      <circle
-        cx={dot.x}
-        cy={cy}
-        r={ring ? r - 0.9 : r}
-        fill={ring ? ink.sheet : ink.kick}
-        stroke={ring ? ink.overhead : 'none'}
-        strokeWidth={ring ? 1.9 : 0}
-      />
-    </>
-  );
-}
-
-function HardestLabel({
-  dot,
-  y,
-  role,
-  x,
-  rowsBelow,
-}: {
-  dot: Dot;
-  y: number;
-  role: 'kick' | 'overhead';
-  x: StripScale;
-  rowsBelow: number;
-}) {
-  const fitsRight = dot.x + 45 < x.right;
-  return (
-    <PictureText
-      x={fitsRight ? dot.x + 13 : x.right - 4}
-      y={fitsRight ? y + 5 : y + 20 + rowsBelow * rowHeightPx}
-      textAnchor={fitsRight ? 'start' : 'end'}
-      fontSize={15}
-      bold
-      fill={ink[role]}
-      {...halo}
-    >
-      {number(dot.peakDbfs)}
-    </PictureText>
   );
 }
 

@@ -10,7 +10,7 @@ import type { TakePeaks } from '../hooks/usePeaks';
 import { PlayMark } from '../components/PlayMark';
 import { WholeTakeMarks } from './WholeTakeMarks';
 
-const outlinePx = 52;
+const outlinePx = 62;
 
 interface WholeTakeProps {
   report: ReportResponse;
@@ -33,7 +33,7 @@ export function WholeTake({ report, peaks, listening, chosenHit, canListen }: Wh
   const plays = listening.playing === 'take';
   return (
     <Box ref={ref} position="relative" marginTop="10px">
-      <Box ref={outlines} paddingTop="16px" aria-hidden />
+      <Box ref={outlines} paddingTop="16px" paddingBottom="26px" aria-hidden />
       <WholeTakeMarks {...{ report, chosenHit, widthPx, outlinePx }} />
       {canListen && (
         <Flex gap="16px" alignItems="center" marginTop="8px" _print={{ display: 'none' }}>
@@ -102,7 +102,7 @@ function useOutlines({ container, peaks, durationS, media }: OutlineOptions): nu
     const waves = WaveSurfer.create({
       container: container.current,
       media,
-      peaks: peaks.outlines,
+      peaks: peaks.outlines.map(toOwnPeak),
       duration: durationS,
       height: outlinePx,
       normalize: false,
@@ -117,6 +117,12 @@ function useOutlines({ container, peaks, durationS, media }: OutlineOptions): nu
     return () => waves.destroy();
   }, [container, peaks, durationS, media, theme]);
   return playedS;
+}
+
+/** An overhead recorded low would be a flat line: each track is drawn to its own peak, and the section says so. */
+function toOwnPeak(outline: Float32Array): Float32Array {
+  const peak = outline.reduce((top, value) => Math.max(top, value), 0);
+  return peak > 0 ? outline.map((value) => value / peak) : outline;
 }
 
 /** Canvases don't follow the theme by themselves. */

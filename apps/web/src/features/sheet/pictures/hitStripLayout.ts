@@ -1,4 +1,4 @@
-import type { Target } from '@thudline/contracts';
+import type { ReportResponse, Target } from '@thudline/contracts';
 
 export interface StripHit {
   /** Index into the report's hits. */
@@ -22,6 +22,41 @@ export interface Dot extends StripHit {
   /** Rows from the line: 0 on it, 1 below, −1 above, and so on. */
   row: number;
   hardest: boolean;
+}
+
+/** Height of the whole strip, and where the two lines run. */
+export const stripHeightPx = 180;
+export const stripRowsPx = { kick: 62, overhead: 128 };
+
+/** dBFS → px across the strip; `dbfsAt` is the way back. */
+export interface StripScale {
+  (dbfs: number): number;
+  dbfsAt: (xPx: number) => number;
+  left: number;
+  right: number;
+}
+
+export function stripScale(widthPx: number, startDbfs: number): StripScale {
+  const left = widthPx < 480 ? 66 : 96;
+  const right = widthPx - 34;
+  const scale = (dbfs: number) =>
+    left + ((Math.max(dbfs, startDbfs) - startDbfs) / -startDbfs) * (right - left);
+  const dbfsAt = (xPx: number) => startDbfs - ((xPx - left) / (right - left)) * startDbfs;
+  return Object.assign(scale, { dbfsAt, left, right });
+}
+
+/** The kick line shows kick hits; the overhead's line every hit, since all of them share its preamp. */
+export function stripHits(report: ReportResponse): { kick: StripHit[]; overhead: StripHit[] } {
+  const withLevel = (peakDbfs: number | null, index: number, role: 'kick' | 'overhead') =>
+    peakDbfs === null
+      ? []
+      : [{ index, peakDbfs, clipped: isClippedHit(peakDbfs, report[role].level === 'clipped') }];
+  return {
+    kick: report.hits.flatMap((hit, i) =>
+      hit.kind === 'kick' ? withLevel(hit.kickPeakDbfs, i, 'kick') : [],
+    ),
+    overhead: report.hits.flatMap((hit, i) => withLevel(hit.overheadPeakDbfs, i, 'overhead')),
+  };
 }
 
 const dotRadiusPx = 4.6;
