@@ -146,7 +146,24 @@ describe('the sheet', () => {
     expect(await screen.findByRole('heading', { level: 1 })).toHaveTextContent(
       'the files could not be read.',
     );
-    expect(screen.getByRole('link', { name: 'Add it again' })).toHaveAttribute('href', '/takes/new');
+    expect(screen.getByRole('button', { name: 'Measure it again' })).toBeInTheDocument();
+  });
+
+  it('measures a take again', async () => {
+    const failed = measurement({ state: 'failed', progress: 0, reason: 'the files could not be read.' });
+    const server = open({
+      [`GET ${paths.take(takeId)}`]: json(sampleTake({ hasReport: false, measurement: failed })),
+      [`POST ${paths.measureAgain(takeId)}`]: () => ({ status: 204 }),
+    });
+    await userEvent.click(await screen.findByRole('button', { name: 'Measure it again' }));
+    await waitFor(() =>
+      expect(server.requests.filter(({ path }) => path === paths.take(takeId)).length).toBeGreaterThan(1),
+    );
+    expect(server.requests).toContainEqual({
+      method: 'POST',
+      path: paths.measureAgain(takeId),
+      body: undefined,
+    });
   });
 
   it('says that a take of somebody else is not here', async () => {

@@ -25,7 +25,7 @@ export function measuringWords({ state, stage }: MeasurementResponse): string {
 
 /** What a row says that has no sheet to speak from. */
 export function unmeasuredWords({ state, reason }: MeasurementResponse): { strong: string; rest: string } {
-  if (state === 'cancelled') return { strong: 'Not measured:', rest: 'you stopped it. Add the files again.' };
+  if (state === 'cancelled') return { strong: 'Not measured:', rest: 'you stopped it.' };
   return { strong: 'Not measured:', rest: reason ?? 'something went wrong. Add the files again.' };
 }
 

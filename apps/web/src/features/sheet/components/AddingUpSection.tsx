@@ -1,11 +1,16 @@
 import type { ReportResponse } from '@thudline/contracts';
 import { thirdOctaves } from '@thudline/dsp';
+import { lazy, Suspense } from 'react';
 import { hertz, signedDecibels } from '../../../lib/format';
 import { Findings } from './Findings';
 import { MarginNote } from './RuledSheet';
 import { addingUpTopics, findingsOf, verdictWord, worstStatus } from './sectionWords';
 import { SheetSection } from './SheetSection';
-import { PairBench, type PairBenchProps } from './PairBench';
+import { BenchLoading } from './BenchLoading';
+import type { PairBenchProps } from './PairBench';
+
+/** The pictures come after the words: who opened a link on a phone reads before they are there. */
+const PairBench = lazy(async () => ({ default: (await import('./PairBench')).PairBench }));
 
 type AddingUpProps = Omit<PairBenchProps, 'chosenHit'> & { chosenHit: number | null };
 
@@ -23,7 +28,11 @@ export function AddingUpSection({ chosenHit, ...props }: AddingUpProps) {
       note={<Caveats report={report} />}
     >
       <Findings findings={findings} />
-      {report.pairSpectrum && chosenHit !== null && <PairBench {...props} chosenHit={chosenHit} />}
+      {report.pairSpectrum && chosenHit !== null && (
+        <Suspense fallback={<BenchLoading />}>
+          <PairBench {...props} chosenHit={chosenHit} />
+        </Suspense>
+      )}
     </SheetSection>
   );
 }

@@ -1,7 +1,7 @@
 import { Box, Flex } from '@chakra-ui/react';
 import type { TakeResponse } from '@thudline/contracts';
 import { useState } from 'react';
-import { TextButton } from '../../../components/Button';
+import { Button, TextButton } from '../../../components/Button';
 import { ButtonLink } from '../../../components/ButtonLink';
 import { Headline } from '../../../components/Headline';
 import { ProgressSwell } from '../../../components/ProgressSwell';
@@ -26,14 +26,7 @@ export function MeasuringSheet({ take }: { take: TakeResponse }) {
 
 function Underway({ take }: { take: TakeResponse }) {
   const { stopMeasuring } = useTakeEdits(take);
-  const [failure, setFailure] = useState('');
-  const stop = async () => {
-    try {
-      await stopMeasuring();
-    } catch (error) {
-      setFailure(error instanceof Error ? error.message : 'Stopping did not work. Try again.');
-    }
-  };
+  const { failure, attempt } = useAttempt('Stopping did not work. Try again.');
   const words = measuringWords(take.measurement);
   return (
     <>
@@ -46,20 +39,41 @@ function Underway({ take }: { take: TakeResponse }) {
           <Box color="ink.muted" aria-live="polite">
             {words}
           </Box>
-          <TextButton onClick={() => void stop()}>Stop</TextButton>
+          <TextButton onClick={() => void attempt(stopMeasuring)}>Stop</TextButton>
         </Flex>
-        {failure && (
-          <Box role="alert" color="fix" fontSize="small" marginTop="8px">
-            {failure}
-          </Box>
-        )}
+        <Failure>{failure}</Failure>
       </Box>
     </>
   );
 }
 
+/** Does something on the server and keeps the sentence where it did not work. */
+function useAttempt(neutralWords: string) {
+  const [failure, setFailure] = useState('');
+  const attempt = async (act: () => Promise<void>) => {
+    setFailure('');
+    try {
+      await act();
+    } catch (error) {
+      setFailure(error instanceof Error ? error.message : neutralWords);
+    }
+  };
+  return { failure, attempt };
+}
+
+function Failure({ children }: { children: string }) {
+  if (!children) return null;
+  return (
+    <Box role="alert" color="fix" fontSize="small" marginTop="8px">
+      {children}
+    </Box>
+  );
+}
+
 function NotMeasured({ take }: { take: TakeResponse }) {
   const { strong, rest } = unmeasuredWords(take.measurement);
+  const { measureAgain } = useTakeEdits(take);
+  const { failure, attempt } = useAttempt('That did not work. Try again in a moment.');
   return (
     <>
       <Headline marginTop="8px">
@@ -69,11 +83,12 @@ function NotMeasured({ take }: { take: TakeResponse }) {
         The files are kept as they came.
       </Box>
       <Flex marginTop="28px" gap="14px">
-        <ButtonLink to="/takes/new">Add it again</ButtonLink>
+        {take.rights.change && <Button onClick={() => void attempt(measureAgain)}>Measure it again</Button>}
         <ButtonLink to="/takes" look="outline">
           Back to takes
         </ButtonLink>
       </Flex>
+      <Failure>{failure}</Failure>
     </>
   );
 }

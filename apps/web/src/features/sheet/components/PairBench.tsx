@@ -10,6 +10,7 @@ import type { Listening } from '../hooks/useListening';
 import type { usePairSpectrum } from '../hooks/usePairSpectrum';
 import type { TraceBand } from '../pictures/pairTraceLayout';
 import { WhereItHelps } from '../pictures/WhereItHelps';
+import { BenchLoading } from './BenchLoading';
 import { ChoiceFigures } from './ChoiceFigures';
 import { ChoiceRow } from './ChoiceRow';
 import { ChoiceSentence } from './ChoiceSentence';
@@ -46,8 +47,7 @@ export function PairBench(props: PairBenchProps) {
         </TextButton>
       </Box>
     );
-  if (!spectrum)
-    return <Box height={{ base: '860px', lg: '760px' }} role="status" aria-label="Loading the pictures" />;
+  if (!spectrum) return <BenchLoading />;
   return <LoadedBench {...props} spectrum={spectrum} />;
 }
 

@@ -1,9 +1,7 @@
 import { paths, takeResponse, type TakeResponse, type UpdateTakeRequest } from '@thudline/contracts';
 import { useSWRConfig } from 'swr';
 import { requestJson, requestNothing } from '../../../lib/apiClient';
-
-const isTakesList = (key: unknown) =>
-  typeof key === 'string' && (key === paths.takes || key.startsWith(`${paths.takes}?`));
+import { isTakesKey } from '../../takes/hooks/takesKeys';
 
 /** Changes to one take; the item and every page of the list hear of them. */
 export function useTakeEdits(take: TakeResponse) {
@@ -16,14 +14,18 @@ export function useTakeEdits(take: TakeResponse) {
       rollbackOnError: true,
       revalidate: false,
     });
-    await mutate(isTakesList);
+    await mutate(isTakesKey);
   };
 
-  const stopMeasuring = async () => {
-    await requestNothing(paths.cancelMeasurement(take.id), { method: 'POST' });
+  const post = async (path: string) => {
+    await requestNothing(path, { method: 'POST' });
     await mutate(key);
-    await mutate(isTakesList);
+    await mutate(isTakesKey);
   };
 
-  return { update, stopMeasuring };
+  return {
+    update,
+    stopMeasuring: () => post(paths.cancelMeasurement(take.id)),
+    measureAgain: () => post(paths.measureAgain(take.id)),
+  };
 }
