@@ -11,6 +11,11 @@ const NativeDialog = chakra('dialog', {
     padding: { base: '18px 18px 22px', md: '24px 28px 28px' },
     bg: 'sheet',
     color: 'ink',
+    // A dialog is no part of the line it was opened from.
+    fontSize: 'body',
+    fontWeight: 400,
+    lineHeight: 1.45,
+    textAlign: 'left',
     border: '2px solid',
     borderColor: 'ink',
     borderRadius: '3px',

@@ -14,7 +14,7 @@ describe('actions in big print', () => {
         id: 'kick-gain',
         status: 'watch',
         strong: 'Kick down 6.5 dB',
-        detail: 'Your hardest hit should show about −9.',
+        detail: 'Hardest hit should show about −9.',
       },
     ]);
   });

@@ -25,7 +25,10 @@ function shortened(action: string): string {
 function wordsOf(action: NextAction): Pick<BigAction, 'strong' | 'detail'> {
   if (action.id === 'flip-overhead')
     return { strong: 'Flip the overhead', detail: 'Press the polarity switch on its preamp.' };
-  return { strong: shortened(action.action), detail: action.detail };
+  return {
+    strong: shortened(action.action),
+    detail: action.detail.replace(/^Your hardest hit/, 'Hardest hit'),
+  };
 }
 
 /** What to do before the next take, without what is to be left alone. */

@@ -36,7 +36,7 @@ function Ready({ link }: { link: PhoneLinkResponse }) {
     <>
       Point the phone’s camera at this. It shows what to do before the next take, very large, and every next
       take by itself.
-      <Box marginTop="14px" textAlign="center" lineHeight={0}>
+      <Box marginTop="14px">
         <ScanCode text={link.url} label="Code to scan: opens Big print on a phone" />
       </Box>
       <Box marginTop="12px" fontSize="small" color="ink.muted">

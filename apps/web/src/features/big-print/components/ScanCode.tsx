@@ -12,6 +12,7 @@ export function ScanCode({ text, label }: { text: string; label: string }) {
       viewBox={`0 0 ${sizeModules} ${sizeModules}`}
       width="min(280px, 100%)"
       height="auto"
+      marginX="auto"
       shapeRendering="crispEdges"
     >
       <rect width={sizeModules} height={sizeModules} fill="#FFFFFF" />

@@ -32,7 +32,7 @@ const reasons = [
   { strong: 'Why sit still', rest: 'What is left then is the noise: fans, hum, the preamp itself.' },
   {
     strong: 'Why the kick alone',
-    rest: 'Only then does the sheet know when each microphone hears it, and whether the two add up.',
+    rest: 'With nothing else sounding the sheet can tell when each microphone hears it, and whether the two add up.',
   },
   { strong: 'Why so hard', rest: 'The hardest hit decides the preamp. A timid one lets the next take clip.' },
 ];

@@ -24,6 +24,11 @@ export function LiveBench({
   const { spectrum } = usePairSpectrum(report);
   const bench = useChoice(report.agreement);
   const listening = useListening({ report, spectrum, bench });
+  // Two choices are enough to hear what a flip does; the line below shows the others as ticks.
+  const twoChoices = {
+    ...bench,
+    choices: bench.named.filter(({ name }) => name === 'as-recorded' || name === 'flipped'),
+  };
   const hitExcerpt = useHitExcerpt(report, chosenHit);
   const hitNumber = kickHits.indexOf(chosenHit) + 1;
   return (
@@ -36,7 +41,8 @@ export function LiveBench({
     >
       <LiveFinding report={report} topics={['adding-up']} />
       <ChoiceRow
-        {...{ report, bench, listening, kickHits, chosenHit, onChooseHit, hitExcerpt, hitNumber }}
+        bench={twoChoices}
+        {...{ report, listening, kickHits, chosenHit, onChooseHit, hitExcerpt, hitNumber }}
         canListen
       />
       {spectrum ? (

@@ -1,3 +1,4 @@
+import { Box } from '@chakra-ui/react';
 import { defaultUserSettings, type TakeResponse } from '@thudline/contracts';
 import { useMemo, type ReactNode } from 'react';
 import { Button } from '../../../components/Button';
@@ -36,6 +37,7 @@ export function ReadOnlySheet({
       report={report}
       settings={me?.settings ?? defaultUserSettings}
       above={above}
+      moreButtons={readOnly.rights.listen && <PhoneSpeakers />}
     />
   );
 }
@@ -44,6 +46,22 @@ const withoutChange = (take: TakeResponse): TakeResponse => ({
   ...take,
   rights: { ...take.rights, change: false },
 });
+
+/** Where listening starts on a phone. */
+function PhoneSpeakers() {
+  return (
+    <Box
+      display={{ base: 'block', lg: 'none' }}
+      width="100%"
+      marginTop="-4px"
+      fontSize="caption"
+      lineHeight="19px"
+      color="ink.muted"
+    >
+      Phone speakers can’t play this low: listen on headphones, not too loud.
+    </Box>
+  );
+}
 
 function NotYet() {
   return (
