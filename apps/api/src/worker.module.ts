@@ -4,6 +4,9 @@ import { ConfigModule } from './config/config.module';
 import { databaseModule } from './database/database.module';
 import { HousekeepingService } from './housekeeping/housekeeping.service';
 import { loggerModule } from './logging/logger.module';
+import { MailWorker } from './mail/mail-worker';
+import { MailWriter } from './mail/mail-writer';
+import { Mailer } from './mail/mailer';
 import { MeasurePool } from './measuring/measure-pool';
 import { MeasureQueue } from './measuring/measure-queue';
 import { MeasurementClaims } from './measuring/measurement-claims';
@@ -11,9 +14,11 @@ import { MeasurementSweep } from './measuring/measurement-sweep';
 import { MeasuringRuns } from './measuring/measuring-runs';
 import { MeasuringWorker } from './measuring/measuring-worker';
 import { TakeFetcher } from './measuring/take-fetcher';
+import { QueueSender } from './queue/queue-sender';
 import { StorageModule } from './storage/storage.module';
+import { OneTimeTokensService } from './tokens/one-time-tokens.service';
 
-/** The worker process: no HTTP, only what measures. */
+/** The worker process: no HTTP, only what measures, sends mails and tidies up. */
 @Module({})
 export class WorkerModule {
   static of(config: Config): DynamicModule {
@@ -21,6 +26,7 @@ export class WorkerModule {
       module: WorkerModule,
       imports: [ConfigModule.of(config), loggerModule, databaseModule, StorageModule],
       providers: [
+        QueueSender,
         MeasureQueue,
         MeasurePool,
         MeasurementClaims,
@@ -28,6 +34,10 @@ export class WorkerModule {
         TakeFetcher,
         MeasuringRuns,
         MeasuringWorker,
+        OneTimeTokensService,
+        Mailer,
+        MailWriter,
+        MailWorker,
         HousekeepingService,
       ],
     };

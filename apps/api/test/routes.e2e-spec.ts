@@ -27,6 +27,9 @@ const openToAnyone = new Set([
   `post ${paths.refresh}`,
   `post ${paths.signOut}`,
   `get ${paths.health}`,
+  `post ${paths.forgot}`,
+  `post ${paths.reset}`,
+  `post ${paths.verify}`,
   `post ${paths.openShare}`,
   `get ${paths.sampleSheet}`,
 ]);

@@ -3,7 +3,11 @@ import { JwtModule } from '@nestjs/jwt';
 import { AuditModule } from '../audit/audit.module';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
+import { MailModule } from '../mail/mail.module';
 import { ThrottleModule } from '../throttle/throttle.module';
+import { TokensModule } from '../tokens/tokens.module';
+import { AccountLinksController } from './account-links.controller';
+import { AccountLinksService } from './account-links.service';
 import { AuthController } from './auth.controller';
 import { AuthService } from './auth.service';
 import { LocalStrategy } from './local.strategy';
@@ -20,9 +24,9 @@ const jwt = JwtModule.registerAsync({
 });
 
 @Module({
-  imports: [jwt, AuditModule, ThrottleModule],
-  controllers: [AuthController],
-  providers: [AuthService, LocalStrategy, PasswordsService, SessionsService],
+  imports: [jwt, AuditModule, MailModule, ThrottleModule, TokensModule],
+  controllers: [AuthController, AccountLinksController],
+  providers: [AuthService, AccountLinksService, LocalStrategy, PasswordsService, SessionsService],
   exports: [SessionsService],
 })
 export class AuthModule {}

@@ -5,6 +5,7 @@ import { AuditService } from '../audit/audit.service';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
 import { AppError } from '../errors/app-error';
+import { MailQueue } from '../mail/mail-queue';
 import { ThrottleService } from '../throttle/throttle.service';
 import { User } from '../users/entities/user.entity';
 import { PasswordsService } from './passwords.service';
@@ -16,6 +17,7 @@ export class AuthService {
     private readonly passwords: PasswordsService,
     private readonly throttle: ThrottleService,
     private readonly audit: AuditService,
+    private readonly mails: MailQueue,
     @Inject(CONFIG) private readonly config: Config,
   ) {}
 
@@ -35,6 +37,7 @@ export class AuthService {
       throw error;
     }
     this.audit.record({ kind: 'joined', userId: user.id, address });
+    await this.mails.send({ kind: 'verify', userId: user.id });
     return user;
   }
 

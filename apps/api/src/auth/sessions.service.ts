@@ -90,6 +90,12 @@ export class SessionsService {
     await this.em.flush();
   }
 
+  /** Ends every session of a person, save one where one is named. */
+  async endAll(user: User, savedSessionId?: string): Promise<void> {
+    const others = savedSessionId ? { id: { $ne: savedSessionId } } : {};
+    await this.em.nativeUpdate(Session, { user, revokedAt: null, ...others }, { revokedAt: new Date() });
+  }
+
   private async findGenuine(refreshToken: string): Promise<Session | null> {
     const token = parseRefreshToken(refreshToken);
     if (!token) return null;

@@ -35,6 +35,12 @@ const environment = z.object({
   JOIN_LIMIT_PER_ADDRESS: count.default(100),
   /** Links opened in a quarter of an hour; common practice, no source. */
   OPEN_LINK_LIMIT_PER_ADDRESS: count.default(120),
+  /** Mails in an hour to one account, and asked for by one address; common practice, no source. */
+  MAIL_LIMIT_PER_ACCOUNT: count.default(5),
+  MAIL_LIMIT_PER_ADDRESS: count.default(30),
+  /** Without one no mail is sent, and the log says so. */
+  SMTP_URL: z.url({ protocol: /^smtps?$/ }).optional(),
+  MAIL_FROM: z.string().min(3).optional(),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent']).default('info'),
 });
 
@@ -75,7 +81,13 @@ function grouped(env: z.output<typeof environment>) {
       signInPerAccount: env.SIGN_IN_LIMIT_PER_ACCOUNT,
       signInPerAddress: env.SIGN_IN_LIMIT_PER_ADDRESS,
       joinPerAddress: env.JOIN_LIMIT_PER_ADDRESS,
+      mailsPerAccount: env.MAIL_LIMIT_PER_ACCOUNT,
+      mailsPerAddress: env.MAIL_LIMIT_PER_ADDRESS,
       openLinkPerAddress: env.OPEN_LINK_LIMIT_PER_ADDRESS,
+    },
+    mail: {
+      smtpUrl: env.SMTP_URL,
+      from: env.MAIL_FROM ?? `Thudline <no-reply@${new URL(env.PUBLIC_URL).hostname}>`,
     },
     logLevel: env.LOG_LEVEL,
   };

@@ -9,6 +9,7 @@ import { TakeFile } from '../takes/entities/take-file.entity';
 import { TakeTrack } from '../takes/entities/take-track.entity';
 import { Take } from '../takes/entities/take.entity';
 import { Throttle } from '../throttle/entities/throttle.entity';
+import { OneTimeToken } from '../tokens/entities/one-time-token.entity';
 import { User } from '../users/entities/user.entity';
 
 export const entities = [
@@ -24,4 +25,5 @@ export const entities = [
   Throttle,
   Share,
   Setting,
+  OneTimeToken,
 ];

@@ -1,6 +1,6 @@
 import { MikroORM } from '@mikro-orm/postgresql';
 import { loadConfig } from '../config/config';
-import { prepareQueue } from '../measuring/queue.schema';
+import { prepareQueue } from '../queue/queue.schema';
 import { databaseConfig } from './database.config';
 
 /** Brings the tables and the queue's own schema up to date; safe to run again. */

@@ -1,6 +1,7 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { BeforeApplicationShutdown, Injectable, Logger, OnApplicationBootstrap } from '@nestjs/common';
 import { Session } from '../auth/entities/session.entity';
+import { OneTimeToken } from '../tokens/entities/one-time-token.entity';
 import { Throttle } from '../throttle/entities/throttle.entity';
 
 const hourMs = 60 * 60 * 1000;
@@ -29,6 +30,7 @@ export class HousekeepingService implements OnApplicationBootstrap, BeforeApplic
   async run(now: Date): Promise<void> {
     const em = this.em.fork();
     await em.nativeDelete(Throttle, { windowStart: { $lt: new Date(now.getTime() - dayMs) } });
+    await em.nativeDelete(OneTimeToken, { expiresAt: { $lt: new Date(now.getTime() - dayMs) } });
     await em.nativeDelete(Session, { expiresAt: { $lt: new Date(now.getTime() - endedSessionKeptMs) } });
   }
 }

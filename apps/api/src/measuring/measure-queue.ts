@@ -1,9 +1,7 @@
-import { EntityManager, Knex } from '@mikro-orm/postgresql';
-import { Inject, Injectable, Logger, OnApplicationBootstrap, OnApplicationShutdown } from '@nestjs/common';
-import PgBoss from 'pg-boss';
-import { Config } from '../config/config';
-import { CONFIG } from '../config/config.module';
-import { createBoss, measureQueue } from './queue.schema';
+import { EntityManager } from '@mikro-orm/postgresql';
+import { Injectable } from '@nestjs/common';
+import { QueueSender } from '../queue/queue-sender';
+import { measureQueue } from '../queue/queue.schema';
 
 export interface MeasureJob {
   measurementId: string;
@@ -16,51 +14,18 @@ interface SendOptions {
   afterS?: number;
 }
 
-/** The door to pg-boss for those who only send. */
 @Injectable()
-export class MeasureQueue implements OnApplicationBootstrap, OnApplicationShutdown {
-  private readonly logger = new Logger(MeasureQueue.name);
-  private readonly boss: PgBoss;
-
-  constructor(@Inject(CONFIG) config: Config) {
-    this.boss = createBoss(config.databaseUrl, 'sends');
-    this.boss.on('error', (error) => this.logger.error(error, 'The queue reports an error'));
-  }
-
-  async onApplicationBootstrap(): Promise<void> {
-    await this.boss.start();
-  }
-
-  async onApplicationShutdown(): Promise<void> {
-    await this.boss.stop({ graceful: false });
-  }
+export class MeasureQueue {
+  constructor(private readonly sender: QueueSender) {}
 
   /** Sends within the transaction of `em`: the job is there if and only if the rows are. */
   async send(em: EntityManager, { measurementId, priority = 0, afterS = 0 }: SendOptions): Promise<void> {
     const job: MeasureJob = { measurementId };
-    await this.boss.send(measureQueue, job, {
-      singletonKey: measurementId,
-      priority,
-      startAfter: afterS,
-      db: transactionOf(em),
-    });
+    const options = { singletonKey: measurementId, priority, startAfter: afterS };
+    await this.sender.sendWith(em, measureQueue, job, options);
   }
 
-  async answers(): Promise<boolean> {
-    return (await this.boss.getQueue(measureQueue).catch(() => null)) !== null;
+  answers(): Promise<boolean> {
+    return this.sender.answers(measureQueue);
   }
-}
-
-interface PgConnection {
-  query(text: string, values: unknown[]): Promise<{ rows: unknown[] }>;
-}
-
-function transactionOf(em: EntityManager): PgBoss.Db {
-  const transaction = em.getTransactionContext<Knex.Transaction>();
-  if (!transaction) throw new Error('A job is sent with the rows it is about: in a transaction.');
-  const client = transaction.client as { acquireConnection(): Promise<PgConnection> };
-  return {
-    // Within a transaction this is always the transaction's own connection.
-    executeSql: async (text, values) => (await client.acquireConnection()).query(text, values),
-  };
 }

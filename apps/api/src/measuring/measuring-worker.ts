@@ -8,13 +8,13 @@ import {
 import PgBoss from 'pg-boss';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
+import { createBoss, measureQueue } from '../queue/queue.schema';
 import { ScratchService } from '../storage/scratch.service';
 import { MeasureJob } from './measure-queue';
 import { MeasurePool } from './measure-pool';
 import { MeasurementClaims } from './measurement-claims';
 import { MeasurementSweep } from './measurement-sweep';
 import { MeasuringRuns } from './measuring-runs';
-import { createBoss, measureQueue } from './queue.schema';
 
 /** Takes jobs as they come, as many at a time as there are threads, and takes up what dead workers left. */
 @Injectable()

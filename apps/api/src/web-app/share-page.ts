@@ -1,21 +1,13 @@
 import { SharePreview } from '../shares/share-preview.service';
-
-const entities: Record<string, string> = {
-  '&': '&amp;',
-  '<': '&lt;',
-  '>': '&gt;',
-  '"': '&quot;',
-  "'": '&#39;',
-};
-const escaped = (text: string) => text.replace(/[&<>"']/g, (letter) => entities[letter] ?? letter);
+import { escapeHtml } from '../text/escape-html';
 
 /** Title and verdict in the page's head, and nothing else of the take. */
 export function withPreview(page: string, { title, verdict }: SharePreview): string {
   const tags = [
-    `<title>${escaped(title)} · Thudline</title>`,
+    `<title>${escapeHtml(title)} · Thudline</title>`,
     `<meta property="og:site_name" content="Thudline">`,
-    `<meta property="og:title" content="${escaped(title)}">`,
-    ...(verdict ? [`<meta property="og:description" content="${escaped(verdict)}">`] : []),
+    `<meta property="og:title" content="${escapeHtml(title)}">`,
+    ...(verdict ? [`<meta property="og:description" content="${escapeHtml(verdict)}">`] : []),
     `<meta name="robots" content="noindex, nofollow">`,
   ];
   const rest = page.replace(/<title>.*?<\/title>\s*/s, '');

@@ -7,6 +7,8 @@ export const auditKinds = [
   'sign-in-failed',
   'signed-out',
   'session-reused',
+  'password-reset',
+  'password-changed',
   'take-deleted',
   'share-made',
   'share-ended',

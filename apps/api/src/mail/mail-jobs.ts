@@ -1,0 +1,6 @@
+/**
+ * What the mail queue carries: whom to write and why, never a token. The worker makes the token as it writes the mail, so
+ * that none lies in the queue's tables; and whether an address has an account at all is looked up there, not while
+ * somebody waits for an answer.
+ */
+export type MailJob = { kind: 'verify'; userId: string } | { kind: 'reset'; email: string };
