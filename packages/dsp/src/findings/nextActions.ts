@@ -1,5 +1,5 @@
 import { levelStatus, NOISE_WATCH_DBFS } from '../report/level';
-import type { NextAction, Reader, ReportFigures } from '../report/reportTypes';
+import type { ActionId, NextAction, Reader, ReportFigures } from '../report/reportTypes';
 import { addingUpStatus, hasFewHits } from './addingUpFinding';
 import { noisierMicrophone } from './noiseFinding';
 import { halfDbText, wholeDbfsText } from './words';
@@ -28,7 +28,7 @@ function gainActions(figures: ReportFigures, role: Role, { target }: Reader): Ne
   const track = figures[role];
   const change = halfDbText(track.gainChangeDb ?? 0);
   const shows = `Your hardest hit should show about ${wholeDbfsText(target.aimDbfs)}.`;
-  const turn = (id: string, action: string, detail: string): NextAction[] => [
+  const turn = (id: ActionId, action: string, detail: string): NextAction[] => [
     { id, action, detail, leave: false },
   ];
   if (track.level === null) return [];

@@ -108,14 +108,37 @@ export interface LineSentence {
   reason: string;
 }
 
+/** Every tick box there is, in order of what matters while nothing clips; what to leave alone comes last. */
+export const actionIds = [
+  'flip-overhead',
+  'kick-gain',
+  'overhead-gain',
+  'look-for-noise',
+  'leave-silence',
+  'record-kicks',
+  'compare-polarities',
+  'kick-gain-leave',
+  'overhead-gain-leave',
+  'polarity-leave',
+] as const;
+export type ActionId = (typeof actionIds)[number];
+
 export interface NextAction {
-  id: string;
+  id: ActionId;
   action: string;
   detail: string;
   leave: boolean;
 }
 
 export interface TakeSummary {
+  status: FindingStatus;
+  strong: string;
+  rest: string;
+}
+
+/** What became of one action of the take before: "The flip worked:", "1.3 dB of low end came back; we expected 1.4." */
+export interface Outcome {
+  actionId: ActionId;
   status: FindingStatus;
   strong: string;
   rest: string;
