@@ -14,6 +14,14 @@ export const router = createBrowserRouter([
     children: [
       { path: '/', lazy: async () => ({ Component: (await import('../pages/HomePage')).HomePage }) },
       {
+        path: '/check-take',
+        lazy: async () => ({ Component: (await import('../pages/CheckTakePage')).CheckTakePage }),
+      },
+      {
+        path: '/sample',
+        lazy: async () => ({ Component: (await import('../pages/SamplePage')).SamplePage }),
+      },
+      {
         element: <GuestOnly />,
         children: [
           { path: '/join', lazy: async () => ({ Component: (await import('../pages/JoinPage')).JoinPage }) },
@@ -53,6 +61,29 @@ export const router = createBrowserRouter([
         ],
       },
       { path: '*', element: <NotFoundPage /> },
+    ],
+  },
+  {
+    errorElement: <ErrorPage />,
+    HydrateFallback: PageLoading,
+    children: [
+      {
+        path: '/s/:token',
+        lazy: async () => ({ Component: (await import('../pages/SharedSheetPage')).SharedSheetPage }),
+      },
+      {
+        path: '/phone/:token',
+        lazy: async () => ({ Component: (await import('../pages/PhonePage')).PhonePage }),
+      },
+      {
+        element: <SignedIn />,
+        children: [
+          {
+            path: '/takes/:takeId/big',
+            lazy: async () => ({ Component: (await import('../pages/BigPrintPage')).BigPrintPage }),
+          },
+        ],
+      },
     ],
   },
 ]);

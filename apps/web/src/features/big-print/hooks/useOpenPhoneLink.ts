@@ -1,0 +1,32 @@
+import { paths } from '@thudline/contracts';
+import useSWR, { useSWRConfig } from 'swr';
+import { ApiError, requestNothing } from '../../../lib/apiClient';
+import { useMe } from '../../auth/hooks/useMe';
+
+/**
+ * Lets a phone in by its link, once. A page loaded again finds the link used up and the phone already in: then who is
+ * signed in decides.
+ */
+export function useOpenPhoneLink(token: string) {
+  const { mutate } = useSWRConfig();
+  const { me } = useMe();
+  const {
+    data,
+    error,
+    mutate: again,
+  } = useSWR<true, Error>(
+    [paths.openPhoneLink, token],
+    async ([path]: [string, string]): Promise<true> => {
+      await requestNothing(path, { method: 'POST', body: { token } });
+      await mutate(paths.me);
+      return true;
+    },
+    { revalidateOnFocus: false, revalidateOnReconnect: false, revalidateIfStale: false },
+  );
+  const used = error instanceof ApiError && error.code !== 'offline';
+  return {
+    isIn: data === true || (used && !!me),
+    error: used && me === undefined ? undefined : error,
+    retry: () => void again(),
+  };
+}
