@@ -5,6 +5,12 @@ const { publicUrl, resultsDir } = browserSettings();
 
 export default defineConfig({
   testDir: './e2e',
+  /** The walks are tests. Pictures of every page and the time until a sheet can be read are commands of their own. */
+  projects: [
+    { name: 'walks', testMatch: '*.spec.ts' },
+    { name: 'shots', testMatch: 'shots/*.shots.ts' },
+    { name: 'speed', testMatch: 'speed/*.speed.ts' },
+  ],
   outputDir: `${resultsDir}/browser`,
   globalSetup: './e2e/harness/startApplication.ts',
   reporter: [['list'], ['json', { outputFile: `${resultsDir}/playwright.json` }]],

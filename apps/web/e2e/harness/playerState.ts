@@ -1,16 +1,15 @@
-import { expect, request } from '@playwright/test';
+import { expect } from '@playwright/test';
+import { paths } from '@thudline/contracts';
+import { apiSession } from './apiSession';
 import { browserSettings } from './browserSettings';
 
 /** Signs the demo player in once, for every test that starts signed in. */
 export async function keepPlayerState(): Promise<void> {
-  const { publicUrl, demoPassword, playerState } = browserSettings();
-  const context = await request.newContext({
-    baseURL: publicUrl,
-    extraHTTPHeaders: { 'X-Thudline': '1', Origin: publicUrl },
-  });
+  const { demoPassword, playerState } = browserSettings();
+  const session = await apiSession();
   const data = { email: 'juno@example.org', password: demoPassword };
-  const answer = await context.post('/api/auth/sign-in', { data });
+  const answer = await session.post(paths.signIn, { data });
   expect(answer.ok(), await answer.text()).toBe(true);
-  await context.storageState({ path: playerState });
-  await context.dispose();
+  await session.storageState({ path: playerState });
+  await session.dispose();
 }

@@ -1,6 +1,7 @@
 import { spawn, type ChildProcess } from 'node:child_process';
 import { existsSync, mkdirSync, openSync } from 'node:fs';
 import { join, resolve } from 'node:path';
+import { getDemoTake, starTitle } from './apiSession';
 import { browserSettings } from './browserSettings';
 import { keepPlayerState } from './playerState';
 
@@ -23,6 +24,7 @@ export default async function startApplication(): Promise<() => Promise<void>> {
     await healthy(`${publicUrl}/api/health`, api);
     await finished('seed', 'fixtures/dist/seedDemo.js');
     await keepPlayerState();
+    await finished('sample', 'apps/api/dist/sample-take.js', (await getDemoTake(starTitle)).id);
   } catch (error) {
     await stopAll();
     throw error;
@@ -31,32 +33,36 @@ export default async function startApplication(): Promise<() => Promise<void>> {
 }
 
 /** `setpriv` lets the kernel end the child when Playwright itself is killed. */
-function start(name: string, script: string): ChildProcess {
+function start(name: string, script: string, ...args: string[]): ChildProcess {
   const { databaseUrl, apiPort, publicUrl, resultsDir } = browserSettings();
   mkdirSync(resultsDir, { recursive: true });
   const log = openSync(join(resultsDir, `${name}.log`), 'w');
-  const child = spawn('setpriv', ['--pdeathsig', 'TERM', '--', process.execPath, join(root, script)], {
-    stdio: ['ignore', log, log],
-    env: {
-      ...process.env,
-      NODE_ENV: 'production',
-      DATABASE_URL: databaseUrl,
-      HOST: '127.0.0.1',
-      PORT: apiPort,
-      PUBLIC_URL: publicUrl,
-      API_URL: publicUrl,
-      WEB_DIST: webDist,
-      // The least argon2 takes: these passwords guard nothing, and every sign-in waits for it.
-      ARGON2_MEMORY_KIB: '1024',
-      ARGON2_TIME: '1',
+  const child = spawn(
+    'setpriv',
+    ['--pdeathsig', 'TERM', '--', process.execPath, join(root, script), ...args],
+    {
+      stdio: ['ignore', log, log],
+      env: {
+        ...process.env,
+        NODE_ENV: 'production',
+        DATABASE_URL: databaseUrl,
+        HOST: '127.0.0.1',
+        PORT: apiPort,
+        PUBLIC_URL: publicUrl,
+        API_URL: publicUrl,
+        WEB_DIST: webDist,
+        // The least argon2 takes: these passwords guard nothing, and every sign-in waits for it.
+        ARGON2_MEMORY_KIB: '1024',
+        ARGON2_TIME: '1',
+      },
     },
-  });
+  );
   children.push(child);
   return child;
 }
 
-async function finished(name: string, script: string): Promise<void> {
-  const child = start(name, script);
+async function finished(name: string, script: string, ...args: string[]): Promise<void> {
+  const child = start(name, script, ...args);
   const code = await new Promise<number | null>((resolve) => child.once('exit', resolve));
   if (code !== 0) throw new Error(`${script} ended with ${code}; see ${logOf(name)}.`);
 }
