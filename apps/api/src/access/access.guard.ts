@@ -9,6 +9,8 @@ import { AppError, notFound } from '../errors/app-error';
 import { shareIdsOf } from '../shares/share-cookie';
 import { ACCESS, AccessRule } from './access.decorator';
 import { AccessService } from './access.service';
+import { readMethods } from './origin.guard';
+import { OPEN_TO_READ_ONLY, readOnly } from './read-only';
 import { TakeRight, TakeRights } from './take-rights';
 import { Asker, notSignedIn, Viewer, ViewerRequest } from './viewer';
 
@@ -30,6 +32,7 @@ export class AccessGuard implements CanActivate {
     const request = context.switchToHttp().getRequest<ViewerRequest>();
     const asker = await this.askerOf(request);
     if (asker.viewer) request.viewer = asker.viewer;
+    if (asker.viewer?.readOnly) this.checkReadOnly(request, targets);
     if (rule.kind === 'take') {
       request.rights = await this.rightsTo(String(request.params.id), asker, rule.right);
       return true;
@@ -45,6 +48,14 @@ export class AccessGuard implements CanActivate {
       viewer: token ? await this.sessions.findViewer(token) : null,
       shareIds: shareIdsOf(request, this.config.jwtSecret),
     };
+  }
+
+  private checkReadOnly(
+    { method }: ViewerRequest,
+    targets: Parameters<Reflector['getAllAndOverride']>[1],
+  ): void {
+    const isOpen = this.reflector.getAllAndOverride<true | undefined>(OPEN_TO_READ_ONLY, targets);
+    if (!readMethods.has(method) && !isOpen) throw readOnly();
   }
 
   private checkRole(viewer: Viewer, role: Role): void {

@@ -20,7 +20,7 @@ export class AccessService {
     if (!validate(takeId)) return nothing;
     const take = await this.em.findOne(Take, { id: takeId, deletedAt: null });
     if (!take) return nothing;
-    if (viewer && take.owner.id === viewer.user.id) return everything;
+    if (viewer && take.owner.id === viewer.user.id) return { ...everything, change: !viewer.readOnly };
     const granted = await this.grants(shareIds, takeId);
     return (await sampleTakeId(this.em)) === takeId ? added(granted, forEverybody) : granted;
   }

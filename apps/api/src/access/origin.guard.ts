@@ -5,7 +5,7 @@ import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
 import { AppError } from '../errors/app-error';
 
-const readMethods = new Set(['GET', 'HEAD', 'OPTIONS']);
+export const readMethods = new Set(['GET', 'HEAD', 'OPTIONS']);
 
 /** Writes come from our own pages: they carry the app's header and an Origin equal to PUBLIC_URL. */
 @Injectable()

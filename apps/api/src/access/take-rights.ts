@@ -1,12 +1,21 @@
-export type TakeRight = 'read' | 'listen' | 'download' | 'note' | 'change';
+/** `own`: it is the asker's own take, also on a phone that reads along and may change nothing. */
+export type TakeRight = 'read' | 'listen' | 'download' | 'note' | 'own' | 'change';
 export type TakeRights = Record<TakeRight, boolean>;
 
-export const everything: TakeRights = { read: true, listen: true, download: true, note: true, change: true };
+export const everything: TakeRights = {
+  read: true,
+  listen: true,
+  download: true,
+  note: true,
+  own: true,
+  change: true,
+};
 export const nothing: TakeRights = {
   read: false,
   listen: false,
   download: false,
   note: false,
+  own: false,
   change: false,
 };
 
@@ -17,6 +26,7 @@ export function added(one: TakeRights, other: TakeRights): TakeRights {
     listen: one.listen || other.listen,
     download: one.download || other.download,
     note: one.note || other.note,
+    own: one.own || other.own,
     change: one.change || other.change,
   };
 }

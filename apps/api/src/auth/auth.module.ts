@@ -12,6 +12,8 @@ import { AuthController } from './auth.controller';
 import { AuthService } from './auth.service';
 import { LocalStrategy } from './local.strategy';
 import { PasswordsService } from './passwords.service';
+import { PhoneLinksController } from './phone-links.controller';
+import { PhoneLinksService } from './phone-links.service';
 import { SessionsService } from './sessions.service';
 
 const jwt = JwtModule.registerAsync({
@@ -25,8 +27,15 @@ const jwt = JwtModule.registerAsync({
 
 @Module({
   imports: [jwt, AuditModule, MailModule, ThrottleModule, TokensModule],
-  controllers: [AuthController, AccountLinksController],
-  providers: [AuthService, AccountLinksService, LocalStrategy, PasswordsService, SessionsService],
+  controllers: [AuthController, AccountLinksController, PhoneLinksController],
+  providers: [
+    AuthService,
+    AccountLinksService,
+    PhoneLinksService,
+    LocalStrategy,
+    PasswordsService,
+    SessionsService,
+  ],
   exports: [SessionsService],
 })
 export class AuthModule {}

@@ -14,6 +14,8 @@ import { isGenuine, parseRefreshToken, refreshSeed, refreshTokenText } from './r
 const dayMs = 24 * 60 * 60 * 1000;
 /** A session ends when it wasn't used for this long. */
 const keptMs = { stay: 30 * dayMs, leave: dayMs };
+/** A phone reads along for an evening; using it doesn't make it longer. */
+const readOnlyMs = dayMs / 2;
 /** Tabs that refresh at the same moment, and clients whose answer got lost. */
 const previousTokenGraceMs = 60_000;
 
@@ -35,17 +37,13 @@ export class SessionsService {
   ) {}
 
   async start(user: User, stay: boolean): Promise<SessionTokens> {
-    const now = new Date();
-    const session = this.em.create(Session, {
-      user,
-      refreshSeed: refreshSeed(),
-      generation: 0,
-      rotatedAt: now,
-      expiresAt: expiry(stay, now),
-      stay,
-    });
-    await this.em.flush();
-    return this.tokensOf(session);
+    return this.begin(user, { stay, readOnly: false, expiresAt: expiry(stay, new Date()) });
+  }
+
+  /** A session from which nothing can be changed. */
+  async startReadOnly(user: User): Promise<SessionTokens> {
+    const expiresAt = new Date(Date.now() + readOnlyMs);
+    return this.begin(user, { stay: true, readOnly: true, expiresAt });
   }
 
   /** Reads session and user every time, so that signing out and locking act at once. */
@@ -96,6 +94,22 @@ export class SessionsService {
     await this.em.nativeUpdate(Session, { user, revokedAt: null, ...others }, { revokedAt: new Date() });
   }
 
+  private async begin(
+    user: User,
+    kind: Pick<Session, 'stay' | 'readOnly' | 'expiresAt'>,
+  ): Promise<SessionTokens> {
+    const rotatedAt = new Date();
+    const session = this.em.create(Session, {
+      user,
+      refreshSeed: refreshSeed(),
+      generation: 0,
+      rotatedAt,
+      ...kind,
+    });
+    await this.em.flush();
+    return this.tokensOf(session);
+  }
+
   private async findGenuine(refreshToken: string): Promise<Session | null> {
     const token = parseRefreshToken(refreshToken);
     if (!token) return null;
@@ -106,8 +120,9 @@ export class SessionsService {
   private async rotate(session: Session): Promise<SessionTokens> {
     const now = new Date();
     // Of two tabs with the same token one changes it; the other finds it changed and gets the same new one.
-    const { id, generation, stay } = session;
-    const change = { generation: generation + 1, rotatedAt: now, expiresAt: expiry(stay, now) };
+    const { id, generation, stay, readOnly } = session;
+    const expiresAt = readOnly ? session.expiresAt : expiry(stay, now);
+    const change = { generation: generation + 1, rotatedAt: now, expiresAt };
     await this.em.nativeUpdate(Session, { id, generation, revokedAt: null }, change);
     await this.em.refresh(session);
     if (session.revokedAt) throw sessionEnded();
@@ -116,13 +131,19 @@ export class SessionsService {
 
   private async tokensOf(session: Session): Promise<SessionTokens> {
     const claims: AccessClaims = { sub: session.user.id, sid: session.id };
-    const { id, refreshSeed: seed, generation, stay } = session;
+    const { id, refreshSeed: seed, generation } = session;
     return {
       access: await this.jwt.signAsync(claims),
       refresh: refreshTokenText(this.config.jwtSecret, seed, id, generation),
-      keepMs: stay ? keptMs.stay : null,
+      keepMs: keepMs(session),
     };
   }
 }
 
 const expiry = (stay: boolean, now: Date) => new Date(now.getTime() + (stay ? keptMs.stay : keptMs.leave));
+
+/** How long the browser keeps the cookies; null: until it closes. */
+function keepMs({ stay, readOnly, expiresAt }: Session): number | null {
+  if (readOnly) return expiresAt.getTime() - Date.now();
+  return stay ? keptMs.stay : null;
+}

@@ -35,9 +35,10 @@ const environment = z.object({
   JOIN_LIMIT_PER_ADDRESS: count.default(100),
   /** Links opened in a quarter of an hour; common practice, no source. */
   OPEN_LINK_LIMIT_PER_ADDRESS: count.default(120),
-  /** Mails in an hour to one account, and asked for by one address; common practice, no source. */
+  /** Mails and phone links in an hour for one account, mails asked for by one address; common practice, no source. */
   MAIL_LIMIT_PER_ACCOUNT: count.default(5),
   MAIL_LIMIT_PER_ADDRESS: count.default(30),
+  PHONE_LINK_LIMIT_PER_ACCOUNT: count.default(30),
   /** Without one no mail is sent, and the log says so. */
   SMTP_URL: z.url({ protocol: /^smtps?$/ }).optional(),
   MAIL_FROM: z.string().min(3).optional(),
@@ -81,6 +82,7 @@ function grouped(env: z.output<typeof environment>) {
       signInPerAccount: env.SIGN_IN_LIMIT_PER_ACCOUNT,
       signInPerAddress: env.SIGN_IN_LIMIT_PER_ADDRESS,
       joinPerAddress: env.JOIN_LIMIT_PER_ADDRESS,
+      phoneLinksPerAccount: env.PHONE_LINK_LIMIT_PER_ACCOUNT,
       mailsPerAccount: env.MAIL_LIMIT_PER_ACCOUNT,
       mailsPerAddress: env.MAIL_LIMIT_PER_ADDRESS,
       openLinkPerAddress: env.OPEN_LINK_LIMIT_PER_ADDRESS,

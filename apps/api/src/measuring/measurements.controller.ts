@@ -13,7 +13,7 @@ export class MeasurementsController {
 
   /** For whoever waits for the sheet; guests open one that is there. */
   @Get()
-  @Access.take('change')
+  @Access.take('own')
   @ZodResponse({ status: 200, type: MeasurementResponseDto })
   async get(@Param('id') takeId: string) {
     return measurementResponseOf(await this.measurements.getLatest(takeId));

@@ -12,7 +12,7 @@ export class TakeSharesController {
   constructor(private readonly shares: SharesService) {}
 
   @Get()
-  @Access.take('change')
+  @Access.take('own')
   @ZodResponse({ status: 200, type: ListSharesResponseDto })
   list(@Param('id') takeId: string) {
     return this.shares.list(takeId);

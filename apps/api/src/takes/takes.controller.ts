@@ -3,6 +3,7 @@ import { ApiNoContentResponse, ApiTags } from '@nestjs/swagger';
 import { Request, Response } from 'express';
 import { ZodResponse } from 'nestjs-zod';
 import { Access } from '../access/access.decorator';
+import { OpenToReadOnly } from '../access/read-only';
 import { everything, TakeRights } from '../access/take-rights';
 import { CurrentRights, CurrentViewer, Viewer } from '../access/viewer';
 import { ListTakesDto, ListTakesResponseDto, TakeResponseDto, UpdateTakeDto } from './dto/take.dto';
@@ -52,8 +53,10 @@ export class TakesController {
     return this.takes.get(id, rights);
   }
 
+  /** A phone that reads along may tick. */
   @Patch(':id')
-  @Access.take('change')
+  @Access.take('own')
+  @OpenToReadOnly()
   @ZodResponse({ status: 200, type: TakeResponseDto })
   update(@Param('id') id: string, @Body() body: UpdateTakeDto, @CurrentRights() rights: TakeRights) {
     return this.takes.update(id, body, rights);

@@ -20,7 +20,7 @@ export interface WholeTake {
 
 export function takeResponseOf(whole: WholeTake): TakeResponse {
   const { take, files, tracks, measurement, rights } = whole;
-  const { change, listen, download } = rights;
+  const { own, change, listen, download } = rights;
   return {
     id: take.id,
     number: take.number,
@@ -32,7 +32,7 @@ export function takeResponseOf(whole: WholeTake): TakeResponse {
     tracks: tracks.map(({ role, file, channel }) => ({ role, fileId: file.id, channel })),
     measurement: measurementResponseOf(measurement),
     hasReport: take.currentReportId != null,
-    ...(change ? ownersPart(whole) : othersPart),
+    ...(own ? ownersPart(whole) : othersPart),
     rights: { change, listen, download },
     player: take.owner.unwrap().name,
   };

@@ -1,6 +1,7 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { TakeResponse, UpdateTakeRequest } from '@thudline/contracts';
+import { readOnly } from '../access/read-only';
 import { TakeRights } from '../access/take-rights';
 import { Viewer } from '../access/viewer';
 import { AuditService } from '../audit/audit.service';
@@ -36,8 +37,10 @@ export class TakesService {
   }
 
   async update(takeId: string, changes: UpdateTakeRequest, rights: TakeRights): Promise<TakeResponse> {
+    const { tickedActions, ...others } = changes;
+    if (!rights.change && Object.values(others).some((value) => value !== undefined)) throw readOnly();
     const take = await this.em.findOneOrFail(Take, { id: takeId });
-    const { title, note, tickedActions, tags } = changes;
+    const { title, note, tags } = others;
     if (title !== undefined) take.title = title;
     if (note !== undefined) take.note = note;
     if (tickedActions !== undefined) take.tickedActions = tickedActions;

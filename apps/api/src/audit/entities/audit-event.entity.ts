@@ -7,6 +7,7 @@ export const auditKinds = [
   'sign-in-failed',
   'signed-out',
   'session-reused',
+  'phone-let-in',
   'password-reset',
   'password-changed',
   'take-deleted',
