@@ -1,3 +1,5 @@
+import type { TrackPeaks } from './measurements/peaks/peaks';
+
 /**
  * What one measurement of a take found: facts only. Judgements that depend on the owner's target, temperature or units
  * (level, gain change, path difference, findings, the line) are computed from these on reading.
@@ -137,6 +139,8 @@ export interface PairSpectrum {
 
 export interface TakeMeasurement {
   readonly facts: TakeFacts;
+  /** Outlines, in the order of `facts.tracks`. */
+  readonly peaks: readonly TrackPeaks[];
   /** In the order of `facts.pairs`; null where the pair has no kick hit. */
   readonly pairSpectra: readonly (PairSpectrum | null)[];
 }

@@ -18,6 +18,14 @@ export { kickWindow } from './measurements/agreement/pairSpectrum';
 export * from './measurements/agreement/pairSpectrumBytes';
 export { polarityChanged } from './measurements/agreement/polarityChanged';
 export * from './measurements/agreement/thirdOctaves';
+export {
+  createPeaks,
+  PEAK_FULL_SCALE,
+  peakSteps,
+  type PeakLevel,
+  type TrackPeaks,
+} from './measurements/peaks/peaks';
+export * from './measurements/peaks/peaksBytes';
 export { lowPass } from './measurements/filters/lowPass';
 export * from './report/reportTypes';
 export * from './report/reportFigures';

@@ -83,6 +83,19 @@ describe('a measured take', () => {
     expect(Math.abs(b.flipGainRecordedDb ?? NaN)).toBeLessThan(Math.abs(a.flipGainRecordedDb ?? NaN));
   });
 
+  it('holds the outline of each track over the shorter file', async () => {
+    const { kick, overhead, sampleRateHz } = kit();
+    const { peaks, facts } = await take({ kick, overhead: overhead.subarray(0, 100_003), sampleRateHz });
+    expect(peaks.map((track) => track.map((level) => level.steps))).toEqual([
+      [500, 2000, 8000],
+      [500, 2000, 8000],
+    ]);
+    expect(facts.durationS).toBe(100_003 / sampleRateHz);
+    const largest = kick.subarray(0, 100_003).reduce((most, x) => Math.max(most, Math.abs(x)), 0);
+    for (const { pairs } of peaks[0])
+      expect(Math.max(...pairs.map(Math.abs))).toBe(Math.round(127 * largest));
+  });
+
   it('measures over the shorter file and says so', async () => {
     const { kick, overhead, sampleRateHz } = kit();
     const { facts } = await take({ kick, overhead: overhead.subarray(0, 96000), sampleRateHz });

@@ -61,6 +61,7 @@ export async function measureTake({
       hits,
       notices: [...notices, ...seen],
     },
+    peaks: streamed.peaks,
     pairSpectra: readings.map((reading) => reading.spectrum),
   };
 }

@@ -1,5 +1,5 @@
 import { MessageChannel } from 'node:worker_threads';
-import { decodePairSpectrum, encodeWav } from '@thudline/dsp';
+import { decodePairSpectrum, decodePeaks, encodeWav } from '@thudline/dsp';
 import { measureFiles, type MeasureFilesOptions } from './measureFiles';
 import { simpleTake, takeFolder, type TakeFolder } from './testing/takeFolder';
 import type { TrackChoice } from './trackChoice';
@@ -144,7 +144,7 @@ describe('measureFiles refuses', () => {
 });
 
 describe('measureJob', () => {
-  it('gives facts and spectra that can cross a thread, and tells its progress', async () => {
+  it('gives facts, spectra and outlines that can cross a thread, and tells its progress', async () => {
     const paths = await takePaths('job');
     const { port1, port2 } = new MessageChannel();
     const told: MeasureProgress[] = [];
@@ -157,6 +157,7 @@ describe('measureJob', () => {
     expect(result.facts).toEqual(direct.take.facts);
     const layout = result.facts.pairs[0].spectrum!;
     expect(decodePairSpectrum(result.spectra[0]!, layout)).toEqual(direct.take.pairSpectra[0]);
+    expect(result.peaks.map(decodePeaks)).toEqual(direct.take.peaks);
     expect(new Set(told.map(({ stage }) => stage)).size).toBe(4);
   });
 

@@ -1,5 +1,5 @@
 import type { MessagePort } from 'node:worker_threads';
-import { encodePairSpectrum, type MeasureStage, type TakeFacts } from '@thudline/dsp';
+import { encodePairSpectrum, encodePeaks, type MeasureStage, type TakeFacts } from '@thudline/dsp';
 import { measureFiles, type MeasuredFile } from './measureFiles';
 import { MeasureRefusal, type MeasureRefusalFacts } from './measureRefusal';
 import type { TrackChoice } from './trackChoice';
@@ -24,6 +24,8 @@ export type MeasureJobResult =
       readonly facts: TakeFacts;
       /** In the order of `facts.pairs`; null where the pair has no kick hit. */
       readonly spectra: readonly (Uint8Array | null)[];
+      /** Outlines as `encodePeaks` of dsp writes them, in the order of `facts.tracks`: what is stored of each track. */
+      readonly peaks: readonly Uint8Array[];
       readonly files: readonly MeasuredFile[];
     }
   | { readonly outcome: 'refused'; readonly refusal: MeasureRefusalFacts };
@@ -44,7 +46,8 @@ export async function measureJob(job: MeasureJob): Promise<MeasureJobResult> {
       onStage: progressTeller((progress) => job.port?.postMessage(progress)),
     });
     const spectra = take.pairSpectra.map((spectrum) => spectrum && encodePairSpectrum(spectrum));
-    return { outcome: 'measured', facts: take.facts, spectra, files };
+    const peaks = take.peaks.map(encodePeaks);
+    return { outcome: 'measured', facts: take.facts, spectra, peaks, files };
   } catch (error) {
     if (error instanceof MeasureRefusal) return { outcome: 'refused', refusal: error.toFacts() };
     throw error;

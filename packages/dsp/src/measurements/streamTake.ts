@@ -5,9 +5,11 @@ import { selectKicks } from './hits/selectKicks';
 import type { KickCandidate } from './hits/kickCandidates';
 import { createTrackLevel, type TrackLevelFacts } from './level/trackLevel';
 import { lockstep } from './lockstep';
+import { createPeaks, type TrackPeaks } from './peaks/peaks';
 
 export interface StreamedTake {
   readonly levels: readonly TrackLevelFacts[];
+  readonly peaks: readonly TrackPeaks[];
   readonly kicks: readonly KickCandidate[];
   readonly overheadHits: readonly OverheadHit[];
   /** True where two tracks hold exactly the same samples, and not silence. */
@@ -30,10 +32,12 @@ export async function streamTake(options: StreamTakeOptions): Promise<StreamedTa
   const candidates = createKickCandidates(sampleRateHz);
   const struck = createOverheadHits({ sampleRateHz, trackCount: sources.length, overhead });
   const frames = Math.min(...sources.map((source) => source.frames));
+  const outlines = sources.map(() => createPeaks({ frames }));
   let same = kick !== overhead;
   let read = 0;
   for await (const pieces of lockstep(sources)) {
     pieces.forEach((piece, track) => levels[track].push(piece));
+    pieces.forEach((piece, track) => outlines[track].push(piece));
     candidates.push(pieces[kick], pieces[overhead]);
     struck.push(pieces);
     same &&= alike(pieces[kick], pieces[overhead]);
@@ -43,6 +47,7 @@ export async function streamTake(options: StreamTakeOptions): Promise<StreamedTa
   const results = levels.map((level) => level.result());
   return {
     levels: results,
+    peaks: outlines.map((outline) => outline.result()),
     kicks: selectKicks(candidates.result(), sampleRateHz),
     overheadHits: struck.result(),
     sameTwice: same && results[kick].samplePeakDbfs !== null,
