@@ -17,6 +17,8 @@ export { lowEnd, type Band } from './measurements/agreement/choiceEnergy';
 export { kickWindow } from './measurements/agreement/pairSpectrum';
 export * from './measurements/agreement/pairSpectrumBytes';
 export { polarityChanged } from './measurements/agreement/polarityChanged';
+export * from './measurements/agreement/shiftedSamples';
+export * from './measurements/agreement/sumPeak';
 export * from './measurements/agreement/thirdOctaves';
 export {
   createPeaks,
