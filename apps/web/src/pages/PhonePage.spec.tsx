@@ -1,5 +1,6 @@
 import { paths } from '@thudline/contracts';
 import { screen, waitFor } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
 import { fakeServer, json, refusal, type FakeRoutes } from '../testing/fakeServer';
 import { renderPage } from '../testing/renderPage';
 import { sampleMe } from '../testing/sampleData';
@@ -39,6 +40,19 @@ describe('a phone that scanned the code', () => {
 
   it('finds its way when the page is loaded again with the code used up', async () => {
     const { address } = open({ ...letIn, [`POST ${paths.openPhoneLink}`]: used });
+    await waitFor(() => expect(address()).toBe(`/takes/${sampleListItem().id}/big`));
+  });
+
+  it('offers another try when the server is away', async () => {
+    let working = false;
+    const { address } = open({
+      ...letIn,
+      [`POST ${paths.openPhoneLink}`]: () =>
+        working ? json(sampleMe)() : refusal(429, 'too-many-requests', 'Wait a minute.')(),
+    });
+    expect(await screen.findByRole('alert')).toHaveTextContent('This code could not be used. Wait a minute.');
+    working = true;
+    await userEvent.click(screen.getByRole('button', { name: 'Try again' }));
     await waitFor(() => expect(address()).toBe(`/takes/${sampleListItem().id}/big`));
   });
 

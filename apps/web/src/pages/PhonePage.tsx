@@ -4,8 +4,7 @@ import { ButtonLink } from '../components/ButtonLink';
 import { PageLoading } from '../components/PageLoading';
 import { PageMessage } from '../components/PageMessage';
 import { PhoneArrival } from '../features/big-print/components/PhoneArrival';
-import { useOpenPhoneLink } from '../features/big-print/hooks/useOpenPhoneLink';
-import { ApiError } from '../lib/apiClient';
+import { isUsedUp, useOpenPhoneLink } from '../features/big-print/hooks/useOpenPhoneLink';
 import { usePageTitle } from '../lib/usePageTitle';
 
 /** Where a scanned code leads: the phone is let in to read along, then shows the newest take. */
@@ -15,7 +14,7 @@ export function PhonePage() {
   const { isIn, error, retry } = useOpenPhoneLink(token);
   if (isIn) return <PhoneArrival />;
   if (!error) return <PageLoading />;
-  if (error instanceof ApiError && error.code === 'offline')
+  if (!isUsedUp(error))
     return (
       <PageMessage strong="This code could not be used." rest={error.message}>
         <Button onClick={retry}>Try again</Button>
