@@ -1,4 +1,4 @@
-import type { ArrivalFacts } from '../../facts';
+import type { ArrivalFacts, PairSpectrum } from '../../facts';
 import { delayedPair } from '../../testing/delayedPair';
 import { agreement } from './agreement';
 import { bestShift } from './bestShift';
@@ -43,6 +43,22 @@ describe('agreement of a pair', () => {
     // Around 500 Hz the two cancel, so there a flip gains though it costs at 30–150 Hz.
     expect(facts.contraryBands.map((band) => Math.round(band.centreHz))).toContain(501);
     expect(facts.contraryBands.every((band) => band.flipGainDb >= 1.5)).toBe(true);
+  });
+
+  it('names no third-octave that holds next to nothing, nor one beyond 31.5 Hz to 5 kHz', () => {
+    const named = (spectrum: PairSpectrum): number[] =>
+      agreement({ spectrum, balances, matchGainDb: 0, arrival: arrival(1) }).contraryBands.map((band) =>
+        Math.round(band.centreHz),
+      );
+    const pair = delayedPair({ delayMs: 1 });
+    // 447–562 Hz is 115 of the 770 Hz from 30 to 800: 15 % of white sound, under 1 % once a hundredth as strong.
+    const weak = (values: Float32Array): Float32Array =>
+      values.map((value, i) => (i * pair.binHz > 400 && i * pair.binHz < 600 ? value / 100 : value));
+    const hollow = { ...pair, skk: weak(pair.skk), soo: weak(pair.soo), skoRe: weak(pair.skoRe) };
+    expect(named({ ...hollow, skoIm: weak(pair.skoIm) })).not.toContain(501);
+    expect(Math.max(...named(pair))).toBeGreaterThan(2000);
+    // Delayed by 20 ms, 25 Hz cancels too and is left out.
+    expect(Math.min(...named(delayedPair({ delayMs: 20 })), 1000)).toBeGreaterThan(30);
   });
 
   it('correlates 1 with itself and −1 with its opposite', () => {

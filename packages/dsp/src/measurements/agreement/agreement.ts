@@ -1,6 +1,6 @@
 import type { AgreementFacts, ArrivalFacts, NamedChoiceFacts, PairSpectrum } from '../../facts';
 import { bestShift } from './bestShift';
-import { forBins, lowEnd } from './choiceEnergy';
+import { bandEnergies, forBins, lowEnd, type Band } from './choiceEnergy';
 import { choiceLowEnd, deepestThirdOctave, flipGain } from './choiceLevels';
 import { withLowCut } from './lowCut';
 import type { HitBalance } from './pairSpectrum';
@@ -17,6 +17,10 @@ export interface AgreementInput {
 const BANDS_TO_HZ = [120, 150, 200];
 /** Section 5: a third-octave that moves the other way by this much is named. */
 const CONTRARY_FROM_DB = 1.5;
+/** Only where it can be heard: 31.5 Hz to 5 kHz, with 1 % of what lies where a kick sounds; common practice, no source. */
+const NAMED_CENTRES: Band = { lowHz: 30, highHz: 5100 };
+const KICK_BAND: Band = { lowHz: 30, highHz: 800 };
+const NAMED_SHARE = 0.01;
 
 /** What the two microphones do to each other at the kick: the heart of the sheet. */
 export function agreement({ spectrum, balances, matchGainDb, arrival }: AgreementInput): AgreementFacts {
@@ -92,7 +96,14 @@ function contraryBands(
   flipGainDb: number | null,
 ): AgreementFacts['contraryBands'] {
   if (flipGainDb === null) return [];
-  return thirdOctaves.flatMap(({ centreHz, lowHz, highHz }) => {
+  const powerSum = (band: Band): number =>
+    bandEnergies(spectrum, { flipped: false, shiftMs: 0, gainDb }, band).powerSum;
+  const least = NAMED_SHARE * powerSum(KICK_BAND);
+  const named = thirdOctaves.filter(
+    (band) =>
+      band.centreHz >= NAMED_CENTRES.lowHz && band.centreHz < NAMED_CENTRES.highHz && powerSum(band) >= least,
+  );
+  return named.flatMap(({ centreHz, lowHz, highHz }) => {
     const bandGainDb = flipGain(spectrum, { gainDb, lowHz, highHz }) ?? 0;
     const otherWay = bandGainDb * flipGainDb < 0 && Math.abs(bandGainDb) >= CONTRARY_FROM_DB;
     return otherWay ? [{ centreHz, flipGainDb: bandGainDb }] : [];
