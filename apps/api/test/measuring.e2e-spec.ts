@@ -147,6 +147,29 @@ describe('measuring', () => {
       }
     });
 
+    it('says of the take that follows what became of the actions that were carried out', async () => {
+      const flipped = { files: filesOf([kick, overhead.map((sample) => -sample)]), tracks: monoTracks };
+      const before = await juno.makeTake(groove);
+      const follows = { ...flipped, followsTakeId: before.id };
+      const after = await juno.makeTake({ ...follows, doneActions: ['flip-overhead'] });
+      const nothingDone = await juno.makeTake(follows);
+      for (const each of [before, after, nothingDone]) await reaches(each, 'done', 'failed');
+      const outcomesOf = async (each: TakeResponse) =>
+        reportResponse.parse((await juno.get(paths.report(each.id)).expect(200)).body).outcomes;
+      expect(await outcomesOf(after)).toEqual([
+        {
+          actionId: 'flip-overhead',
+          status: 'good',
+          strong: 'The flip worked:',
+          rest: expect.stringMatching(/dB of low end came back/) as string,
+        },
+      ]);
+      expect(await outcomesOf(before)).toEqual([]);
+      expect(await outcomesOf(nothingDone)).toEqual([]);
+      await juno.delete(paths.take(before.id)).expect(204);
+      expect(await outcomesOf(after)).toEqual([]);
+    });
+
     it('measures silence, and says that it cannot tell', async () => {
       const take = await juno.makeTake({
         files: ['kick.wav', 'overhead.wav'].map((name) => ({ name, bytes: wav([new Float32Array(96_000)]) })),

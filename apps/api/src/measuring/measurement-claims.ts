@@ -72,7 +72,7 @@ export class MeasurementClaims {
         measurement: claim.measurementId,
         take: claim.takeId,
         ...columns,
-        says: saidBy(columns.summary, settingsOf(owner.unwrap())),
+        says: saidBy(facts, settingsOf(owner.unwrap())),
       });
       for (const spectrum of pairSpectrumColumns(facts, spectra))
         em.create(PairSpectrum, { report, ...spectrum });

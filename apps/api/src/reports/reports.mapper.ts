@@ -1,5 +1,15 @@
 import { ReportResponse, TakeListItem, UserSettings } from '@thudline/contracts';
-import { findings, nextActions, reportFigures, reportLine, TakeFacts, takeSummary } from '@thudline/dsp';
+import {
+  decodePairSpectrum,
+  findings,
+  nextActions,
+  outcomes,
+  reportFigures,
+  reportLine,
+  TakeFacts,
+  takeSummary,
+} from '@thudline/dsp';
+import { PairSpectrum } from './entities/pair-spectrum.entity';
 import { Report } from './entities/report.entity';
 import { storedFacts } from './report-columns';
 
@@ -18,8 +28,8 @@ export const noListFigures: ListFigures = {
 };
 
 /** What the sheet says, in its owner's words: for finding a take by them. What is good names what isn't, so it's left out. */
-export function saidBy(summary: TakeFacts, { target, temperatureC, lengthUnit }: UserSettings): string {
-  const figures = reportFigures(summary, { target, temperatureC });
+export function saidBy(facts: TakeFacts, { target, temperatureC, lengthUnit }: UserSettings): string {
+  const figures = reportFigures(facts, { target, temperatureC });
   const { strong, rest } = takeSummary(figures);
   const told = { lengthUnit, target };
   const sentences = findings(figures, told).flatMap(({ status, sentence }) =>
@@ -47,9 +57,17 @@ interface ReportParts {
   owner: UserSettings;
   /** Whose units it is told in. */
   reader: UserSettings;
+  /** The take that this one follows, and what was carried out in between. */
+  before: TakeBefore | null;
 }
 
-export function reportResponseOf({ report, owner, reader }: ReportParts): ReportResponse {
+interface TakeBefore {
+  report: Report;
+  doneActions: string[];
+  spectra: Record<'before' | 'after', PairSpectrum | null>;
+}
+
+export function reportResponseOf({ report, owner, reader, before }: ReportParts): ReportResponse {
   const { target, temperatureC } = owner;
   const facts = storedFacts(report);
   const figures = reportFigures(facts, { target, temperatureC });
@@ -64,7 +82,17 @@ export function reportResponseOf({ report, owner, reader }: ReportParts): Report
     temperatureC,
     line: reportLine(figures, told),
     actions: nextActions(figures, told),
-    outcomes: [],
+    outcomes: before
+      ? outcomes({
+          before: reportFigures(before.report.summary, { target, temperatureC }),
+          after: figures,
+          doneActions: before.doneActions,
+          reader: told,
+          spectra: { before: decoded(before.spectra.before), after: decoded(before.spectra.after) },
+        })
+      : [],
     pairSpectrum: facts.pairs[0]?.spectrum ?? null,
   };
 }
+
+const decoded = (spectrum: PairSpectrum | null) => spectrum && decodePairSpectrum(spectrum.data, spectrum);

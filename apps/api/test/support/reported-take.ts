@@ -31,7 +31,7 @@ export async function giveReport(test: TestApp, { id }: TakeResponse, facts: Tak
     measurement,
     take,
     ...columns,
-    says: saidBy(columns.summary, settingsOf(take.owner.unwrap())),
+    says: saidBy(facts, settingsOf(take.owner.unwrap())),
   });
   take.currentReportId = measurement.id;
   await em.flush();
