@@ -7,6 +7,7 @@ import { Config } from './config/config';
 import { ConfigModule } from './config/config.module';
 import { databaseModule } from './database/database.module';
 import { AppErrorFilter } from './errors/app-error.filter';
+import { EventsModule } from './events/events.module';
 import { HealthModule } from './health/health.module';
 import { loggerModule } from './logging/logger.module';
 import { MeasurementsModule } from './measuring/measurements.module';
@@ -35,6 +36,7 @@ export class AppModule {
         SoundModule,
         SharesModule,
         SampleSheetModule,
+        EventsModule,
         HealthModule,
       ],
       providers: [

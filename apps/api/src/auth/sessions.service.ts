@@ -61,6 +61,12 @@ export class SessionsService {
       : null;
   }
 
+  /** Asked outside of any request, by what stays open. */
+  async isLive(sessionId: string): Promise<boolean> {
+    const live = { id: sessionId, revokedAt: null, expiresAt: { $gt: new Date() }, user: { lockedAt: null } };
+    return (await this.em.fork().count(Session, live)) > 0;
+  }
+
   /** Changes the refresh token. The one before is good for a minute more; anything older ends the session. */
   async refresh(refreshToken: string): Promise<SessionTokens> {
     const session = await this.findGenuine(refreshToken);

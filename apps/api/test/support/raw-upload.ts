@@ -2,14 +2,14 @@ import { randomUUID } from 'node:crypto';
 import { readdir } from 'node:fs/promises';
 import { AddressInfo, connect } from 'node:net';
 import { paths } from '@thudline/contracts';
-import { joined, origin } from './person';
+import { joined, origin, Person } from './person';
 import { monoTracks } from './recordings';
 import { TestApp } from './test-app';
 import { until } from './until';
 
-/** The cookies of somebody who has just joined. */
-export async function cookieOf(test: TestApp): Promise<string> {
-  const person = await joined(test);
+/** The cookies of a person, or of somebody who has just joined. */
+export async function cookieOf(test: TestApp, known?: Person): Promise<string> {
+  const person = known ?? (await joined(test));
   const response = await person.post(paths.refresh);
   const lines = response.headers['set-cookie'] as unknown as string[];
   return lines.map((line) => line.split(';')[0]).join('; ');

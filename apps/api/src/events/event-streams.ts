@@ -1,0 +1,89 @@
+import { BeforeApplicationShutdown, Injectable, Logger, OnApplicationBootstrap } from '@nestjs/common';
+import { eventNames } from '@thudline/contracts';
+import { SessionsService } from '../auth/sessions.service';
+import { DatabaseNotices, TakeAddedNotice } from './database-notices';
+import { EventStream } from './event-stream';
+import { MeasurementStates } from './measurement-states';
+
+/** Proxies commonly close a line after 30 to 60 silent seconds (common practice, no source). */
+const beatMs = 20_000;
+
+/** Every open stream of this process, and what is passed on to which. */
+@Injectable()
+export class EventStreams implements OnApplicationBootstrap, BeforeApplicationShutdown {
+  private readonly logger = new Logger('Events');
+  private readonly streams = new Set<EventStream>();
+  private changed = new Set<string>();
+  private isTelling = false;
+  private beating: NodeJS.Timeout | undefined;
+
+  constructor(
+    private readonly notices: DatabaseNotices,
+    private readonly states: MeasurementStates,
+    private readonly sessions: SessionsService,
+  ) {}
+
+  onApplicationBootstrap(): void {
+    this.notices.listen({
+      onMeasurement: (takeId) => this.tell([takeId]),
+      onTakeAdded: (notice) => this.tellOfTake(notice),
+      onGap: () => this.tell([...this.streams].flatMap(({ takeIds }) => [...takeIds])),
+    });
+    this.beating = setInterval(() => void this.beat(), beatMs);
+  }
+
+  /** Open streams would keep the server from closing; browsers connect again, to whoever is there then. */
+  beforeApplicationShutdown(): void {
+    clearInterval(this.beating);
+    for (const stream of this.streams) stream.end();
+  }
+
+  /** Starts with the full state; changes from then on follow. */
+  async add(stream: EventStream): Promise<void> {
+    this.streams.add(stream);
+    for (const event of await this.states.of([...stream.takeIds])) stream.send(eventNames.measurement, event);
+  }
+
+  remove(stream: EventStream): void {
+    this.streams.delete(stream);
+  }
+
+  /** Changes that come while the state is read are told together, as it is then. */
+  private tell(takeIds: string[]): void {
+    for (const takeId of takeIds) if (this.isAwaited(takeId)) this.changed.add(takeId);
+    if (this.isTelling || this.changed.size === 0) return;
+    this.isTelling = true;
+    this.tellChanged()
+      .catch((error: unknown) => this.logger.error(error, 'Changes could not be told'))
+      .finally(() => (this.isTelling = false));
+  }
+
+  private async tellChanged(): Promise<void> {
+    while (this.changed.size > 0) {
+      const takeIds = [...this.changed];
+      this.changed = new Set();
+      for (const event of await this.states.of(takeIds)) {
+        for (const stream of this.streams)
+          if (stream.takeIds.has(event.takeId)) stream.send(eventNames.measurement, event);
+      }
+    }
+  }
+
+  private isAwaited(takeId: string): boolean {
+    return [...this.streams].some((stream) => stream.takeIds.has(takeId));
+  }
+
+  private tellOfTake({ ownerId, ...event }: TakeAddedNotice): void {
+    for (const stream of this.streams)
+      if (stream.viewer.userId === ownerId) stream.send(eventNames.takeAdded, event);
+  }
+
+  /** Whoever signed out, or was locked out, hears nothing more. */
+  private async beat(): Promise<void> {
+    for (const stream of this.streams) {
+      const isIn = await this.sessions.isLive(stream.viewer.sessionId).catch(() => true);
+      if (isIn) stream.beat();
+      else stream.end();
+    }
+  }
+}
