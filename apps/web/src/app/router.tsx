@@ -51,6 +51,10 @@ export const router = createBrowserRouter([
             lazy: async () => ({ Component: (await import('../pages/TakesPage')).TakesPage }),
           },
           {
+            path: '/settings',
+            lazy: async () => ({ Component: (await import('../pages/SettingsPage')).SettingsPage }),
+          },
+          {
             path: '/takes/new',
             lazy: async () => ({ Component: (await import('../pages/NewTakePage')).NewTakePage }),
           },

@@ -19,7 +19,10 @@ export function InlineSelect<T extends string>({
       display="inline-grid"
       position="relative"
       maxWidth="100%"
-      minHeight="32px"
+      marginX="2px"
+      height="28px"
+      lineHeight="26px"
+      verticalAlign="baseline"
       borderBottom="2px solid"
       borderColor="edge"
       fontWeight={600}

@@ -1,7 +1,8 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
 import { useEffect, useRef, useState } from 'react';
-import { useNavigate, useLocation } from 'react-router-dom';
+import { Link, useNavigate, useLocation } from 'react-router-dom';
 import { TextButton } from '../../../components/Button';
+import { Swell } from '../../../components/Swell';
 import { TextLink } from '../../../components/TextLink';
 import { chooseColorMode, colorModes, storedColorMode, type ColorMode } from '../../../theme/colorMode';
 import { useAuthActions } from '../hooks/useAuthActions';
@@ -14,7 +15,7 @@ export function AccountCorner() {
   const { me } = useMe();
   const { pathname } = useLocation();
   if (me === undefined) return null;
-  if (me) return <AccountList name={me.name} />;
+  if (me) return <AccountList name={me.name} readOnly={me.readOnly} />;
   if (pathname === '/sign-in')
     return (
       <>
@@ -25,13 +26,23 @@ export function AccountCorner() {
       </>
     );
   return (
-    <TextLink to="/sign-in" fontWeight={600}>
-      Sign in
-    </TextLink>
+    <Flex gap="26px">
+      {pathname !== '/check-take' && (
+        <chakra.span color="ink.muted" display={{ base: 'none', sm: 'inline' }}>
+          <Link to="/check-take" style={{ textDecoration: 'none' }}>
+            The check take
+          </Link>
+        </chakra.span>
+      )}
+      <TextLink to="/sign-in" fontWeight={600}>
+        Sign in
+      </TextLink>
+    </Flex>
   );
 }
 
-function AccountList({ name }: { name: string }) {
+function AccountList({ name, readOnly }: { name: string; readOnly: boolean }) {
+  const here = useLocation().pathname === '/settings';
   const [open, setOpen] = useState(false);
   const box = useRef<HTMLDivElement>(null);
   useCloseOnLeave(open, box, () => setOpen(false));
@@ -39,7 +50,8 @@ function AccountList({ name }: { name: string }) {
     <Box position="relative" ref={box}>
       <chakra.button
         aria-expanded={open}
-        color="ink.muted"
+        color={here ? 'ink' : 'ink.muted'}
+        fontWeight={here ? 600 : 400}
         cursor="pointer"
         minHeight="26px"
         maxWidth={{ base: '130px', lg: '260px' }}
@@ -48,12 +60,13 @@ function AccountList({ name }: { name: string }) {
       >
         {name}
       </chakra.button>
-      {open && <OpenList onDone={() => setOpen(false)} />}
+      {here && <Swell depthPx={5} linePx={1.5} />}
+      {open && <OpenList canSet={!readOnly} onDone={() => setOpen(false)} />}
     </Box>
   );
 }
 
-function OpenList({ onDone }: { onDone: () => void }) {
+function OpenList({ canSet, onDone }: { canSet: boolean; onDone: () => void }) {
   const { signOut } = useAuthActions();
   const navigate = useNavigate();
   const [mode, setMode] = useState(storedColorMode);
@@ -109,6 +122,13 @@ function OpenList({ onDone }: { onDone: () => void }) {
           ))}
         </Flex>
       </chakra.fieldset>
+      {canSet && (
+        <Box marginBottom="8px">
+          <TextLink to="/settings" fontWeight={600} onClick={onDone}>
+            Settings
+          </TextLink>
+        </Box>
+      )}
       <TextButton fontWeight={600} onClick={() => void leave()}>
         Sign out
       </TextButton>

@@ -1,8 +1,13 @@
-import { paths, type ForgotRequest, type ResetRequest } from '@thudline/contracts';
+import {
+  paths,
+  type ChangePasswordRequest,
+  type ForgotRequest,
+  type ResetRequest,
+} from '@thudline/contracts';
 import useSWR, { useSWRConfig } from 'swr';
 import { requestNothing } from '../../../lib/apiClient';
 
-/** What is done with the links that come by mail. */
+/** Passwords, and what is done with the links that come by mail. */
 export function useAccountLinks() {
   const { mutate } = useSWRConfig();
   return {
@@ -14,6 +19,9 @@ export function useAccountLinks() {
       await mutate(() => true, undefined, { revalidate: false });
       await mutate(paths.me);
     },
+    /** Signs other devices out; this one stays. */
+    changePassword: (body: ChangePasswordRequest) =>
+      requestNothing(paths.changePassword, { method: 'POST', body }),
     /** Sends the mail that says an address is right once more. */
     resendVerification: () => requestNothing(paths.resendVerification, { method: 'POST' }),
   };

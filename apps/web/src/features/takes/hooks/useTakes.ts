@@ -34,6 +34,9 @@ export function useTakes(query: TakesQuery, cursor: string | null) {
 
 /** How many takes fit a sentence, and up to `limit` of them. Null asks nothing. */
 export function useTakesFitting(query: TakesQuery | null, limit: number) {
-  const { data, error } = useSWR<ListTakesResponse, Error>(query && takesKey({ query, limit }), readPage);
-  return { page: data, error };
+  const { data, error, mutate } = useSWR<ListTakesResponse, Error>(
+    query && takesKey({ query, limit }),
+    readPage,
+  );
+  return { page: data, error, retry: () => void mutate() };
 }

@@ -1,0 +1,299 @@
+import {
+  listTakesResponse,
+  meResponse,
+  paths,
+  type MeResponse,
+  type UpdateMeRequest,
+} from '@thudline/contracts';
+import { act, fireEvent, screen, waitFor, within } from '@testing-library/react';
+import userEvent from '@testing-library/user-event';
+import { fakeServer, json, refusal, type FakeRoutes } from '../testing/fakeServer';
+import { renderPage } from '../testing/renderPage';
+import { sampleMe, sampleReport } from '../testing/sampleData';
+import { listId, sampleList, sampleListItem } from '../testing/sampleList';
+import { SettingsPage } from './SettingsPage';
+
+const takes = [
+  sampleListItem({ number: 14, kickPeakDbfs: -2.7 }),
+  sampleListItem({ number: 12, kickPeakDbfs: -8.6 }),
+  sampleListItem({ number: 11, kickPeakDbfs: -14.2 }),
+];
+const listPath = `${paths.takes}?limit=100`;
+
+/** A server that keeps what it is told of the player. */
+function open(routes: FakeRoutes = {}, start: Partial<MeResponse> = {}) {
+  let me: MeResponse = { ...sampleMe, ...start };
+  const server = fakeServer({
+    [`GET ${paths.me}`]: () => ({ json: meResponse.parse(me) }),
+    [`PATCH ${paths.me}`]: (body) => {
+      const { name, settings } = body as UpdateMeRequest;
+      me = { ...me, name: name ?? me.name, settings: { ...me.settings, ...settings } };
+      return { json: meResponse.parse(me) };
+    },
+    [`GET ${listPath}`]: json(listTakesResponse.parse(sampleList(takes))),
+    [`GET ${paths.report(listId(14))}`]: json(sampleReport({ takeId: listId(14) })),
+    ...routes,
+  });
+  renderPage([{ path: '/settings', element: <SettingsPage /> }], '/settings');
+  return {
+    ...server,
+    changes: () => server.requests.filter(({ method }) => method === 'PATCH').map(({ body }) => body),
+  };
+}
+const grip = (name: string) => screen.findByRole('slider', { name });
+const region = (name: string) => screen.findByRole('region', { name });
+
+describe('target and aim', () => {
+  it('counts how many takes are on target', async () => {
+    open();
+    expect(await screen.findByText('1 of your 3 takes')).toBeInTheDocument();
+    expect(screen.getByText(/is on target\. Take 11 is low, take 14 hot\./)).toBeInTheDocument();
+    expect(screen.getByText('take 14')).toBeInTheDocument();
+  });
+
+  it('moves with the arrow keys by half a dB, recounts at once, and is kept as one change', async () => {
+    const { changes } = open();
+    const upper = await grip('Upper end of the target');
+    await screen.findByText('1 of your 3 takes');
+    expect(upper).toHaveAttribute('aria-valuetext', '−6.0 dBFS');
+    fireEvent.keyDown(upper, { key: 'PageUp' });
+    fireEvent.keyDown(upper, { key: 'ArrowRight' });
+    expect(upper).toHaveAttribute('aria-valuenow', '-2.5');
+    expect(screen.getByText('2 of your 3 takes')).toBeInTheDocument();
+    expect(changes()).toEqual([]);
+    await waitFor(() =>
+      expect(changes()).toEqual([{ settings: { target: { lowDbfs: -12, highDbfs: -2.5, aimDbfs: -9 } } }]),
+    );
+    expect(await within(await region('Target and aim')).findByText('kept')).toBeInTheDocument();
+  });
+
+  it('is kept when the grip is left', async () => {
+    const { changes } = open();
+    const aim = await grip('Aim');
+    aim.focus();
+    await userEvent.keyboard('{Home}{Tab}');
+    await waitFor(() =>
+      expect(changes()).toEqual([{ settings: { target: { lowDbfs: -12, highDbfs: -6, aimDbfs: -12 } } }]),
+    );
+  });
+
+  it('follows the pointer while a grip is dragged, and is kept when it is let go of', async () => {
+    const { changes } = open();
+    const lower = await grip('Lower end of the target');
+    lower.setPointerCapture = () => undefined;
+    lower.hasPointerCapture = () => true;
+    // In jsdom the strip is 828 px wide and starts at 0: −24 dBFS lies at 96 px, 0 dBFS at 794 px.
+    fireEvent.pointerDown(lower);
+    // jsdom has no pointer events with a place.
+    fireEvent(
+      lower,
+      new MouseEvent('pointermove', { bubbles: true, clientX: 96 + ((24 - 15.1) / 24) * 698 }),
+    );
+    expect(lower).toHaveAttribute('aria-valuenow', '-15');
+    expect(await screen.findByText(/Take 14 is hot\./)).toBeInTheDocument();
+    expect(changes()).toEqual([]);
+    fireEvent.pointerUp(lower);
+    await waitFor(() =>
+      expect(changes()).toEqual([{ settings: { target: { lowDbfs: -15, highDbfs: -6, aimDbfs: -9 } } }]),
+    );
+  });
+
+  it('can be typed, with or without the minus sign', async () => {
+    const { changes } = open();
+    const field = await screen.findByRole('spinbutton', { name: 'Lower end of the target, dBFS' });
+    await userEvent.clear(field);
+    await userEvent.type(field, '13,5{Enter}');
+    await waitFor(() =>
+      expect(changes()).toEqual([{ settings: { target: { lowDbfs: -13.5, highDbfs: -6, aimDbfs: -9 } } }]),
+    );
+    expect(field).toHaveValue('−13.5');
+  });
+
+  it('says beside the field what can’t be read, and leaves the target alone', async () => {
+    const { changes } = open();
+    const field = await screen.findByRole('spinbutton', { name: 'Aim, dBFS' });
+    await userEvent.clear(field);
+    await userEvent.type(field, 'loud');
+    await userEvent.tab();
+    expect(screen.getByRole('alert')).toHaveTextContent('Write a number between −40 and −1.');
+    expect(field).toHaveValue('−9');
+    expect(changes()).toEqual([]);
+  });
+
+  it('goes back to what is usual', async () => {
+    const { changes } = open(
+      {},
+      { settings: { ...sampleMe.settings, target: { lowDbfs: -20, highDbfs: -10, aimDbfs: -12 } } },
+    );
+    await userEvent.click(await screen.findByRole('button', { name: 'back to −12, −6, −9' }));
+    await waitFor(() => expect(changes()).toEqual([{ settings: { target: sampleMe.settings.target } }]));
+  });
+
+  it('goes back where it was when it could not be kept, and says so', async () => {
+    open({ [`PATCH ${paths.me}`]: refusal(500, 'internal', 'Something went wrong here.') });
+    const upper = await grip('Upper end of the target');
+    fireEvent.keyDown(upper, { key: 'ArrowLeft' });
+    expect(upper).toHaveAttribute('aria-valuenow', '-6.5');
+    fireEvent.blur(upper);
+    expect(await screen.findByRole('alert')).toHaveTextContent('Not kept. Something went wrong here.');
+    expect(upper).toHaveAttribute('aria-valuenow', '-6');
+  });
+
+  it('can be set before there is a take', async () => {
+    open({ [`GET ${listPath}`]: json(listTakesResponse.parse(sampleList([]))) });
+    expect(await screen.findByText('Your takes will be counted here.')).toBeInTheDocument();
+    expect(await grip('Aim')).toBeInTheDocument();
+  });
+
+  it('says when the takes could not be counted, and counts again', async () => {
+    let away = true;
+    open({
+      [`GET ${listPath}`]: () =>
+        away ? refusal(503, 'storage-unavailable', 'The store is away.')() : json(sampleList(takes))(),
+    });
+    expect(await screen.findByRole('alert')).toHaveTextContent(
+      'Your takes could not be counted. The store is away.',
+    );
+    away = false;
+    await userEvent.click(screen.getByRole('button', { name: 'Try again' }));
+    expect(await screen.findByText('1 of your 3 takes')).toBeInTheDocument();
+  });
+});
+
+describe('name and address', () => {
+  it('keeps a name when the field is left', async () => {
+    const { changes } = open();
+    const field = await screen.findByLabelText('Name');
+    await userEvent.clear(field);
+    await userEvent.type(field, ' Mika ');
+    await userEvent.tab();
+    await waitFor(() => expect(changes()).toEqual([{ name: 'Mika' }]));
+    expect(await within(await region('You')).findByText('kept')).toBeInTheDocument();
+    expect(field).toHaveValue('Mika');
+  });
+
+  it('says what is wrong with a name, beside it', async () => {
+    const { changes } = open();
+    const field = await screen.findByLabelText('Name');
+    await userEvent.clear(field);
+    await userEvent.tab();
+    expect(field).toHaveAccessibleDescription('Write the name others should see.');
+    expect(changes()).toEqual([]);
+  });
+
+  it('sends the mail for an address that is not verified once more', async () => {
+    const { requests } = open(
+      { [`POST ${paths.resendVerification}`]: () => ({ status: 204 }) },
+      { emailVerified: false },
+    );
+    expect(await screen.findByText(/not verified yet/)).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'send it again' }));
+    expect(await screen.findByText('A mail with a link is on its way.')).toBeInTheDocument();
+    expect(requests.some(({ path }) => path === paths.resendVerification)).toBe(true);
+  });
+
+  it('says that an address is verified', async () => {
+    open({}, { emailVerified: true });
+    expect(await screen.findByText('verified')).toBeInTheDocument();
+  });
+});
+
+describe('a new password', () => {
+  const fill = async (old: string, fresh: string) => {
+    await userEvent.click(await screen.findByRole('button', { name: 'Set a new password' }));
+    await userEvent.type(screen.getByLabelText('Password as it is'), old);
+    await userEvent.type(screen.getByLabelText('New password', { selector: 'input' }), fresh);
+    await userEvent.click(screen.getByRole('button', { name: 'Set it' }));
+  };
+
+  it('is set against the old one', async () => {
+    const { requests } = open({ [`POST ${paths.changePassword}`]: () => ({ status: 204 }) });
+    await fill('drumsdrums', 'a-quiet-kit-8');
+    expect(
+      await screen.findByText(/Your new password is set; other devices are signed out\./),
+    ).toBeInTheDocument();
+    expect(requests.find(({ path }) => path === paths.changePassword)?.body).toEqual({
+      oldPassword: 'drumsdrums',
+      password: 'a-quiet-kit-8',
+    });
+  });
+
+  it('is not set against a wrong one', async () => {
+    open({ [`POST ${paths.changePassword}`]: refusal(403, 'wrong-sign-in', 'No.') });
+    await fill('guess', 'a-quiet-kit-8');
+    await waitFor(() =>
+      expect(screen.getByLabelText('Password as it is')).toHaveAccessibleDescription(
+        'This is not your password. Try again.',
+      ),
+    );
+  });
+});
+
+describe('units', () => {
+  it('are kept as they are chosen, and the speed of sound follows', async () => {
+    const { changes } = open();
+    expect(await screen.findByText(/sound travels at 343 m\/s/)).toBeInTheDocument();
+    await userEvent.selectOptions(screen.getByRole('combobox', { name: 'Temperature in' }), '°F');
+    const field = await screen.findByRole('spinbutton', { name: 'Temperature where you play' });
+    await waitFor(() => expect(field).toHaveValue('68 °F'));
+    await userEvent.clear(field);
+    await userEvent.type(field, '50{Enter}');
+    expect(await screen.findByText(/sound travels at 337 m\/s/)).toBeInTheDocument();
+    await userEvent.selectOptions(screen.getByRole('combobox', { name: 'Lengths in' }), 'feet and inches');
+    expect(await screen.findByText(/sound travels at 1107 feet a second/)).toBeInTheDocument();
+    await waitFor(() =>
+      expect(changes()).toEqual([
+        { settings: { temperatureUnit: 'fahrenheit' } },
+        { settings: { temperatureC: 10 } },
+        { settings: { lengthUnit: 'foot' } },
+      ]),
+    );
+  });
+
+  it('say what a temperature can be', async () => {
+    const { changes } = open();
+    const field = await screen.findByRole('spinbutton', { name: 'Temperature where you play' });
+    await userEvent.clear(field);
+    await userEvent.type(field, 'warm');
+    await userEvent.tab();
+    expect(screen.getByRole('alert')).toHaveTextContent('Write a temperature between −20 and 50 °C.');
+    expect(changes()).toEqual([]);
+  });
+});
+
+it('switches single keys off, and lists what they do', async () => {
+  const { changes } = open();
+  const keys = within(await region('Keys'));
+  expect(keys.getByText('Space')).toBeInTheDocument();
+  await userEvent.click(keys.getByRole('checkbox', { name: 'Single keys work on a sheet' }));
+  await waitFor(() => expect(changes()).toEqual([{ settings: { singleKeys: false } }]));
+  expect(await keys.findByText('kept')).toBeInTheDocument();
+  expect(keys.getByRole('checkbox')).not.toBeChecked();
+});
+
+it('is closed on a phone that reads along', async () => {
+  open({}, { readOnly: true });
+  expect(await screen.findByRole('alert')).toHaveTextContent('This phone reads along.');
+});
+
+it('keeps the last of several quick changes', async () => {
+  let held: (() => void)[] = [];
+  const { changes } = open({
+    [`PATCH ${paths.me}`]: (body) =>
+      new Promise((resolve) => {
+        const { settings } = body as UpdateMeRequest;
+        held = [
+          ...held,
+          () => resolve({ json: { ...sampleMe, settings: { ...sampleMe.settings, ...settings } } }),
+        ];
+      }),
+  });
+  const box = await screen.findByRole('checkbox', { name: 'Single keys work on a sheet' });
+  await userEvent.click(box);
+  await userEvent.click(box);
+  expect(changes()).toEqual([{ settings: { singleKeys: false } }]);
+  await act(() => Promise.resolve(held[0]()));
+  await waitFor(() => expect(changes()).toHaveLength(2));
+  await act(() => Promise.resolve(held[1]()));
+  expect(box).toBeChecked();
+});
