@@ -12,7 +12,10 @@ const margin = [
       </>
     ),
   },
-  { title: 'What is kept?', text: 'Your name, your e-mail and your takes. Nobody hears a take but you.' },
+  {
+    title: 'What is kept?',
+    text: 'Your name, your e-mail and your takes. Nobody hears a take but you and whom you send it to.',
+  },
 ];
 
 export function JoinPage() {

@@ -1,13 +1,21 @@
 import { PageTitle } from '../components/PageTitle';
+import { TextLink } from '../components/TextLink';
 import { AuthSheet } from '../features/auth/components/AuthSheet';
 import { SignInForm } from '../features/auth/components/SignInForm';
 
 const margin = [
   {
-    title: 'Nothing recorded yet?',
-    text: 'A first take needs 45 seconds of playing: one microphone in the kick, one above the kit.',
+    title: 'Somebody sent you a link?',
+    text: 'Open it as it is. Reading and listening need no account.',
   },
-  { title: 'Who sees a take?', text: 'Nobody but you. Files are kept bit for bit and come back the same.' },
+  {
+    title: 'Nothing recorded yet?',
+    text: (
+      <>
+        <TextLink to="/sample">Read a sheet we made earlier</TextLink>. It can be heard and changed.
+      </>
+    ),
+  },
 ];
 
 export function SignInPage() {

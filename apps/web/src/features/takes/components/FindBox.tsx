@@ -24,7 +24,8 @@ export function FindBox({ find, onFind }: { find: string; onFind: (find: string)
         maxLength={100}
         width="100%"
         minHeight="44px"
-        marginTop={{ base: 0, lg: '-11px' }}
+        marginTop={{ base: 0, lg: '-13px' }}
+        paddingTop={{ base: 0, lg: '12px' }}
         paddingX="3px"
         bg="transparent"
         color="ink"

@@ -71,7 +71,12 @@ function Besides({ query, page }: Pick<FootProps, 'query' | 'page'>) {
 function RestoreLink({ query, page }: Pick<FootProps, 'query' | 'page'>) {
   if (page.deletedTotal === 0 || query.show === 'deleted') return null;
   return (
-    <TextLink to={takesAddress({ ...everyTake, show: 'deleted' })} color="ink">
+    <TextLink
+      to={takesAddress({ ...everyTake, show: 'deleted' })}
+      color="ink"
+      display="inline-block"
+      lineHeight="28px"
+    >
       restore something deleted
     </TextLink>
   );

@@ -41,7 +41,7 @@ function ColumnName({ area, children }: { area: string; children: string }) {
       role="columnheader"
       gridArea={{ lg: area }}
       alignSelf="end"
-      paddingBottom="5px"
+      paddingBottom="14px"
       srOnly={{ base: true, lg: false }}
     >
       {children}

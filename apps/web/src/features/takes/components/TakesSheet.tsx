@@ -53,6 +53,7 @@ export function TakesSheet() {
           )}
           {page.items.length === 0 && place.cursor && <NothingFurther query={query} />}
           {page.items.length === 0 && !place.cursor && <NoTakeFits {...{ query, page, target }} />}
+          {bar}
           <TakesFoot
             {...{ query, place, page }}
             chosenBar={
@@ -69,7 +70,7 @@ export function TakesSheet() {
           />
         </>
       )}
-      {bar}
+      {!page && bar}
     </Box>
   );
 }
