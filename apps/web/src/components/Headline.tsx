@@ -8,6 +8,7 @@ export const Headline = chakra('h1', {
     fontWeight: 400,
     letterSpacing: '-0.012em',
     textWrap: 'pretty',
+    _print: { fontSize: 'line', lineHeight: '41px' },
     '& b': { fontWeight: 900 },
   },
 });

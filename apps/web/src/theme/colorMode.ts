@@ -4,6 +4,7 @@ export const colorModes = ['system', 'light', 'dark'] as const;
 export type ColorMode = (typeof colorModes)[number];
 
 const prefersDark = () => window.matchMedia('(prefers-color-scheme: dark)');
+const onPaper = () => window.matchMedia('print');
 
 export function storedColorMode(): ColorMode {
   const stored = localStorage.getItem(storageKey);
@@ -11,7 +12,8 @@ export function storedColorMode(): ColorMode {
 }
 
 function apply(mode: ColorMode) {
-  const dark = mode === 'dark' || (mode === 'system' && prefersDark().matches);
+  const wanted = mode === 'dark' || (mode === 'system' && prefersDark().matches);
+  const dark = wanted && !onPaper().matches;
   document.documentElement.classList.toggle('dark', dark);
   document.documentElement.style.colorScheme = dark ? 'dark' : 'light';
 }
@@ -21,8 +23,12 @@ export function chooseColorMode(mode: ColorMode) {
   apply(mode);
 }
 
-/** Puts the stored theme on the page and follows the system while nothing else was chosen. */
+/**
+ * Puts the stored theme on the page and follows the system while nothing else was chosen. On paper everything is light,
+ * whichever theme the screen has.
+ */
 export function startColorMode() {
   apply(storedColorMode());
-  prefersDark().addEventListener('change', () => apply(storedColorMode()));
+  for (const query of [prefersDark(), onPaper()])
+    query.addEventListener('change', () => apply(storedColorMode()));
 }

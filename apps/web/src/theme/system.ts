@@ -10,6 +10,7 @@ const config = defineConfig({
     semanticTokens,
   },
   globalCss: {
+    '@page': { margin: '12mm' },
     html: { bg: 'paper', color: 'ink', fontFamily: 'body', fontSize: 'body', lineHeight: 1.45 },
     body: {
       bg: 'paper',
@@ -19,7 +20,8 @@ const config = defineConfig({
       _print: { bg: '#fff' },
     },
     '*:focus-visible': { outline: '3px solid', outlineColor: 'overhead', outlineOffset: '2px' },
-    'h1, h2, h3': { fontFamily: 'heading' },
+    'h1, h2, h3': { fontFamily: 'heading', breakAfter: 'avoid' },
+    'svg, tr, li': { breakInside: 'avoid' },
     // Heavy words in running text are 600; without this the browser would take the 900 of headlines.
     'b, strong': { fontWeight: 600 },
     'a:not([class])': { textDecoration: 'underline', textUnderlineOffset: '3px' },

@@ -19,20 +19,27 @@ export function FiguresSection({
   return (
     <SheetSection id="figures" title="All figures">
       <FiguresOut {...{ take, report, groups }} />
-      {groups.map((group) => (
-        <FigureTable key={group.title} group={group} />
-      ))}
+      <Box _print={{ display: 'grid', gridTemplateColumns: '1fr 1fr', columnGap: '32px' }}>
+        {groups.map((group) => (
+          <FigureTable key={group.title} group={group} />
+        ))}
+      </Box>
       <PictureTitle>Files</PictureTitle>
       <FileFacts take={take} dspVersion={report.dspVersion} />
     </SheetSection>
   );
 }
 
-const cell = { textAlign: 'right', paddingY: '7px', verticalAlign: 'top', whiteSpace: 'nowrap' } as const;
+const cell = {
+  textAlign: 'right',
+  paddingY: { base: '7px', _print: '2px' },
+  verticalAlign: 'top',
+  whiteSpace: 'nowrap',
+} as const;
 
 function FigureTable({ group }: { group: FigureGroup }) {
   return (
-    <>
+    <div>
       <PictureTitle>{group.title}</PictureTitle>
       <chakra.table width="100%" fontSize="small" marginTop="4px">
         <thead>
@@ -50,7 +57,7 @@ function FigureTable({ group }: { group: FigureGroup }) {
               textAlign="left"
               fontWeight={400}
               paddingLeft="12px"
-              width={{ base: '64px', md: '120px' }}
+              width={{ base: '64px', md: '120px', _print: '72px' }}
             >
               unit
             </chakra.th>
@@ -62,16 +69,28 @@ function FigureTable({ group }: { group: FigureGroup }) {
           ))}
         </tbody>
       </chakra.table>
-    </>
+    </div>
   );
 }
 
 function Row({ row }: { row: FigureRow }) {
   return (
     <chakra.tr borderBottom="1px solid" borderColor="rule">
-      <chakra.th scope="row" textAlign="left" fontWeight={400} paddingY="3px" paddingRight="12px">
+      <chakra.th
+        scope="row"
+        textAlign="left"
+        fontWeight={400}
+        paddingY={{ base: '3px', _print: 0 }}
+        paddingRight="12px"
+      >
         <details>
-          <chakra.summary cursor="pointer" paddingY="4px" listStylePosition="outside" title="What is this?">
+          <chakra.summary
+            cursor="pointer"
+            paddingY={{ base: '4px', _print: '2px' }}
+            listStylePosition="outside"
+            _print={{ listStyleType: 'none' }}
+            title="What is this?"
+          >
             {row.label}
           </chakra.summary>
           <Box color="ink.muted" fontSize="caption" maxWidth="380px" paddingBottom="6px">
@@ -84,7 +103,13 @@ function Row({ row }: { row: FigureRow }) {
           {value}
         </chakra.td>
       ))}
-      <chakra.td color="ink.muted" paddingLeft="12px" paddingY="7px" verticalAlign="top" fontSize="caption">
+      <chakra.td
+        color="ink.muted"
+        paddingLeft="12px"
+        paddingY={{ base: '7px', _print: '2px' }}
+        verticalAlign="top"
+        fontSize="caption"
+      >
         {row.unit}
       </chakra.td>
     </chakra.tr>

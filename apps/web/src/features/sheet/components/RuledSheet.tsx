@@ -2,6 +2,8 @@ import { Box } from '@chakra-ui/react';
 import type { ReactNode } from 'react';
 
 const marginPx = 328;
+/** The sheet as it stands at the desk, on the width of A4 less its margins: 1,088 px on 186 mm, so that it fits two pages. */
+const onPaper = { zoom: 0.64, columns: '704px 328px', gapPx: 56 };
 
 /** The sheet's paper: a margin line down its whole length, with rows of body and margin. */
 export function RuledSheet({ children }: { children: ReactNode }) {
@@ -14,7 +16,7 @@ export function RuledSheet({ children }: { children: ReactNode }) {
       position="relative"
       paddingTop={{ base: '22px', lg: '25px' }}
       paddingBottom="44px"
-      _print={{ padding: 0, border: 'none' }}
+      _print={{ padding: '22px 0 0', border: 'none', zoom: onPaper.zoom, width: '1088px' }}
     >
       <Box
         aria-hidden
@@ -25,7 +27,7 @@ export function RuledSheet({ children }: { children: ReactNode }) {
         right={`${marginPx}px`}
         borderLeft="1px solid"
         borderColor="margin"
-        _print={{ display: 'none' }}
+        _print={{ display: 'block' }}
       />
       {children}
     </Box>
@@ -38,7 +40,7 @@ export function SheetRow({ children, note }: { children: ReactNode; note?: React
     <Box
       display={{ base: 'block', lg: 'grid' }}
       gridTemplateColumns={`minmax(0, 1fr) ${marginPx}px`}
-      _print={{ display: 'block' }}
+      _print={{ display: 'grid', gridTemplateColumns: onPaper.columns, columnGap: `${onPaper.gapPx}px` }}
     >
       <Box
         paddingLeft={{ base: '18px', md: '40px', lg: '64px' }}
@@ -57,6 +59,7 @@ export function SheetRow({ children, note }: { children: ReactNode; note?: React
           gap="12px"
           marginTop={{ base: '14px', lg: 0 }}
           minWidth={0}
+          _print={{ padding: 0, marginTop: 0 }}
         >
           {note}
         </Box>
@@ -77,9 +80,10 @@ export function MarginNote({ from, about, children }: { from: string; about?: st
       paddingLeft={{ base: '14px', lg: '20px' }}
       borderLeft={{ base: '1px solid', lg: 'none' }}
       borderColor={{ base: 'margin' }}
+      _print={{ paddingLeft: '20px', borderLeft: 'none' }}
       _before={{
         content: '""',
-        display: { base: 'none', lg: 'block' },
+        display: { base: 'none', lg: 'block', _print: 'block' },
         position: 'absolute',
         left: '-1px',
         top: '10px',

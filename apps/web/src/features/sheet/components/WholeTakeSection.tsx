@@ -1,4 +1,4 @@
-import { Box } from '@chakra-ui/react';
+import { Box, chakra } from '@chakra-ui/react';
 import type { ReportResponse } from '@thudline/contracts';
 import { lazy, Suspense } from 'react';
 import { TextButton } from '../../../components/Button';
@@ -27,8 +27,11 @@ export function WholeTakeSection({
   return (
     <SheetSection id="whole-take" title="Whole take">
       <SectionText>
-        {plural(kicks, 'kick hit')} among {plural(report.hits.length, 'hit')}. Click or drag to play from
-        there. Each microphone is drawn to its own peak.
+        {plural(kicks, 'kick hit')} among {plural(report.hits.length, 'hit')}.{' '}
+        {canListen && (
+          <chakra.span _print={{ display: 'none' }}>Click or drag to play from there. </chakra.span>
+        )}
+        Each microphone is drawn to its own peak.
       </SectionText>
       {error ? (
         <Box role="alert" minHeight={pictureHeight} paddingTop="14px">

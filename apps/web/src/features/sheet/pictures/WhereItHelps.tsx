@@ -28,6 +28,8 @@ export function WhereItHelps({
       gridTemplateColumns={{ base: '1fr', lg: '330px 1fr' }}
       gap={{ base: '20px', lg: '42px' }}
       marginTop="8px"
+      breakInside="avoid"
+      _print={{ gridTemplateColumns: '330px 1fr', gap: '42px' }}
     >
       <ZoneRows zones={zones} label={chosen.label} />
       <ThirdOctaveSteps steps={steps} label={chosen.label} />
