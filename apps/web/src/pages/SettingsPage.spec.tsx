@@ -219,11 +219,17 @@ describe('a new password', () => {
   });
 
   it('is not set against a wrong one', async () => {
-    open({ [`POST ${paths.changePassword}`]: refusal(403, 'wrong-sign-in', 'No.') });
+    const fields = { oldPassword: 'That is not your password.' };
+    open({
+      [`POST ${paths.changePassword}`]: () => ({
+        status: 400,
+        json: { code: 'bad-request', message: 'That is not your password.', details: { fields } },
+      }),
+    });
     await fill('guess', 'a-quiet-kit-8');
     await waitFor(() =>
       expect(screen.getByLabelText('Password as it is')).toHaveAccessibleDescription(
-        'This is not your password. Try again.',
+        'That is not your password.',
       ),
     );
   });

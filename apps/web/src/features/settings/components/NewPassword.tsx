@@ -28,10 +28,7 @@ function PasswordForm({ onSet, onLeave }: { onSet: () => void; onLeave: () => vo
       await changePassword(body);
       onSet();
     },
-    place: (error) =>
-      error.code === 'wrong-sign-in'
-        ? { oldPassword: 'This is not your password. Try again.' }
-        : (error.details?.fields ?? null),
+    place: (error) => error.details?.fields ?? null,
   });
   return (
     <chakra.form
