@@ -23,7 +23,8 @@ export function SheetPaper({ children, margin }: { children: ReactNode; margin?:
         paddingTop={{ base: '22px', lg: '25px' }}
         paddingBottom="40px"
         minWidth={0}
-        _print={{ padding: 0 }}
+        // Below the swell of the head.
+        _print={{ padding: '16px 0 0' }}
       >
         {children}
       </Box>
@@ -35,6 +36,7 @@ export function SheetPaper({ children, margin }: { children: ReactNode; margin?:
           padding={{ base: '0 18px 32px', md: '0 40px 32px', lg: '24px 20px 32px' }}
           fontSize="small"
           position="relative"
+          _print={{ border: 'none', padding: '12px 0 0' }}
         >
           {margin}
         </chakra.aside>

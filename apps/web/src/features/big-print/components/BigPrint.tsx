@@ -61,7 +61,7 @@ function Foot({
   readOnly: boolean;
 }) {
   return (
-    <Box fontSize="small" lineHeight="22px" color="ink.muted">
+    <Box fontSize="small" lineHeight="22px" color="ink.muted" _print={{ display: 'none' }}>
       <Box role="status">{nextWords(next)}</Box>
       {readOnly && 'This phone only reads along: tick on the computer. '}
       <TextLink to={`/takes/${take.id}`}>Read the whole sheet</TextLink>

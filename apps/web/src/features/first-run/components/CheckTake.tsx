@@ -11,7 +11,13 @@ const parts = [
 export function CheckTake() {
   return (
     <>
-      <chakra.ol borderTop="1px solid" borderColor="rule" listStyleType="none">
+      <chakra.ol
+        borderTop="1px solid"
+        borderColor="rule"
+        listStyleType="none"
+        // On paper it hangs on the wall by the kit.
+        _print={{ fontSize: '16pt' }}
+      >
         {parts.map(({ time, strong, rest }) => (
           <Flex
             as="li"
@@ -21,8 +27,9 @@ export function CheckTake() {
             paddingTop="8px"
             paddingBottom="9px"
             lineHeight="26px"
+            _print={{ lineHeight: '1.5', paddingY: '10pt' }}
           >
-            <Box width="84px" flexShrink={0} color="ink.muted">
+            <Box width={{ base: '84px', _print: '100pt' }} flexShrink={0} color="ink.muted">
               {time}
             </Box>
             <Box>

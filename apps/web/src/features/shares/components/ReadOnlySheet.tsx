@@ -52,6 +52,7 @@ function PhoneSpeakers() {
   return (
     <Box
       display={{ base: 'block', lg: 'none' }}
+      order={1}
       width="100%"
       marginTop="-4px"
       fontSize="caption"

@@ -40,10 +40,10 @@ export function SheetTop({ take, report, listening, above, marginHead, moreButto
       <NextActions take={take} actions={report.actions} />
       <Flex gap="14px" marginTop="14px" wrap="wrap" _print={{ display: 'none' }}>
         {change && <ButtonLink to={`/takes/new?follows=${take.id}`}>Add the next take</ButtonLink>}
+        {moreButtons}
         {listen && (
           <HearTake listening={listening} durationS={report.durationS} look={change ? 'outline' : 'solid'} />
         )}
-        {moreButtons}
       </Flex>
       <SheetContents entries={contents(report)} />
       <FilesFindings report={report} />
