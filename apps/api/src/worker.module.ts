@@ -3,6 +3,7 @@ import { Config } from './config/config';
 import { ConfigModule } from './config/config.module';
 import { databaseModule } from './database/database.module';
 import { HousekeepingService } from './housekeeping/housekeeping.service';
+import { TakePurge } from './housekeeping/take-purge';
 import { loggerModule } from './logging/logger.module';
 import { MailWorker } from './mail/mail-worker';
 import { MailWriter } from './mail/mail-writer';
@@ -38,6 +39,7 @@ export class WorkerModule {
         Mailer,
         MailWriter,
         MailWorker,
+        TakePurge,
         HousekeepingService,
       ],
     };

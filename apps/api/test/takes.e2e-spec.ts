@@ -1,7 +1,9 @@
 import { listTakesResponse, ListTakesResponse, paths, TakeResponse } from '@thudline/contracts';
 import { AuditEvent } from '../src/audit/entities/audit-event.entity';
+import { Measurement } from '../src/measuring/entities/measurement.entity';
 import { Take } from '../src/takes/entities/take.entity';
 import { joined, Person } from './support/person';
+import { giveReport, shortTakeFacts } from './support/reported-take';
 import { startTestApp, TestApp } from './support/test-app';
 
 describe('takes', () => {
@@ -112,6 +114,75 @@ describe('takes', () => {
       expect(row.deletedAt).toBeInstanceOf(Date);
       expect((await juno.makeTake()).number).toBe(2);
       expect(await test.em().count(AuditEvent, { kind: 'take-deleted', subjectId: take.id })).toBe(1);
+    });
+  });
+
+  describe('bringing a take back', () => {
+    it('puts it where it was, and is no error twice', async () => {
+      const take = await juno.makeTake({ title: 'Back again', tags: ['felt'] });
+      await giveReport(test, take, await shortTakeFacts());
+      await juno.delete(paths.take(take.id)).expect(204);
+      const restored = await juno.post(paths.restoreTake(take.id)).expect(200);
+      expect(restored.body).toMatchObject({ id: take.id, title: 'Back again', hasReport: true });
+      await juno.post(paths.restoreTake(take.id)).expect(200);
+      expect((await list()).items.map(({ id }) => id)).toEqual([take.id]);
+      await juno.get(paths.report(take.id)).expect(200);
+      expect(await test.em().count(AuditEvent, { kind: 'take-restored', subjectId: take.id })).toBe(1);
+    });
+
+    it('has it measured where that was broken off', async () => {
+      const take = await juno.makeTake();
+      await juno.delete(paths.take(take.id)).expect(204);
+      expect(await test.em().count(Measurement, { take: take.id, state: 'queued' })).toBe(0);
+      const restored = await juno.post(paths.restoreTake(take.id)).expect(200);
+      expect(restored.body).toMatchObject({ measurement: { state: 'queued', attempt: 0 } });
+    });
+  });
+
+  describe('measuring again', () => {
+    const again = (take: TakeResponse) => juno.post(paths.measureAgain(take.id));
+    const measurementsOf = (take: TakeResponse) =>
+      test.em().find(Measurement, { take: take.id }, { orderBy: { id: 'asc' } });
+
+    it('adds a measurement after one that was cancelled or failed, and keeps what there was', async () => {
+      const take = await juno.makeTake();
+      await juno.post(paths.cancelMeasurement(take.id)).expect(204);
+      await again(take).expect(204);
+      await test.em().nativeUpdate(Measurement, { take: take.id, state: 'queued' }, { state: 'failed' });
+      await again(take).expect(204);
+      const states = (await measurementsOf(take)).map(({ state }) => state);
+      expect(states).toEqual(['cancelled', 'failed', 'queued']);
+      expect((await juno.get(paths.measurement(take.id))).body).toMatchObject({ state: 'queued' });
+      const jobs = await test
+        .em()
+        .execute('select 1 from pgboss.job where singleton_key = ?', [(await measurementsOf(take))[2].id]);
+      expect(jobs).toHaveLength(1);
+    });
+
+    it('is refused while it is measured, and where it would find the same', async () => {
+      const take = await juno.makeTake();
+      const waiting = await again(take).expect(409);
+      expect(waiting.body).toMatchObject({ code: 'conflict' });
+      await giveReport(test, take, await shortTakeFacts());
+      await again(take).expect(409);
+      expect(await measurementsOf(take)).toHaveLength(1);
+    });
+
+    it('is one measurement when it is asked for twice at the same moment', async () => {
+      const take = await juno.makeTake();
+      await juno.post(paths.cancelMeasurement(take.id)).expect(204);
+      const statuses = (await Promise.all([again(take), again(take)])).map(({ status }) => status);
+      expect(statuses.sort()).toEqual([204, 409]);
+    });
+
+    it('keeps the sheet of an older version until the new one is there', async () => {
+      const take = await juno.makeTake();
+      await giveReport(test, take, await shortTakeFacts());
+      await test.em().nativeUpdate(Measurement, { take: take.id }, { dspVersion: '0' });
+      await again(take).expect(204);
+      const read = await juno.get(paths.take(take.id)).expect(200);
+      expect(read.body).toMatchObject({ hasReport: true, measurement: { state: 'queued' } });
+      expect((await juno.get(paths.report(take.id))).body).toMatchObject({ dspVersion: '0' });
     });
   });
 

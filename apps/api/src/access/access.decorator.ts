@@ -9,7 +9,7 @@ export type AccessRule =
   | { kind: 'anyone' }
   | { kind: 'signed-in' }
   | { kind: 'role'; role: Role }
-  | { kind: 'take'; right: TakeRight };
+  | { kind: 'take'; right: TakeRight; alsoDeleted?: true };
 
 function access(rule: AccessRule, told: string) {
   const decorators = [SetMetadata(ACCESS, rule), ApiExtension('x-access', told)];
@@ -23,4 +23,7 @@ export const Access = {
   role: (role: Role) => access({ kind: 'role', role }, `role ${role}`),
   /** The take is the one whose id is the route's `:id`. */
   take: (right: TakeRight) => access({ kind: 'take', right }, `right to ${right} the take`),
+  /** The same where the take may have been deleted by its player. */
+  deletedTake: (right: TakeRight) =>
+    access({ kind: 'take', right, alsoDeleted: true }, `right to ${right} the take, deleted or not`),
 };

@@ -11,8 +11,10 @@ import { ACCESS, AccessRule } from './access.decorator';
 import { AccessService } from './access.service';
 import { readMethods } from './origin.guard';
 import { OPEN_TO_READ_ONLY, readOnly } from './read-only';
-import { TakeRight, TakeRights } from './take-rights';
+import { TakeRights } from './take-rights';
 import { Asker, notSignedIn, Viewer, ViewerRequest } from './viewer';
+
+type TakeRule = Extract<AccessRule, { kind: 'take' }>;
 
 /** Holds every route to the access it declares. */
 @Injectable()
@@ -34,7 +36,7 @@ export class AccessGuard implements CanActivate {
     if (asker.viewer) request.viewer = asker.viewer;
     if (asker.viewer?.readOnly) this.checkReadOnly(request, targets);
     if (rule.kind === 'take') {
-      request.rights = await this.rightsTo(String(request.params.id), asker, rule.right);
+      request.rights = await this.rightsTo(String(request.params.id), asker, rule);
       return true;
     }
     if (!asker.viewer) throw notSignedIn();
@@ -62,8 +64,11 @@ export class AccessGuard implements CanActivate {
     if (!viewer.user.roles.includes(role)) throw forbidden();
   }
 
-  private async rightsTo(takeId: string, asker: Asker, right: TakeRight): Promise<TakeRights> {
-    const rights = await this.access.take(asker, takeId);
+  private async rightsTo(takeId: string, asker: Asker, rule: TakeRule): Promise<TakeRights> {
+    const { right, alsoDeleted } = rule;
+    const rights = await (alsoDeleted
+      ? this.access.deletedTake(asker, takeId)
+      : this.access.take(asker, takeId));
     const isStranger = !asker.viewer && asker.shareIds.length === 0;
     if (!rights.read) throw isStranger ? notSignedIn() : notFound();
     if (!rights[right]) throw forbidden();

@@ -6,10 +6,12 @@ import { Share } from '../shares/entities/share.entity';
 import { isOpen } from '../shares/open-shares';
 import { Take } from '../takes/entities/take.entity';
 import { added, everything, nothing, TakeRights } from './take-rights';
-import { Asker } from './viewer';
+import { Asker, Viewer } from './viewer';
 
 /** The sheet that shows what this site does. */
 const forEverybody: TakeRights = { ...nothing, read: true, listen: true };
+
+const ownRights = ({ readOnly }: Viewer): TakeRights => ({ ...everything, change: !readOnly });
 
 /** The one place that knows who may see what. */
 @Injectable()
@@ -20,9 +22,16 @@ export class AccessService {
     if (!validate(takeId)) return nothing;
     const take = await this.em.findOne(Take, { id: takeId, deletedAt: null });
     if (!take) return nothing;
-    if (viewer && take.owner.id === viewer.user.id) return { ...everything, change: !viewer.readOnly };
+    if (viewer && take.owner.id === viewer.user.id) return ownRights(viewer);
     const granted = await this.grants(shareIds, takeId);
     return (await sampleTakeId(this.em)) === takeId ? added(granted, forEverybody) : granted;
+  }
+
+  /** A player may bring back what they deleted; to everybody else it is gone. */
+  async deletedTake({ viewer }: Asker, takeId: string): Promise<TakeRights> {
+    if (!viewer || !validate(takeId)) return nothing;
+    const isOwn = (await this.em.count(Take, { id: takeId, owner: viewer.user.id })) > 0;
+    return isOwn ? ownRights(viewer) : nothing;
   }
 
   /** Asked of the database every time, so that a link that has ended ends for those who have it open. */

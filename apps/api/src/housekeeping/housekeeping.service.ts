@@ -3,6 +3,7 @@ import { BeforeApplicationShutdown, Injectable, Logger, OnApplicationBootstrap }
 import { Session } from '../auth/entities/session.entity';
 import { OneTimeToken } from '../tokens/entities/one-time-token.entity';
 import { Throttle } from '../throttle/entities/throttle.entity';
+import { TakePurge } from './take-purge';
 
 const hourMs = 60 * 60 * 1000;
 const dayMs = 24 * hourMs;
@@ -15,7 +16,10 @@ export class HousekeepingService implements OnApplicationBootstrap, BeforeApplic
   private readonly logger = new Logger(HousekeepingService.name);
   private timer: NodeJS.Timeout | undefined;
 
-  constructor(private readonly em: EntityManager) {}
+  constructor(
+    private readonly em: EntityManager,
+    private readonly purge: TakePurge,
+  ) {}
 
   onApplicationBootstrap(): void {
     this.timer = setInterval(() => {
@@ -32,5 +36,6 @@ export class HousekeepingService implements OnApplicationBootstrap, BeforeApplic
     await em.nativeDelete(Throttle, { windowStart: { $lt: new Date(now.getTime() - dayMs) } });
     await em.nativeDelete(OneTimeToken, { expiresAt: { $lt: new Date(now.getTime() - dayMs) } });
     await em.nativeDelete(Session, { expiresAt: { $lt: new Date(now.getTime() - endedSessionKeptMs) } });
+    await this.purge.run(now);
   }
 }

@@ -19,6 +19,14 @@ export class MeasurementsController {
     return measurementResponseOf(await this.measurements.getLatest(takeId));
   }
 
+  @Post('again')
+  @Access.take('change')
+  @HttpCode(204)
+  @ApiNoContentResponse({ description: 'It waits to be measured; what there is of it stays.' })
+  again(@Param('id') takeId: string): Promise<void> {
+    return this.measurements.again(takeId);
+  }
+
   @Post('cancel')
   @Access.take('change')
   @HttpCode(204)

@@ -1,5 +1,6 @@
-import { EntityManager } from '@mikro-orm/postgresql';
+import { EntityManager, LockMode } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
+import { AppError } from '../errors/app-error';
 import { Take } from '../takes/entities/take.entity';
 import { Measurement } from './entities/measurement.entity';
 import { MeasureQueue } from './measure-queue';
@@ -31,6 +32,25 @@ export class MeasurementsService {
     await em.flush();
     // Fairness: who has many waiting stands behind who has few.
     await this.measureQueue.send(em, { measurementId: measurement.id, priority: -waiting });
+  }
+
+  /**
+   * Measures a take once more: one that failed or was cancelled, or whose sheet an older version of the measurements made.
+   * What there was stays; the sheet changes when the new one is there.
+   *
+   * @throws {AppError} `conflict` where there is nothing new to find
+   */
+  async again(takeId: string): Promise<void> {
+    await this.em.transactional(async (em) => {
+      const take = await em.findOneOrFail(Take, { id: takeId }, { lockMode: LockMode.PESSIMISTIC_WRITE });
+      const latest = await this.getLatest(takeId);
+      const { state, inputHash } = latest;
+      if (state === 'queued' || state === 'running')
+        throw new AppError('conflict', 'This take is being measured already.');
+      if (state === 'done' && latest.dspVersion === dspVersion)
+        throw new AppError('conflict', 'This take was measured already, and the measurements are the same.');
+      await this.queue(em, { take, ownerId: take.owner.id, inputHash });
+    });
   }
 
   async getLatest(takeId: string): Promise<Measurement> {

@@ -3,9 +3,11 @@ import { createReadStream } from 'node:fs';
 import { Readable } from 'node:stream';
 import { pipeline } from 'node:stream/promises';
 import {
+  DeleteObjectCommand,
   DeleteObjectsCommand,
   GetObjectCommand,
   HeadBucketCommand,
+  ListObjectsV2Command,
   PutObjectCommand,
   S3Client,
 } from '@aws-sdk/client-s3';
@@ -71,6 +73,26 @@ export class ObjectStoreService implements OnApplicationShutdown {
     } catch (error) {
       this.logger.warn({ keys, cause: error }, 'Objects of an upload that failed could not be removed');
     }
+  }
+
+  /**
+   * Removes every object whose key begins so.
+   *
+   * @throws where the service doesn't answer, or keeps any
+   */
+  async removeAll(prefix: string): Promise<void> {
+    await this.answered(async () => {
+      for (;;) {
+        const listed = await this.client.send(
+          new ListObjectsV2Command({ Bucket: this.bucket, Prefix: prefix }),
+        );
+        const keys = (listed.Contents ?? []).flatMap(({ Key }) => Key ?? []);
+        if (keys.length === 0) return;
+        // One after the other: simple stores stumble over neighbours that go at the same moment.
+        for (const key of keys)
+          await this.client.send(new DeleteObjectCommand({ Bucket: this.bucket, Key: key }));
+      }
+    });
   }
 
   async answers(): Promise<boolean> {

@@ -62,6 +62,14 @@ export class TakesController {
     return this.takes.update(id, body, rights);
   }
 
+  /** Safe to call twice. */
+  @Post(':id/restore')
+  @Access.deletedTake('change')
+  @ZodResponse({ status: 200, type: TakeResponseDto })
+  restore(@CurrentViewer() viewer: Viewer, @Param('id') id: string, @CurrentRights() rights: TakeRights) {
+    return this.takes.restore(viewer, id, rights);
+  }
+
   @Delete(':id')
   @Access.take('change')
   @HttpCode(204)

@@ -49,6 +49,19 @@ export class TakesService {
     return this.whole(take, rights);
   }
 
+  /** A take that was deleted while it waited to be measured is measured after all. */
+  async restore(viewer: Viewer, takeId: string, rights: TakeRights): Promise<TakeResponse> {
+    const take = await this.em.findOneOrFail(Take, { id: takeId });
+    if (take.deletedAt) {
+      take.deletedAt = null;
+      this.audit.record({ kind: 'take-restored', userId: viewer.user.id, subjectId: take.id });
+      await this.em.flush();
+      const { state } = await this.measurements.getLatest(takeId);
+      if (state === 'cancelled') await this.measurements.again(takeId);
+    }
+    return this.whole(take, rights);
+  }
+
   /** The row and the recordings stay for a while, so that it can be undone; nobody sees them. */
   async remove(viewer: Viewer, takeId: string): Promise<void> {
     const take = await this.em.findOneOrFail(Take, { id: takeId });

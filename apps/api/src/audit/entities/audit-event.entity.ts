@@ -11,6 +11,8 @@ export const auditKinds = [
   'password-reset',
   'password-changed',
   'take-deleted',
+  'take-restored',
+  'take-purged',
   'share-made',
   'share-ended',
 ] as const;

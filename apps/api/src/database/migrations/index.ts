@@ -4,6 +4,7 @@ import { Migration20261201091810_shares } from './20261201091810-shares';
 import { Migration20261201092034_settings } from './20261201092034-settings';
 import { Migration20261201092459_oneTimeTokens } from './20261201092459-one-time-tokens';
 import { Migration20261201093300_tellOfChanges } from './20261201093300-tell-of-changes';
+import { Migration20261201093647_measureAgain } from './20261201093647-measure-again';
 
 /** In order; a new migration is added at the end and never changed once merged. */
 export const migrations = [
@@ -13,4 +14,5 @@ export const migrations = [
   { name: '20261201092034-settings', class: Migration20261201092034_settings },
   { name: '20261201092459-one-time-tokens', class: Migration20261201092459_oneTimeTokens },
   { name: '20261201093300-tell-of-changes', class: Migration20261201093300_tellOfChanges },
+  { name: '20261201093647-measure-again', class: Migration20261201093647_measureAgain },
 ];

@@ -10,8 +10,13 @@ export type MeasurementStage = (typeof measurementStages)[number];
 export const Measurement = defineEntity({
   name: 'Measurement',
   tableName: 'measurement',
-  uniques: [{ properties: ['take', 'dspVersion', 'inputHash'] }],
   indexes: [
+    {
+      // What failed or was cancelled stays as it was; measuring again adds a row.
+      name: 'measurement_once_index',
+      expression: `create unique index "measurement_once_index" on "measurement" ("take_id", "dsp_version", "input_hash") where "state" in ('queued', 'running', 'done')`,
+    },
+    { properties: ['take'] },
     {
       name: 'measurement_unfinished_index',
       expression: `create index "measurement_unfinished_index" on "measurement" ("state", "heartbeat_at") where "state" in ('queued', 'running')`,
