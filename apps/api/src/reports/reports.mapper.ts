@@ -72,6 +72,15 @@ export function reportResponseOf({ report, owner, reader, before }: ReportParts)
   const facts = storedFacts(report);
   const figures = reportFigures(facts, { target, temperatureC });
   const told = { lengthUnit: reader.lengthUnit, target };
+  const becameOf = before
+    ? outcomes({
+        before: reportFigures(before.report.summary, { target, temperatureC }),
+        after: figures,
+        doneActions: before.doneActions,
+        reader: told,
+        spectra: { before: decoded(before.spectra.before), after: decoded(before.spectra.after) },
+      })
+    : [];
   return {
     ...figures,
     findings: findings(figures, told),
@@ -80,17 +89,9 @@ export function reportResponseOf({ report, owner, reader, before }: ReportParts)
     measuredAt: report.createdAt.toISOString(),
     target,
     temperatureC,
-    line: reportLine(figures, told),
+    line: reportLine(figures, told, becameOf),
     actions: nextActions(figures, told),
-    outcomes: before
-      ? outcomes({
-          before: reportFigures(before.report.summary, { target, temperatureC }),
-          after: figures,
-          doneActions: before.doneActions,
-          reader: told,
-          spectra: { before: decoded(before.spectra.before), after: decoded(before.spectra.after) },
-        })
-      : [],
+    outcomes: becameOf,
     pairSpectrum: facts.pairs[0]?.spectrum ?? null,
   };
 }
