@@ -30,12 +30,12 @@ describe('the first page', () => {
       'Drop in a kick file and an overhead file. Read what to change before the next take.',
     );
     expect(screen.getByRole('link', { name: 'Join' })).toHaveAttribute('href', '/join');
-    expect(screen.getByRole('link', { name: 'Sign in' })).toHaveAttribute('href', '/sign-in');
+    expect(await screen.findByRole('link', { name: 'Sign in' })).toHaveAttribute('href', '/sign-in');
   });
 
   it('ends earlier where there is no sheet to show', async () => {
     open({ ...guest, [`GET ${paths.sampleSheet}`]: json({ takeId: null }) });
-    expect(await screen.findByText(/Files are kept bit for bit/)).toBeInTheDocument();
+    expect(await screen.findByRole('link', { name: 'Sign in' })).toBeInTheDocument();
     expect(screen.queryByRole('region', { name: 'A sheet we made earlier' })).not.toBeInTheDocument();
     expect(screen.queryByRole('link', { name: 'Read the whole sheet' })).not.toBeInTheDocument();
   });

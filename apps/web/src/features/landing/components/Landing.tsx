@@ -4,6 +4,7 @@ import { ButtonLink } from '../../../components/ButtonLink';
 import { Headline } from '../../../components/Headline';
 import { RuledSheet, SheetRow } from '../../sheet/components/RuledSheet';
 import { useSampleSheet } from '../hooks/useSampleSheet';
+import { LiveSheetLoading } from './LiveSheetLoading';
 
 const LiveSheet = lazy(async () => ({ default: (await import('./LiveSheet')).LiveSheet }));
 
@@ -21,7 +22,9 @@ const columns = [
 
 /** What it does, for someone who has never seen a sheet; below it a sheet that plays, where there is one. */
 export function Landing() {
-  const { takeId } = useSampleSheet();
+  const { takeId, error } = useSampleSheet();
+  // Most installations have one: until it is known, the page is drawn as if, so that nothing jumps.
+  const hasSample = takeId !== null && !error;
   return (
     <RuledSheet>
       <SheetRow note={<ForWhom />}>
@@ -30,7 +33,7 @@ export function Landing() {
         </Headline>
         <Flex marginTop={{ base: '20px', lg: '17px' }} gap="14px" alignItems="center" wrap="wrap">
           <ButtonLink to="/join">Join</ButtonLink>
-          {takeId ? (
+          {hasSample ? (
             <ButtonLink to="/sample" look="outline">
               Read the whole sheet
             </ButtonLink>
@@ -45,9 +48,9 @@ export function Landing() {
         </Flex>
         <Columns />
       </SheetRow>
-      {takeId && (
-        <Suspense fallback={<Box minHeight="560px" />}>
-          <LiveSheet takeId={takeId} />
+      {hasSample && (
+        <Suspense fallback={<LiveSheetLoading />}>
+          {takeId ? <LiveSheet takeId={takeId} /> : <LiveSheetLoading />}
         </Suspense>
       )}
       <SheetRow>

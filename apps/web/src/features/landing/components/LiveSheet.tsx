@@ -12,12 +12,13 @@ import { kickHitsOf, loudestHit, nearestHit } from '../../sheet/kickHits';
 import { HitStrip } from '../../sheet/pictures/HitStrip';
 import { LiveBench } from './LiveBench';
 import { LiveFinding } from './LiveFinding';
+import { LiveSheetLoading } from './LiveSheetLoading';
 
 /** The heart of a real sheet, to play and flip without an account; where it can't be had the page ends earlier. */
 export function LiveSheet({ takeId }: { takeId: string }) {
   const { report, error } = useReport(takeId, true);
   if (error) return null;
-  if (!report) return <Box minHeight="560px" role="status" aria-label="Loading a sheet" />;
+  if (!report) return <LiveSheetLoading />;
   return <LoadedSheet report={report} />;
 }
 

@@ -39,7 +39,7 @@ function Underway({ take }: { take: TakeResponse }) {
           <Box color="ink.muted" aria-live="polite">
             {words}
           </Box>
-          <TextButton onClick={() => void attempt(stopMeasuring)}>Stop</TextButton>
+          {take.rights.change && <TextButton onClick={() => void attempt(stopMeasuring)}>Stop</TextButton>}
         </Flex>
         <Failure>{failure}</Failure>
       </Box>
