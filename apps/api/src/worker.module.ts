@@ -15,6 +15,7 @@ import { MeasurementSweep } from './measuring/measurement-sweep';
 import { MeasuringRuns } from './measuring/measuring-runs';
 import { MeasuringWorker } from './measuring/measuring-worker';
 import { TakeFetcher } from './measuring/take-fetcher';
+import { TakeOutlines } from './measuring/take-outlines';
 import { QueueSender } from './queue/queue-sender';
 import { StorageModule } from './storage/storage.module';
 import { OneTimeTokensService } from './tokens/one-time-tokens.service';
@@ -33,6 +34,7 @@ export class WorkerModule {
         MeasurementClaims,
         MeasurementSweep,
         TakeFetcher,
+        TakeOutlines,
         MeasuringRuns,
         MeasuringWorker,
         OneTimeTokensService,

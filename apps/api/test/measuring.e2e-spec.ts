@@ -2,10 +2,19 @@ import {
   listTakesResponse,
   MeasurementResponse,
   paths,
+  ReportResponse,
   reportResponse,
   TakeResponse,
 } from '@thudline/contracts';
-import { bytesSource, decodePairSpectrum, encodeWav, measureTake, openWav, takeSummary } from '@thudline/dsp';
+import {
+  bytesSource,
+  decodeOutline,
+  decodePairSpectrum,
+  encodeWav,
+  measureTake,
+  openWav,
+  takeSummary,
+} from '@thudline/dsp';
 import { getScenario, synthesiseTake } from '@thudline/fixtures';
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Measurement } from '../src/measuring/entities/measurement.entity';
@@ -126,6 +135,25 @@ describe('measuring', () => {
       await juno.get(paths.pairSpectrum(take.id)).set('If-None-Match', etag).expect(304);
     });
 
+    it('gives it outlines in several resolutions, of which it sends the one that is asked for', async () => {
+      const peaks = (steps: number) =>
+        juno.get(`${paths.peaks(take.id)}?steps=${steps}`).responseType('arraybuffer');
+      const { durationS } = reportResponse.parse((await juno.get(paths.report(take.id))).body);
+      const coarse = await peaks(300).expect(200);
+      expect(coarse.headers).toMatchObject({
+        'x-steps': '500',
+        'x-tracks': '2',
+        'x-duration-s': String(durationS),
+      });
+      const outline = decodeOutline(new Uint8Array(coarse.body as Buffer), { steps: 500, tracks: 2 });
+      const loudest = kick.reduce((peak, sample) => Math.max(peak, Math.abs(sample)), 0);
+      expect(Math.max(...outline.tracks[0].map(Math.abs))).toBe(Math.round(127 * loudest));
+      expect((await peaks(1500).expect(200)).headers['x-steps']).toBe('2000');
+      const { etag } = coarse.headers as { etag: string };
+      await peaks(300).set('If-None-Match', etag).expect(304);
+      await juno.get(`${paths.peaks(take.id)}?steps=9`).expect(400);
+    });
+
     it('lists it with the same summary as its sheet, from columns that hold no hits', async () => {
       const report = reportResponse.parse((await juno.get(paths.report(take.id))).body);
       const { items } = listTakesResponse.parse((await juno.get(paths.takes)).body);
@@ -164,6 +192,8 @@ describe('measuring', () => {
           rest: expect.stringMatching(/dB of low end came back/) as string,
         },
       ]);
+      const { line } = (await juno.get(paths.report(after.id))).body as ReportResponse;
+      expect(line[0].action).toBe('The flip worked:');
       expect(await outcomesOf(before)).toEqual([]);
       expect(await outcomesOf(nothingDone)).toEqual([]);
       await juno.delete(paths.take(before.id)).expect(204);

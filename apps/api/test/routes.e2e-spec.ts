@@ -133,6 +133,7 @@ describe('every route there is', () => {
         paths.report(':id'),
         paths.pairSpectrum(':id'),
         paths.excerpt(':id'),
+        paths.peaks(':id'),
         paths.listen(':id'),
         paths.takeFile(':id', ':fileId'),
       ]

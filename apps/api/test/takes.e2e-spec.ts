@@ -196,9 +196,19 @@ describe('takes', () => {
       expect((await juno.get(paths.measurement(take.id))).body).toMatchObject({ state: 'cancelled' });
     });
 
+    it('from before outlines were stored has none, and says how to get one', async () => {
+      const take = await juno.makeTake();
+      await giveReport(test, take, await shortTakeFacts());
+      const response = await juno.get(paths.peaks(take.id)).expect(404);
+      expect(response.body).toMatchObject({
+        code: 'not-found',
+        message: expect.stringContaining('again') as string,
+      });
+    });
+
     it('that is not done has no report and no pair spectrum', async () => {
       const take = await juno.makeTake();
-      for (const path of [paths.report(take.id), paths.pairSpectrum(take.id)]) {
+      for (const path of [paths.report(take.id), paths.pairSpectrum(take.id), paths.peaks(take.id)]) {
         const response = await juno.get(path).expect(404);
         expect(response.body).toMatchObject({ code: 'not-measured-yet' });
       }

@@ -7,6 +7,7 @@ import { MeasurementStage } from './entities/measurement.entity';
 import { MeasurePool } from './measure-pool';
 import { Claim, MeasurementClaims } from './measurement-claims';
 import { wholeProgress } from './measurement-progress';
+import { TakeOutlines } from './take-outlines';
 import { StoredBytesDiffer, TakeFetcher } from './take-fetcher';
 
 const unreachable = 'The recordings of this take could not be fetched. Upload it again later.';
@@ -26,6 +27,7 @@ export class MeasuringRuns {
     private readonly claims: MeasurementClaims,
     private readonly fetcher: TakeFetcher,
     private readonly pool: MeasurePool,
+    private readonly outlines: TakeOutlines,
     private readonly scratch: ScratchService,
     @Inject(CONFIG) private readonly config: Config,
   ) {}
@@ -68,6 +70,7 @@ export class MeasuringRuns {
       await this.claims.fail(claim, result.refusal.message);
       return;
     }
+    await this.outlines.store(claim, result.peaks);
     const isWritten = await this.claims.finish(claim, result);
     this.logger.log({ ...claim, isWritten }, isWritten ? 'Measured' : 'Measured too late; nothing written');
   }

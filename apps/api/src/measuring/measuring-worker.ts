@@ -62,9 +62,15 @@ export class MeasuringWorker implements OnApplicationBootstrap, BeforeApplicatio
     for (const { data } of jobs) {
       // Left alone, the sweep of another worker finds it.
       if (this.isStopping) return;
-      const claim = await this.claims.claim(data.measurementId);
-      if (claim) await this.tracked(this.runs.run(claim));
+      await this.tracked(this.takeJob(data));
     }
+  }
+
+  private async takeJob({ measurementId }: MeasureJob): Promise<void> {
+    const claim = await this.claims.claim(measurementId);
+    if (!claim) return;
+    // Asked to stop while the claim was on its way, when nothing was running yet that could be stopped.
+    await (this.isStopping ? this.claims.giveBack(claim) : this.runs.run(claim));
   }
 
   private async tracked(run: Promise<void>): Promise<void> {

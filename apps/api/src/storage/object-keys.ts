@@ -1,6 +1,15 @@
+interface MeasuredIn {
+  takeId: string;
+  measurementId: string;
+  attempt: number;
+}
+
 /** A key is never used twice: ids are new for every upload. */
 export const objectKeys = {
   /** Everything there is of a take. */
   take: (takeId: string) => `takes/${takeId}/`,
+  /** Each attempt writes its own, so that a slower worker never writes over what a report stands on. */
+  peaks: ({ takeId, measurementId, attempt }: MeasuredIn, trackId: string) =>
+    `takes/${takeId}/measurements/${measurementId}-${attempt}/${trackId}.peaks`,
   takeFile: (takeId: string, fileId: string) => `takes/${takeId}/${fileId}.wav`,
 } as const;

@@ -8,6 +8,7 @@ import {
   GetObjectCommand,
   HeadBucketCommand,
   ListObjectsV2Command,
+  NoSuchKey,
   PutObjectCommand,
   S3Client,
 } from '@aws-sdk/client-s3';
@@ -52,6 +53,29 @@ export class ObjectStoreService implements OnApplicationShutdown {
     const hash = createHash('sha256');
     await this.answered(async () => pipeline(await this.body(key), hash));
     if (hash.digest('hex') !== sha256) throw unavailable(new Error(`${key} was stored with other bytes`));
+  }
+
+  async put(key: string, bytes: Uint8Array): Promise<void> {
+    const put = new PutObjectCommand({
+      Bucket: this.bucket,
+      Key: key,
+      Body: bytes,
+      ContentLength: bytes.length,
+      ContentType: 'application/octet-stream',
+    });
+    await this.answered(() => this.client.send(put));
+  }
+
+  /** @returns a whole object that is known to be small; null where there is none */
+  async readWhole(key: string): Promise<Uint8Array | null> {
+    return this.answered(async () => {
+      try {
+        return Buffer.concat(await (await this.body(key)).toArray());
+      } catch (error) {
+        if (error instanceof NoSuchKey) return null;
+        throw error;
+      }
+    });
   }
 
   /** @returns the bytes from `start` to `end` (exclusive) */
