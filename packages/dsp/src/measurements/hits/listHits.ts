@@ -10,6 +10,11 @@ export interface KickHit {
 
 /** What the overhead hears within this of a kick's onset is that kick, or something struck with it. */
 const SAME_INSTANT_MS = 40;
+/**
+ * Two modes of one shell beat, so a kick swells again: seen 45–110 ms after it, on one of two real kits and on synthetic
+ * ones. What no stick struck, and what is nowhere louder than the kick, is that within this time of it.
+ */
+const RINGING_WITHIN_MS = 150;
 
 /** One list of what was struck, in order of time; a kick with something else on the same instant is told as a kick. */
 export function listHits(
@@ -18,10 +23,13 @@ export function listHits(
   sampleRateHz: number,
 ): HitFacts[] {
   const near = (SAME_INSTANT_MS / 1000) * sampleRateHz;
+  const ringing = (RINGING_WITHIN_MS / 1000) * sampleRateHz;
   let next = 0;
-  const alone = others.filter(({ atSample }) => {
-    while (next < kicks.length && kicks[next].onsetSample < atSample - near) next += 1;
-    return next >= kicks.length || kicks[next].onsetSample > atSample + near;
+  const alone = others.filter((hit) => {
+    while (next < kicks.length && kicks[next].onsetSample < hit.atSample - near) next += 1;
+    if (next < kicks.length && kicks[next].onsetSample <= hit.atSample + near) return false;
+    const before = next > 0 ? kicks[next - 1] : null;
+    return !before || hit.atSample - before.onsetSample > ringing || !isRinging(hit, before);
   });
   const told = (sample: number, kind: HitFacts['kind'], peaks: readonly number[]): HitFacts => ({
     timeS: sample / sampleRateHz,
@@ -32,6 +40,10 @@ export function listHits(
     ...kicks.map((hit) => told(hit.onsetSample, 'kick', hit.peaks)),
     ...alone.map((hit) => told(hit.atSample, hit.kind, hit.peaks)),
   ].sort((a, b) => a.timeS - b.timeS);
+}
+
+function isRinging(hit: OverheadHit, of: KickHit): boolean {
+  return !hit.struck && hit.peaks.every((peak, track) => peak <= of.peaks[track]);
 }
 
 /** @returns the largest peak of one track at any hit; null without hits */

@@ -58,7 +58,13 @@ describe('hits in the overhead', () => {
 });
 
 describe('the list of hits', () => {
-  const other = (atSample: number) => ({ atSample, kind: 'cymbal' as const, levelDb: 0, peaks: [0.01, 0.5] });
+  const other = (atSample: number) => ({
+    atSample,
+    kind: 'cymbal' as const,
+    levelDb: 0,
+    struck: true,
+    peaks: [0.01, 0.5],
+  });
 
   it('tells what is struck with a kick as the kick, and the rest in order of time', () => {
     const kicks = [{ onsetSample: 48000, peaks: [0.5, 0.1] }];
@@ -69,6 +75,17 @@ describe('the list of hits', () => {
       [1.25, 'cymbal'],
     ]);
     expect(hits[1].peaksDbfs[0]).toBeCloseTo(-6.0206, 4);
+  });
+
+  it('takes what swells after a kick for its ringing, unless it was struck, is louder, or comes later', () => {
+    const kicks = [{ onsetSample: 48000, peaks: [0.5, 0.4] }];
+    const swell = { ...other(48000 + 4800), struck: false, peaks: [0.1, 0.3] };
+    const count = (hit: typeof swell): number => listHits(kicks, [hit], sampleRateHz).length;
+    expect(count(swell)).toBe(1);
+    expect(count({ ...swell, struck: true })).toBe(2);
+    expect(count({ ...swell, peaks: [0.1, 0.41] })).toBe(2);
+    expect(count({ ...swell, atSample: 48000 + 7300 })).toBe(2);
+    expect(count({ ...swell, atSample: 48000 - 4800 })).toBe(2);
   });
 
   it('knows the loudest of each track, and null for none or silence', () => {

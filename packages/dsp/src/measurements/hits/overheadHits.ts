@@ -10,6 +10,8 @@ export interface OverheadHit {
   readonly atSample: number;
   readonly kind: Exclude<HitKind, 'kick'>;
   readonly levelDb: number;
+  /** True where the bright band rose too, as it does under a stick or a beater. */
+  readonly struck: boolean;
   /** Largest |x| of each track in the 100 ms after, linear. */
   readonly peaks: readonly number[];
 }
@@ -46,7 +48,6 @@ interface OpenHit {
   bright: number;
   levelDb: number;
   readonly peaks: number[];
-  /** True where the bright band rose too, as it does under a stick or a beater. */
   struck: boolean;
 }
 
@@ -144,6 +145,7 @@ function told(hit: OpenHit, sampleRateHz: number): OverheadHit {
         ? 'mixed'
         : kindOf(flooredPowerDb(hit.body) - flooredPowerDb(hit.bright)),
     levelDb: hit.levelDb,
+    struck: hit.struck,
     peaks: hit.peaks,
   };
 }
