@@ -84,6 +84,37 @@ describe('the list of takes', () => {
   });
 });
 
+describe('a take that could not be measured', () => {
+  const failed = sampleListItem({
+    summary: null,
+    measurement: measurement({ state: 'failed', reason: 'the files could not be read back.' }),
+  });
+  const again = () => screen.findByRole('button', { name: 'measure take 14, 8 cm inside, again again' });
+
+  it('is measured again when asked', async () => {
+    let now = failed;
+    open({
+      [`GET ${paths.takes}`]: () => list(sampleList([now]))(),
+      [`POST ${paths.measureAgain(failed.id)}`]: () => {
+        now = { ...failed, measurement: measurement({ state: 'queued', progress: 0 }) };
+        return { status: 204 };
+      },
+    });
+    await userEvent.click(await again());
+    expect(await screen.findByText('Waiting to be measured')).toBeInTheDocument();
+  });
+
+  it('says in its row when that did not work', async () => {
+    open({
+      [`GET ${paths.takes}`]: list(sampleList([failed])),
+      [`POST ${paths.measureAgain(failed.id)}`]: refusal(503, 'storage-unavailable', 'The store is away.'),
+    });
+    await userEvent.click(await again());
+    expect(await screen.findByRole('alert')).toHaveTextContent('The store is away.');
+    expect(await again()).toBeEnabled();
+  });
+});
+
 describe('a take that is being measured', () => {
   const measuring = sampleListItem({
     summary: null,

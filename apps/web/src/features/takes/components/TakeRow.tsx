@@ -24,6 +24,7 @@ export function TakeRow({
   chosen = false,
   box,
   action,
+  failure,
 }: {
   take: TakeListItem;
   target: Target;
@@ -31,12 +32,14 @@ export function TakeRow({
   chosen?: boolean;
   box?: ReactNode;
   action?: ReactNode;
+  /** What was tried from this row did not work. */
+  failure?: string;
 }) {
   return (
     <RuledRow chosen={chosen}>
       {box}
       <TakeCell take={take} now={now} />
-      <Says take={take} />
+      <Says take={take} failure={failure} />
       <Box role="cell" gridArea="level" position="relative" minHeight={{ base: '44px', lg: 'auto' }}>
         <LevelPicture take={take} target={target} />
       </Box>
@@ -76,7 +79,7 @@ export function RuledRow({
   );
 }
 
-function Says({ take }: { take: TakeListItem }) {
+function Says({ take, failure }: { take: TakeListItem; failure?: string }) {
   const { status, strong, rest } = take.summary ?? {
     status: 'fix' as const,
     ...unmeasuredWords(take.measurement),
@@ -95,9 +98,9 @@ function Says({ take }: { take: TakeListItem }) {
     >
       <StatusMark status={status} sizePx={22} />
       <chakra.span srOnly>{statusWords[status]}: </chakra.span>
-      <span>
+      <span role={failure ? 'alert' : undefined}>
         {status !== 'good' && <b>{strong}</b>}
-        {status === 'good' && strong} {rest}
+        {status === 'good' && strong} {failure || rest}
       </span>
     </Flex>
   );

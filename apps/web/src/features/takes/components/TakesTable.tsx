@@ -9,12 +9,14 @@ import { MeasuringRow } from './MeasuringRow';
 import { TagsRow } from './TagsRow';
 import { RowAction, TakeRow } from './TakeRow';
 import { TakesHead } from './TakesHead';
+import { UnmeasuredRow } from './UnmeasuredRow';
 
 export interface RowActions {
   isChosen: (take: TakeListItem) => boolean;
   choose: (take: TakeListItem, chosen: boolean) => void;
   setTags: (takeId: string, tags: string[]) => Promise<void>;
   restore: (take: TakeListItem) => Promise<void>;
+  measureAgain: (takeId: string) => Promise<void>;
 }
 
 /** The ruled table: one row a take, its pictures under one axis. Without `actions` it can only be read. */
@@ -74,10 +76,17 @@ function ReadyRow({
 }) {
   if (!actions) return <TakeRow {...{ take, target, now }} box={<Box role="cell" gridArea="box" />} />;
   const chosen = actions.isChosen(take);
+  const box = <ChooseCell {...{ take, chosen }} onChoose={(next) => actions.choose(take, next)} />;
+  if (take.summary === null)
+    return (
+      <UnmeasuredRow
+        {...{ take, target, now, chosen, box }}
+        onMeasure={() => actions.measureAgain(take.id)}
+      />
+    );
   return (
     <TakeRow
-      {...{ take, target, now, chosen }}
-      box={<ChooseCell {...{ take, chosen }} onChoose={(next) => actions.choose(take, next)} />}
+      {...{ take, target, now, chosen, box }}
       action={
         <RowAction
           ref={tagging.button(take.id)}

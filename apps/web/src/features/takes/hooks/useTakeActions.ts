@@ -17,6 +17,11 @@ export function useTakeActions() {
     });
   };
 
+  const tellMeasuring = async (takeId: string, path: string) => {
+    await requestNothing(path, { method: 'POST' });
+    await mutate((key) => isTakesKey(key) || isKeyOfTake(takeId)(key));
+  };
+
   return {
     /** They can be brought back for 30 days. */
     remove: async (takeIds: readonly string[]) => {
@@ -43,10 +48,8 @@ export function useTakeActions() {
         await setTags(takeId, [...new Set([...take.tags, ...tags])]);
       }).finally(() => mutate(isTakesKey));
     },
-    stopMeasuring: async (takeId: string) => {
-      await requestNothing(paths.cancelMeasurement(takeId), { method: 'POST' });
-      await mutate((key) => isTakesKey(key) || isKeyOfTake(takeId)(key));
-    },
+    stopMeasuring: (takeId: string) => tellMeasuring(takeId, paths.cancelMeasurement(takeId)),
+    measureAgain: (takeId: string) => tellMeasuring(takeId, paths.measureAgain(takeId)),
   };
 }
 

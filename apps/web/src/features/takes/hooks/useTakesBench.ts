@@ -5,7 +5,7 @@ import { useUndo } from './useUndo';
 
 /** Choosing takes and what is done to them. A page that lost its last row gives way to the first. */
 export function useTakesBench(shown: readonly TakeListItem[], onPageEmptied?: () => Promise<void> | void) {
-  const { setTags, addTags } = useTakeActions();
+  const { setTags, addTags, measureAgain } = useTakeActions();
   const undo = useUndo();
   const { chosen, isChosen, choose, clear } = useChosenTakes();
   return {
@@ -16,6 +16,7 @@ export function useTakesBench(shown: readonly TakeListItem[], onPageEmptied?: ()
       isChosen,
       choose,
       setTags,
+      measureAgain,
       restore: (take: TakeListItem) => undo.bringBack([take]),
     },
     removeChosen: async () => {
