@@ -106,8 +106,9 @@ function kickHitsOfTake(
   readings: readonly PairReading[],
   { kick, others, tracks }: { kick: number; others: readonly number[]; tracks: number },
 ): KickHit[] {
-  return (readings[0]?.kickHits ?? []).map(({ onsetSample, peaks }, hit) => ({
+  return (readings[0]?.kickHits ?? []).map(({ onsetSample, startSample, peaks }, hit) => ({
     onsetSample,
+    startSample,
     peaks: Array.from({ length: tracks }, (_, track) =>
       track === kick ? peaks[0] : readings[others.indexOf(track)].kickHits[hit].peaks[1],
     ),

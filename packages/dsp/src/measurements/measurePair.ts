@@ -41,7 +41,8 @@ export async function readPair(options: ReadPairOptions): Promise<PairReading> {
   const take = (hit: KickHitRead, toNext: number): void => {
     arrivalMeter.add(hit);
     balances.push(gatherer.add({ ...hit, toNext }));
-    kickHits.push({ onsetSample: hit.onsetSample, peaks: peaksOf(hit, { toNext, sampleRateHz }) });
+    const { onsetSample, startSample } = hit;
+    kickHits.push({ onsetSample, startSample, peaks: peaksOf(hit, { toNext, sampleRateHz }) });
     onProgress(kickHits.length / candidates.length);
   };
   // One hit is held back, since where it ends depends on the next one's onset.

@@ -5,6 +5,7 @@ import type { OverheadHit } from './overheadHits';
 /** A kick hit with the largest |x| of each track around it. */
 export interface KickHit {
   readonly onsetSample: number;
+  readonly startSample: number;
   readonly peaks: readonly number[];
 }
 
@@ -37,7 +38,7 @@ export function listHits(
     peaksDbfs: peaks.map(amplitudeDb),
   });
   return [
-    ...kicks.map((hit) => told(hit.onsetSample, 'kick', hit.peaks)),
+    ...kicks.map((hit) => told(hit.startSample, 'kick', hit.peaks)),
     ...alone.map((hit) => told(hit.atSample, hit.kind, hit.peaks)),
   ].sort((a, b) => a.timeS - b.timeS);
 }

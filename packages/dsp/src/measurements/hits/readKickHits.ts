@@ -1,11 +1,14 @@
 import type { TrackSource } from '../../trackSource';
 import type { KickCandidate } from './kickCandidates';
+import { foot } from './foot';
 import { onset, onsetStretch } from './onset';
 
 /** A kick hit read from both microphones around its onset. */
 export interface KickHitRead {
   /** Where the onset lies in the file. */
   readonly onsetSample: number;
+  /** Where it is first heard, some milliseconds before its onset. */
+  readonly startSample: number;
   readonly kick: Float32Array;
   readonly overhead: Float32Array;
   /** Where the onset lies in `kick` and `overhead`. */
@@ -42,6 +45,8 @@ export async function* readKickHits(options: ReadKickHitsOptions): AsyncGenerato
     // The onset was looked for behind `before` samples, so `from` is never negative.
     const from = onsetSample - start - before;
     const cut = (stretch: Float32Array): Float32Array => stretch.subarray(from, from + before + after);
-    yield { onsetSample, kick: cut(kickStretch), overhead: cut(overheadStretch), onsetAt: before };
+    const kickCut = cut(kickStretch);
+    const startSample = Math.max(0, onsetSample - before + foot(kickCut, { sampleRateHz, onsetAt: before }));
+    yield { onsetSample, startSample, kick: kickCut, overhead: cut(overheadStretch), onsetAt: before };
   }
 }
