@@ -1,4 +1,5 @@
 import { paths, TakeResponse } from '@thudline/contracts';
+import { EventStreams } from '../src/events/event-streams';
 import { Measurement } from '../src/measuring/entities/measurement.entity';
 import { EventListener, listenAs } from './support/event-listener';
 import { Browser, joined, Person } from './support/person';
@@ -86,6 +87,18 @@ describe('events', () => {
     );
     await change({ state: 'running', stage: 'hits', progress: 0.8 });
     await until(() => Promise.resolve(last(listener)?.measurement.progress === 0.8));
+  });
+
+  it('end with the session', async () => {
+    const leaver = await joined(test, 'Leaver');
+    const [his, hers] = [await listen(juno), await listen(leaver)];
+    const streams = test.app.get(EventStreams, { strict: false });
+    await streams.beat();
+    expect(hers.isOver()).toBe(false);
+    await leaver.post(paths.signOut).expect(204);
+    await streams.beat();
+    await until(() => Promise.resolve(hers.isOver()));
+    expect(his.isOver()).toBe(false);
   });
 
   it('follow a real worker to the sheet', async () => {

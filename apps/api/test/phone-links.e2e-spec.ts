@@ -75,6 +75,12 @@ describe('show on my phone', () => {
     await juno.get(paths.me).expect(200);
   });
 
+  it('takes nothing from the browser that made it, when it is opened there', async () => {
+    const opened = await juno.post(paths.openPhoneLink, { token: tokenOf(await made()) }).expect(200);
+    expect(opened.body).toEqual(juno.me);
+    await juno.patch(paths.me, { name: 'Still me' }).expect(200);
+  });
+
   it('works once, also for two who scan it at the same moment', async () => {
     const token = tokenOf(await made());
     const opened = await Promise.all(

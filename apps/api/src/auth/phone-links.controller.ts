@@ -8,7 +8,7 @@ import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
 import { MeResponseDto } from '../users/dto/me.dto';
 import { meResponseOf } from '../users/users.mapper';
-import { setSessionCookies } from './auth-cookies';
+import { accessCookieOf, setSessionCookies } from './auth-cookies';
 import { OpenPhoneLinkDto, PhoneLinkResponseDto } from './dto/phone-links.dto';
 import { PhoneLinksService } from './phone-links.service';
 import { SessionsService } from './sessions.service';
@@ -29,7 +29,7 @@ export class PhoneLinksController {
     return this.links.make(viewer);
   }
 
-  /** Signs this browser in to read for half a day. */
+  /** Signs this browser in to read for half a day; where the same person is signed in wholly, they stay so. */
   @Post('open')
   @Access.anyone()
   @ZodResponse({ status: 200, type: MeResponseDto })
@@ -39,6 +39,9 @@ export class PhoneLinksController {
     @Res({ passthrough: true }) response: Response,
   ) {
     const user = await this.links.open(token, request.ip ?? '');
+    const cookie = accessCookieOf(request);
+    const viewer = cookie ? await this.sessions.findViewer(cookie) : null;
+    if (viewer && viewer.user.id === user.id) return meResponseOf(viewer.user, viewer);
     const tokens = await this.sessions.startReadOnly(user);
     setSessionCookies(response, tokens, this.config.isHttps);
     return meResponseOf(user, { readOnly: true });

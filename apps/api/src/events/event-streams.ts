@@ -79,7 +79,7 @@ export class EventStreams implements OnApplicationBootstrap, BeforeApplicationSh
   }
 
   /** Whoever signed out, or was locked out, hears nothing more. */
-  private async beat(): Promise<void> {
+  async beat(): Promise<void> {
     for (const stream of this.streams) {
       const isIn = await this.sessions.isLive(stream.viewer.sessionId).catch(() => true);
       if (isIn) stream.beat();
