@@ -1,15 +1,10 @@
 import { expect, test, type Page } from '@playwright/test';
 import { badFiles, getScenario, takeFiles } from '@thudline/fixtures';
-import { expectAccessibleInBothThemes } from './harness/accessibility';
-import { expectFitsPhone } from './harness/phone';
+import { expectReadable } from './harness/readable';
+import { wavFile } from './harness/wavFile';
 
 const scenario = getScenario('hot-kick-opposite-overhead');
 const bad = badFiles().find((file) => file.answer === 'refused')!;
-const wav = (name: string, bytes: Uint8Array) => ({
-  name,
-  mimeType: 'audio/wav',
-  buffer: Buffer.from(bytes),
-});
 
 test('join, add a take, read its sheet, flip, find it in the list, sign out', async ({ page }) => {
   await test.step('a guest reads what this is and joins', () => joinAsNewPlayer(page));
@@ -20,11 +15,6 @@ test('join, add a take, read its sheet, flip, find it in the list, sign out', as
   await test.step('the list shows the take', () => findInList(page));
   await test.step('after signing out the sheet is closed', () => signOut(page));
 });
-
-async function expectReadable(page: Page, name: string): Promise<void> {
-  await expectAccessibleInBothThemes(page, name);
-  await expectFitsPhone(page, name);
-}
 
 async function joinAsNewPlayer(page: Page): Promise<void> {
   await page.goto('/');
@@ -44,7 +34,7 @@ async function joinAsNewPlayer(page: Page): Promise<void> {
 async function meetRefusal(page: Page): Promise<void> {
   await page.goto('/takes/new');
   await expectReadable(page, 'new take, nothing chosen');
-  await page.getByLabel('WAV files').setInputFiles([wav(bad.name, bad.bytes)]);
+  await page.getByLabel('WAV files').setInputFiles([wavFile(bad.name, bad.bytes)]);
   await expect(page.getByText(bad.name).first()).toBeVisible();
   await expect(page.getByRole('alert').first()).toBeVisible();
   await page.getByRole('button', { name: `Clear ${bad.name}` }).click();
@@ -52,7 +42,9 @@ async function meetRefusal(page: Page): Promise<void> {
 
 async function addTake(page: Page): Promise<void> {
   const { kick, overhead } = takeFiles(scenario.name);
-  await page.getByLabel('WAV files').setInputFiles([wav('kick in.wav', kick), wav('oh.wav', overhead)]);
+  await page
+    .getByLabel('WAV files')
+    .setInputFiles([wavFile('kick in.wav', kick), wavFile('oh.wav', overhead)]);
   await expect(
     page.getByRole('group', { name: 'Microphone of kick in.wav' }).getByLabel('kick'),
   ).toBeChecked();
@@ -63,6 +55,8 @@ async function addTake(page: Page): Promise<void> {
   await expectReadable(page, 'new take, two files');
   await page.getByRole('button', { name: 'Measure this take' }).click();
   await expect(page).toHaveURL(/\/takes\/[0-9a-f-]{36}$/);
+  await expect(page.getByRole('progressbar', { name: 'Measuring' })).toBeVisible();
+  await expect(page.getByText(/^Measuring: .* step [1-5] of 5$/)).toBeVisible();
 }
 
 async function readSheet(page: Page): Promise<void> {

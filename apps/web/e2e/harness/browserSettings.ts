@@ -5,6 +5,8 @@ export interface BrowserSettings {
   publicUrl: string;
   resultsDir: string;
   demoPassword: string;
+  /** The page that shows the mail the application sends. */
+  mailSinkUrl: string;
   /** File with the cookies of the demo player, signed in. */
   playerState: string;
 }
@@ -32,6 +34,7 @@ export function browserSettings(): BrowserSettings {
     publicUrl: `http://127.0.0.1:${apiPort}`,
     resultsDir,
     demoPassword: setting('DEMO_PASSWORD'),
+    mailSinkUrl: setting('MAIL_SINK_URL'),
     playerState: `${resultsDir}/player.json`,
   };
 }

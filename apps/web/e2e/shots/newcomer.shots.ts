@@ -4,6 +4,7 @@ import { takeShots } from './takeShots';
 
 test('first-run', async ({ page }) => {
   await joinAsNewcomer(page);
+  await page.goto('/takes');
   await expect(page.getByRole('heading', { name: /Your first take/ })).toBeVisible();
   await takeShots(page, 'takes-empty');
   await page.goto('/takes/new');

@@ -38,8 +38,12 @@ test('new-take', async ({ page }) => {
   await expect(page.getByLabel('WAV files')).toBeAttached();
   await takeShots(page, 'new-take');
   const { kick, overhead } = takeFiles('good');
-  await page.getByLabel('WAV files').setInputFiles([wavFile('kick in.wav', kick), wavFile('oh.wav', overhead)]);
-  await expect(page.getByRole('group', { name: 'Microphone of oh.wav' }).getByLabel('overhead')).toBeChecked();
+  await page
+    .getByLabel('WAV files')
+    .setInputFiles([wavFile('kick in.wav', kick), wavFile('oh.wav', overhead)]);
+  await expect(
+    page.getByRole('group', { name: 'Microphone of oh.wav' }).getByLabel('overhead'),
+  ).toBeChecked();
   await takeShots(page, 'new-take-two-files');
 });
 
@@ -95,7 +99,10 @@ test('send-sheet', async ({ page }) => {
 test('show-on-phone', async ({ page }) => {
   const { id } = await getDemoTake(starTitle);
   await page.goto(`/takes/${id}`);
-  await page.getByRole('button', { name: /on my phone/ }).first().click();
+  await page
+    .getByRole('button', { name: /on my phone/ })
+    .first()
+    .click();
   await expect(page.getByRole('dialog').getByRole('img')).toBeVisible();
   await takeShots(page, 'show-on-phone');
 });
@@ -116,8 +123,18 @@ for (const [name, part] of Object.entries(notDone)) {
 }
 
 /** These moments pass too quickly to be met: the server's answer, with another measurement in it. */
-async function showMeasurement(page: Page, takeId: string, part: Partial<MeasurementResponse>): Promise<void> {
-  const measurement = measurementResponse.parse({ stage: null, progress: 0, attempt: 1, reason: null, ...part });
+async function showMeasurement(
+  page: Page,
+  takeId: string,
+  part: Partial<MeasurementResponse>,
+): Promise<void> {
+  const measurement = measurementResponse.parse({
+    stage: null,
+    progress: 0,
+    attempt: 1,
+    reason: null,
+    ...part,
+  });
   await page.route(`**${paths.events}*`, (route) => route.abort());
   await page.route(`**${paths.measurement(takeId)}`, (route) => route.fulfill({ json: measurement }));
   await page.route(`**${paths.take(takeId)}`, async (route) => {

@@ -16,7 +16,11 @@ test('sheets and the check take on paper', async ({ page }) => {
     await expect(page.getByRole('heading', { name: 'All figures' })).toBeVisible();
     await settle(page);
     for (const format of papers) {
-      await page.pdf({ path: `${shotsDir}/print-sheet-${number}-${format}.pdf`, format, preferCSSPageSize: false });
+      await page.pdf({
+        path: `${shotsDir}/print-sheet-${number}-${format}.pdf`,
+        format,
+        preferCSSPageSize: false,
+      });
     }
   }
   await page.goto('/check-take');

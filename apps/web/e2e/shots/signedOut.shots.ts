@@ -7,10 +7,18 @@ const pages = [
   { name: 'sign-in', path: '/sign-in', says: 'E-mail' },
   { name: 'forgot', path: '/forgot', says: 'E-mail' },
   { name: 'reset', path: '/reset/a-token-that-opens-nothing', says: 'password' },
-  { name: 'verify-ended', path: '/verify/a-token-that-opens-nothing', says: 'The address could not be confirmed.' },
+  {
+    name: 'verify-ended',
+    path: '/verify/a-token-that-opens-nothing',
+    says: 'The address could not be confirmed.',
+  },
   { name: 'check-take', path: '/check-take', says: 'The check take' },
   { name: 'sample', path: '/sample', says: 'Before the next take' },
-  { name: 'phone-ended', path: '/phone/a-token-that-opens-nothing', says: 'This code doesn’t work any more.' },
+  {
+    name: 'phone-ended',
+    path: '/phone/a-token-that-opens-nothing',
+    says: 'This code doesn’t work any more.',
+  },
   { name: 'share-ended', path: '/s/a-token-that-opens-nothing', says: 'This link opens no sheet' },
   { name: 'not-found', path: '/nowhere', says: 'There is nothing at this address.' },
 ];
