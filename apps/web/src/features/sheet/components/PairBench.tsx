@@ -70,7 +70,7 @@ function LoadedBench({ spectrum, ...props }: PairBenchProps & { spectrum: PairSp
           {...{ report, chosen, hitExcerpt, hitNumber, band, setBand, hitS: report.hits[chosenHit].timeS }}
         />
       )}
-      <ChoiceFigures {...{ spectrum, asRecorded, chosen }} />
+      <ChoiceFigures {...{ spectrum, asRecorded, chosen }} excerpt={hitExcerpt.excerpt} />
       <PictureTitle>Where it helps, from low to high</PictureTitle>
       <WhereItHelps {...{ spectrum, asRecorded, chosen }} />
       <WhereKey {...{ spectrum, asRecorded, chosen }} />
