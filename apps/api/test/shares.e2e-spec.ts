@@ -210,6 +210,21 @@ describe('shares', () => {
   });
 });
 
+it('reading as a guest is refused after too many requests from one address, and players read on', async () => {
+  const test = await startTestApp({ GUEST_READ_LIMIT_PER_ADDRESS: '3' });
+  try {
+    const juno = await joined(test);
+    const take = await juno.makeTake();
+    const guest = new Browser(test);
+    await openedBy(guest, await sharedBy(juno, take));
+    for (let i = 0; i < 3; i++) await guest.get(paths.take(take.id)).expect(200);
+    await guest.get(paths.take(take.id)).expect(429);
+    await juno.get(paths.take(take.id)).expect(200);
+  } finally {
+    await test.close();
+  }
+});
+
 it('opening links is refused after too many tries from one address', async () => {
   const test = await startTestApp({ OPEN_LINK_LIMIT_PER_ADDRESS: '3' });
   try {

@@ -79,6 +79,23 @@ describe('uploading a take', () => {
     expect(await readdir(test.config.scratchDir)).toEqual([]);
   });
 
+  it('keeps tags and what was carried out before, and refuses what is no list of them', async () => {
+    const before = await juno.makeTake();
+    const doneActions = ['flip-overhead', 'kick-gain'];
+    const take = await juno.makeTake({
+      tags: [' felt ', 'kit B', 'felt'],
+      followsTakeId: before.id,
+      doneActions,
+    });
+    expect(take.tags).toEqual(['felt', 'kit B']);
+    expect(await test.em().findOneOrFail(Take, { id: take.id })).toMatchObject({ doneActions });
+    for (const wrong of [{ tags: 'felt, kit B' }, { doneActions: '{"a":1}' }, { followsTakeId: 'mine' }]) {
+      const response = await juno.upload({ ...shortTake(), ...(wrong as object) }).expect(400);
+      const [field] = Object.keys(wrong);
+      expect(response.body).toMatchObject({ details: { fields: { [field]: expect.any(String) as string } } });
+    }
+  });
+
   it('stores one stereo file with a microphone on each side', async () => {
     const files = [{ name: 'both.wav', bytes: wav([tone(4_800, 75), tone(4_800, 60)]) }];
     const take = await juno.makeTake({ files, tracks: stereoTracks });

@@ -18,7 +18,13 @@ class Routes {
 async function opens(route: keyof Routes, roles: string[] | null): Promise<boolean> {
   const viewer = roles && ({ user: { roles }, sessionId: 's' } as unknown as Viewer);
   const sessions = { findViewer: () => Promise.resolve(viewer) };
-  const guard = new AccessGuard(new Reflector(), sessions as never, {} as never, { jwtSecret: 'x' } as never);
+  const guard = new AccessGuard(
+    new Reflector(),
+    sessions as never,
+    {} as never,
+    {} as never,
+    { jwtSecret: 'x' } as never,
+  );
   const request = { cookies: { thudline_access: 'token' }, params: {} };
   const context = {
     getHandler: () => Object.getOwnPropertyDescriptor(Routes.prototype, route)?.value as unknown,

@@ -7,6 +7,7 @@ import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
 import { AppError, notFound } from '../errors/app-error';
 import { shareIdsOf } from '../shares/share-cookie';
+import { ThrottleService } from '../throttle/throttle.service';
 import { ACCESS, AccessRule } from './access.decorator';
 import { AccessService } from './access.service';
 import { readMethods } from './origin.guard';
@@ -23,6 +24,7 @@ export class AccessGuard implements CanActivate {
     private readonly reflector: Reflector,
     private readonly sessions: SessionsService,
     private readonly access: AccessService,
+    private readonly throttle: ThrottleService,
     @Inject(CONFIG) private readonly config: Config,
   ) {}
 
@@ -36,6 +38,7 @@ export class AccessGuard implements CanActivate {
     if (asker.viewer) request.viewer = asker.viewer;
     if (asker.viewer?.readOnly) this.checkReadOnly(request, targets);
     if (rule.kind === 'take') {
+      if (!asker.viewer) await this.countGuest(request.ip ?? '');
       request.rights = await this.rightsTo(String(request.params.id), asker, rule);
       return true;
     }
@@ -58,6 +61,12 @@ export class AccessGuard implements CanActivate {
   ): void {
     const isOpen = this.reflector.getAllAndOverride<true | undefined>(OPEN_TO_READ_ONLY, targets);
     if (!readMethods.has(method) && !isOpen) throw readOnly();
+  }
+
+  /** Guests have no account to be held to, and sound comes from the object store: one address can't ask without end. */
+  private countGuest(address: string): Promise<void> {
+    const limit = this.config.limits.guestReadsPerAddress;
+    return this.throttle.count({ key: `guest:${address}`, limit, windowS: 900 });
   }
 
   private checkRole(viewer: Viewer, role: Role): void {

@@ -33,6 +33,8 @@ const environment = z.object({
   SIGN_IN_LIMIT_PER_ACCOUNT: count.default(10),
   SIGN_IN_LIMIT_PER_ADDRESS: count.default(100),
   JOIN_LIMIT_PER_ADDRESS: count.default(100),
+  /** Requests of guests in a quarter of an hour: a sheet takes about ten, playing it some dozens more. */
+  GUEST_READ_LIMIT_PER_ADDRESS: count.default(3_000),
   /** Links opened in a quarter of an hour; common practice, no source. */
   OPEN_LINK_LIMIT_PER_ADDRESS: count.default(120),
   /** Mails and phone links in an hour for one account, mails asked for by one address; common practice, no source. */
@@ -85,6 +87,7 @@ function grouped(env: z.output<typeof environment>) {
       phoneLinksPerAccount: env.PHONE_LINK_LIMIT_PER_ACCOUNT,
       mailsPerAccount: env.MAIL_LIMIT_PER_ACCOUNT,
       mailsPerAddress: env.MAIL_LIMIT_PER_ADDRESS,
+      guestReadsPerAddress: env.GUEST_READ_LIMIT_PER_ADDRESS,
       openLinkPerAddress: env.OPEN_LINK_LIMIT_PER_ADDRESS,
     },
     mail: {

@@ -6,7 +6,7 @@ import { mostAttempts } from './measurement-claims';
 import { MeasureQueue } from './measure-queue';
 
 const gaveUp =
-  'Measuring this take was broken off three times. Upload it again, or tell whoever runs this site.';
+  'Measuring this take was broken off three times. Measure it again, or tell whoever runs this site.';
 
 /** Silent for `?` milliseconds, by the database's clock. */
 const silent = `heartbeat_at < now() - ? * interval '1 millisecond'`;

@@ -10,9 +10,9 @@ import { wholeProgress } from './measurement-progress';
 import { TakeOutlines } from './take-outlines';
 import { StoredBytesDiffer, TakeFetcher } from './take-fetcher';
 
-const unreachable = 'The recordings of this take could not be fetched. Upload it again later.';
+const unreachable = 'The recordings of this take could not be fetched. Measure it again later.';
 const bytesDiffer = 'The stored recordings of this take are damaged. Upload it again.';
-const broke = 'Measuring this take failed on our side. Upload it again, or tell whoever runs this site.';
+const broke = 'Measuring this take failed on our side. Measure it again, or tell whoever runs this site.';
 
 /** Why a run was stopped from outside. */
 type StopReason = 'lost' | 'shutting-down';

@@ -8,7 +8,7 @@ export const mailQueue = 'mail';
  * nothing, and a job that takes longer than an hour is given up (common practice, no source: ten minutes of sound take
  * seconds).
  *
- * A mail is tried again for about a day, with longer and longer waits (common practice, no source).
+ * A mail is tried again for about half a day, with longer and longer waits (common practice, no source).
  */
 const queues: PgBoss.Queue[] = [
   { name: measureQueue, policy: 'standard', retryLimit: 0, expireInSeconds: 3_600 },
