@@ -343,7 +343,8 @@ describe('tags', () => {
     await userEvent.click(await chooseBox(/^choose take 14/));
     await userEvent.click(await chooseBox(/^choose take 13/));
     await userEvent.click(screen.getByRole('button', { name: 'Tag them' }));
-    await userEvent.type(screen.getByRole('textbox', { name: /^Tags for takes 13 and 14/ }), 'garage');
+    expect(screen.getByRole('textbox', { name: /^Tags for takes 13 and 14/ })).toHaveFocus();
+    await userEvent.keyboard('garage');
     await userEvent.click(screen.getByRole('button', { name: 'Tag them' }));
     await waitFor(() =>
       expect(requests.filter(({ method }) => method === 'PATCH').map(({ body }) => body)).toEqual([
@@ -352,6 +353,7 @@ describe('tags', () => {
       ]),
     );
     expect(await screen.findByText(/· rug · garage/)).toBeInTheDocument();
+    expect(screen.getByRole('button', { name: 'Tag them' })).toHaveFocus();
   });
 });
 

@@ -7,6 +7,8 @@ import { PictureText } from './PictureText';
 
 export const axisY = 155;
 const bandTop = 24;
+/** Nearer to the aim than this a number would run into its word. */
+const besideAimPx = 24;
 /** Between grips closer than this the word "target" has no room. */
 const besideGripsPx = 72;
 
@@ -64,10 +66,12 @@ export function HitStripAxis({
       {ticks.map((tick) => (
         <g key={tick}>
           <path d={`M${x(tick)} ${axisY - 4}v8`} stroke={ink.edge} strokeWidth="1.2" />
-          <PictureText x={x(tick)} y={172} textAnchor="middle" fill={ink.muted}>
-            {number(tick, 0)}
-            {tick === 0 && widthPx >= 480 ? ' dBFS' : ''}
-          </PictureText>
+          {Math.abs(x(tick) - x(target.aimDbfs)) >= besideAimPx && (
+            <PictureText x={x(tick)} y={172} textAnchor="middle" fill={ink.muted}>
+              {number(tick, 0)}
+              {tick === 0 && widthPx >= 480 ? ' dBFS' : ''}
+            </PictureText>
+          )}
         </g>
       ))}
       {!grips && <path d={`M${x(target.aimDbfs)} ${axisY - 10}l4 6.5h-8z`} fill={ink.ink} />}

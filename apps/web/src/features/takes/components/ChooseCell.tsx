@@ -20,6 +20,7 @@ export function ChooseCell({
       gridArea="box"
       position="relative"
       zIndex={1}
+      _print={{ visibility: 'hidden' }}
       css={{
         '& > label': {
           width: '100%',

@@ -1,5 +1,5 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { Button } from '../../../components/Button';
 import { FieldError } from '../../../components/FieldError';
 import { takeNumbers, type ChosenTake } from '../chosenTakes';
@@ -19,7 +19,7 @@ export function ChosenBar({
   onTag: (tags: string[]) => Promise<void>;
   onClear: () => void;
 }) {
-  const [tagging, setTagging] = useState(false);
+  const { tagging, setTagging, button } = useTagging();
   const { failure, busy, remove } = useDeleting(onDelete);
   const them = chosen.length === 1 ? 'it' : 'them';
   if (tagging)
@@ -41,7 +41,7 @@ export function ChosenBar({
         <span role="status">
           <chakra.b>{chosen.length} chosen:</chakra.b> {takeNumbers(chosen)}
         </span>
-        <Button look="outline" onClick={() => setTagging(true)}>
+        <Button look="outline" ref={button} onClick={() => setTagging(true)}>
           Tag {them}
         </Button>
         <Button look="outline" aria-disabled={busy} onClick={() => void remove()}>
@@ -54,6 +54,18 @@ export function ChosenBar({
       {failure && <FieldError>{failure}</FieldError>}
     </Box>
   );
+}
+
+/** When the tags are written or left, the focus goes back to where it came from. */
+function useTagging() {
+  const [tagging, setTagging] = useState(false);
+  const wasTagging = useRef(false);
+  const button = useRef<HTMLButtonElement>(null);
+  useEffect(() => {
+    if (wasTagging.current && !tagging) button.current?.focus();
+    wasTagging.current = tagging;
+  }, [tagging]);
+  return { tagging, setTagging, button };
 }
 
 function useDeleting(onDelete: () => Promise<void>) {

@@ -1,6 +1,6 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
 import { updateTakeRequest } from '@thudline/contracts';
-import { useState, type RefObject } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { Button, TextButton } from '../../../components/Button';
 import { TextField } from '../../../components/TextField';
 import { typedTags } from '../chosenTakes';
@@ -11,7 +11,6 @@ export function TagForm({
   initial,
   knownTags,
   saveLabel,
-  field,
   onSave,
   onLeave,
 }: {
@@ -19,11 +18,12 @@ export function TagForm({
   initial: readonly string[];
   knownTags: readonly string[];
   saveLabel: string;
-  field?: RefObject<HTMLInputElement | null>;
   onSave: (tags: string[]) => Promise<void>;
   onLeave: () => void;
 }) {
   const [text, setText] = useState(initial.join(', '));
+  const field = useRef<HTMLInputElement>(null);
+  useEffect(() => field.current?.focus(), []);
   const { failure, busy, save } = useSavedTags(onSave);
   const tags = typedTags(text);
   return (

@@ -1,6 +1,5 @@
 import { Box } from '@chakra-ui/react';
 import type { TakeListItem } from '@thudline/contracts';
-import { useEffect, useRef } from 'react';
 import { takeName } from '../rowWords';
 import { TagForm } from './TagForm';
 
@@ -16,8 +15,6 @@ export function TagsRow({
   onSave: (tags: string[]) => Promise<void>;
   onLeave: () => void;
 }) {
-  const field = useRef<HTMLInputElement>(null);
-  useEffect(() => field.current?.focus(), []);
   return (
     <Box
       role="row"
@@ -32,7 +29,6 @@ export function TagsRow({
           initial={take.tags}
           knownTags={knownTags}
           saveLabel="Keep them"
-          field={field}
           onSave={onSave}
           onLeave={onLeave}
         />
