@@ -10,7 +10,7 @@ const pages = [
   {
     name: 'verify-ended',
     path: '/verify/a-token-that-opens-nothing',
-    says: 'The address could not be confirmed.',
+    says: 'This link has ended',
   },
   { name: 'check-take', path: '/check-take', says: 'The check take' },
   { name: 'sample', path: '/sample', says: 'Before the next take' },
