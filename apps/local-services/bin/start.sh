@@ -88,6 +88,7 @@ seed_demo() {
   local sample_take
   sample_take=$(API_URL=$api PUBLIC_URL=$address DEMO_PASSWORD=$DEMO_PASSWORD node "$root/fixtures/dist/seedDemo.js" \
     </dev/null 2>"$log_dir/seed.log" 8>&- 9>&-) || fail_with_log "$log_dir/seed.log" "The demo could not be set up."
+  [[ ! -s $log_dir/seed.log ]] || say "$(<"$log_dir/seed.log")"
   # Nothing is printed where that take was deleted or has no sheet.
   [[ -z $sample_take ]] || "${application[@]}" node "$root/apps/api/dist/sample-take.js" "$sample_take" \
     </dev/null >>"$log_dir/seed.log" 2>&1 8>&- 9>&- || fail_with_log "$log_dir/seed.log" "The sample sheet could not be chosen."
