@@ -19,7 +19,7 @@ export function FiguresSection({
   return (
     <SheetSection id="figures" title="All figures">
       <FiguresOut {...{ take, report, groups }} />
-      <Box _print={{ display: 'grid', gridTemplateColumns: '1fr 1fr', columnGap: '32px' }}>
+      <Box _print={{ display: 'grid', gridTemplateColumns: '5fr 4fr', columnGap: '32px' }}>
         {groups.map((group) => (
           <FigureTable key={group.title} group={group} />
         ))}
@@ -33,6 +33,7 @@ export function FiguresSection({
 const cell = {
   textAlign: 'right',
   paddingY: { base: '7px', _print: '2px' },
+  paddingLeft: '8px',
   verticalAlign: 'top',
   whiteSpace: 'nowrap',
 } as const;

@@ -12,7 +12,12 @@ export function FileFacts({ take, dspVersion }: { take: TakeResponse; dspVersion
           file.channels > 1 ? `${track.role} on channel ${track.channel + 1}` : track.role,
         );
         return (
-          <chakra.li key={file.id} borderBottom="1px solid" borderColor="rule" paddingY="7px">
+          <chakra.li
+            key={file.id}
+            borderBottom="1px solid"
+            borderColor="rule"
+            paddingY={{ base: '7px', _print: '3px' }}
+          >
             {take.rights.download ? (
               <a href={paths.takeFile(take.id, file.id)} download>
                 {file.name}
@@ -28,7 +33,7 @@ export function FileFacts({ take, dspVersion }: { take: TakeResponse; dspVersion
           </chakra.li>
         );
       })}
-      <chakra.li color="ink.muted" fontSize="caption" paddingY="7px">
+      <chakra.li color="ink.muted" fontSize="caption" paddingY={{ base: '7px', _print: '3px' }}>
         Kept bit for bit. Measured by measurements {dspVersion}.
       </chakra.li>
     </chakra.ul>

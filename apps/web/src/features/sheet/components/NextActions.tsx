@@ -73,7 +73,7 @@ function ActionRow({
     </>
   );
   return (
-    <chakra.li borderBottom="1px solid" borderColor="rule" paddingY="8px">
+    <chakra.li borderBottom="1px solid" borderColor="rule" paddingY={{ base: '8px', _print: '5px' }}>
       {onToggle ? (
         <CheckBox checked={done} onChange={onToggle}>
           {words}

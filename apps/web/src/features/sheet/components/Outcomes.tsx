@@ -13,7 +13,12 @@ export function Outcomes({ take, report }: { take: TakeResponse; report: ReportR
       </chakra.h2>
       <chakra.ul listStyleType="none" borderTop="1px solid" borderColor="rule">
         {report.outcomes.map((outcome) => (
-          <chakra.li key={outcome.actionId} borderBottom="1px solid" borderColor="rule" paddingY="8px">
+          <chakra.li
+            key={outcome.actionId}
+            borderBottom="1px solid"
+            borderColor="rule"
+            paddingY={{ base: '8px', _print: '5px' }}
+          >
             <Flex gap="12px" alignItems="flex-start">
               <Box paddingTop="2px" lineHeight={0}>
                 <StatusMark status={outcome.status} />

@@ -21,7 +21,12 @@ export function SheetSection({
   children: ReactNode;
 }) {
   return (
-    <chakra.section id={id} aria-labelledby={`${id}-head`} marginTop="34px" scrollMarginTop="12px">
+    <chakra.section
+      id={id}
+      aria-labelledby={`${id}-head`}
+      marginTop={{ base: '34px', _print: '22px' }}
+      scrollMarginTop="12px"
+    >
       <SheetRow note={note}>
         <Box position="relative" display="flex" alignItems="center" gap="10px">
           {status && (
@@ -55,5 +60,10 @@ export const SectionText = chakra('p', {
 });
 
 export const PictureTitle = chakra('h3', {
-  base: { fontSize: 'small', fontWeight: 600, lineHeight: '20px', marginTop: '22px' },
+  base: {
+    fontSize: 'small',
+    fontWeight: 600,
+    lineHeight: '20px',
+    marginTop: { base: '22px', _print: '14px' },
+  },
 });
