@@ -83,12 +83,12 @@ test('send-sheet', async ({ page }) => {
   await page.goto(`/takes/${id}`);
   await page.getByRole('button', { name: 'Send this sheet' }).click();
   await expect(page.getByRole('dialog')).toBeVisible();
-  await takeShots(page, 'send-sheet');
+  await takeShots(page, 'send-sheet', { fullPage: false });
   await page.getByRole('button', { name: 'What would you change first?' }).click();
   await page.getByRole('button', { name: 'Make the link' }).click();
   const address = page.getByLabel('Address of the link');
   await expect(address).toBeVisible();
-  await takeShots(page, 'send-sheet-link');
+  await takeShots(page, 'send-sheet-link', { fullPage: false });
   const url = await address.inputValue();
   await page.context().clearCookies();
   await page.goto(url);
@@ -104,7 +104,7 @@ test('show-on-phone', async ({ page }) => {
     .first()
     .click();
   await expect(page.getByRole('dialog').getByRole('img')).toBeVisible();
-  await takeShots(page, 'show-on-phone');
+  await takeShots(page, 'show-on-phone', { fullPage: false });
 });
 
 const notDone: Record<string, Partial<MeasurementResponse>> = {

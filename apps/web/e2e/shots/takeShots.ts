@@ -8,8 +8,8 @@ export const shotsDir = resolve(import.meta.dirname, '../../../../shots');
 const desk = { width: 1280, height: 800 };
 const phone = { width: 390, height: 844 };
 
-/** Pictures of a whole page as it stands, in both themes, at the desk and on a phone: `<name>-<width>-<theme>.png`. */
-export async function takeShots(page: Page, name: string): Promise<void> {
+/** Pictures of a page as it stands (whole, or what the window shows where a dialog is open), in both themes, at the desk and on a phone: `<name>-<width>-<theme>.png`. */
+export async function takeShots(page: Page, name: string, { fullPage = true } = {}): Promise<void> {
   mkdirSync(shotsDir, { recursive: true });
   for (const colorScheme of ['light', 'dark'] as const) {
     await page.emulateMedia({ colorScheme, reducedMotion: 'reduce' });
@@ -18,7 +18,7 @@ export async function takeShots(page: Page, name: string): Promise<void> {
       await settle(page);
       await page.screenshot({
         path: `${shotsDir}/${name}-${size.width}-${colorScheme}.png`,
-        fullPage: true,
+        fullPage,
         animations: 'disabled',
       });
     }

@@ -56,7 +56,7 @@ export function TakesFoot({ query, place, page, chosenBar }: FootProps) {
 function Besides({ query, page }: Pick<FootProps, 'query' | 'page'>) {
   return (
     <Flex color="ink.muted" columnGap="8px" wrap="wrap">
-      {page.items.length === 0 && `0 of ${plural(page.everyTotal, 'take')}`}
+      {page.items.length === 0 && query.show !== 'deleted' && `0 of ${plural(page.everyTotal, 'take')}`}
       {page.items.length > 0 && <RestoreLink query={query} page={page} />}
       {query.show === 'deleted' && (
         <>
