@@ -24,9 +24,13 @@ export const clipRun = z.object({
 export const trackReport = z.object({
   samplePeakDbfs: figure,
   samplePeakAtS: figure,
+  /** BS.1770-5 Annex 2. Null in a take measured before it was, as `integratedLufs`. */
+  truePeakDbtp: figure,
   headroomDb: figure,
   rmsDbfs: figure,
   crestFactorDb: figure,
+  /** BS.1770-5, gated, one channel of weight 1. */
+  integratedLufs: figure,
   /** The first 200 runs; `runCount` and `clippedSamples` count all. */
   clipping: z.object({
     runs: z.array(clipRun),

@@ -29,9 +29,13 @@ export interface TrackFacts {
   readonly role: TrackRole;
   readonly samplePeakDbfs: number | null;
   readonly samplePeakAtS: number | null;
+  /** Missing in facts measured before it was. */
+  readonly truePeakDbtp?: number | null;
   readonly headroomDb: number | null;
   readonly rmsDbfs: number | null;
   readonly crestFactorDb: number | null;
+  /** Missing in facts measured before it was. */
+  readonly integratedLufs?: number | null;
   readonly clipping: {
     /** The first 200. */
     readonly runs: readonly ClipRun[];

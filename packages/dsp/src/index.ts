@@ -9,6 +9,8 @@ export { WavError, type WavRefusal } from './wav/wavError';
 export * from './wav/wavFacts';
 export * from './wav/wavHeader';
 export * from './measurements/level/trackLevel';
+export * from './measurements/level/truePeak';
+export * from './measurements/loudness/loudness';
 export * from './roles/guessRoles';
 export * from './roles/lowEndRatio';
 export * from './measureTake';

@@ -65,9 +65,11 @@ export const sampleTake = (overrides: Partial<TakeResponse> = {}): TakeResponse 
 const track = (overrides: Partial<TrackReport>): TrackReport => ({
   samplePeakDbfs: -2.7,
   samplePeakAtS: 4.3,
+  truePeakDbtp: -2.6,
   headroomDb: 2.7,
   rmsDbfs: -24.1,
   crestFactorDb: 21.4,
+  integratedLufs: -23.8,
   clipping: { runs: [], runCount: 0, clippedSamples: 0 },
   dcOffset: 0.00002,
   noiseFloorDbfs: -71.2,

@@ -33,6 +33,12 @@ describe('the level finding', () => {
     });
   });
 
+  it('says where a hot take passes full scale between its samples', () => {
+    expect(kickLevel({ ...hotTrack, truePeakDbtp: 0.42 }).why).toContain('already reaches 0.4 dBTP.');
+    expect(kickLevel({ ...hotTrack, truePeakDbtp: null }).why).not.toContain('dBTP');
+    expect(kickLevel({ ...hotTrack, truePeakDbtp: -0.3 }).why).not.toContain('dBTP');
+  });
+
   it('counts flattened hits, and places where no hit is near', () => {
     expect(kickLevel(clippedTrack)).toMatchObject({
       status: 'fix',

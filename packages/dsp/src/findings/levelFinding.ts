@@ -61,9 +61,13 @@ function hot(figures: ReportFigures, role: Role): Said {
   const track = figures[role];
   const peak = decimalText(track.loudestHitDbfs ?? 0);
   const change = halfDbText(track.gainChangeDb ?? 0);
+  const between = track.truePeakDbtp ?? 0;
   return {
     sentence: `${capitalised(role)} peaks at ${peak} dBFS, unclipped: this take is fine, but a harder hit would clip; turn the ${role} preamp down ${change} dB.`,
-    why: 'Nothing is lost in this take. A clipped hit could not be repaired.',
+    why: `Nothing is lost in this take. A clipped hit could not be repaired.${
+      // What a decimal shows: a wave that passes full scale between its samples clips when it is played or converted.
+      between >= 0.05 ? ` Between samples the wave already reaches ${decimalText(between)} dBTP.` : ''
+    }`,
     next: `Turn the ${role} preamp down ${change} dB before the next take.`,
   };
 }

@@ -89,6 +89,14 @@ describe('report figures', () => {
     expect(contract.parse(figures)).toEqual(figures);
   });
 
+  it('have null for what wasn’t measured yet when the facts were stored', async () => {
+    const take = await facts();
+    const tracks = take.tracks.map(({ truePeakDbtp: _peak, integratedLufs: _loudness, ...track }) => track);
+    const figures = reportFigures({ ...take, tracks }, { target: defaultTarget, temperatureC: 20 });
+    expect(figures.kick).toMatchObject({ truePeakDbtp: null, integratedLufs: null });
+    expect(contract.parse(figures)).toEqual(figures);
+  });
+
   it('leave the facts as they were and hold nothing JSON can’t', async () => {
     const take = await facts();
     const before = JSON.stringify(take);

@@ -54,6 +54,8 @@ function placeOf(facts: TakeFacts, role: TrackRole): number {
 function trackReport({ role: _role, ...track }: TrackFacts, target: Target): TrackReport {
   return {
     ...track,
+    truePeakDbtp: track.truePeakDbtp ?? null,
+    integratedLufs: track.integratedLufs ?? null,
     clipping: { ...track.clipping, runs: [...track.clipping.runs] },
     level: levelOf(track, target),
     gainChangeDb: gainChangeDb(track, target),

@@ -35,9 +35,12 @@ export type FindingTopic =
 export interface TrackReport {
   samplePeakDbfs: number | null;
   samplePeakAtS: number | null;
+  /** Null in a take measured before it was, as `integratedLufs`. */
+  truePeakDbtp: number | null;
   headroomDb: number | null;
   rmsDbfs: number | null;
   crestFactorDb: number | null;
+  integratedLufs: number | null;
   clipping: { runs: ClipRun[]; runCount: number; clippedSamples: number };
   dcOffset: number;
   noiseFloorDbfs: number | null;

@@ -11,9 +11,11 @@ export function trackFigures(change: Partial<TrackReport> = {}): TrackReport {
   const track: TrackReport = {
     samplePeakDbfs: -8.4,
     samplePeakAtS: 4.3,
+    truePeakDbtp: -8.3,
     headroomDb: 8.4,
     rmsDbfs: -30,
     crestFactorDb: 21.6,
+    integratedLufs: -29.5,
     clipping: { runs: [], runCount: 0, clippedSamples: 0 },
     dcOffset: 0,
     noiseFloorDbfs: -72,

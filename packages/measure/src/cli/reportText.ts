@@ -59,9 +59,11 @@ function levelLines({ kick, overhead }: ReportFigures): string[] {
     row('  level', (track) => track.level ?? '–'),
     row('  change at the preamp', (track) => signed(track.gainChangeDb, 'dB')),
     row('  sample peak', (track) => `${unit(track.samplePeakDbfs, 'dBFS')}${place(track.samplePeakAtS)}`),
+    row('  true peak (BS.1770-5)', (track) => unit(track.truePeakDbtp, 'dBTP')),
     row('  headroom', (track) => unit(track.headroomDb, 'dB')),
     row('  RMS (full-scale sine −3.01)', (track) => unit(track.rmsDbfs, 'dBFS')),
     row('  crest factor', (track) => unit(track.crestFactorDb, 'dB')),
+    row('  loudness (BS.1770-5)', (track) => unit(track.integratedLufs, 'LUFS')),
     row('  clipping', ({ clipping }) =>
       clipping.runCount === 0 ? 'none' : `${clipping.runCount} runs, ${clipping.clippedSamples} samples`,
     ),

@@ -81,9 +81,11 @@ describe('peak and power', () => {
     expect(level(new Float32Array(3 * sampleRateHz))).toEqual({
       samplePeakDbfs: null,
       samplePeakAtS: null,
+      truePeakDbtp: null,
       headroomDb: null,
       rmsDbfs: null,
       crestFactorDb: null,
+      integratedLufs: null,
       dcOffset: 0,
       clipping: { runs: [], runCount: 0, clippedSamples: 0 },
       noiseFloorDbfs: null,

@@ -1,8 +1,10 @@
 import { assertBetween, assertPositive } from '../../assert';
 import type { TrackFacts } from '../../facts';
 import { createClipping } from './clipping';
+import { createLoudness } from '../loudness/loudness';
 import { createNoiseFloor } from './noiseFloor';
 import { createPeakAndPower } from './peakAndPower';
+import { createTruePeak } from './truePeak';
 
 export interface TrackLevelOptions {
   readonly sampleRateHz: number;
@@ -20,7 +22,7 @@ export interface TrackLevel {
 }
 
 /**
- * Every level of one microphone that needs no hits: peak, power, offset, clipping and noise floor, in one pass.
+ * Every level of one microphone that needs no hits, in one pass.
  *
  * @throws {SignalError} a rate or a step that can't be
  * @see 2-measurements.md section 2, whose names and definitions these are
@@ -32,13 +34,21 @@ export function createTrackLevel(options: TrackLevelOptions): TrackLevel {
   const peakAndPower = createPeakAndPower(options);
   const clipping = createClipping(options);
   const noiseFloor = createNoiseFloor(options);
+  const truePeak = createTruePeak(options);
+  const loudness = createLoudness(options);
+  // The first one refuses what is no number.
+  const meters = [peakAndPower, clipping, noiseFloor, truePeak, loudness];
 
   return {
     push(block) {
-      peakAndPower.push(block);
-      clipping.push(block);
-      noiseFloor.push(block);
+      for (const meter of meters) meter.push(block);
     },
-    result: () => ({ ...peakAndPower.result(), clipping: clipping.result(), ...noiseFloor.result() }),
+    result: () => ({
+      ...peakAndPower.result(),
+      ...truePeak.result(),
+      ...loudness.result(),
+      clipping: clipping.result(),
+      ...noiseFloor.result(),
+    }),
   };
 }

@@ -47,6 +47,14 @@ const trackRows: TrackRow[] = [
     source: ownDefinition,
   },
   {
+    label: 'True peak',
+    unit: 'dBTP',
+    of: (t) => orMissing(t.truePeakDbtp, 2),
+    definition:
+      'How high the wave goes between samples: interpolated 4 times below 96 kHz, 2 times below 192; never below the sample peak.',
+    source: 'ITU-R BS.1770-5, Annex 2',
+  },
+  {
     label: 'Headroom',
     unit: 'dB',
     of: (t) => orMissing(t.headroomDb, 2),
@@ -92,6 +100,14 @@ const trackRows: TrackRow[] = [
     of: (t) => orMissing(t.crestFactorDb, 2),
     definition: 'Sample peak minus RMS.',
     source: ownDefinition,
+  },
+  {
+    label: 'Loudness',
+    unit: 'LUFS',
+    of: (t) => orMissing(t.integratedLufs, 2),
+    definition:
+      'Integrated and gated, this microphone as one channel of weight 1. Quiet stretches don’t count.',
+    source: 'ITU-R BS.1770-5, Annex 1',
   },
   {
     label: 'Noise floor',
