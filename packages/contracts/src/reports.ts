@@ -110,6 +110,18 @@ export const agreement = z.object({
 });
 export type Agreement = z.infer<typeof agreement>;
 
+export const balance = z.object({
+  /** K-weighted over 400 ms in the overhead, median over hits that stand alone; null below five of a kind. */
+  drumsLufs: figure,
+  cymbalsLufs: figure,
+  /** Cymbals minus drums. */
+  differenceDb: figure,
+  drumHits: z.int().nonnegative(),
+  cymbalHits: z.int().nonnegative(),
+  reason: z.string().nullable(),
+});
+export type Balance = z.infer<typeof balance>;
+
 export const findingTopics = [
   'files',
   'kick-level',
@@ -118,6 +130,7 @@ export const findingTopics = [
   'dc-offset',
   'arrival',
   'adding-up',
+  'balance',
 ] as const;
 
 export const finding = z.object({
@@ -162,6 +175,8 @@ export const reportFigures = z.object({
   hits: z.array(hit),
   arrival,
   agreement,
+  /** Null in a take measured before it was. */
+  balance: balance.nullable(),
   findings: z.array(finding),
 });
 /** What the command line prints. */

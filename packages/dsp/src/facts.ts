@@ -13,6 +13,8 @@ export interface TakeFacts {
   readonly pairs: readonly PairFacts[];
   readonly hits: readonly HitFacts[];
   readonly notices: readonly FileNotice[];
+  /** Missing in facts measured before it was, and in a take without an overhead. */
+  readonly balance?: BalanceFacts;
 }
 
 export type TrackRole = 'kick' | 'overhead';
@@ -56,6 +58,19 @@ export interface HitFacts {
   readonly kind: HitKind;
   /** Peak of each track at this hit, dBFS, in the order of `tracks`. */
   readonly peaksDbfs: readonly (number | null)[];
+}
+
+export type BalanceReason = 'too-few-drums' | 'too-few-cymbals' | 'too-few-of-both';
+
+/** How loud cymbals are against drums in the overhead: K-weighted over 400 ms, median over hits that stand alone. */
+export interface BalanceFacts {
+  readonly drumsLufs: number | null;
+  readonly cymbalsLufs: number | null;
+  /** Cymbals minus drums. */
+  readonly differenceDb: number | null;
+  readonly drumHits: number;
+  readonly cymbalHits: number;
+  readonly reason: BalanceReason | null;
 }
 
 export type Swing = 'up' | 'down';

@@ -2,6 +2,7 @@ import { SignalError } from './assert';
 import type { FileNotice, HitFacts, PairFacts, TakeMeasurement, TrackRole } from './facts';
 import { fileNotices } from './measurements/fileNotices';
 import { listHits, loudestHitDbfs, type KickHit } from './measurements/hits/listHits';
+import { overheadFacts } from './measurements/overheadFacts';
 import { readPair, type PairReading } from './measurements/measurePair';
 import { streamTake } from './measurements/streamTake';
 import type { TrackSource } from './trackSource';
@@ -42,6 +43,7 @@ export async function measureTake({
   const readings = await readPairs({ sources, kick, others, candidates: streamed.kicks, onStage });
   const kickHits = kickHitsOfTake(readings, { kick, others, tracks: tracks.length });
   const hits = listHits(kickHits, streamed.overheadHits, sampleRateHz);
+  const fromOverhead = others.length > 0 ? await overheadFacts(sources[others[0]], hits) : {};
   onStage('arrival', 1);
   const pairs = readings.map((reading, index) => pairFacts(reading, hits, { a: kick, b: others[index] }));
   onStage('adding-up', 1);
@@ -60,6 +62,7 @@ export async function measureTake({
       pairs,
       hits,
       notices: [...notices, ...seen],
+      ...fromOverhead,
     },
     peaks: streamed.peaks,
     pairSpectra: readings.map((reading) => reading.spectrum),

@@ -68,6 +68,23 @@ describe('the sheet', () => {
     expect(screen.getByRole('heading', { name: 'Adding up: flip' })).toBeInTheDocument();
   });
 
+  it('tells drums against cymbals, in words, as a picture and under all figures', async () => {
+    open({});
+    const section = await screen.findByRole('region', { name: /^Drums and cymbals/ });
+    expect(section).toHaveTextContent('Drums and cymbals: cymbals louder');
+    expect(
+      within(section).getByRole('img', { name: /cymbals are 4.6 dB louder than drums/ }),
+    ).toBeInTheDocument();
+    expect(screen.getByRole('row', { name: /^Cymbals against drums/ })).toHaveTextContent('+4.60');
+    expect(screen.getByRole('link', { name: /^Drums and cymbals/ })).toHaveAttribute('href', '#drums');
+  });
+
+  it('leaves out what an older report doesn’t hold', async () => {
+    open({ [`GET ${paths.report(takeId)}`]: json(sampleReport({ balance: null })) });
+    await screen.findByRole('heading', { name: 'Levels: hot' });
+    expect(screen.queryByText(/Drums and cymbals/)).not.toBeInTheDocument();
+  });
+
   it('tells the levels in words where the picture can’t be seen', async () => {
     open({});
     const strip = await screen.findByRole('img', { name: /Kick: hardest hit -2.7 dBFS, hot/ });

@@ -146,6 +146,14 @@ export const sampleReport = (overrides: Partial<ReportResponse> = {}): ReportRes
       choice('shifted-flipped', true, 1.62, -0.5),
     ],
   },
+  balance: {
+    drumsLufs: -29.8,
+    cymbalsLufs: -25.2,
+    differenceDb: 4.6,
+    drumHits: 8,
+    cymbalHits: 12,
+    reason: null,
+  },
   findings: [
     {
       topic: 'kick-level',
@@ -167,6 +175,13 @@ export const sampleReport = (overrides: Partial<ReportResponse> = {}): ReportRes
       sentence: 'Below 150 Hz the two microphones pull against each other.',
       why: 'All 3 kick hits say the same.',
       next: 'Flip the overhead; it can be done on this take.',
+    },
+    {
+      topic: 'balance',
+      status: 'watch',
+      sentence: 'Cymbals are 5 dB louder than drums overhead.',
+      why: 'One overhead holds both on a single track.',
+      next: 'Play cymbals lighter.',
     },
   ],
   line: [

@@ -1,6 +1,7 @@
 import type { Finding, Reader, ReportFigures } from '../report/reportTypes';
 import { addingUpFinding } from './addingUpFinding';
 import { arrivalFinding } from './arrivalFinding';
+import { balanceFindings } from './balanceFindings';
 import { dcOffsetFindings } from './dcOffsetFindings';
 import { levelFinding } from './levelFinding';
 import { noiseFinding } from './noiseFinding';
@@ -19,5 +20,6 @@ export function findings(figures: ReportFigures, reader: Reader): Finding[] {
     ...dcOffsetFindings(figures),
     arrivalFinding(figures, reader),
     addingUpFinding(figures),
+    ...balanceFindings(figures),
   ];
 }

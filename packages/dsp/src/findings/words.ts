@@ -17,6 +17,11 @@ export function wholeDbfsText(levelDbfs: number): string {
   return decimalText(levelDbfs, 0);
 }
 
+/** A difference in whole dB without a sign: the words say which way. */
+export function wholeDbText(valueDb: number): string {
+  return Math.abs(valueDb).toFixed(0);
+}
+
 const NUMBERS = 'no one two three four five six seven eight nine ten eleven twelve'.split(' ');
 
 /** Small counts in words, larger ones in figures. */

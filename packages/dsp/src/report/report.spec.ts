@@ -89,6 +89,12 @@ describe('report figures', () => {
     expect(contract.parse(figures)).toEqual(figures);
   });
 
+  it('have nothing to tell of what older facts lack', async () => {
+    const { balance, ...older } = await facts();
+    expect(balance).toBeDefined();
+    expect(reportFigures(older, { target: defaultTarget, temperatureC: 20 }).balance).toBeNull();
+  });
+
   it('have null for what wasn’t measured yet when the facts were stored', async () => {
     const take = await facts();
     const tracks = take.tracks.map(({ truePeakDbtp: _peak, integratedLufs: _loudness, ...track }) => track);

@@ -40,6 +40,7 @@ export function reportFigures(
     })),
     arrival: arrivalReport(pair, temperatureC),
     agreement: agreementReport(pair),
+    balance: facts.balance ?? null,
     findings: filesFindings(facts.notices),
   };
   return { ...figures, findings: findings(figures, { lengthUnit: 'metre', target }) };

@@ -1,5 +1,6 @@
 import type {
   ArrivalReason,
+  BalanceReason,
   ChoiceName,
   ClipRun,
   HitKind,
@@ -30,7 +31,7 @@ export interface Reader {
 export type Level = 'clipped' | 'hot' | 'on-target' | 'low';
 export type FindingStatus = 'good' | 'watch' | 'fix' | 'cannot-tell';
 export type FindingTopic =
-  'files' | 'kick-level' | 'overhead-level' | 'noise' | 'dc-offset' | 'arrival' | 'adding-up';
+  'files' | 'kick-level' | 'overhead-level' | 'noise' | 'dc-offset' | 'arrival' | 'adding-up' | 'balance';
 
 export interface TrackReport {
   samplePeakDbfs: number | null;
@@ -84,6 +85,16 @@ export interface AgreementReport {
   }[];
 }
 
+export interface BalanceReport {
+  drumsLufs: number | null;
+  cymbalsLufs: number | null;
+  /** Cymbals minus drums. */
+  differenceDb: number | null;
+  drumHits: number;
+  cymbalHits: number;
+  reason: BalanceReason | null;
+}
+
 export interface Finding {
   topic: FindingTopic;
   status: FindingStatus;
@@ -103,6 +114,8 @@ export interface ReportFigures {
   hits: { timeS: number; kind: HitKind; kickPeakDbfs: number | null; overheadPeakDbfs: number | null }[];
   arrival: ArrivalReport;
   agreement: AgreementReport;
+  /** Null in a take measured before it was. */
+  balance: BalanceReport | null;
   findings: Finding[];
 }
 

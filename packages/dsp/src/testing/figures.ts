@@ -77,6 +77,7 @@ export function reportOf(change: Partial<ReportFigures> = {}): ReportFigures {
       reason: null,
     },
     agreement: agreementFigures(),
+    balance: null,
     findings: [],
     ...change,
   };

@@ -5,6 +5,7 @@ import { useListening } from '../hooks/useListening';
 import { usePairSpectrum } from '../hooks/usePairSpectrum';
 import { kickHitsOf, loudestHit, nearestHit } from '../kickHits';
 import { AddingUpSection } from './AddingUpSection';
+import { DrumsSection } from './DrumsSection';
 import { FiguresSection } from './FiguresSection';
 import { LevelsSection } from './LevelsSection';
 import { RuledSheet } from './RuledSheet';
@@ -46,6 +47,7 @@ export function MeasuredSheet({ take, report, settings, ...slots }: MeasuredShee
         canListen={take.rights.listen}
         onChooseHit={setChosenHit}
       />
+      <DrumsSection report={report} />
       <WholeTakeSection {...{ report, listening, chosenHit }} canListen={take.rights.listen} />
       <FiguresSection {...{ take, report, settings }} />
     </RuledSheet>

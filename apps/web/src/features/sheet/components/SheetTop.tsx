@@ -10,6 +10,8 @@ import { Outcomes } from './Outcomes';
 import { SheetRow } from './RuledSheet';
 import {
   addingUpTopics,
+  balanceTopics,
+  balanceWord,
   findingsOf,
   levelTopics,
   levelsWord,
@@ -63,7 +65,15 @@ function contents(report: ReportResponse): ContentsEntry[] {
       word: verdictWord(report),
       status: verdictStatus ?? worstStatus(addingUp),
     },
+    ...measuredSections(report),
     { id: 'whole-take', title: 'Whole take' },
     { id: 'figures', title: 'All figures' },
   ];
+}
+
+/** Sections that a take measured before they were doesn't have. */
+function measuredSections(report: ReportResponse): ContentsEntry[] {
+  if (!report.balance) return [];
+  const status = worstStatus(findingsOf(report, balanceTopics));
+  return [{ id: 'drums', title: 'Drums and cymbals', word: balanceWord(report.balance), status }];
 }

@@ -1,5 +1,6 @@
 import type { ReportResponse, TrackReport, UserSettings } from '@thudline/contracts';
 import { clock, distance, missing, number, signed } from '../../../lib/format';
+import { overheadGroups } from './overheadFigures';
 
 export interface FigureRow {
   label: string;
@@ -206,5 +207,6 @@ export function figureGroups(report: ReportResponse, settings: UserSettings): Fi
       rows: trackRows.map(({ of, ...row }) => ({ ...row, values: [of(report.kick), of(report.overhead)] })),
     },
     { title: 'Adding up', columns: ['kick and overhead'], rows: pairRows(report, settings) },
+    ...overheadGroups(report),
   ];
 }

@@ -1,4 +1,4 @@
-import type { Finding, FindingStatus, ReportResponse } from '@thudline/contracts';
+import type { Balance, Finding, FindingStatus, ReportResponse } from '@thudline/contracts';
 
 const severity: readonly FindingStatus[] = ['fix', 'watch', 'cannot-tell', 'good'];
 
@@ -33,5 +33,16 @@ const verdictWords = {
 
 export const verdictWord = ({ agreement }: ReportResponse): string => verdictWords[agreement.verdict];
 
+/** Nearer than this nobody hears which is louder. */
+const alikeDb = 1;
+
+/** Which of the two is louder in the overhead. */
+export function balanceWord({ differenceDb }: Balance): string {
+  if (differenceDb === null) return 'can’t tell';
+  if (Math.abs(differenceDb) < alikeDb) return 'alike';
+  return differenceDb > 0 ? 'cymbals louder' : 'drums louder';
+}
+
 export const levelTopics = ['kick-level', 'overhead-level', 'noise', 'dc-offset'] as const;
 export const addingUpTopics = ['adding-up', 'arrival'] as const;
+export const balanceTopics = ['balance'] as const;
