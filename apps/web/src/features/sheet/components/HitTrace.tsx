@@ -4,7 +4,7 @@ import type { ReactNode } from 'react';
 import { TextButton } from '../../../components/Button';
 import type { NamedChoice } from '../hooks/choiceNames';
 import type { useHitExcerpt } from '../hooks/useHitExcerpt';
-import { ink } from '../pictures/ink';
+import { ink, lineOnPaper } from '../pictures/ink';
 import { PairTrace } from '../pictures/PairTrace';
 import type { TraceBand } from '../pictures/pairTraceLayout';
 import { PictureTitle } from './SheetSection';
@@ -56,13 +56,13 @@ function TraceKey({ chosen, band, setBand }: Pick<HitTraceProps, 'chosen' | 'ban
       marginTop="6px"
       alignItems="center"
     >
-      <KeyEntry mark={<path d="M0 6h26" stroke={ink.kick} strokeWidth="3" />}>kick</KeyEntry>
+      <KeyEntry mark={<chakra.path d="M0 6h26" stroke={ink.kick} strokeWidth="3px" />}>kick</KeyEntry>
       <KeyEntry
         mark={
-          <path
+          <chakra.path
             d="M0 6h26"
             stroke={ink.overhead}
-            strokeWidth="2"
+            strokeWidth={{ base: '2px', _print: lineOnPaper.overhead }}
             strokeDasharray={chosen.flipped ? '7 3' : undefined}
           />
         }

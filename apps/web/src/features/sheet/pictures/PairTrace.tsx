@@ -1,4 +1,4 @@
-import { Box, Flex } from '@chakra-ui/react';
+import { Box, Flex, chakra } from '@chakra-ui/react';
 import type { Choice } from '@thudline/dsp';
 import { useId, useMemo } from 'react';
 import { TextButton } from '../../../components/Button';
@@ -6,7 +6,7 @@ import { milliseconds, number } from '../../../lib/format';
 import { useWidth } from '../../../lib/useWidth';
 import type { Excerpt } from '../hooks/useExcerpt';
 import { Hatch } from './Hatch';
-import { ink } from './ink';
+import { ink, lineOnPaper } from './ink';
 import { PictureText } from './PictureText';
 import {
   apartPath,
@@ -88,18 +88,18 @@ export function PairTrace({ excerpt, hitS, band, choice, arrivalMs }: PairTraceP
           <path d={togetherPath(shown, pair)} fill={ink.together} />
           <path d={apartPath(shown, pair)} fill={`url(#${hatchId})`} />
           <path d={`M0 ${sizes.pairMiddle}H${widthPx}`} stroke={ink.edge} strokeWidth="1.2" />
-          <path
+          <chakra.path
             d={linePath(shown.kick, pair)}
             fill="none"
             stroke={ink.kick}
-            strokeWidth="2.6"
+            strokeWidth={{ base: '2.6px', _print: lineOnPaper.kick }}
             strokeLinejoin="round"
           />
-          <path
+          <chakra.path
             d={linePath(shown.overhead, pair)}
             fill="none"
             stroke={ink.overhead}
-            strokeWidth="1.9"
+            strokeWidth={{ base: '1.9px', _print: lineOnPaper.overhead }}
             strokeLinejoin="round"
             strokeDasharray={choice.flipped ? '7 4' : undefined}
           />

@@ -13,3 +13,6 @@ export const ink = {
   together: 'var(--chakra-colors-together)',
   hatch: 'var(--chakra-colors-hatch)',
 } as const;
+
+/** Without colours the two microphones are told apart by the width of their lines. */
+export const lineOnPaper = { kick: '3px', overhead: '1.1px' };
