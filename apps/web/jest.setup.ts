@@ -42,12 +42,12 @@ const noMedia = (query: string) => ({
 if (!('matchMedia' in window)) Object.assign(window, { matchMedia: noMedia });
 
 /** jsdom knows the element, but not how to open it. */
-HTMLDialogElement.prototype.showModal ??= function (this: HTMLDialogElement) {
-  this.open = true;
-};
-HTMLDialogElement.prototype.close ??= function (this: HTMLDialogElement) {
-  this.open = false;
-};
+const opening = (open: boolean) =>
+  function (this: HTMLDialogElement) {
+    this.open = open;
+  };
+if (!('showModal' in HTMLDialogElement.prototype))
+  Object.assign(HTMLDialogElement.prototype, { showModal: opening(true), close: opening(false) });
 
 function readWhole(this: Blob) {
   return new Promise<ArrayBuffer>((resolve, reject) => {
