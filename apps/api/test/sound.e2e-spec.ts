@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import { paths, TakeResponse } from '@thudline/contracts';
 import { bytesSource, encodeWav, openWav } from '@thudline/dsp';
 import { Test } from 'supertest';
+import { ObjectStoreService } from '../src/storage/object-store.service';
 import { joined, Person } from './support/person';
 import { monoTracks, stereoTracks, tone, wav } from './support/recordings';
 import { startTestApp, TestApp } from './support/test-app';
@@ -51,6 +52,18 @@ describe('the sound of a take', () => {
       expect(other.headers['content-disposition']).toContain(
         "filename*=UTF-8''%E3%83%89%E3%83%A9%E3%83%A0.wav",
       );
+    });
+
+    it('tell their length and hash without the object store being asked', async () => {
+      const stream = jest.spyOn(test.app.get(ObjectStoreService, { strict: false }), 'stream');
+      const [file] = take.files;
+      const response = await juno.agent.head(paths.takeFile(take.id, file.id)).expect(200);
+      expect(response.headers).toMatchObject({
+        'content-length': String(kick.length),
+        etag: `"${file.sha256}"`,
+      });
+      expect(stream).not.toHaveBeenCalled();
+      stream.mockRestore();
     });
 
     it('are not found under another take or another id', async () => {

@@ -73,16 +73,19 @@ export class SoundController {
   async file(
     @Param('id') takeId: string,
     @Param('fileId') fileId: string,
+    @Req() { method }: Request,
     @Res() response: Response,
   ): Promise<void> {
     const file = await this.sound.getFile(takeId, fileId);
-    const bytes = await this.objects.stream(file.objectKey);
+    // The row tells all that HEAD asks for; a stream that nobody reads would hold a connection to the store.
+    const bytes = method === 'HEAD' ? null : await this.objects.stream(file.objectKey);
     response.attachment(file.name).type('audio/wav');
     response.set({
       'Cache-Control': cacheControl,
       'Content-Length': String(file.bytes),
       ETag: `"${file.sha256}"`,
     });
-    await sendUntilClosed(bytes, response);
+    if (bytes) await sendUntilClosed(bytes, response);
+    else response.end();
   }
 }
