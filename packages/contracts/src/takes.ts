@@ -177,7 +177,7 @@ export type ListTakesResponse = z.infer<typeof listTakesResponse>;
  */
 export const excerptRequest = z.object({
   startS: z.coerce.number().min(0).max(86_400),
-  durationS: z.coerce.number().positive().max(10),
+  durationS: z.coerce.number().positive().max(2, 'An excerpt has at most 2 seconds.'),
 });
 export type ExcerptRequest = z.infer<typeof excerptRequest>;
 

@@ -19,9 +19,9 @@ export class SoundController {
     private readonly objects: ObjectStoreService,
   ) {}
 
-  /** A picture more than a sound: whoever reads the sheet sees the two waves. */
+  /** Samples as they were recorded: a picture to us, sound to whoever puts them together. */
   @Get('excerpt')
-  @Access.take('read')
+  @Access.take('listen')
   @ApiProduces('application/octet-stream')
   @ApiOkResponse({ description: 'Little-endian float32, one track after the other: kick, overhead.' })
   async excerpt(
