@@ -98,6 +98,19 @@ describe('the sound of a take', () => {
       expect(beyond.headers).toMatchObject({ 'x-start-frame': '59000', 'x-frames': '0' });
     });
 
+    it('is read in blocks, so that many channels at a high rate do not fill the memory', async () => {
+      const read = jest.spyOn(test.app.get(ObjectStoreService, { strict: false }), 'read');
+      const response = await excerpt(0, 1.2).expect(200);
+      const stretches = read.mock.calls.map(([, start, end]) => end - start);
+      read.mockRestore();
+      const channels = await Promise.all(
+        [kick, overhead].map(async (file) => (await trackOf(file)).read(0, 57_600)),
+      );
+      expect(floatsOf(response.body as Buffer)).toEqual(channels.flatMap((samples) => [...samples]));
+      // The header is read in windows of 64 KiB, the sound in blocks of 32,768 frames of 3 bytes.
+      expect(Math.max(...stretches)).toBeLessThanOrEqual(32_768 * 3);
+    });
+
     it('reads the right side of a stereo file for each track', async () => {
       const [left, right] = [tone(4_800, 75), tone(4_800, 60)];
       const files = [
@@ -117,7 +130,7 @@ describe('the sound of a take', () => {
       '',
       '?startS=-1&durationS=1',
       '?startS=0&durationS=0',
-      '?startS=0&durationS=11',
+      '?startS=0&durationS=2.1',
       '?startS=x&durationS=1',
     ])('is refused for %p', async (query) => {
       const response = await juno.get(`${paths.excerpt(take.id)}${query}`).expect(400);

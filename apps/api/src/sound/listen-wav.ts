@@ -2,8 +2,8 @@ import { encodeFrames, TrackSource, wavHeader } from '@thudline/dsp';
 import { ByteRange } from './byte-range';
 
 const bitDepth = 16;
-/** Frames read and sent at a time. */
-const blockFrames = 32_768;
+/** Frames read and sent at a time: with 32 channels of 8 bytes, 8 MB of a recording. */
+export const blockFrames = 32_768;
 
 /**
  * A 16-bit WAV with one channel a track that is never stored: its length is computed, and any stretch of it is made from

@@ -9,7 +9,7 @@ import { ObjectSource } from '../storage/object-source';
 import { ObjectStoreService } from '../storage/object-store.service';
 import { TakeFile } from '../takes/entities/take-file.entity';
 import { TakeTrack } from '../takes/entities/take-track.entity';
-import { ListenWav } from './listen-wav';
+import { blockFrames, ListenWav } from './listen-wav';
 
 export interface Excerpt {
   sampleRateHz: number;
@@ -33,10 +33,15 @@ export class TakeSoundService {
     const lastFrame = Math.min(...tracks.map((track) => track.frames));
     const startFrame = Math.min(Math.round(startS * sampleRateHz), lastFrame);
     const endFrame = Math.min(startFrame + Math.round(durationS * sampleRateHz), lastFrame);
-    const stretches: Buffer[] = [];
-    for (const track of tracks) stretches.push(littleEndian(await track.read(startFrame, endFrame)));
     const frames = endFrame - startFrame;
-    return { sampleRateHz, startFrame, frames, trackCount: tracks.length, bytes: Buffer.concat(stretches) };
+    const bytes = Buffer.alloc(tracks.length * frames * 4);
+    for (let first = startFrame; first < endFrame; first += blockFrames) {
+      const end = Math.min(first + blockFrames, endFrame);
+      // Tracks of one file share the block that was read last, so they are read one after the other.
+      for (const [position, track] of tracks.entries())
+        writeSamples(bytes, await track.read(first, end), position * frames + first - startFrame);
+    }
+    return { sampleRateHz, startFrame, frames, trackCount: tracks.length, bytes };
   }
 
   async listenWav(takeId: string): Promise<{ wav: ListenWav; etag: string }> {
@@ -70,8 +75,6 @@ export class TakeSoundService {
   }
 }
 
-function littleEndian(samples: Float32Array): Buffer {
-  const bytes = Buffer.alloc(samples.length * 4);
-  samples.forEach((sample, index) => bytes.writeFloatLE(sample, index * 4));
-  return bytes;
+function writeSamples(bytes: Buffer, samples: Float32Array, at: number): void {
+  samples.forEach((sample, index) => bytes.writeFloatLE(sample, (at + index) * 4));
 }
