@@ -13,6 +13,17 @@ export class ApiError extends Error {
   }
 }
 
+const final: readonly string[] = ['not-found', 'not-signed-in', 'link-ended', 'forbidden'];
+
+/**
+ * The error a page has to show: none while what it read before still stands, unless the answer was that it is gone. One
+ * lost answer of a later read must not take a sheet away from somebody who is writing on it.
+ */
+export function errorToShow(data: unknown, error: Error | undefined): Error | undefined {
+  const isFinal = error instanceof ApiError && final.includes(error.code);
+  return data === undefined || isFinal ? error : undefined;
+}
+
 const offline = () =>
   new ApiError('offline', 'The server did not answer. Check the connection, then try again.');
 
@@ -71,8 +82,25 @@ export async function refreshSession(): Promise<boolean> {
 
 async function sendSignedIn(path: string, options: RequestOptions): Promise<Response> {
   const first = await send(path, options);
+  if (first.ok) answeredAtMs = Date.now();
   if (first.status !== 401 || path === paths.signIn || path === paths.join) return first;
   return (await refreshSession()) ? send(path, options) : first;
+}
+
+/** The access cookie lives 15 minutes; what was answered within this time needs no other look. */
+const sureForMs = 8 * 60_000;
+let answeredAtMs = 0;
+
+export const sessionIsSure = () => Date.now() - answeredAtMs < sureForMs;
+
+/**
+ * Renews the session where it may have run out: media elements and plain links send the cookie they find and can't ask
+ * for another. Whether it worked shows in what they are answered.
+ */
+export async function keepSession(): Promise<void> {
+  if (sessionIsSure()) return;
+  await sendSignedIn(paths.me, {});
+  answeredAtMs = Date.now();
 }
 
 /** @returns the answer's JSON, checked against `schema` */

@@ -18,6 +18,10 @@ export class PairPlayer {
   private mixer: ChoiceMixer | null = null;
   private halt: (() => void) | null = null;
   private mediaSource: MediaElementAudioSourceNode | null = null;
+  /** Raised by every start and stop: whoever waited meanwhile sees that it is no longer wanted. */
+  private run = 0;
+  /** The run that plays the take, the last one that did. */
+  private takeRun = 0;
 
   constructor(
     /** The whole take, two channels; whoever draws it may seek it. */
@@ -27,7 +31,9 @@ export class PairPlayer {
   ) {}
 
   async playLoop(excerpt: LoopExcerpt): Promise<void> {
-    const { context, mixer } = await this.start();
+    const started = await this.start();
+    if (!started) return;
+    const { context, mixer } = started;
     const buffer = new AudioBuffer({
       numberOfChannels: 2,
       length: excerpt.kick.length,
@@ -43,14 +49,24 @@ export class PairPlayer {
 
   /** Goes on from where the take stands. */
   async playTake(): Promise<void> {
-    const { context, mixer } = await this.start();
+    const started = await this.start();
+    if (!started) return;
+    const { context, mixer, run } = started;
     const source = (this.mediaSource ??= context.createMediaElementSource(this.media));
     source.connect(mixer.input);
-    this.halt = () => {
-      this.media.pause();
-      source.disconnect();
-    };
-    await this.media.play();
+    this.takeRun = run;
+    this.halt = () =>
+      this.afterFade(() => {
+        source.disconnect(mixer.input);
+        // Started again meanwhile, the take goes on.
+        if (this.takeRun === run) this.media.pause();
+      });
+    try {
+      await this.media.play();
+    } catch (error) {
+      // A stop while it still loads makes the browser say it was aborted: that is what was asked for.
+      if (run === this.run) throw error;
+    }
   }
 
   select(index: number) {
@@ -64,25 +80,38 @@ export class PairPlayer {
   }
 
   stop() {
+    this.run++;
     const { context, mixer, halt } = this;
     this.mixer = null;
     this.halt = null;
     if (!context || !mixer || !halt) return;
     fadeOut(context, mixer);
     halt();
-    setTimeout(() => mixer.dispose(), stopS * 2000);
+    this.afterFade(() => mixer.dispose());
   }
 
-  async close() {
+  /** Ends for good, after the last fade. */
+  close() {
     this.stop();
-    await this.context?.close();
+    const { context } = this;
     this.context = null;
+    this.mediaSource = null;
+    this.afterFade(() => {
+      this.media.pause();
+      void context?.close();
+    });
+  }
+
+  private afterFade(act: () => void) {
+    setTimeout(act, stopS * 2000);
   }
 
   private async start() {
     this.stop();
+    const run = ++this.run;
     const context = (this.context ??= new AudioContext({ latencyHint: 'interactive' }));
     await context.resume();
+    if (run !== this.run) return null;
     const mixer = createChoiceMixer(context, this.plan, this.selected);
     const now = context.currentTime;
     const level = mixer.output.gain;
@@ -91,7 +120,7 @@ export class PairPlayer {
     level.linearRampToValueAtTime(1, now + quietStart.riseS);
     mixer.output.connect(context.destination);
     this.mixer = mixer;
-    return { context, mixer };
+    return { context, mixer, run };
   }
 }
 

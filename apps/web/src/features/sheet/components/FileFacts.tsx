@@ -1,5 +1,6 @@
 import { Box, chakra } from '@chakra-ui/react';
 import { paths, type TakeResponse } from '@thudline/contracts';
+import { DownloadLink } from '../../../components/DownloadLink';
 import { bytes, clock, plural } from '../../../lib/format';
 
 /** The files as they came: kept and given back bit for bit. */
@@ -19,9 +20,7 @@ export function FileFacts({ take, dspVersion }: { take: TakeResponse; dspVersion
             paddingY={{ base: '7px', _print: '3px' }}
           >
             {take.rights.download ? (
-              <a href={paths.takeFile(take.id, file.id)} download>
-                {file.name}
-              </a>
+              <DownloadLink href={paths.takeFile(take.id, file.id)}>{file.name}</DownloadLink>
             ) : (
               file.name
             )}

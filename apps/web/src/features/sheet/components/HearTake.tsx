@@ -25,11 +25,9 @@ export function HearTake({
         <PlayMark playing={plays} />
         {plays ? 'Stop' : `Hear this take, ${clock(durationS)}`}
       </Button>
-      {listening.failure && listening.playing === 'nothing' && (
-        <Box role="alert" color="fix" fontSize="small" alignSelf="center">
-          {listening.failure}
-        </Box>
-      )}
+      <Box order={2} width="100%" marginTop="-6px" fontSize="caption" color="ink.muted">
+        Heard {listening.heardWords}, as chosen under Adding up.
+      </Box>
     </>
   );
 }

@@ -1,8 +1,11 @@
 import { paths, type ReportResponse } from '@thudline/contracts';
 import { listeningMatchDb, type PairSpectrum } from '@thudline/dsp';
 import { useMemo } from 'react';
+import { keepSession } from '../../../lib/apiClient';
+import { decibels } from '../../../lib/format';
 import { matchGainsDb, mixPlan, safeGainDb } from '../../../lib/audio/mixPlan';
 import { usePairPlayer } from '../../../lib/audio/usePairPlayer';
+import type { NamedChoice } from './choiceNames';
 import type { Bench } from './useChoice';
 
 /** Hearing the choices of one take, matched from 1 to 8 kHz so that a change of the low end stays audible. */
@@ -31,11 +34,26 @@ export function useListening({
       safeDb,
     );
   }, [heard, matches, report, chosen.gainDb]);
-  const player = usePairPlayer(paths.listen(report.takeId), plan, selected);
+  const player = usePairPlayer({
+    takeUrl: paths.listen(report.takeId),
+    beforeTake: keepSession,
+    plan,
+    selected,
+  });
   return {
     ...player,
     matchDb: matches[selected] ?? 0,
+    /** What differs from the files as they are; nothing is changed without saying so. */
+    heardWords: heardWords(chosen),
   };
+}
+
+function heardWords({ label, gainDb }: NamedChoice): string {
+  const gain =
+    Math.abs(gainDb) < 0.05
+      ? ''
+      : `overhead ${decibels(Math.abs(gainDb))} ${gainDb > 0 ? 'louder' : 'quieter'}`;
+  return [label, gain].filter(Boolean).join(', ');
 }
 
 export type Listening = ReturnType<typeof useListening>;
