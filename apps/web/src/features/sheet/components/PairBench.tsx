@@ -4,6 +4,7 @@ import type { PairSpectrum } from '@thudline/dsp';
 import { useState } from 'react';
 import { TextButton } from '../../../components/Button';
 import type { Bench } from '../hooks/useChoice';
+import { useFollowHit } from '../hooks/useFollowHit';
 import { useHitExcerpt } from '../hooks/useHitExcerpt';
 import { useSheetKeys } from '../hooks/useSheetKeys';
 import type { Listening } from '../hooks/useListening';
@@ -55,6 +56,7 @@ function LoadedBench({ spectrum, ...props }: PairBenchProps & { spectrum: PairSp
   const { report, bench, kickHits, chosenHit, canListen } = props;
   const { chosen, asRecorded } = bench;
   const hitExcerpt = useHitExcerpt(report, chosenHit, canListen);
+  useFollowHit(props.listening, hitExcerpt.excerpt);
   const [band, setBand] = useState<TraceBand>('low');
   const hitNumber = kickHits.indexOf(chosenHit) + 1;
   const [helping, setHelping] = useState(false);

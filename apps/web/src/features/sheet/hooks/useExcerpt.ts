@@ -40,7 +40,8 @@ export function useExcerpt(
       const { bytes, headers } = await requestBytes(path);
       return decodeExcerpt(bytes, headers);
     },
-    { keepPreviousData: true, revalidateIfStale: false, revalidateOnReconnect: false },
+    // No samples of another hit in the meantime: they would be drawn, and heard, under this one's number.
+    { revalidateIfStale: false, revalidateOnReconnect: false },
   );
   return { excerpt: data, error, retry: () => void mutate() };
 }

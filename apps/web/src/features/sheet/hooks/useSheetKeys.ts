@@ -26,19 +26,24 @@ export const sheetKeyWords: [keys: string, does: string][] = [
 
 /** Fields, lists and whatever acts on its own keys keep them. */
 const keepsItsKeys =
-  'input, textarea, select, button, a, summary, [contenteditable], [role="group"], [role="slider"], dialog *';
+  'input, textarea, select, summary, [contenteditable], [role="group"] [tabindex], [role="slider"]';
+
+/** Whether a single key is the sheet's: not in a field, not behind a dialog, not one held down. */
+function isForSheet(event: KeyboardEvent): boolean {
+  if (event.ctrlKey || event.metaKey || event.altKey || event.defaultPrevented || event.repeat) return false;
+  if (document.querySelector('dialog[open]')) return false;
+  if (!(event.target instanceof Element)) return true;
+  if (event.target.closest(keepsItsKeys)) return false;
+  // A choice just clicked keeps the focus: digits and arrows still act there, Space presses the button itself.
+  return event.key !== ' ' || event.target.closest('button, a') === null;
+}
 
 /** Single keys of the sheet; they can be switched off (WCAG 2.1.4). */
 export function useSheetKeys(keys: SheetKeys) {
   useEffect(() => {
     if (!keys.singleKeys) return;
     const onKeyDown = (event: KeyboardEvent) => {
-      if (event.ctrlKey || event.metaKey || event.altKey || event.defaultPrevented) return;
-      const inField = event.target instanceof Element && event.target.closest(keepsItsKeys) !== null;
-      const onButton = event.target instanceof Element && event.target.closest('button') !== null;
-      // A choice just clicked keeps the focus: digits and arrows still act there, Space presses the button itself.
-      if (inField && !(onButton && event.key !== ' ')) return;
-      if (act(event.key, keys)) event.preventDefault();
+      if (isForSheet(event) && act(event.key, keys)) event.preventDefault();
     };
     document.addEventListener('keydown', onKeyDown);
     return () => document.removeEventListener('keydown', onKeyDown);
@@ -57,6 +62,7 @@ function act(
   if (key === ' ') {
     if (listening.playing !== 'nothing') listening.stop();
     else if (excerpt) void listening.playHit(excerpt);
+    else return false;
     return true;
   }
   const walk = key === 'ArrowRight' ? 1 : key === 'ArrowLeft' ? -1 : 0;
