@@ -206,7 +206,7 @@ describe('the sheet', () => {
     await userEvent.clear(shift);
     await userEvent.type(shift, '1.0');
     expect(
-      screen.getByRole('img', { name: /Low end of the two added.*flipped, 1.0 ms earlier/ }),
+      screen.getByRole('img', { name: /Low end of the two added.*flipped, 1.00 ms earlier/ }),
     ).toBeInTheDocument();
     await userEvent.clear(shift);
     await userEvent.type(shift, '1,62');

@@ -39,7 +39,7 @@ export function figuresText(groups: readonly FigureGroup[]): string {
           const told = values
             .map((value, i) => (values.length > 1 ? `${columns[i]} ${value}` : value))
             .join(', ');
-          return `${label}: ${told} ${unit}`.trim();
+          return unit === 'about' ? `${label}: about ${told}` : `${label}: ${told} ${unit}`.trim();
         }),
       ].join('\n'),
     )

@@ -29,7 +29,7 @@ export function WholeTakeSection({
       <SectionText>
         {plural(kicks, 'kick hit')} among {plural(report.hits.length, 'hit')}.{' '}
         {canListen && (
-          <chakra.span _print={{ display: 'none' }}>Click or drag to play from there. </chakra.span>
+          <chakra.span _print={{ display: 'none' }}>Click or drag to choose where it plays. </chakra.span>
         )}
         Each microphone is drawn to its own peak.
       </SectionText>

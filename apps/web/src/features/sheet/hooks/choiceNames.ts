@@ -12,20 +12,21 @@ export interface NamedChoice extends Choice {
   tickLabel: string;
 }
 
-const shiftWords = (shiftMs: number) =>
-  `${milliseconds(Math.abs(shiftMs))} ${shiftMs < 0 ? 'later' : 'earlier'}`;
+const shiftWords = (shiftMs: number, digits: number) =>
+  `${milliseconds(Math.abs(shiftMs), digits)} ${shiftMs < 0 ? 'later' : 'earlier'}`;
 
-/** Half of what is shown of a shift: two that read alike are one choice. */
+/** Half of what is shown of a player's own shift: two that read alike are one choice. */
 const sameShiftMs = 0.005;
 
 export const sameChoice = (a: Pick<Choice, 'flipped' | 'shiftMs'>, b: Pick<Choice, 'flipped' | 'shiftMs'>) =>
   a.flipped === b.flipped && Math.abs(a.shiftMs - b.shiftMs) < sameShiftMs;
 
 /** A choice told by its parts. */
-export function choiceWords({ flipped, shiftMs }: Pick<Choice, 'flipped' | 'shiftMs'>): string {
+export function choiceWords({ flipped, shiftMs }: Pick<Choice, 'flipped' | 'shiftMs'>, digits = 1): string {
   const shifted = Math.abs(shiftMs) >= sameShiftMs;
   if (!shifted) return flipped ? 'flipped' : 'as recorded';
-  return flipped ? `flipped, ${shiftWords(shiftMs)}` : shiftWords(shiftMs);
+  const words = shiftWords(shiftMs, digits);
+  return flipped ? `flipped, ${words}` : words;
 }
 
 function labelsOf(choice: MeasuredChoice) {
@@ -51,6 +52,6 @@ export function namedChoices({ choices }: Agreement, gainDb: number): NamedChoic
 
 /** A choice the report has no name for. */
 export function ownChoice(choice: Choice): NamedChoice {
-  const label = choiceWords(choice);
+  const label = choiceWords(choice, 2);
   return { ...choice, name: 'own', label, tickLabel: label };
 }

@@ -51,6 +51,7 @@ export function HitStrip({
           y={stripRowsPx[role]}
           hits={strips[role]}
           track={report[role]}
+          quiet={report.findings.some(({ topic, status }) => topic === `${role}-level` && status === 'good')}
           chosenHit={chosenHit}
           {...{ widthPx, x, target: report.target, onChoose }}
         />

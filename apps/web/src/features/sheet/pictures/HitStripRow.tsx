@@ -20,6 +20,8 @@ interface RowProps {
   y: number;
   hits: StripHit[];
   track: TrackReport;
+  /** A low take that is good as it is: the change only could be made. */
+  quiet: boolean;
   target: Target;
   widthPx: number;
   x: StripScale;
@@ -28,7 +30,18 @@ interface RowProps {
 }
 
 /** One microphone's line with dots that can be chosen, and the arrow from the hardest hit to the aim. */
-export function HitStripRow({ role, y, hits, track, target, widthPx, x, chosenHit, onChoose }: RowProps) {
+export function HitStripRow({
+  role,
+  y,
+  hits,
+  track,
+  quiet,
+  target,
+  widthPx,
+  x,
+  chosenHit,
+  onChoose,
+}: RowProps) {
   const dots = useMemo(() => stackDots(hits, x), [hits, x]);
   const hardest = dots.find((dot) => dot.hardest);
   const clipped = track.level === 'clipped';
@@ -44,7 +57,7 @@ export function HitStripRow({ role, y, hits, track, target, widthPx, x, chosenHi
       >
         <HitDots {...{ role, y, x, dots, clipped, chosenHit }} />
         {hardest && (
-          <GainArrow {...{ y, x, track, target, clipped, fromDbfs: clipped ? 0 : hardest.peakDbfs }} />
+          <GainArrow {...{ y, x, track, quiet, target, clipped, fromDbfs: clipped ? 0 : hardest.peakDbfs }} />
         )}
       </chakra.svg>
       <DotButtons {...{ dots, y, role, chosenHit, onChoose }} />
@@ -57,15 +70,16 @@ function GainArrow({
   y,
   x,
   track,
+  quiet,
   target,
   clipped,
   fromDbfs,
-}: Pick<RowProps, 'y' | 'x' | 'track' | 'target'> & { clipped: boolean; fromDbfs: number }) {
+}: Pick<RowProps, 'y' | 'x' | 'track' | 'quiet' | 'target'> & { clipped: boolean; fromDbfs: number }) {
   if (track.gainChangeDb === null || track.level === null || track.level === 'on-target') return null;
   const from = x(fromDbfs);
   const to = x(target.aimDbfs);
   const way = Math.sign(to - from);
-  const color = track.level === 'low' ? ink.watch : ink.fix;
+  const color = track.level !== 'low' ? ink.fix : quiet ? ink.muted : ink.watch;
   const arrowY = y - 23;
   const labelLeft = way < 0;
   return (

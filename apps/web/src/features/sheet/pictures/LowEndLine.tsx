@@ -134,16 +134,20 @@ function EndPoints({ recordedX, chosenX, recordedDb, chosen, widthPx }: EndPoint
         </>
       )}
       <circle cx={recordedX} cy={lineY} r={7} fill={ink.sheet} stroke={ink.ink} strokeWidth="2.2" />
-      {label(recordedX, -outward, 'as recorded')}
+      {label(recordedX, -outward, withLevelOffAxis('as recorded', recordedDb))}
       {chosen.label !== 'as recorded' && (
         <>
           <circle cx={chosenX} cy={lineY} r={moved ? 8 : 4} fill={ink.ink} />
-          {label(chosenX, outward, chosen.label)}
+          {label(chosenX, outward, withLevelOffAxis(chosen.label, chosen.levelDb))}
         </>
       )}
     </>
   );
 }
+
+/** A mark that stands at the end of the axis because it lies beyond says where it is. */
+const withLevelOffAxis = (label: string, levelDb: number) =>
+  levelDb < axisDb.min ? `${label}, ${signedDecibels(levelDb)}` : label;
 
 function describe(recordedDb: number, chosen: LineTick): string {
   return (

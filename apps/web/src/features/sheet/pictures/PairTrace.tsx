@@ -50,7 +50,8 @@ export function PairTrace({ excerpt, hitS, band, choice, arrivalMs }: PairTraceP
   const polarity = useTurn(choice.flipped ? -1 : 1);
   const shiftMs = useTurn(choice.shiftMs);
   const gain = 10 ** (choice.gainDb / 20);
-  const count = Math.max(120, Math.round(widthPx / 2));
+  // Every frequency needs a point a pixel; the widest view of it is narrow enough for that.
+  const count = Math.max(120, Math.round(band === 'every' ? widthPx : widthPx / 2));
   const signals = useMemo(() => filtered(excerpt, band), [excerpt, band]);
   const { view, moved, reset, zoomBy, surface } = useTraceView(band, widthPx);
   const at = (shift: number) => sampleTrace({ signals, excerpt, hitS, view, shiftMs: shift, count });
@@ -225,7 +226,7 @@ function ArrivalBracket({
         stroke={ink.sheet}
         strokeWidth="5"
       >
-        {milliseconds(Math.abs(arrivalMs - shiftMs))} later
+        {milliseconds(Math.abs(arrivalMs - shiftMs))} {arrivalMs > shiftMs ? 'later' : 'earlier'}
       </PictureText>
     </>
   );

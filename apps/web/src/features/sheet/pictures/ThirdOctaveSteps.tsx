@@ -71,6 +71,12 @@ export function ThirdOctaveSteps({ steps, label }: { steps: Step[]; label: strin
           strokeLinecap="round"
         />
         <path d={outline((step) => step.levelDb)} fill="none" stroke={ink.ink} strokeWidth="2" />
+        {steps.map(
+          (step, i) =>
+            step.levelDb < -limitDb && (
+              <path key={step.nominal} d={`M${x(i + 0.5)} ${y(-limitDb) + 7}l-4-6h8z`} fill={ink.ink} />
+            ),
+        )}
         {[3, 0, -3].map((db) => (
           <PictureText key={db} x={box.left - 8} y={y(db) + 5} textAnchor="end" fill={ink.muted}>
             {signed(db, 0)}

@@ -3,7 +3,7 @@ import type { ZoneLevel } from '@thudline/dsp';
 import { signed } from '../../../lib/format';
 import { useWidth } from '../../../lib/useWidth';
 import { ink } from './ink';
-import { PictureText } from './PictureText';
+import { halo, PictureText } from './PictureText';
 import type { Beside } from './WhereItHelps';
 
 export type Zone = Beside<ZoneLevel>;
@@ -106,6 +106,19 @@ function ZoneRow({
       )}
       <circle cx={from} cy={y} r={4.6} fill={ink.sheet} stroke={ink.ink} strokeWidth="1.8" />
       <circle cx={to} cy={y} r={5.2} fill={ink.ink} />
+      {zone.levelDb < -limitDb && <OffAxis x={to} y={y} levelDb={zone.levelDb} />}
+    </>
+  );
+}
+
+/** The mark stands at the end of the axis; its level lies further out. */
+function OffAxis({ x, y, levelDb }: { x: number; y: number; levelDb: number }) {
+  return (
+    <>
+      <path d={`M${x - 9} ${y}l6-4v8z`} fill={ink.ink} />
+      <PictureText x={x + 9} y={y - 5} fill={ink.muted} {...halo}>
+        {signed(levelDb)}
+      </PictureText>
     </>
   );
 }

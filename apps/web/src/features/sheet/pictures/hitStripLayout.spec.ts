@@ -65,6 +65,7 @@ describe('the hit line', () => {
   it('tells the change in half decibels, and at least for a clipped take', () => {
     expect(changeLabel(-6.3, false)).toBe('down 6.5 dB');
     expect(changeLabel(5, false)).toBe('up 5 dB');
+    expect(changeLabel(0.1, false)).toBe('up 0.5 dB');
     expect(changeLabel(-9, true)).toBe('down at least 9 dB');
   });
 });

@@ -45,16 +45,21 @@ export function stripScale(widthPx: number, startDbfs: number): StripScale {
   return Object.assign(scale, { dbfsAt, left, right });
 }
 
-/** The kick line shows kick hits; the overhead's line every hit, since all of them share its preamp. */
+/**
+ * The kick line shows kick hits, and whatever else was louder in its file, since the level goes by the loudest; the
+ * overhead's line every hit, since all of them share its preamp.
+ */
 export function stripHits(report: ReportResponse): { kick: StripHit[]; overhead: StripHit[] } {
   const withLevel = (peakDbfs: number | null, index: number, role: 'kick' | 'overhead') =>
     peakDbfs === null
       ? []
       : [{ index, peakDbfs, clipped: isClippedHit(peakDbfs, report[role].level === 'clipped') }];
+  const kicks = report.hits.flatMap((hit) => (hit.kind === 'kick' ? (hit.kickPeakDbfs ?? []) : []));
+  const loudestKickDbfs = Math.max(-Infinity, ...kicks);
+  const isOnKickLine = ({ kind, kickPeakDbfs }: ReportResponse['hits'][number]) =>
+    kind === 'kick' || (kickPeakDbfs ?? -Infinity) > loudestKickDbfs;
   return {
-    kick: report.hits.flatMap((hit, i) =>
-      hit.kind === 'kick' ? withLevel(hit.kickPeakDbfs, i, 'kick') : [],
-    ),
+    kick: report.hits.flatMap((hit, i) => (isOnKickLine(hit) ? withLevel(hit.kickPeakDbfs, i, 'kick') : [])),
     overhead: report.hits.flatMap((hit, i) => withLevel(hit.overheadPeakDbfs, i, 'overhead')),
   };
 }
@@ -112,9 +117,9 @@ function freeRow(placed: readonly Dot[], x: number, hardest: boolean): number {
   return rows.find((row) => !crowded(row)) ?? 0;
 }
 
-/** "down 6.5 dB", "up 5 dB"; whole and half decibels without a needless zero. */
+/** "down 6.5 dB", "up 5 dB": the half-decibel steps of the sentences, at least 0.5, without a needless zero. */
 export function changeLabel(gainChangeDb: number, clipped: boolean): string {
-  const size = String(Math.round(Math.abs(gainChangeDb) * 2) / 2);
+  const size = String(Math.max(0.5, Math.round(Math.abs(gainChangeDb) * 2) / 2));
   if (clipped) return `down at least ${size} dB`;
   return `${gainChangeDb < 0 ? 'down' : 'up'} ${size} dB`;
 }

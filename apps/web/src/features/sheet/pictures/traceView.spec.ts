@@ -4,14 +4,16 @@ const low = { fromMs: -6, toMs: 44 };
 
 describe('the view of the pair trace', () => {
   it('zooms about the time under the pointer', () => {
-    const closer = zoomed(low, 4, 0.5);
+    const closer = zoomed(low, { atMs: 4, factor: 0.5 });
     expect(closer).toEqual({ fromMs: -1, toMs: 24 });
-    expect(zoomed(closer, 4, 2)).toEqual(low);
+    expect(zoomed(closer, { atMs: 4, factor: 2 })).toEqual(low);
   });
 
   it('stops where nothing more can be seen', () => {
-    expect(zoomed(low, 0, 1e-6).toMs - zoomed(low, 0, 1e-6).fromMs).toBeCloseTo(2, 9);
-    expect(zoomed(low, 0, 1e6)).toEqual({ fromMs: -50, toMs: 600 });
+    expect(
+      zoomed(low, { atMs: 0, factor: 1e-6 }).toMs - zoomed(low, { atMs: 0, factor: 1e-6 }).fromMs,
+    ).toBeCloseTo(2, 9);
+    expect(zoomed(low, { atMs: 0, factor: 1e6 })).toEqual({ fromMs: -50, toMs: 600 });
   });
 
   it('moves no further than there is sound, keeping its span', () => {

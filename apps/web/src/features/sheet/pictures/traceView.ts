@@ -7,9 +7,13 @@ export interface TraceView {
 /** What an excerpt holds around its hit, with room for the filter at both ends; and the closest look that still shows shape. */
 const limits = { fromMs: -50, toMs: 600, shortestMs: 2 };
 
-/** The view with its span changed by `factor`, the time under `atMs` staying where it is. */
-export function zoomed({ fromMs, toMs }: TraceView, atMs: number, factor: number): TraceView {
-  const widest = limits.toMs - limits.fromMs;
+export const wholeViewMs = limits.toMs - limits.fromMs;
+
+/** The view with its span changed by `factor`, up to `widest` ms, the time under `atMs` staying where it is. */
+export function zoomed(
+  { fromMs, toMs }: TraceView,
+  { atMs, factor, widest = wholeViewMs }: { atMs: number; factor: number; widest?: number },
+): TraceView {
   const span = Math.min(widest, Math.max(limits.shortestMs, (toMs - fromMs) * factor));
   const share = (atMs - fromMs) / (toMs - fromMs);
   return inside({ fromMs: atMs - share * span, toMs: atMs + (1 - share) * span });

@@ -1,12 +1,11 @@
 import { useEffect, useRef, useState, type KeyboardEvent, type PointerEvent } from 'react';
 import { traceWindows, type TraceBand } from './pairTraceLayout';
-import { panned, zoomed, type TraceView } from './traceView';
+import { panned, wholeViewMs, zoomed, type TraceView } from './traceView';
 
-const keySteps: Record<string, (view: TraceView) => TraceView> = {
-  '+': (view) => zoomed(view, middle(view), 0.7),
-  '=': (view) => zoomed(view, middle(view), 0.7),
-  '-': (view) => zoomed(view, middle(view), 1 / 0.7),
-};
+const keyFactors: Record<string, number> = { '+': 0.7, '=': 0.7, '-': 1 / 0.7 };
+
+/** Wider, a point a pixel could no longer show every frequency. */
+const widestMs: Record<TraceBand, number> = { low: wholeViewMs, every: 12 };
 
 const middle = ({ fromMs, toMs }: TraceView) => (fromMs + toMs) / 2;
 const spanOf = ({ fromMs, toMs }: TraceView) => toMs - fromMs;
@@ -19,6 +18,8 @@ export function useTraceView(band: TraceBand, widthPx: number) {
   const [kept, setKept] = useState<{ band: TraceBand; view: TraceView }>({ band, view: traceWindows[band] });
   const view = kept.band === band ? kept.view : traceWindows[band];
   const surface = useRef<HTMLDivElement>(null);
+  const zoom = (v: TraceView, atMs: number, factor: number) =>
+    zoomed(v, { atMs, factor, widest: widestMs[band] });
   const change = (next: (view: TraceView) => TraceView) => setKept({ band, view: next(view) });
   const msAt = (clientX: number) => {
     const left = surface.current?.getBoundingClientRect().left ?? 0;
@@ -28,16 +29,16 @@ export function useTraceView(band: TraceBand, widthPx: number) {
     const sideways = Math.abs(event.deltaX) > Math.abs(event.deltaY);
     if (!event.ctrlKey && !sideways) return;
     event.preventDefault();
-    if (event.ctrlKey) change((v) => zoomed(v, msAt(event.clientX), Math.exp(event.deltaY / 300)));
+    if (event.ctrlKey) change((v) => zoom(v, msAt(event.clientX), Math.exp(event.deltaY / 300)));
     else change((v) => panned(v, (event.deltaX / widthPx) * spanOf(v)));
   });
-  const pointers = usePointers({ msPerPx: spanOf(view) / widthPx, msAt, change });
+  const pointers = usePointers({ msPerPx: spanOf(view) / widthPx, msAt, change, zoom });
   const onKeyDown = (event: KeyboardEvent) => {
     const way = event.key === 'ArrowRight' ? 1 : event.key === 'ArrowLeft' ? -1 : 0;
-    const step =
-      event.shiftKey && way !== 0 ? (v: TraceView) => panned(v, way * spanOf(v) * 0.2) : keySteps[event.key];
+    const factor = keyFactors[event.key];
     if (event.key === '0') setKept({ band, view: traceWindows[band] });
-    else if (step) change(step);
+    else if (factor) change((v) => zoom(v, middle(v), factor));
+    else if (event.shiftKey && way !== 0) change((v) => panned(v, way * spanOf(v) * 0.2));
     else return;
     event.preventDefault();
   };
@@ -45,7 +46,7 @@ export function useTraceView(band: TraceBand, widthPx: number) {
     view,
     moved: view !== traceWindows[band],
     reset: () => setKept({ band, view: traceWindows[band] }),
-    zoomBy: (factor: number) => change((v) => zoomed(v, middle(v), factor)),
+    zoomBy: (factor: number) => change((v) => zoom(v, middle(v), factor)),
     surface: { ref: surface, onKeyDown, ...pointers },
   };
 }
@@ -64,10 +65,11 @@ interface PointerOptions {
   msPerPx: number;
   msAt: (clientX: number) => number;
   change: (next: (view: TraceView) => TraceView) => void;
+  zoom: (view: TraceView, atMs: number, factor: number) => TraceView;
 }
 
 /** One pointer moves the view, two pinch it. */
-function usePointers({ msPerPx, msAt, change }: PointerOptions) {
+function usePointers({ msPerPx, msAt, change, zoom }: PointerOptions) {
   const down = useRef(new Map<number, number>());
   const lift = (event: PointerEvent) => void down.current.delete(event.pointerId);
   return {
@@ -83,7 +85,7 @@ function usePointers({ msPerPx, msAt, change }: PointerOptions) {
       if (other === undefined) change((view) => panned(view, (before - event.clientX) * msPerPx));
       else {
         const factor = Math.abs(before - other) / Math.max(8, Math.abs(event.clientX - other));
-        change((view) => zoomed(view, msAt((event.clientX + other) / 2), factor));
+        change((view) => zoom(view, msAt((event.clientX + other) / 2), factor));
       }
     },
     onPointerUp: lift,
