@@ -1,6 +1,6 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
-import { Suspense, type ReactNode } from 'react';
-import { Link } from 'react-router-dom';
+import { Suspense, useEffect, useRef, type ReactNode } from 'react';
+import { Link, ScrollRestoration, useLocation } from 'react-router-dom';
 import { HeaderLine } from './HeaderLine';
 import { PageLoading } from './PageLoading';
 import { Wordmark } from './Wordmark';
@@ -24,6 +24,8 @@ export function PageFrame({
       _print={{ padding: 0 }}
     >
       <SkipLink />
+      <ScrollRestoration />
+      <FocusOnPage />
       <Flex
         as="header"
         height={{ base: '55px', lg: '74px' }}
@@ -53,6 +55,18 @@ export function PageFrame({
       </main>
     </Box>
   );
+}
+
+/** Another page begins at its beginning for the keyboard and for a screen reader, too. */
+function FocusOnPage() {
+  const { pathname } = useLocation();
+  const shown = useRef(pathname);
+  useEffect(() => {
+    if (shown.current === pathname) return;
+    shown.current = pathname;
+    document.getElementById('page')?.focus({ preventScroll: true });
+  }, [pathname]);
+  return null;
 }
 
 function SkipLink() {

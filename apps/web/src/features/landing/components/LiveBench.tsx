@@ -21,7 +21,7 @@ export function LiveBench({
   chosenHit: number;
   onChooseHit: (hitIndex: number) => void;
 }) {
-  const { spectrum } = usePairSpectrum(report);
+  const { spectrum, error } = usePairSpectrum(report);
   const bench = useChoice(report.agreement);
   const listening = useListening({ report, spectrum, bench });
   // Two choices are enough to hear what a flip does; the line below shows the others as ticks.
@@ -48,7 +48,9 @@ export function LiveBench({
       {spectrum ? (
         <LowEndOfChoices spectrum={spectrum} bench={bench} />
       ) : (
-        <Box height="105px" role="status" aria-label="Loading the picture" />
+        <Box height="105px" role="status" aria-label={error ? undefined : 'Loading the picture'}>
+          {error && 'This picture could not be loaded.'}
+        </Box>
       )}
     </SheetRow>
   );

@@ -1,6 +1,6 @@
 import { Box } from '@chakra-ui/react';
 import type { TakeResponse } from '@thudline/contracts';
-import { lazy, Suspense, useState } from 'react';
+import { lazy, Suspense, useRef, useState } from 'react';
 import { TextButton } from '../../../components/Button';
 import { MarginNote } from './RuledSheet';
 
@@ -10,10 +10,15 @@ const TakeNoteForm = lazy(async () => ({ default: (await import('./TakeNoteForm'
 /** What the player wrote about the take, at the head of the margin, and the way to change it. */
 export function TakeNote({ take }: { take: TakeResponse }) {
   const [editing, setEditing] = useState(false);
+  const edited = useRef(false);
+  const leave = () => {
+    edited.current = true;
+    setEditing(false);
+  };
   if (editing)
     return (
       <Suspense fallback={<Box minHeight="230px" />}>
-        <TakeNoteForm take={take} onDone={() => setEditing(false)} />
+        <TakeNoteForm take={take} onDone={leave} />
       </Suspense>
     );
   return (
@@ -27,7 +32,14 @@ export function TakeNote({ take }: { take: TakeResponse }) {
       )}
       {take.rights.change && (
         <Box paddingLeft={{ base: 0, lg: '20px' }} marginTop="6px" fontSize="small" color="ink.muted">
-          <TextButton onClick={() => setEditing(true)}>
+          <TextButton
+            // After writing, the focus comes back to where it was asked for.
+            ref={(button: HTMLButtonElement | null) => {
+              if (edited.current) button?.focus();
+              edited.current = false;
+            }}
+            onClick={() => setEditing(true)}
+          >
             {take.note ? 'change title or note' : 'add a title or note'}
           </TextButton>
         </Box>

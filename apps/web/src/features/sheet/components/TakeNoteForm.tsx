@@ -24,7 +24,13 @@ export function TakeNoteForm({ take, onDone }: { take: TakeResponse; onDone: () 
   };
   return (
     <Box as="form" onSubmit={(event) => void save(event)} paddingLeft={{ base: 0, lg: '20px' }}>
-      <TextField label="Title" value={title} onChange={setTitle} maxLength={120} />
+      <TextField
+        label="Title"
+        value={title}
+        onChange={setTitle}
+        maxLength={120}
+        ref={(input: HTMLInputElement | null) => input?.focus()}
+      />
       <TextArea label="Note" value={note} onChange={setNote} maxLength={4000} />
       {failure && (
         <Box role="alert" color="fix" fontSize="small" marginTop="8px">

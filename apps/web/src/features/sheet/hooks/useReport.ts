@@ -1,6 +1,6 @@
 import { paths, reportResponse, type ReportResponse } from '@thudline/contracts';
 import useSWR from 'swr';
-import { requestJson } from '../../../lib/apiClient';
+import { errorToShow, requestJson } from '../../../lib/apiClient';
 
 /** What was measured; asked for once the take has a report. */
 export function useReport(takeId: string, hasReport: boolean) {
@@ -8,5 +8,5 @@ export function useReport(takeId: string, hasReport: boolean) {
     hasReport ? paths.report(takeId) : null,
     (path: string) => requestJson(path, reportResponse),
   );
-  return { report: data, error, retry: () => void mutate() };
+  return { report: data, error: errorToShow(data, error), retry: () => void mutate() };
 }

@@ -1,6 +1,6 @@
 import { paths, takeResponse, type TakeResponse } from '@thudline/contracts';
 import useSWR from 'swr';
-import { requestJson } from '../../../lib/apiClient';
+import { errorToShow, requestJson } from '../../../lib/apiClient';
 import { useMeasurementEvents } from '../../takes/hooks/useMeasurementEvents';
 import { isMeasuring } from '../../takes/rowWords';
 
@@ -13,5 +13,5 @@ export function useTake(takeId: string | null) {
     takeIds: data && isMeasuring(data.measurement) ? [data.id] : [],
     askAgain: () => void mutate(),
   });
-  return { take: data, error, retry: () => void mutate() };
+  return { take: data, error: errorToShow(data, error), retry: () => void mutate() };
 }

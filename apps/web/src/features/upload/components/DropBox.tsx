@@ -23,7 +23,7 @@ export function DropBox({ onChoose, minHeight = '236px' }: { onChoose: () => voi
         two mono files, or one stereo file with a microphone on each side
       </Box>
       <Box marginTop="12px" fontSize="caption" color="ink.muted">
-        WAV, up to {limitWords} each. Kept bit for bit, seen by nobody but you.
+        WAV, up to {limitWords} each. Kept bit for bit, seen by nobody until you send it.
       </Box>
     </Flex>
   );

@@ -38,7 +38,7 @@ export function FileRows({ newTake, choose }: { newTake: NewTake; choose: Choose
           <TextButton type="button" color="ink" onClick={() => choose()}>
             choose files
           </TextButton>
-          . Up to {limitWords} each, kept bit for bit, seen by nobody but you.
+          . Up to {limitWords} each, kept bit for bit, seen by nobody until you send it.
         </Box>
         {!sending && newTake.arranged.kind !== 'stereo' && (
           <TextButton type="button" onClick={() => choose('replaced')}>
