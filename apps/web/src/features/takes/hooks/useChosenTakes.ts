@@ -1,4 +1,3 @@
-import type { TakeListItem } from '@thudline/contracts';
 import { useState } from 'react';
 import type { ChosenTake } from '../chosenTakes';
 
@@ -8,7 +7,7 @@ export function useChosenTakes() {
   return {
     chosen,
     isChosen: (take: ChosenTake) => chosen.some(({ id }) => id === take.id),
-    choose: ({ id, number }: TakeListItem, on: boolean) =>
+    choose: ({ id, number }: ChosenTake, on: boolean) =>
       setChosen((now) => (on ? [...now, { id, number }] : now.filter((take) => take.id !== id))),
     clear: () => setChosen([]),
   };

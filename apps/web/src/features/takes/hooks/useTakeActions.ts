@@ -23,14 +23,21 @@ export function useTakeActions() {
   };
 
   return {
-    /** They can be brought back for 30 days. */
-    remove: async (takeIds: readonly string[]) => {
-      await eachOf(takeIds, (takeId) => requestNothing(paths.take(takeId), { method: 'DELETE' })).finally(
-        async () => {
-          await forget(takeIds);
-          await mutate(isTakesKey);
-        },
-      );
+    /** They can be brought back for 30 days. @returns which are gone, and what went wrong with the one after them */
+    remove: async (takeIds: readonly string[]): Promise<{ gone: string[]; error?: unknown }> => {
+      const gone: string[] = [];
+      try {
+        await eachOf(takeIds, async (takeId) => {
+          await requestNothing(paths.take(takeId), { method: 'DELETE' });
+          gone.push(takeId);
+        });
+        return { gone };
+      } catch (error) {
+        return { gone, error };
+      } finally {
+        await forget(gone);
+        await mutate(isTakesKey);
+      }
     },
     restore: async (takeIds: readonly string[]) => {
       await eachOf(takeIds, (takeId) =>

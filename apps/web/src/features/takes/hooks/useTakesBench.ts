@@ -21,8 +21,9 @@ export function useTakesBench(shown: readonly TakeListItem[], onPageEmptied?: ()
     },
     removeChosen: async () => {
       const emptied = shown.every(isChosen);
-      await undo.remove(chosen);
-      clear();
+      const { deleted, error } = await undo.remove(chosen);
+      deleted.forEach((take) => choose(take, false));
+      if (error instanceof Error) throw error;
       if (emptied) await onPageEmptied?.();
     },
     tagChosen: (tags: string[]) =>

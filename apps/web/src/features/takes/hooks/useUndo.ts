@@ -25,10 +25,13 @@ export function useUndo() {
   return {
     words: done && doneWords(done.takes, done.what),
     failure,
+    /** Offers to undo what was done, also where the rest did not work. */
     remove: async (takes: readonly ChosenTake[]) => {
       setFailure('');
-      await remove(takes.map(({ id }) => id));
-      setDone({ takes, what: 'deleted' });
+      const { gone, error } = await remove(takes.map(({ id }) => id));
+      const deleted = takes.filter(({ id }) => gone.includes(id));
+      if (deleted.length > 0) setDone({ takes: deleted, what: 'deleted' });
+      return { deleted, error };
     },
     bringBack,
     undo: done?.what === 'deleted' ? () => void bringBack(done.takes) : undefined,
