@@ -1,5 +1,5 @@
 import { EntityManager } from '@mikro-orm/postgresql';
-import { paths } from '@thudline/contracts';
+import { listTakesResponse, paths } from '@thudline/contracts';
 import { Session } from '../src/auth/entities/session.entity';
 import { AuditEvent } from '../src/audit/entities/audit-event.entity';
 import { HousekeepingService } from '../src/housekeeping/housekeeping.service';
@@ -53,6 +53,24 @@ describe('housekeeping', () => {
     expect(await test.em().count(Take, { owner: juno.me.id })).toBe(2);
     expect(await test.em().findOneOrFail(Take, { id: next.id })).toMatchObject({ followsTake: null });
     expect(await test.em().count(AuditEvent, { kind: 'take-purged', subjectId: gone.id })).toBe(1);
+  });
+
+  it('leaves an hour between the last moment to bring a take back and its end', async () => {
+    const juno = await joined(test);
+    const [late, soon] = [await juno.makeTake(), await juno.makeTake()];
+    for (const { id } of [late, soon]) await juno.delete(paths.take(id)).expect(204);
+    const deletedFor = (id: string, ms: number) =>
+      test.em().nativeUpdate(Take, { id }, { deletedAt: new Date(Date.now() - ms) });
+    await deletedFor(late.id, 30 * dayMs + 60_000);
+    await deletedFor(soon.id, 30 * dayMs - 60_000);
+    await housekeeper().run(new Date());
+    expect(await test.em().count(Take, { id: late.id })).toBe(1);
+    const deleted = listTakesResponse.parse((await juno.get(`${paths.takes}?show=deleted`)).body);
+    expect([deleted.items.map(({ id }) => id), deleted.deletedTotal]).toEqual([[soon.id], 1]);
+    await juno.post(paths.restoreTake(late.id)).expect(404);
+    await juno.post(paths.restoreTake(soon.id)).expect(200);
+    await housekeeper().run(new Date(Date.now() + 60 * 60 * 1000));
+    expect(await test.em().find(Take, { owner: juno.me.id })).toMatchObject([{ id: soon.id }]);
   });
 
   it('removes counters a day old and sessions long over, and nothing that is in use', async () => {

@@ -3,10 +3,11 @@ import { Injectable, Logger } from '@nestjs/common';
 import { AuditEvent } from '../audit/entities/audit-event.entity';
 import { objectKeys } from '../storage/object-keys';
 import { ObjectStoreService } from '../storage/object-store.service';
+import { restorableSince } from '../takes/deleted-takes';
 import { Take } from '../takes/entities/take.entity';
 
-/** "Undo of delete for 30 days": the product's promise. */
-const deletedKeptMs = 30 * 24 * 60 * 60 * 1000;
+/** Longer than any request lasts: what is brought back at the last moment is not being removed. */
+const marginMs = 60 * 60 * 1000;
 /** Taken per run; the next run takes the next ones. */
 const mostAtOnce = 100;
 
@@ -22,7 +23,7 @@ export class TakePurge {
 
   /** Rows go only after the recordings, so that what could not be removed now is found by the next run. */
   async run(now: Date): Promise<void> {
-    const before = new Date(now.getTime() - deletedKeptMs);
+    const before = new Date(restorableSince(now).getTime() - marginMs);
     const over = await this.em
       .fork()
       .find(Take, { deletedAt: { $lt: before } }, { orderBy: { deletedAt: 'asc' }, limit: mostAtOnce });

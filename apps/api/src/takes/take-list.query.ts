@@ -1,4 +1,5 @@
 import { ListTakesRequest, UserSettings } from '@thudline/contracts';
+import { restorableSince } from './deleted-takes';
 import { parseCursor } from './take-cursor';
 
 /** A condition, or an order, with the values for its question marks. */
@@ -53,7 +54,7 @@ export function fits({ show, tag, find }: ListTakesRequest, ownerId: string, set
 }
 
 function shown(show: ListTakesRequest['show'], settings: UserSettings): Sql {
-  if (show === 'deleted') return plain('t.deleted_at is not null');
+  if (show === 'deleted') return { text: 't.deleted_at > ?', values: [restorableSince()] };
   const there = plain('t.deleted_at is null');
   switch (show) {
     case 'every':

@@ -7,6 +7,7 @@ import { MeasurementsService } from '../measuring/measurements.service';
 import { noListFigures } from '../reports/reports.mapper';
 import { ReportsService } from '../reports/reports.service';
 import { settingsOf } from '../users/user-settings';
+import { restorableSince } from './deleted-takes';
 import { Take } from './entities/take.entity';
 import { cursorText, TakeCursor } from './take-cursor';
 import { Sql, takeListQuery } from './take-list.query';
@@ -15,7 +16,7 @@ type Totals = Pick<ListTakesResponse, 'everyTotal' | 'deletedTotal'>;
 
 const countTakes = `
   select count(*) filter (where deleted_at is null)::int as "everyTotal",
-    count(*) filter (where deleted_at is not null)::int as "deletedTotal"
+    count(*) filter (where deleted_at > ?)::int as "deletedTotal"
   from take where owner_id = ?`;
 
 const usedTags = `
@@ -37,7 +38,7 @@ export class TakeListsService {
     const [rows, [fitting], [totals], tags] = await Promise.all([
       this.rows<TakeCursor>(query.ids),
       this.rows<{ total: number }>(query.count),
-      this.rows<Totals>({ text: countTakes, values: owner }),
+      this.rows<Totals>({ text: countTakes, values: [restorableSince(), ...owner] }),
       this.rows<{ tag: string }>({ text: usedTags, values: owner }),
     ]);
     const page = rows.slice(0, request.limit);

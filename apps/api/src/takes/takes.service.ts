@@ -5,7 +5,9 @@ import { readOnly } from '../access/read-only';
 import { TakeRights } from '../access/take-rights';
 import { Viewer } from '../access/viewer';
 import { AuditService } from '../audit/audit.service';
+import { notFound } from '../errors/app-error';
 import { MeasurementsService } from '../measuring/measurements.service';
+import { restorableSince } from './deleted-takes';
 import { TakeFile } from './entities/take-file.entity';
 import { TakeTrack } from './entities/take-track.entity';
 import { Take } from './entities/take.entity';
@@ -49,10 +51,15 @@ export class TakesService {
     return this.whole(take, rights);
   }
 
-  /** A take that was deleted while it waited to be measured is measured after all. */
+  /**
+   * A take that was deleted while it waited to be measured is measured after all.
+   *
+   * @throws {AppError} `not-found` when it was deleted too long ago: its recordings may be going at this moment
+   */
   async restore(viewer: Viewer, takeId: string, rights: TakeRights): Promise<TakeResponse> {
     const take = await this.em.findOneOrFail(Take, { id: takeId });
     if (take.deletedAt) {
+      if (take.deletedAt < restorableSince()) throw notFound();
       take.deletedAt = null;
       this.audit.record({ kind: 'take-restored', userId: viewer.user.id, subjectId: take.id });
       await this.em.flush();
