@@ -10,6 +10,7 @@ import { MailQueue } from '../mail/mail-queue';
 import { ThrottleService } from '../throttle/throttle.service';
 import { OneTimeToken } from '../tokens/entities/one-time-token.entity';
 import { linkEnded, OneTimeTokensService } from '../tokens/one-time-tokens.service';
+import { User } from '../users/entities/user.entity';
 import { PasswordsService } from './passwords.service';
 import { SessionsService } from './sessions.service';
 
@@ -64,11 +65,7 @@ export class AccountLinksService {
     const user = await this.tokens.use('reset', token);
     user.passwordHash = passwordHash;
     user.emailVerifiedAt ??= new Date();
-    await this.em.nativeUpdate(
-      OneTimeToken,
-      { user, kind: { $in: ['reset', 'phone'] }, usedAt: null },
-      { usedAt: new Date() },
-    );
+    await this.endLinks(user);
     this.audit.record({ kind: 'password-reset', userId: user.id, address });
     await this.em.flush();
     await this.sessions.endAll(user);
@@ -82,9 +79,16 @@ export class AccountLinksService {
     if (!(await this.passwords.matches(user.passwordHash, request.oldPassword))) throw wrongPassword();
     await this.throttle.clear(key);
     user.passwordHash = await this.passwords.hash(request.password);
+    await this.endLinks(user);
     this.audit.record({ kind: 'password-changed', userId: user.id, address });
     await this.em.flush();
     await this.sessions.endAll(user, viewer.sessionId);
+  }
+
+  /** Whoever held a link with the old password holds none with the new one. */
+  private async endLinks(user: User): Promise<void> {
+    const open = { user, kind: { $in: ['reset', 'phone'] as const }, usedAt: null };
+    await this.em.nativeUpdate(OneTimeToken, open, { usedAt: new Date() });
   }
 
   /** A token can't be guessed, so this only keeps the database from being asked for nothing. */
