@@ -1,118 +1,23 @@
-import { Box, chakra } from '@chakra-ui/react';
+import { Box } from '@chakra-ui/react';
 import type { ReportResponse, TakeResponse, UserSettings } from '@thudline/contracts';
-import { figureGroups, type FigureGroup, type FigureRow } from './figureRows';
-import { FiguresOut } from './FiguresOut';
-import { FileFacts } from './FileFacts';
-import { PictureTitle, SheetSection } from './SheetSection';
+import { lazy, Suspense } from 'react';
+import { SheetSection } from './SheetSection';
 
-/** Everything that was measured, with unit, definition and source. */
-export function FiguresSection({
-  take,
-  report,
-  settings,
-}: {
+/** Stands at the end of the sheet: the line above reads before it is there. */
+const FigureTables = lazy(async () => ({ default: (await import('./FigureTables')).FigureTables }));
+const tablesHeight = '1180px';
+
+/** All figures, at the end of the sheet. */
+export function FiguresSection(props: {
   take: TakeResponse;
   report: ReportResponse;
   settings: UserSettings;
 }) {
-  const groups = figureGroups(report, settings);
   return (
     <SheetSection id="figures" title="All figures">
-      <FiguresOut {...{ take, report, groups }} />
-      <Box _print={{ display: 'grid', gridTemplateColumns: '5fr 4fr', columnGap: '32px' }}>
-        {groups.map((group) => (
-          <FigureTable key={group.title} group={group} />
-        ))}
-      </Box>
-      <PictureTitle>Files</PictureTitle>
-      <FileFacts take={take} dspVersion={report.dspVersion} />
+      <Suspense fallback={<Box height={tablesHeight} role="status" aria-label="Loading the figures" />}>
+        <FigureTables {...props} />
+      </Suspense>
     </SheetSection>
-  );
-}
-
-const cell = {
-  textAlign: 'right',
-  paddingY: { base: '7px', _print: '2px' },
-  paddingLeft: '8px',
-  verticalAlign: 'top',
-  whiteSpace: 'nowrap',
-} as const;
-
-function FigureTable({ group }: { group: FigureGroup }) {
-  return (
-    <div>
-      <PictureTitle>{group.title}</PictureTitle>
-      <chakra.table width="100%" fontSize="small" marginTop="4px">
-        <thead>
-          <chakra.tr borderBottom="1px solid" borderColor="rule" color="ink.muted" fontSize="caption">
-            <chakra.th scope="col" textAlign="left" fontWeight={400} paddingY="4px">
-              Figure
-            </chakra.th>
-            {group.columns.map((column) => (
-              <chakra.th key={column} scope="col" fontWeight={400} {...cell} paddingY="4px">
-                {column}
-              </chakra.th>
-            ))}
-            <chakra.th
-              scope="col"
-              textAlign="left"
-              fontWeight={400}
-              paddingLeft="12px"
-              width={{ base: '64px', md: '120px', _print: '72px' }}
-            >
-              unit
-            </chakra.th>
-          </chakra.tr>
-        </thead>
-        <tbody>
-          {group.rows.map((row) => (
-            <Row key={row.label + row.unit} row={row} />
-          ))}
-        </tbody>
-      </chakra.table>
-    </div>
-  );
-}
-
-function Row({ row }: { row: FigureRow }) {
-  return (
-    <chakra.tr borderBottom="1px solid" borderColor="rule">
-      <chakra.th
-        scope="row"
-        textAlign="left"
-        fontWeight={400}
-        paddingY={{ base: '3px', _print: 0 }}
-        paddingRight="12px"
-      >
-        <details>
-          <chakra.summary
-            cursor="pointer"
-            paddingY={{ base: '4px', _print: '2px' }}
-            listStylePosition="outside"
-            _print={{ listStyleType: 'none' }}
-            title="What is this?"
-          >
-            {row.label}
-          </chakra.summary>
-          <Box color="ink.muted" fontSize="caption" maxWidth="380px" paddingBottom="6px">
-            {row.definition} Source: {row.source}.
-          </Box>
-        </details>
-      </chakra.th>
-      {row.values.map((value, i) => (
-        <chakra.td key={i} fontWeight={600} {...cell}>
-          {value}
-        </chakra.td>
-      ))}
-      <chakra.td
-        color="ink.muted"
-        paddingLeft="12px"
-        paddingY={{ base: '7px', _print: '2px' }}
-        verticalAlign="top"
-        fontSize="caption"
-      >
-        {row.unit}
-      </chakra.td>
-    </chakra.tr>
   );
 }
