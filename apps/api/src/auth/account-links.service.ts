@@ -62,13 +62,12 @@ export class AccountLinksService {
     await this.countTry(address);
     if (!(await this.tokens.find('reset', token))) throw linkEnded();
     const passwordHash = await this.passwords.hash(password);
-    const user = await this.tokens.use('reset', token);
-    user.passwordHash = passwordHash;
-    user.emailVerifiedAt ??= new Date();
-    await this.endLinks(user);
-    this.audit.record({ kind: 'password-reset', userId: user.id, address });
-    await this.em.flush();
-    await this.sessions.endAll(user);
+    await this.em.transactional(async () => {
+      const user = await this.tokens.use('reset', token);
+      user.emailVerifiedAt ??= new Date();
+      this.audit.record({ kind: 'password-reset', userId: user.id, address });
+      await this.replacePassword(user, passwordHash);
+    });
   }
 
   /** Ends every session but the one that asks. */
@@ -78,17 +77,23 @@ export class AccountLinksService {
     const { user } = viewer;
     if (!(await this.passwords.matches(user.passwordHash, request.oldPassword))) throw wrongPassword();
     await this.throttle.clear(key);
-    user.passwordHash = await this.passwords.hash(request.password);
-    await this.endLinks(user);
-    this.audit.record({ kind: 'password-changed', userId: user.id, address });
-    await this.em.flush();
-    await this.sessions.endAll(user, viewer.sessionId);
+    const passwordHash = await this.passwords.hash(request.password);
+    await this.em.transactional(async () => {
+      this.audit.record({ kind: 'password-changed', userId: user.id, address });
+      await this.replacePassword(user, passwordHash, viewer.sessionId);
+    });
   }
 
-  /** Whoever held a link with the old password holds none with the new one. */
-  private async endLinks(user: User): Promise<void> {
+  /**
+   * Within a transaction: password, links and sessions change together or not at all. Whoever held a link or a session
+   * with the old password holds none with the new one.
+   */
+  private async replacePassword(user: User, passwordHash: string, savedSessionId?: string): Promise<void> {
+    user.passwordHash = passwordHash;
+    await this.em.flush();
     const open = { user, kind: { $in: ['reset', 'phone'] as const }, usedAt: null };
     await this.em.nativeUpdate(OneTimeToken, open, { usedAt: new Date() });
+    await this.sessions.endAll(user, savedSessionId);
   }
 
   /** A token can't be guessed, so this only keeps the database from being asked for nothing. */
