@@ -8,6 +8,9 @@ import { MeasurementStates } from './measurement-states';
 /** Proxies commonly close a line after 30 to 60 silent seconds (common practice, no source). */
 const beatMs = 20_000;
 
+/** More tabs than anybody reads; a browser itself opens six to one server, or a hundred over HTTP/2 (common practice, no source). */
+export const mostStreamsOfSession = 20;
+
 /** Every open stream of this process, and what is passed on to which. */
 @Injectable()
 export class EventStreams implements OnApplicationBootstrap, BeforeApplicationShutdown {
@@ -15,6 +18,7 @@ export class EventStreams implements OnApplicationBootstrap, BeforeApplicationSh
   private readonly streams = new Set<EventStream>();
   private changed = new Set<string>();
   private isTelling = false;
+  private isBeating = false;
   private beating: NodeJS.Timeout | undefined;
 
   constructor(
@@ -41,6 +45,9 @@ export class EventStreams implements OnApplicationBootstrap, BeforeApplicationSh
   /** Starts with the full state; changes from then on follow. */
   async add(stream: EventStream): Promise<void> {
     this.streams.add(stream);
+    const { sessionId } = stream.viewer;
+    const ofSession = [...this.streams].filter(({ viewer }) => viewer.sessionId === sessionId);
+    for (const oldest of ofSession.slice(0, -mostStreamsOfSession)) this.close(oldest);
     for (const event of await this.states.of([...stream.takeIds])) stream.send(eventNames.measurement, event);
   }
 
@@ -78,12 +85,24 @@ export class EventStreams implements OnApplicationBootstrap, BeforeApplicationSh
       if (stream.viewer.userId === ownerId) stream.send(eventNames.takeAdded, event);
   }
 
-  /** Whoever signed out, or was locked out, hears nothing more. */
+  private close(stream: EventStream): void {
+    this.streams.delete(stream);
+    stream.end();
+  }
+
+  /** Whoever signed out, or was locked out, hears nothing more. One beat waits for the other. */
   async beat(): Promise<void> {
-    for (const stream of this.streams) {
-      const isIn = await this.sessions.isLive(stream.viewer.sessionId).catch(() => true);
-      if (isIn) stream.beat();
-      else stream.end();
+    if (this.isBeating) return;
+    this.isBeating = true;
+    try {
+      const asked = [...this.streams];
+      const live = await this.sessions.liveAmong([...new Set(asked.map(({ viewer }) => viewer.sessionId))]);
+      for (const stream of asked) if (!live.has(stream.viewer.sessionId)) this.close(stream);
+    } catch (error) {
+      this.logger.warn(error, 'It could not be told whose session is over; the next beat asks again');
+    } finally {
+      this.isBeating = false;
     }
+    for (const stream of this.streams) stream.beat();
   }
 }

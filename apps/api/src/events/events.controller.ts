@@ -26,11 +26,10 @@ export class EventsController {
     @Query() { takes }: EventsDto,
     @Res() response: Response,
   ): Promise<void> {
+    const own = await this.access.ownAmong(viewer, takes);
+    // Whoever left meanwhile closes nothing any more, and would stay in the list for ever.
+    if (response.destroyed) return;
     const { user, sessionId } = viewer;
-    const rights = await Promise.all(
-      takes.map(async (id) => ({ id, ...(await this.access.take({ viewer, shareIds: [] }, id)) })),
-    );
-    const own = rights.filter((each) => each.own).map(({ id }) => id);
     const stream = new EventStream(response, { userId: user.id, sessionId }, new Set(own));
     response.on('close', () => this.streams.remove(stream));
     await this.streams.add(stream);
