@@ -37,6 +37,10 @@ export const trackReport = z.object({
     runCount: z.int().nonnegative(),
     clippedSamples: z.int().nonnegative(),
   }),
+  /** Tops look squashed without standing still: never called clipped. Null in a take measured before it was. */
+  looksFlattened: z.boolean().nullable(),
+  /** Where samples seem to be missing. Null in a take measured before it was. */
+  dropouts: z.object({ count: z.int().nonnegative(), firstAtS: figure }).nullable(),
   /** Mean of all samples, linear, full scale 1. */
   dcOffset: z.number(),
   noiseFloorDbfs: figure,
@@ -128,6 +132,9 @@ export const findingTopics = [
   'overhead-level',
   'noise',
   'dc-offset',
+  'flattened',
+  'overs',
+  'dropouts',
   'arrival',
   'adding-up',
   'balance',

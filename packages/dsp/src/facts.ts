@@ -44,6 +44,12 @@ export interface TrackFacts {
     readonly runCount: number;
     readonly clippedSamples: number;
   };
+  /** Tops look squashed without standing still; missing in facts measured before it was, as `dropouts`. */
+  readonly looksFlattened?: boolean;
+  readonly dropouts?: {
+    readonly count: number;
+    readonly firstAtS: number | null;
+  };
   readonly dcOffset: number;
   readonly noiseFloorDbfs: number | null;
   readonly noiseFloorReason: NoiseFloorReason | null;

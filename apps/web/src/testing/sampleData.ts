@@ -71,6 +71,8 @@ const track = (overrides: Partial<TrackReport>): TrackReport => ({
   crestFactorDb: 21.4,
   integratedLufs: -23.8,
   clipping: { runs: [], runCount: 0, clippedSamples: 0 },
+  looksFlattened: false,
+  dropouts: { count: 0, firstAtS: null },
   dcOffset: 0.00002,
   noiseFloorDbfs: -71.2,
   noiseFloorReason: null,

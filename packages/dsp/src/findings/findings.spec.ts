@@ -14,9 +14,12 @@ import { addingUpFinding } from './addingUpFinding';
 import { arrivalFinding } from './arrivalFinding';
 import { dcOffsetFindings } from './dcOffsetFindings';
 import { filesFindings } from './filesFindings';
+import { dropoutFindings } from './dropoutFindings';
 import { findings } from './findings';
+import { flattenedFindings } from './flattenedFindings';
 import { levelFinding } from './levelFinding';
 import { noiseFinding } from './noiseFinding';
+import { oversFindings } from './oversFindings';
 
 const reader = { lengthUnit: 'metre', target: defaultTarget } as const;
 const kickLevel = (kick: ReportFigures['kick']) => levelFinding(reportOf({ kick }), 'kick');
@@ -178,6 +181,44 @@ describe('the offset finding', () => {
   });
 });
 
+describe('the findings about what happened to the wave', () => {
+  it('are only there where there is something to say', () => {
+    const old = trackFigures({ looksFlattened: null, dropouts: null });
+    for (const kick of [trackFigures(), old, clippedTrack]) {
+      const figures = reportOf({ kick });
+      expect([dropoutFindings, flattenedFindings, oversFindings].flatMap((rule) => rule(figures))).toEqual(
+        [],
+      );
+    }
+  });
+
+  it('tell where it seems to drop out', () => {
+    const told = (count: number) =>
+      dropoutFindings(reportOf({ kick: trackFigures({ dropouts: { count, firstAtS: 12.34 } }) }))[0];
+    expect(told(3)).toMatchObject({ topic: 'dropouts', status: 'watch' });
+    expect(told(3).sentence).toBe(
+      'The kick seems to drop out in three places, the first at 12.3 s; raise the interface’s buffer size and record again.',
+    );
+    expect(told(1).sentence).toContain('in one place, at 12.3 s;');
+  });
+
+  it('tell of squashed peaks, but not where they are clipped anyway', () => {
+    const squashed = { looksFlattened: true };
+    expect(flattenedFindings(reportOf({ overhead: trackFigures(squashed) }))).toMatchObject([
+      { topic: 'flattened', status: 'watch' },
+    ]);
+    expect(flattenedFindings(reportOf({ overhead: { ...clippedTrack, ...squashed } }))).toEqual([]);
+  });
+
+  it('tell of a float file beyond full scale that nothing is lost', () => {
+    const [over] = oversFindings(reportOf({ kick: trackFigures({ samplePeakDbfs: 2.31 }) }));
+    expect(over.sentence).toBe(
+      'The kick goes 2.3 dB over full scale, unharmed in a float file; turn it down 2.3 dB before saving it as 24-bit.',
+    );
+    expect(oversFindings(reportOf({ kick: { ...clippedTrack, samplePeakDbfs: 2.31 } }))).toEqual([]);
+  });
+});
+
 describe('all findings', () => {
   it('come in the order of the sheet and keep what was said of the files', () => {
     const files = filesFindings([{ kind: 'same-file-twice' }]);
@@ -223,6 +264,8 @@ const everything = (): ReportFigures[] => {
     trackFigures({ loudestHitDbfs: -14, noiseFloorDbfs: null, noiseFloorReason: 'too-short' }),
     trackFigures({ loudestHitDbfs: -42.4, noiseFloorDbfs: null }),
     trackFigures({ noiseFloorDbfs: -32 }),
+    trackFigures({ looksFlattened: true, samplePeakDbfs: 12.4, dropouts: { count: 123, firstAtS: 3599.94 } }),
+    trackFigures({ dropouts: { count: 1, firstAtS: 0 } }),
     { ...clippedTrack, clipping: { runs: [], runCount: 12345, clippedSamples: 99999 } },
     ...noise.map((noiseFloorReason) => trackFigures({ noiseFloorDbfs: null, noiseFloorReason })),
   ];

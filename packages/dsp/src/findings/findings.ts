@@ -3,8 +3,11 @@ import { addingUpFinding } from './addingUpFinding';
 import { arrivalFinding } from './arrivalFinding';
 import { balanceFindings } from './balanceFindings';
 import { dcOffsetFindings } from './dcOffsetFindings';
+import { dropoutFindings } from './dropoutFindings';
+import { flattenedFindings } from './flattenedFindings';
 import { levelFinding } from './levelFinding';
 import { noiseFinding } from './noiseFinding';
+import { oversFindings } from './oversFindings';
 
 /**
  * Everything the sheet says, in the order of the sheet.
@@ -16,6 +19,9 @@ export function findings(figures: ReportFigures, reader: Reader): Finding[] {
     ...figures.findings.filter((finding) => finding.topic === 'files'),
     levelFinding(figures, 'kick'),
     levelFinding(figures, 'overhead'),
+    ...oversFindings(figures),
+    ...flattenedFindings(figures),
+    ...dropoutFindings(figures),
     noiseFinding(figures),
     ...dcOffsetFindings(figures),
     arrivalFinding(figures, reader),

@@ -26,9 +26,11 @@ export function reportLine(
     ...opening,
     ...clipped(figures),
     ...missing(figures),
+    ...dropouts(figures),
     ...flip(figures),
     ...hot(figures),
     ...low(figures),
+    ...squashed(figures),
     ...noise(figures),
     ...unsure(figures),
   ].slice(0, SENTENCES);
@@ -65,6 +67,22 @@ function missing(figures: ReportFigures): LineSentence[] {
   return figures.agreement.reason === 'no-kick-hits'
     ? [{ action: 'Record eight hard kicks:', reason: 'no kick hit was found in this take.' }]
     : [];
+}
+
+function dropouts(figures: ReportFigures): LineSentence[] {
+  return ROLES.filter((role) => (figures[role].dropouts?.count ?? 0) > 0).map((role) => ({
+    action: 'Raise the buffer size:',
+    reason: `the ${role} seems to drop out in ${counted(figures[role].dropouts?.count ?? 0, 'place')}.`,
+  }));
+}
+
+function squashed(figures: ReportFigures): LineSentence[] {
+  return ROLES.filter((role) => figures[role].looksFlattened && figures[role].level !== 'clipped').map(
+    (role) => ({
+      action: 'Switch off any limiter:',
+      reason: `the loudest ${role} peaks look squashed.`,
+    }),
+  );
 }
 
 function flip({ agreement }: ReportFigures): LineSentence[] {

@@ -106,6 +106,9 @@ describe('before the next take', () => {
   });
 });
 
+const droppedOut = trackFigures({ dropouts: { count: 13, firstAtS: 3.2 } });
+const squashed = trackFigures({ looksFlattened: true });
+
 describe('a take in the table', () => {
   const all = [
     [
@@ -118,6 +121,8 @@ describe('a take in the table', () => {
     ['watch', 'Overhead is low. Turn it up 12 dB.', reportOf({ overhead: lowTrack })],
     ['watch', 'Kick is hot. Turn it down 6.5 dB.', reportOf({ kick: hotTrack })],
     ['good', 'Levels are right. Polarity: either way.', eitherWay],
+    ['watch', 'Overhead seems to drop out. Listen at 13 places.', reportOf({ overhead: droppedOut })],
+    ['watch', 'Overhead looks squashed. Switch off any limiter.', reportOf({ overhead: squashed })],
     ['watch', 'Noisy overhead: −52 dBFS. Look for the source.', noisy],
     ['fix', 'Flip the overhead. Look for the noise.', { ...noisy, agreement: flipFigures }],
     ['cannot-tell', 'No kick hit found. Play eight hard ones.', noHits],

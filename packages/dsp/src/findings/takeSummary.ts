@@ -11,8 +11,10 @@ export function takeSummary(figures: ReportFigures): TakeSummary {
   return (
     clipped(figures) ??
     missing(figures) ??
+    droppedOut(figures) ??
     flip(figures) ??
     gain(figures) ??
+    squashed(figures) ??
     noise(figures) ??
     unsure(figures) ??
     good(figures)
@@ -35,6 +37,20 @@ function missing(figures: ReportFigures): TakeSummary | null {
   if (silent) return { status: 'cannot-tell', strong: `The ${silent} is silent.`, rest: 'Check its cable.' };
   if (figures.agreement.reason !== 'no-kick-hits') return null;
   return { status: 'cannot-tell', strong: 'No kick hit found.', rest: 'Play eight hard ones.' };
+}
+
+function droppedOut(figures: ReportFigures): TakeSummary | null {
+  const role = ROLES.find((each) => (figures[each].dropouts?.count ?? 0) > 0);
+  if (!role) return null;
+  const { count } = figures[role].dropouts ?? { count: 0 };
+  const rest = `Listen at ${count === 1 ? 'that place' : `${countText(count)} places`}.`;
+  return { status: 'watch', strong: `${capitalised(role)} seems to drop out.`, rest };
+}
+
+function squashed(figures: ReportFigures): TakeSummary | null {
+  const role = ROLES.find((each) => figures[each].looksFlattened);
+  if (!role) return null;
+  return { status: 'watch', strong: `${capitalised(role)} looks squashed.`, rest: 'Switch off any limiter.' };
 }
 
 function flip(figures: ReportFigures): TakeSummary | null {

@@ -97,9 +97,22 @@ describe('report figures', () => {
 
   it('have null for what wasn’t measured yet when the facts were stored', async () => {
     const take = await facts();
-    const tracks = take.tracks.map(({ truePeakDbtp: _peak, integratedLufs: _loudness, ...track }) => track);
+    const tracks = take.tracks.map(
+      ({
+        truePeakDbtp: _peak,
+        integratedLufs: _loudness,
+        looksFlattened: _flattened,
+        dropouts: _dropouts,
+        ...track
+      }) => track,
+    );
     const figures = reportFigures({ ...take, tracks }, { target: defaultTarget, temperatureC: 20 });
-    expect(figures.kick).toMatchObject({ truePeakDbtp: null, integratedLufs: null });
+    expect(figures.kick).toMatchObject({
+      truePeakDbtp: null,
+      integratedLufs: null,
+      looksFlattened: null,
+      dropouts: null,
+    });
     expect(contract.parse(figures)).toEqual(figures);
   });
 

@@ -57,6 +57,8 @@ function trackReport({ role: _role, ...track }: TrackFacts, target: Target): Tra
     ...track,
     truePeakDbtp: track.truePeakDbtp ?? null,
     integratedLufs: track.integratedLufs ?? null,
+    looksFlattened: track.looksFlattened ?? null,
+    dropouts: track.dropouts ?? null,
     clipping: { ...track.clipping, runs: [...track.clipping.runs] },
     level: levelOf(track, target),
     gainChangeDb: gainChangeDb(track, target),

@@ -31,7 +31,17 @@ export interface Reader {
 export type Level = 'clipped' | 'hot' | 'on-target' | 'low';
 export type FindingStatus = 'good' | 'watch' | 'fix' | 'cannot-tell';
 export type FindingTopic =
-  'files' | 'kick-level' | 'overhead-level' | 'noise' | 'dc-offset' | 'arrival' | 'adding-up' | 'balance';
+  | 'files'
+  | 'kick-level'
+  | 'overhead-level'
+  | 'noise'
+  | 'dc-offset'
+  | 'flattened'
+  | 'overs'
+  | 'dropouts'
+  | 'arrival'
+  | 'adding-up'
+  | 'balance';
 
 export interface TrackReport {
   samplePeakDbfs: number | null;
@@ -43,6 +53,9 @@ export interface TrackReport {
   crestFactorDb: number | null;
   integratedLufs: number | null;
   clipping: { runs: ClipRun[]; runCount: number; clippedSamples: number };
+  /** Null in a take measured before it was, as `dropouts`. */
+  looksFlattened: boolean | null;
+  dropouts: { count: number; firstAtS: number | null } | null;
   dcOffset: number;
   noiseFloorDbfs: number | null;
   noiseFloorReason: NoiseFloorReason | null;

@@ -17,6 +17,8 @@ export function trackFigures(change: Partial<TrackReport> = {}): TrackReport {
     crestFactorDb: 21.6,
     integratedLufs: -29.5,
     clipping: { runs: [], runCount: 0, clippedSamples: 0 },
+    looksFlattened: false,
+    dropouts: { count: 0, firstAtS: null },
     dcOffset: 0,
     noiseFloorDbfs: -72,
     noiseFloorReason: null,

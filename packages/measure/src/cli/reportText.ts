@@ -67,6 +67,12 @@ function levelLines({ kick, overhead }: ReportFigures): string[] {
     row('  clipping', ({ clipping }) =>
       clipping.runCount === 0 ? 'none' : `${clipping.runCount} runs, ${clipping.clippedSamples} samples`,
     ),
+    row('  looks squashed', ({ looksFlattened }) =>
+      looksFlattened === null ? '–' : looksFlattened ? 'yes' : 'no',
+    ),
+    row('  dropouts', ({ dropouts }) =>
+      dropouts === null ? '–' : `${dropouts.count}${place(dropouts.firstAtS)}`,
+    ),
     row('  DC offset', (track) => minus(track.dcOffset.toFixed(6))),
     row('  noise floor', (track) =>
       track.noiseFloorDbfs === null

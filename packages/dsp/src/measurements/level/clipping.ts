@@ -17,7 +17,12 @@ const floatOver = 1.0001;
 /** Two samples beyond full scale are one flat top when they differ by no more than float32 rounding, 2^-22. */
 const floatRounding = 2 ** -22;
 /** Runs that are kept; all of them are counted (packages/contracts, `trackReport`). */
-const runsKept = 200;
+export const runsKept = 200;
+
+/** @returns the size from which a sample of the file counts as at full scale */
+export function fullScaleOf(quantisationStep: number | null): number {
+  return quantisationStep === null ? floatFullScale : 1 - stepsFromFullScale * quantisationStep;
+}
 
 /**
  * Where a track stood still at full scale: runs of three or more successive samples of one sign.
@@ -30,7 +35,7 @@ const runsKept = 200;
 export function createClipping(options: { readonly quantisationStep: number | null }): Clipping {
   const { quantisationStep } = options;
   const isFloat = quantisationStep === null;
-  const threshold = isFloat ? floatFullScale : 1 - stepsFromFullScale * quantisationStep;
+  const threshold = fullScaleOf(quantisationStep);
   const runs: ClipRun[] = [];
   let closed = { runCount: 0, clippedSamples: 0 };
   let run = { start: 0, length: 0, isPositive: true, largest: 0, last: 0 };

@@ -88,6 +88,8 @@ describe('peak and power', () => {
       integratedLufs: null,
       dcOffset: 0,
       clipping: { runs: [], runCount: 0, clippedSamples: 0 },
+      looksFlattened: false,
+      dropouts: { count: 0, firstAtS: null },
       noiseFloorDbfs: null,
       noiseFloorReason: 'digital-silence',
     });

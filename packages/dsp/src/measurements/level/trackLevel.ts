@@ -1,6 +1,9 @@
 import { assertBetween, assertPositive } from '../../assert';
 import type { TrackFacts } from '../../facts';
-import { createClipping } from './clipping';
+import { createClipping, fullScaleOf } from './clipping';
+import { createDropouts } from './dropouts';
+import { createFlatTops } from './flatTops';
+import { joinedRuns } from './joinedRuns';
 import { createLoudness } from '../loudness/loudness';
 import { createNoiseFloor } from './noiseFloor';
 import { createPeakAndPower } from './peakAndPower';
@@ -37,18 +40,25 @@ export function createTrackLevel(options: TrackLevelOptions): TrackLevel {
   const truePeak = createTruePeak(options);
   const loudness = createLoudness(options);
   // The first one refuses what is no number.
-  const meters = [peakAndPower, clipping, noiseFloor, truePeak, loudness];
+  const flatTops = createFlatTops({ ...options, fullScale: fullScaleOf(options.quantisationStep) });
+  const dropouts = createDropouts(options);
+  const meters = [peakAndPower, clipping, noiseFloor, truePeak, loudness, flatTops, dropouts];
 
   return {
     push(block) {
       for (const meter of meters) meter.push(block);
     },
-    result: () => ({
-      ...peakAndPower.result(),
-      ...truePeak.result(),
-      ...loudness.result(),
-      clipping: clipping.result(),
-      ...noiseFloor.result(),
-    }),
+    result() {
+      const { flat, looksFlattened } = flatTops.result();
+      return {
+        ...peakAndPower.result(),
+        ...truePeak.result(),
+        ...loudness.result(),
+        clipping: joinedRuns(clipping.result(), flat),
+        looksFlattened,
+        ...dropouts.result(),
+        ...noiseFloor.result(),
+      };
+    },
   };
 }

@@ -77,7 +77,8 @@ const trackRows: TrackRow[] = [
     label: 'Clipped places',
     unit: '',
     of: (t) => `${t.clipping.runCount}`,
-    definition: 'Three or more samples in a row, of one sign, within two quantisation steps of full scale.',
+    definition:
+      'Three or more samples in a row, of one sign, within two quantisation steps of full scale; and tops that stand still for four samples below it, near the take’s own peak, in two places or more.',
     source: 'common practice, no source',
   },
   {
@@ -86,6 +87,22 @@ const trackRows: TrackRow[] = [
     of: (t) => `${t.clipping.clippedSamples}`,
     definition: 'Samples in those places.',
     source: 'common practice, no source',
+  },
+  {
+    label: 'Looks squashed',
+    unit: '',
+    of: (t) => (t.looksFlattened === null ? missing : t.looksFlattened ? 'yes' : 'no'),
+    definition:
+      'Three places or more near the peak where three samples lie within 0.4 %, entered and left by steps four times as large. Never called clipped.',
+    source: ownDefinition,
+  },
+  {
+    label: 'Dropouts',
+    unit: '',
+    of: (t) => (t.dropouts === null ? missing : `${t.dropouts.count}`),
+    definition:
+      'Sound that stops at zero and comes back from one sample to the next, or a jump no wave makes.',
+    source: ownDefinition,
   },
   {
     label: 'RMS',

@@ -43,6 +43,14 @@ export function balanceWord({ differenceDb }: Balance): string {
   return differenceDb > 0 ? 'cymbals louder' : 'drums louder';
 }
 
-export const levelTopics = ['kick-level', 'overhead-level', 'noise', 'dc-offset'] as const;
+export const levelTopics = [
+  'kick-level',
+  'overhead-level',
+  'overs',
+  'flattened',
+  'dropouts',
+  'noise',
+  'dc-offset',
+] as const;
 export const addingUpTopics = ['adding-up', 'arrival'] as const;
 export const balanceTopics = ['balance'] as const;

@@ -1,0 +1,153 @@
+import { amplitudeDb } from '../../decibel';
+import type { ClipRun, TrackFacts } from '../../facts';
+import { runsKept } from './clipping';
+
+export interface FlatTops {
+  push(block: Float32Array): void;
+  result(): {
+    /** Flat tops below full scale, as clipping; none where there are fewer than two. */
+    readonly flat: TrackFacts['clipping'];
+    readonly looksFlattened: boolean;
+  };
+}
+
+export interface FlatTopsOptions {
+  readonly sampleRateHz: number;
+  readonly quantisationStep: number | null;
+  /** From this size on a top is the business of `createClipping`. */
+  readonly fullScale: number;
+}
+
+/** All of 2-measurements.md section 2: how long, how near the take's own peak, how loud and how often. */
+const shortestAt48 = 4;
+const nearPeak = 10 ** (-0.1 / 20);
+const quietestPeak = 10 ** (-30 / 20);
+const fewestFlat = 2;
+const likeWithin = 0.004;
+const shortestLike = 3;
+const steeper = 4;
+/** A flattened top is looked for near the peak: quieter ones say nothing of the preamp. Our choice. */
+const likeNearPeak = 10 ** (-1 / 20);
+/**
+ * The round top of a slow wave stands still too once it is quantised, for four samples and more at low frequencies. It is
+ * left and entered by at most four steps in all (a parabola that stays within one step over four samples), a cut one by
+ * far more. Our choice, beyond the rule of section 2.
+ */
+const stepsOfRoundTop = 6;
+/** A float file may hold what once was 16-bit. */
+const floatStep = 2 ** -15;
+
+interface Tops {
+  count: number;
+  samples: number;
+  runs: ClipRun[];
+}
+
+/**
+ * Tops that stand still below full scale: the input stage, or a limiter, gave out before the converter did.
+ *
+ * Flat: at least four equal samples (in proportion above 48 kHz) within 0.1 dB of the take's own peak, in two places or
+ * more. Looking flattened: at least three samples within 0.4 %, entered and left by steps more than four times those
+ * inside, in three places or more within 1 dB of the peak; a round top has steps of three times at most.
+ */
+export function createFlatTops(options: FlatTopsOptions): FlatTops {
+  const shortest = Math.ceil(Math.max(shortestAt48, (shortestAt48 * options.sampleRateHz) / 48_000));
+  const step = options.quantisationStep ?? floatStep;
+  const flat = new Map<number, Tops>();
+  let peak = 0;
+  // The run of equal samples that is open: its value, the sample before it, where it starts, how long it is.
+  let run = { value: 0, before: 0, start: 0, length: 0 };
+  const like = createLikeRuns(step);
+  let position = 0;
+
+  const closeRun = (after: number): void => {
+    const size = Math.abs(run.value);
+    if (size < Math.max(quietestPeak, peak * nearPeak) || size >= options.fullScale) return;
+    const sign = Math.sign(run.value);
+    const [rise, fall] = [size - sign * run.before, size - sign * after];
+    if (Math.min(rise, fall) <= 0 || rise + fall <= stepsOfRoundTop * step) return;
+    const tops = flat.get(size) ?? { count: 0, samples: 0, runs: [] };
+    if (tops.runs.length < runsKept) tops.runs.push(clipRun(run, size));
+    flat.set(size, { ...tops, count: tops.count + 1, samples: tops.samples + run.length });
+  };
+
+  return {
+    push(block) {
+      // Locals, for speed: see peakAndPower.
+      let { value, before, start, length } = run;
+      for (let i = 0; i < block.length; i += 1) {
+        const sample = block[i];
+        const size = Math.abs(sample);
+        if (size > peak) peak = size;
+        if (size >= quietestPeak) like.see(sample, value);
+        else if (like.isOpen()) like.end(sample);
+        if (sample === value) {
+          length += 1;
+          continue;
+        }
+        if (length >= shortest) {
+          run = { value, before, start, length };
+          closeRun(sample);
+        }
+        before = value;
+        value = sample;
+        start = position + i;
+        length = 1;
+      }
+      run = { value, before, start, length };
+      position += block.length;
+    },
+    result: () => ({
+      flat: peak < quietestPeak ? noTops : nearThePeak(flat, peak),
+      looksFlattened: peak > 0 && like.thirdLargest() >= peak * likeNearPeak,
+    }),
+  };
+}
+
+/** Runs of nearly equal samples that are entered and left steeply; only the three largest are kept. */
+function createLikeRuns(step: number) {
+  let largest: readonly number[] = [0, 0, 0];
+  let [length, least, most, last, entered, largestStep] = [0, 0, 0, 0, 0, 0];
+
+  const end = (after: number): void => {
+    const left = Math.abs(last) - Math.sign(last) * after;
+    const enough = steeper * Math.max(largestStep, step);
+    const isTop = length >= shortestLike && entered > enough && left > enough;
+    if (isTop) largest = [...largest, most].sort((a, b) => b - a).slice(0, 3);
+    length = 0;
+  };
+  return {
+    isOpen: () => length > 0,
+    end,
+    see(sample: number, previous: number): void {
+      const size = Math.abs(sample);
+      const [nowLeast, nowMost] = [Math.min(least, size), Math.max(most, size)];
+      if (length > 0 && sample * last > 0 && nowMost - nowLeast <= likeWithin * nowMost) {
+        largestStep = Math.max(largestStep, Math.abs(sample - last));
+        [least, most, last] = [nowLeast, nowMost, sample];
+        length += 1;
+        return;
+      }
+      if (length > 0) end(sample);
+      [length, least, most, last, largestStep] = [1, size, size, sample, 0];
+      entered = size - Math.sign(sample) * previous;
+    },
+    /** Size of the third largest; 0 where there are fewer. */
+    thirdLargest: () => largest[2],
+  };
+}
+
+const noTops: TrackFacts['clipping'] = { runs: [], runCount: 0, clippedSamples: 0 };
+
+function nearThePeak(flat: ReadonlyMap<number, Tops>, peak: number): TrackFacts['clipping'] {
+  const near = [...flat].filter(([size]) => size >= peak * nearPeak).map(([, tops]) => tops);
+  const runCount = near.reduce((sum, { count }) => sum + count, 0);
+  if (runCount < fewestFlat) return noTops;
+  const runs = near.flatMap((tops) => tops.runs).sort((a, b) => a.startSample - b.startSample);
+  const clippedSamples = near.reduce((sum, { samples }) => sum + samples, 0);
+  return { runs: runs.slice(0, runsKept), runCount, clippedSamples };
+}
+
+function clipRun({ start, length }: { start: number; length: number }, size: number): ClipRun {
+  return { startSample: start, lengthSamples: length, levelDbfs: amplitudeDb(size) ?? 0 };
+}
