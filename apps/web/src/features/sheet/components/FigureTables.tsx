@@ -19,7 +19,7 @@ export function FigureTables({
   return (
     <>
       <FiguresOut {...{ take, report, groups }} />
-      <Box _print={{ display: 'grid', gridTemplateColumns: '5fr 4fr', columnGap: '32px' }}>
+      <Box _print={{ columnCount: 2, columnGap: '32px' }}>
         {groups.map((group) => (
           <FigureTable key={group.title} group={group} />
         ))}
@@ -40,7 +40,7 @@ const cell = {
 
 function FigureTable({ group }: { group: FigureGroup }) {
   return (
-    <div>
+    <Box breakInside="avoid">
       <PictureTitle>{group.title}</PictureTitle>
       <chakra.table width="100%" fontSize={{ base: 'small', _print: 'caption' }} marginTop="4px">
         <thead>
@@ -70,7 +70,7 @@ function FigureTable({ group }: { group: FigureGroup }) {
           ))}
         </tbody>
       </chakra.table>
-    </div>
+    </Box>
   );
 }
 
