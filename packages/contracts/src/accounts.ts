@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { text } from './text';
 
 export const roles = ['player', 'teacher', 'admin'] as const;
 export const role = z.enum(roles);
@@ -16,9 +17,7 @@ const password = z
   .min(10, 'A password needs at least 10 characters.')
   .max(200, 'A password has at most 200 characters.');
 
-const personName = z
-  .string({ error: 'Write the name others should see.' })
-  .trim()
+const personName = text('Write the name others should see.')
   .min(1, 'Write the name others should see.')
   .max(60, 'A name has at most 60 characters.');
 

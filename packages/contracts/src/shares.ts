@@ -1,8 +1,9 @@
 import { z } from 'zod';
+import { textOfLines } from './text';
 
 export const createShareRequest = z.object({
   /** Stands above the line on the shared sheet: "What would you change first?" */
-  question: z.string().trim().max(300, 'A question has at most 300 characters.').default(''),
+  question: textOfLines().max(300, 'A question has at most 300 characters.').default(''),
   /** Null: until it is ended by hand. */
   expiresInDays: z.int().min(1).max(365).nullable().default(7),
   canListen: z.boolean().default(true),

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { findingStatus } from './reports';
+import { text, textOfLines } from './text';
 
 export const trackRoles = ['kick', 'overhead'] as const;
 export const trackRole = z.enum(trackRoles);
@@ -13,25 +14,34 @@ export const uploadTrack = z.object({
 });
 export type UploadTrack = z.infer<typeof uploadTrack>;
 
-const tag = z
-  .string()
-  .trim()
+const tag = text()
   .min(1)
   .max(30, 'A tag has at most 30 characters.')
-  .regex(/^[^,\n]+$/, 'A tag has no comma in it.');
+  .regex(/^[^,]+$/, 'A tag has no comma in it.');
 const tags = z
   .array(tag)
   .max(10, 'A take has at most 10 tags.')
   .transform((all) => [...new Set(all)]);
-const actionIds = z.array(z.string().max(60)).max(40);
+const actionIds = z.array(text().max(60)).max(40);
+const title = text().max(120, 'A title has at most 120 characters.');
+const note = textOfLines().max(4000, 'A note has at most 4,000 characters.');
+
+const dayMs = 24 * 60 * 60 * 1000;
+/** Until tomorrow: a recorder's clock may be set to another zone. */
+const recordedAt = z.iso
+  .datetime({ offset: true })
+  .refine(
+    (told) => Date.parse(told) >= 0 && Date.parse(told) <= Date.now() + dayMs,
+    'A take was recorded between 1970 and today.',
+  );
 
 /** The text fields of the upload; they are sent before the files. `tracks` travels as JSON text. */
 export const createTakeRequest = z.object({
   /** Made by the client once per upload: sending the same key again gives the same take. */
   uploadKey: z.uuid(),
-  title: z.string().trim().max(120, 'A title has at most 120 characters.').default(''),
-  note: z.string().trim().max(4000, 'A note has at most 4,000 characters.').default(''),
-  recordedAt: z.iso.datetime({ offset: true }).optional(),
+  title: title.default(''),
+  note: note.default(''),
+  recordedAt: recordedAt.optional(),
   /** The player's earlier take that this one follows. */
   followsTakeId: z.uuid().optional(),
   /** Which actions of that take were carried out before this one; travels as JSON text. */
@@ -51,8 +61,8 @@ export type CreateTakeRequest = z.infer<typeof createTakeRequest>;
 
 /** PATCH: absent leaves as it is. */
 export const updateTakeRequest = z.object({
-  title: z.string().trim().max(120, 'A title has at most 120 characters.').optional(),
-  note: z.string().trim().max(4000, 'A note has at most 4,000 characters.').optional(),
+  title: title.optional(),
+  note: note.optional(),
   /** Ids of the actions under "before the next take" that are ticked. */
   tickedActions: actionIds.optional(),
   tags: tags.optional(),
@@ -149,9 +159,9 @@ export const takeOrders = ['newest', 'oldest', 'hardest-kick', 'fullest-low-end'
 export const listTakesRequest = z.object({
   show: z.enum(takeFilters).default('every'),
   order: z.enum(takeOrders).default('newest'),
-  tag: z.string().max(30).optional(),
+  tag: text().max(30).optional(),
   /** Words looked for in title, note and what the sheet says. */
-  find: z.string().trim().max(100).optional(),
+  find: text().max(100).optional(),
   cursor: z.string().max(200).optional(),
   limit: z.coerce.number().int().min(1).max(100).default(11),
 });
