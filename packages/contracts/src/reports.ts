@@ -126,6 +126,31 @@ export const balance = z.object({
 });
 export type Balance = z.infer<typeof balance>;
 
+/** Median over hits and the distance between the quartiles. */
+const spreadFigure = z.object({ median: z.number(), iqr: z.number().nonnegative() }).nullable();
+
+export const room = z.object({
+  /** Loud snare hits that were looked at. */
+  snareHits: z.int().nonnegative(),
+  /** How they die away: mean of the 500 Hz and 1 kHz octaves, seconds per 60 dB. */
+  decayS: figure,
+  /** The same of the first 10 dB. */
+  earlyS: figure,
+  bands: z.array(
+    z.object({
+      centreHz: z.number().positive(),
+      /** From −5 to −25 dB, seconds per 60 dB. */
+      t20S: spreadFigure,
+      /** From 0 to −10 dB, seconds per 60 dB. */
+      earlyS: spreadFigure,
+      /** Energy of the first 50 ms over all that comes later. */
+      earlyToLateDb: spreadFigure,
+    }),
+  ),
+  reason: z.string().nullable(),
+});
+export type Room = z.infer<typeof room>;
+
 export const findingTopics = [
   'files',
   'kick-level',
@@ -138,6 +163,7 @@ export const findingTopics = [
   'arrival',
   'adding-up',
   'balance',
+  'room',
 ] as const;
 
 export const finding = z.object({
@@ -184,6 +210,7 @@ export const reportFigures = z.object({
   agreement,
   /** Null in a take measured before it was. */
   balance: balance.nullable(),
+  room: room.nullable(),
   findings: z.array(finding),
 });
 /** What the command line prints. */

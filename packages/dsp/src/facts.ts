@@ -15,6 +15,8 @@ export interface TakeFacts {
   readonly notices: readonly FileNotice[];
   /** Missing in facts measured before it was, and in a take without an overhead. */
   readonly balance?: BalanceFacts;
+  /** Missing where `balance` is. */
+  readonly room?: RoomFacts;
 }
 
 export type TrackRole = 'kick' | 'overhead';
@@ -26,6 +28,13 @@ export interface ClipRun {
 }
 
 export type NoiseFloorReason = 'too-short' | 'no-quiet-second' | 'digital-silence';
+
+/** Mains hum in the quiet stretch. */
+export interface HumFacts {
+  readonly mainsHz: 50 | 60;
+  /** RMS of the multiples found; a full-scale sine reads −3.01. */
+  readonly levelDbfs: number;
+}
 
 export interface TrackFacts {
   readonly role: TrackRole;
@@ -53,6 +62,8 @@ export interface TrackFacts {
   readonly dcOffset: number;
   readonly noiseFloorDbfs: number | null;
   readonly noiseFloorReason: NoiseFloorReason | null;
+  /** In the stretch of the noise floor; null where nothing hums or no stretch is quiet. Missing in earlier facts. */
+  readonly hum?: HumFacts | null;
   /** Largest peak of this file at any hit; null without hits. */
   readonly loudestHitDbfs: number | null;
 }
@@ -77,6 +88,37 @@ export interface BalanceFacts {
   readonly drumHits: number;
   readonly cymbalHits: number;
   readonly reason: BalanceReason | null;
+}
+
+/** A median over hits and the distance between the quartiles. */
+export interface SpreadFigure {
+  readonly median: number;
+  readonly iqr: number;
+}
+
+/** One octave band of the decay; null where fewer than six hits reach far enough down. */
+export interface RoomBandFacts {
+  readonly centreHz: number;
+  /** From −5 to −25 dB, seconds per 60 dB. */
+  readonly t20S: SpreadFigure | null;
+  /** From 0 to −10 dB, seconds per 60 dB. */
+  readonly earlyS: SpreadFigure | null;
+  /** Energy of the first 50 ms over all that comes later. */
+  readonly earlyToLateDb: SpreadFigure | null;
+}
+
+/** `too-few-snares`: not six that are loud and stand alone; `cut-short`: they can't be followed far enough down. */
+export type RoomReason = 'too-few-snares' | 'cut-short';
+
+/** How a loud snare dies away, as the overhead hears it. */
+export interface RoomFacts {
+  /** Loud snare hits that were looked at. */
+  readonly snareHits: number;
+  /** Mean of the 500 Hz and 1 kHz octaves, seconds per 60 dB; null unless both are known. */
+  readonly decayS: number | null;
+  readonly earlyS: number | null;
+  readonly bands: readonly RoomBandFacts[];
+  readonly reason: RoomReason | null;
 }
 
 export type Swing = 'up' | 'down';

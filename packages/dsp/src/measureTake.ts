@@ -43,7 +43,8 @@ export async function measureTake({
   const readings = await readPairs({ sources, kick, others, candidates: streamed.kicks, onStage });
   const kickHits = kickHitsOfTake(readings, { kick, others, tracks: tracks.length });
   const hits = listHits(kickHits, streamed.overheadHits, sampleRateHz);
-  const fromOverhead = others.length > 0 ? await overheadFacts(sources[others[0]], hits) : {};
+  const fromOverhead =
+    others.length > 0 ? await overheadFacts(sources[others[0]], { hits, place: others[0] }) : {};
   onStage('arrival', 1);
   const pairs = readings.map((reading, index) => pairFacts(reading, hits, { a: kick, b: others[index] }));
   onStage('adding-up', 1);

@@ -79,10 +79,30 @@ describe('the sheet', () => {
     expect(screen.getByRole('link', { name: /^Drums and cymbals/ })).toHaveAttribute('href', '#drums');
   });
 
+  it('tells how a snare dies away in the room, band by band', async () => {
+    open({});
+    const section = await screen.findByRole('region', { name: /^Room/ });
+    expect(section).toHaveTextContent('Room: 0.38 s');
+    expect(section).toHaveTextContent(
+      '500 Hz 0.42, 1 kHz 0.38, 2 kHz 0.34, 4 kHz 0.30. Below 500 Hz not judged',
+    );
+    expect(screen.getByRole('row', { name: /^Decay, 2 kHz/ })).toHaveTextContent('0.34');
+    expect(screen.getByRole('link', { name: /^Room/ })).toHaveAttribute('href', '#room');
+  });
+
+  it('says where the room can’t be told', async () => {
+    const bands = [{ centreHz: 500, t20S: null, earlyS: null, earlyToLateDb: null }];
+    const room = { snareHits: 2, decayS: null, earlyS: null, bands, reason: 'too-few-snares' };
+    open({ [`GET ${paths.report(takeId)}`]: json(sampleReport({ room })) });
+    const section = await screen.findByRole('region', { name: /^Room/ });
+    expect(section).toHaveTextContent('Room: can’t tell');
+    expect(section).not.toHaveTextContent('Seconds per 60 dB');
+  });
+
   it('leaves out what an older report doesn’t hold', async () => {
-    open({ [`GET ${paths.report(takeId)}`]: json(sampleReport({ balance: null })) });
+    open({ [`GET ${paths.report(takeId)}`]: json(sampleReport({ balance: null, room: null })) });
     await screen.findByRole('heading', { name: 'Levels: hot' });
-    expect(screen.queryByText(/Drums and cymbals/)).not.toBeInTheDocument();
+    expect(screen.queryByText(/Drums and cymbals|^Room/)).not.toBeInTheDocument();
   });
 
   it('tells the levels in words where the picture can’t be seen', async () => {

@@ -156,6 +156,18 @@ export const sampleReport = (overrides: Partial<ReportResponse> = {}): ReportRes
     cymbalHits: 12,
     reason: null,
   },
+  room: {
+    snareHits: 8,
+    decayS: 0.38,
+    earlyS: 0.33,
+    bands: [500, 1000, 2000, 4000].map((centreHz, i) => ({
+      centreHz,
+      t20S: { median: 0.42 - 0.04 * i, iqr: 0.01 },
+      earlyS: { median: 0.34 - 0.02 * i, iqr: 0.02 },
+      earlyToLateDb: { median: 9 + i, iqr: 0.4 },
+    })),
+    reason: null,
+  },
   findings: [
     {
       topic: 'kick-level',
@@ -184,6 +196,13 @@ export const sampleReport = (overrides: Partial<ReportResponse> = {}): ReportRes
       sentence: 'Cymbals are 5 dB louder than drums overhead.',
       why: 'One overhead holds both on a single track.',
       next: 'Play cymbals lighter.',
+    },
+    {
+      topic: 'room',
+      status: 'good',
+      sentence: 'A loud snare dies away in 0.38 s here (60 dB).',
+      why: 'It is for comparing takes of one snare in one room.',
+      next: 'Note it.',
     },
   ],
   line: [

@@ -7,6 +7,7 @@ import { dropoutFindings } from './dropoutFindings';
 import { flattenedFindings } from './flattenedFindings';
 import { levelFinding } from './levelFinding';
 import { noiseFinding } from './noiseFinding';
+import { roomFindings } from './roomFindings';
 import { oversFindings } from './oversFindings';
 
 /**
@@ -27,5 +28,6 @@ export function findings(figures: ReportFigures, reader: Reader): Finding[] {
     arrivalFinding(figures, reader),
     addingUpFinding(figures),
     ...balanceFindings(figures),
+    ...roomFindings(figures),
   ];
 }

@@ -41,6 +41,7 @@ export function reportFigures(
     arrival: arrivalReport(pair, temperatureC),
     agreement: agreementReport(pair),
     balance: facts.balance ?? null,
+    room: facts.room ? { ...facts.room, bands: [...facts.room.bands] } : null,
     findings: filesFindings(facts.notices),
   };
   return { ...figures, findings: findings(figures, { lengthUnit: 'metre', target }) };

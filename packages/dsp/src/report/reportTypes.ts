@@ -5,6 +5,8 @@ import type {
   ClipRun,
   HitKind,
   NoiseFloorReason,
+  RoomReason,
+  SpreadFigure,
   Swing,
   Verdict,
   VerdictReason,
@@ -41,7 +43,8 @@ export type FindingTopic =
   | 'dropouts'
   | 'arrival'
   | 'adding-up'
-  | 'balance';
+  | 'balance'
+  | 'room';
 
 export interface TrackReport {
   samplePeakDbfs: number | null;
@@ -108,6 +111,20 @@ export interface BalanceReport {
   reason: BalanceReason | null;
 }
 
+export interface RoomReport {
+  snareHits: number;
+  /** Mean of the 500 Hz and 1 kHz octaves, seconds per 60 dB. */
+  decayS: number | null;
+  earlyS: number | null;
+  bands: {
+    centreHz: number;
+    t20S: SpreadFigure | null;
+    earlyS: SpreadFigure | null;
+    earlyToLateDb: SpreadFigure | null;
+  }[];
+  reason: RoomReason | null;
+}
+
 export interface Finding {
   topic: FindingTopic;
   status: FindingStatus;
@@ -129,6 +146,7 @@ export interface ReportFigures {
   agreement: AgreementReport;
   /** Null in a take measured before it was. */
   balance: BalanceReport | null;
+  room: RoomReport | null;
   findings: Finding[];
 }
 

@@ -80,6 +80,7 @@ export function reportOf(change: Partial<ReportFigures> = {}): ReportFigures {
     },
     agreement: agreementFigures(),
     balance: null,
+    room: null,
     findings: [],
     ...change,
   };

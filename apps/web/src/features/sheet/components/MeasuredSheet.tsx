@@ -8,6 +8,7 @@ import { AddingUpSection } from './AddingUpSection';
 import { DrumsSection } from './DrumsSection';
 import { FiguresSection } from './FiguresSection';
 import { LevelsSection } from './LevelsSection';
+import { RoomSection } from './RoomSection';
 import { RuledSheet } from './RuledSheet';
 import { SheetTop } from './SheetTop';
 import { WholeTakeSection } from './WholeTakeSection';
@@ -48,6 +49,7 @@ export function MeasuredSheet({ take, report, settings, ...slots }: MeasuredShee
         onChooseHit={setChosenHit}
       />
       <DrumsSection report={report} />
+      <RoomSection report={report} />
       <WholeTakeSection {...{ report, listening, chosenHit }} canListen={take.rights.listen} />
       <FiguresSection {...{ take, report, settings }} />
     </RuledSheet>

@@ -15,6 +15,8 @@ import {
   findingsOf,
   levelTopics,
   levelsWord,
+  roomTopics,
+  roomWord,
   verdictWord,
   worstStatus,
 } from './sectionWords';
@@ -73,7 +75,12 @@ function contents(report: ReportResponse): ContentsEntry[] {
 
 /** Sections that a take measured before they were doesn't have. */
 function measuredSections(report: ReportResponse): ContentsEntry[] {
-  if (!report.balance) return [];
-  const status = worstStatus(findingsOf(report, balanceTopics));
-  return [{ id: 'drums', title: 'Drums and cymbals', word: balanceWord(report.balance), status }];
+  const { balance, room } = report;
+  const status = (topics: Parameters<typeof findingsOf>[1]) => worstStatus(findingsOf(report, topics));
+  const drums = { id: 'drums', title: 'Drums and cymbals', status: status(balanceTopics) };
+  const decay = { id: 'room', title: 'Room', status: status(roomTopics) };
+  return [
+    ...(balance ? [{ ...drums, word: balanceWord(balance) }] : []),
+    ...(room ? [{ ...decay, word: roomWord(room) }] : []),
+  ];
 }

@@ -1,5 +1,6 @@
-import type { Balance, ReportResponse } from '@thudline/contracts';
+import type { Balance, ReportResponse, Room } from '@thudline/contracts';
 import { missing, number, signed } from '../../../lib/format';
+import { bandName } from './bandName';
 import type { FigureGroup, FigureRow } from './figureRows';
 
 const orMissing = (value: number | null, digits: number) =>
@@ -29,7 +30,67 @@ function balanceRows({ drumsLufs, cymbalsLufs, differenceDb, drumHits, cymbalHit
   ];
 }
 
+type Band = Room['bands'][number];
+type BandRow = Omit<FigureRow, 'values'> & { of: (band: Band) => number | null | undefined };
+
+const decaySource = 'Schroeder 1965, as in ISO 3382-1';
+const bandRows: BandRow[] = [
+  {
+    label: 'Decay',
+    unit: 's per 60 dB',
+    of: ({ t20S }) => t20S?.median,
+    definition:
+      'How a loud snare dies away between −5 and −25 dB, by backward integration: median over six hits or more.',
+    source: decaySource,
+  },
+  {
+    label: 'Decay, spread',
+    unit: 's per 60 dB',
+    of: ({ t20S }) => t20S?.iqr,
+    definition: 'Interquartile range over hits.',
+    source: 'our definition',
+  },
+  {
+    label: 'Early decay',
+    unit: 's per 60 dB',
+    of: ({ earlyS }) => earlyS?.median,
+    definition: 'The same between 0 and −10 dB.',
+    source: decaySource,
+  },
+  {
+    label: 'Early to late',
+    unit: 'dB',
+    of: ({ earlyToLateDb }) => earlyToLateDb?.median,
+    definition: 'Energy of the first 50 ms over all that comes later: median over hits.',
+    source: 'C50 of ISO 3382-1',
+  },
+];
+
+function roomRows({ snareHits, bands }: Room): FigureRow[] {
+  const rows = bandRows.flatMap(({ of, label, ...row }) =>
+    bands.map((band) => ({
+      ...row,
+      label: `${label}, ${bandName(band.centreHz)}`,
+      values: [orMissing(of(band) ?? null, 2)],
+    })),
+  );
+  return [
+    ...rows,
+    {
+      label: 'Loud snare hits',
+      unit: '',
+      values: [`${snareHits}`],
+      definition: 'Alone for 150 ms before and 200 ms after, at most 24. Below six nothing is told.',
+      source: 'our definition',
+    },
+  ];
+}
+
 /** What was told from the overhead's own hits; nothing for a take measured before it was. */
-export function overheadGroups({ balance }: ReportResponse): FigureGroup[] {
-  return balance ? [{ title: 'Drums and cymbals', columns: ['overhead'], rows: balanceRows(balance) }] : [];
+export function overheadGroups({ balance, room }: ReportResponse): FigureGroup[] {
+  const columns = ['overhead'];
+  return [
+    ...(balance ? [{ title: 'Drums and cymbals', columns, rows: balanceRows(balance) }] : []),
+    ...(room ? [{ title: 'Room', columns, rows: roomRows(room) }] : []),
+  ];
 }

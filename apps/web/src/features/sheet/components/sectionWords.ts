@@ -1,4 +1,5 @@
-import type { Balance, Finding, FindingStatus, ReportResponse } from '@thudline/contracts';
+import type { Balance, Finding, FindingStatus, ReportResponse, Room } from '@thudline/contracts';
+import { number } from '../../../lib/format';
 
 const severity: readonly FindingStatus[] = ['fix', 'watch', 'cannot-tell', 'good'];
 
@@ -43,6 +44,9 @@ export function balanceWord({ differenceDb }: Balance): string {
   return differenceDb > 0 ? 'cymbals louder' : 'drums louder';
 }
 
+export const roomWord = ({ decayS }: Room): string =>
+  decayS === null ? 'can’t tell' : `${number(decayS, 2)} s`;
+
 export const levelTopics = [
   'kick-level',
   'overhead-level',
@@ -54,3 +58,4 @@ export const levelTopics = [
 ] as const;
 export const addingUpTopics = ['adding-up', 'arrival'] as const;
 export const balanceTopics = ['balance'] as const;
+export const roomTopics = ['room'] as const;

@@ -1,0 +1,68 @@
+import type { HitFacts, RoomBandFacts, RoomFacts, SpreadFigure } from '../../facts';
+import type { TrackSource } from '../../trackSource';
+import { interquartileRange, median } from '../statistics';
+import type { DecayFigures } from './decayFigures';
+import { DECAY_BANDS_HZ, readDecay } from './readDecay';
+import { loudDrumHits } from './snareHits';
+
+/** Section 7. */
+const FEWEST_HITS = 6;
+/** ISO 3382-1 Annex A averages these two octaves into one number for the decay (from memory). */
+const MIDDLE_BANDS_HZ: readonly number[] = [500, 1000];
+
+/**
+ * How a loud snare dies away in the room, as the overhead hears it: octave bands 500 Hz to 4 kHz, median over hits.
+ *
+ * Only drums with wires that are among the loud hits, with nothing in the 150 ms before and 200 ms after. A figure for
+ * comparing takes of one snare in one room: the snare's own ringing and the overhead's nearness are part of it, so it is no
+ * standard room measurement.
+ *
+ * @param overhead - read around at most 24 hits
+ * @param options.hits - all hits of the take in order of time; `place` is the overhead's in `peaksDbfs`
+ * @returns seconds per 60 dB; null with a reason below six hits
+ * @see decayFigures for the definitions and their sources
+ */
+export async function roomDecay(
+  overhead: TrackSource,
+  { hits, place }: { readonly hits: readonly HitFacts[]; readonly place: number },
+): Promise<RoomFacts> {
+  const read: DecayFigures[][] = [];
+  for (const hit of loudDrumHits(hits, place)) {
+    const figures = await readDecay(overhead, hit);
+    if (figures) read.push(figures);
+  }
+  const bands = DECAY_BANDS_HZ.map((centreHz, band) =>
+    bandFacts(
+      centreHz,
+      read.map((hit) => hit[band]),
+    ),
+  );
+  const middle = bands.filter((band) => MIDDLE_BANDS_HZ.includes(band.centreHz));
+  return {
+    snareHits: read.length,
+    decayS: meanOf(middle.map((band) => band.t20S)),
+    earlyS: meanOf(middle.map((band) => band.earlyS)),
+    bands,
+    reason: reasonFor(read.length, middle),
+  };
+}
+
+function bandFacts(centreHz: number, hits: readonly DecayFigures[]): RoomBandFacts {
+  const over = (figure: keyof DecayFigures): SpreadFigure | null => {
+    const values = hits.flatMap((hit) => hit[figure] ?? []);
+    const middle = median(values);
+    const iqr = interquartileRange(values);
+    return values.length < FEWEST_HITS || middle === null || iqr === null ? null : { median: middle, iqr };
+  };
+  return { centreHz, t20S: over('t20S'), earlyS: over('earlyS'), earlyToLateDb: over('earlyToLateDb') };
+}
+
+function meanOf(figures: readonly (SpreadFigure | null)[]): number | null {
+  const known = figures.flatMap((figure) => figure?.median ?? []);
+  return known.length < figures.length ? null : known.reduce((sum, value) => sum + value, 0) / known.length;
+}
+
+function reasonFor(snareHits: number, middle: readonly RoomBandFacts[]): RoomFacts['reason'] {
+  if (snareHits < FEWEST_HITS) return 'too-few-snares';
+  return middle.some((band) => band.t20S === null) ? 'cut-short' : null;
+}
