@@ -31,6 +31,17 @@ export {
 } from './measurements/peaks/peaks';
 export * from './measurements/peaks/peaksBytes';
 export { lowPass } from './measurements/filters/lowPass';
+export * from './measurements/room/absorptionTable';
+export * from './measurements/room/reverberation';
+export {
+  roomModes,
+  type RoomMode,
+  type RoomModeKind,
+  type RoomModesOptions,
+  type RoomSize,
+} from './measurements/room/roomModes';
+export * from './measurements/room/roomReverberation';
+export * from './measurements/room/schroederFrequency';
 export * from './report/reportTypes';
 export * from './report/reportFigures';
 export * from './report/pathDifference';
