@@ -17,7 +17,7 @@ describe('mail', () => {
 
   beforeAll(async () => {
     sink = await startMailSink();
-    test = await startTestApp({ MAIL_LIMIT_PER_ADDRESS: '1000' });
+    test = await startTestApp();
     worker = startWorker(test, { SMTP_URL: sink.url, MAIL_FROM: 'Thudline <bench@thudline.test>' });
   });
   afterAll(async () => {

@@ -19,7 +19,9 @@ const password = z
 
 const personName = text('Write the name others should see.')
   .min(1, 'Write the name others should see.')
-  .max(60, 'A name has at most 60 characters.');
+  .max(60, 'A name has at most 60 characters.')
+  // Names stand in mails to addresses that nobody has shown to be theirs; mail programs make links of such text.
+  .refine((name) => !name.includes('://'), 'Write a name without the address of a page.');
 
 export const joinRequest = z.object({
   name: personName,

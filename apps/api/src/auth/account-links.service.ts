@@ -11,6 +11,7 @@ import { ThrottleService } from '../throttle/throttle.service';
 import { OneTimeToken } from '../tokens/entities/one-time-token.entity';
 import { linkEnded, OneTimeTokensService } from '../tokens/one-time-tokens.service';
 import { User } from '../users/entities/user.entity';
+import { mailsKey } from './auth.service';
 import { PasswordsService } from './passwords.service';
 import { SessionsService } from './sessions.service';
 
@@ -52,7 +53,7 @@ export class AccountLinksService {
   async forgot({ email }: ForgotRequest, address: string): Promise<void> {
     const { mailsPerAccount, mailsPerAddress } = this.config.limits;
     const account = `forgot:account:${this.throttle.hashed(email.toLowerCase())}`;
-    await this.throttle.count({ key: `forgot:${address}`, limit: mailsPerAddress, windowS: hourS });
+    await this.throttle.count({ key: mailsKey(address), limit: mailsPerAddress, windowS: hourS });
     await this.throttle.count({ key: account, limit: mailsPerAccount, windowS: hourS });
     await this.mails.send({ kind: 'reset', email });
   }

@@ -21,24 +21,25 @@ export class AuthService {
     @Inject(CONFIG) private readonly config: Config,
   ) {}
 
+  /** Account and mail together, or neither: without the mail nobody could show whose address it is. */
   async join(request: JoinRequest, address: string): Promise<User> {
-    await this.throttle.count({
-      key: `join:${address}`,
-      limit: this.config.limits.joinPerAddress,
-      windowS: 3_600,
-    });
+    const { joinPerAddress, mailsPerAddress } = this.config.limits;
+    await this.throttle.count({ key: `join:${address}`, limit: joinPerAddress, windowS: 3_600 });
+    await this.throttle.count({ key: mailsKey(address), limit: mailsPerAddress, windowS: 3_600 });
     const { name, email, password } = request;
     const passwordHash = await this.passwords.hash(password);
-    const user = this.em.create(User, { name, email, emailLower: email.toLowerCase(), passwordHash });
     try {
-      await this.em.flush();
+      return await this.em.transactional(async (em) => {
+        const user = em.create(User, { name, email, emailLower: email.toLowerCase(), passwordHash });
+        await em.flush();
+        this.audit.record({ kind: 'joined', userId: user.id, address });
+        await this.mails.sendWith(em, { kind: 'verify', userId: user.id });
+        return user;
+      });
     } catch (error) {
       if (error instanceof UniqueConstraintViolationException) throw emailTaken();
       throw error;
     }
-    this.audit.record({ kind: 'joined', userId: user.id, address });
-    await this.mails.send({ kind: 'verify', userId: user.id });
-    return user;
   }
 
   async signIn(request: SignInRequest, address: string): Promise<User> {
@@ -59,6 +60,9 @@ export class AuthService {
     return user;
   }
 }
+
+/** Counts the mails to others that one address of the net asks for, whatever they are about. */
+export const mailsKey = (address: string) => `mails:${address}`;
 
 const emailTaken = () =>
   new AppError('email-taken', 'This e-mail address has an account already. Sign in instead.', {

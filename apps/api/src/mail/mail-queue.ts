@@ -1,3 +1,4 @@
+import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { QueueSender } from '../queue/queue-sender';
 import { mailQueue } from '../queue/queue.schema';
@@ -7,6 +8,11 @@ import { MailJob } from './mail-jobs';
 @Injectable()
 export class MailQueue {
   constructor(private readonly sender: QueueSender) {}
+
+  /** Within the transaction of `em`: the mail is sent if and only if the rows are there. */
+  sendWith(em: EntityManager, job: MailJob): Promise<void> {
+    return this.sender.sendWith(em, mailQueue, job);
+  }
 
   send(job: MailJob): Promise<void> {
     return this.sender.send(mailQueue, job);

@@ -26,6 +26,7 @@ export function testEnvironment(databaseUrl: string, changed: NodeJS.ProcessEnv 
     ARGON2_MEMORY_KIB: '1024',
     ARGON2_TIME: '1',
     JOIN_LIMIT_PER_ADDRESS: '1000',
+    MAIL_LIMIT_PER_ADDRESS: '1000',
     OPEN_LINK_LIMIT_PER_ADDRESS: '1000',
     LOG_LEVEL: 'silent',
     WEB_DIST: undefined,
