@@ -22,7 +22,8 @@ const pairOf = async ({ kick, overhead }: Tracks) => {
       { role: 'overhead', source: overhead },
     ],
   });
-  return { ...facts.pairs[0], hits: facts.hits };
+  const { balance, room, hits } = facts;
+  return { ...facts.pairs[0], hits, balance, room };
 };
 const changed = async (tracks: Tracks, change: (x: Float32Array) => Float32Array): Promise<Tracks> => {
   const samples = await tracks.overhead.read(0, tracks.overhead.frames);
@@ -67,6 +68,15 @@ kits('real kits', () => {
         const change = (moved.arrival.arrivalSamples ?? NaN) - (arrival.arrivalSamples ?? NaN);
         expect(Math.abs(change - samples)).toBeLessThanOrEqual(1);
       }
+    },
+  );
+
+  it.each(['gogodze-pop-90bpm', 'muldjord-rock-100bpm'])(
+    '%s: every snare has a hat on it, so nothing is told of drums against cymbals or of the room',
+    async (name) => {
+      const { balance, room } = await pairOf(await measured(`grooves/${name}`));
+      expect(balance).toMatchObject({ drumsLufs: null, differenceDb: null, drumHits: 0 });
+      expect(room).toMatchObject({ decayS: null, snareHits: 0, reason: 'too-few-snares' });
     },
   );
 
