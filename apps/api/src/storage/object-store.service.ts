@@ -39,17 +39,20 @@ export class ObjectStoreService implements OnApplicationShutdown {
 
   /** Puts a file and reads it back: what is stored has the file's SHA-256, or this throws. */
   async putVerified({ key, path, bytes, sha256 }: StoredFile): Promise<void> {
-    await this.answered(() =>
-      this.client.send(
-        new PutObjectCommand({
-          Bucket: this.bucket,
-          Key: key,
-          Body: createReadStream(path),
-          ContentLength: bytes,
-          ContentType: 'audio/wav',
-        }),
-      ),
-    );
+    const body = createReadStream(path);
+    const put = new PutObjectCommand({
+      Bucket: this.bucket,
+      Key: key,
+      Body: body,
+      ContentLength: bytes,
+      ContentType: 'audio/wav',
+    });
+    try {
+      await this.answered(() => this.client.send(put));
+    } finally {
+      // A request that fails leaves the file open.
+      body.destroy();
+    }
     const hash = createHash('sha256');
     await this.answered(async () => pipeline(await this.body(key), hash));
     if (hash.digest('hex') !== sha256) throw unavailable(new Error(`${key} was stored with other bytes`));

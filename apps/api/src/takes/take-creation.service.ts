@@ -20,6 +20,12 @@ interface StoredFile extends CheckedFile {
   key: string;
 }
 
+interface TakeRows {
+  takeId: string;
+  request: CreateTakeRequest;
+  files: StoredFile[];
+}
+
 export interface CreatedTake {
   take: Take;
   isNew: boolean;
@@ -41,30 +47,46 @@ export class TakeCreationService {
     const checked = await checkedFiles(files, request.tracks);
     const takeId = v7();
     const stored = checked.map((file) => stamped(file, takeId));
-    return this.keepingNothingOnFailure(stored, async () => {
-      await Promise.all(stored.map((file) => this.objects.putVerified(file)));
-      return this.write(viewer, { takeId, request, files: stored });
-    });
+    await this.putAll(stored);
+    return this.writeOrRemove(viewer, { takeId, request, files: stored });
   }
 
-  private async keepingNothingOnFailure(
-    files: StoredFile[],
-    work: () => Promise<CreatedTake>,
-  ): Promise<CreatedTake> {
-    let isKept = false;
+  /** All files, or none stays: what is still on its way is waited for, or it would arrive after the others were removed. */
+  private async putAll(files: StoredFile[]): Promise<void> {
+    const puts = await Promise.allSettled(files.map((file) => this.objects.putVerified(file)));
+    const failed = puts.find((put) => put.status === 'rejected');
+    if (!failed) return;
+    await this.remove(files);
+    throw failed.reason;
+  }
+
+  private async writeOrRemove(viewer: Viewer, rows: TakeRows): Promise<CreatedTake> {
     try {
-      const created = await work();
-      isKept = created.isNew;
+      const created = await this.write(viewer, rows);
+      if (!created.isNew) await this.remove(rows.files);
       return created;
-    } finally {
-      if (!isKept) await this.objects.remove(files.map((file) => file.key));
+    } catch (error) {
+      // Where this can't be told either, it throws, and the recordings stay.
+      const take = await this.findWritten(viewer, rows.takeId);
+      if (take) return { take, isNew: true };
+      await this.remove(rows.files);
+      throw error;
     }
   }
 
-  private async write(
-    viewer: Viewer,
-    { takeId, request, files }: { takeId: string; request: CreateTakeRequest; files: StoredFile[] },
-  ): Promise<CreatedTake> {
+  /** A connection lost while it commits doesn't tell what became of the rows; behind its lock another one sees. */
+  private async findWritten(viewer: Viewer, takeId: string): Promise<Take | null> {
+    return this.em.transactional(async (em) => {
+      await em.findOneOrFail(User, viewer.user.id, { lockMode: LockMode.PESSIMISTIC_WRITE, refresh: true });
+      return em.findOne(Take, { id: takeId });
+    });
+  }
+
+  private remove(files: StoredFile[]): Promise<void> {
+    return this.objects.remove(files.map((file) => file.key));
+  }
+
+  private async write(viewer: Viewer, { takeId, request, files }: TakeRows): Promise<CreatedTake> {
     return this.em.transactional(async (em) => {
       // Uploads of one player queue here: the second of two with the same key finds what the first has written.
       const owner = await em.findOneOrFail(User, viewer.user.id, {
