@@ -7,10 +7,13 @@ import { Hatch } from './Hatch';
 import { ink } from './ink';
 import { halo, PictureText } from './PictureText';
 
-const lineY = 44;
-const ticksY = 76;
+const lineY = 56;
+const ticksY = 88;
 /** Closer than this the two marks leave no room for a line between them. */
 const apartPx = 24;
+/** Of "cymbals" at 15 px, and of a difference. */
+const wordPx = 74;
+const numberPx = 76;
 
 /** Drums (dot) and cymbals (ring) on one dB axis counted from the drums; hatched where cymbals are too loud to mend. */
 export function BalanceLine({ differenceDb }: { differenceDb: number }) {
@@ -39,6 +42,9 @@ export function BalanceLine({ differenceDb }: { differenceDb: number }) {
           height={14}
           fill={`url(#${hatchId})`}
         />
+        <PictureText x={widthPx} y={14} textAnchor="end" fill={ink.muted}>
+          too loud to mend later
+        </PictureText>
         <path d={`M${left} ${lineY}H${right}`} stroke={ink.edge} strokeWidth="1.4" />
         {balanceTicksDb(axis, widthPx).map((tick) => (
           <g key={tick}>
@@ -49,19 +55,39 @@ export function BalanceLine({ differenceDb }: { differenceDb: number }) {
             </PictureText>
           </g>
         ))}
-        <Marks drumsX={x(0)} cymbalsX={x(differenceDb)} />
+        <Marks drumsX={x(0)} cymbalsX={x(differenceDb)} {...{ differenceDb, widthPx }} />
       </svg>
     </Box>
   );
 }
 
-function Marks({ drumsX, cymbalsX }: { drumsX: number; cymbalsX: number }) {
+interface MarksProps {
+  drumsX: number;
+  cymbalsX: number;
+  differenceDb: number;
+  widthPx: number;
+}
+
+function Marks({ drumsX, cymbalsX, differenceDb, widthPx }: MarksProps) {
   const way = cymbalsX >= drumsX ? 1 : -1;
   const anchor = (side: number) => (side < 0 ? 'end' : 'start');
+  const cymbalsTextX = way > 0 ? Math.min(cymbalsX + 6, widthPx - wordPx) : Math.max(cymbalsX - 6, wordPx);
   return (
     <>
       {Math.abs(cymbalsX - drumsX) > apartPx && (
         <path d={`M${drumsX} ${lineY}H${cymbalsX - 7 * way}`} stroke={ink.overhead} strokeWidth="2.4" />
+      )}
+      {Math.abs(cymbalsX - drumsX) > numberPx && (
+        <PictureText
+          x={(drumsX + cymbalsX) / 2}
+          y={lineY - 11}
+          textAnchor="middle"
+          bold
+          fill={ink.ink}
+          {...halo}
+        >
+          {signedDecibels(differenceDb)}
+        </PictureText>
       )}
       <circle cx={drumsX} cy={lineY} r={7} fill={ink.overhead} />
       <circle cx={cymbalsX} cy={lineY} r={6.4} fill={ink.sheet} stroke={ink.overhead} strokeWidth="2.2" />
@@ -77,7 +103,7 @@ function Marks({ drumsX, cymbalsX }: { drumsX: number; cymbalsX: number }) {
         drums
       </PictureText>
       <PictureText
-        x={cymbalsX + 6 * way}
+        x={cymbalsTextX}
         y={lineY - 16}
         textAnchor={anchor(way)}
         fontSize={15}
