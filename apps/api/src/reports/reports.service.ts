@@ -48,16 +48,22 @@ export class ReportsService {
     return new Map(reports.map((report) => [report.measurement.id, listFiguresOf(report, owner)]));
   }
 
-  /** What sheets say was written with the owner's target of then; after it changed they are told anew. */
+  /** What sheets say was written with the owner's settings of then; after they changed they are told anew. */
   async tellAnew(owner: User): Promise<void> {
     const takes = await this.em.find(Take, { owner: owner.id, currentReportId: { $ne: null } });
     const ids = takes.flatMap((take) => take.currentReportId ?? []);
     const settings = settingsOf(owner);
     for (let start = 0; start < ids.length; start += reportsAtOnce) {
       const em = this.em.fork();
-      const measurement = { $in: ids.slice(start, start + reportsAtOnce) };
-      const reports = await em.find(Report, { measurement }, { populate: ['hits', 'clipRuns'] });
-      for (const report of reports) report.says = saidBy(storedFacts(report), settings);
+      const reports = await em.find(Report, {
+        measurement: { $in: ids.slice(start, start + reportsAtOnce) },
+      });
+      // Only of clipped hits do the words count any; the others are told without loading theirs.
+      await em.populate(
+        reports.filter(({ kickClipped, overheadClipped }) => kickClipped || overheadClipped),
+        ['hits', 'clipRuns'],
+      );
+      for (const report of reports) report.says = saidBy(factsToTell(report), settings);
       await em.flush();
     }
   }
@@ -84,3 +90,6 @@ export class ReportsService {
     return { take, report, owner: settingsOf(take.owner.unwrap()) };
   }
 }
+
+const factsToTell = ({ summary, hits = [], clipRuns = [] }: Partial<Report> & Pick<Report, 'summary'>) =>
+  storedFacts({ summary, hits, clipRuns });

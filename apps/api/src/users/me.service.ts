@@ -1,9 +1,11 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
-import { UpdateMeRequest } from '@thudline/contracts';
+import { UpdateMeRequest, UserSettings } from '@thudline/contracts';
 import { ReportsService } from '../reports/reports.service';
 import { User } from './entities/user.entity';
-import { settingsOf } from './user-settings';
+
+/** What the words of a sheet depend on, see `saidBy`. */
+const toldBySheets = ['target', 'temperatureC', 'lengthUnit'] as const;
 
 @Injectable()
 export class MeService {
@@ -15,8 +17,16 @@ export class MeService {
   /** What is named changes, the rest stays. Sheets follow at once: they are judged on reading. */
   async update(user: User, { name, settings }: UpdateMeRequest): Promise<void> {
     if (name !== undefined) user.name = name;
-    if (settings !== undefined) user.settings = { ...settingsOf(user), ...settings };
     await this.em.flush();
-    if (settings?.target) await this.reports.tellAnew(user);
+    if (!settings) return;
+    await this.merge(user, settings);
+    if (toldBySheets.some((key) => settings[key] !== undefined)) await this.reports.tellAnew(user);
+  }
+
+  /** By the database, so that two tabs that change different settings at the same moment keep both. */
+  private async merge(user: User, settings: Partial<UserSettings>): Promise<void> {
+    const merged = 'update "user" set settings = settings || ?::jsonb where id = ?';
+    await this.em.getConnection().execute(merged, [JSON.stringify(settings), user.id]);
+    await this.em.refresh(user);
   }
 }
