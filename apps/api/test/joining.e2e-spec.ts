@@ -9,7 +9,7 @@ describe('joining', () => {
   let joins = 0;
 
   beforeEach(async () => {
-    test = await startTestApp({ MAIL_LIMIT_PER_ADDRESS: '3' });
+    test = await startTestApp({ MAIL_LIMIT_PER_ADDRESS: '3', TRUST_PROXY: 'true' });
   });
   afterEach(async () => {
     jest.restoreAllMocks();
@@ -40,6 +40,13 @@ describe('joining', () => {
     await join().expect(201);
     await join().expect(429);
     await new Browser(test).post(paths.forgot, { email: 'juno@example.org' }).expect(429);
+  });
+
+  it('counts every address of one IPv6 network together', async () => {
+    const joinFrom = (address: string) => join().set('X-Forwarded-For', address);
+    for (const last of ['1', '2', '3']) await joinFrom(`2001:db8:0:7::${last}`).expect(201);
+    await joinFrom('2001:db8:0:7:ffff::1').expect(429);
+    await joinFrom('2001:db8:0:8::1').expect(201);
   });
 
   it('refuses a name that would carry a link into our mails', async () => {

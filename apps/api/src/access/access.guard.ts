@@ -66,7 +66,7 @@ export class AccessGuard implements CanActivate {
   /** Guests have no account to be held to, and sound comes from the object store: one address can't ask without end. */
   private countGuest(address: string): Promise<void> {
     const limit = this.config.limits.guestReadsPerAddress;
-    return this.throttle.count({ key: `guest:${address}`, limit, windowS: 900 });
+    return this.throttle.count({ key: 'guest', address, limit, windowS: 900 });
   }
 
   private checkRole(viewer: Viewer, role: Role): void {

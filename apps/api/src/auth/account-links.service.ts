@@ -53,7 +53,7 @@ export class AccountLinksService {
   async forgot({ email }: ForgotRequest, address: string): Promise<void> {
     const { mailsPerAccount, mailsPerAddress } = this.config.limits;
     const account = `forgot:account:${this.throttle.hashed(email.toLowerCase())}`;
-    await this.throttle.count({ key: mailsKey(address), limit: mailsPerAddress, windowS: hourS });
+    await this.throttle.count({ key: mailsKey, address, limit: mailsPerAddress, windowS: hourS });
     await this.throttle.count({ key: account, limit: mailsPerAccount, windowS: hourS });
     await this.mails.send({ kind: 'reset', email });
   }
@@ -100,7 +100,7 @@ export class AccountLinksService {
   /** A token can't be guessed, so this only keeps the database from being asked for nothing. */
   private countTry(address: string): Promise<void> {
     const limit = this.config.limits.openLinkPerAddress;
-    return this.throttle.count({ key: `account-link:${address}`, limit, windowS: 900 });
+    return this.throttle.count({ key: 'account-link', address, limit, windowS: 900 });
   }
 }
 

@@ -24,8 +24,8 @@ export class AuthService {
   /** Account and mail together, or neither: without the mail nobody could show whose address it is. */
   async join(request: JoinRequest, address: string): Promise<User> {
     const { joinPerAddress, mailsPerAddress } = this.config.limits;
-    await this.throttle.count({ key: `join:${address}`, limit: joinPerAddress, windowS: 3_600 });
-    await this.throttle.count({ key: mailsKey(address), limit: mailsPerAddress, windowS: 3_600 });
+    await this.throttle.count({ key: 'join', address, limit: joinPerAddress, windowS: 3_600 });
+    await this.throttle.count({ key: mailsKey, address, limit: mailsPerAddress, windowS: 3_600 });
     const { name, email, password } = request;
     const passwordHash = await this.passwords.hash(password);
     try {
@@ -46,7 +46,7 @@ export class AuthService {
     const emailLower = request.email.toLowerCase();
     const { signInPerAccount, signInPerAddress } = this.config.limits;
     const account = `sign-in:account:${this.throttle.hashed(emailLower)}`;
-    await this.throttle.count({ key: `sign-in:${address}`, limit: signInPerAddress, windowS: 900 });
+    await this.throttle.count({ key: 'sign-in', address, limit: signInPerAddress, windowS: 900 });
     await this.throttle.count({ key: account, limit: signInPerAccount, windowS: 900 });
     const user = await this.em.findOne(User, { emailLower });
     const isRight = await this.passwords.matches(user?.passwordHash ?? null, request.password);
@@ -62,7 +62,7 @@ export class AuthService {
 }
 
 /** Counts the mails to others that one address of the net asks for, whatever they are about. */
-export const mailsKey = (address: string) => `mails:${address}`;
+export const mailsKey = 'mails';
 
 const emailTaken = () =>
   new AppError('email-taken', 'This e-mail address has an account already. Sign in instead.', {

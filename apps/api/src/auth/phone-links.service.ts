@@ -33,7 +33,7 @@ export class PhoneLinksService {
   /** @throws {AppError} `link-ended` */
   async open(token: string, address: string): Promise<User> {
     const limit = this.config.limits.openLinkPerAddress;
-    await this.throttle.count({ key: `open-phone-link:${address}`, limit, windowS: 900 });
+    await this.throttle.count({ key: 'open-phone-link', address, limit, windowS: 900 });
     const user = await this.tokens.use('phone', token);
     this.audit.record({ kind: 'phone-let-in', userId: user.id, address });
     await this.em.flush();

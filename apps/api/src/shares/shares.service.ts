@@ -64,7 +64,8 @@ export class SharesService {
   /** @returns the share with its owner, counted as opened once more */
   async open(token: string, address: string): Promise<Share> {
     await this.throttle.count({
-      key: `open-share:${address}`,
+      key: 'open-share',
+      address,
       limit: this.config.limits.openLinkPerAddress,
       windowS: 900,
     });
