@@ -45,6 +45,8 @@ export const trackReport = z.object({
   dcOffset: z.number(),
   noiseFloorDbfs: figure,
   noiseFloorReason: z.string().nullable(),
+  /** RMS of the mains' multiples in the quiet stretch. Null: no hum, no quiet stretch, or measured before it was. */
+  hum: z.object({ mainsHz: z.union([z.literal(50), z.literal(60)]), levelDbfs: z.number() }).nullable(),
   /** Peak of the loudest hit in this microphone's file. */
   loudestHitDbfs: figure,
   level: z.enum(levels).nullable(),
@@ -156,6 +158,7 @@ export const findingTopics = [
   'kick-level',
   'overhead-level',
   'noise',
+  'hum',
   'dc-offset',
   'flattened',
   'overs',

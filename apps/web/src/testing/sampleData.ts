@@ -76,6 +76,7 @@ const track = (overrides: Partial<TrackReport>): TrackReport => ({
   dcOffset: 0.00002,
   noiseFloorDbfs: -71.2,
   noiseFloorReason: null,
+  hum: null,
   loudestHitDbfs: -2.7,
   level: 'hot',
   gainChangeDb: -6.3,

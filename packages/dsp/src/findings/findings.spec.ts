@@ -17,9 +17,12 @@ import { filesFindings } from './filesFindings';
 import { dropoutFindings } from './dropoutFindings';
 import { findings } from './findings';
 import { flattenedFindings } from './flattenedFindings';
+import { humFindings } from './humFindings';
 import { levelFinding } from './levelFinding';
+import { nextActions } from './nextActions';
 import { noiseFinding } from './noiseFinding';
 import { oversFindings } from './oversFindings';
+import { reportLine } from './reportLine';
 
 const reader = { lengthUnit: 'metre', target: defaultTarget } as const;
 const kickLevel = (kick: ReportFigures['kick']) => levelFinding(reportOf({ kick }), 'kick');
@@ -181,6 +184,40 @@ describe('the offset finding', () => {
   });
 });
 
+describe('the hum finding', () => {
+  const humming = (levelDbfs: number) => trackFigures({ hum: { mainsHz: 60, levelDbfs } });
+
+  it('is of the microphone that hums more, and keeps the safety earth', () => {
+    const [hum] = humFindings(reportOf({ kick: humming(-64), overhead: humming(-58.4) }));
+    expect(hum).toMatchObject({
+      topic: 'hum',
+      status: 'watch',
+      sentence:
+        'Mains hum sits at −58 dBFS in the overhead and rises with any gain; try another cable or outlet, and keep the safety earth.',
+    });
+    expect(hum.why).toContain('60 Hz');
+    expect(hum.next).toContain('never lift a safety earth');
+  });
+
+  it('is only there where the hum may be heard', () => {
+    expect(humFindings(reportOf())).toEqual([]);
+    expect(humFindings(reportOf({ kick: humming(-70.1) }))).toEqual([]);
+    expect(humFindings(reportOf({ kick: humming(-69.9) }))).toHaveLength(1);
+  });
+
+  it('asks for a search with the same caution, though the noise is low', () => {
+    const [action] = nextActions(reportOf({ kick: humming(-64) }), reader);
+    expect([action.id, action.action]).toEqual([
+      'look-for-noise',
+      'Look for the hum: try another cable or outlet.',
+    ]);
+    expect(action.detail).toContain('Keep the safety earth.');
+    expect(reportLine(reportOf({ kick: humming(-64) }), reader)).toEqual([
+      { action: 'Look for the hum:', reason: 'the mains sit at −64 dBFS in the kick.' },
+    ]);
+  });
+});
+
 describe('the findings about what happened to the wave', () => {
   it('are only there where there is something to say', () => {
     const old = trackFigures({ looksFlattened: null, dropouts: null });
@@ -266,6 +303,7 @@ const everything = (): ReportFigures[] => {
     trackFigures({ noiseFloorDbfs: -32 }),
     trackFigures({ looksFlattened: true, samplePeakDbfs: 12.4, dropouts: { count: 123, firstAtS: 3599.94 } }),
     trackFigures({ dropouts: { count: 1, firstAtS: 0 } }),
+    trackFigures({ hum: { mainsHz: 50, levelDbfs: -12.3 } }),
     { ...clippedTrack, clipping: { runs: [], runCount: 12345, clippedSamples: 99999 } },
     ...noise.map((noiseFloorReason) => trackFigures({ noiseFloorDbfs: null, noiseFloorReason })),
   ];

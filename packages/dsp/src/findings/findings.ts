@@ -5,6 +5,7 @@ import { balanceFindings } from './balanceFindings';
 import { dcOffsetFindings } from './dcOffsetFindings';
 import { dropoutFindings } from './dropoutFindings';
 import { flattenedFindings } from './flattenedFindings';
+import { humFindings } from './humFindings';
 import { levelFinding } from './levelFinding';
 import { noiseFinding } from './noiseFinding';
 import { roomFindings } from './roomFindings';
@@ -24,6 +25,7 @@ export function findings(figures: ReportFigures, reader: Reader): Finding[] {
     ...flattenedFindings(figures),
     ...dropoutFindings(figures),
     noiseFinding(figures),
+    ...humFindings(figures),
     ...dcOffsetFindings(figures),
     arrivalFinding(figures, reader),
     addingUpFinding(figures),

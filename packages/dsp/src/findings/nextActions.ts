@@ -1,6 +1,7 @@
 import { levelStatus, NOISE_WATCH_DBFS } from '../report/level';
 import type { ActionId, NextAction, Reader, ReportFigures } from '../report/reportTypes';
 import { addingUpStatus, hasFewHits } from './addingUpFinding';
+import { loudHum } from './humFindings';
 import { noisierMicrophone } from './noiseFinding';
 import { halfDbText, wholeDbfsText } from './words';
 
@@ -90,6 +91,16 @@ function polarityActions({ agreement }: ReportFigures): NextAction[] {
 }
 
 function noiseActions(figures: ReportFigures): NextAction[] {
+  if (loudHum(figures)) {
+    return [
+      {
+        id: 'look-for-noise',
+        action: 'Look for the hum: try another cable or outlet.',
+        detail: 'Keep the safety earth. Then leave three seconds silent, to see what it did.',
+        leave: false,
+      },
+    ];
+  }
   const noisier = noisierMicrophone(figures);
   if (noisier && noisier.noiseDbfs <= NOISE_WATCH_DBFS) return [];
   return [

@@ -2,6 +2,7 @@ import { levelStatus, NOISE_WATCH_DBFS } from '../report/level';
 import type { LineSentence, Outcome, Reader, ReportFigures } from '../report/reportTypes';
 import { addingUpStatus, hasFewHits } from './addingUpFinding';
 import { clippedHits } from './clippedHits';
+import { loudHum } from './humFindings';
 import { noisierMicrophone } from './noiseFinding';
 import { counted, countText, decimalText, halfDbText, wholeDbfsText } from './words';
 
@@ -108,6 +109,11 @@ function low(figures: ReportFigures): LineSentence[] {
 }
 
 function noise(figures: ReportFigures): LineSentence[] {
+  const hum = loudHum(figures);
+  if (hum) {
+    const reason = `the mains sit at ${wholeDbfsText(hum.levelDbfs)} dBFS in the ${hum.role}.`;
+    return [{ action: 'Look for the hum:', reason }];
+  }
   const noisier = noisierMicrophone(figures);
   if (!noisier || noisier.noiseDbfs <= NOISE_WATCH_DBFS) return [];
   const level = wholeDbfsText(noisier.noiseDbfs);

@@ -107,6 +107,7 @@ describe('before the next take', () => {
 });
 
 const droppedOut = trackFigures({ dropouts: { count: 13, firstAtS: 3.2 } });
+const humming = trackFigures({ hum: { mainsHz: 50, levelDbfs: -56.2 } });
 const squashed = trackFigures({ looksFlattened: true });
 
 describe('a take in the table', () => {
@@ -123,6 +124,7 @@ describe('a take in the table', () => {
     ['good', 'Levels are right. Polarity: either way.', eitherWay],
     ['watch', 'Overhead seems to drop out. Listen at 13 places.', reportOf({ overhead: droppedOut })],
     ['watch', 'Overhead looks squashed. Switch off any limiter.', reportOf({ overhead: squashed })],
+    ['watch', 'Overhead hums: −56 dBFS. Try another cable.', reportOf({ overhead: humming })],
     ['watch', 'Noisy overhead: −52 dBFS. Look for the source.', noisy],
     ['fix', 'Flip the overhead. Look for the noise.', { ...noisy, agreement: flipFigures }],
     ['cannot-tell', 'No kick hit found. Play eight hard ones.', noHits],

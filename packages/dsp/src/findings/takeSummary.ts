@@ -1,6 +1,7 @@
 import { levelStatus, NOISE_WATCH_DBFS } from '../report/level';
 import type { ReportFigures, TakeSummary, TrackReport } from '../report/reportTypes';
 import { addingUpStatus } from './addingUpFinding';
+import { loudHum } from './humFindings';
 import { noisierMicrophone } from './noiseFinding';
 import { capitalised, countText, halfDbText, wholeDbfsText } from './words';
 
@@ -80,6 +81,11 @@ function turnIt(track: TrackReport): string {
 }
 
 function noise(figures: ReportFigures): TakeSummary | null {
+  const hum = loudHum(figures);
+  if (hum) {
+    const strong = `${capitalised(hum.role)} hums: ${wholeDbfsText(hum.levelDbfs)} dBFS.`;
+    return { status: 'watch', strong, rest: 'Try another cable.' };
+  }
   const noisier = noisierMicrophone(figures);
   if (!noisier || noisier.noiseDbfs <= NOISE_WATCH_DBFS) return null;
   const level = wholeDbfsText(noisier.noiseDbfs);

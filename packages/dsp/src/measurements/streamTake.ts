@@ -1,14 +1,16 @@
+import type { HumFacts } from '../facts';
 import type { TrackSource } from '../trackSource';
 import { createKickCandidates } from './hits/kickCandidates';
 import { createOverheadHits, type OverheadHit } from './hits/overheadHits';
 import { selectKicks } from './hits/selectKicks';
 import type { KickCandidate } from './hits/kickCandidates';
-import { createTrackLevel, type TrackLevelFacts } from './level/trackLevel';
+import { hum } from './level/hum';
+import { createTrackLevel, type TrackLevel, type TrackLevelFacts } from './level/trackLevel';
 import { lockstep } from './lockstep';
 import { createPeaks, type TrackPeaks } from './peaks/peaks';
 
 export interface StreamedTake {
-  readonly levels: readonly TrackLevelFacts[];
+  readonly levels: readonly (TrackLevelFacts & { readonly hum: HumFacts | null })[];
   readonly peaks: readonly TrackPeaks[];
   readonly kicks: readonly KickCandidate[];
   readonly overheadHits: readonly OverheadHit[];
@@ -24,7 +26,7 @@ export interface StreamTakeOptions {
   readonly onProgress: (progress01: number) => void;
 }
 
-/** The one pass over all tracks: levels, and where hits may be. */
+/** The one pass over all tracks: levels, and where hits may be; then the quiet second of each, for hum. */
 export async function streamTake(options: StreamTakeOptions): Promise<StreamedTake> {
   const { sources, kick, overhead, onProgress } = options;
   const { sampleRateHz } = sources[kick];
@@ -45,13 +47,20 @@ export async function streamTake(options: StreamTakeOptions): Promise<StreamedTa
     onProgress(read / frames);
   }
   const results = levels.map((level) => level.result());
+  const hums: (HumFacts | null)[] = [];
+  for (const [track, source] of sources.entries()) hums.push(await humOf(source, levels[track]));
   return {
-    levels: results,
+    levels: results.map((result, track) => ({ ...result, hum: hums[track] })),
     peaks: outlines.map((outline) => outline.result()),
     kicks: selectKicks(candidates.result(), sampleRateHz),
     overheadHits: struck.result(),
     sameTwice: same && results[kick].samplePeakDbfs !== null,
   };
+}
+
+async function humOf(source: TrackSource, level: TrackLevel): Promise<HumFacts | null> {
+  const stretch = level.quietStretch();
+  return stretch && hum(await source.read(stretch.startFrame, stretch.endFrame), source.sampleRateHz);
 }
 
 function alike(a: Float32Array, b: Float32Array): boolean {

@@ -105,6 +105,7 @@ describe('report figures', () => {
         truePeakDbtp: _peak,
         integratedLufs: _loudness,
         looksFlattened: _flattened,
+        hum: _hum,
         dropouts: _dropouts,
         ...track
       }) => track,
@@ -114,6 +115,7 @@ describe('report figures', () => {
       truePeakDbtp: null,
       integratedLufs: null,
       looksFlattened: null,
+      hum: null,
       dropouts: null,
     });
     expect(contract.parse(figures)).toEqual(figures);

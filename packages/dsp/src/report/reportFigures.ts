@@ -58,6 +58,7 @@ function trackReport({ role: _role, ...track }: TrackFacts, target: Target): Tra
     ...track,
     truePeakDbtp: track.truePeakDbtp ?? null,
     integratedLufs: track.integratedLufs ?? null,
+    hum: track.hum ?? null,
     looksFlattened: track.looksFlattened ?? null,
     dropouts: track.dropouts ?? null,
     clipping: { ...track.clipping, runs: [...track.clipping.runs] },

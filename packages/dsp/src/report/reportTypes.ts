@@ -4,6 +4,7 @@ import type {
   ChoiceName,
   ClipRun,
   HitKind,
+  HumFacts,
   NoiseFloorReason,
   RoomReason,
   SpreadFigure,
@@ -37,6 +38,7 @@ export type FindingTopic =
   | 'kick-level'
   | 'overhead-level'
   | 'noise'
+  | 'hum'
   | 'dc-offset'
   | 'flattened'
   | 'overs'
@@ -62,6 +64,8 @@ export interface TrackReport {
   dcOffset: number;
   noiseFloorDbfs: number | null;
   noiseFloorReason: NoiseFloorReason | null;
+  /** Null where nothing hums, where no stretch is quiet, and in a take measured before it was. */
+  hum: HumFacts | null;
   loudestHitDbfs: number | null;
   level: Level | null;
   gainChangeDb: number | null;

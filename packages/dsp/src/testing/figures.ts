@@ -22,6 +22,7 @@ export function trackFigures(change: Partial<TrackReport> = {}): TrackReport {
     dcOffset: 0,
     noiseFloorDbfs: -72,
     noiseFloorReason: null,
+    hum: null,
     loudestHitDbfs: -8.4,
     level: null,
     gainChangeDb: null,

@@ -79,6 +79,7 @@ function levelLines({ kick, overhead }: ReportFigures): string[] {
         ? `– (${track.noiseFloorReason ?? ''})`
         : unit(track.noiseFloorDbfs, 'dBFS'),
     ),
+    row('  hum', ({ hum }) => (hum === null ? '–' : `${unit(hum.levelDbfs, 'dBFS')} (${hum.mainsHz} Hz)`)),
   ];
 }
 

@@ -4,6 +4,13 @@ import type { TrackFacts } from '../../facts';
 export interface NoiseFloor {
   push(block: Float32Array): void;
   result(): Pick<TrackFacts, 'noiseFloorDbfs' | 'noiseFloorReason'>;
+  quietStretch(): QuietStretch | null;
+}
+
+/** The second whose level is the noise floor, in frames of the file. */
+export interface QuietStretch {
+  readonly startFrame: number;
+  readonly endFrame: number;
 }
 
 interface Frame {
@@ -35,18 +42,24 @@ export function createNoiseFloor(options: { readonly sampleRateHz: number }): No
   let energy = 0;
   let filled = 0;
   let lowestPower: number | null = null;
+  let lowestEnd = 0;
+  let closedFrames = 0;
   let sawStretch = false;
   let sawSilence = false;
 
   const closeFrame = () => {
     frames.push({ sum, energy });
+    closedFrames += 1;
     [sum, energy, filled] = [0, 0, 0];
     if (frames.length > framesInStretch) frames.shift();
     if (frames.length < framesInStretch) return;
     sawStretch = true;
     const power = steadyPower(frames, frameLength);
     if (power === 0) sawSilence = true;
-    else if (power !== null && (lowestPower === null || power < lowestPower)) lowestPower = power;
+    else if (power !== null && (lowestPower === null || power < lowestPower)) {
+      lowestPower = power;
+      lowestEnd = closedFrames;
+    }
   };
 
   return {
@@ -69,6 +82,13 @@ export function createNoiseFloor(options: { readonly sampleRateHz: number }): No
       if (!sawStretch) return { noiseFloorDbfs: null, noiseFloorReason: 'too-short' };
       return { noiseFloorDbfs: null, noiseFloorReason: sawSilence ? 'digital-silence' : 'no-quiet-second' };
     },
+    quietStretch: () =>
+      lowestPower === null
+        ? null
+        : {
+            startFrame: (lowestEnd - framesInStretch) * frameLength,
+            endFrame: lowestEnd * frameLength,
+          },
   };
 }
 

@@ -167,6 +167,16 @@ describe('noise floor', () => {
     expect(Math.abs((level(take).noiseFloorDbfs ?? 0) + 72)).toBeLessThan(0.2);
   });
 
+  it('tells where it was measured', () => {
+    const meter = createTrackLevel({ sampleRateHz, quantisationStep: step24 });
+    meter.push(joined(noise(2, -20), noise(1, -72), noise(2, -20)));
+    // Cut into frames of 50 ms, so the quiet second is met exactly.
+    expect(meter.quietStretch()).toEqual({ startFrame: 2 * sampleRateHz, endFrame: 3 * sampleRateHz });
+    const busy = createTrackLevel({ sampleRateHz, quantisationStep: step24 });
+    busy.push(decay(0.4));
+    expect(busy.quietStretch()).toBeNull();
+  });
+
   it('leaves a constant offset out of it', () => {
     const take = noise(3, -72).map((x) => x + 0.005);
     expect(Math.abs((level(take).noiseFloorDbfs ?? 0) + 72)).toBeLessThan(0.2);

@@ -5,7 +5,7 @@ import { createDropouts } from './dropouts';
 import { createFlatTops } from './flatTops';
 import { joinedRuns } from './joinedRuns';
 import { createLoudness } from '../loudness/loudness';
-import { createNoiseFloor } from './noiseFloor';
+import { createNoiseFloor, type QuietStretch } from './noiseFloor';
 import { createPeakAndPower } from './peakAndPower';
 import { createTruePeak } from './truePeak';
 
@@ -15,13 +15,15 @@ export interface TrackLevelOptions {
   readonly quantisationStep: number | null;
 }
 
-export type TrackLevelFacts = Omit<TrackFacts, 'role' | 'loudestHitDbfs'>;
+export type TrackLevelFacts = Omit<TrackFacts, 'role' | 'loudestHitDbfs' | 'hum'>;
 
 /** Sees a track once, in blocks of any size; the figures don't depend on how it was cut. */
 export interface TrackLevel {
   /** @throws {SignalError} `not-finite` */
   push(block: Float32Array): void;
   result(): TrackLevelFacts;
+  /** Where the noise floor was measured, for what is looked for in it; null where it can't be told. */
+  quietStretch(): QuietStretch | null;
 }
 
 /**
@@ -60,5 +62,6 @@ export function createTrackLevel(options: TrackLevelOptions): TrackLevel {
         ...noiseFloor.result(),
       };
     },
+    quietStretch: () => noiseFloor.quietStretch(),
   };
 }

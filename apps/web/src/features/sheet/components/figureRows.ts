@@ -135,6 +135,14 @@ const trackRows: TrackRow[] = [
     source: ownDefinition,
   },
   {
+    label: 'Hum',
+    unit: 'dBFS',
+    of: (t) => (t.hum === null ? missing : `${number(t.hum.levelDbfs, 2)} (${t.hum.mainsHz} Hz)`),
+    definition:
+      'RMS of the mains’ multiples in that second: at least three of the first eight of 50 or 60 Hz, one of them the first or second, 10 dB over what lies 4–12 Hz away.',
+    source: ownDefinition,
+  },
+  {
     label: 'DC offset',
     unit: '% of full scale',
     of: (t) => number(t.dcOffset * 100, 4),

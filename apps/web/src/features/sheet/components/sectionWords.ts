@@ -54,6 +54,7 @@ export const levelTopics = [
   'flattened',
   'dropouts',
   'noise',
+  'hum',
   'dc-offset',
 ] as const;
 export const addingUpTopics = ['adding-up', 'arrival'] as const;
