@@ -31,6 +31,10 @@ export {
 } from './measurements/peaks/peaks';
 export * from './measurements/peaks/peaksBytes';
 export { lowPass } from './measurements/filters/lowPass';
+export * from './measurements/comparing/medianDifference';
+export * from './measurements/comparing/strengthMatch';
+export * from './measurements/comparing/takeChange';
+export * from './measurements/comparing/tryOutFigures';
 export * from './measurements/room/absorptionTable';
 export * from './measurements/room/reverberation';
 export {
