@@ -2,6 +2,7 @@ import { existsSync } from 'node:fs';
 import { readFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import { measureTake } from './measureTake';
+import { createTrackLevel } from './measurements/level/trackLevel';
 import { arrayTrack } from './testing/arrayTrack';
 import { bytesSource } from './wav/bytesSource';
 import { openWav } from './wav/openWav';
@@ -79,6 +80,22 @@ kits('real kits', () => {
       expect(room).toMatchObject({ decayS: null, snareHits: 0, reason: 'too-few-snares' });
     },
   );
+
+  it.each([
+    ...['gogodze-pop-90bpm', 'muldjord-rock-100bpm'].map((name) => `grooves/${name}`),
+    ...['gogodze-vl2-rr1', 'gogodze-vl4-rr1', 'gogodze-vl6-rr1'].map((name) => `hits/${name}`),
+    ...['kickL-12', 'kickL-20', 'kickR-14', 'kickR-23'].map((name) => `hits/muldjord-${name}`),
+  ])('%s: nothing is called clipped, squashed or dropped out', async (name) => {
+    for (const track of Object.values(await measured(name))) {
+      const level = createTrackLevel(track);
+      for await (const block of track.blocks()) level.push(block);
+      expect(level.result()).toMatchObject({
+        clipping: { runCount: 0 },
+        looksFlattened: false,
+        dropouts: { count: 0 },
+      });
+    }
+  });
 
   it.each([
     ['gogodze-vl2-rr1', 1.2, 1.8],
