@@ -24,6 +24,9 @@ export interface NoticeListener {
 /** Soon enough that nobody notices, seldom enough for a database that is starting (common practice, no source). */
 const reconnectMs = 1_000;
 
+/** A database that takes longer to answer nothing is as good as gone (common practice, no source). */
+const answerMs = 5_000;
+
 /** The one connection of this process that listens to what the database tells of; see the migration tell-of-changes. */
 @Injectable()
 export class DatabaseNotices implements OnApplicationBootstrap, BeforeApplicationShutdown {
@@ -49,17 +52,47 @@ export class DatabaseNotices implements OnApplicationBootstrap, BeforeApplicatio
     await this.client?.end();
   }
 
+  /**
+   * Asks the database whether it still hears us: a line that was cut without a word looks open for ever. Where it doesn't
+   * answer in time the connection is given up, and another one made.
+   */
+  async check(): Promise<void> {
+    const { client } = this;
+    if (!client) return;
+    try {
+      await client.query('select 1');
+    } catch (error) {
+      this.logger.warn(error, 'The connection that listens does not answer');
+      this.close(client);
+    }
+  }
+
   private async connect(): Promise<void> {
     const client = new Client({
       connectionString: this.config.databaseUrl,
       application_name: 'thudline-events',
+      keepAlive: true,
+      connectionTimeoutMillis: answerMs,
+      query_timeout: answerMs,
     });
     client.on('notification', (notification) => this.pass(notification));
     client.on('error', (error) => this.logger.warn(error, 'The connection that listens broke'));
-    client.on('end', () => this.reconnect());
+    client.on('end', () => {
+      // One that was given up may end late, when another has taken its place.
+      if (this.client === client) this.reconnect();
+    });
     this.client = client;
-    await client.connect();
-    await client.query('listen thudline_measurement; listen thudline_take_added');
+    try {
+      await client.connect();
+      await client.query('listen thudline_measurement; listen thudline_take_added');
+    } catch (error) {
+      this.close(client);
+      throw error;
+    }
+  }
+
+  private close(client: Client): void {
+    client.end().catch((error: unknown) => this.logger.warn(error, 'A connection could not be closed'));
   }
 
   private reconnect(): void {

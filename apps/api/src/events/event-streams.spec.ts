@@ -12,12 +12,14 @@ const streamOf = (sessionId: string) => {
 
 describe('the open streams', () => {
   const liveAmong = jest.fn((ids: string[]) => Promise.resolve(new Set(ids)));
+  const check = jest.fn(() => Promise.resolve());
   let streams: EventStreams;
 
   beforeEach(() => {
     liveAmong.mockClear();
+    check.mockClear();
     const states = { of: () => Promise.resolve([]) } as unknown as MeasurementStates;
-    streams = new EventStreams({} as DatabaseNotices, states, { liveAmong } as never);
+    streams = new EventStreams({ check } as unknown as DatabaseNotices, states, { liveAmong } as never);
   });
 
   const added = async (sessionId: string) => {
@@ -51,6 +53,7 @@ describe('the open streams', () => {
     await added('open');
     await Promise.all([streams.beat(), streams.beat()]);
     expect(liveAmong).toHaveBeenCalledTimes(1);
+    expect(check).toHaveBeenCalledTimes(1);
   });
 
   it('are at most so many of one session: the oldest ends', async () => {

@@ -90,19 +90,27 @@ export class EventStreams implements OnApplicationBootstrap, BeforeApplicationSh
     stream.end();
   }
 
-  /** Whoever signed out, or was locked out, hears nothing more. One beat waits for the other. */
+  /** Shows that the line is alive, to whoever listens and to ourselves. One beat waits for the other. */
   async beat(): Promise<void> {
     if (this.isBeating) return;
     this.isBeating = true;
+    try {
+      await this.endThoseOver();
+      for (const stream of this.streams) stream.beat();
+      await this.notices.check();
+    } finally {
+      this.isBeating = false;
+    }
+  }
+
+  /** Whoever signed out, or was locked out, hears nothing more. */
+  private async endThoseOver(): Promise<void> {
     try {
       const asked = [...this.streams];
       const live = await this.sessions.liveAmong([...new Set(asked.map(({ viewer }) => viewer.sessionId))]);
       for (const stream of asked) if (!live.has(stream.viewer.sessionId)) this.close(stream);
     } catch (error) {
       this.logger.warn(error, 'It could not be told whose session is over; the next beat asks again');
-    } finally {
-      this.isBeating = false;
     }
-    for (const stream of this.streams) stream.beat();
   }
 }
