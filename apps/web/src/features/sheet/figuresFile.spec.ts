@@ -10,7 +10,11 @@ describe('figures to take along', () => {
     const lines = figuresCsv(groups).trimEnd().split('\r\n');
     expect(lines[0]).toBe('section,figure,unit,kick or both,overhead,definition,source');
     expect(lines[1]).toMatch(/^Levels,Hardest hit,dBFS,-2.70,-8.40,"/);
-    expect(lines).toHaveLength(1 + groups.flatMap((group) => group.rows).length);
+    // A row each, and one for each octave of what is told by octaves.
+    const values = groups.flatMap((group) => group.rows).map((row) => row.values.length);
+    const expected = values.reduce((sum, count) => sum + (count > 2 ? count : 1), 1);
+    expect(lines).toHaveLength(expected);
+    expect(lines.find((line) => line.includes('"Decay, 2 kHz"'))).toMatch(/,s,0\.34,,/);
   });
 
   it('never hand a spreadsheet a formula', () => {

@@ -12,12 +12,24 @@ function cell(text: string): string {
 
 const row = (cells: readonly string[]) => cells.map(cell).join(',');
 
+/** A figure with more columns than the two microphones becomes one for each of them: "Decay, 500 Hz". */
+const oneOrTwoValues = ({ columns, rows }: FigureGroup) =>
+  rows.flatMap((figure) =>
+    figure.values.length <= 2
+      ? [figure]
+      : figure.values.map((value, i) => ({
+          ...figure,
+          label: `${figure.label}, ${columns[i]}`,
+          values: [value],
+        })),
+  );
+
 /** All figures as comma-separated values: section, figure, unit, kick (or both), overhead, definition. */
 export function figuresCsv(groups: readonly FigureGroup[]): string {
   const head = ['section', 'figure', 'unit', 'kick or both', 'overhead', 'definition', 'source'];
-  const rows = groups.flatMap(({ title, rows: figures }) =>
-    figures.map(({ label, unit, values, definition, source }) => [
-      title,
+  const rows = groups.flatMap((group) =>
+    oneOrTwoValues(group).map(({ label, unit, values, definition, source }) => [
+      group.title,
       label,
       unit,
       plainNumber(values[0] ?? ''),

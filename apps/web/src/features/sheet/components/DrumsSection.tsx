@@ -1,3 +1,4 @@
+import { Box } from '@chakra-ui/react';
 import type { ReportResponse } from '@thudline/contracts';
 import { BalanceLine } from '../pictures/BalanceLine';
 import { Findings } from './Findings';
@@ -24,7 +25,11 @@ export function DrumsSection({ report }: { report: ReportResponse }) {
       }
     >
       <Findings findings={findings} />
-      {balance.differenceDb !== null && <BalanceLine differenceDb={balance.differenceDb} />}
+      {balance.differenceDb !== null && (
+        <Box _print={{ display: 'none' }}>
+          <BalanceLine differenceDb={balance.differenceDb} />
+        </Box>
+      )}
     </SheetSection>
   );
 }

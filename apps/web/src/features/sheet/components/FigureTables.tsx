@@ -40,7 +40,7 @@ const cell = {
 
 function FigureTable({ group }: { group: FigureGroup }) {
   return (
-    <Box breakInside="avoid">
+    <Box breakInside="avoid" _print={group.onScreenOnly ? { display: 'none' } : undefined}>
       <PictureTitle>{group.title}</PictureTitle>
       <chakra.table width="100%" fontSize={{ base: 'small', _print: 'caption' }} marginTop="4px">
         <thead>

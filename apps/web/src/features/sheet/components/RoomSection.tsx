@@ -30,7 +30,13 @@ export function RoomSection({ report }: { report: ReportResponse }) {
     >
       <Findings findings={findings} />
       {bands.length > 0 && (
-        <Box color="ink.muted" fontSize="small" lineHeight="22px" marginTop="8px">
+        <Box
+          color="ink.muted"
+          fontSize="small"
+          lineHeight="22px"
+          marginTop="8px"
+          _print={room.decayS === null ? { display: 'none' } : undefined}
+        >
           Seconds per 60 dB: {bands.join(', ')}. Below 500 Hz not judged: the drum rings longer than the room.
         </Box>
       )}

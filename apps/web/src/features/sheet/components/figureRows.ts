@@ -15,6 +15,8 @@ export interface FigureGroup {
   title: string;
   columns: string[];
   rows: FigureRow[];
+  /** Left out on paper, where two pages must do; its main figures stand in its section. */
+  onScreenOnly?: boolean;
 }
 
 const ownDefinition = 'our definition';

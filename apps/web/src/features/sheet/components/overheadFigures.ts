@@ -37,22 +37,22 @@ const decaySource = 'Schroeder 1965, as in ISO 3382-1';
 const bandRows: BandRow[] = [
   {
     label: 'Decay',
-    unit: 's per 60 dB',
+    unit: 's',
     of: ({ t20S }) => t20S?.median,
     definition:
-      'How a loud snare dies away between −5 and −25 dB, by backward integration: median over six hits or more.',
+      'Seconds per 60 dB: how a loud snare dies away between −5 and −25 dB, by backward integration: median over six loud hits or more, alone for 150 ms before and 200 ms after.',
     source: decaySource,
   },
   {
     label: 'Decay, spread',
-    unit: 's per 60 dB',
+    unit: 's',
     of: ({ t20S }) => t20S?.iqr,
     definition: 'Interquartile range over hits.',
     source: 'our definition',
   },
   {
     label: 'Early decay',
-    unit: 's per 60 dB',
+    unit: 's',
     of: ({ earlyS }) => earlyS?.median,
     definition: 'The same between 0 and −10 dB.',
     source: decaySource,
@@ -66,31 +66,20 @@ const bandRows: BandRow[] = [
   },
 ];
 
-function roomRows({ snareHits, bands }: Room): FigureRow[] {
-  const rows = bandRows.flatMap(({ of, label, ...row }) =>
-    bands.map((band) => ({
-      ...row,
-      label: `${label}, ${bandName(band.centreHz)}`,
-      values: [orMissing(of(band) ?? null, 2)],
-    })),
-  );
-  return [
-    ...rows,
-    {
-      label: 'Loud snare hits',
-      unit: '',
-      values: [`${snareHits}`],
-      definition: 'Alone for 150 ms before and 200 ms after, at most 24. Below six nothing is told.',
-      source: 'our definition',
-    },
-  ];
+function roomRows({ bands }: Room): FigureRow[] {
+  return bandRows.map(({ of, ...row }) => ({
+    ...row,
+    values: bands.map((band) => orMissing(of(band) ?? null, 2)),
+  }));
 }
 
 /** What was told from the overhead's own hits; nothing for a take measured before it was. */
 export function overheadGroups({ balance, room }: ReportResponse): FigureGroup[] {
-  const columns = ['overhead'];
+  const bands = room?.bands.map((band) => bandName(band.centreHz)) ?? [];
   return [
-    ...(balance ? [{ title: 'Drums and cymbals', columns, rows: balanceRows(balance) }] : []),
-    ...(room ? [{ title: 'Room', columns, rows: roomRows(room) }] : []),
+    ...(balance ? [{ title: 'Drums and cymbals', columns: ['overhead'], rows: balanceRows(balance) }] : []),
+    ...(room
+      ? [{ title: 'Room, in the overhead', columns: bands, rows: roomRows(room), onScreenOnly: true }]
+      : []),
   ];
 }
