@@ -10,6 +10,7 @@ export * from './wav/wavFacts';
 export * from './wav/wavHeader';
 export * from './measurements/level/trackLevel';
 export * from './measurements/level/truePeak';
+export * from './measurements/loudness/kWeighting';
 export * from './measurements/loudness/loudness';
 export * from './roles/guessRoles';
 export * from './roles/lowEndRatio';

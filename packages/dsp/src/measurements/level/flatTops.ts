@@ -75,12 +75,17 @@ export function createFlatTops(options: FlatTopsOptions): FlatTops {
     push(block) {
       // Locals, for speed: see peakAndPower.
       let { value, before, start, length } = run;
+      let isLoud = like.isOpen();
+      peak = Math.max(peak, largestSample(block));
       for (let i = 0; i < block.length; i += 1) {
         const sample = block[i];
-        const size = Math.abs(sample);
-        if (size > peak) peak = size;
-        if (size >= quietestPeak) like.see(sample, value);
-        else if (like.isOpen()) like.end(sample);
+        if (sample >= quietestPeak || sample <= -quietestPeak) {
+          like.see(sample, value);
+          isLoud = true;
+        } else if (isLoud) {
+          like.end(sample);
+          isLoud = false;
+        }
         if (sample === value) {
           length += 1;
           continue;
@@ -104,10 +109,24 @@ export function createFlatTops(options: FlatTopsOptions): FlatTops {
   };
 }
 
+function largestSample(block: Float32Array): number {
+  let largest = 0;
+  for (let i = 0; i < block.length; i += 1) {
+    const size = Math.abs(block[i]);
+    if (size > largest) largest = size;
+  }
+  return largest;
+}
+
 /** Runs of nearly equal samples that are entered and left steeply; only the three largest are kept. */
 function createLikeRuns(step: number) {
   let largest: readonly number[] = [0, 0, 0];
-  let [length, least, most, last, entered, largestStep] = [0, 0, 0, 0, 0, 0];
+  let length = 0;
+  let least = 0;
+  let most = 0;
+  let last = 0;
+  let entered = 0;
+  let largestStep = 0;
 
   const end = (after: number): void => {
     const left = Math.abs(last) - Math.sign(last) * after;
@@ -121,15 +140,23 @@ function createLikeRuns(step: number) {
     end,
     see(sample: number, previous: number): void {
       const size = Math.abs(sample);
-      const [nowLeast, nowMost] = [Math.min(least, size), Math.max(most, size)];
+      const nowLeast = size < least ? size : least;
+      const nowMost = size > most ? size : most;
       if (length > 0 && sample * last > 0 && nowMost - nowLeast <= likeWithin * nowMost) {
         largestStep = Math.max(largestStep, Math.abs(sample - last));
-        [least, most, last] = [nowLeast, nowMost, sample];
+        least = nowLeast;
+        most = nowMost;
+        last = sample;
         length += 1;
         return;
       }
-      if (length > 0) end(sample);
-      [length, least, most, last, largestStep] = [1, size, size, sample, 0];
+      // Most runs are too short to be a top.
+      if (length >= shortestLike) end(sample);
+      length = 1;
+      least = size;
+      most = size;
+      last = sample;
+      largestStep = 0;
       entered = size - Math.sign(sample) * previous;
     },
     /** Size of the third largest; 0 where there are fewer. */
