@@ -55,51 +55,50 @@ export function createFlatTops(options: FlatTopsOptions): FlatTops {
   const step = options.quantisationStep ?? floatStep;
   const flat = new Map<number, Tops>();
   let peak = 0;
-  // The run of equal samples that is open: its value, the sample before it, where it starts, how long it is.
+  // The open run of equal samples: its value, the sample before it, where it starts, how long it is; 0 where none is open.
   let run = { value: 0, before: 0, start: 0, length: 0 };
+  let lastSample = 0;
   const like = createLikeRuns(step);
   let position = 0;
 
-  const closeRun = (after: number): void => {
-    const size = Math.abs(run.value);
+  const closeRun = (closed: typeof run, after: number): void => {
+    const size = Math.abs(closed.value);
     if (size < Math.max(quietestPeak, peak * nearPeak) || size >= options.fullScale) return;
-    const sign = Math.sign(run.value);
-    const [rise, fall] = [size - sign * run.before, size - sign * after];
+    const sign = Math.sign(closed.value);
+    const [rise, fall] = [size - sign * closed.before, size - sign * after];
     if (Math.min(rise, fall) <= 0 || rise + fall <= stepsOfRoundTop * step) return;
     const tops = flat.get(size) ?? { count: 0, samples: 0, runs: [] };
-    if (tops.runs.length < runsKept) tops.runs.push(clipRun(run, size));
-    flat.set(size, { ...tops, count: tops.count + 1, samples: tops.samples + run.length });
+    if (tops.runs.length < runsKept) tops.runs.push(clipRun(closed, size));
+    flat.set(size, { ...tops, count: tops.count + 1, samples: tops.samples + closed.length });
   };
 
   return {
     push(block) {
       // Locals, for speed: see peakAndPower.
       let { value, before, start, length } = run;
-      let isLoud = like.isOpen();
+      let previous = lastSample;
       peak = Math.max(peak, largestSample(block));
       for (let i = 0; i < block.length; i += 1) {
         const sample = block[i];
-        if (sample >= quietestPeak || sample <= -quietestPeak) {
-          like.see(sample, value);
-          isLoud = true;
-        } else if (isLoud) {
-          like.end(sample);
-          isLoud = false;
+        const isLoud = sample >= quietestPeak || sample <= -quietestPeak;
+        if (length > 0 && sample !== value) {
+          if (length >= shortest) closeRun({ value, before, start, length }, sample);
+          length = 0;
+          if (!isLoud) like.end(sample);
         }
-        if (sample === value) {
+        if (isLoud) {
+          like.see(sample, previous);
+          if (length === 0) {
+            value = sample;
+            before = previous;
+            start = position + i;
+          }
           length += 1;
-          continue;
         }
-        if (length >= shortest) {
-          run = { value, before, start, length };
-          closeRun(sample);
-        }
-        before = value;
-        value = sample;
-        start = position + i;
-        length = 1;
+        previous = sample;
       }
       run = { value, before, start, length };
+      lastSample = previous;
       position += block.length;
     },
     result: () => ({
@@ -136,7 +135,6 @@ function createLikeRuns(step: number) {
     length = 0;
   };
   return {
-    isOpen: () => length > 0,
     end,
     see(sample: number, previous: number): void {
       const size = Math.abs(sample);
