@@ -36,13 +36,6 @@ export interface HumFacts {
   readonly levelDbfs: number;
 }
 
-/** Mains hum in the quiet stretch. */
-export interface HumFacts {
-  readonly mainsHz: 50 | 60;
-  /** RMS of the multiples found; a full-scale sine reads −3.01. */
-  readonly levelDbfs: number;
-}
-
 export interface TrackFacts {
   readonly role: TrackRole;
   readonly samplePeakDbfs: number | null;
@@ -69,8 +62,6 @@ export interface TrackFacts {
   readonly dcOffset: number;
   readonly noiseFloorDbfs: number | null;
   readonly noiseFloorReason: NoiseFloorReason | null;
-  /** In the stretch of the noise floor; null where nothing hums or no stretch is quiet. Missing in earlier facts. */
-  readonly hum?: HumFacts | null;
   /** In the stretch of the noise floor; null where nothing hums or no stretch is quiet. Missing in earlier facts. */
   readonly hum?: HumFacts | null;
   /** Largest peak of this file at any hit; null without hits. */
