@@ -3,7 +3,7 @@ import { pinoHttp } from 'pino-http';
 import { Client } from 'pg';
 import { AppError } from '../src/errors/app-error';
 import { httpLogging } from '../src/logging/logger.module';
-import { Setting } from '../src/settings/entities/setting.entity';
+import { Throttle } from '../src/throttle/entities/throttle.entity';
 import { startTestApp, TestApp } from './support/test-app';
 
 describe('what is logged of an error', () => {
@@ -33,9 +33,9 @@ describe('what is logged of an error', () => {
       (error: unknown) => error,
     );
   const twice = async () => {
-    const row = { key: 'a secret key', value: 'a secret value' };
-    await test.em().upsert(Setting, row);
-    return failed(test.em().insert(Setting, row));
+    const row = { key: 'a secret key', windowStart: new Date(), count: 1 };
+    await test.em().upsert(Throttle, row);
+    return failed(test.em().insert(Throttle, row));
   };
 
   it('holds no value of an insert that failed, but what failed and where', async () => {
@@ -44,9 +44,9 @@ describe('what is logged of an error', () => {
     expect(err).toMatchObject({
       type: 'UniqueConstraintViolationException',
       code: '23505',
-      table: 'setting',
+      table: 'throttle',
     });
-    expect(err.constraint).toEqual(expect.stringContaining('setting'));
+    expect(err.constraint).toEqual(expect.stringContaining('throttle'));
     expect(err.stack).toMatch(/^\s+at .*\n\s+at /);
   });
 
