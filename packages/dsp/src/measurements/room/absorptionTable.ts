@@ -11,7 +11,7 @@ export interface Material {
   readonly source: string;
 }
 
-/** Read in a transcription that names page and table (phonometry's test data); the book itself was not seen. */
+/** Read in a copy that names page and table (phonometry's test data); the book itself was not seen. */
 const BIES = 'Bies, Hansen & Howard, Engineering Noise Control, 5th ed. (2017), Table 6.2, pp. 338–340';
 const BARRON = 'Barron, Industrial Noise Control and Acoustics (2003), Appendix D';
 
