@@ -4,6 +4,8 @@ import { PasswordField } from '../../../components/PasswordField';
 import { TextField } from '../../../components/TextField';
 import { useAuthActions } from '../hooks/useAuthActions';
 import { useAuthForm } from '../hooks/useAuthForm';
+import { AuthForm } from './AuthForm';
+import { EmailField } from './EmailField';
 import { SubmitRow } from './SubmitRow';
 
 export function JoinForm() {
@@ -16,17 +18,7 @@ export function JoinForm() {
       error.code === 'email-taken' ? { email: error.message } : (error.details?.fields ?? null),
   });
   return (
-    <chakra.form
-      ref={form}
-      noValidate
-      aria-label="Join"
-      display="grid"
-      gap="16px"
-      onSubmit={(event) => {
-        event.preventDefault();
-        void submit();
-      }}
-    >
+    <AuthForm {...{ form, submit }} aria-label="Join">
       <TextField
         label="Name"
         name="name"
@@ -35,17 +27,7 @@ export function JoinForm() {
         onChange={(name) => set('name', name)}
         error={errors.name}
       />
-      <TextField
-        label="E-mail"
-        name="email"
-        type="email"
-        autoComplete="username"
-        autoCapitalize="none"
-        spellCheck={false}
-        value={values.email}
-        onChange={(email) => set('email', email)}
-        error={errors.email}
-      />
+      <EmailField value={values.email} onChange={(email) => set('email', email)} error={errors.email} />
       <PasswordField
         label="Password"
         name="password"
@@ -58,6 +40,6 @@ export function JoinForm() {
       <chakra.div marginTop="6px">
         <SubmitRow label="Join" busyLabel="Joining…" busy={busy} error={formError} />
       </chakra.div>
-    </chakra.form>
+    </AuthForm>
   );
 }

@@ -1,8 +1,8 @@
-import { chakra } from '@chakra-ui/react';
 import { resetRequest } from '@thudline/contracts';
 import { PasswordField } from '../../../components/PasswordField';
 import { useAccountLinks } from '../hooks/useAccountLinks';
 import { useAuthForm } from '../hooks/useAuthForm';
+import { AuthForm } from './AuthForm';
 import { SubmitRow } from './SubmitRow';
 
 /** Asks for a new password; the link has said who asks. */
@@ -30,17 +30,7 @@ export function ResetForm({
     },
   });
   return (
-    <chakra.form
-      ref={form}
-      noValidate
-      aria-label="Set a new password"
-      display="grid"
-      gap="22px"
-      onSubmit={(event) => {
-        event.preventDefault();
-        void submit();
-      }}
-    >
+    <AuthForm {...{ form, submit }} aria-label="Set a new password" gap="22px">
       <PasswordField
         label="New password"
         name="password"
@@ -56,6 +46,6 @@ export function ResetForm({
         busy={busy}
         error={formError || (errors.token ?? '')}
       />
-    </chakra.form>
+    </AuthForm>
   );
 }

@@ -2,10 +2,11 @@ import { chakra } from '@chakra-ui/react';
 import { signInRequest } from '@thudline/contracts';
 import { CheckBox } from '../../../components/CheckBox';
 import { PasswordField } from '../../../components/PasswordField';
-import { TextField } from '../../../components/TextField';
 import { TextLink } from '../../../components/TextLink';
 import { useAuthActions } from '../hooks/useAuthActions';
 import { useAuthForm } from '../hooks/useAuthForm';
+import { AuthForm } from './AuthForm';
+import { EmailField } from './EmailField';
 import { SubmitRow } from './SubmitRow';
 
 /** Never says which half is wrong: that would tell a stranger who has an account. */
@@ -23,28 +24,8 @@ export function SignInForm() {
     },
   });
   return (
-    <chakra.form
-      ref={form}
-      noValidate
-      aria-label="Sign in"
-      display="grid"
-      gap="16px"
-      onSubmit={(event) => {
-        event.preventDefault();
-        void submit();
-      }}
-    >
-      <TextField
-        label="E-mail"
-        name="email"
-        type="email"
-        autoComplete="username"
-        autoCapitalize="none"
-        spellCheck={false}
-        value={values.email}
-        onChange={(email) => set('email', email)}
-        error={errors.email}
-      />
+    <AuthForm {...{ form, submit }} aria-label="Sign in">
+      <EmailField value={values.email} onChange={(email) => set('email', email)} error={errors.email} />
       <PasswordField
         label="Password"
         name="password"
@@ -61,7 +42,7 @@ export function SignInForm() {
       <SubmitRow label="Sign in" busyLabel="Signing in…" busy={busy} error={formError}>
         <TextLink to="/forgot">Forgot the password?</TextLink>
       </SubmitRow>
-    </chakra.form>
+    </AuthForm>
   );
 }
 

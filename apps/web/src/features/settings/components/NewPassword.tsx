@@ -1,8 +1,9 @@
-import { Box, chakra } from '@chakra-ui/react';
+import { Box } from '@chakra-ui/react';
 import { changePasswordRequest } from '@thudline/contracts';
 import { useState } from 'react';
 import { TextButton } from '../../../components/Button';
 import { PasswordField } from '../../../components/PasswordField';
+import { AuthForm } from '../../auth/components/AuthForm';
 import { SubmitRow } from '../../auth/components/SubmitRow';
 import { useAccountLinks } from '../../auth/hooks/useAccountLinks';
 import { useAuthForm } from '../../auth/hooks/useAuthForm';
@@ -31,18 +32,12 @@ function PasswordForm({ onSet, onLeave }: { onSet: () => void; onLeave: () => vo
     place: (error) => error.details?.fields ?? null,
   });
   return (
-    <chakra.form
-      ref={form}
-      noValidate
+    <AuthForm
+      {...{ form, submit }}
       aria-label="Set a new password"
-      display="grid"
       gap="14px"
       maxWidth="400px"
       onKeyDown={(event) => event.key === 'Escape' && !busy && onLeave()}
-      onSubmit={(event) => {
-        event.preventDefault();
-        void submit();
-      }}
     >
       <PasswordField
         label="Password as it is"
@@ -66,6 +61,6 @@ function PasswordForm({ onSet, onLeave }: { onSet: () => void; onLeave: () => vo
           Leave it as it is
         </TextButton>
       </SubmitRow>
-    </chakra.form>
+    </AuthForm>
   );
 }
