@@ -75,6 +75,21 @@ export interface HitFacts {
   readonly kind: HitKind;
   /** Peak of each track at this hit, dBFS, in the order of `tracks`. */
   readonly peaksDbfs: readonly (number | null)[];
+  /** Only of kick hits in a take with an overhead; missing in facts measured before it was. */
+  readonly kickFigures?: KickHitFigures;
+}
+
+/** What one kick hit alone says, for comparing takes hit by hit. Of the first pair. */
+export interface KickHitFigures {
+  /** 2–6 kHz over 20 ms against 40–150 Hz over 200 ms in the kick microphone. */
+  readonly attackDb: number | null;
+  /**
+   * 30–150 Hz energy of each microphone and the real part of their cross term, as the pair spectrum adds them up: the two
+   * added at polarity s and gain g hold kick + g²·overhead + 2·s·g·cross.
+   */
+  readonly lowEnergy: { readonly kick: number; readonly overhead: number; readonly cross: number };
+  /** Third-octave levels in the overhead, dBFS (RMS over the hit; a full-scale sine reads −3.01). */
+  readonly overheadThirdOctavesDbfs: { readonly hz63: number | null; readonly hz125: number | null };
 }
 
 export type BalanceReason = 'too-few-drums' | 'too-few-cymbals' | 'too-few-of-both';
@@ -88,6 +103,8 @@ export interface BalanceFacts {
   readonly drumHits: number;
   readonly cymbalHits: number;
   readonly reason: BalanceReason | null;
+  /** Every hit that was judged; missing in facts measured before it was. */
+  readonly perHit?: { readonly drumsLufs: readonly number[]; readonly cymbalsLufs: readonly number[] };
 }
 
 /** A median over hits and the distance between the quartiles. */
@@ -105,6 +122,12 @@ export interface RoomBandFacts {
   readonly earlyS: SpreadFigure | null;
   /** Energy of the first 50 ms over all that comes later. */
   readonly earlyToLateDb: SpreadFigure | null;
+  /** Every hit that was judged, also below six; missing in facts measured before it was. */
+  readonly perHit?: {
+    readonly t20S: readonly number[];
+    readonly earlyS: readonly number[];
+    readonly earlyToLateDb: readonly number[];
+  };
 }
 
 /** `too-few-snares`: not six that are loud and stand alone; `cut-short`: they can't be followed far enough down. */
@@ -119,6 +142,8 @@ export interface RoomFacts {
   readonly earlyS: number | null;
   readonly bands: readonly RoomBandFacts[];
   readonly reason: RoomReason | null;
+  /** 2–10 kHz against 100 Hz–1 kHz of each snare hit's first 100 ms in the overhead; missing in earlier facts. */
+  readonly brightnessPerHitDb?: readonly number[];
 }
 
 export type Swing = 'up' | 'down';
