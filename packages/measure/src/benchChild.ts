@@ -1,0 +1,3 @@
+import { measureAndTell } from './bench/benchRuns';
+
+void measureAndTell(process.argv.slice(2)).then(() => process.disconnect());
