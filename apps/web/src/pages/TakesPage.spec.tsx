@@ -278,6 +278,33 @@ describe('deleting takes', () => {
     expect(await screen.findByText('Take 14 is back.')).toBeInTheDocument();
     expect(screen.getByText(/Nothing you recorded is deleted\./)).toBeInTheDocument();
   });
+
+  it('brings several back at once; chosen takes that are not deleted keep out of it', async () => {
+    const gone = twoTakes.items.map((take) => ({ ...take, deletedAt: '2026-11-30T20:00:00.000Z' }));
+    const there = sampleListItem({ number: 3, title: 'third' });
+    let deleted = gone;
+    const restored = (number: number) => () => {
+      deleted = deleted.filter((take) => take.number !== number);
+      return { status: 204 };
+    };
+    const { requests, router } = open({
+      [`GET ${paths.takes}?show=deleted`]: () =>
+        list(sampleList(deleted, { everyTotal: 1, deletedTotal: deleted.length }))(),
+      [`GET ${paths.takes}`]: list(sampleList([there], { deletedTotal: 2 })),
+      [`POST ${paths.restoreTake(listId(13))}`]: restored(13),
+      [`POST ${paths.restoreTake(listId(14))}`]: restored(14),
+    });
+    await userEvent.click(await chooseBox(/^choose take 3/));
+    await act(() => router.navigate('/takes?show=deleted'));
+    await userEvent.click(await chooseBox(/^choose take 14/));
+    await userEvent.click(await chooseBox(/^choose take 13/));
+    expect(screen.queryByRole('button', { name: /^Delete/ })).not.toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Restore them' }));
+    expect(await screen.findByText('Takes 13 and 14 are back.')).toBeInTheDocument();
+    expect(requests.filter(({ method }) => method === 'POST')).toHaveLength(2);
+    await act(() => router.navigate('/takes'));
+    expect(screen.getByText('1 chosen:').parentElement).toHaveTextContent('take 3');
+  });
 });
 
 describe('tags', () => {
@@ -354,6 +381,15 @@ describe('tags', () => {
     );
     expect(await screen.findByText(/· rug · garage/)).toBeInTheDocument();
     expect(screen.getByRole('button', { name: 'Tag them' })).toHaveFocus();
+    expect(screen.getByText('Takes 13 and 14 are tagged garage.')).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Undo' }));
+    expect(await screen.findByText('The tags are as they were.')).toBeInTheDocument();
+    expect(requests.filter(({ method }) => method === 'PATCH').map(({ body }) => body)).toEqual([
+      { tags: ['rug', 'garage'] },
+      { tags: ['garage'] },
+      { tags: ['rug'] },
+      { tags: [] },
+    ]);
   });
 });
 

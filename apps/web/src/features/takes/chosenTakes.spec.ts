@@ -1,6 +1,6 @@
-import { doneWords, takeNumbers, typedTags } from './chosenTakes';
+import { doneWords, oldestFirst, takeNumbers, typedTags } from './chosenTakes';
 
-const takes = (...numbers: number[]) => numbers.map((number) => ({ id: String(number), number }));
+const takes = (...numbers: number[]) => numbers.map((number) => ({ number }));
 
 describe('several takes in words', () => {
   it('names them in order', () => {
@@ -22,4 +22,19 @@ describe('several takes in words', () => {
 it('reads tags with commas between, each once', () => {
   expect(typedTags(' rug, blankets ,, rug')).toEqual(['rug', 'blankets']);
   expect(typedTags('  ')).toEqual([]);
+});
+
+it('puts takes in the order they were recorded in, whatever their numbers', () => {
+  const take = (number: number, recordedAt: string) => ({
+    id: String(number),
+    number,
+    recordedAt,
+    deletedAt: null,
+  });
+  const takes = [
+    take(3, '2026-11-01T10:00:00Z'),
+    take(2, '2026-11-03T10:00:00Z'),
+    take(1, '2026-11-03T10:00:00Z'),
+  ];
+  expect(oldestFirst(takes).map(({ number }) => number)).toEqual([3, 1, 2]);
 });

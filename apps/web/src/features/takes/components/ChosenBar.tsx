@@ -1,28 +1,29 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
 import { useEffect, useRef, useState } from 'react';
 import { Button } from '../../../components/Button';
+import { ButtonLink } from '../../../components/ButtonLink';
 import { FieldError } from '../../../components/FieldError';
+import { chosenPlaces } from '../chosenPlaces';
 import { takeNumbers, type ChosenTake } from '../chosenTakes';
+import { failureWords } from '../hooks/useUndo';
 import { TagForm } from './TagForm';
 
-/** "2 chosen: takes 12 and 14", and what can be done to them. */
-export function ChosenBar({
-  chosen,
-  knownTags,
-  onDelete,
-  onTag,
-  onClear,
-}: {
+interface ChosenBarProps {
   chosen: readonly ChosenTake[];
   knownTags: readonly string[];
   onDelete: () => Promise<void>;
+  /** Set where the chosen takes are deleted ones: then this is what can be done to them. */
+  onRestore?: () => Promise<void>;
   onTag: (tags: string[]) => Promise<void>;
   onClear: () => void;
-}) {
-  const { tagging, setTagging, button } = useTagging();
-  const { failure, busy, remove } = useDeleting(onDelete);
+}
+
+/** "2 chosen: takes 12 and 14", and what can be done to them. */
+export function ChosenBar({ chosen, knownTags, onDelete, onRestore, onTag, onClear }: ChosenBarProps) {
+  const { open, setOpen, button } = useOpenForm();
+  const { failure, busy, run } = useOneAtATime();
   const them = chosen.length === 1 ? 'it' : 'them';
-  if (tagging)
+  if (open)
     return (
       <Box flex="1 1 100%" bg="target" boxShadow="inset 4px 0 0 var(--chakra-colors-ink)">
         <TagForm
@@ -30,8 +31,8 @@ export function ChosenBar({
           initial={[]}
           knownTags={knownTags}
           saveLabel={`Tag ${them}`}
-          onSave={(tags) => onTag(tags).then(() => setTagging(false))}
-          onLeave={() => setTagging(false)}
+          onSave={(tags) => onTag(tags).then(() => setOpen(false))}
+          onLeave={() => setOpen(false)}
         />
       </Box>
     );
@@ -41,12 +42,21 @@ export function ChosenBar({
         <span role="status">
           <chakra.b>{chosen.length} chosen:</chakra.b> {takeNumbers(chosen)}
         </span>
-        <Button look="outline" ref={button} onClick={() => setTagging(true)}>
-          Tag {them}
-        </Button>
-        <Button look="outline" aria-disabled={busy} onClick={() => void remove()}>
-          {busy ? 'Deleting…' : `Delete ${them}`}
-        </Button>
+        {onRestore ? (
+          <Button look="outline" aria-disabled={busy} onClick={() => void run(onRestore)}>
+            {busy ? 'Restoring…' : `Restore ${them}`}
+          </Button>
+        ) : (
+          <>
+            <ChosenPlaces chosen={chosen} />
+            <Button look="outline" ref={button} onClick={() => setOpen(true)}>
+              Tag {them}
+            </Button>
+            <Button look="outline" aria-disabled={busy} onClick={() => void run(onDelete)}>
+              {busy ? 'Deleting…' : `Delete ${them}`}
+            </Button>
+          </>
+        )}
         <Button look="plain" onClick={onClear}>
           Clear
         </Button>
@@ -56,32 +66,40 @@ export function ChosenBar({
   );
 }
 
-/** When the tags are written or left, the focus goes back to where it came from. */
-function useTagging() {
-  const [tagging, setTagging] = useState(false);
-  const wasTagging = useRef(false);
-  const button = useRef<HTMLButtonElement>(null);
-  useEffect(() => {
-    if (wasTagging.current && !tagging) button.current?.focus();
-    wasTagging.current = tagging;
-  }, [tagging]);
-  return { tagging, setTagging, button };
+function ChosenPlaces({ chosen }: { chosen: readonly ChosenTake[] }) {
+  return chosenPlaces(chosen).map(({ words, to }) => (
+    <ButtonLink key={words} look="outline" to={to}>
+      {words}
+    </ButtonLink>
+  ));
 }
 
-function useDeleting(onDelete: () => Promise<void>) {
+/** When what the form asks for is kept or left, the focus goes back to where it came from. */
+function useOpenForm() {
+  const [open, setOpen] = useState(false);
+  const wasOpen = useRef(false);
+  const button = useRef<HTMLButtonElement>(null);
+  useEffect(() => {
+    if (wasOpen.current && !open) button.current?.focus();
+    wasOpen.current = open;
+  }, [open]);
+  return { open, setOpen, button };
+}
+
+function useOneAtATime() {
   const [failure, setFailure] = useState('');
   const [busy, setBusy] = useState(false);
-  const remove = async () => {
+  const run = async (act: () => Promise<void>) => {
     if (busy) return;
     setBusy(true);
     setFailure('');
     try {
-      await onDelete();
+      await act();
     } catch (error) {
-      setFailure(error instanceof Error ? error.message : 'Deleting did not work. Try again.');
+      setFailure(failureWords(error));
     } finally {
       setBusy(false);
     }
   };
-  return { failure, busy, remove };
+  return { failure, busy, run };
 }

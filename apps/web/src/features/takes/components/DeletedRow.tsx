@@ -1,6 +1,5 @@
-import { Box } from '@chakra-ui/react';
 import type { TakeListItem, Target } from '@thudline/contracts';
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { takeName } from '../rowWords';
 import { RowAction, TakeRow } from './TakeRow';
 
@@ -9,11 +8,15 @@ export function DeletedRow({
   take,
   target,
   now,
+  chosen,
+  box,
   onRestore,
 }: {
   take: TakeListItem;
   target: Target;
   now: Date;
+  chosen: boolean;
+  box: ReactNode;
   onRestore?: () => Promise<void>;
 }) {
   const [busy, setBusy] = useState(false);
@@ -27,7 +30,8 @@ export function DeletedRow({
       take={take}
       target={target}
       now={now}
-      box={<Box role="cell" gridArea="box" />}
+      chosen={chosen}
+      box={box}
       action={
         onRestore && (
           <RowAction

@@ -23,10 +23,19 @@ export function TakesSheet() {
   const target = (me?.settings ?? defaultUserSettings).target;
   const { query, place, change, firstPage } = useTakesAddress();
   const { page, error, stale, retry } = useTakes(query, place.cursor);
-  const bench = useTakesBench(page?.items ?? [], place.cursor === null ? undefined : firstPage);
+  const bench = useTakesBench(page?.items ?? [], {
+    deleted: query.show === 'deleted',
+    onPageEmptied: place.cursor === null ? undefined : firstPage,
+  });
   const { undo } = bench;
   const bar = undo.words && (
-    <UndoBar words={undo.words} failure={undo.failure} onUndo={undo.undo} onDismiss={undo.dismiss} />
+    <UndoBar
+      words={undo.words}
+      takesFocus={undo.takesFocus}
+      failure={undo.failure}
+      onUndo={undo.undo}
+      onDismiss={undo.dismiss}
+    />
   );
   if (page && page.everyTotal === 0 && query.show !== 'deleted')
     return (
@@ -62,6 +71,7 @@ export function TakesSheet() {
                   chosen={bench.chosen}
                   knownTags={page.tags}
                   onDelete={bench.removeChosen}
+                  onRestore={query.show === 'deleted' ? bench.restoreChosen : undefined}
                   onTag={bench.tagChosen}
                   onClear={bench.clear}
                 />

@@ -42,7 +42,12 @@ export function TakesTable({
         const shared = { take, target, now };
         if (take.deletedAt)
           return (
-            <DeletedRow key={take.id} {...shared} onRestore={actions && (() => actions.restore(take))} />
+            <DeletedRow
+              key={take.id}
+              {...shared}
+              {...choice(take, actions)}
+              onRestore={actions && (() => actions.restore(take))}
+            />
           );
         if (isMeasuring(take.measurement))
           return <MeasuringRow key={take.id} {...{ take, now }} canStop={!!actions} />;
@@ -61,6 +66,16 @@ export function TakesTable({
   );
 }
 
+function choice(take: TakeListItem, actions: RowActions | undefined) {
+  const chosen = actions?.isChosen(take) ?? false;
+  const box = actions ? (
+    <ChooseCell {...{ take, chosen }} onChoose={(next) => actions.choose(take, next)} />
+  ) : (
+    <Box role="cell" gridArea="box" />
+  );
+  return { chosen, box };
+}
+
 function ReadyRow({
   take,
   target,
@@ -74,9 +89,8 @@ function ReadyRow({
   actions?: RowActions;
   tagging: ReturnType<typeof useTagging>;
 }) {
-  if (!actions) return <TakeRow {...{ take, target, now }} box={<Box role="cell" gridArea="box" />} />;
-  const chosen = actions.isChosen(take);
-  const box = <ChooseCell {...{ take, chosen }} onChoose={(next) => actions.choose(take, next)} />;
+  const { chosen, box } = choice(take, actions);
+  if (!actions) return <TakeRow {...{ take, target, now, box }} />;
   if (take.summary === null)
     return (
       <UnmeasuredRow

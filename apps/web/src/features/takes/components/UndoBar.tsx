@@ -13,19 +13,23 @@ const BarButton = chakra(TextButton, {
 /** What was just done, and the way back; stays until it is dismissed. */
 export function UndoBar({
   words,
+  takesFocus,
   failure,
   onUndo,
   onDismiss,
 }: {
   words: string;
+  /** What had the focus is gone with the row; here is what one may want next. */
+  takesFocus: boolean;
   failure: string;
   /** Absent where there is nothing to take back. */
   onUndo?: () => void;
   onDismiss: () => void;
 }) {
   const undo = useRef<HTMLButtonElement>(null);
-  // What had the focus is gone with the row; here is what one may want next.
-  useEffect(() => undo.current?.focus(), [words]);
+  useEffect(() => {
+    if (takesFocus) undo.current?.focus();
+  }, [words, takesFocus]);
   return (
     <Flex
       role="status"

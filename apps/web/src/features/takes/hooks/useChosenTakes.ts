@@ -7,8 +7,10 @@ export function useChosenTakes() {
   return {
     chosen,
     isChosen: (take: ChosenTake) => chosen.some(({ id }) => id === take.id),
-    choose: ({ id, number }: ChosenTake, on: boolean) =>
-      setChosen((now) => (on ? [...now, { id, number }] : now.filter((take) => take.id !== id))),
+    choose: ({ id, number, recordedAt, deletedAt }: ChosenTake, on: boolean) =>
+      setChosen((now) =>
+        on ? [...now, { id, number, recordedAt, deletedAt }] : now.filter((take) => take.id !== id),
+      ),
     clear: () => setChosen([]),
   };
 }

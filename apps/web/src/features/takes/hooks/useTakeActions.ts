@@ -3,6 +3,8 @@ import { useSWRConfig } from 'swr';
 import { requestJson, requestNothing } from '../../../lib/apiClient';
 import { isKeyOfTake, isTakesKey } from './takesKeys';
 
+type EachTags = { takeId: string; tags: string[] }[];
+
 /** What can be done to takes from the list; the list is stale after each, and so is what is known of the take. */
 export function useTakeActions() {
   const { mutate } = useSWRConfig();
@@ -48,19 +50,28 @@ export function useTakeActions() {
       await setTags(takeId, tags);
       await mutate(isTakesKey);
     },
-    /** Each keeps the tags it has; they are read first, since the list may be older than they are. */
-    addTags: async (takeIds: readonly string[], tags: readonly string[]) => {
+    /**
+     * Each keeps the tags it has; they are read first, since the list may be older than they are.
+     *
+     * @returns the tags of before
+     */
+    addTags: async (takeIds: readonly string[], tags: readonly string[]): Promise<EachTags> => {
+      const before: EachTags = [];
       await eachOf(takeIds, async (takeId) => {
         const take = await requestJson(paths.take(takeId), takeResponse);
         await setTags(takeId, [...new Set([...take.tags, ...tags])]);
+        before.push({ takeId, tags: take.tags });
       }).finally(() => mutate(isTakesKey));
+      return before;
     },
+    setEachTags: (all: EachTags) =>
+      eachOf(all, ({ takeId, tags }) => setTags(takeId, tags)).finally(() => mutate(isTakesKey)),
     stopMeasuring: (takeId: string) => tellMeasuring(takeId, paths.cancelMeasurement(takeId)),
     measureAgain: (takeId: string) => tellMeasuring(takeId, paths.measureAgain(takeId)),
   };
 }
 
 /** One after the other; the first that fails is told, with those before it done. */
-async function eachOf(takeIds: readonly string[], act: (takeId: string) => Promise<void>): Promise<void> {
-  for (const takeId of takeIds) await act(takeId);
+async function eachOf<Each>(all: readonly Each[], act: (each: Each) => Promise<void>): Promise<void> {
+  for (const each of all) await act(each);
 }

@@ -1,40 +1,41 @@
 import { useState } from 'react';
-import { doneWords, type ChosenTake } from '../chosenTakes';
-import { useTakeActions } from './useTakeActions';
 
-interface Done {
-  takes: readonly ChosenTake[];
-  what: 'deleted' | 'back';
+export interface Done {
+  words: string;
+  /** What had the focus is gone with it, so the bar takes it. */
+  takesFocus?: boolean;
+  /** Absent where there is nothing to take back. */
+  takeBack?: { act: () => Promise<void>; words: string };
 }
 
-/** Deleting and bringing back; the last of it stands on the page until it is dismissed. */
+/** What was done last and the way back; it stands on the page until it is dismissed. */
 export function useUndo() {
-  const { remove, restore } = useTakeActions();
   const [done, setDone] = useState<Done | null>(null);
   const [failure, setFailure] = useState('');
-  const bringBack = async (takes: readonly ChosenTake[]) => {
+  const tell = (next: Done, failed = '') => {
+    setDone(next);
+    setFailure(failed);
+  };
+  const takeBack = done?.takeBack;
+  const undo = async () => {
+    if (!takeBack) return;
     setFailure('');
     try {
-      await restore(takes.map(({ id }) => id));
-      setDone({ takes, what: 'back' });
+      await takeBack.act();
+      tell({ words: takeBack.words, takesFocus: true });
     } catch (error) {
-      setDone((now) => now ?? { takes, what: 'deleted' });
-      setFailure(error instanceof Error ? error.message : 'Bringing it back did not work. Try again.');
+      setFailure(failureWords(error));
     }
   };
   return {
-    words: done && doneWords(done.takes, done.what),
+    words: done?.words ?? null,
+    takesFocus: done?.takesFocus ?? false,
     failure,
-    /** Offers to undo what was done, also where the rest did not work. */
-    remove: async (takes: readonly ChosenTake[]) => {
-      setFailure('');
-      const { gone, error } = await remove(takes.map(({ id }) => id));
-      const deleted = takes.filter(({ id }) => gone.includes(id));
-      if (deleted.length > 0) setDone({ takes: deleted, what: 'deleted' });
-      return { deleted, error };
-    },
-    bringBack,
-    undo: done?.what === 'deleted' ? () => void bringBack(done.takes) : undefined,
+    tell,
+    undo: takeBack && (() => void undo()),
     dismiss: () => setDone(null),
   };
 }
+
+export const failureWords = (error: unknown) =>
+  error instanceof Error ? error.message : 'That did not work. Try again.';

@@ -1,0 +1,18 @@
+import type { ChosenTake } from './chosenTakes';
+
+/** A page that takes chosen takes further, as a button of the bar. */
+export interface ChosenPlace {
+  words: string;
+  /** Null where these takes can't go there. */
+  address: (takes: readonly ChosenTake[]) => string | null;
+}
+
+/** Add a page here. */
+const places: readonly ChosenPlace[] = [];
+
+/** Where these takes can go on to. */
+export const chosenPlaces = (takes: readonly ChosenTake[]): { words: string; to: string }[] =>
+  places.flatMap(({ words, address }) => {
+    const to = address(takes);
+    return to === null ? [] : [{ words, to }];
+  });
