@@ -88,7 +88,7 @@ export interface KickHitFigures {
    * added at polarity s and gain g hold kick + g²·overhead + 2·s·g·cross.
    */
   readonly lowEnergy: { readonly kick: number; readonly overhead: number; readonly cross: number };
-  /** Third-octave levels in the overhead, dBFS (RMS over the hit; a full-scale sine reads −3.01). */
+  /** Third-octave levels in the overhead, dBFS (RMS over a kick's whole window; a full-scale sine reads −3.01). */
   readonly overheadThirdOctavesDbfs: { readonly hz63: number | null; readonly hz125: number | null };
 }
 

@@ -110,9 +110,8 @@ function kickHitsOfTake(
   readings: readonly PairReading[],
   { kick, others, tracks }: { kick: number; others: readonly number[]; tracks: number },
 ): KickHit[] {
-  return (readings[0]?.kickHits ?? []).map(({ onsetSample, startSample, peaks }, hit) => ({
-    onsetSample,
-    startSample,
+  return (readings[0]?.kickHits ?? []).map(({ peaks, ...kickHit }, hit) => ({
+    ...kickHit,
     peaks: Array.from({ length: tracks }, (_, track) =>
       track === kick ? peaks[0] : readings[others.indexOf(track)].kickHits[hit].peaks[1],
     ),

@@ -1,10 +1,11 @@
 import type { AgreementFacts, ArrivalFacts, HitFacts, PairSpectrum } from '../facts';
 import type { TrackSource } from '../trackSource';
 import { agreement } from './agreement/agreement';
-import { lowCross } from './agreement/lowCross';
+import { hitBalance, type HitBalance } from './agreement/hitBalance';
 import { matchGainDb } from './agreement/matchGain';
-import { createPairGatherer, kickWindow, type HitBalance } from './agreement/pairSpectrum';
+import { createPairGatherer, kickWindow } from './agreement/pairSpectrum';
 import { arrivalStretch, createArrivalMeter } from './arrival/arrival';
+import { attackDb } from './comparing/attack';
 import type { KickCandidate } from './hits/kickCandidates';
 import { readKickHits, type KickHitRead } from './hits/readKickHits';
 import type { KickHit } from './hits/listHits';
@@ -35,14 +36,22 @@ export async function readPair(options: ReadPairOptions): Promise<PairReading> {
   const { kick, overhead, candidates, onProgress } = options;
   const { sampleRateHz } = kick;
   const arrivalMeter = createArrivalMeter(sampleRateHz);
-  const gatherer = createPairGatherer({ sampleRateHz, lowCross });
+  const gatherer = createPairGatherer({ sampleRateHz, perHit: hitBalance });
   const balances: HitBalance[] = [];
   const kickHits: KickHit[] = [];
   const take = (hit: KickHitRead, toNext: number): void => {
     arrivalMeter.add(hit);
-    balances.push(gatherer.add({ ...hit, toNext }));
+    const balance = gatherer.add({ ...hit, toNext });
+    balances.push(balance);
     const { onsetSample, startSample } = hit;
-    kickHits.push({ onsetSample, startSample, peaks: peaksOf(hit, { toNext, sampleRateHz }) });
+    const { lowEnergy, overheadThirdOctavesDbfs } = balance;
+    const toEnd = Math.min(toNext, kick.frames - onsetSample);
+    kickHits.push({
+      onsetSample,
+      startSample,
+      peaks: peaksOf(hit, { toNext, sampleRateHz }),
+      figures: { attackDb: attackOf(hit, { toEnd, sampleRateHz }), lowEnergy, overheadThirdOctavesDbfs },
+    });
     onProgress(kickHits.length / candidates.length);
   };
   // One hit is held back, since where it ends depends on the next one's onset.
@@ -74,4 +83,13 @@ function peaksOf(
   return [kick, overhead].map((samples) =>
     samples.subarray(start, end).reduce((peak, sample) => Math.max(peak, Math.abs(sample)), 0),
   );
+}
+
+/** Null where the hit is cut off, by the next one or by the end of the file. */
+function attackOf(
+  { kick, onsetAt, onsetSample, startSample }: KickHitRead,
+  { toEnd, sampleRateHz }: { toEnd: number; sampleRateHz: number },
+): number | null {
+  const startAt = onsetAt - (onsetSample - startSample);
+  return attackDb(kick.subarray(0, onsetAt + toEnd), { sampleRateHz, startAt });
 }

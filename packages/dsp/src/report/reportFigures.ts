@@ -40,8 +40,8 @@ export function reportFigures(
     })),
     arrival: arrivalReport(pair, temperatureC),
     agreement: agreementReport(pair),
-    balance: facts.balance ?? null,
-    room: facts.room ? { ...facts.room, bands: [...facts.room.bands] } : null,
+    balance: balanceReport(facts.balance),
+    room: roomReport(facts.room),
     findings: filesFindings(facts.notices),
   };
   return { ...figures, findings: findings(figures, { lengthUnit: 'metre', target }) };
@@ -73,6 +73,25 @@ function arrivalReport({ arrival }: PairFacts, temperatureC: number): ArrivalRep
     ...arrival,
     pathDifferenceM: arrivalMs === null ? null : pathDifferenceM(arrivalMs, temperatureC),
   };
+}
+
+/** What each hit says is left out: it is for comparing takes. */
+function balanceReport(balance: TakeFacts['balance']): ReportFigures['balance'] {
+  if (!balance) return null;
+  const { drumsLufs, cymbalsLufs, differenceDb, drumHits, cymbalHits, reason } = balance;
+  return { drumsLufs, cymbalsLufs, differenceDb, drumHits, cymbalHits, reason };
+}
+
+function roomReport(room: TakeFacts['room']): ReportFigures['room'] {
+  if (!room) return null;
+  const { snareHits, decayS, earlyS, reason } = room;
+  const bands = room.bands.map(({ centreHz, t20S, earlyS: bandEarlyS, earlyToLateDb }) => ({
+    centreHz,
+    t20S,
+    earlyS: bandEarlyS,
+    earlyToLateDb,
+  }));
+  return { snareHits, decayS, earlyS, bands, reason };
 }
 
 function agreementReport({ agreement }: PairFacts): AgreementReport {

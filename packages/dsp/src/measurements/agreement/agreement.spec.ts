@@ -13,7 +13,11 @@ const arrival = (arrivalMs: number | null, confidence = 1): ArrivalFacts => ({
   firstSwing: { kick: 'up', overhead: 'up' },
   reason: null,
 });
-const balances = Array.from({ length: 8 }, () => ({ lowCross: 1, lowCrossLowCut: 1 }));
+const balances = Array.from({ length: 8 }, () => ({
+  lowEnergy: { kick: 1, overhead: 1, cross: 1 },
+  lowCrossLowCut: 1,
+  overheadThirdOctavesDbfs: { hz63: -40, hz125: -45 },
+}));
 
 describe('agreement of a pair', () => {
   it('says keep of two alike and names every choice against the power sum', () => {

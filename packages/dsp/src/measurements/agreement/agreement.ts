@@ -2,8 +2,8 @@ import type { AgreementFacts, ArrivalFacts, NamedChoiceFacts, PairSpectrum } fro
 import { bestShift } from './bestShift';
 import { bandEnergies, forBins, lowEnd, type Band } from './choiceEnergy';
 import { choiceLowEnd, deepestThirdOctave, flipGain } from './choiceLevels';
+import type { HitBalance } from './hitBalance';
 import { withLowCut } from './lowCut';
-import type { HitBalance } from './pairSpectrum';
 import { thirdOctaves } from './thirdOctaves';
 import { verdictOf, type VerdictResult } from './verdict';
 
@@ -26,7 +26,7 @@ const NAMED_SHARE = 0.01;
 export function agreement({ spectrum, balances, matchGainDb, arrival }: AgreementInput): AgreementFacts {
   if (!spectrum || matchGainDb === null) return nothingToAdd(balances.length, spectrum !== null);
   const sums = judge(spectrum, {
-    crosses: balances.map((hit) => hit.lowCross),
+    crosses: balances.map((hit) => hit.lowEnergy.cross),
     gainDb: matchGainDb,
     arrival,
   });

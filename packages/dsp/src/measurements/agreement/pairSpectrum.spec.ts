@@ -2,7 +2,7 @@ import { SignalError } from '../../assert';
 import { delayedPair } from '../../testing/delayedPair';
 import { smallKit } from '../../testing/smallKit';
 import { flipGain } from './choiceLevels';
-import { lowCross } from './lowCross';
+import { hitBalance } from './hitBalance';
 import { lowCutResponse, withLowCut } from './lowCut';
 import { createPairGatherer, pairTransformSize } from './pairSpectrum';
 import { decodePairSpectrum, encodePairSpectrum } from './pairSpectrumBytes';
@@ -10,7 +10,7 @@ import { decodePairSpectrum, encodePairSpectrum } from './pairSpectrumBytes';
 describe('the pair spectrum', () => {
   const kit = smallKit({ delayMs: 1.5 });
   const gather = (kick: Float32Array, overhead: Float32Array, toNext = 24000) => {
-    const gatherer = createPairGatherer({ sampleRateHz: kit.sampleRateHz, lowCross });
+    const gatherer = createPairGatherer({ sampleRateHz: kit.sampleRateHz, perHit: hitBalance });
     for (const onsetAt of kit.kickAt) gatherer.add({ kick, overhead, onsetAt, toNext });
     return gatherer.result();
   };
@@ -56,7 +56,7 @@ describe('the pair spectrum', () => {
   });
 
   it('is null without a hit and takes a hit at the very edges of a file', () => {
-    const empty = createPairGatherer({ sampleRateHz: 48000, lowCross });
+    const empty = createPairGatherer({ sampleRateHz: 48000, perHit: hitBalance });
     expect(empty.result()).toBeNull();
     empty.add({ kick: Float32Array.of(1), overhead: Float32Array.of(1), onsetAt: 0, toNext: Infinity });
     expect([...(empty.result()?.skk ?? [])].every(Number.isFinite)).toBe(true);

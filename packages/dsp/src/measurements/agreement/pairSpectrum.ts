@@ -11,16 +11,20 @@ export interface PairHit {
   readonly toNext: number;
 }
 
-/** What one hit alone says. */
-export interface HitBalance {
-  /** Σ Re Sko over 30–150 Hz: positive where the two add as recorded. */
-  readonly lowCross: number;
-  /** The same with a low cut on the overhead. */
-  readonly lowCrossLowCut: number;
+/** One hit's spectra, bin by bin; only valid until the next hit. */
+export interface HitBins {
+  readonly binHz: number;
+  readonly skk: Float64Array;
+  readonly soo: Float64Array;
+  readonly skoRe: Float64Array;
+  readonly skoIm: Float64Array;
+  /** A band's Σ Soo times this is its mean square over a whole window; a shorter hit counts as silent after its end. */
+  readonly meanSquareOfBins: number;
 }
 
-export interface PairGatherer {
-  add(hit: PairHit): HitBalance;
+export interface PairGatherer<Told> {
+  /** @returns what this hit alone says */
+  add(hit: PairHit): Told;
   /** @returns null where no hit was added */
   result(): PairSpectrum | null;
 }
@@ -41,10 +45,10 @@ export function pairTransformSize(sampleRateHz: number): number {
   return powerOfTwoFrom(sampleRateHz / WIDEST_BIN_HZ);
 }
 
-export interface PairGathererOptions {
+export interface PairGathererOptions<Told> {
   readonly sampleRateHz: number;
-  /** Weights a hit's cross spectrum into {@link HitBalance}. */
-  readonly lowCross: (skoRe: Float64Array, skoIm: Float64Array, binHz: number) => HitBalance;
+  /** What is told of each hit alone. */
+  readonly perHit: (bins: HitBins) => Told;
 }
 
 /**
@@ -53,28 +57,38 @@ export interface PairGathererOptions {
  * Each hit counts by its energy, so loud hits weigh most. Both microphones get the same window, so a delay between them
  * stays in the phase of Sko.
  */
-export function createPairGatherer({ sampleRateHz, lowCross }: PairGathererOptions): PairGatherer {
+export function createPairGatherer<Told>(options: PairGathererOptions<Told>): PairGatherer<Told> {
+  const { sampleRateHz, perHit } = options;
   const size = pairTransformSize(sampleRateHz);
   const transforms = { kick: createRealTransform(size), overhead: createRealTransform(size) };
   const binHz = sampleRateHz / size;
   const binCount = Math.min(size / 2 + 1, Math.floor(HIGHEST_KEPT_HZ / binHz) + 1);
   const [skk, soo, skoRe, skoIm] = Array.from({ length: 4 }, () => new Float64Array(binCount));
-  const [re, im] = [new Float64Array(binCount), new Float64Array(binCount)];
+  const hitBins: HitBins = {
+    binHz,
+    skk: new Float64Array(binCount),
+    soo: new Float64Array(binCount),
+    skoRe: new Float64Array(binCount),
+    skoIm: new Float64Array(binCount),
+    meanSquareOfBins: 2 / size / windowEnergy(sampleRateHz),
+  };
   let hitCount = 0;
   return {
     add(hit) {
       const k = transforms.kick.spectrum(windowed(hit.kick, hit, sampleRateHz));
       const o = transforms.overhead.spectrum(windowed(hit.overhead, hit, sampleRateHz));
       for (let i = 0; i < binCount; i += 1) {
-        re[i] = k.re[i] * o.re[i] + k.im[i] * o.im[i];
-        im[i] = k.im[i] * o.re[i] - k.re[i] * o.im[i];
-        skk[i] += k.re[i] ** 2 + k.im[i] ** 2;
-        soo[i] += o.re[i] ** 2 + o.im[i] ** 2;
-        skoRe[i] += re[i];
-        skoIm[i] += im[i];
+        hitBins.skk[i] = k.re[i] ** 2 + k.im[i] ** 2;
+        hitBins.soo[i] = o.re[i] ** 2 + o.im[i] ** 2;
+        hitBins.skoRe[i] = k.re[i] * o.re[i] + k.im[i] * o.im[i];
+        hitBins.skoIm[i] = k.im[i] * o.re[i] - k.re[i] * o.im[i];
+        skk[i] += hitBins.skk[i];
+        soo[i] += hitBins.soo[i];
+        skoRe[i] += hitBins.skoRe[i];
+        skoIm[i] += hitBins.skoIm[i];
       }
       hitCount += 1;
-      return lowCross(re, im, binHz);
+      return perHit(hitBins);
     },
     result: () =>
       hitCount === 0
@@ -88,6 +102,13 @@ export function createPairGatherer({ sampleRateHz, lowCross }: PairGathererOptio
             skoIm: Float32Array.from(skoIm),
           },
   };
+}
+
+/** Σ w² of a whole window: the mean square of a raised-cosine end is 3/8. */
+function windowEnergy(sampleRateHz: number): number {
+  const lengthMs = kickWindow.beforeMs + kickWindow.afterMs;
+  const endsMs = FADE_IN_MS + FADE_OUT_SHARE * lengthMs;
+  return (sampleRateHz * (lengthMs - (5 / 8) * endsMs)) / 1000;
 }
 
 function windowed(samples: Float32Array, { onsetAt, toNext }: PairHit, sampleRateHz: number): Float64Array {

@@ -21,3 +21,12 @@ export function polarityChanged(before: PairSpectrum, after: PairSpectrum): numb
   if (!(powerBefore > 0 && powerAfter > 0)) return null;
   return Math.max(-1, Math.min(1, cross / Math.sqrt(powerBefore * powerAfter)));
 }
+
+/** How far from 0 the likeness of two pairs must be to say anything; our choice, half way. */
+const CLEAR_LIKENESS = 0.5;
+
+/** What a likeness, as {@link polarityChanged} tells it, says. @returns null where it can't be told */
+export function seenPolarity(likeness: number | null): 'flipped' | 'as-before' | null {
+  if (likeness === null || Math.abs(likeness) < CLEAR_LIKENESS) return null;
+  return likeness < 0 ? 'flipped' : 'as-before';
+}

@@ -40,6 +40,12 @@ describe('cymbals against drums', () => {
     expect(differenceDb).toBeCloseTo(-6.02, 2);
   });
 
+  it('keeps what each hit says', async () => {
+    const { perHit, drumsLufs } = await told(played([...drums(4), ...cymbals(6)]));
+    expect([perHit?.drumsLufs.length, perHit?.cymbalsLufs.length, drumsLufs]).toEqual([4, 6, null]);
+    for (const level of perHit?.drumsLufs ?? []) expect(Math.abs(level - -15.05)).toBeLessThan(0.05);
+  });
+
   it('doesn’t change with gain, polarity, or an offset of the file', async () => {
     const plain = played([...drums(5), ...cymbals(5)]);
     const { differenceDb } = await told(plain);

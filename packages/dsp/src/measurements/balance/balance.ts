@@ -4,6 +4,7 @@ import type { TrackSource } from '../../trackSource';
 import { evenly } from '../evenly';
 import { filtered } from '../filters/filterChain';
 import { kWeighting } from '../loudness/kWeighting';
+import { rounded } from '../rounded';
 import { median } from '../statistics';
 
 /** Section 6: the level is taken over this, and only of hits with nothing for so long before. */
@@ -62,6 +63,7 @@ export async function balance(overhead: TrackSource, hits: readonly HitFacts[]):
     drumHits: drums.length,
     cymbalHits: cymbals.length,
     reason: reasonFor(drumsLufs, cymbalsLufs),
+    perHit: { drumsLufs: drums.map(rounded), cymbalsLufs: cymbals.map(rounded) },
   };
 }
 

@@ -2,7 +2,8 @@ import { SignalError } from '../../assert';
 import type { HitFacts, PairSpectrum } from '../../facts';
 import { delayedPair } from '../../testing/delayedPair';
 import { smallKit } from '../../testing/smallKit';
-import { attackDb, bleedDb, evennessDb, lowEndOverKickDb } from './tryOutFigures';
+import { attackDb } from './attack';
+import { bleedDb, evennessDb, lowEndOverKickDb } from './tryOutFigures';
 
 const asRecorded = { flipped: false, shiftMs: 0, gainDb: 0 };
 const hit = (kind: HitFacts['kind'], kickDbfs: number | null): HitFacts => ({

@@ -1,4 +1,5 @@
 import type { TrackSource } from '../../trackSource';
+import { ratioDb, type Band } from '../agreement/choiceEnergy';
 import { butterworthBand } from '../filters/butterworth';
 import { filtered } from '../filters/filterChain';
 import { DECAY_HOP_MS, decayFigures, type DecayFigures } from './decayFigures';
@@ -26,8 +27,20 @@ const WIRES_S = { from: 0.02, to: 0.12 };
 /** Snares of the synthetic kit lie above −8 dB; toms by what is known of them far below; our choice. */
 const WIRES_OVER_BODY_DB = -18;
 
+/** What a hit's brightness is taken from, and over how long; the body's octaves are those that tell the kind of a hit. */
+const BRIGHT_BAND = { lowHz: 2000, highHz: 10000 };
+const BRIGHT_S = { from: 0, to: 0.1 };
+
+/** What one snare hit says of the room. */
+export interface SnareRead {
+  /** In the order of {@link DECAY_BANDS_HZ}. */
+  readonly bands: readonly DecayFigures[];
+  /** 2–10 kHz against 100 Hz–1 kHz over its first 100 ms; null where either is silent. */
+  readonly brightnessDb: number | null;
+}
+
 /** One hit's decay, band by band; null for a drum without wires. */
-export async function readDecay(overhead: TrackSource, hit: LoudHit): Promise<DecayFigures[] | null> {
+export async function readDecay(overhead: TrackSource, hit: LoudHit): Promise<SnareRead | null> {
   const { sampleRateHz } = overhead;
   const from = Math.round((hit.timeS - BEFORE_S) * sampleRateHz);
   const endS = Math.min(hit.nextS - GUARD_S, hit.timeS + LONGEST_S);
@@ -35,13 +48,19 @@ export async function readDecay(overhead: TrackSource, hit: LoudHit): Promise<De
   const samples = await overhead.read(from, end);
   const at = (seconds: number): number => Math.round((BEFORE_S + seconds) * sampleRateHz);
   const startS = startOf(samples, { at, sampleRateHz });
-  if (!hasWires(samples, { at: (seconds) => at(startS + seconds), sampleRateHz })) return null;
-  return DECAY_BANDS_HZ.map((centreHz) => {
+  const place = { at: (seconds: number): number => at(startS + seconds), sampleRateHz };
+  if (!hasWires(samples, place)) return null;
+  const bands = DECAY_BANDS_HZ.map((centreHz) => {
     const band = octave(samples, centreHz, sampleRateHz);
-    const before = { from: at(startS + BACKGROUND_S.from), to: at(startS + BACKGROUND_S.to) };
+    const before = { from: place.at(BACKGROUND_S.from), to: place.at(BACKGROUND_S.to) };
     const backgroundDb = 10 * Math.log10(meanPower(band, before) || Number.MIN_VALUE);
-    return decayFigures(hopPowers(band.subarray(at(startS)), sampleRateHz), backgroundDb);
+    return decayFigures(hopPowers(band.subarray(place.at(0)), sampleRateHz), backgroundDb);
   });
+  const over = { ...place, span: BRIGHT_S };
+  return {
+    bands,
+    brightnessDb: ratioDb(bandPower(samples, BRIGHT_BAND, over), bandPower(samples, BODY_BAND, over)),
+  };
 }
 
 interface Place {
@@ -58,11 +77,19 @@ function startOf(samples: Float32Array, { at, sampleRateHz }: Place): number {
   return START_SEARCH_S.from + Math.max(0, first) / sampleRateHz;
 }
 
-function hasWires(samples: Float32Array, { at, sampleRateHz }: Place): boolean {
-  const stretch = { from: at(WIRES_S.from), to: at(WIRES_S.to) };
-  const power = (band: { lowHz: number; highHz: number }): number =>
-    meanPower(filtered(samples, butterworthBand({ sampleRateHz, ...band })), stretch);
-  return power(WIRES_BAND) > power(BODY_BAND) * Math.pow(10, WIRES_OVER_BODY_DB / 10);
+function hasWires(samples: Float32Array, place: Place): boolean {
+  const over = { ...place, span: WIRES_S };
+  const wires = bandPower(samples, WIRES_BAND, over);
+  return wires > bandPower(samples, BODY_BAND, over) * Math.pow(10, WIRES_OVER_BODY_DB / 10);
+}
+
+function bandPower(
+  samples: Float32Array,
+  band: Band,
+  { at, sampleRateHz, span }: Place & { readonly span: { readonly from: number; readonly to: number } },
+): number {
+  const inBand = filtered(samples, butterworthBand({ sampleRateHz, ...band }));
+  return meanPower(inBand, { from: at(span.from), to: at(span.to) });
 }
 
 /** An octave band with 24 dB per octave on either side, so that a neighbour's ringing stays out. */

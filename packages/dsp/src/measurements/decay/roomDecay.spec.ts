@@ -1,6 +1,7 @@
 import type { HitFacts } from '../../facts';
 import { arrayTrack } from '../../testing/arrayTrack';
 import { randomNumbers } from '../../testing/randomNumbers';
+import { median } from '../statistics';
 import { roomDecay } from './roomDecay';
 
 const { exp, sin, PI, LN10 } = Math;
@@ -49,6 +50,28 @@ describe('the decay of the room', () => {
       expect(Math.abs((earlyS?.median ?? NaN) / decayS - 1)).toBeLessThan(0.15);
     }
     expect(Math.abs((middleS ?? NaN) / decayS - 1)).toBeLessThan(0.06);
+  });
+
+  it('keeps what each hit says, also where six are too few', async () => {
+    const { bands } = await told(played({ decayS: 0.4 }));
+    for (const { t20S, perHit } of bands) {
+      expect(perHit?.t20S).toHaveLength(8);
+      // Kept to a ten-thousandth.
+      expect(median(perHit?.t20S ?? [])).toBeCloseTo(t20S?.median ?? NaN, 3);
+    }
+    const few = await told(played({ decayS: 0.4, count: 5 }));
+    expect(few.bands[1].t20S).toBeNull();
+    expect(few.bands[1].perHit?.t20S).toHaveLength(5);
+  });
+
+  it('tells how bright each snare is: white noise by the widths of its bands', async () => {
+    const { brightnessPerHitDb } = await told(played({ decayS: 0.4 }));
+    expect(brightnessPerHitDb).toHaveLength(8);
+    // 8 kHz against 0.9 kHz; every edge lies π/(2√2) times higher for noise, the uppermost less (the bilinear transform).
+    const expected = 10 * Math.log10(8000 / 900);
+    expect(Math.abs((median(brightnessPerHitDb ?? []) ?? NaN) - expected)).toBeLessThan(0.5);
+    const dull = await told(played({ decayS: 0.4, wires: false }));
+    expect(dull.brightnessPerHitDb).toEqual([]);
   });
 
   it('doesn’t change with gain and polarity', async () => {

@@ -1,8 +1,9 @@
 import type { HitFacts, RoomBandFacts, RoomFacts, SpreadFigure } from '../../facts';
 import type { TrackSource } from '../../trackSource';
+import { rounded } from '../rounded';
 import { interquartileRange, median } from '../statistics';
 import type { DecayFigures } from './decayFigures';
-import { DECAY_BANDS_HZ, readDecay } from './readDecay';
+import { DECAY_BANDS_HZ, readDecay, type SnareRead } from './readDecay';
 import { loudDrumHits } from './snareHits';
 
 /** Section 7. */
@@ -26,7 +27,7 @@ export async function roomDecay(
   overhead: TrackSource,
   { hits, place }: { readonly hits: readonly HitFacts[]; readonly place: number },
 ): Promise<RoomFacts> {
-  const read: DecayFigures[][] = [];
+  const read: SnareRead[] = [];
   for (const hit of loudDrumHits(hits, place)) {
     const figures = await readDecay(overhead, hit);
     if (figures) read.push(figures);
@@ -34,7 +35,7 @@ export async function roomDecay(
   const bands = DECAY_BANDS_HZ.map((centreHz, band) =>
     bandFacts(
       centreHz,
-      read.map((hit) => hit[band]),
+      read.map((hit) => hit.bands[band]),
     ),
   );
   const middle = bands.filter((band) => MIDDLE_BANDS_HZ.includes(band.centreHz));
@@ -44,17 +45,26 @@ export async function roomDecay(
     earlyS: meanOf(middle.map((band) => band.earlyS)),
     bands,
     reason: reasonFor(read.length, middle),
+    brightnessPerHitDb: read.flatMap(({ brightnessDb }) => brightnessDb ?? []).map(rounded),
   };
 }
 
 function bandFacts(centreHz: number, hits: readonly DecayFigures[]): RoomBandFacts {
+  const judged = (figure: keyof DecayFigures): number[] => hits.flatMap((hit) => hit[figure] ?? []);
   const over = (figure: keyof DecayFigures): SpreadFigure | null => {
-    const values = hits.flatMap((hit) => hit[figure] ?? []);
+    const values = judged(figure);
     const middle = median(values);
     const iqr = interquartileRange(values);
     return values.length < FEWEST_HITS || middle === null || iqr === null ? null : { median: middle, iqr };
   };
-  return { centreHz, t20S: over('t20S'), earlyS: over('earlyS'), earlyToLateDb: over('earlyToLateDb') };
+  const each = (figure: keyof DecayFigures): number[] => judged(figure).map(rounded);
+  return {
+    centreHz,
+    t20S: over('t20S'),
+    earlyS: over('earlyS'),
+    earlyToLateDb: over('earlyToLateDb'),
+    perHit: { t20S: each('t20S'), earlyS: each('earlyS'), earlyToLateDb: each('earlyToLateDb') },
+  };
 }
 
 function meanOf(figures: readonly (SpreadFigure | null)[]): number | null {

@@ -1,5 +1,5 @@
 import { amplitudeDb } from '../../decibel';
-import type { HitFacts } from '../../facts';
+import type { HitFacts, KickHitFigures } from '../../facts';
 import type { OverheadHit } from './overheadHits';
 
 /** A kick hit with the largest |x| of each track around it. */
@@ -7,6 +7,8 @@ export interface KickHit {
   readonly onsetSample: number;
   readonly startSample: number;
   readonly peaks: readonly number[];
+  /** Only in a take with an overhead. */
+  readonly figures?: KickHitFigures;
 }
 
 /** What the overhead hears within this of a kick's onset is that kick, or something struck with it. */
@@ -38,7 +40,10 @@ export function listHits(
     peaksDbfs: peaks.map(amplitudeDb),
   });
   return [
-    ...kicks.map((hit) => told(hit.startSample, 'kick', hit.peaks)),
+    ...kicks.map(({ startSample, peaks, figures }) => ({
+      ...told(startSample, 'kick', peaks),
+      ...(figures && { kickFigures: figures }),
+    })),
     ...alone.map((hit) => told(hit.atSample, hit.kind, hit.peaks)),
   ].sort((a, b) => a.timeS - b.timeS);
 }
