@@ -7,7 +7,7 @@ export interface StrengthMatch {
 }
 
 /** Section 8. */
-const WITHIN_DB = 3;
+export const WITHIN_DB = 3;
 
 /**
  * Which hits of two takes are struck alike, by their kick-file peaks: those within 3 dB of both takes' medians.

@@ -1,0 +1,5 @@
+/** Both ends belong to it. */
+export interface Interval {
+  readonly low: number;
+  readonly high: number;
+}
