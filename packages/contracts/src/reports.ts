@@ -81,6 +81,15 @@ export const arrival = z.object({
 });
 export type Arrival = z.infer<typeof arrival>;
 
+/** The two files don't start together: arrival and polarity can't be told until they do. */
+export const lateStart = z.object({
+  /** Positive: the overhead's file runs late, so it is to be played this much earlier. Within 5 ms. */
+  overheadLateMs: z.number(),
+  /** How alike what is struck in both is once they line up. */
+  likeness: z.number().min(0).max(1),
+});
+export type LateStart = z.infer<typeof lateStart>;
+
 export const choice = z.object({
   name: z.enum(choiceNames),
   flipped: z.boolean(),
@@ -155,6 +164,7 @@ export type Room = z.infer<typeof room>;
 
 export const findingTopics = [
   'files',
+  'late-start',
   'kick-level',
   'overhead-level',
   'noise',
@@ -209,6 +219,8 @@ export const reportFigures = z.object({
   kick: trackReport,
   overhead: trackReport,
   hits: z.array(hit),
+  /** Null where the files start together, and in a take measured before it was looked at. */
+  lateStart: lateStart.nullable(),
   arrival,
   agreement,
   /** Null in a take measured before it was. */

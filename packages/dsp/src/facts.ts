@@ -148,7 +148,7 @@ export interface RoomFacts {
 
 export type Swing = 'up' | 'down';
 export type ArrivalReason =
-  'no-kick-hits' | 'too-few-hits' | 'hits-disagree' | 'overhead-silent' | 'methods-disagree';
+  'no-kick-hits' | 'too-few-hits' | 'hits-disagree' | 'overhead-silent' | 'methods-disagree' | 'late-start';
 
 export interface ArrivalFacts {
   /** Positive: the second microphone hears the hit later. */
@@ -164,7 +164,7 @@ export interface ArrivalFacts {
 
 export type Verdict = 'keep' | 'flip' | 'either-way' | 'cannot-tell';
 export type VerdictReason =
-  'no-kick-hits' | 'hits-disagree' | 'arrival-spread' | 'bands-disagree' | 'overhead-silent';
+  'no-kick-hits' | 'hits-disagree' | 'arrival-spread' | 'bands-disagree' | 'overhead-silent' | 'late-start';
 export type ChoiceName = 'as-recorded' | 'flipped' | 'shifted' | 'shifted-flipped' | 'best-shift';
 
 /** How the second microphone is played against the first. */
@@ -201,10 +201,20 @@ export interface AgreementFacts {
   readonly choices: readonly NamedChoiceFacts[];
 }
 
+/** The files of a pair don't start together. */
+export interface LateStartFacts {
+  /** Positive: the overhead's file runs late, so it is to be played this much earlier. Within 5 ms. */
+  readonly overheadLateMs: number;
+  /** How alike what is struck in both is once they line up, 0–1. */
+  readonly likeness: number;
+}
+
 export interface PairFacts {
   /** Indexes into `tracks`; `a` is the kick microphone. */
   readonly a: number;
   readonly b: number;
+  /** Null where the files start together or nothing shows that they don't; missing in facts measured before it was. */
+  readonly lateStart?: LateStartFacts | null;
   readonly arrival: ArrivalFacts;
   readonly agreement: AgreementFacts;
   /** Size of the pair spectrum stored beside the facts; null without kick hits. */

@@ -2,6 +2,8 @@ import { SignalError } from './assert';
 import type { FileNotice, HitFacts, PairFacts, TakeMeasurement, TrackRole } from './facts';
 import { fileNotices } from './measurements/fileNotices';
 import { listHits, loudestHitDbfs, type KickHit } from './measurements/hits/listHits';
+import { notLinedUp } from './measurements/lateStart/notLinedUp';
+import { playedEarlier } from './measurements/lateStart/playedEarlier';
 import { overheadFacts } from './measurements/overheadFacts';
 import { readPair, type PairReading } from './measurements/measurePair';
 import { streamTake } from './measurements/streamTake';
@@ -40,13 +42,21 @@ export async function measureTake({
     overhead: others[0] ?? kick,
     onProgress: (progress) => onStage('levels', progress),
   });
-  const readings = await readPairs({ sources, kick, others, candidates: streamed.kicks, onStage });
+  const { lateStart } = streamed;
+  const lateSamples = Math.round(((lateStart?.overheadLateMs ?? 0) / 1000) * sampleRateHz);
+  const linedUp = sources.map((source, track) =>
+    lateSamples !== 0 && track === others[0] ? playedEarlier(source, lateSamples) : source,
+  );
+  const readings = await readPairs({ sources: linedUp, kick, others, candidates: streamed.kicks, onStage });
   const kickHits = kickHitsOfTake(readings, { kick, others, tracks: tracks.length });
-  const hits = listHits(kickHits, streamed.overheadHits, sampleRateHz);
+  const hits = listHits(kickHits, streamed.overheadHits, { sampleRateHz, lateSamples });
   const fromOverhead =
     others.length > 0 ? await overheadFacts(sources[others[0]], { hits, place: others[0] }) : {};
   onStage('arrival', 1);
-  const pairs = readings.map((reading, index) => pairFacts(reading, hits, { a: kick, b: others[index] }));
+  const pairs = readings.map((reading, index) => {
+    const facts = pairFacts(reading, hits, { a: kick, b: others[index] });
+    return index === 0 && lateStart ? notLinedUp(facts, lateStart) : facts;
+  });
   onStage('adding-up', 1);
   const trackFacts = streamed.levels.map((level, index) => ({
     ...level,
@@ -66,7 +76,7 @@ export async function measureTake({
       ...fromOverhead,
     },
     peaks: streamed.peaks,
-    pairSpectra: readings.map((reading) => reading.spectrum),
+    pairSpectra: readings.map((reading, index) => (pairs[index].spectrum ? reading.spectrum : null)),
   };
 }
 
@@ -126,6 +136,7 @@ function pairFacts(
   const { arrival, spectrum } = reading;
   return {
     ...places,
+    lateStart: null,
     arrival,
     agreement: reading.agreement(hits, places),
     spectrum: spectrum && {

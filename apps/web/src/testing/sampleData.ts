@@ -119,6 +119,7 @@ export const sampleReport = (overrides: Partial<ReportResponse> = {}): ReportRes
     { timeS: 5.1, kind: 'drum', kickPeakDbfs: -30, overheadPeakDbfs: -8.4 },
     { timeS: 6.4, kind: 'kick', kickPeakDbfs: -5, overheadPeakDbfs: -13.4 },
   ],
+  lateStart: null,
   arrival: {
     arrivalMs: 1.62,
     arrivalSamples: 77.8,

@@ -114,6 +114,7 @@ const whyNot: Record<Exclude<VerdictReason, 'hits-disagree'>, string> = {
   'arrival-spread': 'the kick reaches the overhead differently from hit to hit',
   'bands-disagree': 'the lowest octaves contradict each other, so either polarity could win',
   'overhead-silent': 'the overhead is silent at the kicks',
+  'late-start': 'the files don’t start together, and a few milliseconds turn a polarity over',
 };
 
 function cannotTell({ reason, agreeingHits, hitsUsed }: AgreementReport): Said {
@@ -121,6 +122,13 @@ function cannotTell({ reason, agreeingHits, hitsUsed }: AgreementReport): Said {
     reason === null || reason === 'hits-disagree'
       ? `only ${agreeingHits} of ${hitsUsed} kick hits agree, so either polarity could win`
       : whyNot[reason];
+  if (reason === 'late-start') {
+    return {
+      sentence: `Can’t tell: ${because}; export both from the same start.`,
+      why: 'A polarity is told only of two files that line up to a part of a millisecond.',
+      next: 'Line the files up, export both from the same start and add them again.',
+    };
+  }
   return {
     sentence: `Can’t tell: ${because}; record eight hard kicks with nothing else.`,
     why: 'A polarity is told only where at least three in four kick hits agree.',

@@ -50,9 +50,19 @@ const whyNot: Record<ArrivalReason, string> = {
   'hits-disagree': 'it differs from hit to hit',
   'overhead-silent': 'the overhead is silent at the kicks',
   'methods-disagree': 'two ways of measuring it disagree',
+  'late-start': 'the files don’t start together',
 };
 
 function cannotTell(reason: ArrivalReason): Finding {
+  if (reason === 'late-start') {
+    return {
+      topic: 'arrival',
+      status: 'cannot-tell',
+      sentence: `Can’t tell how much later the overhead hears the kick: ${whyNot[reason]}; export both from the same start.`,
+      why: 'Where the start ends and the way of the sound begins can’t be heard.',
+      next: 'Line the files up, export both from the same start and add them again.',
+    };
+  }
   return {
     topic: 'arrival',
     status: 'cannot-tell',

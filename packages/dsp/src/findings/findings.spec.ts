@@ -5,6 +5,7 @@ import {
   clippedTrack,
   flipFigures,
   hotTrack,
+  lateFigures,
   lowTrack,
   reportOf,
   silentTrack,
@@ -18,6 +19,7 @@ import { dropoutFindings } from './dropoutFindings';
 import { findings } from './findings';
 import { flattenedFindings } from './flattenedFindings';
 import { humFindings } from './humFindings';
+import { lateStartFindings } from './lateStartFindings';
 import { levelFinding } from './levelFinding';
 import { nextActions } from './nextActions';
 import { noiseFinding } from './noiseFinding';
@@ -139,6 +141,38 @@ describe('the adding-up finding', () => {
       sentence:
         'Can’t tell: only 4 of 7 kick hits agree, so either polarity could win; record eight hard kicks with nothing else.',
     });
+  });
+});
+
+describe('the finding of a late start', () => {
+  const said = (overheadLateMs: number) =>
+    lateStartFindings(reportOf({ lateStart: { overheadLateMs, likeness: 0.7 } }));
+
+  it('is a fix, and says which way to move the file', () => {
+    expect(said(320.2)).toMatchObject([
+      {
+        topic: 'late-start',
+        status: 'fix',
+        sentence:
+          'The overhead file runs 320 ms late against the kick file; play it 320 ms earlier, then export both from the same start.',
+      },
+    ]);
+    expect(said(-45.4)[0].sentence).toContain('runs 45 ms early against the kick file; play it 45 ms later');
+    expect(lateStartFindings(reportOf())).toEqual([]);
+  });
+
+  it('leaves arrival and polarity untold', () => {
+    const told = findings(reportOf(lateFigures), reader).filter(({ status }) => status === 'cannot-tell');
+    expect(told.map(({ topic, sentence }) => [topic, sentence])).toEqual([
+      [
+        'arrival',
+        'Can’t tell how much later the overhead hears the kick: the files don’t start together; export both from the same start.',
+      ],
+      [
+        'adding-up',
+        'Can’t tell: the files don’t start together, and a few milliseconds turn a polarity over; export both from the same start.',
+      ],
+    ]);
   });
 });
 
@@ -266,6 +300,7 @@ describe('all findings', () => {
 
 const noise: NoiseFloorReason[] = ['too-short', 'no-quiet-second', 'digital-silence'];
 const arrivals: ArrivalReason[] = [
+  'late-start',
   'no-kick-hits',
   'too-few-hits',
   'hits-disagree',
@@ -273,6 +308,7 @@ const arrivals: ArrivalReason[] = [
   'methods-disagree',
 ];
 const verdicts: VerdictReason[] = [
+  'late-start',
   'no-kick-hits',
   'hits-disagree',
   'arrival-spread',
@@ -339,6 +375,9 @@ const everything = (): ReportFigures[] => {
     ...agreements.map((agreement) => reportOf({ agreement })),
     ...arrivalReports.map((arrival) => reportOf({ arrival })),
     reportOf({ findings: filesFindings(notices) }),
+    ...[1499.9, -1499.9].map((overheadLateMs) =>
+      reportOf({ ...lateFigures, lateStart: { overheadLateMs, likeness: 0.6 } }),
+    ),
   ];
 };
 

@@ -7,6 +7,7 @@ import { dropoutFindings } from './dropoutFindings';
 import { flattenedFindings } from './flattenedFindings';
 import { humFindings } from './humFindings';
 import { levelFinding } from './levelFinding';
+import { lateStartFindings } from './lateStartFindings';
 import { noiseFinding } from './noiseFinding';
 import { roomFindings } from './roomFindings';
 import { oversFindings } from './oversFindings';
@@ -19,6 +20,7 @@ import { oversFindings } from './oversFindings';
 export function findings(figures: ReportFigures, reader: Reader): Finding[] {
   return [
     ...figures.findings.filter((finding) => finding.topic === 'files'),
+    ...lateStartFindings(figures),
     levelFinding(figures, 'kick'),
     levelFinding(figures, 'overhead'),
     ...oversFindings(figures),

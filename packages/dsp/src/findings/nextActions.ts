@@ -16,6 +16,7 @@ export function nextActions(figures: ReportFigures, reader: Reader): NextAction[
     );
   const polarity = polarityActions(figures);
   const actions = [
+    ...startActions(figures),
     ...gains(true),
     ...polarity.filter((action) => action.id === 'flip-overhead'),
     ...gains(false),
@@ -23,6 +24,18 @@ export function nextActions(figures: ReportFigures, reader: Reader): NextAction[
     ...polarity.filter((action) => action.id !== 'flip-overhead'),
   ];
   return [...actions.filter((action) => !action.leave), ...actions.filter((action) => action.leave)];
+}
+
+function startActions({ lateStart }: ReportFigures): NextAction[] {
+  if (!lateStart) return [];
+  return [
+    {
+      id: 'export-together',
+      action: 'Record both microphones in one go, and export both from the same start.',
+      detail: 'Then the sheet can tell how they add.',
+      leave: false,
+    },
+  ];
 }
 
 function gainActions(figures: ReportFigures, role: Role, { target }: Reader): NextAction[] {
@@ -55,6 +68,7 @@ function gainActions(figures: ReportFigures, role: Role, { target }: Reader): Ne
 
 function polarityActions({ agreement }: ReportFigures): NextAction[] {
   const status = addingUpStatus(agreement);
+  if (agreement.reason === 'late-start') return [];
   if (status === 'fix') {
     return [
       {

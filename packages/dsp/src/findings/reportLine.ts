@@ -4,7 +4,7 @@ import { addingUpStatus, hasFewHits } from './addingUpFinding';
 import { clippedHits } from './clippedHits';
 import { loudHum } from './humFindings';
 import { noisierMicrophone } from './noiseFinding';
-import { counted, countText, decimalText, halfDbText, wholeDbfsText } from './words';
+import { counted, countText, decimalText, halfDbText, wholeDbfsText, wholeMsText } from './words';
 
 const ROLES = ['kick', 'overhead'] as const;
 const SENTENCES = 2;
@@ -27,6 +27,7 @@ export function reportLine(
     ...opening,
     ...clipped(figures),
     ...missing(figures),
+    ...lateStart(figures),
     ...dropouts(figures),
     ...flip(figures),
     ...hot(figures),
@@ -68,6 +69,14 @@ function missing(figures: ReportFigures): LineSentence[] {
   return figures.agreement.reason === 'no-kick-hits'
     ? [{ action: 'Record eight hard kicks:', reason: 'no kick hit was found in this take.' }]
     : [];
+}
+
+function lateStart({ lateStart }: ReportFigures): LineSentence[] {
+  if (!lateStart) return [];
+  const { overheadLateMs } = lateStart;
+  const [play, because] = overheadLateMs > 0 ? ['earlier', 'late'] : ['later', 'early'];
+  const by = wholeMsText(overheadLateMs);
+  return [{ action: `Play the overhead ${by} ${play}:`, reason: `its file runs that much ${because}.` }];
 }
 
 function dropouts(figures: ReportFigures): LineSentence[] {
@@ -125,7 +134,11 @@ function noise(figures: ReportFigures): LineSentence[] {
 function unsure(figures: ReportFigures): LineSentence[] {
   const { agreement } = figures;
   const status = addingUpStatus(agreement);
-  if (agreement.reason === 'no-kick-hits' || ROLES.some((role) => figures[role].samplePeakDbfs === null))
+  if (
+    figures.lateStart ||
+    agreement.reason === 'no-kick-hits' ||
+    ROLES.some((role) => figures[role].samplePeakDbfs === null)
+  )
     return [];
   if (status === 'cannot-tell') {
     return [{ action: 'Record eight hard kicks:', reason: 'this take can’t tell which polarity adds.' }];

@@ -4,6 +4,7 @@ import {
   clippedTrack,
   flipFigures,
   hotTrack,
+  lateFigures,
   lowTrack,
   reportOf,
   silentTrack,
@@ -42,6 +43,12 @@ describe('the line', () => {
   it('says clipped before anything else', () => {
     expect(line(reportOf({ agreement: flipFigures, kick: clippedTrack }))).toMatch(
       /^Turn the kick down at least 9 dB: two hits are flattened, and that can’t be repaired\. Flip/,
+    );
+  });
+
+  it('says by how much a file is to be moved', () => {
+    expect(line(reportOf(lateFigures))).toBe(
+      'Play the overhead 320 ms earlier: its file runs that much late.',
     );
   });
 
@@ -85,6 +92,11 @@ describe('before the next take', () => {
     expect(second.id).toBe('flip-overhead');
   });
 
+  it('asks for files that start together instead of more kicks', () => {
+    const list = actions(reportOf(lateFigures)).filter((action) => !action.leave);
+    expect(list.map((action) => action.id)).toEqual(['export-together']);
+  });
+
   it('warns where it can hurt', () => {
     expect(actions(reportOf({ kick: lowTrack }))[0].detail).toContain('Lower the headphones first.');
     expect(actions(reportOf({ agreement: flipFigures }))[0].detail).toContain('Mute the monitors first.');
@@ -126,6 +138,7 @@ describe('a take in the table', () => {
     ['watch', 'Overhead looks squashed. Switch off any limiter.', reportOf({ overhead: squashed })],
     ['watch', 'Overhead hums: −56 dBFS. Try another cable.', reportOf({ overhead: humming })],
     ['watch', 'Noisy overhead: −52 dBFS. Look for the source.', noisy],
+    ['fix', 'Overhead file 320 ms late. Line the files up.', reportOf(lateFigures)],
     ['fix', 'Flip the overhead. Look for the noise.', { ...noisy, agreement: flipFigures }],
     ['cannot-tell', 'No kick hit found. Play eight hard ones.', noHits],
     ['watch', 'Polarity unsure. Compare by ear.', small],

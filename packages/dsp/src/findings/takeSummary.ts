@@ -3,7 +3,7 @@ import type { ReportFigures, TakeSummary, TrackReport } from '../report/reportTy
 import { addingUpStatus } from './addingUpFinding';
 import { loudHum } from './humFindings';
 import { noisierMicrophone } from './noiseFinding';
-import { capitalised, countText, halfDbText, wholeDbfsText } from './words';
+import { capitalised, countText, halfDbText, wholeDbfsText, wholeMsText } from './words';
 
 const ROLES = ['kick', 'overhead'] as const;
 
@@ -12,6 +12,7 @@ export function takeSummary(figures: ReportFigures): TakeSummary {
   return (
     clipped(figures) ??
     missing(figures) ??
+    lateStart(figures) ??
     droppedOut(figures) ??
     flip(figures) ??
     gain(figures) ??
@@ -38,6 +39,13 @@ function missing(figures: ReportFigures): TakeSummary | null {
   if (silent) return { status: 'cannot-tell', strong: `The ${silent} is silent.`, rest: 'Check its cable.' };
   if (figures.agreement.reason !== 'no-kick-hits') return null;
   return { status: 'cannot-tell', strong: 'No kick hit found.', rest: 'Play eight hard ones.' };
+}
+
+function lateStart({ lateStart }: ReportFigures): TakeSummary | null {
+  if (!lateStart) return null;
+  const { overheadLateMs } = lateStart;
+  const strong = `Overhead file ${wholeMsText(overheadLateMs)} ${overheadLateMs > 0 ? 'late' : 'early'}.`;
+  return { status: 'fix', strong, rest: 'Line the files up.' };
 }
 
 function droppedOut(figures: ReportFigures): TakeSummary | null {

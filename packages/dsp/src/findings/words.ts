@@ -22,6 +22,11 @@ export function wholeDbText(valueDb: number): string {
   return Math.abs(valueDb).toFixed(0);
 }
 
+/** A time without a sign, in whole milliseconds: the words say earlier or later. */
+export function wholeMsText(ms: number): string {
+  return `${Math.abs(ms).toFixed(0)} ms`;
+}
+
 const NUMBERS = 'no one two three four five six seven eight nine ten eleven twelve'.split(' ');
 
 /** Small counts in words, larger ones in figures. */

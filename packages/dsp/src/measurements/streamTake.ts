@@ -1,4 +1,4 @@
-import type { HumFacts } from '../facts';
+import type { HumFacts, LateStartFacts } from '../facts';
 import type { TrackSource } from '../trackSource';
 import { createKickCandidates } from './hits/kickCandidates';
 import { createOverheadHits, type OverheadHit } from './hits/overheadHits';
@@ -6,6 +6,7 @@ import { selectKicks } from './hits/selectKicks';
 import type { KickCandidate } from './hits/kickCandidates';
 import { hum } from './level/hum';
 import { createTrackLevel, type TrackLevel, type TrackLevelFacts } from './level/trackLevel';
+import { createLateStart } from './lateStart/lateStart';
 import { lockstep } from './lockstep';
 import { createPeaks, type TrackPeaks } from './peaks/peaks';
 
@@ -16,6 +17,8 @@ export interface StreamedTake {
   readonly overheadHits: readonly OverheadHit[];
   /** True where two tracks hold exactly the same samples, and not silence. */
   readonly sameTwice: boolean;
+  /** Of the overhead against the kick microphone. */
+  readonly lateStart: LateStartFacts | null;
 }
 
 export interface StreamTakeOptions {
@@ -32,6 +35,7 @@ export async function streamTake(options: StreamTakeOptions): Promise<StreamedTa
   const { sampleRateHz } = sources[kick];
   const levels = sources.map(({ quantisationStep }) => createTrackLevel({ sampleRateHz, quantisationStep }));
   const candidates = createKickCandidates(sampleRateHz);
+  const starts = createLateStart(sampleRateHz);
   const struck = createOverheadHits({ sampleRateHz, trackCount: sources.length, overhead });
   const frames = Math.min(...sources.map((source) => source.frames));
   const outlines = sources.map(() => createPeaks({ frames }));
@@ -40,20 +44,22 @@ export async function streamTake(options: StreamTakeOptions): Promise<StreamedTa
   for await (const pieces of lockstep(sources)) {
     pieces.forEach((piece, track) => levels[track].push(piece));
     pieces.forEach((piece, track) => outlines[track].push(piece));
-    candidates.push(pieces[kick], pieces[overhead]);
+    starts.push(candidates.push(pieces[kick], pieces[overhead]));
     struck.push(pieces);
     same &&= alike(pieces[kick], pieces[overhead]);
     read += pieces[kick].length;
     onProgress(read / frames);
   }
   const results = levels.map((level) => level.result());
+  const kicks = selectKicks(candidates.result(), sampleRateHz);
   const hums: (HumFacts | null)[] = [];
   for (const [track, source] of sources.entries()) hums.push(await humOf(source, levels[track]));
   return {
     levels: results.map((result, track) => ({ ...result, hum: hums[track] })),
     peaks: outlines.map((outline) => outline.result()),
-    kicks: selectKicks(candidates.result(), sampleRateHz),
+    kicks,
     overheadHits: struck.result(),
+    lateStart: starts.result(kicks.length),
     sameTwice: same && results[kick].samplePeakDbfs !== null,
   };
 }

@@ -6,6 +6,7 @@ import {
   clippedTrack,
   flipFigures,
   hotTrack,
+  lateFigures,
   lowTrack,
   reportOf,
   silentTrack,
@@ -406,6 +407,27 @@ const cases: readonly Case[] = [
     noSilence,
     'cannot-tell No quiet second was found: leave three seconds silent before playing.',
   ],
+  [
+    'export-together',
+    'together',
+    reportOf(lateFigures),
+    reportOf(),
+    'good Both files start together: they were 320 ms apart.',
+  ],
+  [
+    'export-together',
+    'still apart',
+    reportOf(lateFigures),
+    reportOf({ ...lateFigures, lateStart: { overheadLateMs: -45.4, likeness: 0.7 } }),
+    'fix The files still start apart: 45 ms; they were 320 ms apart.',
+  ],
+  [
+    'export-together',
+    'no kicks to see it by',
+    reportOf(lateFigures),
+    reportOf({ ...noKicks, arrival: { ...lateFigures.arrival, reason: 'no-kick-hits' } }),
+    'cannot-tell Can’t tell if the files start together: record eight hard kicks.',
+  ],
 ];
 
 describe('what became of an action', () => {
@@ -441,7 +463,15 @@ describe('what became of an action', () => {
   });
 
   it('has a rule for whatever the take before asked for', () => {
-    for (const before of [good, cancels, disagree, small, noSilence, reportOf({ kick: lowTrack })]) {
+    for (const before of [
+      good,
+      cancels,
+      disagree,
+      small,
+      reportOf(lateFigures),
+      noSilence,
+      reportOf({ kick: lowTrack }),
+    ]) {
       const doneActions = nextActions(before, reader).map((action) => action.id);
       expect(outcomes({ before, after: good, doneActions, reader })).toHaveLength(doneActions.length);
     }

@@ -2,10 +2,12 @@ import { flipOutcome } from './outcomes/flipOutcome';
 import { gainOutcome, leftGainOutcome } from './outcomes/gainOutcome';
 import { noiseOutcome, silenceOutcome } from './outcomes/noiseOutcome';
 import { comparedOutcome, leftPolarityOutcome, recordKicksOutcome } from './outcomes/polarityOutcome';
+import { startOutcome } from './outcomes/startOutcome';
 import type { OutcomeRule, TakeAndNext } from './outcomes/outcomeRule';
 import { actionIds, type ActionId, type Outcome } from './reportTypes';
 
 const rules: Readonly<Record<ActionId, OutcomeRule>> = {
+  'export-together': startOutcome,
   'kick-gain': gainOutcome,
   'overhead-gain': gainOutcome,
   'flip-overhead': flipOutcome,

@@ -38,6 +38,7 @@ export function reportFigures(
       kickPeakDbfs: peaksDbfs[places.kick] ?? null,
       overheadPeakDbfs: peaksDbfs[places.overhead] ?? null,
     })),
+    lateStart: pair.lateStart ?? null,
     arrival: arrivalReport(pair, temperatureC),
     agreement: agreementReport(pair),
     balance: balanceReport(facts.balance),

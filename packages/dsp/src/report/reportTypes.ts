@@ -5,6 +5,7 @@ import type {
   ClipRun,
   HitKind,
   HumFacts,
+  LateStartFacts,
   NoiseFloorReason,
   RoomReason,
   SpreadFigure,
@@ -35,6 +36,7 @@ export type Level = 'clipped' | 'hot' | 'on-target' | 'low';
 export type FindingStatus = 'good' | 'watch' | 'fix' | 'cannot-tell';
 export type FindingTopic =
   | 'files'
+  | 'late-start'
   | 'kick-level'
   | 'overhead-level'
   | 'noise'
@@ -146,6 +148,8 @@ export interface ReportFigures {
   kick: TrackReport;
   overhead: TrackReport;
   hits: { timeS: number; kind: HitKind; kickPeakDbfs: number | null; overheadPeakDbfs: number | null }[];
+  /** Null where the files start together, and in a take measured before it was looked at. */
+  lateStart: LateStartFacts | null;
   arrival: ArrivalReport;
   agreement: AgreementReport;
   /** Null in a take measured before it was. */
@@ -161,6 +165,7 @@ export interface LineSentence {
 
 /** Every tick box there is, in order of what matters while nothing clips; what to leave alone comes last. */
 export const actionIds = [
+  'export-together',
   'flip-overhead',
   'kick-gain',
   'overhead-gain',

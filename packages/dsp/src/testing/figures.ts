@@ -69,6 +69,7 @@ export function reportOf(change: Partial<ReportFigures> = {}): ReportFigures {
       kickPeakDbfs: -9,
       overheadPeakDbfs: -15,
     })),
+    lateStart: null,
     arrival: {
       arrivalMs: 1.62,
       arrivalSamples: 78,
@@ -109,6 +110,31 @@ export const silentTrack = trackFigures({
   noiseFloorDbfs: null,
   noiseFloorReason: 'digital-silence',
 });
+/** What is left to tell of the good take where the overhead's file runs 320 ms late. */
+export const lateFigures: Pick<ReportFigures, 'lateStart' | 'arrival' | 'agreement'> = {
+  lateStart: { overheadLateMs: 320.2, likeness: 0.7 },
+  arrival: {
+    arrivalMs: null,
+    arrivalSamples: null,
+    arrivalIqrMs: null,
+    hitsUsed: 8,
+    pathDifferenceM: null,
+    confidence: 0,
+    firstSwing: { kick: 'up', overhead: 'down' },
+    reason: 'late-start',
+  },
+  agreement: agreementFigures({
+    lowCorrelation: null,
+    flipGainRecordedDb: null,
+    flipGainMatchedDb: null,
+    agreeingHits: 0,
+    verdict: 'cannot-tell',
+    sure: false,
+    reason: 'late-start',
+    bands: [],
+    lowCut: null,
+  }),
+};
 export const flipFigures = agreementFigures({
   verdict: 'flip',
   flipGainMatchedDb: 1.4,

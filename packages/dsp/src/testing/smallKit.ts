@@ -10,6 +10,8 @@ export interface SmallKitOptions {
   readonly overheadGain?: number;
   /** A hat on the same instant as each kick and between, in the overhead, with bleed into the kick microphone. */
   readonly hats?: boolean;
+  /** How far a kick may come early or late against the even beat. */
+  readonly swingS?: number;
   /** Time constant of the drum's ringing; a damped one is shorter. */
   readonly bodyS?: number;
   readonly noise?: number;
@@ -35,13 +37,15 @@ const HAT_S = 0.03;
 /** A kick written as a formula, so that the overhead can hear exactly the same later by any part of a sample. */
 export function smallKit(options: SmallKitOptions = {}): SmallKit {
   const { sampleRateHz = 48000, kicks = 8, everyS = 0.5, delayMs = 0, overheadGain = 0.4 } = options;
-  const { hats = false, noise = 1e-4, seed = 1, bodyS = BODY_S } = options;
+  const { swingS = 0, hats = false, noise = 1e-4, seed = 1, bodyS = BODY_S } = options;
   const frames = Math.round(sampleRateHz * (kicks * everyS + 0.5));
   const random = randomNumbers(seed);
   const wave = kickWave(random, bodyS);
   const kick = Float32Array.from({ length: frames }, () => noise * random());
   const overhead = Float32Array.from({ length: frames }, () => noise * random());
-  const kickAt = Array.from({ length: kicks }, (_, i) => Math.round(sampleRateHz * (0.25 + i * everyS)));
+  const kickAt = Array.from({ length: kicks }, (_, i) =>
+    Math.round(sampleRateHz * (0.25 + i * everyS + (swingS > 0 ? swingS * random() : 0))),
+  );
   for (const at of kickAt) {
     const strength = 0.5 + 0.1 * random();
     addWave(kick, { at, sampleRateHz, value: (s) => strength * wave(s) });

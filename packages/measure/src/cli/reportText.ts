@@ -1,4 +1,4 @@
-import type { Finding, Hit, LineSentence, ReportFigures, TrackReport } from '@thudline/contracts';
+import type { Finding, Hit, LateStart, LineSentence, ReportFigures, TrackReport } from '@thudline/contracts';
 import type { MeasuredFile } from '../measureFiles';
 import type { TrackChoice } from '../trackChoice';
 
@@ -28,6 +28,7 @@ export function reportText(options: ReportTextOptions): string {
     line.map(({ action, reason }) => `${action} ${reason}`),
     figures.findings.flatMap(findingLines),
     levelLines(figures),
+    ...(figures.lateStart ? [lateStartLines(figures.lateStart)] : []),
     arrivalLines(figures),
     agreementLines(figures),
     hitLines(figures.hits),
@@ -80,6 +81,14 @@ function levelLines({ kick, overhead }: ReportFigures): string[] {
         : unit(track.noiseFloorDbfs, 'dBFS'),
     ),
     row('  hum', ({ hum }) => (hum === null ? '–' : `${unit(hum.levelDbfs, 'dBFS')} (${hum.mainsHz} Hz)`)),
+  ];
+}
+
+function lateStartLines({ overheadLateMs, likeness }: LateStart): string[] {
+  return [
+    'Start of the files',
+    `  overhead file runs late by  ${unit(overheadLateMs, 'ms')}`,
+    `  likeness once lined up      ${likeness.toFixed(2)} of 1`,
   ];
 }
 

@@ -12,6 +12,7 @@ export interface BigAction {
 function topicOf(actionId: string): Finding['topic'] {
   if (actionId === 'kick-gain') return 'kick-level';
   if (actionId === 'overhead-gain') return 'overhead-level';
+  if (actionId === 'export-together') return 'late-start';
   if (actionId === 'look-for-noise' || actionId === 'leave-silence') return 'noise';
   return 'adding-up';
 }

@@ -19,9 +19,19 @@ export interface KickCandidates {
   readonly floorDb: number;
 }
 
+/** The 30–150 Hz power of hops of 2 ms, the same stretch of both microphones. */
+export interface LowHops {
+  readonly kick: Float64Array;
+  readonly overhead: Float64Array;
+}
+
 export interface KickCandidateFinder {
-  /** The same stretch of both microphones. */
-  push(kick: Float32Array, overhead: Float32Array): void;
+  /**
+   * The same stretch of both microphones.
+   *
+   * @returns the 30–150 Hz power of the hops that this stretch completed
+   */
+  push(kick: Float32Array, overhead: Float32Array): LowHops;
   result(): KickCandidates;
 }
 
@@ -83,6 +93,7 @@ export function createKickCandidates(sampleRateHz: number): KickCandidateFinder 
       const kickHops = meters[0].push(kick);
       const overheadHops = meters[1].push(overhead);
       for (let i = 0; i < kickHops.length; i += 1) next(kickHops[i], overheadHops[i]);
+      return { kick: kickHops, overhead: overheadHops };
     },
     result() {
       close();

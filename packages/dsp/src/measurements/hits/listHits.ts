@@ -19,20 +19,31 @@ const SAME_INSTANT_MS = 40;
  */
 const RINGING_WITHIN_MS = 150;
 
-/** One list of what was struck, in order of time; a kick with something else on the same instant is told as a kick. */
+export interface ListHitsOptions {
+  readonly sampleRateHz: number;
+  /** How much later the overhead's file runs than the kick's; 0 where they start together. */
+  readonly lateSamples?: number;
+}
+
+/**
+ * One list of what was struck, in order of time; a kick with something else on the same instant is told as a kick.
+ *
+ * Kicks are told at their place in the kick's file, what the overhead alone hears at its place in the overhead's.
+ */
 export function listHits(
   kicks: readonly KickHit[],
   others: readonly OverheadHit[],
-  sampleRateHz: number,
+  { sampleRateHz, lateSamples = 0 }: ListHitsOptions,
 ): HitFacts[] {
   const near = (SAME_INSTANT_MS / 1000) * sampleRateHz;
   const ringing = (RINGING_WITHIN_MS / 1000) * sampleRateHz;
   let next = 0;
   const alone = others.filter((hit) => {
-    while (next < kicks.length && kicks[next].onsetSample < hit.atSample - near) next += 1;
-    if (next < kicks.length && kicks[next].onsetSample <= hit.atSample + near) return false;
+    const at = hit.atSample - lateSamples;
+    while (next < kicks.length && kicks[next].onsetSample < at - near) next += 1;
+    if (next < kicks.length && kicks[next].onsetSample <= at + near) return false;
     const before = next > 0 ? kicks[next - 1] : null;
-    return !before || hit.atSample - before.onsetSample > ringing || !isRinging(hit, before);
+    return !before || at - before.onsetSample > ringing || !isRinging(hit, before);
   });
   const told = (sample: number, kind: HitFacts['kind'], peaks: readonly number[]): HitFacts => ({
     timeS: sample / sampleRateHz,

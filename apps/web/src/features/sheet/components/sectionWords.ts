@@ -57,6 +57,6 @@ export const levelTopics = [
   'hum',
   'dc-offset',
 ] as const;
-export const addingUpTopics = ['adding-up', 'arrival'] as const;
+export const addingUpTopics = ['late-start', 'adding-up', 'arrival'] as const;
 export const balanceTopics = ['balance'] as const;
 export const roomTopics = ['room'] as const;
