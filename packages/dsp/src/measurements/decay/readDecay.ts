@@ -24,8 +24,8 @@ const START_SEARCH_S = { from: -0.02, to: 0.03 };
 const WIRES_BAND = { lowHz: 1500, highHz: 6000 };
 const BODY_BAND = { lowHz: 100, highHz: 1000 };
 const WIRES_S = { from: 0.02, to: 0.12 };
-/** Snares of the synthetic kit lie above −8 dB; toms by what is known of them far below; our choice. */
-const WIRES_OVER_BODY_DB = -18;
+/** Of real drums recorded close, 64 of 69 toms lie below and 58 of 59 snares with wires above (decisions/0012). */
+const WIRES_OVER_BODY_DB = -14;
 
 /** What a hit's brightness is taken from, and over how long; the body's octaves are those that tell the kind of a hit. */
 const BRIGHT_BAND = { lowHz: 2000, highHz: 10000 };

@@ -26,8 +26,7 @@ const RINGING_BELOW_DB = 6;
  */
 export function selectKicks(found: KickCandidates, sampleRateHz: number): KickCandidate[] {
   const audible = found.candidates.filter((candidate) => candidate.kickDb >= found.floorDb + OVER_FLOOR_DB);
-  const loudest = loudestQuarter(audible);
-  const referenceDb = median(loudest.map((candidate) => candidate.kickDb));
+  const referenceDb = reference(audible);
   if (referenceDb === null) return [];
   const loud = audible.filter((candidate) => candidate.kickDb >= referenceDb - SOFT_BELOW_REFERENCE_DB);
   const loudBalanceDb = median(loud.map(balanceDb)) ?? 0;
@@ -46,6 +45,24 @@ export function selectKicks(found: KickCandidates, sampleRateHz: number): KickCa
 
 function balanceDb(candidate: KickCandidate): number {
   return candidate.kickDb - candidate.overheadDb;
+}
+
+/**
+ * What few kicks among many rises are judged by: three or more that stand so far above the loudest quarter that its median
+ * would be no hit beside them, and that the kick microphone hears better than the rest. One snare in a room can make three
+ * rises of bleed, so three kicks among seven snares were left out, and the snares told as kicks.
+ */
+const FEWEST_ABOVE = 3;
+
+function reference(audible: readonly KickCandidate[]): number | null {
+  const loudest = loudestQuarter(audible);
+  const ofQuarterDb = median(loudest.map(({ kickDb }) => kickDb));
+  if (ofQuarterDb === null) return null;
+  const far = loudest.filter(({ kickDb }) => kickDb > ofQuarterDb + BELOW_REFERENCE_DB);
+  const rest = loudest.filter(({ kickDb }) => kickDb <= ofQuarterDb + BELOW_REFERENCE_DB);
+  const byBalance = (median(far.map(balanceDb)) ?? 0) - (median(rest.map(balanceDb)) ?? 0);
+  const areKicks = far.length >= FEWEST_ABOVE && byBalance > BALANCE_WITHIN_DB;
+  return areKicks ? median(far.map(({ kickDb }) => kickDb)) : ofQuarterDb;
 }
 
 function loudestQuarter(candidates: readonly KickCandidate[]): KickCandidate[] {
