@@ -16,6 +16,7 @@ import { SampleSheetModule } from './sample-sheet/sample-sheet.module';
 import { SharesModule } from './shares/shares.module';
 import { SoundModule } from './sound/sound.module';
 import { TakesModule } from './takes/takes.module';
+import { TryOutsModule } from './tryouts/try-outs.module';
 import { UsersModule } from './users/users.module';
 
 @Module({})
@@ -35,6 +36,7 @@ export class AppModule {
         ReportsModule,
         SoundModule,
         SharesModule,
+        TryOutsModule,
         SampleSheetModule,
         EventsModule,
         HealthModule,

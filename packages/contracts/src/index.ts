@@ -6,3 +6,4 @@ export * from './paths';
 export * from './reports';
 export * from './shares';
 export * from './takes';
+export * from './tryouts';

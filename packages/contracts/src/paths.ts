@@ -29,6 +29,10 @@ export const paths = {
   excerpt: (takeId: string) => `/api/takes/${takeId}/excerpt`,
   listen: (takeId: string) => `/api/takes/${takeId}/listen.wav`,
   takeFile: (takeId: string, fileId: string) => `/api/takes/${takeId}/files/${fileId}`,
+  tryOuts: '/api/tryouts',
+  tryOut: (tryOutId: string) => `/api/tryouts/${tryOutId}`,
+  tryOutPlace: (tryOutId: string, placeId: string) => `/api/tryouts/${tryOutId}/places/${placeId}`,
+  tryOutRanking: (tryOutId: string) => `/api/tryouts/${tryOutId}/ranking`,
   health: '/api/health',
   docs: '/api/docs',
 } as const;

@@ -10,6 +10,8 @@ import { TakeTrack } from '../takes/entities/take-track.entity';
 import { Take } from '../takes/entities/take.entity';
 import { Throttle } from '../throttle/entities/throttle.entity';
 import { OneTimeToken } from '../tokens/entities/one-time-token.entity';
+import { TryOutPlace } from '../tryouts/entities/try-out-place.entity';
+import { TryOut } from '../tryouts/entities/try-out.entity';
 import { User } from '../users/entities/user.entity';
 
 export const entities = [
@@ -26,4 +28,6 @@ export const entities = [
   Share,
   Setting,
   OneTimeToken,
+  TryOut,
+  TryOutPlace,
 ];

@@ -5,6 +5,7 @@ import { Migration20261201092034_settings } from './20261201092034-settings';
 import { Migration20261201092459_oneTimeTokens } from './20261201092459-one-time-tokens';
 import { Migration20261201093300_tellOfChanges } from './20261201093300-tell-of-changes';
 import { Migration20261201093647_measureAgain } from './20261201093647-measure-again';
+import { Migration20261201120050_tryOuts } from './20261201120050-try-outs';
 
 /** In order; a new migration is added at the end and never changed once merged. */
 export const migrations = [
@@ -15,4 +16,5 @@ export const migrations = [
   { name: '20261201092459-one-time-tokens', class: Migration20261201092459_oneTimeTokens },
   { name: '20261201093300-tell-of-changes', class: Migration20261201093300_tellOfChanges },
   { name: '20261201093647-measure-again', class: Migration20261201093647_measureAgain },
+  { name: '20261201120050-try-outs', class: Migration20261201120050_tryOuts },
 ];
