@@ -11,8 +11,10 @@ import { EventsModule } from './events/events.module';
 import { HealthModule } from './health/health.module';
 import { loggerModule } from './logging/logger.module';
 import { MeasurementsModule } from './measuring/measurements.module';
+import { PhotosModule } from './photos/photos.module';
 import { ReportsModule } from './reports/reports.module';
 import { SampleSheetModule } from './sample-sheet/sample-sheet.module';
+import { SetupsModule } from './setups/setups.module';
 import { SharesModule } from './shares/shares.module';
 import { SoundModule } from './sound/sound.module';
 import { TakesModule } from './takes/takes.module';
@@ -32,6 +34,8 @@ export class AppModule {
         AuthModule,
         UsersModule,
         TakesModule,
+        SetupsModule,
+        PhotosModule,
         MeasurementsModule,
         ReportsModule,
         SoundModule,

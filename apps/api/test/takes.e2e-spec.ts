@@ -9,7 +9,15 @@ import { startTestApp, TestApp } from './support/test-app';
 describe('takes', () => {
   let test: TestApp;
   let juno: Person;
-  const nothing = { items: [], nextCursor: null, total: 0, everyTotal: 0, deletedTotal: 0, tags: [] };
+  const nothing = {
+    items: [],
+    nextCursor: null,
+    total: 0,
+    everyTotal: 0,
+    deletedTotal: 0,
+    tags: [],
+    setups: [],
+  };
 
   beforeAll(async () => {
     test = await startTestApp();

@@ -17,6 +17,7 @@ export const errorCodes = [
   'too-many-requests',
   'wav-refused',
   'rates-differ',
+  'photo-refused',
   'storage-unavailable',
   'not-measured-yet',
   'range-not-satisfiable',

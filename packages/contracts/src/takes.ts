@@ -44,6 +44,8 @@ export const createTakeRequest = z.object({
   recordedAt: recordedAt.optional(),
   /** The player's earlier take that this one follows. */
   followsTakeId: z.uuid().optional(),
+  /** The player's setup it was recorded with. */
+  setupId: z.uuid().optional(),
   /** Which actions of that take were carried out before this one; travels as JSON text. */
   doneActions: actionIds.default([]),
   /** Travels as JSON text. */
@@ -59,13 +61,15 @@ export const createTakeRequest = z.object({
 });
 export type CreateTakeRequest = z.infer<typeof createTakeRequest>;
 
-/** PATCH: absent leaves as it is. */
+/** PATCH: absent leaves as it is, null clears. */
 export const updateTakeRequest = z.object({
   title: title.optional(),
   note: note.optional(),
   /** Ids of the actions under "before the next take" that are ticked. */
   tickedActions: actionIds.optional(),
   tags: tags.optional(),
+  /** One of the player's setups. */
+  setupId: z.uuid().nullable().optional(),
 });
 export type UpdateTakeRequest = z.infer<typeof updateTakeRequest>;
 
@@ -115,6 +119,8 @@ export const takeResponse = z.object({
   follows: z.object({ id: z.uuid(), number: z.int().positive(), title: z.string() }).nullable(),
   /** The take that was added after this one, if any: Big print goes on to it. */
   followedBy: z.object({ id: z.uuid(), number: z.int().positive() }).nullable(),
+  /** What it was recorded with, for its player. */
+  setup: z.object({ id: z.uuid(), name: z.string() }).nullable(),
   /** What the one who asks may do. */
   rights: z.object({ change: z.boolean(), listen: z.boolean(), download: z.boolean() }),
   /** Who recorded it, as others see them. */
@@ -160,6 +166,8 @@ export const listTakesRequest = z.object({
   show: z.enum(takeFilters).default('every'),
   order: z.enum(takeOrders).default('newest'),
   tag: text().max(30).optional(),
+  /** Takes recorded with this setup. */
+  setup: z.uuid().optional(),
   /** Words looked for in title, note and what the sheet says. */
   find: text().max(100).optional(),
   cursor: z.string().max(200).optional(),
@@ -178,6 +186,8 @@ export const listTakesResponse = z.object({
   deletedTotal: z.int().nonnegative(),
   /** Every tag the player uses, in alphabetical order. */
   tags: z.array(z.string()),
+  /** Every setup the player's takes were recorded with, by name. */
+  setups: z.array(z.object({ id: z.uuid(), name: z.string() })),
 });
 export type ListTakesResponse = z.infer<typeof listTakesResponse>;
 

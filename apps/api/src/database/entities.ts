@@ -1,9 +1,11 @@
 import { AuditEvent } from '../audit/entities/audit-event.entity';
 import { Session } from '../auth/entities/session.entity';
 import { Measurement } from '../measuring/entities/measurement.entity';
+import { Photo } from '../photos/entities/photo.entity';
 import { PairSpectrum } from '../reports/entities/pair-spectrum.entity';
 import { Report } from '../reports/entities/report.entity';
 import { Setting } from '../settings/entities/setting.entity';
+import { Setup } from '../setups/entities/setup.entity';
 import { Share } from '../shares/entities/share.entity';
 import { TakeFile } from '../takes/entities/take-file.entity';
 import { TakeTrack } from '../takes/entities/take-track.entity';
@@ -30,4 +32,6 @@ export const entities = [
   OneTimeToken,
   TryOut,
   TryOutPlace,
+  Photo,
+  Setup,
 ];

@@ -17,6 +17,7 @@ const statusOfCode: Record<ErrorCode, number> = {
   'range-not-satisfiable': 416,
   'wav-refused': 422,
   'rates-differ': 422,
+  'photo-refused': 422,
   'too-many-requests': 429,
   internal: 500,
   'storage-unavailable': 503,

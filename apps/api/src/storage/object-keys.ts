@@ -11,5 +11,6 @@ export const objectKeys = {
   /** Each attempt writes its own, so that a slower worker never writes over what a report stands on. */
   peaks: ({ takeId, measurementId, attempt }: MeasuredIn, trackId: string) =>
     `takes/${takeId}/measurements/${measurementId}-${attempt}/${trackId}.peaks`,
+  photo: (photoId: string) => `photos/${photoId}.jpg`,
   takeFile: (takeId: string, fileId: string) => `takes/${takeId}/${fileId}.wav`,
 } as const;

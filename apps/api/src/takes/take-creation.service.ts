@@ -12,6 +12,7 @@ import { User } from '../users/entities/user.entity';
 import { TakeFile } from './entities/take-file.entity';
 import { TakeTrack } from './entities/take-track.entity';
 import { Take } from './entities/take.entity';
+import { findUsedSetup } from './used-setup';
 import { CheckedFile, checkedFiles } from './upload/checked-files';
 import { TakeUpload } from './upload/take-uploads.service';
 
@@ -44,6 +45,7 @@ export class TakeCreationService {
     const earlier = await findUploaded(this.em, viewer, request.uploadKey);
     if (earlier) return { take: earlier, isNew: false };
     await findFollowed(this.em, viewer, request);
+    await findUsedSetup(this.em, viewer.user.id, request.setupId);
     const checked = await checkedFiles(files, request.tracks);
     const takeId = v7();
     const stored = checked.map((file) => stamped(file, takeId));
@@ -106,6 +108,7 @@ export class TakeCreationService {
         tags: request.tags,
         followsTake: await findFollowed(em, viewer, request),
         doneActions: request.doneActions,
+        setup: await findUsedSetup(em, owner.id, request.setupId),
       });
       const fileRows = files.map((file, position) =>
         em.create(TakeFile, { take, position, ...fileColumns(file) }),

@@ -45,10 +45,12 @@ function good(settings: UserSettings): Sql {
   return all(plain(`r.adding_up = 'good'`), not(clipped), ...faults.map(not));
 }
 
-/** @returns which takes fit the sentence "Show … tagged …", and hold the words looked for */
-export function fits({ show, tag, find }: ListTakesRequest, ownerId: string, settings: UserSettings): Sql {
+/** @returns which takes fit the sentence "Show … tagged … with setup …", and hold the words looked for */
+export function fits(request: ListTakesRequest, ownerId: string, settings: UserSettings): Sql {
+  const { show, tag, setup, find } = request;
   const parts = [{ text: 't.owner_id = ?', values: [ownerId] }, shown(show, settings)];
   if (tag !== undefined) parts.push({ text: 't.tags @> array[?]::text[]', values: [tag] });
+  if (setup !== undefined) parts.push({ text: 't.setup_id = ?', values: [setup] });
   for (const word of (find ?? '').split(/\s+/).filter(Boolean)) parts.push(holds(word));
   return all(...parts);
 }

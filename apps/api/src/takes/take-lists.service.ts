@@ -1,6 +1,6 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
-import { ListTakesRequest, ListTakesResponse, UserSettings } from '@thudline/contracts';
+import { ListTakesRequest, ListTakesResponse, NamedSetup, UserSettings } from '@thudline/contracts';
 import { Viewer } from '../access/viewer';
 import { measurementResponseOf } from '../measuring/measurement.mapper';
 import { MeasurementsService } from '../measuring/measurements.service';
@@ -22,6 +22,10 @@ const countTakes = `
 const usedTags = `
   select distinct unnest(tags) as tag from take where owner_id = ? and deleted_at is null order by tag`;
 
+const usedSetups = `
+  select id, name from setup where owner_id = ? and id in
+    (select setup_id from take where owner_id = ? and deleted_at is null) order by lower(name), id`;
+
 /** A player's takes, as the sentence above the list asks for them. */
 @Injectable()
 export class TakeListsService {
@@ -35,11 +39,12 @@ export class TakeListsService {
     const settings = settingsOf(user);
     const query = takeListQuery(request, user.id, settings);
     const owner: unknown[] = [user.id];
-    const [rows, [fitting], [totals], tags] = await Promise.all([
+    const [rows, [fitting], [totals], tags, setups] = await Promise.all([
       this.rows<TakeCursor>(query.ids),
       this.rows<{ total: number }>(query.count),
       this.rows<Totals>({ text: countTakes, values: [restorableSince(), ...owner] }),
       this.rows<{ tag: string }>({ text: usedTags, values: owner }),
+      this.rows<NamedSetup>({ text: usedSetups, values: [...owner, ...owner] }),
     ]);
     const page = rows.slice(0, request.limit);
     const last = page.at(-1);
@@ -53,6 +58,7 @@ export class TakeListsService {
       everyTotal: totals?.everyTotal ?? 0,
       deletedTotal: totals?.deletedTotal ?? 0,
       tags: tags.map(({ tag }) => tag),
+      setups,
     };
   }
 

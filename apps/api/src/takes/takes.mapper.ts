@@ -2,6 +2,7 @@ import { TakeResponse } from '@thudline/contracts';
 import { TakeRights } from '../access/take-rights';
 import { Measurement } from '../measuring/entities/measurement.entity';
 import { measurementResponseOf } from '../measuring/measurement.mapper';
+import { Setup } from '../setups/entities/setup.entity';
 import { TakeFile } from './entities/take-file.entity';
 import { TakeTrack } from './entities/take-track.entity';
 import { Take } from './entities/take.entity';
@@ -15,6 +16,7 @@ export interface WholeTake {
   /** Take before and take after, where they are there. */
   follows: Take | null;
   followedBy: Take | null;
+  setup: Setup | null;
   rights: TakeRights;
 }
 
@@ -38,19 +40,26 @@ export function takeResponseOf(whole: WholeTake): TakeResponse {
   };
 }
 
-type OwnersPart = Pick<TakeResponse, 'tickedActions' | 'tags' | 'follows' | 'followedBy'>;
+type OwnersPart = Pick<TakeResponse, 'tickedActions' | 'tags' | 'follows' | 'followedBy' | 'setup'>;
 
-function ownersPart({ take, follows, followedBy }: WholeTake): OwnersPart {
+function ownersPart({ take, follows, followedBy, setup }: WholeTake): OwnersPart {
   return {
     tickedActions: take.tickedActions,
     tags: take.tags,
     follows: follows && { id: follows.id, number: follows.number, title: follows.title },
     followedBy: followedBy && { id: followedBy.id, number: followedBy.number },
+    setup: setup && { id: setup.id, name: setup.name },
   };
 }
 
 /** What whoever only reads a sheet isn't told: it leads to takes that were not shown to them. */
-const othersPart: OwnersPart = { tickedActions: [], tags: [], follows: null, followedBy: null };
+const othersPart: OwnersPart = {
+  tickedActions: [],
+  tags: [],
+  follows: null,
+  followedBy: null,
+  setup: null,
+};
 
 function takeFileResponseOf(file: TakeFile): TakeResponse['files'][number] {
   const { id, name, bytes, sha256, encoding, sampleRateHz, channels, frames } = file;

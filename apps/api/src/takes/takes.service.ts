@@ -7,10 +7,12 @@ import { Viewer } from '../access/viewer';
 import { AuditService } from '../audit/audit.service';
 import { notFound } from '../errors/app-error';
 import { MeasurementsService } from '../measuring/measurements.service';
+import { Setup } from '../setups/entities/setup.entity';
 import { restorableSince } from './deleted-takes';
 import { TakeFile } from './entities/take-file.entity';
 import { TakeTrack } from './entities/take-track.entity';
 import { Take } from './entities/take.entity';
+import { findUsedSetup } from './used-setup';
 import { takeResponseOf } from './takes.mapper';
 
 @Injectable()
@@ -26,27 +28,39 @@ export class TakesService {
   }
 
   async whole(take: Take, rights: TakeRights): Promise<TakeResponse> {
-    const { followsTake } = take;
-    const [files, tracks, measurement, follows, followedBy] = await Promise.all([
+    const { followsTake, setup } = take;
+    const [files, tracks, measurement, follows, followedBy, usedSetup] = await Promise.all([
       this.em.find(TakeFile, { take }, { orderBy: { position: 'asc' } }),
       this.em.find(TakeTrack, { take }, { orderBy: { position: 'asc' } }),
       this.measurements.getLatest(take.id),
       followsTake && this.em.findOne(Take, { id: followsTake.id, deletedAt: null }),
       this.em.findOne(Take, { followsTake: take.id, deletedAt: null }, { orderBy: { number: 'desc' } }),
+      setup ? this.em.findOne(Setup, { id: setup.id }) : null,
       this.em.populate(take, ['owner']),
     ]);
-    return takeResponseOf({ take, files, tracks, measurement, follows: follows ?? null, followedBy, rights });
+    return takeResponseOf({
+      take,
+      files,
+      tracks,
+      measurement,
+      follows: follows ?? null,
+      followedBy,
+      setup: usedSetup,
+      rights,
+    });
   }
 
   async update(takeId: string, changes: UpdateTakeRequest, rights: TakeRights): Promise<TakeResponse> {
     const { tickedActions, ...others } = changes;
     if (!rights.change && Object.values(others).some((value) => value !== undefined)) throw readOnly();
     const take = await this.em.findOneOrFail(Take, { id: takeId });
-    const { title, note, tags } = others;
+    const { title, note, tags, setupId } = others;
     if (title !== undefined) take.title = title;
     if (note !== undefined) take.note = note;
     if (tickedActions !== undefined) take.tickedActions = tickedActions;
     if (tags !== undefined) take.tags = tags;
+    if (setupId !== undefined)
+      this.em.assign(take, { setup: await findUsedSetup(this.em, take.owner.id, setupId) });
     await this.em.flush();
     return this.whole(take, rights);
   }

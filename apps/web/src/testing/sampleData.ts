@@ -57,6 +57,7 @@ export const sampleTake = (overrides: Partial<TakeResponse> = {}): TakeResponse 
   tags: [],
   follows: null,
   followedBy: null,
+  setup: null,
   rights: { change: true, listen: true, download: true },
   player: 'Juno',
   ...overrides,

@@ -30,6 +30,7 @@ export const sampleList = (
   everyTotal: items.length,
   deletedTotal: 0,
   tags: [],
+  setups: [],
   nextCursor: null,
   ...overrides,
 });

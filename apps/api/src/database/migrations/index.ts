@@ -6,6 +6,7 @@ import { Migration20261201092459_oneTimeTokens } from './20261201092459-one-time
 import { Migration20261201093300_tellOfChanges } from './20261201093300-tell-of-changes';
 import { Migration20261201093647_measureAgain } from './20261201093647-measure-again';
 import { Migration20261201120050_tryOuts } from './20261201120050-try-outs';
+import { Migration20261201122137_setupsAndPhotos } from './20261201122137-setups-and-photos';
 
 /** In order; a new migration is added at the end and never changed once merged. */
 export const migrations = [
@@ -17,4 +18,5 @@ export const migrations = [
   { name: '20261201093300-tell-of-changes', class: Migration20261201093300_tellOfChanges },
   { name: '20261201093647-measure-again', class: Migration20261201093647_measureAgain },
   { name: '20261201120050-try-outs', class: Migration20261201120050_tryOuts },
+  { name: '20261201122137-setups-and-photos', class: Migration20261201122137_setupsAndPhotos },
 ];

@@ -1,5 +1,6 @@
 import { defineEntity, InferEntity, p } from '@mikro-orm/core';
 import { identity } from '../../database/identity';
+import { Setup } from '../../setups/entities/setup.entity';
 import { User } from '../../users/entities/user.entity';
 
 export const Take = defineEntity({
@@ -37,6 +38,8 @@ export const Take = defineEntity({
       .columnType('text[]')
       .default([])
       .onCreate((): string[] => []),
+    /** What it was recorded with. */
+    setup: () => p.manyToOne(Setup).ref().nullable().index().deleteRule('set null'),
     /** The player's earlier take that this one follows. */
     followsTake: () => p.manyToOne(Take).ref().nullable().index().deleteRule('set null'),
     /** Which actions of that take were carried out before this one. */

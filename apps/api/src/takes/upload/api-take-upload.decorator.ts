@@ -25,6 +25,11 @@ export function ApiTakeUpload() {
             format: 'uuid',
             description: 'The player’s earlier take that this one follows.',
           },
+          setupId: {
+            type: 'string',
+            format: 'uuid',
+            description: 'The player’s setup it was recorded with.',
+          },
           doneActions: { type: 'string', description: 'JSON: ids of the actions carried out before it' },
           tags: { type: 'string', description: 'JSON: ["…", …]' },
           tracks: { type: 'string', description: 'JSON: [{ role, fileIndex, channel }, …]' },

@@ -1,0 +1,96 @@
+import type { SetupFields, SetupListItem, SetupResponse, UserSettings } from '@thudline/contracts';
+import { pathDifferenceM } from '@thudline/dsp';
+import { distance, milliseconds, plural } from '../../lib/format';
+import { takeNumbers } from '../takes/chosenTakes';
+import { setupDistances } from './setupGeometry';
+
+type Measured = SetupResponse['measured'];
+type Reader = Pick<UserSettings, 'lengthUnit' | 'temperatureC'>;
+
+/** An arrival holds to about 0.3 ms, a tape on a kit to some centimetres; beyond this, one of them is wrong. */
+const agreeWithinCm = 12;
+
+const cm = (lengthCm: number, { lengthUnit }: Reader) => distance(lengthCm / 100, lengthUnit);
+
+export const measuredCm = (measured: NonNullable<Measured>, { temperatureC }: Reader): number =>
+  100 * pathDifferenceM(measured.arrivalMs, temperatureC);
+
+/** What the headline says after the setup's name. */
+export function agreementWords(
+  fields: Pick<SetupFields, 'kick' | 'overhead'>,
+  measured: Measured,
+  reader: Reader,
+): string {
+  const { differenceCm } = setupDistances(fields);
+  if (differenceCm === null)
+    return measured
+      ? `Take ${measured.number} is measured; the tape isn’t yet.`
+      : 'Write down what you measured with a tape.';
+  if (!measured) return 'No take has been measured with it yet.';
+  const apartCm = Math.abs(differenceCm - measuredCm(measured, reader));
+  if (apartCm > agreeWithinCm) return `The tape and the sound are ${cm(apartCm, reader)} apart.`;
+  const within = reader.lengthUnit === 'foot' ? Math.max(2.54, apartCm) : Math.max(1, apartCm);
+  return `The tape and the sound agree within ${cm(within, reader)}.`;
+}
+
+/** Why the two may differ, where they do. */
+export function apartWords(
+  fields: Pick<SetupFields, 'kick' | 'overhead'>,
+  measured: Measured,
+  reader: Reader,
+): string {
+  const { differenceCm } = setupDistances(fields);
+  if (differenceCm === null || !measured) return '';
+  if (Math.abs(differenceCm - measuredCm(measured, reader)) <= agreeWithinCm) return '';
+  return 'A microphone was moved, a number is off, or your kit is another size than the one drawn here.';
+}
+
+export const measuredWords = (measured: NonNullable<Measured>, reader: Reader): string =>
+  `take ${measured.number} measured ${cm(measuredCm(measured, reader), reader)}, ${milliseconds(measured.arrivalMs)}`;
+
+export function numbersWords(differenceCm: number, reader: Reader): string {
+  const msPerCm = 1 / (100 * pathDifferenceM(1, reader.temperatureC));
+  return `the numbers say ${cm(differenceCm, reader)}, ${milliseconds(differenceCm * msPerCm)}`;
+}
+
+const fieldNames = [
+  ['kick', 'insideCm', 'inside the front hole'],
+  ['kick', 'offCentreCm', 'off the centre'],
+  ['kick', 'heightCm', 'height'],
+  ['overhead', 'aboveSnareCm', 'above the snare'],
+  ['overhead', 'towardKickCm', 'toward the kick'],
+  ['overhead', 'awayFromHatCm', 'away from the hat'],
+] as const;
+
+/** "For the distance, still empty: height, toward the kick." */
+export function missingWords({ kick, overhead }: Pick<SetupFields, 'kick' | 'overhead'>): string {
+  const values: Record<string, number | null | string> = { ...kick, ...overhead };
+  const empty = fieldNames.filter(([, field]) => values[field] === null).map(([, , name]) => name);
+  return empty.length === 0 ? '' : `For the distance, still empty: ${empty.join(', ')}.`;
+}
+
+/** "used by take 17", "used by takes 12, 14 and 3 more". */
+export function usedWords({ takes, takeCount }: Pick<SetupResponse, 'takes' | 'takeCount'>): string {
+  if (takeCount === 0) return 'no take has it yet';
+  if (takeCount <= takes.length) return `used by ${takeNumbers(takes)}`;
+  const shown = takes.slice(0, 3);
+  const numbers = shown.map(({ number }) => number).sort((a, b) => a - b);
+  return `used by takes ${numbers.join(', ')} and ${takeCount - shown.length} more`;
+}
+
+/** "kick 8 cm inside, overhead 90 cm above the snare". */
+export function placesWords({ kick, overhead }: SetupListItem, reader: Reader): string {
+  const parts: string[] = [];
+  if (kick.insideCm !== null)
+    parts.push(
+      kick.insideCm < 0
+        ? `kick ${cm(-kick.insideCm, reader)} in front of the hole`
+        : `kick ${cm(kick.insideCm, reader)} inside`,
+    );
+  if (overhead.aboveSnareCm !== null)
+    parts.push(`overhead ${cm(overhead.aboveSnareCm, reader)} above the snare`);
+  return parts.join(', ') || 'no places written down';
+}
+
+export const takesWords = (takeCount: number): string =>
+  takeCount === 0 ? 'no take yet' : plural(takeCount, 'take');
