@@ -55,6 +55,18 @@ test('new-take-refused', async ({ page }) => {
   await takeShots(page, 'new-take-refused');
 });
 
+test('setups', async ({ page }) => {
+  await page.goto('/setups');
+  await expect(page.getByRole('list', { name: 'Setups' })).toBeVisible();
+  await takeShots(page, 'setups');
+  await page.getByRole('link', { name: 'one overhead, high' }).click();
+  await expect(page.getByRole('img', { name: /^take \d+ measured/ })).toBeVisible();
+  await takeShots(page, 'setup');
+  await page.goto('/setups/new');
+  await expect(page.getByLabel('Name')).toBeVisible();
+  await takeShots(page, 'setup-new');
+});
+
 test('settings', async ({ page }) => {
   await page.goto('/settings');
   await expect(page.getByRole('heading', { level: 1 })).toBeVisible();

@@ -5,8 +5,9 @@ import { Swell } from '../components/Swell';
 import { AccountCorner } from '../features/auth/components/AccountCorner';
 import { useMe } from '../features/auth/hooks/useMe';
 
-function NavLink({ to, children }: { to: string; children: string }) {
-  const here = useLocation().pathname.startsWith(to);
+function NavLink({ to, also, children }: { to: string; also?: string; children: string }) {
+  const { pathname } = useLocation();
+  const here = pathname.startsWith(to) || (also !== undefined && pathname.startsWith(also));
   return (
     <chakra.span position="relative" fontWeight={600}>
       <Link to={to} aria-current={here ? 'page' : undefined} style={{ textDecoration: 'none' }}>
@@ -21,7 +22,16 @@ function NavLink({ to, children }: { to: string; children: string }) {
 export function Layout() {
   const { me } = useMe();
   return (
-    <PageFrame places={me && <NavLink to="/takes">Takes</NavLink>} corner={<AccountCorner />}>
+    <PageFrame
+      places={
+        me && (
+          <NavLink to="/takes" also="/setups">
+            Takes
+          </NavLink>
+        )
+      }
+      corner={<AccountCorner />}
+    >
       <Outlet />
     </PageFrame>
   );

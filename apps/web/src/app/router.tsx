@@ -51,6 +51,18 @@ export const router = createBrowserRouter([
             lazy: async () => ({ Component: (await import('../pages/TakesPage')).TakesPage }),
           },
           {
+            path: '/setups',
+            lazy: async () => ({ Component: (await import('../pages/SetupsPage')).SetupsPage }),
+          },
+          {
+            path: '/setups/new',
+            lazy: async () => ({ Component: (await import('../pages/NewSetupPage')).NewSetupPage }),
+          },
+          {
+            path: '/setups/:setupId',
+            lazy: async () => ({ Component: (await import('../pages/SetupPage')).SetupPage }),
+          },
+          {
             path: '/settings',
             lazy: async () => ({ Component: (await import('../pages/SettingsPage')).SettingsPage }),
           },

@@ -8,6 +8,7 @@ import { fakeUploads } from '../testing/fakeXhr';
 import { renderPage } from '../testing/renderPage';
 import { measurement, sampleReport, sampleTake, takeId } from '../testing/sampleData';
 import { sampleList, sampleListItem } from '../testing/sampleList';
+import { sampleSetupItem } from '../testing/sampleSetups';
 import { toneFile } from '../testing/sampleWav';
 import { NewTakePage } from './NewTakePage';
 
@@ -56,6 +57,32 @@ const fromJson = (fields: Record<string, FormDataEntryValue>) =>
   Object.fromEntries(
     ['tracks', 'doneActions', 'tags'].map((name) => [name, JSON.parse(fields[name] as string) as unknown]),
   );
+
+describe('the setup of a new take', () => {
+  const setups = { [`GET ${paths.setups}`]: json({ items: [sampleSetupItem()] }) };
+  afterEach(() => localStorage.clear());
+
+  it('is sent along, and the next take begins with it', async () => {
+    const page = open(setups);
+    await pick(page.container, kick(), overhead());
+    await headlineIs(/^Both files are here/);
+    await userEvent.selectOptions(await screen.findByLabelText('Setup'), 'one overhead, high');
+    await measure();
+    await waitFor(() => expect(page.uploads).toHaveLength(1));
+    expect(page.uploads[0].form?.get('setupId')).toBe(sampleSetupItem().id);
+    page.unmount();
+    const next = open(setups);
+    await pick(next.container, kick(), overhead());
+    expect(await screen.findByLabelText('Setup')).toHaveDisplayValue('one overhead, high');
+  });
+
+  it('is not asked for before there is one', async () => {
+    const page = open({ [`GET ${paths.setups}`]: json({ items: [] }) });
+    await pick(page.container, kick(), overhead());
+    await headlineIs(/^Both files are here/);
+    expect(screen.queryByLabelText('Setup')).not.toBeInTheDocument();
+  });
+});
 
 describe('the page that adds a take', () => {
   it('shows someone new the check take, with the caution for their ears', async () => {

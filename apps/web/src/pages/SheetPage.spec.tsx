@@ -15,6 +15,7 @@ import {
   sampleTake,
   takeId,
 } from '../testing/sampleData';
+import { sampleSetupItem } from '../testing/sampleSetups';
 import { system } from '../theme/system';
 import { SheetPage } from './SheetPage';
 
@@ -54,6 +55,30 @@ describe('the sheet', () => {
   it('waits without jumping while it is loading', () => {
     open({ [`GET ${paths.take(takeId)}`]: () => new Promise(() => undefined) });
     expect(screen.getByRole('status', { name: 'Loading' })).toBeInTheDocument();
+  });
+
+  it('says what the take was recorded with, which can be changed', async () => {
+    const [low, high] = [
+      sampleSetupItem({ id: takeId, name: 'low' }),
+      sampleSetupItem({ name: 'one overhead, high' }),
+    ];
+    let take = sampleTake({ setup: { id: low.id, name: low.name } });
+    const { requests } = open({
+      [`GET ${paths.take(takeId)}`]: () => json(take)(),
+      [`GET ${paths.setups}`]: json({ items: [high, low] }),
+      [`PATCH ${paths.take(takeId)}`]: () => {
+        take = sampleTake({ setup: { id: high.id, name: high.name } });
+        return json(take)();
+      },
+    });
+    expect(await screen.findByRole('link', { name: 'low' })).toHaveAttribute('href', `/setups/${low.id}`);
+    await userEvent.click(screen.getByRole('button', { name: 'change' }));
+    await userEvent.selectOptions(
+      await screen.findByRole('combobox', { name: 'Recorded with' }),
+      'one overhead, high',
+    );
+    expect(await screen.findByRole('link', { name: 'one overhead, high' })).toBeInTheDocument();
+    expect(requests.find(({ method }) => method === 'PATCH')?.body).toEqual({ setupId: high.id });
   });
 
   it('opens with the line, then what to do before the next take', async () => {

@@ -6,6 +6,7 @@ import { PageMessage } from '../components/PageMessage';
 import { useMe } from '../features/auth/hooks/useMe';
 import { BigPrintButton } from '../features/big-print/components/BigPrintButton';
 import { BigPrintLinks } from '../features/big-print/components/BigPrintLinks';
+import { SetupOfTake } from '../features/setups/components/SetupOfTake';
 import { SendSheet } from '../features/shares/components/SendSheet';
 import { MeasuredSheet } from '../features/sheet/components/MeasuredSheet';
 import { MeasuringSheet } from '../features/sheet/components/MeasuringSheet';
@@ -32,6 +33,7 @@ export function SheetPage() {
       marginHead={
         <>
           {take.rights.change && <SendSheet takeId={take.id} />}
+          <SetupOfTake take={take} />
           <BigPrintLinks takeId={take.id} mayAddPhone={take.rights.change} />
         </>
       }

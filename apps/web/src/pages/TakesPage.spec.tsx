@@ -1,4 +1,4 @@
-import { listTakesResponse, paths, type ListTakesResponse } from '@thudline/contracts';
+import { listTakesResponse, paths, type ListTakesResponse, type TakeResponse } from '@thudline/contracts';
 import { act, fireEvent, screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { takeHandedOverFiles } from '../features/upload/droppedFiles';
@@ -6,6 +6,7 @@ import { fakeServer, json, refusal, type FakeRoutes } from '../testing/fakeServe
 import { renderPage } from '../testing/renderPage';
 import { measurement, sampleMe, sampleTake } from '../testing/sampleData';
 import { listId, sampleList, sampleListItem } from '../testing/sampleList';
+import { sampleSetupItem } from '../testing/sampleSetups';
 import { TakesPage } from './TakesPage';
 
 const list = (page: ListTakesResponse) => json(listTakesResponse.parse(page));
@@ -393,7 +394,49 @@ describe('tags', () => {
   });
 });
 
+describe('the setup of chosen takes', () => {
+  it('is said for all of them, and taken back', async () => {
+    const before: Record<number, TakeResponse['setup']> = { 13: null, 14: { id: listId(50), name: 'low' } };
+    const high = sampleSetupItem();
+    const routes: FakeRoutes = {
+      [`GET ${paths.takes}`]: list(twoTakes),
+      [`GET ${paths.setups}`]: json({ items: [high] }),
+    };
+    for (const number of [13, 14]) {
+      const take = sampleTake({ id: listId(number), setup: before[number] });
+      routes[`GET ${paths.take(take.id)}`] = json(take);
+      routes[`PATCH ${paths.take(take.id)}`] = json(take);
+    }
+    const { requests } = open(routes);
+    await userEvent.click(await chooseBox(/^choose take 14/));
+    await userEvent.click(await chooseBox(/^choose take 13/));
+    const setups = await screen.findByRole('combobox', { name: 'Recorded with' });
+    await userEvent.selectOptions(setups, 'one overhead, high');
+    expect(
+      await screen.findByText('Takes 13 and 14 are recorded with one overhead, high.'),
+    ).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Undo' }));
+    expect(await screen.findByText('The setups are as they were.')).toBeInTheDocument();
+    expect(requests.filter(({ method }) => method === 'PATCH').map(({ body }) => body)).toEqual([
+      { setupId: high.id },
+      { setupId: high.id },
+      { setupId: listId(50) },
+      { setupId: null },
+    ]);
+  });
+});
+
 describe('the filter sentence', () => {
+  it('asks for the takes of one setup', async () => {
+    const high = { id: listId(50), name: 'one overhead, high' };
+    const { address } = open({
+      [`GET ${paths.takes}`]: list(sampleList([sampleListItem()], { setups: [high] })),
+    });
+    const setups = await screen.findByRole('combobox', { name: 'With setup' });
+    await userEvent.selectOptions(setups, 'one overhead, high');
+    expect(address()).toBe(`/takes?setup=${high.id}`);
+  });
+
   const some = sampleList([sampleListItem()], { tags: ['blankets', 'rug'], everyTotal: 20, total: 1 });
   const choose = (label: string, words: string) =>
     userEvent.selectOptions(screen.getByRole('combobox', { name: label }), words);

@@ -52,7 +52,7 @@ describe('the tape beside the sound', () => {
   it('names both as distance and as time', () => {
     expect(measuredWords(measured(2.7), metric)).toBe('take 17 measured 93 cm, 2.7 ms');
     expect(numbersWords(95.68, metric)).toBe('the numbers say 96 cm, 2.8 ms');
-    expect(numbersWords(95.68, imperial)).toBe('the numbers say 3 ft 2 in, 2.8 ms');
+    expect(numbersWords(95.68, imperial)).toBe('the numbers say 38 in, 2.8 ms');
   });
 });
 

@@ -1,7 +1,8 @@
 import type { SetupFields, SetupListItem, SetupResponse, UserSettings } from '@thudline/contracts';
 import { pathDifferenceM } from '@thudline/dsp';
-import { distance, milliseconds, plural } from '../../lib/format';
+import { milliseconds, number, plural } from '../../lib/format';
 import { takeNumbers } from '../takes/chosenTakes';
+import { everyTake, takesAddress } from '../takes/takesQuery';
 import { setupDistances } from './setupGeometry';
 
 type Measured = SetupResponse['measured'];
@@ -10,7 +11,11 @@ type Reader = Pick<UserSettings, 'lengthUnit' | 'temperatureC'>;
 /** An arrival holds to about 0.3 ms, a tape on a kit to some centimetres; beyond this, one of them is wrong. */
 const agreeWithinCm = 12;
 
-const cm = (lengthCm: number, { lengthUnit }: Reader) => distance(lengthCm / 100, lengthUnit);
+/** A tape reads in whole centimetres or inches, also beyond a metre or a foot. */
+export const tapeWords = (lengthCm: number, lengthUnit: Reader['lengthUnit']): string =>
+  lengthUnit === 'foot' ? `${number(lengthCm / 2.54, 0)} in` : `${number(lengthCm, 0)} cm`;
+
+const cm = (lengthCm: number, { lengthUnit }: Reader) => tapeWords(lengthCm, lengthUnit);
 
 export const measuredCm = (measured: NonNullable<Measured>, { temperatureC }: Reader): number =>
   100 * pathDifferenceM(measured.arrivalMs, temperatureC);
@@ -53,6 +58,14 @@ export function numbersWords(differenceCm: number, reader: Reader): string {
   return `the numbers say ${cm(differenceCm, reader)}, ${milliseconds(differenceCm * msPerCm)}`;
 }
 
+/** Both views in a sentence. */
+export function pictureWords(fields: Pick<SetupFields, 'kick' | 'overhead'>, reader: Reader): string {
+  const { beaterToKickCm, beaterToOverheadCm } = setupDistances(fields);
+  const told = (name: string, lengthCm: number | null) =>
+    lengthCm === null ? `${name} not drawn as a whole` : `${name} ${cm(lengthCm, reader)}`;
+  return `From where the beater strikes: ${told('kick microphone', beaterToKickCm)}; ${told('overhead', beaterToOverheadCm)}.`;
+}
+
 const fieldNames = [
   ['kick', 'insideCm', 'inside the front hole'],
   ['kick', 'offCentreCm', 'off the centre'],
@@ -91,6 +104,9 @@ export function placesWords({ kick, overhead }: SetupListItem, reader: Reader): 
     parts.push(`overhead ${cm(overhead.aboveSnareCm, reader)} above the snare`);
   return parts.join(', ') || 'no places written down';
 }
+
+/** The takes recorded with a setup. */
+export const takesOfSetup = (setupId: string): string => takesAddress({ ...everyTake, setup: setupId });
 
 export const takesWords = (takeCount: number): string =>
   takeCount === 0 ? 'no take yet' : plural(takeCount, 'take');

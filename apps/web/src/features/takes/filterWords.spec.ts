@@ -8,6 +8,7 @@ describe('why a list is empty', () => {
     [{ find: 'port' }, 'Nothing you recorded says “port”.'],
     [{ show: 'to-flip' as const, find: ' port ' }, 'Nothing you recorded that says “port” needs a flip.'],
     [{ tag: 'rug' }, 'Nothing you tagged rug is there.'],
+    [{ tag: 'rug', setup: 'x' }, 'Nothing you tagged rug with that setup is there.'],
   ])('%j', (change, words) => {
     expect(nothingWords({ ...everyTake, ...change })).toBe(words);
   });
@@ -15,12 +16,17 @@ describe('why a list is empty', () => {
 
 describe('wider sentences', () => {
   it('each ask one thing less', () => {
-    const query = { show: 'clipped', tag: 'rug', find: 'port', order: 'oldest' } as const;
+    const query = { show: 'clipped', tag: 'rug', setup: null, find: 'port', order: 'oldest' } as const;
     expect(widerQueries(query).map(queryWords)).toEqual([
       'Every take tagged rug that says “port”',
       'Clipped takes that say “port”',
       'Clipped takes tagged rug',
     ]);
+  });
+
+  it('ask of any setup, too', () => {
+    const query = { ...everyTake, show: 'clipped' as const, setup: 'x' };
+    expect(widerQueries(query).map(queryWords)).toEqual(['Every take with that setup', 'Clipped takes']);
   });
 
   it('are not there where only every take is wider', () => {

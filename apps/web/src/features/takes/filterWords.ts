@@ -32,20 +32,22 @@ const hasWords: Record<TakeFilter, string> = {
 };
 
 /** Why the list is empty: "Nothing you tagged rug has clipped." */
-export function nothingWords({ show, tag, find }: TakesQuery): string {
-  const subject = tag ? `Nothing you tagged ${tag}` : 'Nothing you recorded';
+export function nothingWords({ show, tag, setup, find }: TakesQuery): string {
+  const subject = (tag ? `Nothing you tagged ${tag}` : 'Nothing you recorded') + withSetup(setup);
   const said = find.trim() ? ` that says “${find.trim()}”` : '';
   if (show === 'every' && said) return `${subject} says “${find.trim()}”.`;
   return `${subject}${said} ${hasWords[show]}.`;
 }
 
+const withSetup = (setup: string | null) => (setup ? ' with that setup' : '');
+
 const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
 
 /** A wider sentence as a link: "Clipped takes tagged rug". */
-export function queryWords({ show, tag, find }: TakesQuery): string {
+export function queryWords({ show, tag, setup, find }: TakesQuery): string {
   const tagged = tag ? ` tagged ${tag}` : '';
   const said = find.trim() ? ` that ${show === 'every' ? 'says' : 'say'} “${find.trim()}”` : '';
-  return capital(filterWords[show] + tagged + said);
+  return capital(filterWords[show] + tagged + withSetup(setup) + said);
 }
 
 /** The same sentence with one thing less asked of a take; every take is not among them. */
@@ -53,6 +55,7 @@ export function widerQueries(query: TakesQuery): TakesQuery[] {
   const without: Partial<TakesQuery>[] = [];
   if (query.show !== 'every') without.push({ show: 'every' });
   if (query.tag) without.push({ tag: null });
+  if (query.setup) without.push({ setup: null });
   if (query.find.trim()) without.push({ find: '' });
   if (without.length < 2) return [];
   return without.map((change) => ({ ...query, ...change, order: everyTake.order }));

@@ -13,13 +13,14 @@ describe('the filter sentence in the address', () => {
       show: 'clipped',
       order: 'hardest-kick',
       tag: 'rug & blankets',
+      setup: '01890000-0000-7000-8000-000000000051',
       find: 'port, again',
     } as const;
     expect(read(takesAddress(query).split('?')[1])).toEqual(query);
   });
 
   it('reads what it does not know as if it were not there', () => {
-    expect(read('show=loudest&order=random&tag=&after=c1')).toEqual(everyTake);
+    expect(read('show=loudest&order=random&tag=&setup=high&after=c1')).toEqual(everyTake);
   });
 
   it('keeps no spaces around the words looked for', () => {

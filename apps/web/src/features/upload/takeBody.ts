@@ -8,7 +8,7 @@ import type { UploadState } from './uploadState';
 export function takeRequest(
   state: UploadState,
   { slots, used }: Arrangement,
-  { previous, nowMs }: { previous: PreviousTake | null; nowMs: number },
+  { previous, setupId, nowMs }: { previous: PreviousTake | null; setupId: string | null; nowMs: number },
 ): CreateTakeRequest {
   if (!state.uploadKey) throw new Error('An upload needs its key before it is sent.');
   return {
@@ -22,6 +22,7 @@ export function takeRequest(
     ...(previous && state.follows
       ? { followsTakeId: previous.take.id, doneActions: doneActions(previous, state.tickedHere) }
       : { doneActions: [] }),
+    ...(setupId ? { setupId } : {}),
     tags: [],
     tracks: slots.map(({ role, channel, fileId }) => ({
       role,
@@ -39,6 +40,7 @@ export function takeForm(request: CreateTakeRequest, files: readonly File[]): Fo
   form.append('note', request.note);
   if (request.recordedAt) form.append('recordedAt', request.recordedAt);
   if (request.followsTakeId) form.append('followsTakeId', request.followsTakeId);
+  if (request.setupId) form.append('setupId', request.setupId);
   form.append('doneActions', JSON.stringify(request.doneActions));
   form.append('tags', JSON.stringify(request.tags));
   form.append('tracks', JSON.stringify(request.tracks));

@@ -20,6 +20,8 @@ export interface UploadState {
   chosen: ChosenRole | null;
   title: string;
   note: string;
+  /** Id of the setup chosen here, empty for none; null until something was chosen. */
+  setupHere: string | null;
   /** Whether the take follows the one before it. */
   follows: boolean;
   /** Ids of the earlier sheet's actions as ticked on this page; null until something was ticked here. */
@@ -37,6 +39,7 @@ export type UploadAction =
   | { type: 'roleChosen'; chosen: ChosenRole }
   | { type: 'titleWritten'; title: string }
   | { type: 'noteWritten'; note: string }
+  | { type: 'setupChosen'; setupId: string }
   | { type: 'followsChosen'; follows: boolean }
   | { type: 'changesTicked'; actionIds: string[] }
   | { type: 'sendStarted'; newKey: string; atMs: number }
@@ -51,6 +54,7 @@ export const emptyUpload: UploadState = {
   chosen: null,
   title: '',
   note: '',
+  setupHere: null,
   follows: true,
   tickedHere: null,
   uploadKey: null,
@@ -80,6 +84,8 @@ export function uploadReducer(state: UploadState, action: UploadAction): UploadS
       return { ...state, title: action.title };
     case 'noteWritten':
       return { ...state, note: action.note };
+    case 'setupChosen':
+      return changed(state, { setupHere: action.setupId });
     case 'followsChosen':
       return changed(state, { follows: action.follows });
     case 'changesTicked':

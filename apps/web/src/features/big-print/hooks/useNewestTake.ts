@@ -1,7 +1,7 @@
 import { listTakesResponse, type ListTakesResponse, type TakeListItem } from '@thudline/contracts';
 import useSWR from 'swr';
 import { requestJson } from '../../../lib/apiClient';
-import { takesKey } from '../../takes/hooks/takesKeys';
+import { takesKey } from '../../takes/hooks/takesPageKey';
 import { useMeasurementEvents } from '../../takes/hooks/useMeasurementEvents';
 
 /** The list is in the order of recording; a take added last may have been recorded a little before others. */

@@ -9,8 +9,10 @@ export function useTakeEdits(take: TakeResponse) {
   const key = paths.take(take.id);
 
   const update = async (body: UpdateTakeRequest) => {
+    // The name of another setup is the server's to tell.
+    const { setupId, ...known } = body;
     await mutate(key, requestJson(key, takeResponse, { method: 'PATCH', body }), {
-      optimisticData: { ...take, ...body },
+      optimisticData: setupId === undefined ? { ...take, ...known } : take,
       rollbackOnError: true,
       revalidate: false,
     });

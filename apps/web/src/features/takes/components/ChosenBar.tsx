@@ -1,4 +1,5 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
+import type { NamedSetup } from '@thudline/contracts';
 import { useEffect, useRef, useState } from 'react';
 import { Button } from '../../../components/Button';
 import { ButtonLink } from '../../../components/ButtonLink';
@@ -6,6 +7,7 @@ import { FieldError } from '../../../components/FieldError';
 import { chosenPlaces } from '../chosenPlaces';
 import { takeNumbers, type ChosenTake } from '../chosenTakes';
 import { failureWords } from '../hooks/useUndo';
+import { SetUpChosen } from './SetUpChosen';
 import { TagForm } from './TagForm';
 
 interface ChosenBarProps {
@@ -15,11 +17,13 @@ interface ChosenBarProps {
   /** Set where the chosen takes are deleted ones: then this is what can be done to them. */
   onRestore?: () => Promise<void>;
   onTag: (tags: string[]) => Promise<void>;
+  onSetUp: (setup: NamedSetup) => Promise<void>;
   onClear: () => void;
 }
 
 /** "2 chosen: takes 12 and 14", and what can be done to them. */
-export function ChosenBar({ chosen, knownTags, onDelete, onRestore, onTag, onClear }: ChosenBarProps) {
+export function ChosenBar(props: ChosenBarProps) {
+  const { chosen, knownTags, onDelete, onRestore, onTag, onSetUp, onClear } = props;
   const { open, setOpen, button } = useOpenForm();
   const { failure, busy, run } = useOneAtATime();
   const them = chosen.length === 1 ? 'it' : 'them';
@@ -52,6 +56,7 @@ export function ChosenBar({ chosen, knownTags, onDelete, onRestore, onTag, onCle
             <Button look="outline" ref={button} onClick={() => setOpen(true)}>
               Tag {them}
             </Button>
+            <SetUpChosen onChoose={(setup) => void run(() => onSetUp(setup))} />
             <Button look="outline" aria-disabled={busy} onClick={() => void run(onDelete)}>
               {busy ? 'Deleting…' : `Delete ${them}`}
             </Button>

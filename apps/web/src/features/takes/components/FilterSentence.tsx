@@ -1,20 +1,22 @@
 import { Flex, chakra } from '@chakra-ui/react';
-import { takeFilters, takeOrders } from '@thudline/contracts';
+import { takeFilters, takeOrders, type NamedSetup } from '@thudline/contracts';
 import { InlineSelect } from '../../../components/InlineSelect';
 import { filterWords, orderWords } from '../filterWords';
 import type { TakesQuery } from '../takesQuery';
 import { FindBox } from './FindBox';
 
-const anyTag = '';
+const any = '';
 
-/** "Show **every take** tagged **any tag**, **newest first**." and a place to look for words. */
+/** "Show **every take** tagged **any tag** with setup **any setup**, **newest first**." and a place to look for words. */
 export function FilterSentence({
   query,
   tags,
+  setups,
   onChange,
 }: {
   query: TakesQuery;
   tags: readonly string[];
+  setups: readonly NamedSetup[];
   onChange: (change: Partial<TakesQuery>) => void;
 }) {
   const known = query.tag && !tags.includes(query.tag) ? [...tags, query.tag] : tags;
@@ -45,10 +47,23 @@ export function FilterSentence({
             tagged{' '}
             <InlineSelect
               label="Tagged"
-              value={query.tag ?? anyTag}
-              options={[anyTag, ...known]}
+              value={query.tag ?? any}
+              options={[any, ...known]}
               words={(tag) => tag || 'any tag'}
               onChange={(tag) => onChange({ tag: tag || null })}
+            />
+          </>
+        )}
+        {(setups.length > 0 || query.setup) && (
+          <>
+            {' '}
+            with setup{' '}
+            <InlineSelect
+              label="With setup"
+              value={query.setup ?? any}
+              options={setupOptions(setups, query.setup)}
+              words={(id) => setupWords(setups, id)}
+              onChange={(id) => onChange({ setup: id || null })}
             />
           </>
         )}
@@ -65,3 +80,11 @@ export function FilterSentence({
     </Flex>
   );
 }
+
+function setupOptions(setups: readonly NamedSetup[], asked: string | null): string[] {
+  const ids = setups.map(({ id }) => id);
+  return [any, ...ids, ...(asked && !ids.includes(asked) ? [asked] : [])];
+}
+
+const setupWords = (setups: readonly NamedSetup[], id: string) =>
+  id === any ? 'any setup' : (setups.find((setup) => setup.id === id)?.name ?? 'one that no take has');

@@ -1,5 +1,6 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
 import { ButtonLink } from '../../../components/ButtonLink';
+import { TextLink } from '../../../components/TextLink';
 
 /** The name of the page and the way to another take. */
 export function TakesHeading() {
@@ -11,6 +12,7 @@ export function TakesHeading() {
       <Box fontSize="small" color="ink.muted" display={{ base: 'none', lg: 'block' }}>
         Drop WAV files anywhere on this page
       </Box>
+      <TextLink to="/setups">Setups</TextLink>
       <ButtonLink to="/takes/new">Add a take</ButtonLink>
     </Flex>
   );

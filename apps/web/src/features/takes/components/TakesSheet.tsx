@@ -47,7 +47,7 @@ export function TakesSheet() {
   return (
     <Box marginX={{ base: 0, lg: '-24px' }} marginTop={{ base: 0, lg: '-3px' }}>
       <TakesHeading />
-      <FilterSentence query={query} tags={page?.tags ?? []} onChange={change} />
+      <FilterSentence query={query} tags={page?.tags ?? []} setups={page?.setups ?? []} onChange={change} />
       {error && <TakesError message={error.message} onRetry={retry} />}
       {!page && !error && <TakesLoading target={target} />}
       {page && (
@@ -73,6 +73,7 @@ export function TakesSheet() {
                   onDelete={bench.removeChosen}
                   onRestore={query.show === 'deleted' ? bench.restoreChosen : undefined}
                   onTag={bench.tagChosen}
+                  onSetUp={bench.setUpChosen}
                   onClear={bench.clear}
                 />
               )

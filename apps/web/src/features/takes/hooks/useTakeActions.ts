@@ -1,8 +1,9 @@
-import { paths, takeResponse } from '@thudline/contracts';
+import { paths, takeResponse, type UpdateTakeRequest } from '@thudline/contracts';
 import { useSWRConfig } from 'swr';
 import { requestJson, requestNothing } from '../../../lib/apiClient';
 import { isKeyOfTake, isTakesKey } from './takesKeys';
 
+type EachSetup = { takeId: string; setupId: string | null }[];
 type EachTags = { takeId: string; tags: string[] }[];
 
 /** What can be done to takes from the list; the list is stale after each, and so is what is known of the take. */
@@ -11,9 +12,10 @@ export function useTakeActions() {
   const forget = (takeIds: readonly string[]) =>
     mutate((key) => takeIds.some((takeId) => isKeyOfTake(takeId)(key)), undefined, { revalidate: false });
 
-  const setTags = async (takeId: string, tags: string[]) => {
+  const setTags = (takeId: string, tags: string[]) => change(takeId, { tags });
+  const change = async (takeId: string, body: UpdateTakeRequest) => {
     const path = paths.take(takeId);
-    await mutate(path, requestJson(path, takeResponse, { method: 'PATCH', body: { tags } }), {
+    await mutate(path, requestJson(path, takeResponse, { method: 'PATCH', body }), {
       populateCache: true,
       revalidate: false,
     });
@@ -66,6 +68,18 @@ export function useTakeActions() {
     },
     setEachTags: (all: EachTags) =>
       eachOf(all, ({ takeId, tags }) => setTags(takeId, tags)).finally(() => mutate(isTakesKey)),
+    /** @returns the setups of before */
+    setSetup: async (takeIds: readonly string[], setupId: string | null): Promise<EachSetup> => {
+      const before: EachSetup = [];
+      await eachOf(takeIds, async (takeId) => {
+        const take = await requestJson(paths.take(takeId), takeResponse);
+        await change(takeId, { setupId });
+        before.push({ takeId, setupId: take.setup?.id ?? null });
+      }).finally(() => mutate(isTakesKey));
+      return before;
+    },
+    setEachSetup: (all: EachSetup) =>
+      eachOf(all, ({ takeId, setupId }) => change(takeId, { setupId })).finally(() => mutate(isTakesKey)),
     stopMeasuring: (takeId: string) => tellMeasuring(takeId, paths.cancelMeasurement(takeId)),
     measureAgain: (takeId: string) => tellMeasuring(takeId, paths.measureAgain(takeId)),
   };

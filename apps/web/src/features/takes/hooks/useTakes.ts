@@ -3,7 +3,7 @@ import useSWR, { useSWRConfig } from 'swr';
 import { requestJson } from '../../../lib/apiClient';
 import { isMeasuring } from '../rowWords';
 import type { TakesQuery } from '../takesQuery';
-import { takesKey } from './takesKeys';
+import { takesKey } from './takesPageKey';
 import { useMeasurementEvents } from './useMeasurementEvents';
 
 const readPage = (path: string) => requestJson(path, listTakesResponse);

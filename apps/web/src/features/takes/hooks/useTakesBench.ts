@@ -1,4 +1,4 @@
-import type { TakeListItem } from '@thudline/contracts';
+import type { NamedSetup, TakeListItem } from '@thudline/contracts';
 import { doneWords, type ChosenTake } from '../chosenTakes';
 import { useChosenTakes } from './useChosenTakes';
 import { useTakeActions } from './useTakeActions';
@@ -57,6 +57,13 @@ export function useTakesBench(
       forget(removed);
       if (error instanceof Error) throw error;
       if (emptied) await onPageEmptied?.();
+    },
+    setUpChosen: async (setup: NamedSetup) => {
+      const before = await actions.setSetup(idsOf(chosen), setup.id);
+      undo.tell({
+        words: doneWords(chosen, `recorded with ${setup.name}`),
+        takeBack: { act: () => actions.setEachSetup(before), words: 'The setups are as they were.' },
+      });
     },
     tagChosen: async (tags: string[]) => {
       const before = await actions.addTags(idsOf(chosen), tags);

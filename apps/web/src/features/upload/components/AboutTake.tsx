@@ -1,4 +1,5 @@
 import { Box, chakra } from '@chakra-ui/react';
+import { SelectField } from '../../../components/SelectField';
 import { TextArea } from '../../../components/TextArea';
 import { TextField } from '../../../components/TextField';
 import type { NewTake } from '../hooks/useNewTake';
@@ -16,6 +17,26 @@ export function AboutTake({ newTake }: { newTake: NewTake }) {
         onChange={newTake.writeTitle}
         maxLength={120}
         autoComplete="off"
+      />
+      <SetupChoice newTake={newTake} />
+    </Box>
+  );
+}
+
+const none = '';
+
+/** What it was recorded with; not offered before there is a setup. */
+function SetupChoice({ newTake }: { newTake: NewTake }) {
+  if (newTake.setups.length === 0) return null;
+  const nameOf = (id: string) => newTake.setups.find((setup) => setup.id === id)?.name ?? 'none written down';
+  return (
+    <Box marginTop="12px">
+      <SelectField
+        label="Setup"
+        value={newTake.setupId ?? none}
+        options={[none, ...newTake.setups.map(({ id }) => id)]}
+        words={nameOf}
+        onChange={newTake.chooseSetup}
       />
     </Box>
   );

@@ -14,15 +14,18 @@ import {
 } from '../uploadState';
 import { useLeaveGuard } from './useLeaveGuard';
 import { useSending } from './useSending';
+import { useUploadSetups } from './useUploadSetups';
 
 /** The upload page: what was dropped, what is written about it, and sending it. */
 export function useNewTake(previous: PreviousTake | null) {
+  const setups = useUploadSetups();
   const [state, dispatch] = useReducer(uploadReducer, emptyUpload, withHandedOverFiles);
   const leaving = useLeaveGuard(state.sending.phase === 'sending');
   useOpenSheet(state.sending);
   useReading(state.files, dispatch);
   const arranged = arrangement(state.files, state.chosen);
-  const { notYet, upload, stop, forget } = useSending({ state, arranged, previous, dispatch });
+  const setupId = setups.chosen(state.setupHere);
+  const { notYet, upload, stop, forget } = useSending({ state, arranged, previous, setupId, dispatch });
 
   const pick = (files: readonly File[], how: 'added' | 'replaced' = 'added') => {
     forget();
@@ -36,6 +39,12 @@ export function useNewTake(previous: PreviousTake | null) {
     previous,
     follows: state.follows,
     done,
+    setups: setups.all,
+    setupId,
+    chooseSetup: (id: string) => {
+      setups.remember(id);
+      dispatch({ type: 'setupChosen', setupId: id });
+    },
     setFollows: (follows: boolean) => dispatch({ type: 'followsChosen', follows }),
     tick: (id: string, on: boolean) =>
       dispatch({ type: 'changesTicked', actionIds: on ? [...done, id] : done.filter((each) => each !== id) }),

@@ -14,11 +14,13 @@ export function useSending({
   state,
   arranged,
   previous,
+  setupId,
   dispatch,
 }: {
   state: UploadState;
   arranged: Arrangement;
   previous: PreviousTake | null;
+  setupId: string | null;
   dispatch: Dispatch<UploadAction>;
 }) {
   const [notYet, setNotYet] = useState('');
@@ -29,7 +31,7 @@ export function useSending({
     const uploadKey = state.uploadKey ?? newUploadKey();
     dispatch({ type: 'sendStarted', newKey: uploadKey, atMs: Date.now() });
     const take = await send({
-      request: takeRequest({ ...state, uploadKey }, arranged, { previous, nowMs: Date.now() }),
+      request: takeRequest({ ...state, uploadKey }, arranged, { previous, setupId, nowMs: Date.now() }),
       files: arranged.used.map(({ file }) => file),
       onProgress: (sent) => dispatch({ type: 'progressed', report: { ...sent, atMs: Date.now() } }),
       wordsNow: () => ({ title: latest.current.title, note: latest.current.note }),

@@ -1,0 +1,50 @@
+import { paths, setupResponse, type CreateSetupRequest, type SetupFields } from '@thudline/contracts';
+import type { SetupResponse } from '@thudline/contracts';
+import { useSWRConfig } from 'swr';
+import { errorFrom, parseJson, refreshSession, requestJson, requestNothing } from '../../../lib/apiClient';
+import { isTakesKey } from '../../takes/hooks/takesKeys';
+import { postForm } from '../../upload/api/postForm';
+
+/** A take carries its setup's name. */
+const isTakeKey = (key: unknown) => typeof key === 'string' && /^\/api\/takes\/[^/]+$/.test(key);
+
+/** Writing setups; the setup, the list, and what names it hear of it. */
+export function useSetupActions() {
+  const { mutate } = useSWRConfig();
+
+  const told = async (setup: SetupResponse): Promise<SetupResponse> => {
+    await mutate(paths.setup(setup.id), setup, { revalidate: false });
+    await mutate(paths.setups);
+    return setup;
+  };
+
+  return {
+    create: async (body: CreateSetupRequest) =>
+      told(await requestJson(paths.setups, setupResponse, { method: 'POST', body })),
+    update: async (setupId: string, fields: SetupFields) => {
+      const setup = await told(
+        await requestJson(paths.setup(setupId), setupResponse, { method: 'PATCH', body: fields }),
+      );
+      await mutate((key) => isTakesKey(key) || isTakeKey(key));
+      return setup;
+    },
+    remove: async (setupId: string) => {
+      await requestNothing(paths.setup(setupId), { method: 'DELETE' });
+      await mutate(paths.setups);
+    },
+    addPhoto: async (setupId: string, file: File, signal: AbortSignal) => {
+      const form = new FormData();
+      form.append('photo', file, file.name);
+      const post = () =>
+        postForm({ path: paths.setupPhoto(setupId), form, signal, onProgress: () => undefined });
+      let answer = await post();
+      if (answer.status === 401 && (await refreshSession())) answer = await post();
+      const { status, text } = answer;
+      if (status < 200 || status >= 300) throw await errorFrom({ status, text: () => Promise.resolve(text) });
+      await told(setupResponse.parse(parseJson(text)));
+    },
+    removePhoto: async (setupId: string) => {
+      await told(await requestJson(paths.setupPhoto(setupId), setupResponse, { method: 'DELETE' }));
+    },
+  };
+}
