@@ -1,3 +1,4 @@
+import { broadcastBytes } from './broadcastFacts';
 import { ascii, type ByteWindow } from './byteWindow';
 import { WavError, cutOffHeader } from './wavError';
 
@@ -8,7 +9,11 @@ export interface WavChunks {
   /** Bytes of sound that are there. */
   readonly dataBytes: number;
   readonly cutShort: boolean;
+  /** The start of the body of the `bext` chunk, before or after the sound; null where there is none. */
+  readonly broadcast: DataView | null;
 }
+
+type DataExtent = Pick<WavChunks, 'dataOffset' | 'dataBytes' | 'cutShort'>;
 
 interface FoundChunk {
   readonly id: string;
@@ -18,6 +23,8 @@ interface FoundChunk {
 
 /** No recorder writes near this many; a file of nothing but empty chunks must end, too. */
 const mostChunks = 4096;
+/** Looked through behind the sound for what the recorder wrote there. */
+const mostTrailingChunks = 64;
 /** A 32-bit size that says "see ds64", or that a recorder never came back to fill in. */
 const unknownSize = 0xffffffff;
 const knownIds = new Set(
@@ -37,7 +44,8 @@ const knownIds = new Set(
  */
 export async function walkChunks(bytes: ByteWindow): Promise<WavChunks> {
   let format: DataView | null = null;
-  let data: Omit<WavChunks, 'format'> | null = null;
+  let data: DataExtent | null = null;
+  let broadcast: DataView | null = null;
   let longDataBytes: number | null = null;
   let position = 12;
 
@@ -48,12 +56,16 @@ export async function walkChunks(bytes: ByteWindow): Promise<WavChunks> {
     if (chunk.id === 'fmt ' && !format) {
       const body = await bytes.at(chunk.bodyStart, Math.min(chunk.declaredBytes, 40));
       if (body.byteLength < Math.max(16, Math.min(chunk.declaredBytes, 40))) throw cutOffHeader();
-      format = new DataView(body.buffer.slice(body.byteOffset, body.byteOffset + body.byteLength));
+      format = kept(body);
     }
+    if (chunk.id === 'bext' && !broadcast) broadcast = await broadcastBody(bytes, chunk);
     if (chunk.id === 'data' && !data) data = await dataExtent(bytes, chunk, longDataBytes);
-    if (format && data) return { format, ...data };
     const bodyBytes = chunk.id === 'data' && data ? data.dataBytes : chunk.declaredBytes;
     position = await nextChunk(bytes, chunk, bodyBytes);
+    if (format && data) {
+      broadcast ??= await trailingBroadcast(bytes, position);
+      return { format, ...data, broadcast };
+    }
   }
   throw new WavError('damaged', "This WAV's chunks never lead to any sound; export it again.");
 }
@@ -62,6 +74,26 @@ async function chunkAt(bytes: ByteWindow, position: number): Promise<FoundChunk 
   const header = await bytes.at(position, 8);
   if (header.byteLength < 8) return null;
   return { id: ascii(header, 0, 4), declaredBytes: header.getUint32(4, true), bodyStart: position + 8 };
+}
+
+/** A copy: the window moves on. */
+function kept(body: DataView): DataView {
+  return new DataView(body.buffer.slice(body.byteOffset, body.byteOffset + body.byteLength));
+}
+
+async function broadcastBody(bytes: ByteWindow, chunk: FoundChunk): Promise<DataView> {
+  return kept(await bytes.at(chunk.bodyStart, Math.min(chunk.declaredBytes, broadcastBytes)));
+}
+
+async function trailingBroadcast(bytes: ByteWindow, start: number): Promise<DataView | null> {
+  let position = start;
+  for (let count = 0; count < mostTrailingChunks; count++) {
+    const chunk = await chunkAt(bytes, position);
+    if (!chunk) return null;
+    if (chunk.id === 'bext') return broadcastBody(bytes, chunk);
+    position = await nextChunk(bytes, chunk, chunk.declaredBytes);
+  }
+  return null;
 }
 
 async function dataBytesOf64(bytes: ByteWindow, chunk: FoundChunk): Promise<number | null> {
@@ -74,7 +106,7 @@ async function dataExtent(
   bytes: ByteWindow,
   chunk: FoundChunk,
   longDataBytes: number | null,
-): Promise<Omit<WavChunks, 'format'>> {
+): Promise<DataExtent> {
   const available = Math.max(0, bytes.sizeBytes - chunk.bodyStart);
   let declared = chunk.declaredBytes;
   if (declared === unknownSize && longDataBytes !== null) declared = longDataBytes;

@@ -32,6 +32,7 @@ describe('openWav', () => {
       cutShort: false,
       durationS: 0.01,
       encodingName: '24-bit PCM',
+      broadcast: null,
     });
   });
 

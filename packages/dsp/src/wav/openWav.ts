@@ -1,7 +1,8 @@
 import { SignalError } from '../assert';
 import type { ByteSource, TrackSource } from '../trackSource';
+import { broadcastFacts } from './broadcastFacts';
 import { ascii, byteWindow } from './byteWindow';
-import { walkChunks } from './chunkWalk';
+import { walkChunks, type WavChunks } from './chunkWalk';
 import { decodeSamples } from './decodeSamples';
 import { foreignFormat } from './foreignFormat';
 import { sampleFormat } from './formatChunk';
@@ -54,17 +55,16 @@ export async function openWav(source: ByteSource): Promise<WavFile> {
   };
 }
 
-function wavFacts(
-  format: SampleFormat,
-  data: { dataOffset: number; dataBytes: number; cutShort: boolean },
-): WavFacts {
-  const frames = Math.floor(data.dataBytes / format.blockAlign);
+function wavFacts(format: SampleFormat, chunks: WavChunks): WavFacts {
+  const frames = Math.floor(chunks.dataBytes / format.blockAlign);
   if (frames === 0) {
     throw new WavError('no-frames', 'This WAV holds not one whole frame of sound; export the take again.');
   }
-  const { dataOffset, cutShort } = data;
+  const { dataOffset, cutShort } = chunks;
   const encodingName = `${format.validBits}-bit ${format.encoding === 'pcm' ? 'PCM' : 'float'}`;
-  return { ...format, frames, dataOffset, cutShort, durationS: frames / format.sampleRateHz, encodingName };
+  const broadcast = chunks.broadcast && broadcastFacts(chunks.broadcast);
+  const durationS = frames / format.sampleRateHz;
+  return { ...format, frames, dataOffset, cutShort, durationS, encodingName, broadcast };
 }
 
 function track(source: ByteSource, facts: WavFacts, channel: number): TrackSource {

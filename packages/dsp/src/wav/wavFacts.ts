@@ -1,3 +1,5 @@
+import type { BroadcastFacts } from './broadcastFacts';
+
 /** What the header of a WAV file says, with what is really there. */
 export interface WavFacts {
   readonly encoding: 'pcm' | 'float';
@@ -18,6 +20,8 @@ export interface WavFacts {
   readonly durationS: number;
   /** Such as `24-bit PCM` or `32-bit float`. */
   readonly encodingName: string;
+  /** What the recorder wrote into the file; null where it has no `bext` chunk, or an empty one. */
+  readonly broadcast: BroadcastFacts | null;
 }
 
 /** How samples lie in the file. */

@@ -22,6 +22,7 @@ const facts = (overrides: Partial<WavFacts>): WavFacts => ({
   cutShort: false,
   durationS: 52,
   encodingName: '24-bit PCM',
+  broadcast: null,
   ...overrides,
 });
 
