@@ -50,12 +50,24 @@ describe('peak and power', () => {
     expect(level(samples).headroomDb).toBeCloseTo(6.0206, 4);
   });
 
-  it('reads 16-bit quantisation of a full-scale sine 98.09 dB below it', () => {
-    // check-values.md section 11: SNR = 6.0206·N + 1.7609 dB, tolerance 0.25 (undithered 997 Hz: 98.07).
-    const tone = sine({ frequencyHz: 997, seconds: 1, amplitude: 1 - 2 ** -15 });
-    const error = tone.map((x) => Math.round(x * 32768) / 32768 - x);
-    const snrDb = (level(tone).rmsDbfs ?? 0) - (level(error).rmsDbfs ?? 0);
-    expect(Math.abs(snrDb - 98.09)).toBeLessThan(0.25);
+  // check-values.md section 11: SNR = 20·lg(2^N·√1.5), and what SciPy reads of an undithered 997 Hz tone; tolerance 0.25.
+  it.each([
+    [8, 49.95],
+    [16, 98.07],
+    [24, 146.2],
+  ])('reads %i-bit quantisation of a full-scale sine %f dB below it', (bits, referenceDb) => {
+    const fullScale = 2 ** (bits - 1);
+    let signal = 0;
+    const error = Float32Array.from({ length: sampleRateHz }, (_, i) => {
+      const x = (1 - 1 / fullScale) * Math.sin((2 * Math.PI * 997 * i) / sampleRateHz);
+      signal += x * x;
+      // A float32 can't hold a 24-bit error beside its signal, so the difference is made before.
+      return Math.round(x * fullScale) / fullScale - x;
+    });
+    const signalDbfs = 10 * Math.log10(signal / sampleRateHz);
+    const snrDb = signalDbfs - (level(error).rmsDbfs ?? 0);
+    expect(Math.abs(snrDb - (6.0206 * bits + 1.7609))).toBeLessThan(0.25);
+    expect(Math.abs(snrDb - referenceDb)).toBeLessThan(0.25);
   });
 
   it('reads the mean as DC offset, whatever lies on top', () => {

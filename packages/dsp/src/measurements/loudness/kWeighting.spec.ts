@@ -14,32 +14,43 @@ const gainDb = (sections: readonly Biquad[], frequencyHz: number, sampleRateHz: 
 };
 
 describe('the K-weighting', () => {
-  it('is BS.1770-5 Annex 1, Tables 1 and 2, at 48 kHz', () => {
-    const [shelf, lowCut] = kWeighting(48000);
-    const table: [number, number][] = [
-      [shelf.b0, 1.53512485958697],
-      [shelf.b1, -2.69169618940638],
-      [shelf.b2, 1.19839281085285],
-      [shelf.a1, -1.69065929318241],
-      [shelf.a2, 0.73248077421585],
-      [lowCut.b0, 1],
-      [lowCut.b1, -2],
-      [lowCut.b2, 1],
-      [lowCut.a1, -1.99004745483398],
-      [lowCut.a2, 0.99007225036621],
-    ];
-    // Printed with 14 decimals.
-    for (const [ours, printed] of table) expect(ours).toBeCloseTo(printed, 12);
+  // 48 kHz: BS.1770-5 Annex 1, Tables 1 and 2, printed with 14 decimals. 44.1 and 96 kHz: the same response through the
+  // bilinear transform, the low cut's numerator scaled to it (check-values.md 1.3, computed with SciPy).
+  it.each([
+    [
+      48000,
+      [1.53512485958697, -2.69169618940638, 1.19839281085285, -1.69065929318241, 0.73248077421585],
+      [1, -1.99004745483398, 0.99007225036621],
+    ],
+    [
+      44100,
+      [1.53084123005035, -2.65097999515473, 1.16907907992159, -1.66365511325602, 0.71259542807323],
+      [0.99956006454251, -1.9891696736298, 0.98919903578704],
+    ],
+    [
+      96000,
+      [1.5597142289758, -2.92674157825108, 1.37826120231582, -1.84460946989011, 0.85584332293064],
+      [1.00249278898634, -1.99501754472472, 0.99502375904092],
+    ],
+  ])('has the coefficients of BS.1770-5 at %i Hz', (sampleRateHz, shelfTable, [scale, ...poles]) => {
+    const [shelf, lowCut] = kWeighting(sampleRateHz);
+    const ours = [shelf.b0, shelf.b1, shelf.b2, shelf.a1, shelf.a2];
+    ours.forEach((value, i) => expect(value).toBeCloseTo(shelfTable[i], 11));
+    [lowCut.b0, lowCut.b1 / -2, lowCut.b2].forEach((value) => expect(value).toBeCloseTo(scale, 11));
+    [lowCut.a1, lowCut.a2].forEach((value, i) => expect(value).toBeCloseTo(poles[i], 11));
   });
 
   // check-values 1.3, gain of the tables; "same frequency response" at other rates, ±0.01 dB suggested there.
   const response = [
     [20, -13.2754],
+    [31.5, -7.79],
     [63, -2.6639],
     [100, -1.1335],
+    [250, -0.1529],
     [500, 0.0425],
     [997, 0.691],
     [2000, 3.0713],
+    [4000, 3.968],
     [10000, 4.0419],
     [20000, 4.0431],
   ] as const;
