@@ -1,5 +1,6 @@
 import { createHash, randomUUID } from 'node:crypto';
 import { readdir } from 'node:fs/promises';
+import { broadcastChunk, encodeWav } from '@thudline/dsp';
 import { paths, takeResponse, TakeResponse } from '@thudline/contracts';
 import { badFiles } from '@thudline/fixtures';
 import { Measurement } from '../src/measuring/entities/measurement.entity';
@@ -46,6 +47,24 @@ describe('uploading a take', () => {
     expect(await test.bucket.keys()).toEqual(keysBefore);
     expect(await readdir(test.config.scratchDir)).toEqual([]);
   }
+
+  it('tells what the recorder wrote into a file, cleaned, and nothing where it wrote nothing', async () => {
+    const about = {
+      originator: 'Recorder',
+      date: '2026-11-30',
+      time: '18:05:09',
+      timeReferenceSamples: 48_000,
+    };
+    const chunks = [broadcastChunk({ ...about, description: 'Take 4\r\n\x1b overhead lower' })];
+    const { files, tracks } = shortTake();
+    const bytes = encodeWav({ channels: [tone(24_000, 60)], sampleRateHz: 48_000, bitDepth: 24, chunks });
+    const take = await juno.makeTake({ files: [{ name: 'kick.wav', bytes }, files[1]], tracks });
+    expect(take.files.map(({ broadcast }) => broadcast)).toEqual([
+      { ...about, description: 'Take 4 overhead lower' },
+      null,
+    ]);
+    expect((await juno.get(paths.take(take.id))).body).toEqual(take);
+  });
 
   it('stores two mono files with their hashes and queues one measurement', async () => {
     const { files, tracks } = shortTake();

@@ -88,6 +88,17 @@ export const measurementResponse = z.object({
 });
 export type MeasurementResponse = z.infer<typeof measurementResponse>;
 
+/** What the recorder wrote into a file (`bext`, EBU Tech 3285); null where it wrote nothing that can be so. */
+export const broadcastFacts = z.object({
+  description: z.string().max(256).nullable(),
+  originator: z.string().max(32).nullable(),
+  /** By the recorder's clock, in its own time zone. */
+  date: z.iso.date().nullable(),
+  time: z.iso.time().nullable(),
+  /** Where the first sample lies, in samples since midnight. */
+  timeReferenceSamples: z.int().nonnegative().nullable(),
+});
+
 export const takeFileResponse = z.object({
   id: z.uuid(),
   name: z.string(),
@@ -98,6 +109,7 @@ export const takeFileResponse = z.object({
   sampleRateHz: z.int().positive(),
   channels: z.int().positive(),
   durationS: z.number().nonnegative(),
+  broadcast: broadcastFacts.nullable(),
 });
 export type TakeFileResponse = z.infer<typeof takeFileResponse>;
 

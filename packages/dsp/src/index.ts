@@ -2,6 +2,7 @@ export * from './facts';
 export * from './trackSource';
 export * from './assert';
 export * from './decibel';
+export * from './wav/aboutChunks';
 export type { BroadcastFacts } from './wav/broadcastFacts';
 export * from './wav/bytesSource';
 export * from './wav/encodeWav';

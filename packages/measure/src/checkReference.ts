@@ -1,4 +1,5 @@
 import { execFile } from 'node:child_process';
+import { existsSync } from 'node:fs';
 import { mkdtemp, readdir, rm, stat } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { extname, join } from 'node:path';
@@ -13,11 +14,12 @@ import { ffmpegFigures, soxFigures, type ToolFigures } from './reference/toolFig
  * Puts our levels of the first channel of WAV files beside those of ffmpeg (`ebur128`, `astats`) and SoX (`stats`), and ends
  * with 1 where one lies further off than rounding explains.
  *
- * Run by `npm run check:reference [-- folder or file …]`; without any it makes three of the fixtures' takes. Needs
- * Debian's `ffmpeg` and `sox`.
+ * Run by `npm run check:reference [-- folder or file …]`; without any it makes three of the fixtures' takes, and reads
+ * `../shared/recordings` too where that is. Needs Debian's `ffmpeg` and `sox`.
  */
 const execute = promisify(execFile);
 const writeTakes = join(__dirname, '../../../fixtures/dist/writeTakes.js');
+const recordings = join(__dirname, '../../../../shared/recordings');
 const scenarios = ['good', 'clipped', 'heater-off-lamp-on'];
 
 /** @returns what it prints on standard error; null where it ends with a refusal of its own, which is said */
@@ -114,7 +116,7 @@ async function main(paths: readonly string[]): Promise<void> {
   const folder = await mkdtemp(join(tmpdir(), 'thudline-reference-'));
   try {
     await execute(process.execPath, [writeTakes, folder, ...scenarios]);
-    await check([folder]);
+    await check(existsSync(recordings) ? [folder, recordings] : [folder]);
   } finally {
     await rm(folder, { recursive: true, force: true });
   }

@@ -154,9 +154,10 @@ function stamped(file: CheckedFile, takeId: string): StoredFile {
 }
 
 function fileColumns({ id, key, name, sha256, bytes, facts }: StoredFile) {
-  const { encodingName: encoding, dataOffset, blockAlign, frames, channels, sampleRateHz, cutShort } = facts;
+  const { encodingName: encoding, dataOffset, blockAlign, frames, channels, sampleRateHz } = facts;
+  const { cutShort, broadcast } = facts;
   const format = { encoding, dataOffset, blockAlign, frames, channels, sampleRateHz, cutShort };
-  return { id, objectKey: key, name, sha256, bytes, ...format };
+  return { id, objectKey: key, name, sha256, bytes, ...format, broadcast };
 }
 
 /** Names what is measured: the same sounds in the same roles need no second measurement. */

@@ -63,5 +63,7 @@ const othersPart: OwnersPart = {
 
 function takeFileResponseOf(file: TakeFile): TakeResponse['files'][number] {
   const { id, name, bytes, sha256, encoding, sampleRateHz, channels, frames } = file;
-  return { id, name, bytes, sha256, encoding, sampleRateHz, channels, durationS: frames / sampleRateHz };
+  const durationS = frames / sampleRateHz;
+  const broadcast = file.broadcast ?? null;
+  return { id, name, bytes, sha256, encoding, sampleRateHz, channels, durationS, broadcast };
 }

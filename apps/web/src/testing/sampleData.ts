@@ -46,6 +46,7 @@ export const sampleTake = (overrides: Partial<TakeResponse> = {}): TakeResponse 
     sampleRateHz: 48_000,
     channels: 1,
     durationS: 16,
+    broadcast: null,
   })),
   tracks: [
     { role: 'kick', fileId: fileIds[0], channel: 0 },

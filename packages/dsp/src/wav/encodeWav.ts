@@ -6,6 +6,8 @@ export interface EncodeWavOptions {
   readonly channels: readonly Float32Array[];
   readonly sampleRateHz: number;
   readonly bitDepth: WavBitDepth;
+  /** Whole chunks that stand before the sound. */
+  readonly chunks?: readonly Uint8Array[];
 }
 
 /**
@@ -16,14 +18,14 @@ export interface EncodeWavOptions {
  * @throws {SignalError} no channel, unequal lengths or non-finite samples
  */
 export function encodeWav(options: EncodeWavOptions): Uint8Array {
-  const { channels, sampleRateHz, bitDepth } = options;
+  const { channels, sampleRateHz, bitDepth, chunks } = options;
   if (channels.length === 0) throw new SignalError('empty', 'A WAV file needs a channel.');
   const frames = channels[0].length;
   if (channels.some((samples) => samples.length !== frames)) {
     throw new SignalError('length', 'The channels of a WAV file must be equally long.');
   }
   channels.forEach((samples) => assertFiniteSamples(samples));
-  const header = wavHeader({ channels: channels.length, sampleRateHz, bitDepth, frames });
+  const header = wavHeader({ channels: channels.length, sampleRateHz, bitDepth, frames, chunks });
   const data = encodeFrames(channels, bitDepth);
   const file = new Uint8Array(header.length + data.length + (data.length % 2));
   file.set(header);

@@ -7,6 +7,8 @@ export interface WavHeaderOptions {
   readonly sampleRateHz: number;
   readonly bitDepth: WavBitDepth;
   readonly frames: number;
+  /** Whole chunks, each of an even length, that stand before the sound: `broadcastChunk`, `infoChunk`. */
+  readonly chunks?: readonly Uint8Array[];
 }
 
 /** The largest size that fits a RIFF header (32 bits). */
@@ -18,18 +20,21 @@ export function sampleBytes(bitDepth: WavBitDepth): number {
 }
 
 /**
- * The header that stands before the frames of a WAV file: 44 bytes for 16 and 24 bits, 58 for float (with `fact`).
+ * The header that stands before the frames of a WAV file: 44 bytes for 16 and 24 bits, 58 for float (with `fact`), and the
+ * chunks given.
  *
  * @returns bytes to be followed by `frames` frames, and one 0 byte where their size is odd
  * @throws {SignalError} no channel, a rate of 0, or more than 4 GiB
  * @see learn.microsoft.com mmreg.h, WAVEFORMATEX
  */
 export function wavHeader(options: WavHeaderOptions): Uint8Array {
-  const { channels, sampleRateHz, bitDepth, frames } = options;
+  const { channels, sampleRateHz, bitDepth, frames, chunks = [] } = options;
   assertBetween(channels, 1, 0xffff, 'channels');
   assertPositive(sampleRateHz, 'sampleRateHz');
   const isFloat = bitDepth === 'float32';
-  const headerBytes = isFloat ? 58 : 44;
+  const chunksStart = isFloat ? 50 : 36;
+  const chunkBytes = chunks.reduce((sum, chunk) => sum + chunk.length, 0);
+  const headerBytes = chunksStart + chunkBytes + 8;
   const blockAlign = channels * sampleBytes(bitDepth);
   const dataBytes = frames * blockAlign;
   const riffBytes = headerBytes - 8 + dataBytes + (dataBytes % 2);
@@ -51,9 +56,14 @@ export function wavHeader(options: WavHeaderOptions): Uint8Array {
     view.setUint32(42, 4, true);
     view.setUint32(46, frames, true);
   }
+  const header = new Uint8Array(view.buffer);
+  chunks.reduce((at, chunk) => {
+    header.set(chunk, at);
+    return at + chunk.length;
+  }, chunksStart);
   text(view, headerBytes - 8, 'data');
   view.setUint32(headerBytes - 4, dataBytes, true);
-  return new Uint8Array(view.buffer);
+  return header;
 }
 
 function text(view: DataView, offset: number, ascii: string): void {

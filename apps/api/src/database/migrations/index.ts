@@ -7,6 +7,7 @@ import { Migration20261201093300_tellOfChanges } from './20261201093300-tell-of-
 import { Migration20261201093647_measureAgain } from './20261201093647-measure-again';
 import { Migration20261201120050_tryOuts } from './20261201120050-try-outs';
 import { Migration20261201122137_setupsAndPhotos } from './20261201122137-setups-and-photos';
+import { Migration20261201122700_whatTheRecorderWrote } from './20261201122700-what-the-recorder-wrote';
 
 /** In order; a new migration is added at the end and never changed once merged. */
 export const migrations = [
@@ -19,4 +20,5 @@ export const migrations = [
   { name: '20261201093647-measure-again', class: Migration20261201093647_measureAgain },
   { name: '20261201120050-try-outs', class: Migration20261201120050_tryOuts },
   { name: '20261201122137-setups-and-photos', class: Migration20261201122137_setupsAndPhotos },
+  { name: '20261201122700-what-the-recorder-wrote', class: Migration20261201122700_whatTheRecorderWrote },
 ];

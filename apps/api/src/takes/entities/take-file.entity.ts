@@ -1,4 +1,5 @@
 import { defineEntity, InferEntity, p } from '@mikro-orm/core';
+import type { BroadcastFacts } from '@thudline/dsp';
 import { identity } from '../../database/identity';
 import { Take } from './take.entity';
 
@@ -24,6 +25,8 @@ export const TakeFile = defineEntity({
     sampleRateHz: p.integer(),
     /** The header claimed more than the file holds. */
     cutShort: p.boolean(),
+    /** What the recorder wrote into it; null for files without, and for those that came before it was read. */
+    broadcast: p.json<BroadcastFacts>().nullable(),
   },
 });
 export type TakeFile = InferEntity<typeof TakeFile>;

@@ -16,7 +16,10 @@ export function takeRequest(
     title: state.title.trim(),
     note: state.note.trim(),
     recordedAt: recordedAt(
-      used.map(({ file }) => file),
+      used.map(({ file, reading }) => ({
+        lastModified: file.lastModified,
+        broadcast: reading.facts.broadcast,
+      })),
       nowMs,
     ),
     ...(previous && state.follows

@@ -2,6 +2,7 @@ import { Box, chakra } from '@chakra-ui/react';
 import { paths, type TakeResponse } from '@thudline/contracts';
 import { DownloadLink } from '../../../components/DownloadLink';
 import { bytes, clock, plural } from '../../../lib/format';
+import { broadcastWords } from '../broadcastWords';
 
 /** The files as they came: kept and given back bit for bit. */
 export function FileFacts({ take, dspVersion }: { take: TakeResponse; dspVersion: string }) {
@@ -26,6 +27,11 @@ export function FileFacts({ take, dspVersion }: { take: TakeResponse; dspVersion
             )}
             : {named.join(', ')}. {file.encoding}, {file.sampleRateHz / 1000} kHz,{' '}
             {plural(file.channels, 'channel')}, {clock(file.durationS, true)}, {bytes(file.bytes)}
+            {file.broadcast && (
+              <Box color="ink.muted" fontSize="caption" overflowWrap="anywhere">
+                {broadcastWords(file.broadcast)}
+              </Box>
+            )}
             <Box color="ink.muted" fontSize="caption" overflowWrap="anywhere">
               SHA-256 {file.sha256}
             </Box>
