@@ -17,6 +17,8 @@ export class SignalError extends Error {
  * Refuses an empty signal and one that holds NaN or an infinity.
  *
  * @throws {SignalError} `empty` or `not-finite`
+ * @example
+ * assertSamples(Float32Array.of(0, 0.5)) // undefined
  */
 export function assertSamples(samples: Float32Array | Float64Array, name = 'samples'): void {
   if (samples.length === 0) throw new SignalError('empty', `${name} hold no sample.`);
@@ -27,6 +29,8 @@ export function assertSamples(samples: Float32Array | Float64Array, name = 'samp
  * Refuses a signal that holds NaN or an infinity; an empty one passes.
  *
  * @throws {SignalError} `not-finite`
+ * @example
+ * assertFiniteSamples(new Float32Array(0)) // undefined
  */
 export function assertFiniteSamples(samples: Float32Array | Float64Array, name = 'samples'): void {
   // x − x is 0 for every finite x and NaN otherwise, so one sum tells of all samples at once.
@@ -39,6 +43,8 @@ export function assertFiniteSamples(samples: Float32Array | Float64Array, name =
  * Refuses an option that is not a finite number above zero.
  *
  * @throws {SignalError} `option`
+ * @example
+ * assertPositive(48000, 'sampleRateHz') // undefined
  */
 export function assertPositive(value: number, name: string): void {
   if (!(Number.isFinite(value) && value > 0)) {
@@ -50,6 +56,8 @@ export function assertPositive(value: number, name: string): void {
  * Refuses an option outside its range; both ends belong to the range.
  *
  * @throws {SignalError} `option`
+ * @example
+ * assertBetween(20, -60, 60, 'temperatureC') // undefined
  */
 export function assertBetween(value: number, low: number, high: number, name: string): void {
   if (!(value >= low && value <= high)) {

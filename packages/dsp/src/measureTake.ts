@@ -28,6 +28,11 @@ export interface MeasureTakeOptions {
  *
  * @returns facts only; judgements are made on reading, see `report/`
  * @throws {SignalError} `option` without exactly one kick or with different rates; `not-finite` for broken samples
+ * @example
+ * const tracks = [{ role: 'kick', source: file.track(0) }, { role: 'overhead', source: file.track(1) }];
+ * const measured = await measureTake({ tracks });
+ * measured.facts.pairs[0].agreement.verdict // 'flip'
+ * measured.facts.hits.length // 8
  */
 export async function measureTake({
   tracks,

@@ -16,6 +16,8 @@ import { oversFindings } from './oversFindings';
  * Everything the sheet says, in the order of the sheet.
  *
  * What was said about the files is kept as it is in `figures`: the same for every reader.
+ * @example
+ * findings(figures, reader).find(({ topic }) => topic === 'adding-up').status // 'fix'
  */
 export function findings(figures: ReportFigures, reader: Reader): Finding[] {
   return [

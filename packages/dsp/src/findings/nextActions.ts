@@ -8,7 +8,11 @@ import { halfDbText, wholeDbfsText } from './words';
 const ROLES = ['kick', 'overhead'] as const;
 type Role = (typeof ROLES)[number];
 
-/** The tick boxes under "before the next take": what to do in order of what matters, then what to leave alone. */
+/**
+ * The tick boxes under "before the next take": what to do in order of what matters, then what to leave alone.
+ * @example
+ * nextActions(figures, reader).map(({ id }) => id) // ['flip-overhead', 'leave-silence', 'kick-gain-leave', 'overhead-gain-leave']
+ */
 export function nextActions(figures: ReportFigures, reader: Reader): NextAction[] {
   const gains = (clipped: boolean): NextAction[] =>
     ROLES.filter((role) => (figures[role].level === 'clipped') === clipped).flatMap((role) =>

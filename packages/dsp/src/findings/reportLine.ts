@@ -16,6 +16,8 @@ const SENTENCES = 2;
  * what became of that one's most important action, where it turned out well: "The flip worked: 1.3 dB of low end came back."
  *
  * @param outcomes - of `outcomes(…)`, most important first
+ * @example
+ * reportLine(figures, reader)[0].action // 'Flip the overhead:'
  */
 export function reportLine(
   figures: ReportFigures,

@@ -7,7 +7,11 @@ import { capitalised, countText, halfDbText, wholeDbfsText, wholeMsText } from '
 
 const ROLES = ['kick', 'overhead'] as const;
 
-/** One short sentence or two for the table of takes: the most important thing heavy, the next beside it. */
+/**
+ * One short sentence or two for the table of takes: the most important thing heavy, the next beside it.
+ * @example
+ * takeSummary(figures).strong // 'Flip the overhead.'
+ */
 export function takeSummary(figures: ReportFigures): TakeSummary {
   return (
     clipped(figures) ??

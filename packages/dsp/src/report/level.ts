@@ -33,7 +33,11 @@ export function raisedNoiseDbfs(track: TrackReport): number | null {
     : track.noiseFloorDbfs + track.gainChangeDb;
 }
 
-/** Hot is a *watch*, never a *fix*: an unclipped take is a keeper. */
+/**
+ * Hot is a *watch*, never a *fix*: an unclipped take is a keeper.
+ * @example
+ * levelStatus(figures.kick) // 'good'
+ */
 export function levelStatus(track: TrackReport): FindingStatus {
   if (track.level === null) return 'cannot-tell';
   if (track.level === 'clipped') return 'fix';

@@ -27,6 +27,9 @@ const rules: Readonly<Record<ActionId, OutcomeRule>> = {
  * @param takes - `before` and `after` judged for the same reader; `doneActions` holds ids of `nextActions(before)`. Ids
  *   that nothing is known of are left out: a later version may have made them.
  * @returns in order of what matters, what was to be left alone last; each at most 25 words
+ * @example
+ * const spectra = { before: spectrum, after: spectrum };
+ * outcomes({ before: figures, after: figures, doneActions: [], reader, spectra }) // []
  */
 export function outcomes(takes: TakeAndNext): Outcome[] {
   const done = new Set(takes.doneActions);

@@ -18,6 +18,10 @@ export interface ReportFiguresOptions {
  * The findings are told in metres; {@link findings} tells them anew for another reader.
  *
  * @throws {SignalError} `option` for a take without a kick and an overhead
+ * @example
+ * const hotter = reportFigures(facts, { target: { lowDbfs: -16, highDbfs: -10, aimDbfs: -12 }, temperatureC: 20 });
+ * hotter.kick.level // 'hot'
+ * hotter.kick.gainChangeDb // -5.418
  */
 export function reportFigures(
   facts: TakeFacts,

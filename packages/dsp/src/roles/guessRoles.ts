@@ -39,6 +39,9 @@ const leastDifference = 0.05;
  *
  * @param files - two files of one take, in the order they were dropped
  * @returns one guess a file, in that order; exactly one of two files is the kick
+ * @example
+ * const files = [{ name: 'OH_01.wav', lowEndRatio: null }, { name: 'BD_01.wav', lowEndRatio: null }];
+ * guessRoles(files).map(({ role }) => role) // ['overhead', 'kick']
  */
 export function guessRoles(files: readonly RoleCandidate[]): RoleGuess[] {
   const named = files.map((file) => roleInName(file.name));
@@ -60,6 +63,8 @@ export function guessRoles(files: readonly RoleCandidate[]): RoleGuess[] {
  * the low end of its sides.
  *
  * @param lowEndRatios - of the left and the right side, from `lowEndRatio`
+ * @example
+ * guessSides('take 3.wav', [0.1, 0.8]).kickChannel // 1
  */
 export function guessSides(name: string, lowEndRatios: readonly [number | null, number | null]): SidesGuess {
   const words = roleWords(name);

@@ -13,6 +13,8 @@ const heardS = 60;
  * Share of a track's energy below 150 Hz, over its first minute.
  *
  * @returns 0–1; null for silence
+ * @example
+ * await lowEndRatio(file.track(0)) // 0.97
  */
 export async function lowEndRatio(track: TrackSource): Promise<number | null> {
   const { sampleRateHz } = track;

@@ -16,6 +16,9 @@ export interface EncodeWavOptions {
  *
  * @returns the bytes of the file
  * @throws {SignalError} no channel, unequal lengths or non-finite samples
+ * @example
+ * const wav = encodeWav({ channels: [Float32Array.of(0, 0.5, -1)], sampleRateHz: 48000, bitDepth: 24 });
+ * wav.length // 54
  */
 export function encodeWav(options: EncodeWavOptions): Uint8Array {
   const { channels, sampleRateHz, bitDepth, chunks } = options;
@@ -38,6 +41,8 @@ export function encodeWav(options: EncodeWavOptions): Uint8Array {
  *
  * @param channels - one array a channel, all of one length
  * @returns little-endian samples, channel after channel within each frame
+ * @example
+ * Array.from(encodeFrames([Float32Array.of(0.5, -1)], 16)) // [0, 64, 0, 128]
  */
 export function encodeFrames(channels: readonly Float32Array[], bitDepth: WavBitDepth): Uint8Array {
   const width = sampleBytes(bitDepth);

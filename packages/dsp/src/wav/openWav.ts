@@ -30,6 +30,11 @@ const blockBytes = 256 * 1024;
  *
  * @throws {WavError} a file that can't be measured, with one sentence for people
  * @see check-values.md section 10 for the sources of each field
+ * @example
+ * const wav = encodeWav({ channels: [Float32Array.of(0, 0.5, -1)], sampleRateHz: 48000, bitDepth: 24 });
+ * const opened = await openWav(bytesSource(wav));
+ * opened.facts.encodingName // '24-bit PCM'
+ * Array.from(await opened.track(0).read(0, 3)) // [0, 0.5, -1]
  */
 export async function openWav(source: ByteSource): Promise<WavFile> {
   if (source.sizeBytes === 0) throw new WavError('empty', 'This file is empty; export the take again.');

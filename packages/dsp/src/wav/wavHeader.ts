@@ -14,7 +14,11 @@ export interface WavHeaderOptions {
 /** The largest size that fits a RIFF header (32 bits). */
 const largestRiffBytes = 0xffffffff;
 
-/** @returns bytes of one sample in a file of this depth */
+/**
+ * @returns bytes of one sample in a file of this depth
+ * @example
+ * sampleBytes(24) // 3
+ */
 export function sampleBytes(bitDepth: WavBitDepth): number {
   return bitDepth === 'float32' ? 4 : bitDepth / 8;
 }
@@ -26,6 +30,8 @@ export function sampleBytes(bitDepth: WavBitDepth): number {
  * @returns bytes to be followed by `frames` frames, and one 0 byte where their size is odd
  * @throws {SignalError} no channel, a rate of 0, or more than 4 GiB
  * @see learn.microsoft.com mmreg.h, WAVEFORMATEX
+ * @example
+ * wavHeader({ channels: 1, sampleRateHz: 48000, bitDepth: 16, frames: 10 }).length // 44
  */
 export function wavHeader(options: WavHeaderOptions): Uint8Array {
   const { channels, sampleRateHz, bitDepth, frames, chunks = [] } = options;

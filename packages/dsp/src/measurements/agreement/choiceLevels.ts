@@ -28,13 +28,20 @@ const DIPS_TO_HZ = 900;
  *
  * @param band - 30–150 Hz unless told otherwise
  * @returns dB, at most +3.01; null where neither microphone has anything in the band
+ * @example
+ * choiceLowEnd(spectrum, { flipped: true, shiftMs: 2, gainDb: 7.96 }) // 3.01
  */
 export function choiceLowEnd(spectrum: PairSpectrum, choice: Choice, band: Band = lowEnd): number | null {
   const { added, powerSum } = bandEnergies(spectrum, choice, band);
   return ratioDb(added, powerSum);
 }
 
-/** The two added with a choice, against their power sum, by third-octaves from 25 Hz to 10 kHz (IEC 61260-1). */
+/**
+ * The two added with a choice, against their power sum, by third-octaves from 25 Hz to 10 kHz (IEC 61260-1).
+ * @example
+ * const levels = thirdOctaveLevels(spectrum, { flipped: true, shiftMs: 2, gainDb: 7.96 });
+ * levels.length // 27
+ */
 export function thirdOctaveLevels(spectrum: PairSpectrum, choice: Choice): ThirdOctaveLevel[] {
   return thirdOctaves.map((band) => ({
     centreHz: band.centreHz,
@@ -43,12 +50,21 @@ export function thirdOctaveLevels(spectrum: PairSpectrum, choice: Choice): Third
   }));
 }
 
-/** The two added with a choice, against their power sum, in the five zones of "where it helps". */
+/**
+ * The two added with a choice, against their power sum, in the five zones of "where it helps".
+ * @example
+ * const [deep, thump] = zoneLevels(spectrum, { flipped: false, shiftMs: 0, gainDb: 7.96 });
+ * thump.levelDb // -5.245
+ */
 export function zoneLevels(spectrum: PairSpectrum, choice: Choice): ZoneLevel[] {
   return zones.map((zone) => ({ ...zone, levelDb: choiceLowEnd(spectrum, choice, zone) }));
 }
 
-/** The third-octave from 31.5 to 800 Hz that loses most. @returns null for a silent pair */
+/**
+ * The third-octave from 31.5 to 800 Hz that loses most. @returns null for a silent pair
+ * @example
+ * deepestThirdOctave(spectrum, { flipped: false, shiftMs: 0, gainDb: 7.96 }).levelDb // -10.919
+ */
 export function deepestThirdOctave(
   spectrum: PairSpectrum,
   choice: Choice,
@@ -66,6 +82,9 @@ export function deepestThirdOctave(
  * the low end.
  *
  * @returns dB, positive where `choiceA` is louder; 0 where there is nothing to match by
+ * @example
+ * const [recorded, flipped] = [false, true].map((flipped) => ({ flipped, shiftMs: 0, gainDb: 0 }));
+ * listeningMatchDb(spectrum, recorded, flipped) // -0.39
  */
 export function listeningMatchDb(spectrum: PairSpectrum, choiceA: Choice, choiceB: Choice): number {
   const a = bandEnergies(spectrum, choiceA, LISTENING_BAND);
@@ -77,6 +96,8 @@ export function listeningMatchDb(spectrum: PairSpectrum, choiceA: Choice, choice
  * What flipping the overhead does to the energy of a band: 10·lg(ΣE(s = −1) ÷ ΣE(s = +1)).
  *
  * @returns dB, positive where flipping gains; null for a silent pair
+ * @example
+ * flipGain(spectrum, { gainDb: 7.96 }) // 7.859
  */
 export function flipGain(
   spectrum: PairSpectrum,

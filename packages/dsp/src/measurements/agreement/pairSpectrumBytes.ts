@@ -4,7 +4,11 @@ import type { PairSpectrum } from '../../facts';
 const PARTS = ['skk', 'soo', 'skoRe', 'skoIm'] as const;
 const BYTES_PER_VALUE = 4;
 
-/** Little-endian float32, `binCount` values each of Skk, Soo, Re Sko and Im Sko: what is stored and sent. */
+/**
+ * Little-endian float32, `binCount` values each of Skk, Soo, Re Sko and Im Sko: what is stored and sent.
+ * @example
+ * encodePairSpectrum(spectrum).length // 65552
+ */
 export function encodePairSpectrum(spectrum: PairSpectrum): Uint8Array {
   const binCount = spectrum.skk.length;
   const view = new DataView(new ArrayBuffer(PARTS.length * binCount * BYTES_PER_VALUE));
@@ -20,6 +24,9 @@ export function encodePairSpectrum(spectrum: PairSpectrum): Uint8Array {
  * The inverse of {@link encodePairSpectrum}.
  *
  * @throws {SignalError} `length` where the bytes don't hold four times `binCount` values
+ * @example
+ * const stored = encodePairSpectrum(spectrum);
+ * decodePairSpectrum(stored, { binHz: spectrum.binHz, binCount: 4097, hitCount: 8 }).hitCount // 8
  */
 export function decodePairSpectrum(
   bytes: Uint8Array,

@@ -9,6 +9,9 @@ import { forBins, lowEnd } from './choiceEnergy';
  *
  * @returns −1 … 1: near −1 flipped between the takes, near 1 as before, near 0 moved too far to say; null where a pair is
  *   silent or the spectra have different bins
+ * @example
+ * const [skoRe, skoIm] = [spectrum.skoRe, spectrum.skoIm].map((part) => part.map((x) => -x));
+ * polarityChanged(spectrum, { ...spectrum, skoRe, skoIm }) // -1
  */
 export function polarityChanged(before: PairSpectrum, after: PairSpectrum): number | null {
   if (before.binHz !== after.binHz || before.skk.length !== after.skk.length) return null;

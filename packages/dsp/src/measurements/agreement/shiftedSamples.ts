@@ -16,6 +16,8 @@ const KAISER_BETA = 8.96;
  * @param shiftSamples - finite
  * @returns as many samples: y[n] = x(n + shift)
  * @throws {SignalError} `not-finite`, `option`
+ * @example
+ * Array.from(shiftedSamples(Float32Array.of(0, 0, 1, 0), 1)) // [0, 1, 0, 0]
  */
 export function shiftedSamples(samples: Float32Array, shiftSamples: number): Float32Array {
   assertFiniteSamples(samples);

@@ -15,6 +15,9 @@ export interface SumPeakOptions {
  * @param overhead - the same stretch of the overhead
  * @returns dBFS, above 0 where the two would clip; null for silence
  * @throws {SignalError} `length` for stretches of different lengths; `not-finite`, `option`
+ * @example
+ * const choice = { flipped: false, shiftMs: 0, gainDb: 0 };
+ * sumPeakDbfs(Float32Array.of(0.5), Float32Array.of(0.5), { sampleRateHz: 48000, choice }) // 0
  */
 export function sumPeakDbfs(
   kick: Float32Array,

@@ -17,6 +17,8 @@ export const seeds = { before: 1, after: 2 } as const;
  * @param before - one value a hit, finite
  * @returns null where either set is empty
  * @see uncertain for how it is drawn
+ * @example
+ * medianDifference([1, 2, 4, 7, 3, 2], [5, 6, 4, 9, 8, 5]).difference // 3
  */
 export function medianDifference(
   before: readonly number[],

@@ -16,6 +16,8 @@ export const WITHIN_DB = 3;
  * level in the file: where the preamp was turned in between, or may have been, strength can't be matched.
  *
  * @param before - kick-file peak of each kick hit, dBFS
+ * @example
+ * strengthMatch([-9, -8, -20], [-8, -9, -9]).before // [0, 1]
  */
 export function strengthMatch(before: readonly number[], after: readonly number[]): StrengthMatch {
   const medians = [median(before), median(after)];

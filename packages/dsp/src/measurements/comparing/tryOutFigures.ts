@@ -6,6 +6,8 @@ import { interquartileRange, median } from '../statistics';
  * Low end that the overhead brings: the two added at a choice against the kick microphone alone, 30–150 Hz.
  *
  * @returns dB, above 0 where there is more than without the overhead; null for a silent kick microphone
+ * @example
+ * lowEndOverKickDb(spectrum, { flipped: true, shiftMs: 2, gainDb: 7.96 }) // 6.02
  */
 export function lowEndOverKickDb(spectrum: PairSpectrum, choice: Choice): number | null {
   const { added } = bandEnergies(spectrum, choice, lowEnd);
@@ -18,6 +20,9 @@ export function lowEndOverKickDb(spectrum: PairSpectrum, choice: Choice): number
  *
  * @param kick - the kick microphone's place in `peaksDbfs`
  * @returns dB, the lower the less bleed; null without hits of either kind
+ * @example
+ * const hits = [{ timeS: 0, kind: 'kick', peaksDbfs: [-9, -20] }, { timeS: 1, kind: 'drum', peaksDbfs: [-33, -12] }];
+ * bleedDb(hits, 0) // -24
  */
 export function bleedDb(hits: readonly HitFacts[], kick: number): number | null {
   const peaks = (kind: HitFacts['kind']): number[] =>
@@ -31,6 +36,8 @@ export function bleedDb(hits: readonly HitFacts[], kick: number): number | null 
  * Evenness of the playing: interquartile range of the kick-file peaks at kick hits.
  *
  * @returns dB, the lower the more even; null below two kick hits
+ * @example
+ * evennessDb(facts.hits, 0) // 0
  */
 export function evennessDb(hits: readonly HitFacts[], kick: number): number | null {
   return interquartileRange(

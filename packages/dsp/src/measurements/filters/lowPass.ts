@@ -15,6 +15,9 @@ interface LowPassOptions {
  *
  * @param samples - mono, any length, finite
  * @returns a new array of the same length
+ * @example
+ * const steady = lowPass(new Float32Array(9600).fill(1), { sampleRateHz: 48000, cutoffHz: 200 });
+ * steady[4800] // 1
  */
 export function lowPass(samples: Float32Array, options: LowPassOptions): Float32Array {
   const section = [butterworthLowPass(options)];

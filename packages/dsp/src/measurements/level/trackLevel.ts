@@ -31,6 +31,11 @@ export interface TrackLevel {
  *
  * @throws {SignalError} a rate or a step that can't be
  * @see 2-measurements.md section 2, whose names and definitions these are
+ * @example
+ * const level = createTrackLevel({ sampleRateHz: 48000, quantisationStep: null });
+ * level.push(Float32Array.from({ length: 48000 }, (_, n) => 0.5 * Math.sin((2 * Math.PI * n) / 48)));
+ * level.result().samplePeakDbfs // -6.021
+ * level.result().rmsDbfs // -9.031
  */
 export function createTrackLevel(options: TrackLevelOptions): TrackLevel {
   assertPositive(options.sampleRateHz, 'sampleRateHz');

@@ -27,6 +27,10 @@ const roundingSlack = 1 + 1e-9;
  * @returns a meter; dBTP, null for digital silence
  * @throws {SignalError} `option`
  * @see ITU-R BS.1770-5 (11/2023), Annex 2
+ * @example
+ * const truePeak = createTruePeak({ sampleRateHz: 48000 });
+ * truePeak.push(Float32Array.from({ length: 4800 }, (_, n) => Math.sin((Math.PI / 2) * n + Math.PI / 4)));
+ * truePeak.result().truePeakDbtp // 0.083
  */
 export function createTruePeak(options: { readonly sampleRateHz: number }): TruePeak {
   assertPositive(options.sampleRateHz, 'sampleRateHz');

@@ -18,6 +18,8 @@ const TABLE_RATE_HZ = 48000;
  * @returns the sections in order
  * @throws {SignalError} `option` for a rate that can't be
  * @see ITU-R BS.1770-5 (11/2023) Annex 1, Tables 1 and 2
+ * @example
+ * kWeighting(48000).length // 2
  */
 export function kWeighting(sampleRateHz: number): [shelf: Biquad, lowCut: Biquad] {
   assertPositive(sampleRateHz, 'sampleRateHz');

@@ -26,6 +26,10 @@ const relativeGateDb = -10;
  * @returns a meter; LUFS, null where no whole block is louder than −70 LUFS
  * @throws {SignalError} `option`
  * @see ITU-R BS.1770-5 (11/2023), Annex 1, equations 2, 6 and 7
+ * @example
+ * const loudness = createLoudness({ sampleRateHz: 48000 });
+ * loudness.push(Float32Array.from({ length: 96000 }, (_, n) => Math.sin((2 * Math.PI * 997 * n) / 48000)));
+ * loudness.result().integratedLufs // -3.01
  */
 export function createLoudness(options: { readonly sampleRateHz: number }): Loudness {
   assertPositive(options.sampleRateHz, 'sampleRateHz');

@@ -35,6 +35,10 @@ export const PEAK_FULL_SCALE = 127;
  * finer ones do. A take of fewer frames than steps has a frame a step, at one level only.
  *
  * @throws {SignalError} `option` for steps that don't divide each other
+ * @example
+ * const peaks = createPeaks({ frames: 4, stepsPerLevel: [2] });
+ * peaks.push(Float32Array.of(0, 1, -1, 0.5));
+ * Array.from(peaks.result()[0].pairs) // [0, 127, -127, 64]
  */
 export function createPeaks({ frames, stepsPerLevel = peakSteps }: PeaksOptions): PeaksMeter {
   const wanted = checked(stepsPerLevel).filter((steps) => steps <= frames);

@@ -3,7 +3,11 @@ import type { PeakLevel, TrackPeaks } from './peaks';
 
 const BYTES_PER_COUNT = 4;
 
-/** What is stored of a track's outline: little-endian uint32 number of levels and steps of each, then their int8 pairs. */
+/**
+ * What is stored of a track's outline: little-endian uint32 number of levels and steps of each, then their int8 pairs.
+ * @example
+ * encodePeaks([{ steps: 1, pairs: Int8Array.of(-1, 1) }]).length // 10
+ */
 export function encodePeaks(peaks: TrackPeaks): Uint8Array {
   const headBytes = BYTES_PER_COUNT * (1 + peaks.length);
   const bytes = new Uint8Array(headBytes + peaks.reduce((sum, level) => sum + level.pairs.length, 0));
@@ -22,6 +26,8 @@ export function encodePeaks(peaks: TrackPeaks): Uint8Array {
  * The inverse of {@link encodePeaks}.
  *
  * @throws {SignalError} `length` for bytes that hold more or less than they say
+ * @example
+ * decodePeaks(encodePeaks([{ steps: 1, pairs: Int8Array.of(-1, 1) }]))[0].steps // 1
  */
 export function decodePeaks(bytes: Uint8Array): TrackPeaks {
   const view = new DataView(bytes.buffer, bytes.byteOffset, bytes.byteLength);
@@ -52,6 +58,9 @@ export interface Outline {
  * Picks the coarsest level that has at least `steps` steps, else the finest.
  *
  * @param tracks - of one take, so all with the same levels
+ * @example
+ * const track = [{ steps: 1, pairs: Int8Array.of(-9, 9) }, { steps: 2, pairs: Int8Array.of(-9, 1, -1, 9) }];
+ * outlineOf([track], 2).steps // 2
  */
 export function outlineOf(tracks: readonly TrackPeaks[], steps: number): Outline {
   const pick = (levels: TrackPeaks): PeakLevel =>
@@ -62,7 +71,11 @@ export function outlineOf(tracks: readonly TrackPeaks[], steps: number): Outline
   };
 }
 
-/** What crosses the wire: one track after the other. */
+/**
+ * What crosses the wire: one track after the other.
+ * @example
+ * encodeOutline({ steps: 1, tracks: [Int8Array.of(-9, 9)] }).length // 2
+ */
 export function encodeOutline({ steps, tracks }: Outline): Uint8Array {
   const bytes = new Uint8Array(tracks.length * 2 * steps);
   tracks.forEach((pairs, i) =>
@@ -75,6 +88,9 @@ export function encodeOutline({ steps, tracks }: Outline): Uint8Array {
  * The inverse of {@link encodeOutline}; `steps` and `tracks` are what the headers `X-Steps` and `X-Tracks` say.
  *
  * @throws {SignalError} `length` where the bytes are not that many
+ * @example
+ * const sent = encodeOutline({ steps: 1, tracks: [Int8Array.of(-9, 9)] });
+ * Array.from(decodeOutline(sent, { steps: 1, tracks: 1 }).tracks[0]) // [-9, 9]
  */
 export function decodeOutline(
   bytes: Uint8Array,

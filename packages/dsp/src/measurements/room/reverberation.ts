@@ -38,6 +38,8 @@ export function sabineS(options: ReverberationOptions): number | null {
  * @returns seconds per 60 dB; 0 where everything absorbs, null where nothing does
  * @throws {SignalError} as {@link sabineS}
  * @see C. F. Eyring, "Reverberation time in 'dead' rooms", JASA 1 (1930) (from memory)
+ * @example
+ * eyringS({ volumeM3: 50, areas: [{ areaM2: 80, absorption: 0.2 }], speedOfSoundMPerS: 343 }) // 0.451
  */
 export function eyringS(options: ReverberationOptions): number | null {
   assertOptions(options);
@@ -46,7 +48,11 @@ export function eyringS(options: ReverberationOptions): number | null {
   return seconds(options, -total * Math.log(1 - mean));
 }
 
-/** @returns square metres that swallow everything, for what the areas swallow: metric sabins */
+/**
+ * @returns square metres that swallow everything, for what the areas swallow: metric sabins
+ * @example
+ * absorptionArea([{ areaM2: 10, absorption: 0.5 }, { areaM2: 20, absorption: 1.15 }]) // 25
+ */
 export function absorptionArea(areas: readonly AbsorbingArea[]): number {
   return areas.reduce((sum, { areaM2, absorption }) => sum + areaM2 * Math.min(1, absorption), 0);
 }

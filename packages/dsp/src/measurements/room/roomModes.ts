@@ -36,8 +36,8 @@ const MOST_MODES = 20_000;
  * @throws {SignalError} `option` for a size, speed or limit that is not above 0, or that asks for more than 20,000 modes
  * @see Ballou (ed.), Handbook for Sound Engineers, 4th ed., chapter 6, whose Table 6-4 is among the tests
  * @example
- * roomModes({ size: { lengthM: 5, widthM: 4, heightM: 2.5 }, speedOfSoundMPerS: 343.2, highestHz: 40 })
- * // [{ order: [1, 0, 0], frequencyHz: 34.32, kind: 'axial' }]
+ * const size = { lengthM: 5, widthM: 4, heightM: 2.5 };
+ * roomModes({ size, speedOfSoundMPerS: 343.2, highestHz: 40 })[0].frequencyHz // 34.32
  */
 export function roomModes({ size, speedOfSoundMPerS, highestHz }: RoomModesOptions): RoomMode[] {
   assertRoomSize(size);

@@ -42,6 +42,11 @@ export interface RoomReverberation {
  * @throws {SignalError} `option` for a size, area or absorption that can't be, a treatment of a surface there isn't, and one
  *   that covers more than is left of its surface
  * @see sabineS and eyringS for the formulas
+ * @example
+ * const size = { lengthM: 5, widthM: 4, heightM: 2.5 };
+ * const surfaces = [{ areaM2: 85, absorption: [0.1, 0.1, 0.1, 0.1, 0.1, 0.1] }];
+ * const treatments = [{ areaM2: 10, absorption: [0.3, 0.8, 1, 1, 1, 1], covers: 0 }];
+ * roomReverberation({ size, surfaces, treatments, speedOfSoundMPerS: 343 }).after[0].sabineS // 0.767
  */
 export function roomReverberation(options: RoomReverberationOptions): RoomReverberation {
   const { size, surfaces, treatments = [], speedOfSoundMPerS } = options;
