@@ -35,14 +35,27 @@ export {
 export * from './measurements/peaks/peaksBytes';
 export { lowPass } from './measurements/filters/lowPass';
 export * from './measurements/comparing/attack';
-export * from './measurements/comparing/comparedFigure';
+export type {
+  ChangeWord,
+  ComparedFigure,
+  ComparedKey,
+  ComparedReason,
+  FigureUnit,
+} from './measurements/comparing/comparedFigure';
 export * from './measurements/comparing/compareTakes';
 export * from './measurements/comparing/interval';
 export * from './measurements/comparing/medianDifference';
 export * from './measurements/comparing/polarityBetween';
 export * from './measurements/comparing/rankTryOut';
 export * from './measurements/comparing/strengthMatch';
-export * from './measurements/comparing/takeChange';
+export {
+  FEWEST_HITS,
+  takeChange,
+  worthSteps,
+  type Change,
+  type TakeChange,
+  type WorthStep,
+} from './measurements/comparing/takeChange';
 export * from './measurements/comparing/tryOutFigures';
 export type { ChoiceRule, TryOutMeasure, TryOutReason } from './measurements/comparing/tryOutMeasures';
 export * from './measurements/room/absorptionTable';

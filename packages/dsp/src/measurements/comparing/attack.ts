@@ -14,6 +14,9 @@ const WEIGHT = { lowHz: 40, highHz: 150, lengthS: 0.2, settleS: 0.25 };
  * @param options.startAt - index of the hit's first sound
  * @returns dB, the higher the more click; null where either band is silent or the hit is cut off
  * @throws {SignalError} `option` for a rate that can't be
+ * @example
+ * const source = await file.track(0).read(24000, 48000);
+ * attackDb(source, { sampleRateHz: 48000, startAt: 1 }) // -55.827
  */
 export function attackDb(
   samples: Float32Array,

@@ -27,6 +27,9 @@ export interface CompareTakesInput {
  *
  * @returns every figure there is, in the order to show them; what can't be told has a reason
  * @throws {SignalError} `option` for a take without a kick microphone and an overhead
+ * @example
+ * const figures = compareTakes({ before: facts, after: facts, gainKnownSame: true });
+ * figures.filter(({ clear }) => clear) // []
  */
 export function compareTakes({ before, after, gainKnownSame }: CompareTakesInput): ComparedFigure[] {
   const sides = { before: takeSide(before), after: takeSide(after) };

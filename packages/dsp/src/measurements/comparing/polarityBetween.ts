@@ -25,6 +25,9 @@ export interface PolarityBetween {
  *
  * A hit of the later take counts as turned where the real part of its own 30–150 Hz cross term has the other sign than
  * the sum of the earlier take; so where a microphone stands a quarter period off, few may show what all together say.
+ * @example
+ * const spectra = { before: spectrum, after: spectrum };
+ * polarityBetween({ before: facts, after: facts, spectra }).seen // 'as-before'
  */
 export function polarityBetween({ before, after, spectra }: PolarityBetweenInput): PolarityBetween {
   const likeness = spectra.before && spectra.after ? polarityChanged(spectra.before, spectra.after) : null;

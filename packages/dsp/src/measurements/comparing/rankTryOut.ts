@@ -65,6 +65,9 @@ const NO_DIFFERENCE = 'no clear difference';
  *
  * @param takes - at least one
  * @throws {SignalError} `option` for a take without a kick microphone and an overhead
+ * @example
+ * const ranking = rankTryOut([{ facts }, { facts }], { measure: 'low-end', choiceRule: 'best-polarity' });
+ * ranking.takes[1].word // 'no clear difference'
  */
 export function rankTryOut(
   takes: readonly { readonly facts: TakeFacts }[],
