@@ -11,7 +11,7 @@ const documented = new Map(
     .flatMap((name) => documentedFunctions(textOf(name)))
     .map((found) => [found.name, found]),
 );
-const functions = Object.entries<unknown>(dsp as object)
+const functions = Object.entries(dsp as Record<string, unknown>)
   .filter(([, value]) => typeof value === 'function' && !/^class\b/.test(String(value)))
   .map(([name]) => name);
 
