@@ -11,12 +11,15 @@ import { Mailer } from './mail/mailer';
 import { MeasurePool } from './measuring/measure-pool';
 import { MeasureQueue } from './measuring/measure-queue';
 import { MeasurementClaims } from './measuring/measurement-claims';
+import { MeasurementRenewals } from './measuring/measurement-renewals';
 import { MeasurementSweep } from './measuring/measurement-sweep';
 import { MeasuringRuns } from './measuring/measuring-runs';
 import { MeasuringWorker } from './measuring/measuring-worker';
+import { RenewalWorker } from './measuring/renewal-worker';
 import { TakeFetcher } from './measuring/take-fetcher';
 import { TakeOutlines } from './measuring/take-outlines';
 import { QueueSender } from './queue/queue-sender';
+import { ReportTelling } from './reports/report-telling';
 import { StorageModule } from './storage/storage.module';
 import { OneTimeTokensService } from './tokens/one-time-tokens.service';
 
@@ -37,6 +40,9 @@ export class WorkerModule {
         TakeOutlines,
         MeasuringRuns,
         MeasuringWorker,
+        MeasurementRenewals,
+        RenewalWorker,
+        ReportTelling,
         OneTimeTokensService,
         Mailer,
         MailWriter,

@@ -1,7 +1,7 @@
 import { defaultUserSettings, paths, UserSettings } from '@thudline/contracts';
 import { TakeFacts } from '@thudline/dsp';
 import { Report } from '../src/reports/entities/report.entity';
-import { saidBy } from '../src/reports/reports.mapper';
+import { toldColumns } from '../src/reports/reports.mapper';
 import { joined, Person } from './support/person';
 import { giveReport, shortTakeFacts } from './support/reported-take';
 import { startTestApp, TestApp } from './support/test-app';
@@ -45,7 +45,7 @@ describe('what sheets say', () => {
     { target: { lowDbfs: -20, highDbfs: -14, aimDbfs: -16 } },
   ])('is told anew after %j', async (settings) => {
     const facts = await shortTakeFacts();
-    const expected = saidBy(facts, { ...defaultUserSettings, ...settings });
+    const expected = toldColumns(facts, { ...defaultUserSettings, ...settings }).says;
     expect(await saidAfter(settings, facts)).toBe(expected);
   });
 
@@ -53,7 +53,7 @@ describe('what sheets say', () => {
     const facts = clipped(await shortTakeFacts());
     const said = await saidAfter({ lengthUnit: 'foot' }, facts);
     expect(said).toContain('One kick hit is flattened');
-    expect(said).toBe(saidBy(facts, { ...defaultUserSettings, lengthUnit: 'foot' }));
+    expect(said).toBe(toldColumns(facts, { ...defaultUserSettings, lengthUnit: 'foot' }).says);
   });
 
   it('stays where nothing that is told has changed', async () => {

@@ -178,9 +178,11 @@ export const findingTopics = [
   'balance',
   'room',
 ] as const;
+export const findingTopic = z.enum(findingTopics);
+export type FindingTopic = z.infer<typeof findingTopic>;
 
 export const finding = z.object({
-  topic: z.enum(findingTopics),
+  topic: findingTopic,
   status: findingStatus,
   /** At most 25 words. */
   sentence: z.string(),
@@ -213,7 +215,8 @@ export const outcome = z.object({
 export type Outcome = z.infer<typeof outcome>;
 
 export const reportFigures = z.object({
-  version: z.literal(1),
+  /** 1: of a take measured before everything here was; what is missing is null. */
+  version: z.union([z.literal(1), z.literal(2)]),
   sampleRateHz: z.number().positive(),
   durationS: z.number().nonnegative(),
   kick: trackReport,
@@ -230,6 +233,10 @@ export const reportFigures = z.object({
 });
 /** What the command line prints. */
 export type ReportFigures = z.infer<typeof reportFigures>;
+
+/** Which version of the measurements; the current report without. The pair spectrum goes with it. */
+export const reportRequest = z.object({ version: z.string().max(40).optional() });
+export type ReportRequest = z.infer<typeof reportRequest>;
 
 export const reportResponse = reportFigures.extend({
   takeId: z.uuid(),

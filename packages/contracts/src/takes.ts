@@ -113,6 +113,13 @@ export const takeFileResponse = z.object({
 });
 export type TakeFileResponse = z.infer<typeof takeFileResponse>;
 
+/** A sheet of an earlier version of the measurements: nothing to do, or on its way to the new one, or that failed. */
+export const renewals = ['none', 'waiting', 'failed'] as const;
+
+/** One of a take's reports: each version of the measurements makes at most one. */
+export const sheetVersion = z.object({ version: z.string(), measuredAt: z.iso.datetime() });
+export type SheetVersion = z.infer<typeof sheetVersion>;
+
 export const takeResponse = z.object({
   id: z.uuid(),
   /** Counts a player's takes from 1. */
@@ -125,6 +132,10 @@ export const takeResponse = z.object({
   tracks: z.array(z.object({ role: trackRole, fileId: z.uuid(), channel: z.int().nonnegative() })),
   measurement: measurementResponse,
   hasReport: z.boolean(),
+  /** Every version there is, the one the sheet shows first, then from new to old; only its player is told. */
+  sheetVersions: z.array(sheetVersion),
+  /** Whether the sheet is measured again, in the background, with a newer version of the measurements. */
+  renewal: z.enum(renewals),
   tickedActions: z.array(z.string()),
   tags: z.array(z.string()),
   /** The take this one follows, while it is there. */

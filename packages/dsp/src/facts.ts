@@ -5,7 +5,8 @@ import type { TrackPeaks } from './measurements/peaks/peaks';
  * (level, gain change, path difference, findings, the line) are computed from these on reading.
  */
 export interface TakeFacts {
-  readonly version: 1;
+  /** 1: measured before true peak, loudness, hum, balance, room and figures of every hit were; they may be missing. */
+  readonly version: 1 | 2;
   readonly sampleRateHz: number;
   /** Of the shorter file. */
   readonly durationS: number;

@@ -71,7 +71,7 @@ export async function measureTake({
   const seen = fileNotices({ sources, tracks: trackFacts, pairs, sameTwice: streamed.sameTwice });
   return {
     facts: {
-      version: 1,
+      version: 2,
       sampleRateHz,
       durationS: Math.min(...sources.map((source) => source.frames)) / sampleRateHz,
       tracks: trackFacts,

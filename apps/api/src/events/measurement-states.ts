@@ -1,7 +1,7 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { MeasurementEvent } from '@thudline/contracts';
-import { Measurement } from '../measuring/entities/measurement.entity';
+import { latestOf } from '../measuring/latest-measurements';
 import { measurementResponseOf } from '../measuring/measurement.mapper';
 import { Take } from '../takes/entities/take.entity';
 
@@ -13,8 +13,7 @@ export class MeasurementStates {
   async of(takeIds: string[]): Promise<MeasurementEvent[]> {
     const em = this.em.fork();
     const takes = await em.find(Take, { id: { $in: takeIds }, deletedAt: null });
-    const measurements = await em.find(Measurement, { take: { $in: takeIds } }, { orderBy: { id: 'asc' } });
-    const latest = new Map(measurements.map((measurement) => [measurement.take.id, measurement]));
+    const latest = await latestOf(em, takeIds);
     return takes.flatMap((take) => {
       const measurement = latest.get(take.id);
       if (!measurement) return [];

@@ -1,2 +1,4 @@
-/** Named on every measurement. A change of what is measured, or how, gets a new one: takes can then be measured again. */
+/** Named on every measurement; counts up. A change of what is measured, or how, gets a new one: sheets are then renewed. */
 export const dspVersion = '5';
+
+export const isOlder = (version: string): boolean => Number(version) < Number(dspVersion);

@@ -7,8 +7,12 @@ export interface MeasureJob {
   measurementId: string;
 }
 
+/** Behind every take that somebody waits for: those stand by how many their owner has waiting, never this far back. */
+export const renewalPriority = -1_000_000;
+
 interface SendOptions {
   measurementId: string;
+  renewal?: boolean;
   /** Higher goes first. */
   priority?: number;
   afterS?: number;
@@ -19,9 +23,16 @@ export class MeasureQueue {
   constructor(private readonly sender: QueueSender) {}
 
   /** Sends within the transaction of `em`: the job is there if and only if the rows are. */
-  async send(em: EntityManager, { measurementId, priority = 0, afterS = 0 }: SendOptions): Promise<void> {
+  async send(
+    em: EntityManager,
+    { measurementId, renewal, priority = 0, afterS = 0 }: SendOptions,
+  ): Promise<void> {
     const job: MeasureJob = { measurementId };
-    const options = { singletonKey: measurementId, priority, startAfter: afterS };
+    const options = {
+      singletonKey: measurementId,
+      priority: renewal ? renewalPriority : priority,
+      startAfter: afterS,
+    };
     await this.sender.sendWith(em, measureQueue, job, options);
   }
 

@@ -2,11 +2,12 @@ import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { TakeFacts } from '@thudline/dsp';
 import { pairSpectrumColumns, reportColumns } from '../reports/report-columns';
-import { saidBy } from '../reports/reports.mapper';
+import { toldColumns } from '../reports/reports.mapper';
 import { PairSpectrum } from '../reports/entities/pair-spectrum.entity';
 import { Report } from '../reports/entities/report.entity';
 import { Take } from '../takes/entities/take.entity';
 import { settingsOf } from '../users/user-settings';
+import { dspVersion } from './dsp-version';
 import { Measurement, MeasurementStage } from './entities/measurement.entity';
 import { MeasureQueue } from './measure-queue';
 
@@ -15,6 +16,7 @@ export interface Claim {
   measurementId: string;
   attempt: number;
   takeId: string;
+  renewal: boolean;
 }
 
 /** What a worker thread found. */
@@ -26,6 +28,15 @@ export interface Measured {
 
 /** After this many a measurement has failed (common practice, no source). */
 export const mostAttempts = 3;
+
+/** How long the next attempt waits, for each one before it. A renewal has time, and should outlast a store that is down. */
+const waitS = { fresh: 15, renewal: 300 };
+
+interface ClaimedRow {
+  attempt: number;
+  take_id: string;
+  renewal: boolean;
+}
 
 const running = ({ measurementId, attempt }: Claim) => ({
   id: measurementId,
@@ -41,14 +52,18 @@ export class MeasurementClaims {
     private readonly queue: MeasureQueue,
   ) {}
 
-  /** @returns null when somebody else has it, or it is over */
+  /**
+   * The version is that of the worker, whichever it was queued for: after an upgrade older ones may still wait.
+   *
+   * @returns null when somebody else has it, or it is over
+   */
   async claim(measurementId: string): Promise<Claim | null> {
-    const [row] = await this.em.getConnection().execute<{ attempt: number; take_id: string }[]>(
+    const [row] = await this.em.getConnection().execute<ClaimedRow[]>(
       `update measurement set state = 'running', stage = 'fetching', progress = 0, attempt = attempt + 1,
-         heartbeat_at = now() where id = ? and state = 'queued' returning attempt, take_id`,
-      [measurementId],
+         heartbeat_at = now(), dsp_version = ? where id = ? and state = 'queued' returning attempt, take_id, renewal`,
+      [dspVersion, measurementId],
     );
-    return row ? { measurementId, attempt: row.attempt, takeId: row.take_id } : null;
+    return row ? { measurementId, attempt: row.attempt, takeId: row.take_id, renewal: row.renewal } : null;
   }
 
   /** @returns false when the measurement isn't this worker's any more: cancelled, or given to another */
@@ -72,7 +87,7 @@ export class MeasurementClaims {
         measurement: claim.measurementId,
         take: claim.takeId,
         ...columns,
-        says: saidBy(facts, settingsOf(owner.unwrap())),
+        ...toldColumns(facts, settingsOf(owner.unwrap())),
       });
       for (const spectrum of pairSpectrumColumns(facts, spectra))
         em.create(PairSpectrum, { report, ...spectrum });
@@ -94,7 +109,8 @@ export class MeasurementClaims {
   /** Tries again after a while, or gives up after the last attempt. */
   async retryLater(claim: Claim, reason: string): Promise<void> {
     if (claim.attempt >= mostAttempts) return this.fail(claim, reason);
-    await this.requeue(claim, { attempt: claim.attempt, afterS: 15 * claim.attempt });
+    const afterS = waitS[claim.renewal ? 'renewal' : 'fresh'] * claim.attempt;
+    await this.requeue(claim, { attempt: claim.attempt, afterS });
   }
 
   private async requeue(
@@ -104,7 +120,8 @@ export class MeasurementClaims {
     await this.em.fork().transactional(async (em) => {
       const queued = { state: 'queued', stage: null, progress: 0, attempt } as const;
       const changed = await em.nativeUpdate(Measurement, running(claim), queued);
-      if (changed > 0) await this.queue.send(em, { measurementId: claim.measurementId, afterS });
+      const { measurementId, renewal } = claim;
+      if (changed > 0) await this.queue.send(em, { measurementId, renewal, afterS });
     });
   }
 }

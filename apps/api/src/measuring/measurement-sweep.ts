@@ -18,7 +18,7 @@ const failWorn = `
 const requeueSilent = `
   update measurement set state = 'queued', stage = null, progress = 0, heartbeat_at = now()
   where id in (select id from measurement where state = 'running' and ${silent} for update skip locked)
-  returning id`;
+  returning id, renewal`;
 
 /** Waiting, though no job will knock: none is waiting, and none was taken a moment ago. */
 const touchJobless = `
@@ -28,7 +28,12 @@ const touchJobless = `
       select 1 from pgboss.job j where j.name = 'measure' and j.singleton_key = m.id::text
         and (j.state < 'active' or j.state = 'active' and j.started_on > now() - ? * interval '1 millisecond'))
     for update skip locked)
-  returning id`;
+  returning id, renewal`;
+
+interface LeftBehind {
+  id: string;
+  renewal: boolean;
+}
 
 /** Takes up what dead workers left, and what waits without a job. Many workers may do this at the same time. */
 @Injectable()
@@ -47,10 +52,10 @@ export class MeasurementSweep {
   async run(): Promise<number> {
     return this.em.fork().transactional(async (em) => {
       await em.execute(failWorn, [gaveUp, mostAttempts, this.silentMs]);
-      const silentOnes = await em.execute<{ id: string }[]>(requeueSilent, [this.silentMs]);
-      const joblessOnes = await em.execute<{ id: string }[]>(touchJobless, [this.silentMs, this.silentMs]);
+      const silentOnes = await em.execute<LeftBehind[]>(requeueSilent, [this.silentMs]);
+      const joblessOnes = await em.execute<LeftBehind[]>(touchJobless, [this.silentMs, this.silentMs]);
       const found = [...silentOnes, ...joblessOnes];
-      for (const { id } of found) await this.queue.send(em, { measurementId: id });
+      for (const { id, renewal } of found) await this.queue.send(em, { measurementId: id, renewal });
       return found.length;
     });
   }

@@ -15,13 +15,13 @@ const bytesDiffer = 'The stored recordings of this take are damaged. Upload it a
 const broke = 'Measuring this take failed on our side. Measure it again, or tell whoever runs this site.';
 
 /** Why a run was stopped from outside. */
-type StopReason = 'lost' | 'shutting-down';
+type StopReason = 'lost' | 'shutting-down' | 'making-way';
 
 /** One attempt at one measurement, from the claim to the report. */
 @Injectable()
 export class MeasuringRuns {
   private readonly logger = new Logger('Measuring');
-  private readonly stops = new Set<AbortController>();
+  private readonly stops = new Map<AbortController, Claim>();
 
   constructor(
     private readonly claims: MeasurementClaims,
@@ -35,7 +35,7 @@ export class MeasuringRuns {
   /** Never throws for what one take does: its measurement says what became of it. */
   async run(claim: Claim): Promise<void> {
     const stop = new AbortController();
-    this.stops.add(stop);
+    this.stops.set(stop, claim);
     const folder = await this.scratch.make('measuring');
     const pulse = this.pulse(claim, stop);
     try {
@@ -50,7 +50,17 @@ export class MeasuringRuns {
   }
 
   stopAll(): void {
-    for (const stop of this.stops) stop.abort('shutting-down' satisfies StopReason);
+    for (const stop of this.stops.keys()) stop.abort('shutting-down' satisfies StopReason);
+  }
+
+  get renewals(): AbortController[] {
+    const running = [...this.stops].filter(([{ signal }, { renewal }]) => renewal && !signal.aborted);
+    return running.map(([stop]) => stop);
+  }
+
+  /** Hands renewals back, for takes that somebody waits for. */
+  makeWay(count: number): void {
+    for (const stop of this.renewals.slice(0, count)) stop.abort('making-way' satisfies StopReason);
   }
 
   private async measure(
@@ -101,7 +111,7 @@ export class MeasuringRuns {
   private async settle(claim: Claim, stop: AbortController, error: unknown): Promise<void> {
     const { aborted } = stop.signal;
     const reason: unknown = stop.signal.reason;
-    if (aborted && reason === ('shutting-down' satisfies StopReason)) return this.claims.giveBack(claim);
+    if (aborted && reason !== ('lost' satisfies StopReason)) return this.claims.giveBack(claim);
     if (aborted) return this.logger.log(claim, 'Stopped: cancelled, or taken over by another worker');
     this.logger.error(error, `Attempt ${claim.attempt} at measurement ${claim.measurementId} failed`);
     if (error instanceof StoredBytesDiffer) return this.claims.fail(claim, bytesDiffer);

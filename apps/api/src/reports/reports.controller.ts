@@ -1,10 +1,10 @@
-import { Controller, Get, Header, Param, Res } from '@nestjs/common';
+import { Controller, Get, Header, Param, Query, Res } from '@nestjs/common';
 import { ApiOkResponse, ApiProduces, ApiTags } from '@nestjs/swagger';
 import { Response } from 'express';
 import { ZodResponse } from 'nestjs-zod';
 import { Access } from '../access/access.decorator';
 import { OptionalViewer, Viewer } from '../access/viewer';
-import { ReportResponseDto } from './dto/report.dto';
+import { ReportRequestDto, ReportResponseDto } from './dto/report.dto';
 import { ReportsService } from './reports.service';
 
 @ApiTags('reports')
@@ -15,8 +15,12 @@ export class ReportsController {
   @Get('report')
   @Access.take('read')
   @ZodResponse({ status: 200, type: ReportResponseDto })
-  get(@Param('id') takeId: string, @OptionalViewer() viewer: Viewer | null) {
-    return this.reports.get(takeId, viewer?.user ?? null);
+  get(
+    @Param('id') takeId: string,
+    @Query() { version }: ReportRequestDto,
+    @OptionalViewer() viewer: Viewer | null,
+  ) {
+    return this.reports.get({ takeId, version, reader: viewer?.user ?? null });
   }
 
   @Get('pair-spectrum')
@@ -26,8 +30,12 @@ export class ReportsController {
     description: 'Little-endian float32: Skk, Soo, Re Sko, Im Sko; the report names the bins.',
   })
   @Header('Cache-Control', 'private, no-cache')
-  async pairSpectrum(@Param('id') takeId: string, @Res() response: Response): Promise<void> {
-    const spectrum = await this.reports.getPairSpectrum(takeId);
+  async pairSpectrum(
+    @Param('id') takeId: string,
+    @Query() { version }: ReportRequestDto,
+    @Res() response: Response,
+  ): Promise<void> {
+    const spectrum = await this.reports.getPairSpectrum({ takeId, version });
     // A report never changes, so its id names the bytes.
     response.set('ETag', `"${spectrum.report.measurement.id}"`).type('application/octet-stream');
     response.send(Buffer.from(spectrum.data));

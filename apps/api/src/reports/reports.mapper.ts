@@ -27,16 +27,25 @@ export const noListFigures: ListFigures = {
   lowEndDb: null,
 };
 
-/** What the sheet says, in its owner's words: for finding a take by them. What is good names what isn't, so it's left out. */
-export function saidBy(facts: TakeFacts, { target, temperatureC, lengthUnit }: UserSettings): string {
+/**
+ * What the sheet says, in its owner's words: for finding a take by them. What is good names what isn't, so it's left out.
+ * And what its findings ask something about.
+ */
+export function toldColumns(
+  facts: TakeFacts,
+  { target, temperatureC, lengthUnit }: UserSettings,
+): Pick<Report, 'says' | 'topics'> {
   const figures = reportFigures(facts, { target, temperatureC });
   const { strong, rest } = takeSummary(figures);
   const told = { lengthUnit, target };
-  const sentences = findings(figures, told).flatMap(({ status, sentence }) =>
-    status === 'good' ? [] : sentence,
-  );
+  const found = findings(figures, told);
+  const sentences = found.flatMap(({ status, sentence }) => (status === 'good' ? [] : sentence));
   const line = reportLine(figures, told).map(({ action, reason }) => `${action} ${reason}`);
-  return [strong, rest, ...line, ...sentences].filter(Boolean).join('\n');
+  const asking = found.flatMap(({ status, topic }) => (status === 'fix' || status === 'watch' ? topic : []));
+  return {
+    says: [strong, rest, ...line, ...sentences].filter(Boolean).join('\n'),
+    topics: [...new Set(asking)],
+  };
 }
 
 export function listFiguresOf(report: Report, { target, temperatureC }: UserSettings): ListFigures {

@@ -7,21 +7,26 @@ import { Report } from './entities/report.entity';
 import { Take } from '../takes/entities/take.entity';
 import { User } from '../users/entities/user.entity';
 import { settingsOf } from '../users/user-settings';
-import { storedFacts } from './report-columns';
-import { ListFigures, listFiguresOf, reportResponseOf, saidBy } from './reports.mapper';
-
-/** With their hits they are large; more are never held. */
-const reportsAtOnce = 50;
+import { ListFigures, listFiguresOf, reportResponseOf } from './reports.mapper';
 
 const notMeasuredYet = () => new AppError('not-measured-yet', 'This take has not been measured yet.');
+
+const noSuchVersion = () =>
+  new AppError('not-found', 'This take was not measured with that version of the measurements.');
+
+interface WhichReport {
+  takeId: string;
+  /** Of the measurements; the current report without. */
+  version?: string;
+}
 
 @Injectable()
 export class ReportsService {
   constructor(private readonly em: EntityManager) {}
 
   /** Judged by the owner's target and temperature, told in the reader's units; a guest's are the owner's. */
-  async get(takeId: string, reader: User | null): Promise<ReportResponse> {
-    const { take, report, owner } = await this.currentReport(takeId);
+  async get({ reader, ...which }: WhichReport & { reader: User | null }): Promise<ReportResponse> {
+    const { take, report, owner } = await this.getReport(which);
     const before = await this.reportBefore(take);
     return reportResponseOf({
       report,
@@ -35,8 +40,8 @@ export class ReportsService {
     });
   }
 
-  async getPairSpectrum(takeId: string): Promise<PairSpectrum> {
-    const { report } = await this.currentReport(takeId);
+  async getPairSpectrum(which: WhichReport): Promise<PairSpectrum> {
+    const { report } = await this.getReport(which);
     const spectrum = await this.spectrumOf(report);
     if (!spectrum) throw new AppError('not-found', 'No kick hit was found, so there is nothing to add up.');
     return spectrum;
@@ -46,26 +51,6 @@ export class ReportsService {
   async listFigures(reportIds: string[], owner: UserSettings): Promise<Map<string, ListFigures>> {
     const reports = await this.em.find(Report, { measurement: { $in: reportIds } });
     return new Map(reports.map((report) => [report.measurement.id, listFiguresOf(report, owner)]));
-  }
-
-  /** What sheets say was written with the owner's settings of then; after they changed they are told anew. */
-  async tellAnew(owner: User): Promise<void> {
-    const takes = await this.em.find(Take, { owner: owner.id, currentReportId: { $ne: null } });
-    const ids = takes.flatMap((take) => take.currentReportId ?? []);
-    const settings = settingsOf(owner);
-    for (let start = 0; start < ids.length; start += reportsAtOnce) {
-      const em = this.em.fork();
-      const reports = await em.find(Report, {
-        measurement: { $in: ids.slice(start, start + reportsAtOnce) },
-      });
-      // Only of clipped hits do the words count any; the others are told without loading theirs.
-      await em.populate(
-        reports.filter(({ kickClipped, overheadClipped }) => kickClipped || overheadClipped),
-        ['hits', 'clipRuns'],
-      );
-      for (const report of reports) report.says = saidBy(factsToTell(report), settings);
-      await em.flush();
-    }
   }
 
   private spectrumOf(report: Report): Promise<PairSpectrum | null> {
@@ -79,17 +64,14 @@ export class ReportsService {
     return take?.currentReportId ? this.em.findOne(Report, { measurement: take.currentReportId }) : null;
   }
 
-  private async currentReport(takeId: string) {
+  private async getReport({ takeId, version }: WhichReport) {
     const take = await this.em.findOneOrFail(Take, { id: takeId }, { populate: ['owner'] });
     if (!take.currentReportId) throw notMeasuredYet();
-    const report = await this.em.findOneOrFail(
-      Report,
-      { measurement: take.currentReportId },
-      { populate: ['measurement', 'hits', 'clipRuns'] },
-    );
+    const which = version
+      ? { take, measurement: { dspVersion: version } }
+      : { measurement: take.currentReportId };
+    const report = await this.em.findOne(Report, which, { populate: ['measurement', 'hits', 'clipRuns'] });
+    if (!report) throw noSuchVersion();
     return { take, report, owner: settingsOf(take.owner.unwrap()) };
   }
 }
-
-const factsToTell = ({ summary, hits = [], clipRuns = [] }: Partial<Report> & Pick<Report, 'summary'>) =>
-  storedFacts({ summary, hits, clipRuns });

@@ -2,6 +2,7 @@ import { TakeResponse } from '@thudline/contracts';
 import { TakeRights } from '../access/take-rights';
 import { Measurement } from '../measuring/entities/measurement.entity';
 import { measurementResponseOf } from '../measuring/measurement.mapper';
+import { SheetVersions } from '../measuring/sheet-versions.service';
 import { Setup } from '../setups/entities/setup.entity';
 import { TakeFile } from './entities/take-file.entity';
 import { TakeTrack } from './entities/take-track.entity';
@@ -13,6 +14,7 @@ export interface WholeTake {
   files: TakeFile[];
   tracks: TakeTrack[];
   measurement: Measurement;
+  versions: SheetVersions;
   /** Take before and take after, where they are there. */
   follows: Take | null;
   followedBy: Take | null;
@@ -40,10 +42,14 @@ export function takeResponseOf(whole: WholeTake): TakeResponse {
   };
 }
 
-type OwnersPart = Pick<TakeResponse, 'tickedActions' | 'tags' | 'follows' | 'followedBy' | 'setup'>;
+type OwnersPart = Pick<
+  TakeResponse,
+  'sheetVersions' | 'renewal' | 'tickedActions' | 'tags' | 'follows' | 'followedBy' | 'setup'
+>;
 
-function ownersPart({ take, follows, followedBy, setup }: WholeTake): OwnersPart {
+function ownersPart({ take, versions, follows, followedBy, setup }: WholeTake): OwnersPart {
   return {
+    ...versions,
     tickedActions: take.tickedActions,
     tags: take.tags,
     follows: follows && { id: follows.id, number: follows.number, title: follows.title },
@@ -52,8 +58,10 @@ function ownersPart({ take, follows, followedBy, setup }: WholeTake): OwnersPart
   };
 }
 
-/** What whoever only reads a sheet isn't told: it leads to takes that were not shown to them. */
+/** What whoever only reads a sheet isn't told: it leads to takes, or sheets, that were not shown to them. */
 const othersPart: OwnersPart = {
+  sheetVersions: [],
+  renewal: 'none',
   tickedActions: [],
   tags: [],
   follows: null,

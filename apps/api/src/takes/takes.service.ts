@@ -7,6 +7,7 @@ import { Viewer } from '../access/viewer';
 import { AuditService } from '../audit/audit.service';
 import { notFound } from '../errors/app-error';
 import { MeasurementsService } from '../measuring/measurements.service';
+import { SheetVersionsService } from '../measuring/sheet-versions.service';
 import { Setup } from '../setups/entities/setup.entity';
 import { restorableSince } from './deleted-takes';
 import { TakeFile } from './entities/take-file.entity';
@@ -20,6 +21,7 @@ export class TakesService {
   constructor(
     private readonly em: EntityManager,
     private readonly measurements: MeasurementsService,
+    private readonly versions: SheetVersionsService,
     private readonly audit: AuditService,
   ) {}
 
@@ -29,25 +31,18 @@ export class TakesService {
 
   async whole(take: Take, rights: TakeRights): Promise<TakeResponse> {
     const { followsTake, setup } = take;
-    const [files, tracks, measurement, follows, followedBy, usedSetup] = await Promise.all([
+    const [files, tracks, measurement, versions, follows, followedBy, usedSetup] = await Promise.all([
       this.em.find(TakeFile, { take }, { orderBy: { position: 'asc' } }),
       this.em.find(TakeTrack, { take }, { orderBy: { position: 'asc' } }),
       this.measurements.getLatest(take.id),
+      this.versions.of(take),
       followsTake && this.em.findOne(Take, { id: followsTake.id, deletedAt: null }),
       this.em.findOne(Take, { followsTake: take.id, deletedAt: null }, { orderBy: { number: 'desc' } }),
       setup ? this.em.findOne(Setup, { id: setup.id }) : null,
       this.em.populate(take, ['owner']),
     ]);
-    return takeResponseOf({
-      take,
-      files,
-      tracks,
-      measurement,
-      follows: follows ?? null,
-      followedBy,
-      setup: usedSetup,
-      rights,
-    });
+    const parts = { take, files, tracks, measurement, versions, rights };
+    return takeResponseOf({ ...parts, follows: follows ?? null, followedBy, setup: usedSetup });
   }
 
   async update(takeId: string, changes: UpdateTakeRequest, rights: TakeRights): Promise<TakeResponse> {

@@ -1,17 +1,17 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { UpdateMeRequest, UserSettings } from '@thudline/contracts';
-import { ReportsService } from '../reports/reports.service';
+import { ReportTelling } from '../reports/report-telling';
 import { User } from './entities/user.entity';
 
-/** What the words of a sheet depend on, see `saidBy`. */
+/** What the words of a sheet depend on, see `toldColumns`. */
 const toldBySheets = ['target', 'temperatureC', 'lengthUnit'] as const;
 
 @Injectable()
 export class MeService {
   constructor(
     private readonly em: EntityManager,
-    private readonly reports: ReportsService,
+    private readonly telling: ReportTelling,
   ) {}
 
   /** What is named changes, the rest stays. Sheets follow at once: they are judged on reading. */
@@ -20,7 +20,7 @@ export class MeService {
     await this.em.flush();
     if (!settings) return;
     await this.merge(user, settings);
-    if (toldBySheets.some((key) => settings[key] !== undefined)) await this.reports.tellAnew(user);
+    if (toldBySheets.some((key) => settings[key] !== undefined)) await this.telling.tellAnew(user);
   }
 
   /** By the database, so that two tabs that change different settings at the same moment keep both. */

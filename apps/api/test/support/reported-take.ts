@@ -3,7 +3,7 @@ import { bytesSource, measureTake, openWav, TakeFacts } from '@thudline/dsp';
 import { Measurement } from '../../src/measuring/entities/measurement.entity';
 import { Report } from '../../src/reports/entities/report.entity';
 import { reportColumns } from '../../src/reports/report-columns';
-import { saidBy } from '../../src/reports/reports.mapper';
+import { toldColumns } from '../../src/reports/reports.mapper';
 import { Take } from '../../src/takes/entities/take.entity';
 import { settingsOf } from '../../src/users/user-settings';
 import { monoTracks, shortTake } from './recordings';
@@ -31,7 +31,7 @@ export async function giveReport(test: TestApp, { id }: TakeResponse, facts: Tak
     measurement,
     take,
     ...columns,
-    says: saidBy(facts, settingsOf(take.owner.unwrap())),
+    ...toldColumns(facts, settingsOf(take.owner.unwrap())),
   });
   take.currentReportId = measurement.id;
   await em.flush();

@@ -59,6 +59,11 @@ const dayAndTime = new Intl.DateTimeFormat('en-GB', {
   minute: '2-digit',
 });
 
+const dayMonthYear = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'short', year: 'numeric' });
+
+/** "2 Dec 2026" in the reader's time zone. */
+export const date = (iso: string) => dayMonthYear.format(new Date(iso));
+
 /** "2 Dec, 19:40" in the reader's time zone. */
 export const dateTime = (iso: string) => dayAndTime.format(new Date(iso));
 

@@ -10,7 +10,9 @@ import { SetupOfTake } from '../features/setups/components/SetupOfTake';
 import { SendSheet } from '../features/shares/components/SendSheet';
 import { MeasuredSheet } from '../features/sheet/components/MeasuredSheet';
 import { MeasuringSheet } from '../features/sheet/components/MeasuringSheet';
+import { OlderVersion } from '../features/sheet/components/OlderVersion';
 import { useReport } from '../features/sheet/hooks/useReport';
+import { useSheetVersion } from '../features/sheet/hooks/useSheetVersion';
 import { useTake } from '../features/sheet/hooks/useTake';
 import { ApiError } from '../lib/apiClient';
 import { usePageTitle } from '../lib/usePageTitle';
@@ -20,7 +22,9 @@ export function SheetPage() {
   const { takeId = '' } = useParams();
   const { me } = useMe();
   const { take, error: takeError, retry: retryTake } = useTake(takeId);
-  const { report, error: reportError, retry: retryReport } = useReport(takeId, take?.hasReport ?? false);
+  const { version } = useSheetVersion(take);
+  const hasReport = take?.hasReport ?? false;
+  const { report, error: reportError, retry: retryReport } = useReport(takeId, hasReport, version);
   usePageTitle(take ? `Take ${take.number}${take.title && `, ${take.title}`}` : 'Sheet');
   const error = takeError ?? reportError;
   if (error) return <SheetError error={error} retry={takeError ? retryTake : retryReport} />;
@@ -30,6 +34,7 @@ export function SheetPage() {
       key={take.id}
       {...{ take, report }}
       settings={me.settings}
+      above={<OlderVersion {...{ take, report }} />}
       marginHead={
         <>
           {take.rights.change && <SendSheet takeId={take.id} />}

@@ -54,6 +54,8 @@ export const sampleTake = (overrides: Partial<TakeResponse> = {}): TakeResponse 
   ],
   measurement: measurement(),
   hasReport: true,
+  sheetVersions: [{ version: '1', measuredAt: '2026-12-02T19:41:20.000Z' }],
+  renewal: 'none',
   tickedActions: [],
   tags: [],
   follows: null,
@@ -99,7 +101,7 @@ const choice = (
 });
 
 export const sampleReport = (overrides: Partial<ReportResponse> = {}): ReportResponse => ({
-  version: 1,
+  version: 2,
   takeId,
   dspVersion: '1',
   measuredAt: '2026-12-02T19:41:20.000Z',

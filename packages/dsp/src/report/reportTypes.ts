@@ -142,7 +142,7 @@ export interface Finding {
 
 /** What the command line prints and the API sends; the same shape as the contract of that name. */
 export interface ReportFigures {
-  version: 1;
+  version: 1 | 2;
   sampleRateHz: number;
   durationS: number;
   kick: TrackReport;

@@ -58,7 +58,7 @@ export function agreementFigures(change: Partial<AgreementReport> = {}): Agreeme
 /** A good take; each test says what is different. */
 export function reportOf(change: Partial<ReportFigures> = {}): ReportFigures {
   return {
-    version: 1,
+    version: 2,
     sampleRateHz: 48000,
     durationS: 45,
     kick: trackFigures(),

@@ -27,7 +27,7 @@ describe('npm run measure', () => {
     ]);
     expect([exitCode, stderr]).toEqual([0, '']);
     const report = reportFigures.parse(JSON.parse(stdout));
-    expect(report).toMatchObject({ version: 1, sampleRateHz: 48000, durationS: 4 });
+    expect(report).toMatchObject({ version: 2, sampleRateHz: 48000, durationS: 4 });
     expect(report.agreement.verdict).toBe('flip');
     expect(stdout).not.toMatch(/-?\d+\.\d{7}/);
   });

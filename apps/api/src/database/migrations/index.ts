@@ -8,6 +8,7 @@ import { Migration20261201093647_measureAgain } from './20261201093647-measure-a
 import { Migration20261201120050_tryOuts } from './20261201120050-try-outs';
 import { Migration20261201122137_setupsAndPhotos } from './20261201122137-setups-and-photos';
 import { Migration20261201122700_whatTheRecorderWrote } from './20261201122700-what-the-recorder-wrote';
+import { Migration20261201132900_renewalsAndTopics } from './20261201132900-renewals-and-topics';
 
 /** In order; a new migration is added at the end and never changed once merged. */
 export const migrations = [
@@ -21,4 +22,5 @@ export const migrations = [
   { name: '20261201120050-try-outs', class: Migration20261201120050_tryOuts },
   { name: '20261201122137-setups-and-photos', class: Migration20261201122137_setupsAndPhotos },
   { name: '20261201122700-what-the-recorder-wrote', class: Migration20261201122700_whatTheRecorderWrote },
+  { name: '20261201132900-renewals-and-topics', class: Migration20261201132900_renewalsAndTopics },
 ];

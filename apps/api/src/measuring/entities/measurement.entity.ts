@@ -37,6 +37,8 @@ export const Measurement = defineEntity({
     heartbeatAt: p.datetime(),
     /** One sentence for people where it failed. */
     reason: p.text().nullable(),
+    /** Measures a sheet of an earlier version again, after an upgrade: nobody waits for it, and it waits for everybody. */
+    renewal: p.boolean().default(false),
   },
 });
 export type Measurement = InferEntity<typeof Measurement>;

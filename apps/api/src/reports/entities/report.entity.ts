@@ -1,5 +1,5 @@
 import { defineEntity, InferEntity, p } from '@mikro-orm/core';
-import { FindingStatus, Verdict } from '@thudline/contracts';
+import { FindingStatus, FindingTopic, Verdict } from '@thudline/contracts';
 import { ClipRun, HitFacts, TakeFacts } from '@thudline/dsp';
 import { Measurement } from '../../measuring/entities/measurement.entity';
 import { Take } from '../../takes/entities/take.entity';
@@ -8,6 +8,16 @@ import { Take } from '../../takes/entities/take.entity';
 export const Report = defineEntity({
   name: 'Report',
   tableName: 'report',
+  indexes: [
+    {
+      name: 'report_topics_index',
+      expression: 'create index "report_topics_index" on "report" using gin ("topics")',
+    },
+    {
+      name: 'report_untold_index',
+      expression: 'create index "report_untold_index" on "report" ("measurement_id") where "topics" is null',
+    },
+  ],
   properties: {
     measurement: () => p.oneToOne(Measurement).ref().primary().deleteRule('cascade'),
     take: () => p.manyToOne(Take).ref().index().deleteRule('cascade'),
@@ -26,6 +36,8 @@ export const Report = defineEntity({
     addingUp: p.string().$type<FindingStatus>().length(20),
     /** What the sheet says in words, judged by the owner's target: looked through by "find". */
     says: p.text(),
+    /** What its findings ask something about, judged by the owner's target; null where it wasn't told yet. */
+    topics: p.array<FindingTopic>().columnType('text[]').nullable(),
     /** The facts without hits and clipping runs: small, so that lists can read it. */
     summary: p.json<TakeFacts>(),
     hits: p.json<HitFacts[]>().lazy(true, false),

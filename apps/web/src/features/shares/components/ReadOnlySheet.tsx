@@ -45,6 +45,8 @@ export function ReadOnlySheet({
 const withoutChange = (take: TakeResponse): TakeResponse => ({
   ...take,
   rights: { ...take.rights, change: false },
+  // What was sent is the newest sheet.
+  sheetVersions: [],
 });
 
 /** Where listening starts on a phone. */

@@ -3,6 +3,7 @@ import type { ReportResponse, TakeResponse, UserSettings } from '@thudline/contr
 import { figureGroups, type FigureGroup, type FigureRow } from './figureRows';
 import { FiguresOut } from './FiguresOut';
 import { FileFacts } from './FileFacts';
+import { MeasuredWith } from './MeasuredWith';
 import { PictureTitle } from './SheetSection';
 
 /** Everything that was measured, with unit, definition and source; and the files it was measured from. */
@@ -25,7 +26,8 @@ export function FigureTables({
         ))}
       </Box>
       <PictureTitle>Files</PictureTitle>
-      <FileFacts take={take} dspVersion={report.dspVersion} />
+      <FileFacts take={take} />
+      <MeasuredWith {...{ take, report }} />
     </>
   );
 }

@@ -5,7 +5,7 @@ import { bytes, clock, plural } from '../../../lib/format';
 import { broadcastWords } from '../broadcastWords';
 
 /** The files as they came: kept and given back bit for bit. */
-export function FileFacts({ take, dspVersion }: { take: TakeResponse; dspVersion: string }) {
+export function FileFacts({ take }: { take: TakeResponse }) {
   return (
     <chakra.ul listStyleType="none" fontSize="small" marginTop="4px">
       {take.files.map((file) => {
@@ -39,7 +39,7 @@ export function FileFacts({ take, dspVersion }: { take: TakeResponse; dspVersion
         );
       })}
       <chakra.li color="ink.muted" fontSize="caption" paddingY={{ base: '7px', _print: '3px' }}>
-        Kept bit for bit. Measured by measurements {dspVersion}.
+        Kept bit for bit.
       </chakra.li>
     </chakra.ul>
   );

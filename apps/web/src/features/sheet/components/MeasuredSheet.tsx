@@ -30,7 +30,9 @@ export interface MeasuredSheetProps {
 /** The sheet of a measured take, top to bottom. The chosen hit and the choice are one for the whole sheet. */
 export function MeasuredSheet({ take, report, settings, ...slots }: MeasuredSheetProps) {
   const kickHits = useMemo(() => kickHitsOf(report), [report]);
-  const [chosenHit, setChosenHit] = useState(() => loudestHit(report, kickHits));
+  const [chosen, setChosenHit] = useState(() => loudestHit(report, kickHits));
+  // Another version of the measurements may find other hits, while this sheet is open.
+  const chosenHit = chosen !== null && kickHits.includes(chosen) ? chosen : loudestHit(report, kickHits);
   const pair = usePairSpectrum(report);
   const bench = useChoice(report.agreement);
   const listening = useListening({ report, spectrum: pair.spectrum, bench });

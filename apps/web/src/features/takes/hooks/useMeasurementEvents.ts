@@ -18,22 +18,29 @@ interface MeasurementEvents {
   askAgain: () => void;
   /** Keeps listening for takes that are added elsewhere. */
   waitForAdded?: boolean;
+  /** Nobody sits and waits: where the stream can't be opened it is asked seldom. */
+  patient?: boolean;
 }
 
 /**
  * Follows measurements: what the server tells goes into the SWR caches of the list and the item. Where the stream can't
  * be opened, `askAgain` is called every second instead.
  */
-export function useMeasurementEvents({ takeIds, askAgain, waitForAdded = false }: MeasurementEvents) {
+export function useMeasurementEvents({
+  takeIds,
+  askAgain,
+  waitForAdded = false,
+  patient = false,
+}: MeasurementEvents) {
   const followed = takeIds.join(',');
   const wanted = followed !== '' || waitForAdded;
   const live = useEventStream(followed, wanted);
   const ask = useEffectEvent(askAgain);
   useEffect(() => {
     if (!wanted) return;
-    const timer = setInterval(() => !document.hidden && ask(), live ? slowPollMs : pollMs);
+    const timer = setInterval(() => !document.hidden && ask(), live || patient ? slowPollMs : pollMs);
     return () => clearInterval(timer);
-  }, [wanted, live]);
+  }, [wanted, live, patient]);
 }
 
 function useEventStream(followed: string, wanted: boolean): boolean {

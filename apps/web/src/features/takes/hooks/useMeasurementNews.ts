@@ -10,6 +10,8 @@ export function useMeasurementNews() {
     // What the sheet says comes with the list only: until it is read again the row stays as it is.
     if (!isMeasuring(measurement)) {
       void mutate(paths.take(takeId));
+      // Outlines that an earlier version didn't store are there after it was measured again.
+      void mutate((key) => typeof key === 'string' && key.startsWith(`${paths.peaks(takeId)}?`));
       void mutate(isTakesKey);
       return;
     }
