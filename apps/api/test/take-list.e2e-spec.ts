@@ -15,6 +15,7 @@ interface Case {
   clipped?: boolean;
   verdict?: Verdict;
   lowEndDb?: number;
+  overhead?: Partial<TrackFacts>;
 }
 
 /** One take for each thing a list can say. */
@@ -29,6 +30,10 @@ const cases: Case[] = [
   { title: 'opposite', kickDbfs: -9, overheadDbfs: -8, verdict: 'flip', lowEndDb: -3 },
   { title: 'unclear', kickDbfs: -9, verdict: 'cannot-tell' },
   { title: 'overhead hot', kickDbfs: -9, overheadDbfs: -1 },
+  { title: 'humming', kickDbfs: -9, overhead: { hum: { mainsHz: 50, levelDbfs: -62 } } },
+  { title: 'broken', kickDbfs: -9, overhead: { dropouts: { count: 2, firstAtS: 0.1 } } },
+  { title: 'squashed', kickDbfs: -9, overhead: { looksFlattened: true } },
+  { title: 'off centre', kickDbfs: -9, overhead: { dcOffset: 0.02 } },
 ];
 
 describe('the sentence above the list', () => {
@@ -67,7 +72,7 @@ describe('the sentence above the list', () => {
   it('shows as good exactly the takes it says a good word of', async () => {
     const { items } = await list();
     const said = items.filter(({ summary }) => summary?.status === 'good').map(({ title }) => title);
-    expect(said.sort()).toEqual(['a little low', 'good']);
+    expect(said.sort()).toEqual(['a little low', 'good', 'off centre']);
     expect(await titles({ show: 'good' })).toEqual(said);
   });
 
@@ -77,6 +82,15 @@ describe('the sentence above the list', () => {
     expect(await titles({ show: 'low' })).toEqual(['a little low', 'far too low', 'low over noise']);
     expect(await titles({ show: 'to-flip' })).toEqual(['opposite']);
     expect(await titles({ show: 'cannot-tell' })).toEqual(['unclear']);
+  });
+
+  it('shows takes by what a finding asks about', async () => {
+    expect(await titles({ show: 'hum' })).toEqual(['humming']);
+    expect(await titles({ show: 'dropouts' })).toEqual(['broken']);
+    expect(await titles({ show: 'flattened' })).toEqual(['squashed']);
+    expect(await titles({ show: 'dc-offset' })).toEqual(['off centre']);
+    expect(await titles({ show: 'noise' })).toEqual(['noisy']);
+    for (const show of ['overs', 'arrival', 'balance', 'files']) expect(await titles({ show })).toEqual([]);
   });
 
   it('follows the target as soon as it is another', async () => {
@@ -195,7 +209,7 @@ function factsOf(facts: TakeFacts, each: Case): TakeFacts {
     ...facts,
     tracks: [
       track(kick, each.kickDbfs, each.clipped ?? false),
-      track(overhead, each.overheadDbfs ?? -9, false),
+      { ...track(overhead, each.overheadDbfs ?? -9, false), ...each.overhead },
     ],
     pairs: [
       {

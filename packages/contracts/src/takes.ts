@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { findingStatus } from './reports';
+import { findingStatus, type FindingTopic } from './reports';
 import { text, textOfLines } from './text';
 
 export const trackRoles = ['kick', 'overhead'] as const;
@@ -172,6 +172,19 @@ export const takeListItem = z.object({
 });
 export type TakeListItem = z.infer<typeof takeListItem>;
 
+/** Findings a list can be asked for by themselves; levels and adding up have filters of their own. */
+export const topicFilters = [
+  'noise',
+  'hum',
+  'dc-offset',
+  'flattened',
+  'overs',
+  'dropouts',
+  'arrival',
+  'balance',
+  'files',
+] as const satisfies readonly FindingTopic[];
+
 /** The filter sentence: "Show **every take** tagged **any tag**, **newest first**." */
 export const takeFilters = [
   'every',
@@ -180,6 +193,7 @@ export const takeFilters = [
   'hot',
   'low',
   'to-flip',
+  ...topicFilters,
   'cannot-tell',
   'deleted',
 ] as const;

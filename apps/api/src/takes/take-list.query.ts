@@ -1,4 +1,4 @@
-import { ListTakesRequest, UserSettings } from '@thudline/contracts';
+import { ListTakesRequest, topicFilters, UserSettings } from '@thudline/contracts';
 import { restorableSince } from './deleted-takes';
 import { parseCursor } from './take-cursor';
 
@@ -7,6 +7,8 @@ export interface Sql {
   text: string;
   values: unknown[];
 }
+
+type TopicFilter = (typeof topicFilters)[number];
 
 const plain = (text: string): Sql => ({ text, values: [] });
 const roles = ['kick', 'overhead'] as const;
@@ -38,11 +40,13 @@ const tooLow = (role: Role, settings: UserSettings): Sql =>
   );
 const noisy = (role: Role): Sql => ({ text: `r.${role}_noise_dbfs > ?`, values: [noiseWatchDbfs] });
 const clipped = plain('(r.kick_clipped or r.overhead_clipped)');
+/** The list's word of a take names these before it says anything good. */
+const named = plain(`r.topics && array['dropouts', 'flattened', 'hum']`);
 
-/** Good is what the list says a good word of: nothing clipped, hot, too low, noisy or unsure. */
+/** Good is what the list says a good word of: nothing clipped, hot, too low, noisy, humming, broken or unsure. */
 function good(settings: UserSettings): Sql {
   const faults = roles.flatMap((role) => [hot(role, settings), tooLow(role, settings), noisy(role)]);
-  return all(plain(`r.adding_up = 'good'`), not(clipped), ...faults.map(not));
+  return all(plain(`r.adding_up = 'good'`), not(clipped), not(named), ...faults.map(not));
 }
 
 /** @returns which takes fit the sentence "Show … tagged … with setup …", and hold the words looked for */
@@ -73,6 +77,8 @@ function shown(show: ListTakesRequest['show'], settings: UserSettings): Sql {
       return all(there, plain(`r.adding_up = 'fix'`));
     case 'cannot-tell':
       return all(there, plain(`r.adding_up = 'cannot-tell'`));
+    default:
+      return all(there, { text: 'r.topics @> array[?]::text[]', values: [show satisfies TopicFilter] });
   }
 }
 

@@ -9,6 +9,8 @@ describe('why a list is empty', () => {
     [{ show: 'to-flip' as const, find: ' port ' }, 'Nothing you recorded that says “port” needs a flip.'],
     [{ tag: 'rug' }, 'Nothing you tagged rug is there.'],
     [{ tag: 'rug', setup: 'x' }, 'Nothing you tagged rug with that setup is there.'],
+    [{ show: 'hum' as const }, 'Nothing you recorded hums.'],
+    [{ show: 'dropouts' as const, tag: 'rug' }, 'Nothing you tagged rug seems to drop out.'],
   ])('%j', (change, words) => {
     expect(nothingWords({ ...everyTake, ...change })).toBe(words);
   });
@@ -22,6 +24,7 @@ describe('wider sentences', () => {
       'Clipped takes that say “port”',
       'Clipped takes tagged rug',
     ]);
+    expect(queryWords({ ...everyTake, show: 'hum', tag: 'rug' })).toBe('Takes that hum tagged rug');
   });
 
   it('ask of any setup, too', () => {
