@@ -90,7 +90,8 @@ describe('the sentence above the list', () => {
     expect(await titles({ show: 'flattened' })).toEqual(['squashed']);
     expect(await titles({ show: 'dc-offset' })).toEqual(['off centre']);
     expect(await titles({ show: 'noise' })).toEqual(['noisy']);
-    for (const show of ['overs', 'arrival', 'balance', 'files']) expect(await titles({ show })).toEqual([]);
+    for (const show of ['overs', 'late-start', 'arrival', 'balance', 'files'])
+      expect(await titles({ show })).toEqual([]);
   });
 
   it('follows the target as soon as it is another', async () => {

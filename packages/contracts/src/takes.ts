@@ -180,6 +180,7 @@ export const topicFilters = [
   'flattened',
   'overs',
   'dropouts',
+  'late-start',
   'arrival',
   'balance',
   'files',

@@ -41,7 +41,7 @@ const tooLow = (role: Role, settings: UserSettings): Sql =>
 const noisy = (role: Role): Sql => ({ text: `r.${role}_noise_dbfs > ?`, values: [noiseWatchDbfs] });
 const clipped = plain('(r.kick_clipped or r.overhead_clipped)');
 /** The list's word of a take names these before it says anything good. */
-const named = plain(`r.topics && array['dropouts', 'flattened', 'hum']`);
+const named = plain(`r.topics && array['late-start', 'dropouts', 'flattened', 'hum']`);
 
 /** Good is what the list says a good word of: nothing clipped, hot, too low, noisy, humming, broken or unsure. */
 function good(settings: UserSettings): Sql {
