@@ -3,6 +3,7 @@ import { APP_FILTER, APP_INTERCEPTOR, APP_PIPE } from '@nestjs/core';
 import { ZodSerializerInterceptor, ZodValidationPipe } from 'nestjs-zod';
 import { AccessModule } from './access/access.module';
 import { AuthModule } from './auth/auth.module';
+import { ComparisonsModule } from './comparisons/comparisons.module';
 import { Config } from './config/config';
 import { ConfigModule } from './config/config.module';
 import { databaseModule } from './database/database.module';
@@ -38,6 +39,7 @@ export class AppModule {
         PhotosModule,
         MeasurementsModule,
         ReportsModule,
+        ComparisonsModule,
         SoundModule,
         SharesModule,
         TryOutsModule,

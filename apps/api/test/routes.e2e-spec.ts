@@ -68,7 +68,7 @@ describe('every route there is', () => {
   };
   const filled = (route: Route, takeId: string, fileId: string) => ({
     ...route,
-    path: route.path.replace(':id', takeId).replace(':fileId', fileId),
+    path: route.path.replace(':id', takeId).replace(':otherId', takeId).replace(':fileId', fileId),
   });
   const takeRoutes = () => routes.filter((route) => route.path.startsWith(`${paths.takes}/:id`));
 
@@ -132,6 +132,7 @@ describe('every route there is', () => {
         paths.take(':id'),
         paths.report(':id'),
         paths.pairSpectrum(':id'),
+        paths.comparison(':id', ':otherId'),
         paths.excerpt(':id'),
         paths.peaks(':id'),
         paths.listen(':id'),

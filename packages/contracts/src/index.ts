@@ -1,4 +1,5 @@
 export * from './accounts';
+export * from './comparisons';
 export * from './errors';
 export * from './events';
 export * from './health';

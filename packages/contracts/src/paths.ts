@@ -30,6 +30,8 @@ export const paths = {
   peaks: (takeId: string) => `/api/takes/${takeId}/peaks`,
   report: (takeId: string) => `/api/takes/${takeId}/report`,
   pairSpectrum: (takeId: string) => `/api/takes/${takeId}/pair-spectrum`,
+  /** The take before, then the take after. */
+  comparison: (takeId: string, otherTakeId: string) => `/api/takes/${takeId}/compare/${otherTakeId}`,
   excerpt: (takeId: string) => `/api/takes/${takeId}/excerpt`,
   listen: (takeId: string) => `/api/takes/${takeId}/listen.wav`,
   takeFile: (takeId: string, fileId: string) => `/api/takes/${takeId}/files/${fileId}`,

@@ -79,3 +79,8 @@ export * from './findings/findings';
 export * from './findings/reportLine';
 export * from './findings/nextActions';
 export * from './findings/takeSummary';
+export * from './report/comparison/comparedNames';
+export * from './report/comparison/comparedPolarity';
+export * from './report/comparison/comparisonCaveats';
+export * from './report/comparison/comparisonLine';
+export * from './report/comparison/doneWords';

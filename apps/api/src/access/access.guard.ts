@@ -12,7 +12,7 @@ import { ACCESS, AccessRule } from './access.decorator';
 import { AccessService } from './access.service';
 import { readMethods } from './origin.guard';
 import { OPEN_TO_READ_ONLY, readOnly } from './read-only';
-import { TakeRights } from './take-rights';
+import { shared, TakeRights } from './take-rights';
 import { Asker, notSignedIn, Viewer, ViewerRequest } from './viewer';
 
 type TakeRule = Extract<AccessRule, { kind: 'take' }>;
@@ -40,6 +40,10 @@ export class AccessGuard implements CanActivate {
     if (rule.kind === 'take') {
       if (!asker.viewer) await this.countGuest(request.ip ?? '');
       request.rights = await this.rightsTo(String(request.params.id), asker, rule);
+      if (rule.alsoOf) {
+        const others = await this.rightsTo(String(request.params[rule.alsoOf]), asker, rule);
+        request.rights = shared(request.rights, others);
+      }
       return true;
     }
     if (!asker.viewer) throw notSignedIn();

@@ -30,3 +30,15 @@ export function added(one: TakeRights, other: TakeRights): TakeRights {
     change: one.change || other.change,
   };
 }
+
+/** Only what both of the two allow. */
+export function shared(one: TakeRights, other: TakeRights): TakeRights {
+  return {
+    read: one.read && other.read,
+    listen: one.listen && other.listen,
+    download: one.download && other.download,
+    note: one.note && other.note,
+    own: one.own && other.own,
+    change: one.change && other.change,
+  };
+}

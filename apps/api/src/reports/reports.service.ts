@@ -1,13 +1,24 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { ReportResponse, UserSettings } from '@thudline/contracts';
+import { decodePairSpectrum, PairSpectrum as PairSpectrumFacts, TakeFacts } from '@thudline/dsp';
 import { AppError } from '../errors/app-error';
 import { PairSpectrum } from './entities/pair-spectrum.entity';
 import { Report } from './entities/report.entity';
 import { Take } from '../takes/entities/take.entity';
 import { User } from '../users/entities/user.entity';
 import { settingsOf } from '../users/user-settings';
+import { storedFacts } from './report-columns';
 import { ListFigures, listFiguresOf, reportResponseOf } from './reports.mapper';
+
+export interface MeasuredTake {
+  take: Take;
+  /** Whose target and temperature the take is judged by. */
+  owner: UserSettings;
+  facts: TakeFacts;
+  /** Null where no kick hit was found. */
+  spectrum: PairSpectrumFacts | null;
+}
 
 const notMeasuredYet = () => new AppError('not-measured-yet', 'This take has not been measured yet.');
 
@@ -45,6 +56,18 @@ export class ReportsService {
     const spectrum = await this.spectrumOf(report);
     if (!spectrum) throw new AppError('not-found', 'No kick hit was found, so there is nothing to add up.');
     return spectrum;
+  }
+
+  /** What was measured of a take, whole. */
+  async getMeasured(takeId: string): Promise<MeasuredTake> {
+    const { take, report, owner } = await this.getReport({ takeId });
+    const spectrum = await this.spectrumOf(report);
+    return {
+      take,
+      owner,
+      facts: storedFacts(report),
+      spectrum: spectrum && decodePairSpectrum(spectrum.data, spectrum),
+    };
   }
 
   /** @returns what lists show, by report id */
