@@ -71,6 +71,10 @@ export const router = createBrowserRouter([
             lazy: async () => ({ Component: (await import('../pages/NewTakePage')).NewTakePage }),
           },
           {
+            path: '/compare/:beforeId/:afterId',
+            lazy: async () => ({ Component: (await import('../pages/ComparePage')).ComparePage }),
+          },
+          {
             path: '/takes/:takeId',
             lazy: async () => ({ Component: (await import('../pages/SheetPage')).SheetPage }),
           },

@@ -6,6 +6,7 @@ import { PageMessage } from '../components/PageMessage';
 import { useMe } from '../features/auth/hooks/useMe';
 import { BigPrintButton } from '../features/big-print/components/BigPrintButton';
 import { BigPrintLinks } from '../features/big-print/components/BigPrintLinks';
+import { comparePath } from '../features/compare/takeWords';
 import { SetupOfTake } from '../features/setups/components/SetupOfTake';
 import { SendSheet } from '../features/shares/components/SendSheet';
 import { MeasuredSheet } from '../features/sheet/components/MeasuredSheet';
@@ -42,7 +43,16 @@ export function SheetPage() {
           <BigPrintLinks takeId={take.id} mayAddPhone={take.rights.change} />
         </>
       }
-      moreButtons={<BigPrintButton takeId={take.id} />}
+      moreButtons={
+        <>
+          <BigPrintButton takeId={take.id} />
+          {take.follows && (
+            <ButtonLink look="outline" to={comparePath(take.follows.id, take.id)}>
+              Compare with take {take.follows.number}
+            </ButtonLink>
+          )}
+        </>
+      }
     />
   ) : (
     <MeasuringSheet take={take} />

@@ -1,4 +1,5 @@
-import type { ChosenTake } from './chosenTakes';
+import { comparePath } from '../compare/takeWords';
+import { oldestFirst, type ChosenTake } from './chosenTakes';
 
 /** A page that takes chosen takes further, as a button of the bar. */
 export interface ChosenPlace {
@@ -8,7 +9,15 @@ export interface ChosenPlace {
 }
 
 /** Add a page here. */
-const places: readonly ChosenPlace[] = [];
+const places: readonly ChosenPlace[] = [
+  {
+    words: 'Compare',
+    address: (takes) => {
+      const [before, after] = oldestFirst(takes);
+      return takes.length === 2 ? comparePath(before.id, after.id) : null;
+    },
+  },
+];
 
 /** Where these takes can go on to. */
 export const chosenPlaces = (takes: readonly ChosenTake[]): { words: string; to: string }[] =>

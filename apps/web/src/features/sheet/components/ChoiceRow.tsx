@@ -77,7 +77,7 @@ function Choices({ bench: { choices, chosen, set } }: { bench: ChoiceRowProps['b
   );
 }
 
-function HitSteps({
+export function HitSteps({
   kickHits,
   chosenHit,
   onChooseHit,

@@ -2,11 +2,13 @@ import { Fragment } from 'react';
 import { chakra } from '@chakra-ui/react';
 import { sheetKeyWords } from '../hooks/useSheetKeys';
 
-/** Every key of a sheet and what it does. */
-export function KeysList() {
+export type KeyWords = readonly (readonly [keys: string, does: string])[];
+
+/** Every key of a page, a sheet's unless others are given, and what it does. */
+export function KeysList({ keys: words = sheetKeyWords }: { keys?: KeyWords }) {
   return (
     <chakra.dl display="grid" gridTemplateColumns="auto 1fr" columnGap="22px" rowGap="8px" marginTop="14px">
-      {sheetKeyWords.map(([keys, does]) => (
+      {words.map(([keys, does]) => (
         <Fragment key={keys}>
           <chakra.dt fontWeight={600} whiteSpace="nowrap">
             {keys}

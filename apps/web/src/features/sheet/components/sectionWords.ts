@@ -1,7 +1,7 @@
 import type { Balance, Finding, FindingStatus, ReportResponse, Room } from '@thudline/contracts';
 import { number } from '../../../lib/format';
 
-const severity: readonly FindingStatus[] = ['fix', 'watch', 'cannot-tell', 'good'];
+export const severity: readonly FindingStatus[] = ['fix', 'watch', 'cannot-tell', 'good'];
 
 /** Findings of some topics: the most pressing first, then in the order of the topics. */
 export function findingsOf(report: ReportResponse, topics: readonly Finding['topic'][]): Finding[] {

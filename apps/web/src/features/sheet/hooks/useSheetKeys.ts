@@ -2,6 +2,7 @@ import { useEffect } from 'react';
 import type { Excerpt } from './useExcerpt';
 import type { Bench } from './useChoice';
 import type { Listening } from './useListening';
+import { isForPage } from './pageKeys';
 
 interface SheetKeys {
   singleKeys: boolean;
@@ -24,26 +25,12 @@ export const sheetKeyWords: [keys: string, does: string][] = [
   ['↑ ↓', 'in a number of the choice: more, less'],
 ];
 
-/** Fields, lists and whatever acts on its own keys keep them. */
-const keepsItsKeys =
-  'input, textarea, select, summary, [contenteditable], [role="group"] [tabindex], [role="slider"]';
-
-/** Whether a single key is the sheet's: not in a field, not behind a dialog, not one held down. */
-function isForSheet(event: KeyboardEvent): boolean {
-  if (event.ctrlKey || event.metaKey || event.altKey || event.defaultPrevented || event.repeat) return false;
-  if (document.querySelector('dialog[open]')) return false;
-  if (!(event.target instanceof Element)) return true;
-  if (event.target.closest(keepsItsKeys)) return false;
-  // A choice just clicked keeps the focus: digits and arrows still act there, Space presses the button itself.
-  return event.key !== ' ' || event.target.closest('button, a') === null;
-}
-
 /** Single keys of the sheet; they can be switched off (WCAG 2.1.4). */
 export function useSheetKeys(keys: SheetKeys) {
   useEffect(() => {
     if (!keys.singleKeys) return;
     const onKeyDown = (event: KeyboardEvent) => {
-      if (isForSheet(event) && act(event.key, keys)) event.preventDefault();
+      if (isForPage(event) && act(event.key, keys)) event.preventDefault();
     };
     document.addEventListener('keydown', onKeyDown);
     return () => document.removeEventListener('keydown', onKeyDown);

@@ -12,10 +12,13 @@ const lineY = 57;
 /** As recorded (ring) to chosen (disc) between pulling apart and adding fully; the other choices as ticks. */
 export function LowEndLine({
   recordedDb,
+  recordedLabel = 'as recorded',
   chosen,
   others,
 }: {
   recordedDb: number;
+  /** Of the ring. */
+  recordedLabel?: string;
   chosen: LineTick;
   others: LineTick[];
 }) {
@@ -37,7 +40,7 @@ export function LowEndLine({
         width={widthPx}
         height={endsY + 8}
         role="img"
-        aria-label={describe(recordedDb, chosen)}
+        aria-label={describe({ recordedDb, recordedLabel, chosen })}
         style={{ display: 'block' }}
       >
         <defs>
@@ -67,7 +70,14 @@ export function LowEndLine({
           </PictureText>
         ))}
         <EndPoints
-          {...{ recordedX: x(recordedDb), chosenX: x(chosen.levelDb), recordedDb, chosen, widthPx }}
+          {...{
+            recordedX: x(recordedDb),
+            chosenX: x(chosen.levelDb),
+            recordedDb,
+            recordedLabel,
+            chosen,
+            widthPx,
+          }}
         />
         <PictureText x={left} y={endsY} fill={ink.muted}>
           {narrow ? 'apart −3 dB' : 'pull apart −3 dB'}
@@ -87,11 +97,12 @@ interface EndPointsProps {
   recordedX: number;
   chosenX: number;
   recordedDb: number;
+  recordedLabel: string;
   chosen: LineTick;
   widthPx: number;
 }
 
-function EndPoints({ recordedX, chosenX, recordedDb, chosen, widthPx }: EndPointsProps) {
+function EndPoints({ recordedX, chosenX, recordedDb, recordedLabel, chosen, widthPx }: EndPointsProps) {
   const moved = Math.abs(chosenX - recordedX) > 16;
   const outward = chosenX >= recordedX ? 1 : -1;
   const fits = (x: number, way: number, text: string) =>
@@ -134,8 +145,8 @@ function EndPoints({ recordedX, chosenX, recordedDb, chosen, widthPx }: EndPoint
         </>
       )}
       <circle cx={recordedX} cy={lineY} r={7} fill={ink.sheet} stroke={ink.ink} strokeWidth="2.2" />
-      {label(recordedX, -outward, withLevelOffAxis('as recorded', recordedDb))}
-      {chosen.label !== 'as recorded' && (
+      {label(recordedX, -outward, withLevelOffAxis(recordedLabel, recordedDb))}
+      {chosen.label !== recordedLabel && (
         <>
           <circle cx={chosenX} cy={lineY} r={moved ? 8 : 4} fill={ink.ink} />
           {label(chosenX, outward, withLevelOffAxis(chosen.label, chosen.levelDb))}
@@ -149,9 +160,13 @@ function EndPoints({ recordedX, chosenX, recordedDb, chosen, widthPx }: EndPoint
 const withLevelOffAxis = (label: string, levelDb: number) =>
   levelDb < axisDb.min ? `${label}, ${signedDecibels(levelDb)}` : label;
 
-function describe(recordedDb: number, chosen: LineTick): string {
+function describe({
+  recordedDb,
+  recordedLabel,
+  chosen,
+}: Pick<EndPointsProps, 'recordedDb' | 'recordedLabel' | 'chosen'>): string {
   return (
-    `Low end of the two added, against no help and no harm: as recorded ${signedDecibels(recordedDb)}; ` +
+    `Low end of the two added, against no help and no harm: ${recordedLabel} ${signedDecibels(recordedDb)}; ` +
     `${chosen.label} ${signedDecibels(chosen.levelDb)}, a difference of ${signedDecibels(chosen.levelDb - recordedDb)}.`
   );
 }
