@@ -71,6 +71,33 @@ describe('a comparison', () => {
     expect(within(says).getByRole('row', { name: /^Adding up/ })).toHaveTextContent(/flip\..*keep\./);
   });
 
+  it('says nothing twice: what the word says is left out of the sentence', async () => {
+    const flip = {
+      topic: 'adding-up' as const,
+      status: 'fix' as const,
+      sentence:
+        'Flip the overhead: low end cancels in 8 of 8 hits, flipping returns 1.4 dB; no retake needed.',
+      why: '',
+      next: '',
+    };
+    const arrival = { ...flip, topic: 'arrival' as const, sentence: 'The overhead hears the kick later.' };
+    open(
+      {},
+      {
+        findings: [
+          { topic: 'arrival', before: arrival, after: null },
+          { topic: 'adding-up', before: flip, after: null },
+        ],
+      },
+    );
+    const says = await screen.findByRole('table', { name: 'What each take says' });
+    const [before, after] = within(within(says).getByRole('row', { name: /^Adding up/ })).getAllByRole(
+      'cell',
+    );
+    expect(before).toHaveTextContent(/^flip\. Low end cancels in 8 of 8 hits, flipping returns 1\.4 dB\.$/);
+    expect(after).toHaveTextContent('–');
+  });
+
   it('tells each change in a word, or that there is none, or why it can’t', async () => {
     open();
     const changed = await screen.findByRole('table', { name: 'What changed, and how surely' });

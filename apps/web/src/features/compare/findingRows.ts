@@ -50,14 +50,24 @@ export function findingRows(
     .map(({ title, topics, word }) => {
       const side = (which: 'before' | 'after', report: ReportResponse): SaidSide | null => {
         const own = findings.flatMap((row) => (topics.includes(row.topic) ? (row[which] ?? []) : []));
-        const worst = own.reduce<Finding | null>(
-          (top, each) =>
-            top === null || severity.indexOf(each.status) < severity.indexOf(top.status) ? each : top,
-          null,
+        const [worst = null] = own.sort(
+          (a, b) =>
+            severity.indexOf(a.status) - severity.indexOf(b.status) ||
+            topics.indexOf(a.topic) - topics.indexOf(b.topic),
         );
         return worst && { word: word(report, worst), finding: worst };
       };
       return { title, before: side('before', before), after: side('after', after) };
     })
     .filter((row) => row.before ?? row.after);
+}
+
+/** What the word before it says already. */
+const saidByWord = /^(Flip|Keep|Can’t tell|Mixed)\b[^:;]*: /;
+
+/** What is so, after its word; what to do about it stands on the sheet. */
+export function saidBriefly({ sentence }: Finding): string {
+  const [first] = sentence.replace(saidByWord, '').split(';');
+  const told = first.charAt(0).toUpperCase() + first.slice(1);
+  return told.endsWith('.') ? told : `${told}.`;
 }

@@ -18,17 +18,26 @@ export const PairTable = chakra('table', {
       fontWeight: 400,
       overflowWrap: 'anywhere',
     },
-    '& tr': { borderBottom: '1px solid', borderColor: 'rule' },
+    '& tr': {
+      borderBottom: '1px solid',
+      borderColor: 'rule',
+      // On a phone the topic stands above its two cells; roles keep it a table.
+      display: { base: 'grid', md: 'table-row', _print: 'table-row' },
+      gridTemplateColumns: '1fr 1fr',
+    },
+    '& tr > th:first-of-type': {
+      gridColumn: '1 / -1',
+      paddingBottom: { base: '1px', md: '7px' },
+    },
     '& thead th': { fontWeight: 600 },
     '& tbody th': { color: 'ink.muted' },
   },
 });
 
-/** On a phone the topic stands above its two cells. */
 export function PairColumns() {
   return (
     <colgroup>
-      <Box as="col" width={{ base: '24%', md: '132px' }} />
+      <Box as="col" width="132px" />
       <col />
       <col />
     </colgroup>

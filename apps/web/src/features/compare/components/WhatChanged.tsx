@@ -13,7 +13,7 @@ import { ChangeTable } from './ChangeTable';
 type Props = Pick<ComparisonResponse, 'before' | 'after' | 'figures'>;
 type Figure = ComparisonResponse['figures'][number];
 
-const columns = '148px 204px minmax(124px, 1fr) 112px minmax(96px, auto)';
+const columns = '150px 190px minmax(0, 1fr) 96px 108px';
 const areas = {
   base: '"label word" "picture picture" "values change"',
   lg: '"label picture values change word"',
@@ -21,7 +21,7 @@ const areas = {
 
 /** Every figure in steps worth mentioning, on one axis: ring before, disc after. */
 export function WhatChanged({ before, after, figures }: Props) {
-  const { ref, widthPx } = useWidth<HTMLDivElement>(204);
+  const { ref, widthPx } = useWidth<HTMLDivElement>(190);
   const [open, setOpen] = useState(false);
   const axis = { steps: axisSteps(figures), widthPx };
   return (
@@ -91,13 +91,25 @@ function FigureRow({ figure, axis }: { figure: Figure; axis: ChangeAxis }) {
         <ChangeMarksRow {...{ figure, axis }} />
         <chakra.span srOnly>{rowText(figure)}</chakra.span>
       </Box>
-      <Box role="cell" gridArea="values" color={figure.change === null ? 'ink.muted' : undefined}>
+      <Box
+        role="cell"
+        gridArea="values"
+        whiteSpace="nowrap"
+        color={figure.change === null ? 'ink.muted' : undefined}
+      >
         {fromToText(figure)}
       </Box>
       <Box role="cell" gridArea="change" color="ink.muted" textAlign={{ base: 'right', lg: 'left' }}>
         {intervalText(figure)}
       </Box>
-      <Box role="cell" gridArea="word" textAlign="right" color={muted} fontWeight={figure.clear ? 600 : 400}>
+      <Box
+        role="cell"
+        gridArea="word"
+        textAlign="right"
+        whiteSpace="nowrap"
+        color={muted}
+        fontWeight={figure.clear ? 600 : 400}
+      >
         {wordText(figure)}
       </Box>
     </Row>

@@ -1,8 +1,8 @@
 import { chakra } from '@chakra-ui/react';
 import type { ComparisonResponse } from '@thudline/contracts';
-import { missing } from '../../../lib/format';
-import { relativeDate } from '../../takes/relativeDate';
+import { dateTime, missing } from '../../../lib/format';
 import { useNow } from '../../takes/hooks/useNow';
+import { relativeDate } from '../../takes/relativeDate';
 import { MarkedName, PairColumns, PairTable } from './PairTable';
 import { TakeMark } from './TakeMark';
 
@@ -12,29 +12,33 @@ type Props = Pick<ComparisonResponse, 'before' | 'after' | 'differed' | 'same' |
 export function WhatDiffered({ before, after, differed, same, polarity }: Props) {
   const now = useNow();
   const head = (which: 'before' | 'after', take: typeof before) => (
-    <th scope="col">
+    <th role="columnheader" scope="col">
       <MarkedName mark={<TakeMark which={which} />}>
-        take {take.number}, {relativeDate(take.recordedAt, now)}
+        take {take.number}, {recordedWords(take.recordedAt, now)}
       </MarkedName>
     </th>
   );
   return (
     <>
-      <PairTable aria-label="What differed">
+      <PairTable role="table" aria-label="What differed">
         <PairColumns />
         <thead>
-          <tr>
-            <th scope="col">What differed</th>
+          <tr role="row">
+            <th role="columnheader" scope="col">
+              What differed
+            </th>
             {head('before', before)}
             {head('after', after)}
           </tr>
         </thead>
         <tbody>
           {differed.map((row) => (
-            <tr key={row.what}>
-              <th scope="row">{row.what}</th>
-              <td>{row.before || missing}</td>
-              <td>
+            <tr role="row" key={row.what}>
+              <th role="rowheader" scope="row">
+                {row.what}
+              </th>
+              <td role="cell">{row.before || missing}</td>
+              <td role="cell">
                 <b>{row.after || missing}</b>
               </td>
             </tr>
@@ -48,4 +52,10 @@ export function WhatDiffered({ before, after, differed, same, polarity }: Props)
       </chakra.p>
     </>
   );
+}
+
+/** Takes of one evening are told apart by the hour. */
+function recordedWords(iso: string, now: Date): string {
+  const words = relativeDate(iso, now);
+  return /today|ago|just/.test(words) ? words : dateTime(iso);
 }

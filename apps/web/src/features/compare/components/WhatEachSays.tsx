@@ -1,8 +1,8 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
-import type { ComparisonResponse, Finding, ReportResponse } from '@thudline/contracts';
+import type { ComparisonResponse, ReportResponse } from '@thudline/contracts';
 import { StatusMark, statusColor } from '../../../components/StatusMark';
 import { missing } from '../../../lib/format';
-import { findingRows, type SaidSide } from '../findingRows';
+import { findingRows, saidBriefly, type SaidSide } from '../findingRows';
 import { PairColumns, PairTable } from './PairTable';
 
 interface Props {
@@ -14,10 +14,10 @@ interface Props {
 export function WhatEachSays({ comparison, reports }: Props) {
   const { before, after } = comparison;
   return (
-    <PairTable aria-label="What each take says">
+    <PairTable role="table" aria-label="What each take says">
       <PairColumns />
       <chakra.thead srOnly>
-        <tr>
+        <tr role="row">
           <th scope="col">About</th>
           <th scope="col">take {before.number}</th>
           <th scope="col">take {after.number}</th>
@@ -25,8 +25,10 @@ export function WhatEachSays({ comparison, reports }: Props) {
       </chakra.thead>
       <chakra.tbody borderTop="1px solid" borderColor="rule">
         {findingRows(comparison.findings, reports).map((row) => (
-          <tr key={row.title}>
-            <th scope="row">{row.title}</th>
+          <tr role="row" key={row.title}>
+            <th role="rowheader" scope="row">
+              {row.title}
+            </th>
             <Side said={row.before} />
             <Side said={row.after} />
           </tr>
@@ -37,23 +39,18 @@ export function WhatEachSays({ comparison, reports }: Props) {
 }
 
 function Side({ said }: { said: SaidSide | null }) {
-  if (!said) return <td>{missing}</td>;
+  if (!said) return <td role="cell">{missing}</td>;
   return (
-    <td>
+    <td role="cell">
       <Flex gap={{ base: '6px', md: '10px' }} direction={{ base: 'column', md: 'row' }}>
         <Box lineHeight={0} paddingTop="1px">
           <StatusMark status={said.finding.status} sizePx={20} />
         </Box>
         <span>
-          <chakra.b color={statusColor(said.finding.status)}>{said.word}.</chakra.b> {shortened(said.finding)}
+          <chakra.b color={statusColor(said.finding.status)}>{said.word}.</chakra.b>{' '}
+          {saidBriefly(said.finding)}
         </span>
       </Flex>
     </td>
   );
 }
-
-/** What is so; what to do about it stands on the sheet. */
-const shortened = ({ sentence }: Finding) => {
-  const [first] = sentence.split(';');
-  return first.endsWith('.') ? first : `${first}.`;
-};

@@ -1,6 +1,12 @@
 import { ink } from '../../sheet/pictures/ink';
 import { PictureText } from '../../sheet/pictures/PictureText';
-import { changeMarks, smallBand, type ChangeAxis, type DrawnFigure } from './changeRowsLayout';
+import {
+  changeMarks,
+  smallBand,
+  type ChangeAxis,
+  type ChangeMarks,
+  type DrawnFigure,
+} from './changeRowsLayout';
 
 const heightPx = 28;
 const y = heightPx / 2;
@@ -27,7 +33,7 @@ export function ChangeMarksRow({ figure, axis }: { figure: DrawnFigure; axis: Ch
         <>
           <circle cx={marks.ringX} cy={y} r={6} fill={ink.sheet} stroke={ink.ink} strokeWidth="2.2" />
           {marks.arrow && <Arrow {...marks.arrow} />}
-          <circle cx={marks.discX} cy={y} r={5.2} fill={ink.ink} />
+          <circle cx={marks.discX} cy={y} r={inRing(marks) ? 3 : 5.2} fill={ink.ink} />
         </>
       ) : (
         <PictureText x={middle} y={y + 5} textAnchor="middle" fontSize={15} bold fill={ink.muted}>
@@ -37,6 +43,9 @@ export function ChangeMarksRow({ figure, axis }: { figure: DrawnFigure; axis: Ch
     </svg>
   );
 }
+
+/** Where nothing moved the ring is still to be seen. */
+const inRing = ({ discX, ringX }: ChangeMarks) => Math.abs(discX - ringX) < 3;
 
 function Arrow({ fromX, toX }: { fromX: number; toX: number }) {
   const back = Math.sign(fromX - toX) * 6;

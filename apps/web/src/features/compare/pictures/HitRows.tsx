@@ -60,7 +60,7 @@ export function HitRows({ reports, names, listening, chosen, onChoose }: HitRows
         )}
         {chosenX !== null && <path d={`M${chosenX - 5} 0h10l-5 8z`} fill={ink.ink} />}
         <Playhead listening={listening} x={scale.x} />
-        {ticksMs({ fromMs: time.startS, toMs: time.endS }, widthPx < 480 ? 3 : 6).map((timeS) => (
+        {[0, ...ticksMs({ fromMs: 0, toMs: time.endS }, widthPx < 480 ? 3 : 6)].map((timeS) => (
           <PictureText key={timeS} x={scale.x(timeS)} y={heightPx - 4} textAnchor="middle" fill={ink.muted}>
             {clock(timeS)}
           </PictureText>
