@@ -155,3 +155,10 @@ async function showMeasurement(
     await route.fulfill({ response: answer, json: { ...take, measurement, hasReport: false } });
   });
 }
+
+test('compare', async ({ page }) => {
+  const [before, after] = [await getDemoTake(starTitle), await getDemoTake('Flipped, kick')];
+  await page.goto(`/compare/${before.id}/${after.id}`);
+  await expect(line(page)).toBeVisible();
+  await takeShots(page, 'compare');
+});

@@ -5,6 +5,11 @@ import type { ReactNode } from 'react';
 export const PairTable = chakra('table', {
   base: {
     width: '100%',
+    // On a phone the topic stands above its two cells; roles keep it a table.
+    display: { base: 'block', md: 'table', _print: 'table' },
+    '& > colgroup': { display: { base: 'none', md: 'table-column-group', _print: 'table-column-group' } },
+    '& > thead': { display: { base: 'block', md: 'table-header-group', _print: 'table-header-group' } },
+    '& > tbody': { display: { base: 'block', md: 'table-row-group', _print: 'table-row-group' } },
     tableLayout: 'fixed',
     borderCollapse: 'collapse',
     fontSize: 'small',
@@ -21,7 +26,6 @@ export const PairTable = chakra('table', {
     '& tr': {
       borderBottom: '1px solid',
       borderColor: 'rule',
-      // On a phone the topic stands above its two cells; roles keep it a table.
       display: { base: 'grid', md: 'table-row', _print: 'table-row' },
       gridTemplateColumns: '1fr 1fr',
     },
