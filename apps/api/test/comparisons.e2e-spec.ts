@@ -1,5 +1,12 @@
 import { randomUUID } from 'node:crypto';
-import { comparisonResponse, ComparisonResponse, paths, TakeResponse } from '@thudline/contracts';
+import {
+  comparisonResponse,
+  ComparisonResponse,
+  paths,
+  SetupResponse,
+  TakeResponse,
+  UpdateSetupRequest,
+} from '@thudline/contracts';
 import { bytesSource, measureTake, openWav, TakeMeasurement } from '@thudline/dsp';
 import { getScenario, synthesiseTake } from '@thudline/fixtures';
 import { Browser, joined, Person, Upload } from './support/person';
@@ -142,6 +149,41 @@ describe('comparing two takes', () => {
       { what: 'tags', before: 'chorus', after: '' },
       { what: 'note', before: 'As always.', after: 'A little lower.' },
     ]);
+  });
+
+  it('sets what is written down of both setups beside each other, and takes a flip from there', async () => {
+    const setupOf = async (fields: UpdateSetupRequest) =>
+      (await juno.post(paths.setups, fields).expect(201)).body as SetupResponse;
+    const usual = await setupOf({ name: 'usual', kick: { insideCm: 8 }, kickPreamp: { gainDb: 38 } });
+    const flipped = await setupOf({
+      name: 'flipped',
+      kick: { insideCm: 8 },
+      kickPreamp: { gainDb: 31.5 },
+      overheadPreamp: { polarity: true },
+    });
+    const before = await takeOf(hot, { setupId: usual.id });
+    const after = await takeOf(flippedKickDown, { setupId: flipped.id });
+    const { differed, same, polarity } = await compared(before, after);
+    expect(differed).toEqual([
+      { what: 'setup', before: 'usual', after: 'flipped' },
+      { what: 'kick preamp', before: '38 dB', after: '31.5 dB' },
+      { what: 'overhead polarity', before: 'not pressed', after: 'pressed' },
+    ]);
+    expect(same).toBe('The same in both setups: positions.');
+    expect(polarity).toMatchObject({ noted: true, seen: 'flipped', confirmed: true });
+  });
+
+  it('matches hits by strength where both setups write down the same gains', async () => {
+    const gains = { kickPreamp: { gainDb: 38 }, overheadPreamp: { gainDb: 42 } };
+    const setup = (await juno.post(paths.setups, { name: 'kept', ...gains }).expect(201))
+      .body as SetupResponse;
+    const [before, after] = [
+      await takeOf(hot, { setupId: setup.id }),
+      await takeOf(hot, { setupId: setup.id }),
+    ];
+    const { figures, same } = await compared(before, after);
+    expect(figures.find(({ key }) => key === 'attack')).toMatchObject({ clear: false, reason: null });
+    expect(same).toBe('Setup of both: kept.');
   });
 
   it('refuses takes that aren’t measured yet', async () => {

@@ -25,7 +25,12 @@ interface ComparedParts {
 }
 
 export function comparisonResponseOf({ before, after, reader, rights }: ComparedParts): ComparisonResponse {
-  const noted = between({ before: before.take, after: after.take, rights });
+  const noted = between({
+    before: before.take,
+    after: after.take,
+    rights,
+    lengthUnit: reader.lengthUnit,
+  });
   const figures = {
     before: reportFigures(before.facts, before.owner),
     after: reportFigures(after.facts, after.owner),

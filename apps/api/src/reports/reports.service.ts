@@ -12,6 +12,7 @@ import { storedFacts } from './report-columns';
 import { ListFigures, listFiguresOf, reportResponseOf } from './reports.mapper';
 
 export interface MeasuredTake {
+  /** With its setup. */
   take: Take;
   /** Whose target and temperature the take is judged by. */
   owner: UserSettings;
@@ -62,6 +63,7 @@ export class ReportsService {
   async getMeasured(takeId: string): Promise<MeasuredTake> {
     const { take, report, owner } = await this.getReport({ takeId });
     const spectrum = await this.spectrumOf(report);
+    await this.em.populate(take, ['setup']);
     return {
       take,
       owner,
