@@ -31,7 +31,8 @@ test.describe('the demo player', () => {
     await expect(page.getByRole('img', { name: /^Third-octaves of the two added/ })).toBeVisible();
     await expectReadable(page, 'a comparison');
 
-    await page.getByRole('button', { name: /^Both, from hit \d+/ }).click();
+    await walkToFirstHit(page);
+    await page.getByRole('button', { name: 'Both, from hit 1' }).click();
     await expect(page.getByRole('button', { name: 'Stop', exact: true })).toBeVisible();
     await expect(page.getByText(/^equally loud: take \d+ down \d+\.\d dB/)).toBeVisible();
     await page.keyboard.press('1');
@@ -77,6 +78,13 @@ test('two chosen takes are compared; an inverted overhead is told though nothing
   await page.getByRole('link', { name: 'swap them' }).click();
   await expect(line(page)).toHaveText(/^The overhead was flipped: \d\.\d dB of low end was lost/);
 });
+
+/** The loudest hit may be the last one, with too little after it to listen to. */
+async function walkToFirstHit(page: Page): Promise<void> {
+  const play = page.getByRole('button', { name: /^Both, from hit/ });
+  const hits = Number((await play.innerText()).match(/\d+/)?.[0]);
+  for (let hit = hits; hit > 1; hit--) await page.keyboard.press('ArrowLeft');
+}
 
 async function uploadInverted(page: Page, scenario: string): Promise<void> {
   const { sampleRateHz, kick, overhead } = synthesiseTake(getScenario(scenario).parameters);
