@@ -5,10 +5,11 @@ import { createOverheadHits, type OverheadHit } from './hits/overheadHits';
 import { selectKicks } from './hits/selectKicks';
 import type { KickCandidate } from './hits/kickCandidates';
 import { hum } from './level/hum';
-import { createTrackLevel, type TrackLevel, type TrackLevelFacts } from './level/trackLevel';
 import { createLateStart } from './lateStart/lateStart';
+import { createTrackLevel, levelBorder, type TrackLevel, type TrackLevelFacts } from './level/trackLevel';
 import { lockstep } from './lockstep';
-import { createPeaks, type TrackPeaks } from './peaks/peaks';
+import { createPeaks, peakBorder, type TrackPeaks } from './peaks/peaks';
+import { createSpanCutter } from './spans';
 
 export interface StreamedTake {
   readonly levels: readonly (TrackLevelFacts & { readonly hum: HumFacts | null })[];
@@ -38,12 +39,16 @@ export async function streamTake(options: StreamTakeOptions): Promise<StreamedTa
   const starts = createLateStart(sampleRateHz);
   const struck = createOverheadHits({ sampleRateHz, trackCount: sources.length, overhead });
   const frames = Math.min(...sources.map((source) => source.frames));
+  const cutters = sources.map(() => createSpanCutter([levelBorder(sampleRateHz), peakBorder({ frames })]));
   const outlines = sources.map(() => createPeaks({ frames }));
   let same = kick !== overhead;
   let read = 0;
   for await (const pieces of lockstep(sources)) {
-    pieces.forEach((piece, track) => levels[track].push(piece));
-    pieces.forEach((piece, track) => outlines[track].push(piece));
+    pieces.forEach((piece, track) => {
+      const spans = cutters[track].cut(piece);
+      levels[track].push(piece, spans);
+      outlines[track].push(piece, spans);
+    });
     starts.push(candidates.push(pieces[kick], pieces[overhead]));
     struck.push(pieces);
     same &&= alike(pieces[kick], pieces[overhead]);

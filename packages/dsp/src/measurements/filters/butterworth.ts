@@ -54,7 +54,7 @@ export function butterworthBand(band: {
   readonly sampleRateHz: number;
   readonly lowHz: number;
   readonly highHz: number;
-}): Biquad[] {
+}): [highPass: Biquad, lowPass: Biquad] {
   return [
     butterworthHighPass({ sampleRateHz: band.sampleRateHz, cutoffHz: band.lowHz }),
     butterworthLowPass({ sampleRateHz: band.sampleRateHz, cutoffHz: band.highHz }),

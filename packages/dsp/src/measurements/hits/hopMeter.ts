@@ -1,5 +1,5 @@
-import type { Biquad } from '../filters/butterworth';
-import { createFilterChain } from '../filters/filterChain';
+import { createBandEnergy } from '../filters/bandEnergy';
+import { butterworthBand } from '../filters/butterworth';
 
 /**
  * Length of one hop. Shorter than any rise of a drum hit that matters here, and short enough for its own rises to be
@@ -14,87 +14,61 @@ export function hopSamples(sampleRateHz: number): number {
 
 /** One value for every hop of 2 ms. */
 export interface HopMeter {
-  /** @returns the values of the hops that this block completed */
+  /** @returns the values of the hops that this block completed; the array is used again for the next block */
   push(block: Float32Array): Float64Array;
 }
 
-type Samples = Float32Array | Float64Array;
-
-interface Stretch {
-  readonly from: number;
-  readonly to: number;
+export interface Band {
+  readonly lowHz: number;
+  readonly highHz: number;
 }
 
-interface Fold {
-  /** Takes a stretch of samples into the value so far, which starts at 0. */
-  take(soFar: number, samples: Samples, stretch: Stretch): number;
-  end(value: number, samples: number): number;
+/** @returns the value of a whole hop; hops are given in order */
+type HopValue = (samples: Float32Array, from: number, to: number) => number;
+
+/** Mean square of each hop in a band (Butterworth, second order on either side). */
+export function createHopEnergy(sampleRateHz: number, band: Band): HopMeter {
+  const energy = createBandEnergy(butterworthBand({ sampleRateHz, ...band }));
+  return createHopMeter(hopSamples(sampleRateHz), (samples, from, to) => {
+    return energy.next(samples, from, to) / (to - from);
+  });
 }
 
-const meanSquareFold: Fold = {
-  take(soFar, samples, { from, to }) {
-    let sum = soFar;
-    for (let i = from; i < to; i += 1) sum += samples[i] * samples[i];
-    return sum;
-  },
-  end: (value, samples) => value / samples,
-};
-const peakFold: Fold = {
-  take(soFar, samples, { from, to }) {
-    let peak = soFar;
+/** Largest |x| of each hop. */
+export function createHopPeak(sampleRateHz: number): HopMeter {
+  return createHopMeter(hopSamples(sampleRateHz), (samples, from, to) => {
+    let peak = 0;
     for (let i = from; i < to; i += 1) {
       const size = samples[i] < 0 ? -samples[i] : samples[i];
       if (size > peak) peak = size;
     }
     return peak;
-  },
-  end: (value) => value,
-};
-
-/** Mean square of each hop after filtering; `sections` as in {@link createFilterChain}. */
-export function createHopEnergy(sampleRateHz: number, sections: readonly Biquad[]): HopMeter {
-  return createHopFold(sampleRateHz, { fold: meanSquareFold, sections });
+  });
 }
 
-/** Largest |x| of each hop. */
-export function createHopPeak(sampleRateHz: number): HopMeter {
-  return createHopFold(sampleRateHz, { fold: peakFold, sections: [] });
-}
-
-function createHopFold(
-  sampleRateHz: number,
-  { fold, sections }: { fold: Fold; sections: readonly Biquad[] },
-): HopMeter {
-  const size = hopSamples(sampleRateHz);
-  const chain = sections.length > 0 ? createFilterChain(sections) : null;
-  let scratch = new Float64Array(0);
-  let value = 0;
+/** Hands over whole hops, also where a block ends within one. */
+function createHopMeter(size: number, valueOf: HopValue): HopMeter {
+  const carried = new Float32Array(size);
   let filled = 0;
-  const prepared = (block: Float32Array): Samples => {
-    if (!chain) return block;
-    if (scratch.length < block.length) scratch = new Float64Array(block.length);
-    const output = scratch.subarray(0, block.length);
-    chain.process(block, output);
-    return output;
-  };
+  let values = new Float64Array(0);
   return {
     push(block) {
-      const samples = prepared(block);
-      const values = new Float64Array(Math.floor((filled + samples.length) / size));
-      let count = 0;
-      for (let from = 0; from < samples.length;) {
-        const to = Math.min(samples.length, from + size - filled);
-        value = fold.take(value, samples, { from, to });
-        filled += to - from;
-        from = to;
-        if (filled === size) {
-          values[count] = fold.end(value, size);
-          count += 1;
-          value = 0;
-          filled = 0;
-        }
+      const count = Math.floor((filled + block.length) / size);
+      if (values.length < count) values = new Float64Array(count);
+      let done = 0;
+      let from = 0;
+      if (filled > 0) {
+        from = Math.min(block.length, size - filled);
+        carried.set(block.subarray(0, from), filled);
+        filled += from;
+        if (filled < size) return values.subarray(0, 0);
+        values[done] = valueOf(carried, 0, size);
+        done += 1;
       }
-      return values;
+      for (; done < count; done += 1, from += size) values[done] = valueOf(block, from, from + size);
+      carried.set(block.subarray(from));
+      filled = block.length - from;
+      return values.subarray(0, count);
     },
   };
 }

@@ -1,4 +1,3 @@
-import { butterworthBand } from '../filters/butterworth';
 import { createHopEnergy, HOP_MS, hopSamples } from './hopMeter';
 import { createLevelHistogram, flooredPowerDb } from './levelHistogram';
 import { createRiseFinder, type RiseState } from './riseFinder';
@@ -36,8 +35,7 @@ export interface KickCandidateFinder {
 }
 
 /** The band a kick is found in (section 3). */
-const LOW_HZ = 30;
-const HIGH_HZ = 150;
+const BAND = { lowHz: 30, highHz: 150 };
 /** A rise of more than 6 dB in 30 ms; tried on 2,231 real channels. */
 const RISE = { riseDb: 6, withinMs: 30, over: 'lowest' } as const;
 /**
@@ -62,8 +60,7 @@ interface OpenCandidate {
  * Which of them are hits is decided by {@link selectKicks} once the whole take is known.
  */
 export function createKickCandidates(sampleRateHz: number): KickCandidateFinder {
-  const sections = butterworthBand({ sampleRateHz, lowHz: LOW_HZ, highHz: HIGH_HZ });
-  const meters = [createHopEnergy(sampleRateHz, sections), createHopEnergy(sampleRateHz, sections)];
+  const meters = [createHopEnergy(sampleRateHz, BAND), createHopEnergy(sampleRateHz, BAND)];
   const kickRises = createRiseFinder({ windowMs: WINDOW_MS, ...RISE });
   const overheadLevel = createRiseFinder({ windowMs: WINDOW_MS, ...RISE });
   const histogram = createLevelHistogram();

@@ -1,5 +1,4 @@
 import type { HitKind } from '../../facts';
-import { butterworthBand } from '../filters/butterworth';
 import { median } from '../statistics';
 import { createHopEnergy, createHopPeak, HOP_MS, hopSamples } from './hopMeter';
 import { createLevelHistogram, flooredPowerDb } from './levelHistogram';
@@ -68,8 +67,8 @@ export interface OverheadHitsOptions {
 /** Finds what the overhead hears struck, in the one pass over all tracks; memory only for the hits. */
 export function createOverheadHits(options: OverheadHitsOptions): OverheadHitFinder {
   const { sampleRateHz, trackCount, overhead } = options;
-  const body = createHopEnergy(sampleRateHz, butterworthBand({ sampleRateHz, ...BODY_BAND }));
-  const bright = createHopEnergy(sampleRateHz, butterworthBand({ sampleRateHz, ...BRIGHT_BAND }));
+  const body = createHopEnergy(sampleRateHz, BODY_BAND);
+  const bright = createHopEnergy(sampleRateHz, BRIGHT_BAND);
   const peakMeters = Array.from({ length: trackCount }, () => createHopPeak(sampleRateHz));
   const rises = createRiseFinder(RISE);
   const brightRises = createRiseFinder(RISE);

@@ -37,6 +37,8 @@ const STEEPNESS_HOPS = 2;
 export function createRiseFinder({ windowMs, riseDb, withinMs, over }: RiseOptions): RiseFinder {
   const window = new Float64Array(Math.max(1, Math.round(windowMs / HOP_MS)));
   const past = new Float64Array(Math.max(1, Math.round(withinMs / HOP_MS)));
+  // Beside the powers, since a logarithm costs more than all else here.
+  const pastDb = new Float64Array(past.length).fill(flooredPowerDb(0));
   let hop = 0;
   const state: RiseState = { levelDb: flooredPowerDb(0), begins: false, rising: false, addedPower: 0 };
   return {
@@ -45,12 +47,15 @@ export function createRiseFinder({ windowMs, riseDb, withinMs, over }: RiseOptio
       let sum = 0;
       for (let i = 0; i < window.length; i += 1) sum += window[i];
       const power = sum / window.length;
-      const before = over === 'lowest' ? lowest(past) : past[hop % past.length];
+      const at = hop % past.length;
+      const beforeDb = over === 'lowest' ? lowest(pastDb) : pastDb[at];
       const justBefore = past[(hop - STEEPNESS_HOPS + past.length * STEEPNESS_HOPS) % past.length];
-      past[hop % past.length] = power;
+      const levelDb = flooredPowerDb(power);
+      past[at] = power;
+      pastDb[at] = levelDb;
       hop += 1;
-      state.levelDb = flooredPowerDb(power);
-      const rising = state.levelDb - flooredPowerDb(before) > riseDb;
+      state.levelDb = levelDb;
+      const rising = levelDb - beforeDb > riseDb;
       state.begins = rising && !state.rising;
       state.rising = rising;
       state.addedPower = power - justBefore;
@@ -59,8 +64,8 @@ export function createRiseFinder({ windowMs, riseDb, withinMs, over }: RiseOptio
   };
 }
 
-function lowest(powers: Float64Array): number {
-  let least = powers[0];
-  for (let i = 1; i < powers.length; i += 1) if (powers[i] < least) least = powers[i];
+function lowest(levels: Float64Array): number {
+  let least = levels[0];
+  for (let i = 1; i < levels.length; i += 1) if (levels[i] < least) least = levels[i];
   return least;
 }

@@ -1,8 +1,9 @@
 import { amplitudeDb } from '../../decibel';
 import type { ClipRun, TrackFacts } from '../../facts';
+import { createSpanCutter, largestOfSpan, type Spans } from '../spans';
 
 export interface Clipping {
-  push(block: Float32Array): void;
+  push(block: Float32Array, spans?: Spans): void;
   result(): TrackFacts['clipping'];
 }
 
@@ -36,6 +37,7 @@ export function createClipping(options: { readonly quantisationStep: number | nu
   const { quantisationStep } = options;
   const isFloat = quantisationStep === null;
   const threshold = fullScaleOf(quantisationStep);
+  const alone = createSpanCutter([]);
   const runs: ClipRun[] = [];
   let closed = { runCount: 0, clippedSamples: 0 };
   let run = { start: 0, length: 0, isPositive: true, largest: 0, last: 0 };
@@ -63,11 +65,17 @@ export function createClipping(options: { readonly quantisationStep: number | nu
   };
 
   return {
-    push(block) {
-      for (let i = 0; i < block.length; i++) {
-        const sample = block[i];
-        if (sample >= threshold || sample <= -threshold) addToRun(sample, position + i);
-        else if (run.length > 0) closeRun();
+    push(block, spans = alone.cut(block)) {
+      for (let span = 0, from = 0; span < spans.count; from = spans.ends[span], span += 1) {
+        if (largestOfSpan(spans, span) < threshold) {
+          closeRun();
+          continue;
+        }
+        for (let i = from; i < spans.ends[span]; i++) {
+          const sample = block[i];
+          if (sample >= threshold || sample <= -threshold) addToRun(sample, position + i);
+          else if (run.length > 0) closeRun();
+        }
       }
       position += block.length;
     },

@@ -1,7 +1,8 @@
 import type { TrackFacts } from '../../facts';
+import { createSpanCutter, type Spans } from '../spans';
 
 export interface Dropouts {
-  push(block: Float32Array): void;
+  push(block: Float32Array, spans?: Spans): void;
   result(): { readonly dropouts: NonNullable<TrackFacts['dropouts']> };
 }
 
@@ -30,6 +31,21 @@ const jumpNeighbours = 32;
 const placeS = 0.25;
 const placesKept = 10_000;
 
+/** Sound that came back after zeros, and how much of it was heard. */
+interface Back {
+  energy: number;
+  /** Samples still to hear. */
+  left: number;
+  /** Where the zeros began, and where hearing goes on, in the file. */
+  readonly start: number;
+  heardTo: number;
+}
+
+interface Range {
+  readonly from: number;
+  readonly to: number;
+}
+
 /**
  * Where samples are missing: sound that stops at zero from one sample to the next and comes back as suddenly, or a wave
  * that jumps.
@@ -41,46 +57,85 @@ export function createDropouts(options: DropoutsOptions): Dropouts {
   const longest = Math.round(longestZerosS * options.sampleRateHz);
   const enough = Math.max(soundPower, (stepsOfSound * (options.quantisationStep ?? 0)) ** 2);
   const behind = Math.max(window + shortestZeros, 2 * (jumpNeighbours + 2));
+  const alone = createSpanCutter([]);
   let joined: Float32Array = new Float32Array(behind);
   const places: number[] = [];
-  let zeros = { length: 0, afterSound: false };
-  let back = { energy: 0, left: 0, start: 0 };
+  /** How long the zeros are that the last block ended in; 0 where it ended in sound. */
+  let openZeros = { length: 0, afterSound: false };
+  let back: Back | null = null;
   let position = 0;
 
   const keep = (at: number): void => {
     if (places.length < placesKept) places.push(at);
   };
-  const endZeros = (at: number): void => {
-    if (zeros.length >= shortestZeros && zeros.length <= longest && zeros.afterSound)
-      back = { energy: 0, left: window, start: at - zeros.length };
-    zeros = { length: 0, afterSound: false };
+  const hearBack = (samples: Float32Array, offset: number, end: number): void => {
+    if (!back) return;
+    const from = back.heardTo - offset;
+    const to = Math.min(end, from + back.left);
+    back.energy += energyOf(samples, from, to);
+    back.heardTo += to - from;
+    back.left -= to - from;
+    if (back.left > 0) return;
+    if (back.energy / window >= enough) keep(back.start);
+    back = null;
   };
-  const seeBack = (sample: number): void => {
-    back.energy += sample * sample;
-    back.left -= 1;
-    if (back.left === 0 && back.energy / window >= enough) keep(back.start);
+  const seeZeros = (samples: Float32Array, offset: number): void => {
+    const end = samples.length;
+    // A run of zeros that counts holds one of these places, wherever it begins.
+    const first = behind + ((shortestZeros - (position % shortestZeros)) % shortestZeros);
+    for (let at = openZeros.length > 0 ? behind : first; at < end;) {
+      if (openZeros.length === 0 && samples[at] !== 0) {
+        at += shortestZeros;
+        continue;
+      }
+      let { length, afterSound } = openZeros;
+      if (length === 0) {
+        let start = at;
+        while (start > behind - shortestZeros && samples[start - 1] === 0) start -= 1;
+        length = at - start;
+        afterSound = powerOf(samples, start - window, start) >= enough;
+      }
+      while (at < end && samples[at] === 0) {
+        at += 1;
+        length += 1;
+      }
+      openZeros = { length, afterSound };
+      if (at === end) return;
+      openZeros = { length: 0, afterSound: false };
+      if (length >= shortestZeros && length <= longest && afterSound) {
+        hearBack(samples, offset, at);
+        back = { energy: 0, left: window, start: offset + at - length, heardTo: offset + at };
+      }
+      at += gridAfter(offset + at) - (offset + at);
+    }
   };
-  const seeZero = (samples: Float32Array, i: number): void => {
-    zeros.length += 1;
-    if (zeros.length !== shortestZeros) return;
-    const end = i + 1 - shortestZeros;
-    zeros.afterSound = powerOf(samples, end - window, end) >= enough;
+  /** A jump is looked at once enough samples after it are here. */
+  const seeJumps = (samples: Float32Array, offset: number, { from, to }: Range): void => {
+    let before = samples[from - 1];
+    for (let at = from; at < to; at += 1) {
+      const sample = samples[at];
+      const jump = Math.abs(sample - before);
+      before = sample;
+      if (jump >= smallestJump && isAlone(samples, at, jump)) keep(offset + at);
+    }
   };
 
   return {
-    push(block) {
+    push(block, spans = alone.cut(block)) {
       joined = withBlock(joined, behind, block);
       const samples = joined.subarray(0, behind + block.length);
       const offset = position - behind;
-      for (let i = behind; i < samples.length; i += 1) {
-        const sample = samples[i];
-        if (sample === 0) seeZero(samples, i);
-        else if (zeros.length > 0) endZeros(offset + i);
-        if (back.left > 0) seeBack(sample);
-        // The jump is looked at once enough samples after it are here.
-        const at = i - jumpNeighbours - 1;
-        const jump = Math.abs(samples[at] - samples[at - 1]);
-        if (jump >= smallestJump && isAlone(samples, at, jump)) keep(offset + at);
+      seeZeros(samples, offset);
+      hearBack(samples, offset, samples.length);
+      const last = samples.length - jumpNeighbours - 1;
+      seeJumps(samples, offset, { from: behind - jumpNeighbours - 1, to: Math.min(behind, last) });
+      let from = behind;
+      for (let span = 0; span < spans.count && from < last; span += 1) {
+        const to = behind + spans.ends[span];
+        const high = Math.max(spans.highs[span], samples[from - 1]);
+        const low = Math.min(spans.lows[span], samples[from - 1]);
+        if (high - low >= smallestJump) seeJumps(samples, offset, { from, to: Math.min(to, last) });
+        from = to;
       }
       joined.copyWithin(0, block.length, samples.length);
       position += block.length;
@@ -111,10 +166,18 @@ function withBlock(joined: Float32Array, behind: number, block: Float32Array): F
   return fitting;
 }
 
+function gridAfter(at: number): number {
+  return (Math.floor(at / shortestZeros) + 1) * shortestZeros;
+}
+
 function powerOf(samples: Float32Array, start: number, end: number): number {
+  return energyOf(samples, start, end) / (end - start);
+}
+
+function energyOf(samples: Float32Array, start: number, end: number): number {
   let energy = 0;
   for (let i = start; i < end; i += 1) energy += samples[i] * samples[i];
-  return energy / (end - start);
+  return energy;
 }
 
 /**
@@ -122,11 +185,13 @@ function powerOf(samples: Float32Array, start: number, end: number): number {
  * file's first sample, a jump is a cut or the zeros' own business.
  */
 function isAlone(samples: Float32Array, at: number, jump: number): boolean {
+  const most = jump / steeper;
   let [mostBefore, mostAfter] = [0, 0];
   for (let away = 2; away <= jumpNeighbours + 1; away += 1) {
     mostBefore = Math.max(mostBefore, Math.abs(samples[at - away] - samples[at - away - 1]));
     mostAfter = Math.max(mostAfter, Math.abs(samples[at + away] - samples[at + away - 1]));
+    // Nearly always so at the first step, which makes this fast.
+    if (mostBefore > most || mostAfter > most) return false;
   }
-  const most = Math.max(mostBefore, mostAfter);
-  return Math.min(mostBefore, mostAfter) > 0 && most * steeper <= jump;
+  return mostBefore > 0 && mostAfter > 0;
 }

@@ -1,9 +1,10 @@
 import { amplitudeDb } from '../../decibel';
 import type { ClipRun, TrackFacts } from '../../facts';
+import { createSpanCutter, largestOfSpan, type Spans } from '../spans';
 import { runsKept } from './clipping';
 
 export interface FlatTops {
-  push(block: Float32Array): void;
+  push(block: Float32Array, spans?: Spans): void;
   result(): {
     /** Flat tops below full scale, as clipping; none where there are fewer than two. */
     readonly flat: TrackFacts['clipping'];
@@ -37,6 +38,12 @@ const stepsOfRoundTop = 6;
 /** A float file may hold what once was 16-bit. */
 const floatStep = 2 ** -15;
 
+/**
+ * Spans with nothing near the take's own peak, the two before such a one left out, are passed by: no top can lie in them,
+ * and before one it is soon clear where runs begin, since two samples that differ begin one.
+ */
+const spansBefore = 2;
+
 interface Tops {
   count: number;
   samples: number;
@@ -59,6 +66,7 @@ export function createFlatTops(options: FlatTopsOptions): FlatTops {
   let run = { value: 0, before: 0, start: 0, length: 0 };
   let lastSample = 0;
   const like = createLikeRuns(step);
+  const alone = createSpanCutter([]);
   let position = 0;
 
   const closeRun = (closed: typeof run, after: number): void => {
@@ -72,33 +80,49 @@ export function createFlatTops(options: FlatTopsOptions): FlatTops {
     flat.set(size, { ...tops, count: tops.count + 1, samples: tops.samples + closed.length });
   };
 
-  return {
-    push(block) {
-      // Locals, for speed: see peakAndPower.
-      let { value, before, start, length } = run;
-      let previous = lastSample;
-      peak = Math.max(peak, largestSample(block));
-      for (let i = 0; i < block.length; i += 1) {
-        const sample = block[i];
-        const isLoud = sample >= quietestPeak || sample <= -quietestPeak;
-        if (length > 0 && sample !== value) {
-          if (length >= shortest) closeRun({ value, before, start, length }, sample);
-          length = 0;
-          if (!isLoud) like.end(sample);
-        }
-        if (isLoud) {
-          like.see(sample, previous);
-          if (length === 0) {
-            value = sample;
-            before = previous;
-            start = position + i;
-          }
-          length += 1;
-        }
-        previous = sample;
+  const look = (block: Float32Array, from: number, to: number): void => {
+    // Locals: a number that a closure keeps is written to the heap each time.
+    let { value, before, start, length } = run;
+    let previous = lastSample;
+    for (let i = from; i < to; i += 1) {
+      const sample = block[i];
+      const isLoud = sample >= quietestPeak || sample <= -quietestPeak;
+      if (length > 0 && sample !== value) {
+        if (length >= shortest) closeRun({ value, before, start, length }, sample);
+        length = 0;
+        if (!isLoud) like.end(sample);
       }
-      run = { value, before, start, length };
-      lastSample = previous;
+      if (isLoud) {
+        like.see(sample, previous);
+        if (length === 0) {
+          value = sample;
+          before = previous;
+          start = position + i;
+        }
+        length += 1;
+      }
+      previous = sample;
+    }
+    run = { value, before, start, length };
+    lastSample = previous;
+  };
+  const passBy = (last: number): void => {
+    run.length = 0;
+    like.forget();
+    lastSample = last;
+  };
+
+  return {
+    push(block, spans = alone.cut(block)) {
+      for (let span = 0; span < spans.count; span += 1) peak = Math.max(peak, largestOfSpan(spans, span));
+      const least = Math.max(quietestPeak, peak * likeNearPeak) * (1 - likeWithin);
+      let from = 0;
+      for (let span = 0; span < spans.count; span += 1) {
+        const to = spans.ends[span];
+        if (isWorthALook(spans, span, least)) look(block, from, to);
+        else passBy(block[to - 1]);
+        from = to;
+      }
       position += block.length;
     },
     result: () => ({
@@ -108,13 +132,12 @@ export function createFlatTops(options: FlatTopsOptions): FlatTops {
   };
 }
 
-function largestSample(block: Float32Array): number {
-  let largest = 0;
-  for (let i = 0; i < block.length; i += 1) {
-    const size = Math.abs(block[i]);
-    if (size > largest) largest = size;
+/** The last spans of a block are always worth it: what comes after them isn't here yet. */
+function isWorthALook(spans: Spans, span: number, least: number): boolean {
+  for (let ahead = span; ahead <= span + spansBefore; ahead += 1) {
+    if (ahead >= spans.count || largestOfSpan(spans, ahead) >= least) return true;
   }
-  return largest;
+  return false;
 }
 
 /** Runs of nearly equal samples that are entered and left steeply; only the three largest are kept. */
@@ -136,6 +159,9 @@ function createLikeRuns(step: number) {
   };
   return {
     end,
+    forget(): void {
+      length = 0;
+    },
     see(sample: number, previous: number): void {
       const size = Math.abs(sample);
       const nowLeast = size < least ? size : least;

@@ -1,8 +1,10 @@
 import { powerDb } from '../../decibel';
 import type { TrackFacts } from '../../facts';
+import { createSpanCutter, everySamples, type Spans } from '../spans';
 
 export interface NoiseFloor {
-  push(block: Float32Array): void;
+  /** @param spans - cut at the ends of frames, see {@link noiseFrameSamples} */
+  push(block: Float32Array, spans?: Spans): void;
   result(): Pick<TrackFacts, 'noiseFloorDbfs' | 'noiseFloorReason'>;
   quietStretch(): QuietStretch | null;
 }
@@ -26,6 +28,11 @@ const widestHalvesDb = 1.5;
 /** What double rounding leaves of a constant; a real converter's noise lies far above. */
 const roundingPower = 1e-12;
 
+/** @returns the length of the frames that a noise floor is looked for in */
+export function noiseFrameSamples(sampleRateHz: number): number {
+  return Math.max(1, Math.round(frameS * sampleRateHz));
+}
+
 /**
  * RMS of the lowest steady second: twenty 50 ms frames that stay within 6 dB, with halves that differ by 1.5 dB at most.
  *
@@ -36,7 +43,8 @@ const roundingPower = 1e-12;
  * @returns a meter whose result is null with a reason where no second qualifies
  */
 export function createNoiseFloor(options: { readonly sampleRateHz: number }): NoiseFloor {
-  const frameLength = Math.max(1, Math.round(frameS * options.sampleRateHz));
+  const frameLength = noiseFrameSamples(options.sampleRateHz);
+  const alone = createSpanCutter([everySamples(frameLength)]);
   const frames: Frame[] = [];
   let sum = 0;
   let energy = 0;
@@ -63,17 +71,11 @@ export function createNoiseFloor(options: { readonly sampleRateHz: number }): No
   };
 
   return {
-    push(block) {
-      for (let i = 0; i < block.length;) {
-        const end = Math.min(block.length, i + frameLength - filled);
-        filled += end - i;
-        // Locals, for speed: see peakAndPower.
-        let [frameSum, frameEnergy] = [sum, energy];
-        for (; i < end; i++) {
-          frameSum += block[i];
-          frameEnergy += block[i] * block[i];
-        }
-        [sum, energy] = [frameSum, frameEnergy];
+    push(block, spans = alone.cut(block)) {
+      for (let span = 0, from = 0; span < spans.count; from = spans.ends[span], span += 1) {
+        filled += spans.ends[span] - from;
+        sum += spans.sums[span];
+        energy += spans.energies[span];
         if (filled === frameLength) closeFrame();
       }
     },

@@ -1,6 +1,7 @@
 import { SignalError } from '../../assert';
 import { amplitudeDb, powerDb } from '../../decibel';
 import type { TrackFacts } from '../../facts';
+import { createSpanCutter, largestOfSpan, type Spans } from '../spans';
 
 export type PeakAndPowerFacts = Pick<
   TrackFacts,
@@ -8,7 +9,7 @@ export type PeakAndPowerFacts = Pick<
 >;
 
 export interface PeakAndPower {
-  push(block: Float32Array): void;
+  push(block: Float32Array, spans?: Spans): void;
   result(): PeakAndPowerFacts;
 }
 
@@ -22,6 +23,7 @@ export interface PeakAndPower {
  * @returns a meter; `push` throws {SignalError} `not-finite`
  */
 export function createPeakAndPower(options: { readonly sampleRateHz: number }): PeakAndPower {
+  const alone = createSpanCutter([]);
   let peak = 0;
   let peakAt = 0;
   let sum = 0;
@@ -29,25 +31,19 @@ export function createPeakAndPower(options: { readonly sampleRateHz: number }): 
   let count = 0;
 
   return {
-    push(block) {
-      // Locals: a number that a closure keeps is written to the heap each time, which costs more than the sum.
-      let [blockPeak, blockSum, blockEnergy] = [peak, sum, energy];
-      let blockPeakAt = -1;
-      for (let i = 0; i < block.length; i++) {
-        const sample = block[i];
-        const size = Math.abs(sample);
-        if (size > blockPeak) {
-          blockPeak = size;
-          blockPeakAt = i;
+    push(block, spans = alone.cut(block)) {
+      for (let span = 0, from = 0; span < spans.count; from = spans.ends[span], span += 1) {
+        sum += spans.sums[span];
+        energy += spans.energies[span];
+        const largest = largestOfSpan(spans, span);
+        if (largest > peak) {
+          peak = largest;
+          peakAt = count + firstOfSize(block, from, largest);
         }
-        blockSum += sample;
-        blockEnergy += sample * sample;
       }
-      if (!Number.isFinite(blockEnergy)) {
+      if (!Number.isFinite(energy)) {
         throw new SignalError('not-finite', 'The track holds a value that is no number.');
       }
-      if (blockPeakAt >= 0) peakAt = count + blockPeakAt;
-      [peak, sum, energy] = [blockPeak, blockSum, blockEnergy];
       count += block.length;
     },
     result() {
@@ -63,4 +59,10 @@ export function createPeakAndPower(options: { readonly sampleRateHz: number }): 
       };
     },
   };
+}
+
+function firstOfSize(block: Float32Array, from: number, size: number): number {
+  let at = from;
+  while (at < block.length - 1 && Math.abs(block[at]) !== size) at += 1;
+  return at;
 }

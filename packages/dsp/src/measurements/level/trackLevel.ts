@@ -5,7 +5,8 @@ import { createDropouts } from './dropouts';
 import { createFlatTops } from './flatTops';
 import { joinedRuns } from './joinedRuns';
 import { createLoudness } from '../loudness/loudness';
-import { createNoiseFloor, type QuietStretch } from './noiseFloor';
+import { createSpanCutter, everySamples, type Border, type Spans } from '../spans';
+import { createNoiseFloor, noiseFrameSamples, type QuietStretch } from './noiseFloor';
 import { createPeakAndPower } from './peakAndPower';
 import { createTruePeak } from './truePeak';
 
@@ -19,11 +20,19 @@ export type TrackLevelFacts = Omit<TrackFacts, 'role' | 'loudestHitDbfs' | 'hum'
 
 /** Sees a track once, in blocks of any size; the figures don't depend on how it was cut. */
 export interface TrackLevel {
-  /** @throws {SignalError} `not-finite` */
-  push(block: Float32Array): void;
+  /**
+   * @param spans - cut at the {@link levelBorder}
+   * @throws {SignalError} `not-finite`
+   */
+  push(block: Float32Array, spans?: Spans): void;
   result(): TrackLevelFacts;
   /** Where the noise floor was measured, for what is looked for in it; null where it can't be told. */
   quietStretch(): QuietStretch | null;
+}
+
+/** @returns where spans must end so that levels can be told from them */
+export function levelBorder(sampleRateHz: number): Border {
+  return everySamples(noiseFrameSamples(sampleRateHz));
 }
 
 /**
@@ -41,6 +50,7 @@ export function createTrackLevel(options: TrackLevelOptions): TrackLevel {
   assertPositive(options.sampleRateHz, 'sampleRateHz');
   if (options.quantisationStep !== null)
     assertBetween(options.quantisationStep, 2 ** -31, 0.5, 'quantisationStep');
+  const alone = createSpanCutter([levelBorder(options.sampleRateHz)]);
   const peakAndPower = createPeakAndPower(options);
   const clipping = createClipping(options);
   const noiseFloor = createNoiseFloor(options);
@@ -52,8 +62,8 @@ export function createTrackLevel(options: TrackLevelOptions): TrackLevel {
   const meters = [peakAndPower, clipping, noiseFloor, truePeak, loudness, flatTops, dropouts];
 
   return {
-    push(block) {
-      for (const meter of meters) meter.push(block);
+    push(block, spans = alone.cut(block)) {
+      for (const meter of meters) meter.push(block, spans);
     },
     result() {
       const { flat, looksFlattened } = flatTops.result();

@@ -1,16 +1,17 @@
 import { assertPositive } from '../../assert';
 import { amplitudeDb } from '../../decibel';
+import { createSpanCutter, largestOfSpan, type Spans } from '../spans';
 import { truePeakPhases, truePeakTaps } from './truePeakFilter';
 
 export interface TruePeak {
-  push(block: Float32Array): void;
+  push(block: Float32Array, spans?: Spans): void;
   result(): { readonly truePeakDbtp: number | null };
 }
 
 /** From these rates on a take is interpolated 2 times, and not at all (BS.1770-5 Annex 2, and section 2 of the design). */
 const twofoldFromHz = 96_000;
 const singleFromHz = 192_000;
-/** Samples that are looked at together; short enough that one hit doesn't drag its decay along. Our choice, for speed. */
+/** Samples that are looked at together within a span; short enough that one hit doesn't drag its decay along. Our choice, for speed. */
 const stretchLength = 32;
 const historyLength = truePeakTaps - 1;
 /** Keeps the bound a bound after rounding. */
@@ -37,27 +38,41 @@ export function createTruePeak(options: { readonly sampleRateHz: number }): True
   const phases = phasesAt(options.sampleRateHz);
   const mostGain = largestGain(phases) * roundingSlack;
   // The last samples of the block before stand in front of the block, so that one loop sees them all.
-  let joined = new Float64Array(historyLength);
+  let joined = new Float32Array(historyLength);
+  const alone = createSpanCutter([]);
   let peak = 0;
+  let before = 0;
 
   return {
-    push(block) {
+    push(block, spans = alone.cut(block)) {
       const length = historyLength + block.length;
       if (joined.length < length) {
-        const longer = new Float64Array(length);
+        const longer = new Float32Array(length);
         longer.set(joined.subarray(0, historyLength));
         joined = longer;
       }
       joined.set(block, historyLength);
       const samples = joined.subarray(0, length);
-      peak = largestOf(samples, { phases, mostGain, atLeast: peak });
+      for (let span = 0, from = 0; span < spans.count; from = spans.ends[span], span += 1) {
+        const here = largestOfSpan(spans, span);
+        peak = Math.max(peak, here);
+        const to = spans.ends[span];
+        if (Math.max(before, here) * mostGain > peak) {
+          const stretch = { start: historyLength + from, end: historyLength + to };
+          peak = largestOf(samples, stretch, { phases, mostGain, atLeast: peak });
+        }
+        // A short span doesn't hold all the filter remembers.
+        before = to - from < historyLength ? Math.max(before, here) : here;
+      }
       joined.copyWithin(0, length - historyLength, length);
     },
     result() {
       // The filter rings on after the last sample.
-      const tail = new Float64Array(2 * historyLength);
+      const tail = new Float32Array(2 * historyLength);
       tail.set(joined.subarray(0, historyLength));
-      return { truePeakDbtp: amplitudeDb(largestOf(tail, { phases, mostGain, atLeast: peak })) };
+      const stretch = { start: historyLength, end: tail.length };
+      const largest = largestOf(tail, stretch, { phases, mostGain, atLeast: peak });
+      return { truePeakDbtp: amplitudeDb(largest) };
     },
   };
 }
@@ -72,26 +87,28 @@ function largestGain(phases: readonly Float64Array[]): number {
   return Math.max(0, ...phases.map((taps) => taps.reduce((sum, tap) => sum + Math.abs(tap), 0)));
 }
 
-/** @param samples - led in by `historyLength` earlier ones */
+/** @param samples - at least `historyLength` of them before `start` */
 function largestOf(
-  samples: Float64Array,
+  samples: Float32Array,
+  { start: first, end: last }: { start: number; end: number },
   options: { phases: readonly Float64Array[]; mostGain: number; atLeast: number },
 ): number {
   const { phases, mostGain } = options;
-  let peak = Math.max(options.atLeast, largestSample(samples, historyLength, samples.length));
-  let before = largestSample(samples, 0, historyLength);
-  for (let start = historyLength; start < samples.length; start += stretchLength) {
-    const end = Math.min(samples.length, start + stretchLength);
+  let peak = options.atLeast;
+  let before = largestSample(samples, first - historyLength, first);
+  for (let start = first; start < last; start += stretchLength) {
+    const end = Math.min(last, start + stretchLength);
     const here = largestSample(samples, start, end);
     if (Math.max(before, here) * mostGain > peak) {
       for (const taps of phases) peak = Math.max(peak, largestOutput(samples, { taps, start, end }));
     }
+    // A last stretch may be short, but nothing comes after it.
     before = here;
   }
   return peak;
 }
 
-function largestSample(samples: Float64Array, start: number, end: number): number {
+function largestSample(samples: Float32Array, start: number, end: number): number {
   let largest = 0;
   for (let i = start; i < end; i += 1) {
     const size = Math.abs(samples[i]);
@@ -101,7 +118,7 @@ function largestSample(samples: Float64Array, start: number, end: number): numbe
 }
 
 function largestOutput(
-  samples: Float64Array,
+  samples: Float32Array,
   { taps, start, end }: { taps: Float64Array; start: number; end: number },
 ): number {
   let largest = 0;

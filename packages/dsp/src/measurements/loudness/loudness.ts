@@ -1,6 +1,6 @@
 import { assertPositive } from '../../assert';
 import { dbPower, powerDb } from '../../decibel';
-import { createFilterChain } from '../filters/filterChain';
+import { createBandEnergy } from '../filters/bandEnergy';
 import { kWeighting } from './kWeighting';
 
 export interface Loudness {
@@ -33,11 +33,10 @@ const relativeGateDb = -10;
  */
 export function createLoudness(options: { readonly sampleRateHz: number }): Loudness {
   assertPositive(options.sampleRateHz, 'sampleRateHz');
-  const filter = createFilterChain(kWeighting(options.sampleRateHz));
+  const weighted = createBandEnergy(kWeighting(options.sampleRateHz));
   const stepEnd = (step: number): number => Math.round((step + 1) * stepS * options.sampleRateHz);
   const steps: { energy: number; length: number }[] = [];
   const blockPowers: number[] = [];
-  let weighted = new Float64Array(0);
   let current = { energy: 0, length: 0 };
   let stepCount = 0;
   let position = 0;
@@ -52,16 +51,12 @@ export function createLoudness(options: { readonly sampleRateHz: number }): Loud
 
   return {
     push(block) {
-      if (weighted.length < block.length) weighted = new Float64Array(block.length);
-      const samples = weighted.subarray(0, block.length);
-      filter.process(block, samples);
-      for (let i = 0; i < samples.length;) {
-        const end = Math.min(samples.length, i + stepEnd(stepCount) - position);
-        const length = end - i;
-        let { energy } = current;
-        for (; i < end; i += 1) energy += samples[i] * samples[i];
-        current = { energy, length: current.length + length };
-        position += length;
+      for (let from = 0; from < block.length;) {
+        const to = Math.min(block.length, from + stepEnd(stepCount) - position);
+        current.energy += weighted.next(block, from, to);
+        current.length += to - from;
+        position += to - from;
+        from = to;
         if (position === stepEnd(stepCount)) closeStep();
       }
     },

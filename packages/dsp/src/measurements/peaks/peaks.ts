@@ -1,4 +1,5 @@
 import { SignalError } from '../../assert';
+import { createSpanCutter, type Border, type Spans } from '../spans';
 
 /** The outline of one track at one resolution. */
 export interface PeakLevel {
@@ -12,7 +13,8 @@ export interface PeakLevel {
 export type TrackPeaks = readonly PeakLevel[];
 
 export interface PeaksMeter {
-  push(block: Float32Array): void;
+  /** @param spans - cut at the steps' ends, see {@link peakBorder} */
+  push(block: Float32Array, spans?: Spans): void;
   /** Steps that no sample reached are silent. */
   result(): TrackPeaks;
 }
@@ -28,6 +30,19 @@ export interface PeaksOptions {
 export const peakSteps: readonly number[] = [500, 2000, 8000];
 export const PEAK_FULL_SCALE = 127;
 
+/** @returns where the steps of {@link createPeaks} end */
+export function peakBorder(options: PeaksOptions): Border {
+  const { frames } = options;
+  const finest = wantedSteps(options).at(-1) ?? 1;
+  const endOf = (step: number): number => Math.floor(((step + 1) * frames) / finest);
+  return (at) => {
+    if (at >= frames) return Infinity;
+    let step = Math.floor((at * finest) / frames);
+    while (endOf(step) <= at) step += 1;
+    return endOf(step);
+  };
+}
+
 /**
  * Gathers the outline of a track in one pass, for the picture of the whole take.
  *
@@ -40,38 +55,39 @@ export const PEAK_FULL_SCALE = 127;
  * peaks.push(Float32Array.of(0, 1, -1, 0.5));
  * Array.from(peaks.result()[0].pairs) // [0, 127, -127, 64]
  */
-export function createPeaks({ frames, stepsPerLevel = peakSteps }: PeaksOptions): PeaksMeter {
-  const wanted = checked(stepsPerLevel).filter((steps) => steps <= frames);
-  const levels = wanted.length > 0 ? wanted : [Math.max(1, Math.floor(frames))];
+export function createPeaks(options: PeaksOptions): PeaksMeter {
+  const { frames } = options;
+  const levels = wantedSteps(options);
+  const alone = createSpanCutter([peakBorder(options)]);
   const finest = levels[levels.length - 1];
   const lows = new Float32Array(finest);
   const highs = new Float32Array(finest);
   let step = 0;
   let taken = 0;
   let stepStart = 0;
+  let stepEnd = Math.floor(frames / finest);
   return {
-    push(block) {
-      for (let from = 0; from < block.length && step < finest;) {
-        const stepEnd = Math.floor(((step + 1) * frames) / finest);
-        const to = Math.min(block.length, from + stepEnd - taken);
-        const first = taken === stepStart;
-        let [low, high] = first ? [Infinity, -Infinity] : [lows[step], highs[step]];
-        for (let i = from; i < to; i += 1) {
-          const sample = block[i];
-          if (sample < low) low = sample;
-          if (sample > high) high = sample;
-        }
-        if (to > from) [lows[step], highs[step]] = [low, high];
-        taken += to - from;
-        from = to;
+    push(block, spans = alone.cut(block)) {
+      for (let span = 0, from = 0; span < spans.count && step < finest; span += 1) {
+        const isFirst = taken === stepStart;
+        lows[step] = isFirst ? spans.lows[span] : Math.min(lows[step], spans.lows[span]);
+        highs[step] = isFirst ? spans.highs[span] : Math.max(highs[step], spans.highs[span]);
+        taken += spans.ends[span] - from;
+        from = spans.ends[span];
         if (taken === stepEnd) {
           step += 1;
           stepStart = taken;
+          stepEnd = Math.floor(((step + 1) * frames) / finest);
         }
       }
     },
     result: () => levels.map((steps) => ({ steps, pairs: merged(lows, highs, steps) })),
   };
+}
+
+function wantedSteps({ frames, stepsPerLevel = peakSteps }: PeaksOptions): readonly number[] {
+  const wanted = checked(stepsPerLevel).filter((steps) => steps <= frames);
+  return wanted.length > 0 ? wanted : [Math.max(1, Math.floor(frames))];
 }
 
 function checked(stepsPerLevel: readonly number[]): readonly number[] {
