@@ -1,8 +1,11 @@
 /** A stretch of bytes that can be read at any place: a disk file, an object, or a browser's File. */
 export interface ByteSource {
   readonly sizeBytes: number;
-  /** @returns the bytes from `start` (inclusive) to `end` (exclusive), cut at the end of the source */
-  read(start: number, end: number): Promise<Uint8Array>;
+  /**
+   * @param into - room that may be filled instead of new memory, if it is large enough; the caller's until the promise ends
+   * @returns the bytes from `start` (inclusive) to `end` (exclusive), cut at the end of the source
+   */
+  read(start: number, end: number, into?: Uint8Array): Promise<Uint8Array>;
 }
 
 /** One microphone's samples: mono, full scale ±1.0. */

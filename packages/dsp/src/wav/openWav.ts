@@ -128,10 +128,21 @@ async function* byteBlocks(
   facts: WavFacts,
 ): AsyncGenerator<{ bytes: Uint8Array; frames: number }> {
   const step = blockFrames(facts);
+  // The next block is read while this one is measured, each into one of two rooms.
+  const rooms = [0, 1].map(() => new Uint8Array(step * facts.blockAlign));
+  const reading = (first: number): Promise<Uint8Array> => {
+    const at = facts.dataOffset + first * facts.blockAlign;
+    const frames = Math.min(step, facts.frames - first);
+    const bytes = source.read(at, at + frames * facts.blockAlign, rooms[(first / step) % 2]);
+    // Whoever stops early doesn't wait for it, so its failure is nobody's.
+    bytes.catch(() => undefined);
+    return bytes;
+  };
+  let ahead = reading(0);
   for (let first = 0; first < facts.frames; first += step) {
     const frames = Math.min(step, facts.frames - first);
-    const at = facts.dataOffset + first * facts.blockAlign;
-    const bytes = await source.read(at, at + frames * facts.blockAlign);
+    const bytes = await ahead;
+    if (first + step < facts.frames) ahead = reading(first + step);
     if (bytes.length < frames * facts.blockAlign) {
       throw new WavError('cut-off', 'This file became shorter while it was read; copy it again.');
     }

@@ -117,7 +117,7 @@ function windowed(samples: Float32Array, { onsetAt, toNext }: PairHit, sampleRat
   const end = Math.min(samples.length, onsetAt + Math.min(count(kickWindow.afterMs), toNext));
   const fadeIn = count(FADE_IN_MS);
   const fadeOut = (end - start) * FADE_OUT_SHARE;
-  const output = Float64Array.from(samples.subarray(start, Math.max(start, end)));
+  const output = new Float64Array(samples.subarray(start, Math.max(start, end)));
   for (let i = 0; i < output.length; i += 1) {
     const nearest = Math.min((i + 0.5) / fadeIn, (output.length - i - 0.5) / fadeOut);
     if (nearest < 1) output[i] *= 0.5 * (1 - Math.cos(Math.PI * nearest));

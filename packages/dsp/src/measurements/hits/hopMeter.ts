@@ -1,5 +1,4 @@
-import { createBandEnergy } from '../filters/bandEnergy';
-import { butterworthBand } from '../filters/butterworth';
+import { createButterworthEnergy } from '../filters/bandEnergy';
 
 /**
  * Length of one hop. Shorter than any rise of a drum hit that matters here, and short enough for its own rises to be
@@ -28,7 +27,7 @@ type HopValue = (samples: Float32Array, from: number, to: number) => number;
 
 /** Mean square of each hop in a band (Butterworth, second order on either side). */
 export function createHopEnergy(sampleRateHz: number, band: Band): HopMeter {
-  const energy = createBandEnergy(butterworthBand({ sampleRateHz, ...band }));
+  const energy = createButterworthEnergy({ sampleRateHz, ...band });
   return createHopMeter(hopSamples(sampleRateHz), (samples, from, to) => {
     return energy.next(samples, from, to) / (to - from);
   });

@@ -24,20 +24,28 @@ export interface ReadKickHitsOptions {
   readonly afterMs: number;
 }
 
-/** Reads the hits one after the other, each once, so that memory holds a single hit however many there are. */
+/** Reads the hits one after the other, each once and the next one ahead: memory holds two however many there are. */
 export async function* readKickHits(options: ReadKickHitsOptions): AsyncGenerator<KickHitRead> {
   const { kick, overhead, candidates } = options;
   const { sampleRateHz } = kick;
   const samples = (ms: number): number => Math.ceil((ms / 1000) * sampleRateHz);
   const before = samples(options.beforeMs);
   const after = samples(options.afterMs);
-  for (const { atSample } of candidates) {
-    const start = atSample - before - samples(onsetStretch.beforeMs);
-    const end = atSample + after + samples(onsetStretch.afterMs);
-    const [kickStretch, overheadStretch] = await Promise.all([
-      kick.read(start, end),
-      overhead.read(start, end),
-    ]);
+  const startOf = (atSample: number): number => atSample - before - samples(onsetStretch.beforeMs);
+  const read = (index: number): Promise<[Float32Array, Float32Array]> => {
+    const { atSample } = candidates[index];
+    const [start, end] = [startOf(atSample), atSample + after + samples(onsetStretch.afterMs)];
+    const both = Promise.all([kick.read(start, end), overhead.read(start, end)]);
+    // Whoever stops early doesn't wait for it, so its failure is nobody's.
+    both.catch(() => undefined);
+    return both;
+  };
+  let ahead = candidates.length > 0 ? read(0) : null;
+  for (let index = 0; ahead; index += 1) {
+    const { atSample } = candidates[index];
+    const start = startOf(atSample);
+    const [kickStretch, overheadStretch] = await ahead;
+    ahead = index + 1 < candidates.length ? read(index + 1) : null;
     const around = kickStretch.subarray(before, kickStretch.length - after);
     const candidateAt = atSample - start - before;
     const onsetAt = before + onset(around, { sampleRateHz, candidateAt });

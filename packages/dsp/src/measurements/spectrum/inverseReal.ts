@@ -1,5 +1,5 @@
 import FFT from 'fft.js';
-import type { RealSpectrum } from './realSpectrum';
+import { halfTurn, type RealSpectrum } from './realSpectrum';
 
 /**
  * A backward transform of fixed size, 1/N scaled, that reuses its tables.
@@ -9,20 +9,29 @@ import type { RealSpectrum } from './realSpectrum';
  *   larger `size` interpolates between samples. Results are new arrays.
  */
 export function createInverseReal(size: number): (spectrum: RealSpectrum) => Float64Array {
-  const fft = new FFT(size);
-  const bins = new Float64Array(2 * size);
-  const output = new Float64Array(2 * size);
+  // The way of createRealTransform backwards: half the size, even samples as real parts, odd ones as imaginary parts.
+  const half = size / 2;
+  const fft = new FFT(half);
+  const bins = new Float64Array(size);
+  const { cosines, sines } = halfTurn(size);
   return ({ re, im }) => {
     bins.fill(0);
-    bins[0] = re[0];
-    // Twice the lower half instead of both halves: the real part of the result is the same.
-    for (let i = 1; i < re.length; i += 1) {
-      bins[2 * i] = 2 * re[i];
-      bins[2 * i + 1] = 2 * im[i];
+    const count = Math.min(re.length, half);
+    if (count > 0) [bins[0], bins[1]] = [re[0], re[0]];
+    for (let k = 1; k < count; k += 1) {
+      // Even and odd samples' spectra share a bin and its mirror; here the mirror itself is 0 or adds to what is there.
+      const turnedRe = re[k] * cosines[k] - im[k] * sines[k];
+      const turnedIm = re[k] * sines[k] + im[k] * cosines[k];
+      bins[2 * k] += re[k] - turnedIm;
+      bins[2 * k + 1] += im[k] + turnedRe;
+      const mirrored = 2 * (half - k);
+      bins[mirrored] += re[k] + turnedIm;
+      bins[mirrored + 1] += turnedRe - im[k];
     }
-    fft.inverseTransform(output, bins);
     const samples = new Float64Array(size);
-    for (let i = 0; i < size; i += 1) samples[i] = output[2 * i];
+    fft.inverseTransform(samples, bins);
+    // Both halves of the spectrum were added up, over half as many points.
+    for (let i = 0; i < size; i += 1) samples[i] /= 2;
     return samples;
   };
 }

@@ -21,24 +21,42 @@ export interface RealTransform {
  * @param size - a power of two
  */
 export function createRealTransform(size: number): RealTransform {
-  const fft = new FFT(size);
+  // Even samples as real parts, odd ones as imaginary parts: a transform of half the size, taken apart afterwards.
+  const half = size / 2;
+  const fft = new FFT(half);
   const input = new Float64Array(size);
-  const output = new Float64Array(2 * size);
-  const re = new Float64Array(size / 2 + 1);
-  const im = new Float64Array(size / 2 + 1);
+  const output = new Float64Array(size);
+  const { cosines, sines } = halfTurn(size);
+  const re = new Float64Array(half + 1);
+  const im = new Float64Array(half + 1);
   return {
     size,
     spectrum(samples) {
-      input.fill(0);
-      input.set(samples.length > size ? samples.subarray(0, size) : samples);
-      fft.realTransform(output, input);
-      for (let i = 0; i < re.length; i += 1) {
-        re[i] = output[2 * i];
-        im[i] = output[2 * i + 1];
+      const length = Math.min(size, samples.length);
+      input.set(length < samples.length ? samples.subarray(0, length) : samples);
+      input.fill(0, length);
+      fft.transform(output, input);
+      for (let k = 0; k <= half; k += 1) {
+        const at = 2 * (k % half);
+        const mirrored = 2 * ((half - k) % half);
+        const evenRe = (output[at] + output[mirrored]) / 2;
+        const evenIm = (output[at + 1] - output[mirrored + 1]) / 2;
+        const oddRe = (output[at + 1] + output[mirrored + 1]) / 2;
+        const oddIm = (output[mirrored] - output[at]) / 2;
+        re[k] = evenRe + cosines[k] * oddRe + sines[k] * oddIm;
+        im[k] = evenIm + cosines[k] * oddIm - sines[k] * oddRe;
       }
       return { re, im };
     },
   };
+}
+
+/** @returns cos and sin of 2πk/size, k = 0 … size/2 */
+export function halfTurn(size: number): { readonly cosines: Float64Array; readonly sines: Float64Array } {
+  const turn = (2 * Math.PI) / size;
+  const cosines = new Float64Array(size / 2 + 1).map((_, k) => Math.cos(turn * k));
+  const sines = new Float64Array(size / 2 + 1).map((_, k) => Math.sin(turn * k));
+  return { cosines, sines };
 }
 
 /** @returns the smallest power of two that is at least `length` */
