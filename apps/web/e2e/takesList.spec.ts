@@ -1,7 +1,9 @@
 import { expect, test, type Page } from '@playwright/test';
+import { takeFiles } from '@thudline/fixtures';
 import { starTitle } from './harness/apiSession';
 import { browserSettings } from './harness/browserSettings';
 import { expectReadable } from './harness/readable';
+import { wavFile } from './harness/wavFile';
 
 test.use({ storageState: browserSettings().playerState });
 
@@ -33,6 +35,17 @@ test('the demo says what its takes say, and a deleted one comes back', async ({ 
   await page.goto('/takes');
   await page.getByLabel(/^Find/).fill(starTitle);
   await expect(star(page)).toBeVisible();
+});
+
+test('files that were sent before are known again', async ({ page }) => {
+  const { kick, overhead } = takeFiles('good');
+  await page.goto('/takes/new');
+  await page
+    .getByLabel('WAV files')
+    .setInputFiles([wavFile('kick in.wav', kick), wavFile('oh.wav', overhead)]);
+  await expect(page.getByText('You sent these files before:')).toBeVisible();
+  await expect(page.getByRole('button', { name: 'Measure this take' })).toBeVisible();
+  await expectReadable(page, 'files sent before');
 });
 
 test('where nothing fits, wider filters are offered', async ({ page }) => {

@@ -21,6 +21,7 @@ export const paths = {
   setup: (setupId: string) => `/api/setups/${setupId}`,
   setupPhoto: (setupId: string) => `/api/setups/${setupId}/photo`,
   takes: '/api/takes',
+  sameFiles: '/api/takes/same-files',
   take: (takeId: string) => `/api/takes/${takeId}`,
   measurement: (takeId: string) => `/api/takes/${takeId}/measurement`,
   cancelMeasurement: (takeId: string) => `/api/takes/${takeId}/measurement/cancel`,

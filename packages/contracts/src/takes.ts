@@ -229,6 +229,29 @@ export const listTakesResponse = z.object({
 });
 export type ListTakesResponse = z.infer<typeof listTakesResponse>;
 
+/** Files that are about to be sent, by what is in them: SHA-256, with commas between. */
+export const sameFilesRequest = z.object({
+  sha256: z
+    .string()
+    .regex(
+      /^[0-9a-f]{64}(,[0-9a-f]{64}){0,9}$/,
+      'Name one to ten files by their SHA-256, with commas between.',
+    )
+    .transform((hashes) => hashes.split(',')),
+});
+export type SameFilesRequest = z.output<typeof sameFilesRequest>;
+
+/** The player's newest take that each of them is in; files that are new are not among them. */
+export const sameFilesResponse = z.object({
+  items: z.array(
+    z.object({
+      sha256: z.string().length(64),
+      take: z.object({ id: z.uuid(), number: z.int().positive(), title: z.string() }),
+    }),
+  ),
+});
+export type SameFilesResponse = z.infer<typeof sameFilesResponse>;
+
 /**
  * A short stretch of every track as little-endian float32, one track after the other in the order kick, overhead.
  * Headers: `X-Sample-Rate-Hz`, `X-Start-Frame`, `X-Frames`, `X-Tracks`.

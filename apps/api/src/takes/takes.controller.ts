@@ -6,7 +6,15 @@ import { Access } from '../access/access.decorator';
 import { OpenToReadOnly } from '../access/read-only';
 import { everything, TakeRights } from '../access/take-rights';
 import { CurrentRights, CurrentViewer, Viewer } from '../access/viewer';
-import { ListTakesDto, ListTakesResponseDto, TakeResponseDto, UpdateTakeDto } from './dto/take.dto';
+import {
+  ListTakesDto,
+  ListTakesResponseDto,
+  TakeResponseDto,
+  UpdateTakeDto,
+  SameFilesDto,
+  SameFilesResponseDto,
+} from './dto/take.dto';
+import { SameFilesService } from './same-files.service';
 import { TakeCreationService } from './take-creation.service';
 import { TakeListsService } from './take-lists.service';
 import { TakesService } from './takes.service';
@@ -19,6 +27,7 @@ export class TakesController {
   constructor(
     private readonly takes: TakesService,
     private readonly lists: TakeListsService,
+    private readonly files: SameFilesService,
     private readonly creation: TakeCreationService,
     private readonly uploads: TakeUploadsService,
   ) {}
@@ -44,6 +53,14 @@ export class TakesController {
     );
     response.status(created.isNew ? 201 : 200);
     return this.takes.whole(created.take, everything);
+  }
+
+  /** Asked before sending, so that nobody sends the same take twice without knowing. */
+  @Get('same-files')
+  @Access.signedIn()
+  @ZodResponse({ status: 200, type: SameFilesResponseDto })
+  sameFiles(@CurrentViewer() viewer: Viewer, @Query() query: SameFilesDto) {
+    return this.files.same(viewer, query);
   }
 
   @Get(':id')

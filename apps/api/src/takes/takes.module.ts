@@ -3,6 +3,7 @@ import { AuditModule } from '../audit/audit.module';
 import { MeasurementsModule } from '../measuring/measurements.module';
 import { ReportsModule } from '../reports/reports.module';
 import { StorageModule } from '../storage/storage.module';
+import { SameFilesService } from './same-files.service';
 import { TakeCreationService } from './take-creation.service';
 import { TakeListsService } from './take-lists.service';
 import { TakesController } from './takes.controller';
@@ -12,6 +13,6 @@ import { TakeUploadsService } from './upload/take-uploads.service';
 @Module({
   imports: [AuditModule, MeasurementsModule, ReportsModule, StorageModule],
   controllers: [TakesController],
-  providers: [TakesService, TakeListsService, TakeCreationService, TakeUploadsService],
+  providers: [TakesService, SameFilesService, TakeListsService, TakeCreationService, TakeUploadsService],
 })
 export class TakesModule {}

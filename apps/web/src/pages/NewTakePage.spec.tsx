@@ -58,6 +58,49 @@ const fromJson = (fields: Record<string, FormDataEntryValue>) =>
     ['tracks', 'doneActions', 'tags'].map((name) => [name, JSON.parse(fields[name] as string) as unknown]),
   );
 
+describe('files that were sent before', () => {
+  const { crypto } = globalThis;
+  /** jsdom can't hash; what a file holds stands for its hash here. */
+  beforeEach(() => {
+    const digest = (_name: string, bytes: ArrayBuffer) =>
+      Promise.resolve(
+        new Uint8Array(32).fill(new Uint8Array(bytes).reduce((sum, byte) => (sum + byte) % 251, 0)),
+      );
+    Object.defineProperty(globalThis, 'crypto', {
+      configurable: true,
+      value: { subtle: { digest }, getRandomValues: crypto.getRandomValues.bind(crypto) },
+    });
+  });
+  afterEach(() => Object.defineProperty(globalThis, 'crypto', { configurable: true, value: crypto }));
+
+  it('are told with the take they are, and can be sent all the same', async () => {
+    let asked = '';
+    const before = { id: takeId, number: 12, title: 'felt beater' };
+    const page = open({
+      [`GET ${paths.sameFiles}`]: () => {
+        asked = page.requests.findLast(({ path }) => path.startsWith(paths.sameFiles))!.path;
+        const items = asked
+          .split('sha256=')[1]
+          .split(',')
+          .map((sha256) => ({ sha256, take: before }));
+        return json({ items })();
+      },
+    });
+    await pick(page.container, kick(), overhead());
+    expect(await screen.findByText('You sent these files before:')).toBeInTheDocument();
+    expect(screen.getByText(/they are take 12, “felt beater”/)).toBeInTheDocument();
+    expect(asked).toMatch(/sha256=[0-9a-f]{64},[0-9a-f]{64}$/);
+    await measure();
+    await waitFor(() => expect(page.uploads).toHaveLength(1));
+  });
+
+  it('are not told where nothing is known of them, and nothing waits for it', async () => {
+    const page = open({ [`GET ${paths.sameFiles}`]: refusal(503, 'storage-unavailable', 'Away.') });
+    await sendPair(page);
+    expect(screen.queryByText(/sent before/)).not.toBeInTheDocument();
+  });
+});
+
 describe('the setup of a new take', () => {
   const setups = { [`GET ${paths.setups}`]: json({ items: [sampleSetupItem()] }) };
   afterEach(() => localStorage.clear());

@@ -14,7 +14,7 @@ export const TakeFile = defineEntity({
     /** As the client called it, made safe; our own name is the object key. */
     name: p.string().length(255),
     objectKey: p.string().length(255).unique(),
-    sha256: p.string().length(64),
+    sha256: p.string().length(64).index(),
     bytes: p.bigint('number'),
     /** For people: `24-bit PCM`. */
     encoding: p.string().length(60),

@@ -5,6 +5,7 @@ import { isReady, type PickedFile } from '../pickedFile';
 import { fileProgress } from '../uploadProgress';
 import { limitWords, rateWords } from '../uploadWords';
 import type { ChooseFiles } from './DropAnywhere';
+import { SentBefore } from './SentBefore';
 import { FileBeingRead, FileNotSent, TakeFileRow } from './PickedFileRow';
 
 /** Every picked file in its row, and the way to more. */
@@ -23,6 +24,7 @@ export function FileRows({ newTake, choose }: { newTake: NewTake; choose: Choose
           <Row key={picked.id} picked={picked} newTake={newTake} />
         ))}
       </chakra.ul>
+      <SentBefore files={newTake.arranged.used} />
       <Flex
         justifyContent="space-between"
         columnGap="24px"
