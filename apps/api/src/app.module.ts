@@ -20,6 +20,7 @@ import { SharesModule } from './shares/shares.module';
 import { SoundModule } from './sound/sound.module';
 import { TakesModule } from './takes/takes.module';
 import { TryOutsModule } from './tryouts/try-outs.module';
+import { RoomsModule } from './rooms/rooms.module';
 import { UsersModule } from './users/users.module';
 
 @Module({})
@@ -33,6 +34,7 @@ export class AppModule {
         databaseModule,
         AccessModule,
         AuthModule,
+        RoomsModule,
         UsersModule,
         TakesModule,
         SetupsModule,

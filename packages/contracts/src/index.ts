@@ -6,6 +6,7 @@ export * from './health';
 export * from './paths';
 export * from './photos';
 export * from './reports';
+export * from './rooms';
 export * from './setups';
 export * from './shares';
 export * from './takes';

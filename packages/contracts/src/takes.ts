@@ -46,6 +46,8 @@ export const createTakeRequest = z.object({
   followsTakeId: z.uuid().optional(),
   /** The player's setup it was recorded with. */
   setupId: z.uuid().optional(),
+  /** The player's room it was recorded in. */
+  roomId: z.uuid().optional(),
   /** Which actions of that take were carried out before this one; travels as JSON text. */
   doneActions: actionIds.default([]),
   /** Travels as JSON text. */
@@ -70,6 +72,7 @@ export const updateTakeRequest = z.object({
   tags: tags.optional(),
   /** One of the player's setups. */
   setupId: z.uuid().nullable().optional(),
+  roomId: z.uuid().nullable().optional(),
 });
 export type UpdateTakeRequest = z.infer<typeof updateTakeRequest>;
 
@@ -144,6 +147,8 @@ export const takeResponse = z.object({
   followedBy: z.object({ id: z.uuid(), number: z.int().positive() }).nullable(),
   /** What it was recorded with, for its player. */
   setup: z.object({ id: z.uuid(), name: z.string() }).nullable(),
+  /** Where it was recorded, for its player. */
+  room: z.object({ id: z.uuid(), name: z.string() }).nullable(),
   /** What the one who asks may do. */
   rights: z.object({ change: z.boolean(), listen: z.boolean(), download: z.boolean() }),
   /** Who recorded it, as others see them. */

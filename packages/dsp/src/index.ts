@@ -46,6 +46,7 @@ export * from './measurements/comparing/compareTakes';
 export * from './measurements/comparing/interval';
 export * from './measurements/comparing/medianDifference';
 export * from './measurements/comparing/polarityBetween';
+export * from './measurements/comparing/pooledTakes';
 export * from './measurements/comparing/rankTryOut';
 export * from './measurements/comparing/strengthMatch';
 export {
@@ -78,6 +79,7 @@ export type { TakeAndNext } from './report/outcomes/outcomeRule';
 export * from './findings/findings';
 export * from './findings/reportLine';
 export * from './findings/nextActions';
+export * from './findings/roomChange';
 export * from './findings/takeSummary';
 export * from './report/comparison/comparedNames';
 export * from './report/comparison/comparedPolarity';

@@ -4,6 +4,9 @@ import { Measurement } from '../measuring/entities/measurement.entity';
 import { Photo } from '../photos/entities/photo.entity';
 import { PairSpectrum } from '../reports/entities/pair-spectrum.entity';
 import { Report } from '../reports/entities/report.entity';
+import { RoomChangeTake } from '../rooms/entities/room-change-take.entity';
+import { RoomChange } from '../rooms/entities/room-change.entity';
+import { Room } from '../rooms/entities/room.entity';
 import { Setting } from '../settings/entities/setting.entity';
 import { Setup } from '../setups/entities/setup.entity';
 import { Share } from '../shares/entities/share.entity';
@@ -19,6 +22,9 @@ import { User } from '../users/entities/user.entity';
 export const entities = [
   User,
   Session,
+  Room,
+  RoomChange,
+  RoomChangeTake,
   Take,
   TakeFile,
   TakeTrack,

@@ -6,6 +6,7 @@ import { v7 } from 'uuid';
 import { Viewer } from '../access/viewer';
 import { AppError } from '../errors/app-error';
 import { MeasurementsService } from '../measuring/measurements.service';
+import { findRoom } from '../rooms/find-room';
 import { objectKeys } from '../storage/object-keys';
 import { ObjectStoreService } from '../storage/object-store.service';
 import { User } from '../users/entities/user.entity';
@@ -107,6 +108,7 @@ export class TakeCreationService {
         uploadKey: request.uploadKey,
         tags: request.tags,
         followsTake: await findFollowed(em, viewer, request),
+        room: await findRoom(em, viewer.user.id, request.roomId),
         doneActions: request.doneActions,
         setup: await findUsedSetup(em, owner.id, request.setupId),
       });

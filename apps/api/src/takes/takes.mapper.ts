@@ -44,15 +44,17 @@ export function takeResponseOf(whole: WholeTake): TakeResponse {
 
 type OwnersPart = Pick<
   TakeResponse,
-  'sheetVersions' | 'renewal' | 'tickedActions' | 'tags' | 'follows' | 'followedBy' | 'setup'
+  'sheetVersions' | 'renewal' | 'tickedActions' | 'tags' | 'follows' | 'followedBy' | 'room' | 'setup'
 >;
 
 function ownersPart({ take, versions, follows, followedBy, setup }: WholeTake): OwnersPart {
+  const room = take.room?.unwrap();
   return {
     ...versions,
     tickedActions: take.tickedActions,
     tags: take.tags,
     follows: follows && { id: follows.id, number: follows.number, title: follows.title },
+    room: room ? { id: room.id, name: room.name } : null,
     followedBy: followedBy && { id: followedBy.id, number: followedBy.number },
     setup: setup && { id: setup.id, name: setup.name },
   };
@@ -67,6 +69,7 @@ const othersPart: OwnersPart = {
   follows: null,
   followedBy: null,
   setup: null,
+  room: null,
 };
 
 function takeFileResponseOf(file: TakeFile): TakeResponse['files'][number] {

@@ -8,6 +8,7 @@ import { AuditService } from '../audit/audit.service';
 import { notFound } from '../errors/app-error';
 import { MeasurementsService } from '../measuring/measurements.service';
 import { SheetVersionsService } from '../measuring/sheet-versions.service';
+import { findRoom } from '../rooms/find-room';
 import { Setup } from '../setups/entities/setup.entity';
 import { restorableSince } from './deleted-takes';
 import { TakeFile } from './entities/take-file.entity';
@@ -39,7 +40,7 @@ export class TakesService {
       followsTake && this.em.findOne(Take, { id: followsTake.id, deletedAt: null }),
       this.em.findOne(Take, { followsTake: take.id, deletedAt: null }, { orderBy: { number: 'desc' } }),
       setup ? this.em.findOne(Setup, { id: setup.id }) : null,
-      this.em.populate(take, ['owner']),
+      this.em.populate(take, ['owner', 'room']),
     ]);
     const parts = { take, files, tracks, measurement, versions, rights };
     return takeResponseOf({ ...parts, follows: follows ?? null, followedBy, setup: usedSetup });
@@ -49,13 +50,14 @@ export class TakesService {
     const { tickedActions, ...others } = changes;
     if (!rights.change && Object.values(others).some((value) => value !== undefined)) throw readOnly();
     const take = await this.em.findOneOrFail(Take, { id: takeId });
-    const { title, note, tags, setupId } = others;
+    const { title, note, tags, setupId, roomId } = others;
     if (title !== undefined) take.title = title;
     if (note !== undefined) take.note = note;
     if (tickedActions !== undefined) take.tickedActions = tickedActions;
     if (tags !== undefined) take.tags = tags;
     if (setupId !== undefined)
       this.em.assign(take, { setup: await findUsedSetup(this.em, take.owner.id, setupId) });
+    if (roomId !== undefined) this.em.assign(take, { room: await findRoom(this.em, take.owner.id, roomId) });
     await this.em.flush();
     return this.whole(take, rights);
   }

@@ -60,6 +60,7 @@ export const sampleTake = (overrides: Partial<TakeResponse> = {}): TakeResponse 
   tags: [],
   follows: null,
   followedBy: null,
+  room: null,
   setup: null,
   rights: { change: true, listen: true, download: true },
   player: 'Juno',

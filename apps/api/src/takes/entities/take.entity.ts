@@ -1,6 +1,7 @@
 import { defineEntity, InferEntity, p } from '@mikro-orm/core';
 import { identity } from '../../database/identity';
 import { Setup } from '../../setups/entities/setup.entity';
+import { Room } from '../../rooms/entities/room.entity';
 import { User } from '../../users/entities/user.entity';
 
 export const Take = defineEntity({
@@ -8,6 +9,7 @@ export const Take = defineEntity({
   tableName: 'take',
   uniques: [{ properties: ['owner', 'uploadKey'] }, { properties: ['owner', 'number'] }],
   indexes: [
+    { properties: ['room', 'recordedAt'] },
     {
       name: 'take_newest_first_index',
       expression:
@@ -40,6 +42,8 @@ export const Take = defineEntity({
       .onCreate((): string[] => []),
     /** What it was recorded with. */
     setup: () => p.manyToOne(Setup).ref().nullable().index().deleteRule('set null'),
+    /** Where it was recorded. */
+    room: () => p.manyToOne(Room).ref().nullable().deleteRule('set null'),
     /** The player's earlier take that this one follows. */
     followsTake: () => p.manyToOne(Take).ref().nullable().index().deleteRule('set null'),
     /** Which actions of that take were carried out before this one. */

@@ -30,6 +30,7 @@ export function ApiTakeUpload() {
             format: 'uuid',
             description: 'The player’s setup it was recorded with.',
           },
+          roomId: { type: 'string', format: 'uuid', description: 'The player’s room it was recorded in.' },
           doneActions: { type: 'string', description: 'JSON: ids of the actions carried out before it' },
           tags: { type: 'string', description: 'JSON: ["…", …]' },
           tracks: { type: 'string', description: 'JSON: [{ role, fileIndex, channel }, …]' },

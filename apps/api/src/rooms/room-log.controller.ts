@@ -1,0 +1,55 @@
+import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post } from '@nestjs/common';
+import { ApiNoContentResponse, ApiTags } from '@nestjs/swagger';
+import { ZodResponse } from 'nestjs-zod';
+import { Access } from '../access/access.decorator';
+import { CurrentViewer, Viewer } from '../access/viewer';
+import {
+  CreateRoomChangeDto,
+  ListRoomChangesResponseDto,
+  RoomChangeResponseDto,
+  UpdateRoomChangeDto,
+} from './dto/room.dto';
+import { RoomLogService } from './room-log.service';
+
+@ApiTags('rooms')
+@Controller('api/rooms/:roomId/changes')
+@Access.signedIn()
+export class RoomLogController {
+  constructor(private readonly log: RoomLogService) {}
+
+  @Get()
+  @ZodResponse({ status: 200, type: ListRoomChangesResponseDto })
+  list(@CurrentViewer() viewer: Viewer, @Param('roomId') roomId: string) {
+    return this.log.list(viewer, roomId);
+  }
+
+  @Post()
+  @ZodResponse({ status: 201, type: RoomChangeResponseDto })
+  create(
+    @CurrentViewer() viewer: Viewer,
+    @Param('roomId') roomId: string,
+    @Body() body: CreateRoomChangeDto,
+  ) {
+    return this.log.create(viewer, roomId, body);
+  }
+
+  @Patch(':changeId')
+  @ZodResponse({ status: 200, type: RoomChangeResponseDto })
+  update(
+    @CurrentViewer() viewer: Viewer,
+    @Param() where: { roomId: string; changeId: string },
+    @Body() body: UpdateRoomChangeDto,
+  ) {
+    return this.log.update(viewer, where, body);
+  }
+
+  @Delete(':changeId')
+  @HttpCode(204)
+  @ApiNoContentResponse({ description: 'The entry is gone from the log; its takes stay.' })
+  remove(
+    @CurrentViewer() viewer: Viewer,
+    @Param() where: { roomId: string; changeId: string },
+  ): Promise<void> {
+    return this.log.remove(viewer, where);
+  }
+}

@@ -1,0 +1,46 @@
+import { RoomChangeResponse, TakeOfRoom } from '@thudline/contracts';
+import { RoomChangeTold } from '@thudline/dsp';
+import { Take } from '../takes/entities/take.entity';
+import { RoomChange } from './entities/room-change.entity';
+import { noSides, Sides } from './room-change-sides';
+
+interface WholeChange {
+  change: RoomChange;
+  number: number;
+  sides: Sides | undefined;
+  told: RoomChangeTold | undefined;
+}
+
+export function roomChangeResponseOf({ change, number, sides, told }: WholeChange): RoomChangeResponse {
+  const { before, after } = sides ?? noSides();
+  const { id, happenedOn, rank, what, category, place, cost, note } = change;
+  const { figures, ...did } = told ?? notTold({ before, after });
+  return {
+    id,
+    number,
+    happenedOn,
+    rank,
+    what,
+    category,
+    place: place ?? null,
+    cost,
+    note,
+    before: before.map(takeOfRoom),
+    after: after.map(takeOfRoom),
+    did,
+    figures: [...figures],
+  };
+}
+
+const takeOfRoom = ({ id, number, title }: Take): TakeOfRoom => ({ id, number, title });
+
+function notTold({ before, after }: Sides): RoomChangeTold {
+  const nothing = { status: 'cannot-tell' as const, figures: [] };
+  const last = before.at(-1);
+  if (!last) return { ...nothing, strong: 'No take before it.', rest: 'There is nothing to compare with.' };
+  if (after.length === 0) {
+    const rest = `Record one the way you recorded take ${last.number}, and it shows here.`;
+    return { ...nothing, strong: 'No take since then.', rest };
+  }
+  return { ...nothing, strong: 'Not measured yet.', rest: 'It shows here once both sides are.' };
+}
