@@ -64,7 +64,7 @@ export function createArrivalMeter(sampleRateHz: number): ArrivalMeter {
       if (arrival.kick && arrival.overhead) arrivals.push({ kick: arrival.kick, overhead: arrival.overhead });
       overheadSounds ||= overhead.some((sample) => sample !== 0);
       const [k, o] = [kick, overhead].map((samples) => cut(samples, onsetAt, PHASE_STRETCH_MS));
-      phase.add(Float64Array.from(k), Float64Array.from(o));
+      phase.add(new Float64Array(k), new Float64Array(o));
     },
     result: () => told(arrivals, { hits, overheadSounds, phase, samplesPerMs }),
   };

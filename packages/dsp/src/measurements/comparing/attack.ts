@@ -1,7 +1,6 @@
 import { assertPositive } from '../../assert';
 import { ratioDb } from '../agreement/choiceEnergy';
-import { butterworthBand } from '../filters/butterworth';
-import { filtered } from '../filters/filterChain';
+import { createButterworthEnergy } from '../filters/bandEnergy';
 
 /** The beater's click against the drum's weight (section 8); filters settle over ten periods of their low edge before. */
 const CLICK = { lowHz: 2000, highHz: 6000, lengthS: 0.02, settleS: 0.005 };
@@ -26,11 +25,13 @@ export function attackDb(
   if (startAt < 0 || startAt + Math.round(WEIGHT.lengthS * sampleRateHz) > samples.length) return null;
   const energy = ({ lowHz, highHz, lengthS, settleS }: typeof CLICK): number => {
     const from = Math.max(0, startAt - Math.round(settleS * sampleRateHz));
-    const stretch = samples.subarray(from, startAt + Math.round(lengthS * sampleRateHz));
-    const inBand = filtered(stretch, butterworthBand({ sampleRateHz, lowHz, highHz }));
-    let sum = 0;
-    for (let i = startAt - from; i < inBand.length; i += 1) sum += inBand[i] * inBand[i];
-    return sum;
+    const band = createButterworthEnergy({ sampleRateHz, lowHz, highHz });
+    band.next(samples, from, startAt);
+    return band.next(
+      samples,
+      startAt,
+      Math.min(samples.length, startAt + Math.round(lengthS * sampleRateHz)),
+    );
   };
   return ratioDb(energy(CLICK), energy(WEIGHT));
 }

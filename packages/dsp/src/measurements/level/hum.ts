@@ -54,7 +54,8 @@ interface PowerSpectrum {
 function powerSpectrum(samples: Float32Array, sampleRateHz: number): PowerSpectrum {
   const size = powerOfTwoFrom(finer * samples.length);
   const turn = (2 * Math.PI) / samples.length;
-  const windowed = Float64Array.from(samples, (x, i) => x * (0.5 - 0.5 * Math.cos(turn * i)));
+  const windowed = new Float64Array(samples);
+  for (let i = 0; i < windowed.length; i += 1) windowed[i] *= 0.5 - 0.5 * Math.cos(turn * i);
   const { re, im } = createRealTransform(size).spectrum(windowed);
   // A sine of amplitude A reads A/2 times the window's sum, which is half the length; its mean square is A²/2.
   const scale = 2 / (samples.length / 2) ** 2;
