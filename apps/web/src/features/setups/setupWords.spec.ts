@@ -72,6 +72,9 @@ describe('a setup in words', () => {
     expect(placesWords({ ...item, kick: { ...item.kick, insideCm: -5 } }, metric)).toBe(
       'kick 5 cm in front of the hole, overhead 90 cm above the snare',
     );
+    expect(placesWords({ ...item, kick: { ...item.kick, insideCm: 0 } }, metric)).toMatch(
+      /^kick in the hole,/,
+    );
     expect(placesWords({ ...item, ...emptySetup }, metric)).toBe('no places written down');
   });
 });

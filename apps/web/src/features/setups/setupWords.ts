@@ -91,15 +91,15 @@ export function usedWords({ takes, takeCount }: Pick<SetupResponse, 'takes' | 't
   return `used by takes ${numbers.join(', ')} and ${takeCount - shown.length} more`;
 }
 
+function depthWords(insideCm: number, reader: Reader): string {
+  if (insideCm === 0) return 'in the hole';
+  return insideCm < 0 ? `${cm(-insideCm, reader)} in front of the hole` : `${cm(insideCm, reader)} inside`;
+}
+
 /** "kick 8 cm inside, overhead 90 cm above the snare". */
 export function placesWords({ kick, overhead }: SetupListItem, reader: Reader): string {
   const parts: string[] = [];
-  if (kick.insideCm !== null)
-    parts.push(
-      kick.insideCm < 0
-        ? `kick ${cm(-kick.insideCm, reader)} in front of the hole`
-        : `kick ${cm(kick.insideCm, reader)} inside`,
-    );
+  if (kick.insideCm !== null) parts.push(`kick ${depthWords(kick.insideCm, reader)}`);
   if (overhead.aboveSnareCm !== null)
     parts.push(`overhead ${cm(overhead.aboveSnareCm, reader)} above the snare`);
   return parts.join(', ') || 'no places written down';
