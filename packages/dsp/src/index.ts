@@ -17,6 +17,7 @@ export * from './measurements/loudness/loudness';
 export * from './roles/guessRoles';
 export * from './roles/lowEndRatio';
 export * from './measureTake';
+export * from './measurements/agreement/addedTrack';
 export * from './measurements/agreement/choiceLevels';
 export { lowEnd, type Band } from './measurements/agreement/choiceEnergy';
 export { kickWindow } from './measurements/agreement/pairSpectrum';

@@ -7,6 +7,9 @@ import { assertFiniteSamples, SignalError } from '../../assert';
 const HALF_WIDTH = 32;
 const KAISER_BETA = 8.96;
 
+/** How many samples to each side a shifted sample is made from: what a stretch must hold more to be shifted like the whole. */
+export const shiftReachSamples = HALF_WIDTH;
+
 /**
  * The same sound played `shiftSamples` earlier (later where negative), by any part of a sample.
  *
