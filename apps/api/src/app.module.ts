@@ -1,6 +1,7 @@
 import { DynamicModule, Module } from '@nestjs/common';
 import { APP_FILTER, APP_INTERCEPTOR, APP_PIPE } from '@nestjs/core';
 import { ZodSerializerInterceptor, ZodValidationPipe } from 'nestjs-zod';
+import { AddedFilesModule } from './added-files/added-files.module';
 import { AccessModule } from './access/access.module';
 import { AuthModule } from './auth/auth.module';
 import { ComparisonsModule } from './comparisons/comparisons.module';
@@ -43,6 +44,7 @@ export class AppModule {
         ReportsModule,
         ComparisonsModule,
         SoundModule,
+        AddedFilesModule,
         SharesModule,
         TryOutsModule,
         SampleSheetModule,

@@ -1,4 +1,8 @@
 import { DynamicModule, Module } from '@nestjs/common';
+import { AddedFileClaims } from './added-files/added-file-claims';
+import { AddedFileQueue } from './added-files/added-file-queue';
+import { AddedFileRuns } from './added-files/added-file-runs';
+import { AddingWorker } from './added-files/adding-worker';
 import { Config } from './config/config';
 import { ConfigModule } from './config/config.module';
 import { databaseModule } from './database/database.module';
@@ -43,6 +47,10 @@ export class WorkerModule {
         MeasurementRenewals,
         RenewalWorker,
         ReportTelling,
+        AddedFileQueue,
+        AddedFileClaims,
+        AddedFileRuns,
+        AddingWorker,
         OneTimeTokensService,
         Mailer,
         MailWriter,

@@ -137,6 +137,7 @@ describe('every route there is', () => {
         paths.peaks(':id'),
         paths.listen(':id'),
         paths.takeFile(':id', ':fileId'),
+        paths.addedFiles(':id'),
       ]
         .map((path) => `get ${path}`)
         .sort(),

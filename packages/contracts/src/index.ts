@@ -1,5 +1,6 @@
 export * from './accounts';
 export * from './comparisons';
+export * from './addedFiles';
 export * from './errors';
 export * from './events';
 export * from './health';

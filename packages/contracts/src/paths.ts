@@ -40,6 +40,12 @@ export const paths = {
   comparison: (takeId: string, otherTakeId: string) => `/api/takes/${takeId}/compare/${otherTakeId}`,
   excerpt: (takeId: string) => `/api/takes/${takeId}/excerpt`,
   listen: (takeId: string) => `/api/takes/${takeId}/listen.wav`,
+  addedFiles: (takeId: string) => `/api/takes/${takeId}/added-files`,
+  addedFile: (takeId: string, addedFileId: string) => `/api/takes/${takeId}/added-files/${addedFileId}`,
+  addedFileDownload: (takeId: string, addedFileId: string) =>
+    `/api/takes/${takeId}/added-files/${addedFileId}/file`,
+  addedFileListen: (takeId: string, addedFileId: string) =>
+    `/api/takes/${takeId}/added-files/${addedFileId}/listen.wav`,
   takeFile: (takeId: string, fileId: string) => `/api/takes/${takeId}/files/${fileId}`,
   tryOuts: '/api/tryouts',
   tryOut: (tryOutId: string) => `/api/tryouts/${tryOutId}`,

@@ -1,3 +1,5 @@
+export * from './addFiles';
+export type { AddJob, AddJobResult } from './addJob';
 export * from './fileByteSource';
 export * from './measureFiles';
 export * from './measureRefusal';

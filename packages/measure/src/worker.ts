@@ -4,6 +4,8 @@ import { measureFiles, type MeasuredFile } from './measureFiles';
 import { MeasureRefusal, type MeasureRefusalFacts } from './measureRefusal';
 import type { TrackChoice } from './trackChoice';
 
+export { addJob } from './addJob';
+
 /** What a worker thread is given; everything in it can cross a thread. */
 export interface MeasureJob {
   readonly paths: readonly string[];

@@ -1,3 +1,4 @@
+import { AddedFile } from '../added-files/entities/added-file.entity';
 import { AuditEvent } from '../audit/entities/audit-event.entity';
 import { Session } from '../auth/entities/session.entity';
 import { Measurement } from '../measuring/entities/measurement.entity';
@@ -28,6 +29,7 @@ export const entities = [
   Take,
   TakeFile,
   TakeTrack,
+  AddedFile,
   Measurement,
   Report,
   PairSpectrum,

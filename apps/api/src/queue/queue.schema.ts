@@ -1,17 +1,19 @@
 import PgBoss from 'pg-boss';
 
 export const measureQueue = 'measure';
+export const addedFileQueue = 'added-file';
 export const mailQueue = 'mail';
 
 /**
  * A measuring job is only the knock on the door: state, attempts and progress live on `measurement`. So pg-boss retries
  * nothing, and a job that takes longer than an hour is given up (common practice, no source: ten minutes of sound take
- * seconds).
+ * seconds). The same holds for added files.
  *
  * A mail is tried again for about half a day, with longer and longer waits (common practice, no source).
  */
 const queues: PgBoss.Queue[] = [
   { name: measureQueue, policy: 'standard', retryLimit: 0, expireInSeconds: 3_600 },
+  { name: addedFileQueue, policy: 'standard', retryLimit: 0, expireInSeconds: 3_600 },
   {
     name: mailQueue,
     policy: 'standard',
@@ -22,7 +24,10 @@ const queues: PgBoss.Queue[] = [
   },
 ];
 
-export function createBoss(databaseUrl: string, part: 'sends' | 'works' | 'mails' | 'migrates'): PgBoss {
+export function createBoss(
+  databaseUrl: string,
+  part: 'sends' | 'works' | 'adds' | 'mails' | 'migrates',
+): PgBoss {
   return new PgBoss({
     connectionString: databaseUrl,
     schema: 'pgboss',

@@ -3,13 +3,9 @@ import { ApiOkResponse, ApiProduces, ApiResponse, ApiTags } from '@nestjs/swagge
 import { Request, Response } from 'express';
 import { Access } from '../access/access.decorator';
 import { ObjectStoreService } from '../storage/object-store.service';
-import { byteRange } from './byte-range';
 import { ExcerptDto } from './dto/excerpt.dto';
+import { sendAttachment, sendWav, soundCacheControl } from './send-wav';
 import { TakeSoundService } from './take-sound.service';
-import { sendUntilClosed } from './send-until-closed';
-
-/** Answers are asked for again each time, so that a take that was deleted or hidden can't be heard from a cache. */
-const cacheControl = 'private, no-cache';
 
 @ApiTags('sound')
 @Controller('api/takes/:id')
@@ -31,7 +27,7 @@ export class SoundController {
   ): Promise<void> {
     const { sampleRateHz, startFrame, frames, trackCount, bytes } = await this.sound.excerpt(takeId, query);
     response.set({
-      'Cache-Control': cacheControl,
+      'Cache-Control': soundCacheControl,
       'X-Sample-Rate-Hz': String(sampleRateHz),
       'X-Start-Frame': String(startFrame),
       'X-Frames': String(frames),
@@ -52,18 +48,7 @@ export class SoundController {
     @Req() request: Request,
     @Res() response: Response,
   ): Promise<void> {
-    const { wav, etag } = await this.sound.listenWav(takeId);
-    response.set({ 'Cache-Control': cacheControl, ETag: etag, 'Accept-Ranges': 'bytes' }).type('audio/wav');
-    if (request.fresh) {
-      response.status(304).end();
-      return;
-    }
-    const isSameSound = [undefined, etag].includes(request.get('If-Range'));
-    const range = isSameSound ? byteRange(request.get('Range'), wav.sizeBytes) : null;
-    const { start, end } = range ?? { start: 0, end: wav.sizeBytes };
-    if (range) response.status(206).set('Content-Range', `bytes ${start}-${end - 1}/${wav.sizeBytes}`);
-    response.set('Content-Length', String(end - start));
-    await sendUntilClosed(wav.bytes({ start, end }), response);
+    await sendWav(await this.sound.listenWav(takeId), request, response);
   }
 
   @Get('files/:fileId')
@@ -73,19 +58,12 @@ export class SoundController {
   async file(
     @Param('id') takeId: string,
     @Param('fileId') fileId: string,
-    @Req() { method }: Request,
+    @Req() request: Request,
     @Res() response: Response,
   ): Promise<void> {
     const file = await this.sound.getFile(takeId, fileId);
-    // The row tells all that HEAD asks for; a stream that nobody reads would hold a connection to the store.
-    const bytes = method === 'HEAD' ? null : await this.objects.stream(file.objectKey);
-    response.attachment(file.name).type('audio/wav');
-    response.set({
-      'Cache-Control': cacheControl,
-      'Content-Length': String(file.bytes),
-      ETag: `"${file.sha256}"`,
-    });
-    if (bytes) await sendUntilClosed(bytes, response);
-    else response.end();
+    const open = () => this.objects.stream(file.objectKey);
+    const { name, bytes, sha256 } = file;
+    await sendAttachment({ name, bytes, sha256, open }, request, response);
   }
 }

@@ -4,8 +4,17 @@ interface MeasuredIn {
   attempt: number;
 }
 
+interface AddedIn {
+  takeId: string;
+  addedFileId: string;
+  attempt: number;
+}
+
 /** A key is never used twice: ids are new for every upload. */
 export const objectKeys = {
+  /** Each attempt writes its own. */
+  addedFile: ({ takeId, addedFileId, attempt }: AddedIn) =>
+    `takes/${takeId}/added/${addedFileId}-${attempt}.wav`,
   /** Everything there is of a take. */
   take: (takeId: string) => `takes/${takeId}/`,
   /** Each attempt writes its own, so that a slower worker never writes over what a report stands on. */

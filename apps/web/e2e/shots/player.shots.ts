@@ -90,6 +90,17 @@ test('big-print', async ({ page }) => {
   await takeShots(page, 'big-print');
 });
 
+test('added-file', async ({ page }) => {
+  const { id } = await getDemoTake(starTitle);
+  await page.goto(`/takes/${id}`);
+  const section = page.getByRole('region', { name: 'One file of the two' });
+  await section.getByRole('button', { name: 'Make one file of the two' }).click();
+  await expect(section.getByRole('progressbar')).toBeVisible();
+  await expect(section.getByRole('link', { name: /^take-/ })).toBeVisible({ timeout: 60_000 });
+  await section.scrollIntoViewIfNeeded();
+  await takeShots(page, 'added-file', { fullPage: false });
+});
+
 test('send-sheet', async ({ page }) => {
   const { id } = await getDemoTake(starTitle);
   await page.goto(`/takes/${id}`);

@@ -34,6 +34,7 @@ const served: FakeRoutes = {
   [`GET ${paths.pairSpectrum(takeId)}`]: () => ({ bytes: samplePairSpectrumBytes(report.pairSpectrum!) }),
   [`GET ${paths.excerpt(takeId)}`]: () => sampleExcerpt(),
   [`GET ${paths.peaks(takeId)}`]: () => samplePeaks(),
+  [`GET ${paths.addedFiles(takeId)}`]: json({ items: [] }),
 };
 
 function open(routes: FakeRoutes) {

@@ -19,7 +19,7 @@ const noLoudness = 0x7fff;
 const loudnessFields = [412, 414, 416, 418, 420];
 
 /**
- * A `bext` chunk to be put before the sound. What isn't ASCII becomes a question mark; what is too long is cut.
+ * A `bext` chunk to be put before the sound. Letters lose what isn't ASCII; what is too long is cut.
  *
  * @returns a whole chunk of even length
  * @see EBU Tech 3285 v2 (2011), 2.3 and 2.4
@@ -64,8 +64,9 @@ export function infoChunk(words: { name?: string; comment?: string; software?: s
 
 /** Text of an INFO list ends with a zero, which counts. */
 function textPart(id: string, text: string): Uint8Array {
-  const { bytes, body } = emptyChunk(id, text.length + 1);
-  putAscii(bytes, { at: body, most: text.length, text });
+  const plain = plainLetters(text);
+  const { bytes, body } = emptyChunk(id, plain.length + 1);
+  putAscii(bytes, { at: body, most: plain.length, text: plain });
   return bytes;
 }
 
@@ -78,10 +79,18 @@ function emptyChunk(id: string, bodyBytes: number) {
   return { bytes, view, body };
 }
 
+/** Accents go, marks become those of ASCII; what else isn't ASCII becomes a question mark. */
+function plainLetters(text: string): string {
+  return text
+    .normalize('NFKD')
+    .replace(/\p{M}/gu, '')
+    .replace(/[‘’]/g, "'")
+    .replace(/[“”„]/g, '"')
+    .replace(/[‐-―−]/g, '-')
+    .replace(/[^\0-\x7f]/gu, '?');
+}
+
 function putAscii(bytes: Uint8Array, put: { at: number; most: number; text?: string }): void {
-  const text = (put.text ?? '').slice(0, put.most);
-  for (let i = 0; i < text.length; i++) {
-    const code = text.charCodeAt(i);
-    bytes[put.at + i] = code < 0x80 ? code : 0x3f;
-  }
+  const text = plainLetters(put.text ?? '').slice(0, put.most);
+  for (let i = 0; i < text.length; i++) bytes[put.at + i] = text.charCodeAt(i);
 }

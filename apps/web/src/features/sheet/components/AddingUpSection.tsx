@@ -7,15 +7,21 @@ import { MarginNote } from './RuledSheet';
 import { addingUpTopics, findingsOf, verdictWord, worstStatus } from './sectionWords';
 import { SheetSection } from './SheetSection';
 import { BenchLoading } from './BenchLoading';
+import type { AddedFilesProps } from './AddedFiles';
 import type { PairBenchProps } from './PairBench';
 
 /** The pictures come after the words: who opened a link on a phone reads before they are there. */
 const PairBench = lazy(async () => ({ default: (await import('./PairBench')).PairBench }));
 
-type AddingUpProps = Omit<PairBenchProps, 'chosenHit'> & { chosenHit: number | null };
+const AddedFiles = lazy(async () => ({ default: (await import('./AddedFiles')).AddedFiles }));
+
+type AddingUpProps = Omit<PairBenchProps, 'chosenHit'> & { chosenHit: number | null } & Pick<
+    AddedFilesProps,
+    'take'
+  >;
 
 /** Adding up: whether the two microphones help or cancel, seen and heard. */
-export function AddingUpSection({ chosenHit, ...props }: AddingUpProps) {
+export function AddingUpSection({ chosenHit, take, ...props }: AddingUpProps) {
   const { report } = props;
   const findings = findingsOf(report, addingUpTopics);
   const verdictFinding = findings.find((finding) => finding.topic === 'adding-up');
@@ -31,6 +37,11 @@ export function AddingUpSection({ chosenHit, ...props }: AddingUpProps) {
       {report.pairSpectrum && chosenHit !== null && (
         <Suspense fallback={<BenchLoading />}>
           <PairBench {...props} chosenHit={chosenHit} />
+        </Suspense>
+      )}
+      {take.rights.download && (
+        <Suspense>
+          <AddedFiles take={take} bench={props.bench} listening={props.listening} />
         </Suspense>
       )}
     </SheetSection>

@@ -45,7 +45,7 @@ export function MeasuredSheet({ take, report, settings, ...slots }: MeasuredShee
         onChooseHit={(index) => setChosenHit(nearestHit(report, kickHits, index))}
       />
       <AddingUpSection
-        {...{ report, pair, bench, listening, kickHits, chosenHit }}
+        {...{ take, report, pair, bench, listening, kickHits, chosenHit }}
         singleKeys={settings.singleKeys}
         canListen={take.rights.listen}
         onChooseHit={setChosenHit}
