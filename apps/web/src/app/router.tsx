@@ -47,6 +47,18 @@ export const router = createBrowserRouter([
         element: <SignedIn />,
         children: [
           {
+            path: '/tryouts',
+            lazy: async () => ({ Component: (await import('../pages/TryOutsPage')).TryOutsPage }),
+          },
+          {
+            path: '/tryouts/new',
+            lazy: async () => ({ Component: (await import('../pages/NewTryOutPage')).NewTryOutPage }),
+          },
+          {
+            path: '/tryouts/:tryOutId',
+            lazy: async () => ({ Component: (await import('../pages/TryOutPage')).TryOutPage }),
+          },
+          {
             path: '/takes',
             lazy: async () => ({ Component: (await import('../pages/TakesPage')).TakesPage }),
           },

@@ -89,23 +89,47 @@ function kickOfTwo(
   return [0, 'order'];
 }
 
-/** @returns the one role a name speaks of; null for none or both */
-function roleInName(name: string): TrackRole | null {
+/**
+ * The one microphone a file's name speaks of.
+ *
+ * @returns null for none or both
+ */
+export function roleInName(name: string): TrackRole | null {
   const words = roleWords(name);
   return new Set(words).size === 1 ? words[0] : null;
 }
 
+/**
+ * What is left of a file's name without its ending and the words for a microphone: `Kick 03.wav` and `OH 03.wav` both
+ * give `3`. Words and numbers in lower case with one space between; numbers without leading zeros.
+ */
+export function stemOfName(name: string): string {
+  const parts = wordsOf(name, /[^\p{L}\p{N}.]+|(?<=\p{L})(?=\p{N})|(?<=\p{N})(?=\p{L})|\.(?!\d)|(?<!\d)\./u);
+  const left: string[] = [];
+  for (let i = 0; i < parts.length; i += 1) {
+    const pair = `${parts[i]} ${parts[i + 1] ?? ''}`;
+    if (kickWords.has(pair) || overheadWords.has(pair)) i += 1;
+    else if (!kickWords.has(parts[i]) && !overheadWords.has(parts[i]))
+      left.push(parts[i].replace(/^0+(?=\d)/, ''));
+  }
+  return left.join(' ');
+}
+
 /** The roles a name speaks of, in order. `Take3_BassDrum-02.wav` is take, 3, bass, drum, 02. */
 function roleWords(name: string): TrackRole[] {
-  const words = name
-    .replace(/\.[^.]*$/, '')
-    .replace(/([a-z])([A-Z])/g, '$1 $2')
-    .toLowerCase()
-    .split(/[^\p{L}]+/u)
-    .filter((word) => word !== '');
+  const words = wordsOf(name, /[^\p{L}]+/u);
   return words.flatMap((word, i) => {
     const pair = `${word} ${words[i + 1] ?? ''}`;
     if (kickWords.has(word) || kickWords.has(pair)) return ['kick' as const];
     return overheadWords.has(word) || overheadWords.has(pair) ? ['overhead' as const] : [];
   });
+}
+
+function wordsOf(name: string, between: RegExp): string[] {
+  return name
+    .replace(/\.[^.]*$/, '')
+    .replace(/([a-z])([A-Z])/g, '$1 $2')
+    .toLowerCase()
+    .split(between)
+    .filter((word) => word !== '');
 }

@@ -13,6 +13,7 @@ export function TakesHeading() {
         Drop WAV files anywhere on this page
       </Box>
       <TextLink to="/setups">Setups</TextLink>
+      <TextLink to="/tryouts">Try-outs</TextLink>
       <ButtonLink to="/takes/new">Add a take</ButtonLink>
     </Flex>
   );

@@ -1,5 +1,12 @@
-import { paths, type ListTakesResponse, type MeasurementEvent, type TakeResponse } from '@thudline/contracts';
+import {
+  paths,
+  type ListTakesResponse,
+  type MeasurementEvent,
+  type TakeResponse,
+  type TryOutResponse,
+} from '@thudline/contracts';
 import { useSWRConfig } from 'swr';
+import { isTryOutKey } from '../../tryouts/hooks/tryOutKeys';
 import { isMeasuring } from '../rowWords';
 import { isTakesKey } from './takesKeys';
 
@@ -13,6 +20,7 @@ export function useMeasurementNews() {
       // Outlines that an earlier version didn't store are there after it was measured again.
       void mutate((key) => typeof key === 'string' && key.startsWith(`${paths.peaks(takeId)}?`));
       void mutate(isTakesKey);
+      void mutate(isTryOutKey);
       return;
     }
     void mutate<TakeResponse>(paths.take(takeId), (take) => take && { ...take, measurement, hasReport }, {
@@ -21,7 +29,22 @@ export function useMeasurementNews() {
     void mutate<ListTakesResponse>(isTakesKey, (page) => page && withMeasurement(page, takeId, measurement), {
       revalidate: false,
     });
+    void mutate<TryOutResponse>(isTryOutKey, (of) => of && inTryOut(of, { takeId, measurement }), {
+      revalidate: false,
+    });
   };
+}
+
+/** The list of try-outs has no measurements. */
+function inTryOut(
+  of: TryOutResponse,
+  { takeId, measurement }: Pick<MeasurementEvent, 'takeId' | 'measurement'>,
+): TryOutResponse {
+  if (!('places' in of)) return of;
+  const places = of.places.map((place) =>
+    place.take?.id === takeId ? { ...place, take: { ...place.take, measurement } } : place,
+  );
+  return { ...of, places };
 }
 
 const withMeasurement = (

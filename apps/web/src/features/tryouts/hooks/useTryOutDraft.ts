@@ -1,0 +1,57 @@
+import { useCallback, useReducer, useState } from 'react';
+import { useNavigate } from 'react-router-dom';
+import type { FileReading } from '../../upload/pickedFile';
+import { newUploadKey } from '../../upload/uploadKey';
+import type { LengthUnit } from '../positionWords';
+import { draftReducer, emptyDraft } from '../upload/tryOutDraft';
+import { draftProblem, tryOutPlan } from '../upload/tryOutRequest';
+import { useReadFiles } from './useReadFiles';
+import { useSendPairs } from './useSendQueue';
+import { useTryOutActions } from './useTryOutActions';
+
+/** Putting a try-out together, and making it: the pairs are then sent while its page is open. */
+export function useTryOutDraft(takeIds: readonly string[], lengthUnit: LengthUnit) {
+  const [draft, dispatch] = useReducer(draftReducer, takeIds, emptyDraft);
+  const [problem, setProblem] = useState('');
+  const [busy, setBusy] = useState(false);
+  const { create } = useTryOutActions();
+  const sendPairs = useSendPairs();
+  const navigate = useNavigate();
+  const onRead = useCallback(
+    (id: string, reading: FileReading) => dispatch({ type: 'read', id, reading }),
+    [dispatch],
+  );
+  useReadFiles(draft.files, onRead);
+
+  const make = async () => {
+    if (busy) return;
+    const found = draftProblem(draft, lengthUnit);
+    setProblem(found);
+    if (found) return;
+    setBusy(true);
+    try {
+      const { body, pairs } = tryOutPlan(draft, { lengthUnit, newKey: newUploadKey, nowMs: Date.now() });
+      const tryOut = await create(body);
+      if (pairs.length > 0) sendPairs(tryOut.id, pairs);
+      void navigate(`/tryouts/${tryOut.id}`, { replace: true });
+    } catch (error) {
+      setBusy(false);
+      setProblem(error instanceof Error ? error.message : 'That did not work. Try again.');
+    }
+  };
+
+  return {
+    draft,
+    dispatch,
+    pick: (files: readonly File[]) => {
+      setProblem('');
+      if (files.length > 0)
+        dispatch({ type: 'added', files: files.map((file) => ({ id: newUploadKey(), file })) });
+    },
+    problem,
+    busy,
+    make,
+  };
+}
+
+export type TryOutBench = ReturnType<typeof useTryOutDraft>;
