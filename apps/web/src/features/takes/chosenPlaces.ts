@@ -1,3 +1,4 @@
+import { tryOutLimits } from '@thudline/contracts';
 import { comparePath } from '../compare/takeWords';
 import { oldestFirst, type ChosenTake } from './chosenTakes';
 
@@ -16,6 +17,15 @@ const places: readonly ChosenPlace[] = [
       const [before, after] = oldestFirst(takes);
       return takes.length === 2 ? comparePath(before.id, after.id) : null;
     },
+  },
+  {
+    words: 'Make a try-out',
+    address: (takes) =>
+      takes.length >= tryOutLimits.fewestTakes && takes.length <= tryOutLimits.mostTakes
+        ? `/tryouts/new?takes=${oldestFirst(takes)
+            .map(({ id }) => id)
+            .join(',')}`
+        : null,
   },
 ];
 
