@@ -1,7 +1,7 @@
 import { bytesSource } from '../wav/bytesSource';
 import { encodeWav } from '../wav/encodeWav';
 import { openWav } from '../wav/openWav';
-import { guessRoles, guessSides } from './guessRoles';
+import { guessRoles, guessSides, roleInName, stemOfName } from './guessRoles';
 import { lowEndRatio } from './lowEndRatio';
 
 const files = (first: string, second: string, ratios: [number | null, number | null] = [null, null]) =>
@@ -70,6 +70,32 @@ describe('guessSides', () => {
       overheadChannel: 1,
       reason: 'order',
     });
+  });
+});
+
+describe('what is left of a name', () => {
+  it('is the same for both microphones of one take', () => {
+    for (const [kick, overhead, stem] of [
+      ['Kick 03.wav', 'OH 3.wav', '3'],
+      ['Take3_BassDrum-02.wav', 'Take3_Overhead-02.wav', 'take 3 2'],
+      ['90cm kick.wav', '90cm_oh.WAV', '90 cm'],
+      ['kick102.5 cm.wav', 'top 102.5cm.wav', '102.5 cm'],
+    ])
+      expect([stemOfName(kick), stemOfName(overhead)]).toEqual([stem, stem]);
+  });
+
+  it('is everything where no microphone is named, and nothing where only one is', () => {
+    expect(stemOfName('ZOOM0001.wav')).toBe('zoom 1');
+    expect(stemOfName('kick.wav')).toBe('');
+  });
+
+  it('goes with one microphone, or with none or both', () => {
+    expect(['Kick 1.wav', 'oh.wav', 'room.wav', 'kick-oh.wav'].map(roleInName)).toEqual([
+      'kick',
+      'overhead',
+      null,
+      null,
+    ]);
   });
 });
 
