@@ -202,6 +202,8 @@ describe('rooms', () => {
       expect(numbers(roomChangeResponse.parse(moved.body).before)).toEqual([first.number]);
       await juno.delete(paths.take(near.id)).expect(204);
       expect((await changesOf(room))[0].after).toEqual([]);
+      const log = listRoomChangesResponse.parse((await juno.get(paths.roomChanges(room.id))).body);
+      expect(numbers(log.takes)).toEqual([takes[3].number, next.number, first.number]);
     });
 
     it('refuses takes of elsewhere, a take on both sides, and what says nothing', async () => {

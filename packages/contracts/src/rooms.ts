@@ -179,8 +179,12 @@ export const roomChangeResponse = z.object({
 });
 export type RoomChangeResponse = z.infer<typeof roomChangeResponse>;
 
-/** Newest first. */
-export const listRoomChangesResponse = z.object({ items: z.array(roomChangeResponse) });
+export const listRoomChangesResponse = z.object({
+  /** Newest first. */
+  items: z.array(roomChangeResponse),
+  /** The newest takes of the room, to choose from; newest first. */
+  takes: z.array(takeOfRoom.extend({ recordedAt: z.iso.datetime() })),
+});
 export type ListRoomChangesResponse = z.infer<typeof listRoomChangesResponse>;
 
 export const trendFigures = [

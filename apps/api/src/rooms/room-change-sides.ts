@@ -5,6 +5,9 @@ import { Take } from '../takes/entities/take.entity';
 import { ChangeSide, RoomChangeTake } from './entities/room-change-take.entity';
 import { Room } from './entities/room.entity';
 
+/** Years of recording; as many rows as still load at once. */
+const mostChoosable = 500;
+
 export type Sides = Record<ChangeSide, Take[]>;
 
 export const noSides = (): Sides => ({ before: [], after: [] });
@@ -35,6 +38,12 @@ export class RoomChangeSides {
       this.em.findOne(Take, { ...there, recordedAt: { $gte: day } }, { orderBy: { recordedAt: 'asc' } }),
     ]);
     return { before: before ? [before.id] : [], after: after ? [after.id] : [] };
+  }
+
+  /** What can be put on a side. */
+  async choosable(room: Room): Promise<Take[]> {
+    const orderBy = { recordedAt: 'desc', id: 'desc' } as const;
+    return this.em.find(Take, { room, deletedAt: null }, { orderBy, limit: mostChoosable });
   }
 
   /** @throws {AppError} `bad-request` where one isn't a take of this room */

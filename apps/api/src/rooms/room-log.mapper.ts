@@ -34,6 +34,11 @@ export function roomChangeResponseOf({ change, number, sides, told }: WholeChang
 
 const takeOfRoom = ({ id, number, title }: Take): TakeOfRoom => ({ id, number, title });
 
+export const choosableTakeOf = (take: Take) => ({
+  ...takeOfRoom(take),
+  recordedAt: take.recordedAt.toISOString(),
+});
+
 function notTold({ before, after }: Sides): RoomChangeTold {
   const nothing = { status: 'cannot-tell' as const, figures: [] };
   const last = before.at(-1);

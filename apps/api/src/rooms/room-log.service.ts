@@ -17,7 +17,7 @@ import { Room } from './entities/room.entity';
 import { ownRoom } from './own-room';
 import { RoomChangeSides } from './room-change-sides';
 import { RoomComparisons } from './room-comparisons';
-import { roomChangeResponseOf } from './room-log.mapper';
+import { choosableTakeOf, roomChangeResponseOf } from './room-log.mapper';
 
 /** As the log is read: by day, then as they were put on it. */
 const inOrder = { happenedOn: 'asc', rank: 'asc', id: 'asc' } as const;
@@ -32,7 +32,9 @@ export class RoomLogService {
   ) {}
 
   async list(viewer: Viewer, roomId: string): Promise<ListRoomChangesResponse> {
-    return { items: (await this.whole(await ownRoom(this.em, viewer, roomId))).reverse() };
+    const room = await ownRoom(this.em, viewer, roomId);
+    const takes = await this.sides.choosable(room);
+    return { items: (await this.whole(room)).reverse(), takes: takes.map(choosableTakeOf) };
   }
 
   async create(

@@ -25,9 +25,12 @@ export function Layout() {
     <PageFrame
       places={
         me && (
-          <NavLink to="/takes" also="/setups">
-            Takes
-          </NavLink>
+          <>
+            <NavLink to="/takes" also="/setups">
+              Takes
+            </NavLink>
+            <NavLink to="/rooms">Rooms</NavLink>
+          </>
         )
       }
       corner={<AccountCorner />}

@@ -75,6 +75,14 @@ export const router = createBrowserRouter([
             lazy: async () => ({ Component: (await import('../pages/SetupPage')).SetupPage }),
           },
           {
+            path: '/rooms',
+            lazy: async () => ({ Component: (await import('../pages/RoomsPage')).RoomsPage }),
+          },
+          {
+            path: '/rooms/:roomId',
+            lazy: async () => ({ Component: (await import('../pages/RoomPage')).RoomPage }),
+          },
+          {
             path: '/settings',
             lazy: async () => ({ Component: (await import('../pages/SettingsPage')).SettingsPage }),
           },

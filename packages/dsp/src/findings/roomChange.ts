@@ -51,7 +51,7 @@ const tellings: Partial<Record<ComparedKey, Telling>> = {
   'decay-2000': decay('2 kHz'),
   'decay-4000': decay('4 kHz'),
   'early-to-late': ({ word }) =>
-    word === 'higher' ? 'less of it hangs on after 50 ms' : 'more of it hangs on after 50 ms',
+    word === 'higher' ? 'less of a snare hangs on after 50 ms' : 'more of a snare hangs on after 50 ms',
   'overhead-63': lowEnd('63 Hz'),
   'overhead-125': lowEnd('125 Hz'),
   brightness: ({ change, word }) => `a snare is ${wholeDbText(change ?? 0)} dB ${word} in the overhead`,

@@ -4,11 +4,19 @@ import { recordedAt } from './recordedAt';
 import { doneActions, type PreviousTake } from './previousTake';
 import type { UploadState } from './uploadState';
 
+/** What a request takes from beside the upload's own state. */
+export interface TakeRest {
+  previous: PreviousTake | null;
+  setupId: string | null;
+  roomId: string | null;
+  nowMs: number;
+}
+
 /** The text fields of one upload. */
 export function takeRequest(
   state: UploadState,
   { slots, used }: Arrangement,
-  { previous, setupId, nowMs }: { previous: PreviousTake | null; setupId: string | null; nowMs: number },
+  { previous, setupId, roomId, nowMs }: TakeRest,
 ): CreateTakeRequest {
   if (!state.uploadKey) throw new Error('An upload needs its key before it is sent.');
   return {
@@ -26,6 +34,7 @@ export function takeRequest(
       ? { followsTakeId: previous.take.id, doneActions: doneActions(previous, state.tickedHere) }
       : { doneActions: [] }),
     ...(setupId ? { setupId } : {}),
+    ...(roomId ? { roomId } : {}),
     tags: [],
     tracks: slots.map(({ role, channel, fileId }) => ({
       role,
@@ -44,6 +53,7 @@ export function takeForm(request: CreateTakeRequest, files: readonly File[]): Fo
   if (request.recordedAt) form.append('recordedAt', request.recordedAt);
   if (request.followsTakeId) form.append('followsTakeId', request.followsTakeId);
   if (request.setupId) form.append('setupId', request.setupId);
+  if (request.roomId) form.append('roomId', request.roomId);
   form.append('doneActions', JSON.stringify(request.doneActions));
   form.append('tags', JSON.stringify(request.tags));
   form.append('tracks', JSON.stringify(request.tracks));

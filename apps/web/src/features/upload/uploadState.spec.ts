@@ -62,8 +62,12 @@ describe('which file is which', () => {
       ['take.wav:1', 'kick', 'low-end'],
     ]);
     expect(
-      takeRequest({ ...state, uploadKey: key }, arranged(state), { previous: null, setupId: null, nowMs: 1 })
-        .tracks,
+      takeRequest({ ...state, uploadKey: key }, arranged(state), {
+        previous: null,
+        setupId: null,
+        roomId: null,
+        nowMs: 1,
+      }).tracks,
     ).toEqual([
       { role: 'overhead', fileIndex: 0, channel: 0 },
       { role: 'kick', fileIndex: 0, channel: 1 },

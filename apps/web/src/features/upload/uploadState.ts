@@ -22,6 +22,8 @@ export interface UploadState {
   note: string;
   /** Id of the setup chosen here, empty for none; null until something was chosen. */
   setupHere: string | null;
+  /** The same of the room. */
+  roomHere: string | null;
   /** Whether the take follows the one before it. */
   follows: boolean;
   /** Ids of the earlier sheet's actions as ticked on this page; null until something was ticked here. */
@@ -40,6 +42,7 @@ export type UploadAction =
   | { type: 'titleWritten'; title: string }
   | { type: 'noteWritten'; note: string }
   | { type: 'setupChosen'; setupId: string }
+  | { type: 'roomChosen'; roomId: string }
   | { type: 'followsChosen'; follows: boolean }
   | { type: 'changesTicked'; actionIds: string[] }
   | { type: 'sendStarted'; newKey: string; atMs: number }
@@ -55,6 +58,7 @@ export const emptyUpload: UploadState = {
   title: '',
   note: '',
   setupHere: null,
+  roomHere: null,
   follows: true,
   tickedHere: null,
   uploadKey: null,
@@ -86,6 +90,8 @@ export function uploadReducer(state: UploadState, action: UploadAction): UploadS
       return { ...state, note: action.note };
     case 'setupChosen':
       return changed(state, { setupHere: action.setupId });
+    case 'roomChosen':
+      return changed(state, { roomHere: action.roomId });
     case 'followsChosen':
       return changed(state, { follows: action.follows });
     case 'changesTicked':

@@ -18,12 +18,30 @@ export function AboutTake({ newTake }: { newTake: NewTake }) {
         maxLength={120}
         autoComplete="off"
       />
+      <RoomChoice newTake={newTake} />
       <SetupChoice newTake={newTake} />
     </Box>
   );
 }
 
 const none = '';
+
+/** Where it was recorded; not offered before there is a room. */
+function RoomChoice({ newTake }: { newTake: NewTake }) {
+  if (newTake.rooms.length === 0) return null;
+  const nameOf = (id: string) => newTake.rooms.find((room) => room.id === id)?.name ?? 'none written down';
+  return (
+    <Box marginTop="12px">
+      <SelectField
+        label="Room"
+        value={newTake.roomId ?? none}
+        options={[none, ...newTake.rooms.map(({ id }) => id)]}
+        words={nameOf}
+        onChange={newTake.chooseRoom}
+      />
+    </Box>
+  );
+}
 
 /** What it was recorded with; not offered before there is a setup. */
 function SetupChoice({ newTake }: { newTake: NewTake }) {

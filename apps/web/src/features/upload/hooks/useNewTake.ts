@@ -14,18 +14,22 @@ import {
 } from '../uploadState';
 import { useLeaveGuard } from './useLeaveGuard';
 import { useSending } from './useSending';
+import { useUploadRooms } from './useUploadRooms';
 import { useUploadSetups } from './useUploadSetups';
 
 /** The upload page: what was dropped, what is written about it, and sending it. */
 export function useNewTake(previous: PreviousTake | null) {
   const setups = useUploadSetups();
+  const rooms = useUploadRooms();
   const [state, dispatch] = useReducer(uploadReducer, emptyUpload, withHandedOverFiles);
   const leaving = useLeaveGuard(state.sending.phase === 'sending');
   useOpenSheet(state.sending);
   useReading(state.files, dispatch);
   const arranged = arrangement(state.files, state.chosen);
   const setupId = setups.chosen(state.setupHere);
-  const { notYet, upload, stop, forget } = useSending({ state, arranged, previous, setupId, dispatch });
+  const roomId = rooms.chosen(state.roomHere);
+  const where = { setupId, roomId };
+  const { notYet, upload, stop, forget } = useSending({ state, arranged, previous, ...where, dispatch });
 
   const pick = (files: readonly File[], how: 'added' | 'replaced' = 'added') => {
     forget();
@@ -44,6 +48,12 @@ export function useNewTake(previous: PreviousTake | null) {
     chooseSetup: (id: string) => {
       setups.remember(id);
       dispatch({ type: 'setupChosen', setupId: id });
+    },
+    rooms: rooms.all,
+    roomId,
+    chooseRoom: (id: string) => {
+      rooms.remember(id);
+      dispatch({ type: 'roomChosen', roomId: id });
     },
     setFollows: (follows: boolean) => dispatch({ type: 'followsChosen', follows }),
     tick: (id: string, on: boolean) =>

@@ -15,12 +15,14 @@ export function useSending({
   arranged,
   previous,
   setupId,
+  roomId,
   dispatch,
 }: {
   state: UploadState;
   arranged: Arrangement;
   previous: PreviousTake | null;
   setupId: string | null;
+  roomId: string | null;
   dispatch: Dispatch<UploadAction>;
 }) {
   const [notYet, setNotYet] = useState('');
@@ -31,7 +33,12 @@ export function useSending({
     const uploadKey = state.uploadKey ?? newUploadKey();
     dispatch({ type: 'sendStarted', newKey: uploadKey, atMs: Date.now() });
     const take = await send({
-      request: takeRequest({ ...state, uploadKey }, arranged, { previous, setupId, nowMs: Date.now() }),
+      request: takeRequest({ ...state, uploadKey }, arranged, {
+        previous,
+        setupId,
+        roomId,
+        nowMs: Date.now(),
+      }),
       files: arranged.used.map(({ file }) => file),
       onProgress: (sent) => dispatch({ type: 'progressed', report: { ...sent, atMs: Date.now() } }),
       wordsNow: () => ({ title: latest.current.title, note: latest.current.note }),

@@ -1,0 +1,34 @@
+/** What was chosen last in this browser: evenings go on with what stands there. */
+export interface LastChosen {
+  read: () => string | null;
+  write: (id: string) => void;
+}
+
+/** A browser may refuse to keep anything: then the next take begins without. */
+export const lastChosen = (storageKey: string): LastChosen => ({
+  read: () => {
+    try {
+      return localStorage.getItem(storageKey);
+    } catch {
+      return null;
+    }
+  },
+  write: (id) => {
+    try {
+      localStorage.setItem(storageKey, id);
+    } catch {
+      return;
+    }
+  },
+});
+
+/**
+ * What is chosen among those there are: one that is not there any more is none.
+ *
+ * @param here - what was chosen on this page: an id, empty for none, null for nothing yet
+ */
+export const chosenAmong = (
+  those: readonly { id: string }[],
+  here: string | null,
+  last: LastChosen,
+): string | null => those.find(({ id }) => id === (here ?? last.read()))?.id ?? null;
