@@ -18,13 +18,14 @@ const longestMs = 30_000;
 export async function ourReading(path: string, rawPath: string): Promise<Reading> {
   const child = fork(__filename, [path, rawPath]);
   const timer = setTimeout(() => child.kill('SIGKILL'), longestMs);
+  let told: Reading | undefined;
+  child.on('message', (reading: Reading) => (told = reading));
   try {
-    const told = once(child, 'message').then(([reading]) => reading as Reading);
-    const ended = once(child, 'exit').then(([code, signal]): Reading => ({
-      outcome: 'failed',
-      why: signal === 'SIGKILL' ? `not read in ${longestMs / 1000} s` : `ended with ${code ?? signal}`,
-    }));
-    return await Promise.race([told, ended]);
+    // A child may be gone before its last word is read; that has come once the line between the two is closed.
+    await Promise.all([once(child, 'exit'), once(child, 'disconnect')]);
+    const { exitCode: code, signalCode: signal } = child;
+    const hung = signal === 'SIGKILL' && `not read in ${longestMs / 1000} s`;
+    return told ?? { outcome: 'failed', why: hung || `ended with ${code ?? signal}` };
   } finally {
     clearTimeout(timer);
   }
