@@ -71,7 +71,9 @@ test('twelve takes are sent in one go, survive a reload and are ranked as they w
 
   await page.getByLabel('Polarity', { exact: true }).selectOption('as-recorded');
   const order = () =>
-    rankedRows(page).evaluateAll((rows) => rows.map((row) => /(\d+) cm/.exec(row.textContent ?? '')?.[1]));
+    rankedRows(page)
+      .getByRole('radio')
+      .evaluateAll((radios) => radios.map((radio) => /^\d+/.exec(radio.ariaLabel ?? '')?.[0]));
   await expect.poll(order).toEqual([...heightsCm].reverse().map(String));
   await expect(page.getByRole('heading', { level: 1 })).toHaveText(/^Raise the overhead to 106 cm:/);
   await expectReadable(page, 'a ranked try-out');
