@@ -110,8 +110,8 @@ test.describe('the demo’s try-out', () => {
     await page.getByRole('button', { name: 'B is best' }).click();
     await page.getByRole('radio', { name: /^112 cm/ }).check();
     await page.getByLabel('Why 112 cm wins, in your words').fill('Fullest kick.');
-    await page.getByRole('button', { name: 'Make 112 cm the setup' }).click();
-    await expect(page.getByText('112 cm is the setup now.')).toBeVisible();
+    await page.getByRole('button', { name: 'Keep 112 cm as the winner' }).click();
+    await expect(page.getByText('112 cm is kept as the winner.')).toBeVisible();
     await expectReadable(page, 'a try-out with a winner');
   });
 });

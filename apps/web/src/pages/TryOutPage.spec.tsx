@@ -100,8 +100,8 @@ describe('a try-out', () => {
     const chosen = await screen.findByRole('radio', { checked: true });
     const name = /^(\d+ cm)/.exec(chosen.getAttribute('aria-label') ?? '')?.[1] ?? '';
     await userEvent.type(screen.getByLabelText(`Why ${name} wins, in your words`), 'Fullest.');
-    await userEvent.click(screen.getByRole('button', { name: `Make ${name} the setup` }));
-    expect(await screen.findByText(`${name} is the setup now.`)).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: `Keep ${name} as the winner` }));
+    expect(await screen.findByText(`${name} is kept as the winner.`)).toBeInTheDocument();
     const winner = sampleTryOut().places.find(({ position }) => `${position} cm` === name);
     expect(requests.find(({ method }) => method === 'PATCH')?.body).toEqual({
       winnerPlaceId: winner?.id,
@@ -157,6 +157,6 @@ describe('a try-out', () => {
     });
     await line();
     expect(screen.queryByRole('radio')).not.toBeInTheDocument();
-    expect(screen.queryByRole('button', { name: /the setup/ })).not.toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: /as the winner/ })).not.toBeInTheDocument();
   });
 });

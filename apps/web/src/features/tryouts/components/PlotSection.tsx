@@ -54,7 +54,7 @@ export function PlotSection(props: PlotSectionProps) {
   );
 }
 
-/** "ring: the setup now, disc: the fullest, bars: 95 % interval over 16 kick hits a take". */
+/** "ring: where it stands now, disc: the fullest, bars: 95 % interval over 16 kick hits a take". */
 function keyWords(ranked: readonly RankedPlace[], ranking: TryOutRankingResponse): string {
   const best = ranked.find(({ row }) => row.standing === 'best');
   const current = ranked.find(({ isCurrent }) => isCurrent);
@@ -62,7 +62,7 @@ function keyWords(ranked: readonly RankedPlace[], ranking: TryOutRankingResponse
   const [fewest, most] = [Math.min(...hits), Math.max(...hits)];
   const count = fewest === most ? String(most) : `${fewest} to ${most}`;
   return [
-    current && current !== best && 'ring: the setup now',
+    current && current !== best && 'ring: where it stands now',
     best && `disc: the ${ranking.measure === 'low-end' && !ranking.also ? 'fullest' : 'best'}`,
     `bars: 95 % interval over ${count} hits a take`,
   ]

@@ -53,11 +53,11 @@ export function WinnerForm({
           />
         </Box>
         <Button type="submit" aria-disabled={busy}>
-          {busy ? 'Keeping…' : `Make ${winnerName} the setup`}
+          {busy ? 'Keeping…' : `Keep ${winnerName} as the winner`}
         </Button>
       </Flex>
       <Box role="status" marginTop="8px" minHeight="20px" fontSize="caption" color="ink.muted">
-        {isKept && `${winnerName} is the setup now.`}
+        {isKept && `${winnerName} is kept as the winner.`}
       </Box>
       {failure && <FieldError>{failure}</FieldError>}
     </Box>
