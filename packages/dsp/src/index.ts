@@ -10,7 +10,12 @@ export * from './wav/openWav';
 export { WavError, type WavRefusal } from './wav/wavError';
 export * from './wav/wavFacts';
 export * from './wav/wavHeader';
-export * from './measurements/level/trackLevel';
+export {
+  createTrackLevel,
+  type TrackLevel,
+  type TrackLevelFacts,
+  type TrackLevelOptions,
+} from './measurements/level/trackLevel';
 export * from './measurements/level/truePeak';
 export * from './measurements/loudness/kWeighting';
 export * from './measurements/loudness/loudness';

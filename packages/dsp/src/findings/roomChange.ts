@@ -65,6 +65,9 @@ const kindOf = (key: ComparedKey): string => key.split('-')[0];
  * What the takes before and after a change to a room say it did.
  *
  * @param figures - as `compareTakes` gives them
+ * @example
+ * const compared = compareTakes({ before: facts, after: facts, gainKnownSame: true });
+ * roomChange(compared).status // 'cannot-tell'
  */
 export function roomChange(figures: readonly ComparedFigure[]): RoomChangeTold {
   const ofRoom = ROOM_KEYS.flatMap((key) => figures.filter((figure) => figure.key === key));

@@ -93,6 +93,8 @@ function kickOfTwo(
  * The one microphone a file's name speaks of.
  *
  * @returns null for none or both
+ * @example
+ * roleInName('Take3_BassDrum-02.wav') // 'kick'
  */
 export function roleInName(name: string): TrackRole | null {
   const words = roleWords(name);
@@ -102,6 +104,8 @@ export function roleInName(name: string): TrackRole | null {
 /**
  * What is left of a file's name without its ending and the words for a microphone: `Kick 03.wav` and `OH 03.wav` both
  * give `3`. Words and numbers in lower case with one space between; numbers without leading zeros.
+ * @example
+ * stemOfName('Kick 03.wav') // '3'
  */
 export function stemOfName(name: string): string {
   const parts = wordsOf(name, /[^\p{L}\p{N}.]+|(?<=\p{L})(?=\p{N})|(?<=\p{N})(?=\p{L})|\.(?!\d)|(?<!\d)\./u);

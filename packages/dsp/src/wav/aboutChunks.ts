@@ -23,6 +23,9 @@ const loudnessFields = [412, 414, 416, 418, 420];
  *
  * @returns a whole chunk of even length
  * @see EBU Tech 3285 v2 (2011), 2.3 and 2.4
+ * @example
+ * const bext = broadcastChunk({ description: 'Kick and overhead', originator: 'Thudline', date: '2026-12-01', time: '10:00:00' });
+ * bext.length // 610
  */
 export function broadcastChunk(words: BroadcastWords): Uint8Array {
   const history = words.codingHistory ? `${words.codingHistory}\r\n` : '';
@@ -43,6 +46,8 @@ export function broadcastChunk(words: BroadcastWords): Uint8Array {
  *
  * @returns a whole chunk of even length
  * @see Multimedia Programming Interface and Data Specifications 1.0 (1991), "INFO List Chunk" (from memory)
+ * @example
+ * infoChunk({ name: 'Take 12', comment: 'overhead flipped' }).length // 54
  */
 export function infoChunk(words: { name?: string; comment?: string; software?: string }): Uint8Array {
   const parts = (

@@ -16,6 +16,9 @@ const blockFrames = 65_536;
  * @param overhead - of the same rate; flipped, played earlier and louder as the choice says
  * @returns full scale ±1, and beyond where the two add up to more
  * @throws {SignalError} `option` for different rates, or a choice that is no number
+ * @example
+ * const added = addedTrack(file.track(0), file.track(1), { flipped: true, shiftMs: 2, gainDb: 0 });
+ * added.frames // 216000
  */
 export function addedTrack(kick: TrackSource, overhead: TrackSource, choice: Choice): TrackSource {
   const { sampleRateHz } = kick;

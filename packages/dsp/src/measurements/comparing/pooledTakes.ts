@@ -9,6 +9,8 @@ import { median } from '../statistics';
  *
  * @param takes - at least one, of the same microphones
  * @throws {SignalError} `option` without a take
+ * @example
+ * pooledTakes([facts, facts]).hits.length // 16
  */
 export function pooledTakes(takes: readonly TakeFacts[]): TakeFacts {
   const last = takes.at(-1);

@@ -30,6 +30,10 @@ export interface ComparedPolarity {
  * Whether the polarity was switched between two takes: confirmed or contradicted in words.
  *
  * @returns levels are null where a take has nothing to add up
+ * @example
+ * const spectra = { before: spectrum, after: spectrum };
+ * const sound = polarityBetween({ before: facts, after: facts, spectra });
+ * comparedPolarity({ before: figures, after: figures, sound, notedFlip: false }).seen // 'as-before'
  */
 export function comparedPolarity(options: ComparedPolarityOptions): ComparedPolarity {
   const { before, after, sound, notedFlip } = options;

@@ -10,7 +10,14 @@ export interface ComparisonCaveat {
   readonly text: string;
 }
 
-/** Cautions about the comparison itself: what it leaves out, and what take would settle it. */
+/**
+ * Cautions about the comparison itself: what it leaves out, and what take would settle it.
+ * @example
+ * const compared = compareTakes({ before: facts, after: facts, gainKnownSame: false });
+ * const sound = { likeness: 1, seen: 'as-before', hits: 8, turnedHits: 0 };
+ * const polarity = comparedPolarity({ before: figures, after: figures, sound, notedFlip: false });
+ * comparisonCaveats({ figures: compared, polarity, gain: 'unknown' }).length // 2
+ */
 export function comparisonCaveats({
   figures,
   polarity,

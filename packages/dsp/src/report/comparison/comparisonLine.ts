@@ -16,7 +16,13 @@ const SENTENCES = 2;
 /** Low end worth mentioning between two takes (section 8). */
 const LOW_END_STEP_DB = 0.5;
 
-/** The one or two sentences a comparison opens with: what became of what was done, or what changed most, or that nothing did. */
+/**
+ * The one or two sentences a comparison opens with: what became of what was done, or what changed most, or that nothing did.
+ * @example
+ * const sound = { likeness: 1, seen: 'as-before', hits: 8, turnedHits: 0 };
+ * const polarity = comparedPolarity({ before: figures, after: figures, sound, notedFlip: false });
+ * comparisonLine({ isSameTake: true, outcomes: [], polarity, figures: [] })[0].action // 'The same take twice:'
+ */
 export function comparisonLine(options: ComparisonLineOptions): LineSentence[] {
   if (options.isSameTake) {
     return [{ action: 'The same take twice:', reason: 'no clear change, as it should be.' }];

@@ -26,6 +26,8 @@ export interface DoneWords {
  * Words for actions that were carried out between two takes.
  *
  * @param doneActions - ids that nothing is known of are left out: a later version may have made them
+ * @example
+ * doneWords(['flip-overhead']).done // ['overhead polarity switched']
  */
 export function doneWords(doneActions: readonly string[]): DoneWords {
   const known = (Object.keys(words) as ActionId[]).filter((id) => doneActions.includes(id));

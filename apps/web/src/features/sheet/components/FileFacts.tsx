@@ -28,7 +28,12 @@ export function FileFacts({ take }: { take: TakeResponse }) {
             : {named.join(', ')}. {file.encoding}, {file.sampleRateHz / 1000} kHz,{' '}
             {plural(file.channels, 'channel')}, {clock(file.durationS, true)}, {bytes(file.bytes)}
             {file.broadcast && (
-              <Box color="ink.muted" fontSize="caption" overflowWrap="anywhere">
+              <Box
+                color="ink.muted"
+                fontSize="caption"
+                overflowWrap="anywhere"
+                _print={{ display: 'none' }}
+              >
                 {broadcastWords(file.broadcast)}
               </Box>
             )}

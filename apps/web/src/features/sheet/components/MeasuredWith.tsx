@@ -16,7 +16,12 @@ export function MeasuredWith({ take, report }: { take: TakeResponse; report: Rep
     return `as measured on ${date(measuredAt)}, version ${version}`;
   };
   return (
-    <chakra.div fontSize="caption" color="ink.muted" lineHeight="21px" marginTop="7px">
+    <chakra.div
+      fontSize="caption"
+      color="ink.muted"
+      lineHeight={{ base: '21px', _print: '16px' }}
+      marginTop={{ base: '7px', _print: 0 }}
+    >
       Measured {date(report.measuredAt)} with version {report.dspVersion} of the measurements.
       {versions.length > 1 && (
         <chakra.div color="ink" fontSize="small" lineHeight="34px" _print={{ display: 'none' }}>

@@ -16,8 +16,9 @@ export function useAddedListening(takeId: string, sheet: Pick<Listening, 'playin
   }, []);
   useEffect(() => stop, [stop]);
   useEffect(() => {
-    if (sheet.playing) stop();
-  }, [sheet.playing, stop]);
+    // What is paused tells it, and is then let go.
+    if (sheet.playing) audio.current?.pause();
+  }, [sheet.playing]);
 
   const play = async (id: string) => {
     stop();
@@ -27,7 +28,8 @@ export function useAddedListening(takeId: string, sheet: Pick<Listening, 'playin
     const element = new Audio(paths.addedFileListen(takeId, id));
     audio.current = element;
     setPlayingId(id);
-    element.addEventListener('ended', () => audio.current === element && stop());
+    for (const end of ['ended', 'pause'])
+      element.addEventListener(end, () => audio.current === element && stop());
     try {
       await element.play();
     } catch {
