@@ -28,12 +28,7 @@ export function FileFacts({ take }: { take: TakeResponse }) {
             : {named.join(', ')}. {file.encoding}, {file.sampleRateHz / 1000} kHz,{' '}
             {plural(file.channels, 'channel')}, {clock(file.durationS, true)}, {bytes(file.bytes)}
             {file.broadcast && (
-              <Box
-                color="ink.muted"
-                fontSize="caption"
-                overflowWrap="anywhere"
-                _print={{ display: 'none' }}
-              >
+              <Box color="ink.muted" fontSize="caption" overflowWrap="anywhere" _print={{ display: 'none' }}>
                 {broadcastWords(file.broadcast)}
               </Box>
             )}
