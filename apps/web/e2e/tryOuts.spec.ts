@@ -96,7 +96,7 @@ test.describe('the demo’s try-out', () => {
     await expect(page.getByRole('list', { name: 'Try-outs' })).toBeVisible();
     await expectReadable(page, 'try-outs');
     await page.getByRole('link', { name: 'How high the overhead hangs' }).click();
-    await expect(page).toHaveURL(`/tryouts/${list.items[0].id}`);
+    await expect(page).toHaveURL(`/tryouts/${list.items[0]?.id}`);
     await expect(page.getByRole('heading', { level: 1 })).toHaveText(/^Raise the overhead to 112 cm:/);
     await page.getByRole('button', { name: 'Hear them all' }).click();
     await expect(page.getByRole('button', { name: 'Stop' })).toBeVisible();
