@@ -1,5 +1,4 @@
-import { useEffect } from 'react';
-import { isForPage } from '../../sheet/hooks/pageKeys';
+import { usePageKeys } from '../../sheet/hooks/usePageKeys';
 import type { TwoTakes } from './useTwoTakes';
 
 interface CompareKeys {
@@ -23,14 +22,7 @@ export const compareKeyWords: [keys: string, does: string][] = [
 
 /** Single keys of a comparison; they can be switched off (WCAG 2.1.4). */
 export function useCompareKeys(keys: CompareKeys) {
-  useEffect(() => {
-    if (!keys.singleKeys) return;
-    const onKeyDown = (event: KeyboardEvent) => {
-      if (isForPage(event) && act(event.key, keys)) event.preventDefault();
-    };
-    document.addEventListener('keydown', onKeyDown);
-    return () => document.removeEventListener('keydown', onKeyDown);
-  });
+  usePageKeys(keys.singleKeys, (key) => act(key, keys));
 }
 
 /** @returns whether the key meant something */

@@ -1,8 +1,7 @@
-import { useEffect } from 'react';
 import type { Excerpt } from './useExcerpt';
 import type { Bench } from './useChoice';
 import type { Listening } from './useListening';
-import { isForPage } from './pageKeys';
+import { usePageKeys } from './usePageKeys';
 
 interface SheetKeys {
   singleKeys: boolean;
@@ -27,14 +26,7 @@ export const sheetKeyWords: [keys: string, does: string][] = [
 
 /** Single keys of the sheet; they can be switched off (WCAG 2.1.4). */
 export function useSheetKeys(keys: SheetKeys) {
-  useEffect(() => {
-    if (!keys.singleKeys) return;
-    const onKeyDown = (event: KeyboardEvent) => {
-      if (isForPage(event) && act(event.key, keys)) event.preventDefault();
-    };
-    document.addEventListener('keydown', onKeyDown);
-    return () => document.removeEventListener('keydown', onKeyDown);
-  });
+  usePageKeys(keys.singleKeys, (key) => act(key, keys));
 }
 
 /** @returns whether the key meant something */

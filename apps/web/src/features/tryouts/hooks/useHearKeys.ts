@@ -1,5 +1,4 @@
-import { useEffect } from 'react';
-import { isForPage } from '../../sheet/hooks/pageKeys';
+import { usePageKeys } from '../../sheet/hooks/usePageKeys';
 import type { HearAll } from './useHearAll';
 
 /** What every single key of a try-out does, for the list of keys. */
@@ -20,15 +19,7 @@ interface HearKeys {
 
 /** Single keys of a try-out; they can be switched off (WCAG 2.1.4). */
 export function useHearKeys(keys: HearKeys) {
-  useEffect(() => {
-    if (!keys.singleKeys) return;
-    const onKeyDown = (event: KeyboardEvent) => {
-      // Arrows in the winner's radio buttons move among these.
-      if (isForPage(event) && act(event.key, keys)) event.preventDefault();
-    };
-    document.addEventListener('keydown', onKeyDown);
-    return () => document.removeEventListener('keydown', onKeyDown);
-  });
+  usePageKeys(keys.singleKeys, (key) => act(key, keys));
 }
 
 /** @returns whether the key meant something */
