@@ -7,6 +7,7 @@ import { Config } from './config/config';
 import { ConfigModule } from './config/config.module';
 import { databaseModule } from './database/database.module';
 import { HousekeepingService } from './housekeeping/housekeeping.service';
+import { StoreRepair } from './housekeeping/store-repair';
 import { TakePurge } from './housekeeping/take-purge';
 import { loggerModule } from './logging/logger.module';
 import { MailWorker } from './mail/mail-worker';
@@ -56,6 +57,7 @@ export class WorkerModule {
         MailWriter,
         MailWorker,
         TakePurge,
+        StoreRepair,
         HousekeepingService,
       ],
     };

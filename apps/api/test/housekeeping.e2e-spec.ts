@@ -3,6 +3,7 @@ import { listTakesResponse, paths } from '@thudline/contracts';
 import { Session } from '../src/auth/entities/session.entity';
 import { AuditEvent } from '../src/audit/entities/audit-event.entity';
 import { HousekeepingService } from '../src/housekeeping/housekeeping.service';
+import { StoreRepair } from '../src/housekeeping/store-repair';
 import { TakePurge } from '../src/housekeeping/take-purge';
 import { Measurement } from '../src/measuring/entities/measurement.entity';
 import { Report } from '../src/reports/entities/report.entity';
@@ -28,7 +29,7 @@ describe('housekeeping', () => {
 
   const housekeeper = (objects = test.app.get(ObjectStoreService, { strict: false })) => {
     const em = test.app.get(EntityManager);
-    return new HousekeepingService(em, new TakePurge(em, objects));
+    return new HousekeepingService(em, new TakePurge(em, objects), new StoreRepair(em, objects));
   };
 
   it('removes takes and their recordings thirty days after they were deleted, not before', async () => {

@@ -3,6 +3,7 @@ import { BeforeApplicationShutdown, Injectable, Logger, OnApplicationBootstrap }
 import { Session } from '../auth/entities/session.entity';
 import { OneTimeToken } from '../tokens/entities/one-time-token.entity';
 import { Throttle } from '../throttle/entities/throttle.entity';
+import { StoreRepair } from './store-repair';
 import { TakePurge } from './take-purge';
 
 const hourMs = 60 * 60 * 1000;
@@ -14,21 +15,24 @@ const endedSessionKeptMs = 30 * dayMs;
 @Injectable()
 export class HousekeepingService implements OnApplicationBootstrap, BeforeApplicationShutdown {
   private readonly logger = new Logger(HousekeepingService.name);
-  private timer: NodeJS.Timeout | undefined;
+  private timers: NodeJS.Timeout[] = [];
 
   constructor(
     private readonly em: EntityManager,
     private readonly purge: TakePurge,
+    private readonly repair: StoreRepair,
   ) {}
 
   onApplicationBootstrap(): void {
-    this.timer = setInterval(() => {
-      this.run(new Date()).catch((error: unknown) => this.logger.error(error, 'Housekeeping failed'));
-    }, hourMs);
+    const every = (ms: number, job: (now: Date) => Promise<unknown>) =>
+      setInterval(() => {
+        job(new Date()).catch((error: unknown) => this.logger.error(error, 'Housekeeping failed'));
+      }, ms);
+    this.timers = [every(hourMs, (now) => this.run(now)), every(dayMs, (now) => this.repair.run({ now }))];
   }
 
   beforeApplicationShutdown(): void {
-    clearInterval(this.timer);
+    for (const timer of this.timers) clearInterval(timer);
   }
 
   async run(now: Date): Promise<void> {

@@ -7,8 +7,10 @@ import {
   DeleteObjectsCommand,
   GetObjectCommand,
   HeadBucketCommand,
+  HeadObjectCommand,
   ListObjectsV2Command,
   NoSuchKey,
+  NotFound,
   PutObjectCommand,
   S3Client,
 } from '@aws-sdk/client-s3';
@@ -23,6 +25,11 @@ interface StoredFile {
   path: string;
   bytes: number;
   sha256: string;
+}
+
+interface StoredObject {
+  key: string;
+  storedAt: Date;
 }
 
 /** Where the bytes of recordings are kept. Every failure of the service is `storage-unavailable`. */
@@ -118,6 +125,32 @@ export class ObjectStoreService implements OnApplicationShutdown {
         // One after the other: simple stores stumble over neighbours that go at the same moment.
         for (const key of keys)
           await this.client.send(new DeleteObjectCommand({ Bucket: this.bucket, Key: key }));
+      }
+    });
+  }
+
+  /** Every object there is, in pages of at most a thousand. */
+  async *pages(): AsyncGenerator<StoredObject[]> {
+    let from: string | undefined;
+    do {
+      const list = new ListObjectsV2Command({ Bucket: this.bucket, ContinuationToken: from });
+      const listed = await this.answered(() => this.client.send(list));
+      yield (listed.Contents ?? []).map(({ Key = '', LastModified }) => ({
+        key: Key,
+        storedAt: LastModified ?? new Date(),
+      }));
+      from = listed.NextContinuationToken;
+    } while (from);
+  }
+
+  async has(key: string): Promise<boolean> {
+    return this.answered(async () => {
+      try {
+        await this.client.send(new HeadObjectCommand({ Bucket: this.bucket, Key: key }));
+        return true;
+      } catch (error) {
+        if (error instanceof NotFound || error instanceof NoSuchKey) return false;
+        throw error;
       }
     });
   }
