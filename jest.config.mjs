@@ -21,6 +21,7 @@ const tsJest = (tsconfig = {}) => ({
 /** Packages are tested from source; only worker threads need `dist`. */
 const moduleNameMapper = {
   '^@thudline/(contracts|dsp|measure)$': '<rootDir>/packages/$1/src/index.ts',
+  '^@thudline/dsp/measuring$': '<rootDir>/packages/dsp/src/measuring.ts',
   '^@thudline/fixtures$': '<rootDir>/fixtures/src/index.ts',
 };
 

@@ -11,8 +11,6 @@ export const errorCodes = [
   'wrong-sign-in',
   'session-ended',
   'link-ended',
-  'passphrase-needed',
-  'wrong-passphrase',
   'read-only',
   'too-large',
   'too-many-files',

@@ -18,7 +18,7 @@ export {
 } from './measurements/level/trackLevel';
 export * from './measurements/level/truePeak';
 export * from './measurements/loudness/kWeighting';
-export * from './measurements/loudness/loudness';
+export { createLoudness, type Loudness, type LoudnessOptions } from './measurements/loudness/loudness';
 export * from './roles/guessRoles';
 export * from './roles/lowEndRatio';
 export * from './measureTake';

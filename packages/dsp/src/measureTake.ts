@@ -3,13 +3,15 @@ import type { FileNotice, HitFacts, PairFacts, TakeMeasurement, TrackRole } from
 import { fileNotices } from './measurements/fileNotices';
 import { listHits, loudestHitDbfs, type KickHit } from './measurements/hits/listHits';
 import { notLinedUp } from './measurements/lateStart/notLinedUp';
-import { playedEarlier } from './measurements/lateStart/playedEarlier';
-import { overheadFacts } from './measurements/overheadFacts';
-import { readPair, type PairReading } from './measurements/measurePair';
+import { pairReading, type PairReading } from './measurements/pairReading';
+import type { PairPart } from './measurements/readPairPart';
 import { streamTake } from './measurements/streamTake';
+import { createTakeSteps, type PairPartRequest, type TakeSteps } from './measurements/takeSteps';
 import type { TrackSource } from './trackSource';
 
 export type MeasureStage = 'levels' | 'hits' | 'arrival' | 'adding-up';
+
+type OnStage = (stage: MeasureStage, progress01: number) => void;
 
 export interface MeasureTakeOptions {
   /** Exactly one of them the kick; all of one sample rate. Measured over the shortest. */
@@ -17,14 +19,16 @@ export interface MeasureTakeOptions {
   /** What reading the files already showed. */
   readonly notices?: readonly FileNotice[];
   /** Told often: at every block and at every hit. */
-  readonly onStage?: (stage: MeasureStage, progress01: number) => void;
+  readonly onStage?: OnStage;
+  /** Takes half of the work, in another thread: `createTakeSteps` of the same tracks. The outcome is the same. */
+  readonly beside?: TakeSteps;
 }
 
 /**
  * Measures one take: levels, hits, arrival and how the microphones add.
  *
- * One pass over all samples side by side, then one read around each kick hit; memory doesn't grow with the length but for
- * the list of hits.
+ * One pass over the samples of each track, side by side, then one read around each kick hit; memory doesn't grow with the
+ * length but for the list of hits.
  *
  * @returns facts only; judgements are made on reading, see `report/`
  * @throws {SignalError} `option` without exactly one kick or with different rates; `not-finite` for broken samples
@@ -38,37 +42,43 @@ export async function measureTake({
   tracks,
   notices = [],
   onStage = () => undefined,
+  beside,
 }: MeasureTakeOptions): Promise<TakeMeasurement> {
   const { kick, others, sampleRateHz } = checked(tracks);
   const sources = tracks.map((track) => track.source);
+  const here = createTakeSteps(sources);
   const streamed = await streamTake({
     sources,
+    steps: { here, beside: beside ?? here },
     kick,
     overhead: others[0] ?? kick,
     onProgress: (progress) => onStage('levels', progress),
   });
   const { lateStart } = streamed;
   const lateSamples = Math.round(((lateStart?.overheadLateMs ?? 0) / 1000) * sampleRateHz);
-  const linedUp = sources.map((source, track) =>
-    lateSamples !== 0 && track === others[0] ? playedEarlier(source, lateSamples) : source,
-  );
-  const readings = await readPairs({ sources: linedUp, kick, others, candidates: streamed.kicks, onStage });
+  const readings: PairReading[] = [];
+  for (const [index, other] of others.entries()) {
+    const late = index === 0 ? lateSamples : 0;
+    const request = { kick, overhead: other, lateSamples: late, candidates: streamed.kicks };
+    const onProgress = (progress: number): void => onStage('hits', (index + progress) / others.length);
+    readings.push(pairReading(await readHalves({ here, beside }, request, onProgress), sampleRateHz));
+  }
   const kickHits = kickHitsOfTake(readings, { kick, others, tracks: tracks.length });
   const hits = listHits(kickHits, streamed.overheadHits, { sampleRateHz, lateSamples });
-  const fromOverhead =
-    others.length > 0 ? await overheadFacts(sources[others[0]], { hits, place: others[0] }) : {};
-  onStage('arrival', 1);
+  const overheadFacts =
+    others.length > 0 ? awaited((beside ?? here).overhead({ hits, place: others[0] })) : null;
   const pairs = readings.map((reading, index) => {
-    const facts = pairFacts(reading, hits, { a: kick, b: others[index] });
+    const facts = pairFacts(reading, hits, { places: { a: kick, b: others[index] }, onStage });
     return index === 0 && lateStart ? notLinedUp(facts, lateStart) : facts;
   });
-  onStage('adding-up', 1);
-  const trackFacts = streamed.levels.map((level, index) => ({
+  const trackFacts = streamed.tracks.map(({ level }, index) => ({
     ...level,
     role: tracks[index].role,
     loudestHitDbfs: loudestHitDbfs(hits, index),
   }));
   const seen = fileNotices({ sources, tracks: trackFacts, pairs, sameTwice: streamed.sameTwice });
+  const fromOverhead = await overheadFacts;
+  onStage('adding-up', 1);
   return {
     facts: {
       version: 2,
@@ -80,7 +90,7 @@ export async function measureTake({
       notices: [...notices, ...seen],
       ...fromOverhead,
     },
-    peaks: streamed.peaks,
+    peaks: streamed.tracks.map(({ outline }) => outline),
     pairSpectra: readings.map((reading, index) => (pairs[index].spectrum ? reading.spectrum : null)),
   };
 }
@@ -99,25 +109,29 @@ function checked(tracks: MeasureTakeOptions['tracks']): {
   return { kick: kicks[0], others, sampleRateHz: tracks[0].source.sampleRateHz };
 }
 
-async function readPairs({
-  sources,
-  kick,
-  others,
-  candidates,
-  onStage,
-}: {
-  sources: readonly TrackSource[];
-  kick: number;
-  others: readonly number[];
-  candidates: Parameters<typeof readPair>[0]['candidates'];
-  onStage: NonNullable<MeasureTakeOptions['onStage']>;
-}): Promise<PairReading[]> {
-  const readings: PairReading[] = [];
-  for (const [index, other] of others.entries()) {
-    const onProgress = (progress: number): void => onStage('hits', (index + progress) / others.length);
-    readings.push(await readPair({ kick: sources[kick], overhead: sources[other], candidates, onProgress }));
+/** Always in the same two halves, so that the sums are the same to the last bit whoever adds them up. */
+async function readHalves(
+  { here, beside }: { readonly here: TakeSteps; readonly beside: TakeSteps | undefined },
+  request: Omit<PairPartRequest, 'from' | 'to'>,
+  onProgress: (progress01: number) => void,
+): Promise<PairPart[]> {
+  const count = request.candidates.length;
+  const middle = Math.ceil(count / 2);
+  const first = { ...request, from: 0, to: middle };
+  const second = { ...request, from: middle, to: count };
+  const elsewhere = beside && awaited(beside.pairPart(first, () => undefined));
+  const half = (at: number) => (progress: number) => onProgress(beside ? progress : (at + progress) / 2);
+  if (elsewhere) {
+    const own = await here.pairPart(second, half(1));
+    return [await elsewhere, own];
   }
-  return readings;
+  return [await here.pairPart(first, half(0)), await here.pairPart(second, half(1))];
+}
+
+/** It is awaited later; until then its failure is not unheard of. */
+function awaited<Result>(promise: Promise<Result>): Promise<Result> {
+  promise.catch(() => undefined);
+  return promise;
 }
 
 /** Every pair was read at the same hits, so their peaks join into one list a hit. */
@@ -136,14 +150,19 @@ function kickHitsOfTake(
 function pairFacts(
   reading: PairReading,
   hits: readonly HitFacts[],
-  places: { readonly a: number; readonly b: number },
+  {
+    places,
+    onStage,
+  }: { readonly places: { readonly a: number; readonly b: number }; readonly onStage: OnStage },
 ): PairFacts {
-  const { arrival, spectrum } = reading;
+  const { spectrum } = reading;
+  const arrival = reading.arrival();
+  onStage('arrival', 1);
   return {
     ...places,
     lateStart: null,
     arrival,
-    agreement: reading.agreement(hits, places),
+    agreement: reading.agreement(arrival, hits, places),
     spectrum: spectrum && {
       binHz: spectrum.binHz,
       binCount: spectrum.skk.length,

@@ -16,6 +16,9 @@ export interface TrackSource {
   readonly quantisationStep: number | null;
   /** All samples in order, in blocks of bounded size. A block may be reused: copy what must stay. */
   blocks(): AsyncIterable<Float32Array>;
-  /** @returns the samples from `startFrame` to `endFrame` (exclusive); zeros outside the file */
-  read(startFrame: number, endFrame: number): Promise<Float32Array>;
+  /**
+   * @param into - room that may be filled instead of new memory, if it is large enough; the caller's until the promise ends
+   * @returns the samples from `startFrame` to `endFrame` (exclusive); zeros outside the file
+   */
+  read(startFrame: number, endFrame: number, into?: Float32Array): Promise<Float32Array>;
 }

@@ -1,3 +1,4 @@
+import './helper/startFirst';
 import { resolve } from 'node:path';
 import { measureCommand } from './cli/measureCommand';
 

@@ -1,4 +1,6 @@
-import { measureTake, type MeasureStage, type TakeMeasurement, type WavFacts } from '@thudline/dsp';
+import type { TakeMeasurement, WavFacts } from '@thudline/dsp';
+import { measureTake, type MeasureStage } from '@thudline/dsp/measuring';
+import { takeHelper, type TakeHelper } from './helper/takeHelper';
 import { withOpenFiles } from './openFiles';
 import { chosenTracks, headerNotices, type TrackChoice } from './trackChoice';
 
@@ -33,12 +35,13 @@ export interface MeasuredFiles {
  */
 export async function measureFiles(options: MeasureFilesOptions): Promise<MeasuredFiles> {
   options.signal?.throwIfAborted();
-  return withOpenFiles(
-    options.files.map(({ path }) => path),
-    async (files) => {
+  const paths = options.files.map(({ path }) => path);
+  return withHelper((helper) =>
+    withOpenFiles(paths, async (files) => {
       const take = await measureTake({
         tracks: chosenTracks(files, options.tracks),
         notices: headerNotices(files, options.tracks),
+        beside: helper?.steps({ paths, tracks: options.tracks }),
         onStage(stage, progress) {
           options.signal?.throwIfAborted();
           options.onStage?.(stage, progress);
@@ -52,6 +55,19 @@ export async function measureFiles(options: MeasureFilesOptions): Promise<Measur
           facts: wav.facts,
         })),
       };
-    },
+    }),
   );
+}
+
+/** Started before anything else, since a thread takes a while until it can do something. */
+async function withHelper<Result>(use: (helper: TakeHelper | null) => Promise<Result>): Promise<Result> {
+  const helper = takeHelper();
+  try {
+    const result = await use(helper);
+    helper?.rest();
+    return result;
+  } catch (error) {
+    helper?.end();
+    throw error;
+  }
 }

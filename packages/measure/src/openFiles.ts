@@ -1,4 +1,4 @@
-import { openWav, WavError, type WavFile } from '@thudline/dsp';
+import { openWav, WavError, type WavFile } from '@thudline/dsp/measuring';
 import { fileByteSource, type FileByteSource } from './fileByteSource';
 import { MeasureRefusal } from './measureRefusal';
 

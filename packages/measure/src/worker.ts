@@ -1,5 +1,6 @@
 import type { MessagePort } from 'node:worker_threads';
-import { encodePairSpectrum, encodePeaks, type MeasureStage, type TakeFacts } from '@thudline/dsp';
+import type { TakeFacts } from '@thudline/dsp';
+import { encodePairSpectrum, encodePeaks, type MeasureStage } from '@thudline/dsp/measuring';
 import { measureFiles, type MeasuredFile } from './measureFiles';
 import { MeasureRefusal, type MeasureRefusalFacts } from './measureRefusal';
 import type { TrackChoice } from './trackChoice';

@@ -36,6 +36,6 @@ const jwt = JwtModule.registerAsync({
     PasswordsService,
     SessionsService,
   ],
-  exports: [PasswordsService, SessionsService],
+  exports: [SessionsService],
 })
 export class AuthModule {}

@@ -14,7 +14,7 @@ export class ComparisonsController {
 
   /** What changed from the first take to the other, and how surely. */
   @Get()
-  @Access.comparison('read')
+  @Access.takePair('read')
   @ZodResponse({ status: 200, type: ComparisonResponseDto })
   get(
     @Param('id') beforeId: string,

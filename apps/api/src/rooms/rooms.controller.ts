@@ -36,10 +36,9 @@ export class RoomsController {
   }
 
   @Get(':roomId')
-  @Access.room('read')
   @ZodResponse({ status: 200, type: RoomResponseDto })
-  get(@Param('roomId') roomId: string) {
-    return this.rooms.get(roomId);
+  get(@CurrentViewer() viewer: Viewer, @Param('roomId') roomId: string) {
+    return this.rooms.get(viewer, roomId);
   }
 
   @Patch(':roomId')
@@ -56,9 +55,8 @@ export class RoomsController {
   }
 
   @Get(':roomId/trend')
-  @Access.room('read')
   @ZodResponse({ status: 200, type: RoomTrendResponseDto })
-  trend(@Param('roomId') roomId: string, @Query() query: RoomTrendDto) {
-    return this.trends.get(roomId, query);
+  trend(@CurrentViewer() viewer: Viewer, @Param('roomId') roomId: string, @Query() query: RoomTrendDto) {
+    return this.trends.get(viewer, roomId, query);
   }
 }

@@ -1,20 +1,16 @@
 import { OpenedShareResponse, ShareResponse } from '@thudline/contracts';
 import { Share } from './entities/share.entity';
-import { subjectOf } from './share-subject';
 
 const told = (date: Date | null | undefined) => date?.toISOString() ?? null;
 
 export function shareResponseOf(share: Share): ShareResponse {
-  const { id, label, question, canListen, canDownload, canNote, openCount } = share;
+  const { id, question, canListen, canDownload, openCount } = share;
   return {
     id,
-    subject: subjectOf(share),
-    label,
+    takeId: share.take.id,
     question,
     canListen,
     canDownload,
-    canNote,
-    hasPassphrase: Boolean(share.passphraseHash),
     createdAt: share.createdAt.toISOString(),
     expiresAt: told(share.expiresAt),
     revokedAt: told(share.revokedAt),
@@ -25,14 +21,13 @@ export function shareResponseOf(share: Share): ShareResponse {
 
 /** @param share - with its owner */
 export function openedShareResponseOf(share: Share): OpenedShareResponse {
-  const { question, canListen, canDownload, canNote } = share;
+  const { question, canListen, canDownload } = share;
   return {
-    subject: subjectOf(share),
+    takeId: share.take.id,
     from: share.owner.unwrap().name,
     question,
     expiresAt: told(share.expiresAt),
     canListen,
     canDownload,
-    canNote,
   };
 }

@@ -2,8 +2,7 @@ import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post, Query } fr
 import { ApiNoContentResponse, ApiTags } from '@nestjs/swagger';
 import { ZodResponse } from 'nestjs-zod';
 import { Access } from '../access/access.decorator';
-import { TakeRights } from '../access/take-rights';
-import { CurrentRights, CurrentViewer, Viewer } from '../access/viewer';
+import { CurrentViewer, Viewer } from '../access/viewer';
 import {
   CreateTryOutDto,
   ListTryOutsResponseDto,
@@ -16,7 +15,7 @@ import {
 import { TryOutRankingService } from './try-out-ranking.service';
 import { TryOutsService } from './try-outs.service';
 
-/** What changes one is its owner's alone: the service answers 404 to everybody else. */
+/** Each is its owner's alone: the service answers 404 to everybody else. */
 @ApiTags('try-outs')
 @Controller('api/tryouts')
 export class TryOutsController {
@@ -40,10 +39,10 @@ export class TryOutsController {
   }
 
   @Get(':id')
-  @Access.tryOut('read')
+  @Access.signedIn()
   @ZodResponse({ status: 200, type: TryOutResponseDto })
-  get(@Param('id') id: string, @CurrentRights() rights: TakeRights) {
-    return this.tryOuts.get(id, rights);
+  get(@CurrentViewer() viewer: Viewer, @Param('id') id: string) {
+    return this.tryOuts.get(viewer, id);
   }
 
   @Patch(':id')
@@ -82,9 +81,9 @@ export class TryOutsController {
   }
 
   @Get(':id/ranking')
-  @Access.tryOut('read')
+  @Access.signedIn()
   @ZodResponse({ status: 200, type: TryOutRankingResponseDto })
-  rank(@Param('id') id: string, @Query() query: TryOutRankingDto) {
-    return this.rankings.rank(id, query);
+  rank(@CurrentViewer() viewer: Viewer, @Param('id') id: string, @Query() query: TryOutRankingDto) {
+    return this.rankings.rank(viewer, id, query);
   }
 }

@@ -5,25 +5,18 @@ import {
   OpenedShareResponse,
   openedShareResponse,
   paths,
-  ShareSubject,
   TakeResponse,
 } from '@thudline/contracts';
 import { Browser, Person } from './person';
 
-export async function linkTo(
-  person: Person,
-  subject: ShareSubject,
-  request: Partial<CreateShareRequest> = {},
-): Promise<CreatedShareResponse> {
-  const response = await person.post(paths.shares, { subject, ...request }).expect(201);
-  return createdShareResponse.parse(response.body);
-}
-
-export const sharedBy = (
+export async function sharedBy(
   person: Person,
   take: TakeResponse,
-  request: Partial<CreateShareRequest> = {},
-): Promise<CreatedShareResponse> => linkTo(person, { kind: 'take', takeId: take.id }, request);
+  request: CreateShareRequest = {},
+): Promise<CreatedShareResponse> {
+  const response = await person.post(paths.shares(take.id), request).expect(201);
+  return createdShareResponse.parse(response.body);
+}
 
 export const tokenOf = ({ url }: { url: string }) => url.split('/').at(-1) ?? '';
 

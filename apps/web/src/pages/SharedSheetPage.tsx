@@ -17,15 +17,15 @@ export function SharedSheetPage() {
   usePageTitle(opened ? `A sheet from ${opened.from}` : 'A sheet');
   return (
     <PageFrame corner={opened && <SentBy opened={opened} />}>
-      {opened?.subject.kind === 'take' ? (
+      {opened ? (
         <ReadOnlySheet
-          takeId={opened.subject.takeId}
+          takeId={opened.takeId}
           above={<GuestQuestion opened={opened} />}
           gone={(cause) => isEnded(cause) && <LinkEnded />}
         />
-      ) : !error && !opened ? (
+      ) : !error ? (
         <PageLoading />
-      ) : !error || isEnded(error) ? (
+      ) : isEnded(error) ? (
         <LinkEnded />
       ) : (
         <PageMessage strong="The sheet could not be opened." rest={error.message}>

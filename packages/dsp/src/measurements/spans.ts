@@ -1,8 +1,11 @@
+import { createSpanKernel, type BandFilter, type SpanFigures } from '../kernel/spanKernel';
+import { createBandEnergy } from './filters/bandEnergy';
+
 /**
  * A block cut into spans, each with its extremes and sums, so that whoever looks for something loud can pass the rest by.
  * Only good until the next block is cut.
  */
-export interface Spans {
+export interface Spans extends SpanFigures {
   readonly count: number;
   /** Where each span ends in the block, not included; it begins where the one before ends. */
   readonly ends: Int32Array;
@@ -11,6 +14,8 @@ export interface Spans {
   readonly sums: Float64Array;
   /** Sums of squares; not finite where the span holds a value that is no number. */
   readonly energies: Float64Array;
+  /** Sums of squares of what each of the cutter's filters lets through. */
+  readonly heard: readonly Float64Array[];
 }
 
 export interface SpanCutter {
@@ -27,12 +32,21 @@ export function everySamples(count: number): Border {
   return (at) => (Math.floor(at / count) + 1) * count;
 }
 
-/** @param borders - no span crosses one of these, so that whole spans can be added up between them */
-export function createSpanCutter(borders: readonly Border[]): SpanCutter {
-  const spans = { ...emptySpans(0), count: 0 };
+/**
+ * @param borders - no span crosses one of these, so that whole spans can be added up between them
+ * @param filters - whose energy is told of each span
+ * @param kernel - null for plain loops, which do the same
+ */
+export function createSpanCutter(
+  borders: readonly Border[],
+  filters: readonly BandFilter[] = [],
+  kernel = filters.length > 0 ? createSpanKernel(filters) : null,
+): SpanCutter {
+  const spans = { ...emptySpans(0, filters.length), count: 0 };
+  const bands = kernel ? [] : filters.map(createBandEnergy);
   const next = borders.map((border) => border(0));
   let position = 0;
-  const ends = (from: number): number => {
+  const endAfter = (from: number): number => {
     const at = position + from;
     let nearest = at + longestSpan;
     for (let b = 0; b < borders.length; b += 1) {
@@ -45,11 +59,19 @@ export function createSpanCutter(borders: readonly Border[]): SpanCutter {
     cut(block) {
       spans.count = 0;
       for (let from = 0; from < block.length;) {
-        const to = Math.min(block.length, ends(from));
+        const to = Math.min(block.length, endAfter(from));
         if (spans.count === spans.ends.length) Object.assign(spans, longer(spans));
-        gather(spans, block, { from, to });
+        spans.ends[spans.count] = to;
+        if (!kernel) {
+          gather(spans, block, { from, to });
+          bands.forEach((band, index) => {
+            spans.heard[index][spans.count] = band.next(block, from, to);
+          });
+        }
+        spans.count += 1;
         from = to;
       }
+      kernel?.measure(block, spans.ends, { first: 0, last: spans.count, into: spans });
       position += block.length;
       return spans;
     },
@@ -61,11 +83,7 @@ export function largestOfSpan(spans: Spans, index: number): number {
   return Math.max(-spans.lows[index], spans.highs[index]);
 }
 
-function gather(
-  spans: Spans & { count: number },
-  block: Float32Array,
-  { from, to }: { from: number; to: number },
-): void {
+function gather(spans: Spans, block: Float32Array, { from, to }: { from: number; to: number }): void {
   let low = block[from];
   let high = low;
   let sum = 0;
@@ -78,25 +96,24 @@ function gather(
     energy += sample * sample;
   }
   const at = spans.count;
-  spans.ends[at] = to;
   spans.lows[at] = low;
   spans.highs[at] = high;
   spans.sums[at] = sum;
   spans.energies[at] = energy;
-  spans.count = at + 1;
 }
 
-function emptySpans(room: number): Omit<Spans, 'count'> {
-  const [lows, highs, sums, energies] = Array.from({ length: 4 }, () => new Float64Array(room));
-  return { ends: new Int32Array(room), lows, highs, sums, energies };
+function emptySpans(room: number, filters: number): Omit<Spans, 'count'> {
+  const [lows, highs, sums, energies, ...heard] = Array.from(
+    { length: 4 + filters },
+    () => new Float64Array(room),
+  );
+  return { ends: new Int32Array(room), lows, highs, sums, energies, heard };
 }
 
 function longer(spans: Spans): Omit<Spans, 'count'> {
-  const grown = emptySpans(2 * spans.ends.length + 256);
+  const grown = emptySpans(2 * spans.ends.length + 256, spans.heard.length);
   grown.ends.set(spans.ends);
-  grown.lows.set(spans.lows);
-  grown.highs.set(spans.highs);
-  grown.sums.set(spans.sums);
-  grown.energies.set(spans.energies);
+  for (const name of ['lows', 'highs', 'sums', 'energies'] as const) grown[name].set(spans[name]);
+  spans.heard.forEach((energies, index) => grown.heard[index].set(energies));
   return grown;
 }

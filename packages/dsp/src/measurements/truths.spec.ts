@@ -1,4 +1,5 @@
 import { arrayTrack } from '../testing/arrayTrack';
+import { createLowHops } from '../testing/lowHops';
 import { randomNumbers } from '../testing/randomNumbers';
 import { smallKit, type SmallKit } from '../testing/smallKit';
 import { flipGain } from './agreement/choiceLevels';
@@ -7,19 +8,22 @@ import { butterworthHighPass } from './filters/butterworth';
 import { filtered } from './filters/filterChain';
 import { createKickCandidates } from './hits/kickCandidates';
 import { selectKicks } from './hits/selectKicks';
-import { readPair } from './measurePair';
+import { pairReading } from './pairReading';
+import { readPairPart } from './readPairPart';
 
 /** The rules that section 5 and 3 give a figure for, tried on seeded kits whose truth is known (decisions/0014). */
 const sampleRateHz = 48000;
 const { exp, sin, PI } = Math;
 
 const read = ({ kick, overhead, kickAt }: Pick<SmallKit, 'kick' | 'overhead' | 'kickAt'>) =>
-  readPair({
+  readPairPart({
     kick: arrayTrack(kick, sampleRateHz),
     overhead: arrayTrack(overhead, sampleRateHz),
     candidates: kickAt.map((at) => ({ atSample: at + 400, kickDb: -10, overheadDb: -20 })),
+    from: 0,
+    to: kickAt.length,
     onProgress: () => undefined,
-  });
+  }).then((part) => pairReading([part], sampleRateHz));
 const verdictOn = async (take: Parameters<typeof read>[0]) => {
   const reading = await read(take);
   const hits = reading.kickHits.map(({ peaks }, i) => ({
@@ -27,7 +31,7 @@ const verdictOn = async (take: Parameters<typeof read>[0]) => {
     kind: 'kick' as const,
     peaksDbfs: peaks.map((peak) => 20 * Math.log10(peak)),
   }));
-  return reading.agreement(hits, { a: 0, b: 1 });
+  return reading.agreement(reading.arrival(), hits, { a: 0, b: 1 });
 };
 /** The overhead of another pass: every hit up to 60 ms early or late. */
 const otherPass = ({ overhead, kickAt }: SmallKit, seed: number): Float32Array => {
@@ -94,7 +98,7 @@ describe('kicks among toms', () => {
   };
   const found = ({ kick, overhead }: SmallKit) => {
     const finder = createKickCandidates(sampleRateHz);
-    finder.push(kick, overhead);
+    finder.push(createLowHops(sampleRateHz).push(kick, overhead));
     return selectKicks(finder.result(), sampleRateHz).map(({ atSample }) => atSample);
   };
   const right = (kit: SmallKit, at: readonly number[]): number =>

@@ -20,6 +20,10 @@ export interface WavFile {
   blocks(): AsyncIterable<Float32Array[]>;
 }
 
+/** Rooms that are kept for excerpts, none larger than what is read around a hit. */
+const roomsKept = 4;
+const largestRoom = 1024 * 1024;
+
 /** Read from the source at once: large enough for a disk, small enough for many measurements side by side. */
 const blockBytes = 256 * 1024;
 
@@ -76,6 +80,7 @@ function track(source: ByteSource, facts: WavFacts, channel: number): TrackSourc
   if (!Number.isInteger(channel) || channel < 0 || channel >= facts.channels) {
     throw new SignalError('option', `There is no channel ${channel} in a file of ${facts.channels}.`);
   }
+  const rooms: Uint8Array[] = [];
   return {
     sampleRateHz: facts.sampleRateHz,
     frames: facts.frames,
@@ -87,7 +92,7 @@ function track(source: ByteSource, facts: WavFacts, channel: number): TrackSourc
         yield out.subarray(0, block.frames);
       }
     },
-    read: (start, end) => excerpt({ source, facts, channel, start, end }),
+    read: (start, end, into) => excerpt({ source, facts, channel, start, end, into, rooms }),
   };
 }
 
@@ -97,16 +102,24 @@ async function excerpt(from: {
   channel: number;
   start: number;
   end: number;
+  into: Float32Array | undefined;
+  /** For bytes, used again; one for each excerpt that is read at the same time. */
+  rooms: Uint8Array[];
 }): Promise<Float32Array> {
-  const { source, facts, channel, start, end } = from;
-  const out = new Float32Array(Math.max(0, end - start));
+  const { source, facts, channel, start, end, into, rooms } = from;
+  const length = Math.max(0, end - start);
+  const out = into && into.length >= length ? into.subarray(0, length).fill(0) : new Float32Array(length);
   const first = Math.max(start, 0);
   const frames = Math.min(end, facts.frames) - first;
   if (frames <= 0) return out;
   const at = facts.dataOffset + first * facts.blockAlign;
-  const bytes = await source.read(at, at + frames * facts.blockAlign);
+  const wanted = frames * facts.blockAlign;
+  const free = rooms.pop();
+  const room = free && free.length >= wanted ? free : new Uint8Array(wanted);
+  const bytes = await source.read(at, at + wanted, room);
   const whole = Math.min(frames, Math.floor(bytes.length / facts.blockAlign));
   decodeSamples({ bytes, format: facts, channel, frames: whole, out, outStart: first - start });
+  if (rooms.length < roomsKept && wanted <= largestRoom) rooms.push(room);
   return out;
 }
 

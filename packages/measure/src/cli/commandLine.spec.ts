@@ -1,4 +1,5 @@
-import { commandLine } from './commandLine';
+import { defaultUserSettings } from '@thudline/contracts';
+import { commandDefaults, commandLine } from './commandLine';
 
 describe('commandLine', () => {
   it('takes two files and the usual target, aim and temperature', () => {
@@ -10,6 +11,10 @@ describe('commandLine', () => {
       temperatureC: 20,
       target: { lowDbfs: -12, highDbfs: -6, aimDbfs: -9 },
     });
+  });
+
+  it('has the settings of a new account where none are told', () => {
+    expect(defaultUserSettings).toMatchObject(commandDefaults);
   });
 
   it('takes every option, negative values as they stand', () => {

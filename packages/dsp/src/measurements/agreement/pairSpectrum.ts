@@ -1,5 +1,5 @@
 import type { PairSpectrum } from '../../facts';
-import { createRealTransform, powerOfTwoFrom } from '../spectrum/realSpectrum';
+import { createRealTransform, powerOfTwoFrom, type RealTransform } from '../spectrum/realSpectrum';
 
 /** One kick hit in both microphones, and how far its sound may be followed. */
 export interface PairHit {
@@ -25,8 +25,21 @@ export interface HitBins {
 export interface PairGatherer<Told> {
   /** @returns what this hit alone says */
   add(hit: PairHit): Told;
+  /** What was added so far, to be carried to another one that goes on from here. */
+  sums(): PairSums;
+  /** Adds what another one gathered. */
+  include(other: PairSums): void;
   /** @returns null where no hit was added */
   result(): PairSpectrum | null;
+}
+
+/** What was gathered from some of the hits; can cross a thread. */
+export interface PairSums {
+  readonly hitCount: number;
+  readonly skk: Float64Array;
+  readonly soo: Float64Array;
+  readonly skoRe: Float64Array;
+  readonly skoIm: Float64Array;
 }
 
 /** Window of a kick hit (section 5); the pair trace reads the same. */
@@ -60,7 +73,8 @@ export interface PairGathererOptions<Told> {
 export function createPairGatherer<Told>(options: PairGathererOptions<Told>): PairGatherer<Told> {
   const { sampleRateHz, perHit } = options;
   const size = pairTransformSize(sampleRateHz);
-  const transforms = { kick: createRealTransform(size), overhead: createRealTransform(size) };
+  // Made for the first hit: whoever only includes sums needs none.
+  let transforms: { kick: RealTransform; overhead: RealTransform } | null = null;
   const binHz = sampleRateHz / size;
   const binCount = Math.min(size / 2 + 1, Math.floor(HIGHEST_KEPT_HZ / binHz) + 1);
   const [skk, soo, skoRe, skoIm] = Array.from({ length: 4 }, () => new Float64Array(binCount));
@@ -72,11 +86,13 @@ export function createPairGatherer<Told>(options: PairGathererOptions<Told>): Pa
     skoIm: new Float64Array(binCount),
     meanSquareOfBins: 2 / size / windowEnergy(sampleRateHz),
   };
+  const windowed = createHitWindow(sampleRateHz);
   let hitCount = 0;
   return {
     add(hit) {
-      const k = transforms.kick.spectrum(windowed(hit.kick, hit, sampleRateHz));
-      const o = transforms.overhead.spectrum(windowed(hit.overhead, hit, sampleRateHz));
+      transforms ??= { kick: createRealTransform(size), overhead: createRealTransform(size) };
+      const k = transforms.kick.spectrum(windowed(hit.kick, hit), binCount);
+      const o = transforms.overhead.spectrum(windowed(hit.overhead, hit), binCount);
       for (let i = 0; i < binCount; i += 1) {
         hitBins.skk[i] = k.re[i] ** 2 + k.im[i] ** 2;
         hitBins.soo[i] = o.re[i] ** 2 + o.im[i] ** 2;
@@ -89,6 +105,16 @@ export function createPairGatherer<Told>(options: PairGathererOptions<Told>): Pa
       }
       hitCount += 1;
       return perHit(hitBins);
+    },
+    sums: () => ({ hitCount, skk, soo, skoRe, skoIm }),
+    include(other) {
+      hitCount += other.hitCount;
+      for (let i = 0; i < binCount; i += 1) {
+        skk[i] += other.skk[i];
+        soo[i] += other.soo[i];
+        skoRe[i] += other.skoRe[i];
+        skoIm[i] += other.skoIm[i];
+      }
     },
     result: () =>
       hitCount === 0
@@ -111,16 +137,30 @@ function windowEnergy(sampleRateHz: number): number {
   return (sampleRateHz * (lengthMs - (5 / 8) * endsMs)) / 1000;
 }
 
-function windowed(samples: Float32Array, { onsetAt, toNext }: PairHit, sampleRateHz: number): Float64Array {
+/** Cuts a hit out under its window; what it gives is good until the next one. */
+function createHitWindow(sampleRateHz: number): (samples: Float32Array, hit: PairHit) => Float64Array {
   const count = (ms: number): number => Math.round((ms / 1000) * sampleRateHz);
-  const start = Math.max(0, onsetAt - count(kickWindow.beforeMs));
-  const end = Math.min(samples.length, onsetAt + Math.min(count(kickWindow.afterMs), toNext));
-  const fadeIn = count(FADE_IN_MS);
-  const fadeOut = (end - start) * FADE_OUT_SHARE;
-  const output = new Float64Array(samples.subarray(start, Math.max(start, end)));
-  for (let i = 0; i < output.length; i += 1) {
-    const nearest = Math.min((i + 0.5) / fadeIn, (output.length - i - 0.5) / fadeOut);
-    if (nearest < 1) output[i] *= 0.5 * (1 - Math.cos(Math.PI * nearest));
-  }
-  return output;
+  const longest = count(kickWindow.beforeMs) + count(kickWindow.afterMs);
+  const room = new Float64Array(longest);
+  // Nearly every hit is as long as the window, so that its weights are the same.
+  const weights = { length: -1, values: new Float64Array(longest) };
+  const weightsFor = (length: number): Float64Array => {
+    if (weights.length === length) return weights.values;
+    const fadeIn = count(FADE_IN_MS);
+    const fadeOut = length * FADE_OUT_SHARE;
+    for (let i = 0; i < length; i += 1) {
+      const nearest = Math.min((i + 0.5) / fadeIn, (length - i - 0.5) / fadeOut);
+      weights.values[i] = nearest < 1 ? 0.5 * (1 - Math.cos(Math.PI * nearest)) : 1;
+    }
+    weights.length = length;
+    return weights.values;
+  };
+  return (samples, { onsetAt, toNext }) => {
+    const start = Math.max(0, onsetAt - count(kickWindow.beforeMs));
+    const end = Math.min(samples.length, onsetAt + Math.min(count(kickWindow.afterMs), toNext));
+    const length = Math.max(0, end - start);
+    const values = weightsFor(length);
+    for (let i = 0; i < length; i += 1) room[i] = samples[start + i] * values[i];
+    return room.subarray(0, length);
+  };
 }

@@ -4,7 +4,7 @@ import { filtered } from '../filters/filterChain';
 import { interquartileRange, median } from '../statistics';
 import { chooseArrival, type ArrivalEvidence } from './chooseArrival';
 import { firstArrival, type FirstArrival } from './firstArrival';
-import { createPhaseTransform, PHASE_STRETCH_MS } from './phaseTransform';
+import { createPhaseTransform, PHASE_STRETCH_MS, type PhaseSums } from './phaseTransform';
 
 /** One kick hit in both microphones. */
 export interface HitStretch {
@@ -16,7 +16,19 @@ export interface HitStretch {
 
 export interface ArrivalMeter {
   add(hit: HitStretch): void;
+  /** What was added so far, to be carried to another one that goes on from here. */
+  part(): ArrivalPart;
+  /** Adds what another one gathered from hits that come later. */
+  include(later: ArrivalPart): void;
   result(): ArrivalFacts;
+}
+
+/** What was gathered from some of the hits; can cross a thread. */
+export interface ArrivalPart {
+  readonly hits: number;
+  readonly overheadSounds: boolean;
+  readonly arrivals: readonly HitArrival[];
+  readonly phase: PhaseSums;
 }
 
 /** What a {@link HitStretch} must hold around its onset for the arrival. */
@@ -37,12 +49,19 @@ interface HitArrival {
   readonly overhead: FirstArrival;
 }
 
-/** Gathers how much later the overhead hears each kick hit, and tells what holds over all of them. */
-export function createArrivalMeter(sampleRateHz: number): ArrivalMeter {
+/**
+ * Gathers how much later the overhead hears each kick hit, and tells what holds over all of them.
+ *
+ * @param hitsBefore - how many hits of the take come before the first that is added here
+ */
+export function createArrivalMeter(sampleRateHz: number, hitsBefore = 0): ArrivalMeter {
   const sections = butterworthBand({ sampleRateHz, ...BAND });
-  const phase = createPhaseTransform(sampleRateHz);
+  const phase = createPhaseTransform(sampleRateHz, hitsBefore);
   const samplesPerMs = sampleRateHz / 1000;
   const arrivals: HitArrival[] = [];
+  const room = new Float64Array(
+    Math.ceil((arrivalStretch.beforeMs + arrivalStretch.afterMs) * samplesPerMs) + 1,
+  );
   let hits = 0;
   let overheadSounds = false;
   const cut = (samples: Float32Array, onsetAt: number, { before, after }: Around): Float32Array =>
@@ -52,7 +71,7 @@ export function createArrivalMeter(sampleRateHz: number): ArrivalMeter {
     );
   const first = (samples: Float32Array, onsetAt: number): FirstArrival | null => {
     const around = { before: arrivalStretch.beforeMs, after: arrivalStretch.afterMs };
-    const band = filtered(cut(samples, onsetAt, around), sections);
+    const band = filtered(cut(samples, onsetAt, around), sections, room);
     const at = Math.min(onsetAt, Math.round(around.before * samplesPerMs));
     const [from, to] = [FROM_MS, TO_MS].map((ms) => at + Math.round(ms * samplesPerMs));
     return firstArrival(band, { sampleRateHz, from, to });
@@ -64,7 +83,14 @@ export function createArrivalMeter(sampleRateHz: number): ArrivalMeter {
       if (arrival.kick && arrival.overhead) arrivals.push({ kick: arrival.kick, overhead: arrival.overhead });
       overheadSounds ||= overhead.some((sample) => sample !== 0);
       const [k, o] = [kick, overhead].map((samples) => cut(samples, onsetAt, PHASE_STRETCH_MS));
-      phase.add(new Float64Array(k), new Float64Array(o));
+      phase.add(k, o);
+    },
+    part: () => ({ hits, overheadSounds, arrivals, phase: phase.sums() }),
+    include(later) {
+      hits += later.hits;
+      overheadSounds ||= later.overheadSounds;
+      arrivals.push(...later.arrivals);
+      phase.include(later.phase);
     },
     result: () => told(arrivals, { hits, overheadSounds, phase, samplesPerMs }),
   };

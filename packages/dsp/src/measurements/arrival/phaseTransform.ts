@@ -1,5 +1,10 @@
 import { createInverseReal } from '../spectrum/inverseReal';
-import { createRealTransform, powerOfTwoFrom, type RealSpectrum } from '../spectrum/realSpectrum';
+import {
+  createRealTransform,
+  powerOfTwoFrom,
+  type RealSpectrum,
+  type RealTransform,
+} from '../spectrum/realSpectrum';
 
 /** One place where the two microphones' sound lines up. */
 export interface PhasePeak {
@@ -11,11 +16,23 @@ export interface PhasePeak {
 
 export interface PhaseTransform {
   /** One hit: the same stretch of both microphones, at most {@link PHASE_STRETCH_MS} long, not yet tapered. */
-  add(kick: Float64Array, overhead: Float64Array): void;
+  add(kick: Float32Array | Float64Array, overhead: Float32Array | Float64Array): void;
+  /** What was added so far, to be carried to another one that goes on from here. */
+  sums(): PhaseSums;
+  /** Adds what another one gathered from hits that come later. */
+  include(later: PhaseSums): void;
   /** @returns maxima of the weighted correlation between `fromMs` and `toMs`, highest first; none without hits */
   peaks(range: { readonly fromMs: number; readonly toMs: number }): PhasePeak[];
   /** @returns for each hit (the first 200) the lag nearest to `lagMs`, within 2 ms, where that hit alone lines up best */
   lagsPerHit(lagMs: number): number[];
+}
+
+/** What was gathered from some of the hits; can cross a thread. */
+export interface PhaseSums {
+  readonly hits: number;
+  readonly sums: Sums;
+  /** Of the first hits, each alone. */
+  readonly single: readonly CrossSpectrum[];
 }
 
 /** Long enough for the beginning of a hit and an overhead some metres away; our choice. */
@@ -25,7 +42,8 @@ const LOW_HZ = 100;
 const HIGH_HZ = 4000;
 /** Fineness of the lag before the parabola: the spectrum is padded this many times. */
 const FINER = 8;
-const HITS_KEPT = 200;
+/** So many hits are looked at one by one. */
+export const HITS_KEPT = 200;
 const NEAR_MS = 2;
 
 /**
@@ -34,28 +52,40 @@ const NEAR_MS = 2;
  *
  * @see C. H. Knapp and G. C. Carter, IEEE Trans. ASSP-24(4), 1976, Table I (as cited in ../check-values.md, section 8)
  */
-export function createPhaseTransform(sampleRateHz: number): PhaseTransform {
+export function createPhaseTransform(sampleRateHz: number, keptBefore = 0): PhaseTransform {
   const stretch = ((PHASE_STRETCH_MS.before + PHASE_STRETCH_MS.after) / 1000) * sampleRateHz;
   const size = powerOfTwoFrom(2 * stretch);
-  const transforms = { kick: createRealTransform(size), overhead: createRealTransform(size) };
-  const inverse = createInverseReal(size * FINER);
+  // Each is made when it is needed: whoever adds hits needs the one, whoever looks for peaks the other.
+  let transforms: { kick: RealTransform; overhead: RealTransform } | null = null;
+  let inverse: ReturnType<typeof createInverseReal> | null = null;
   const bins = Math.min(size / 2, Math.ceil((HIGH_HZ * size) / sampleRateHz));
   const first = Math.ceil((LOW_HZ * size) / sampleRateHz);
   const sums = emptySums(bins);
   const single: CrossSpectrum[] = [];
+  const tapered = createTaper();
   let hits = 0;
   const maxima = (cross: CrossSpectrum, fromMs: number, toMs: number): PhasePeak[] => {
+    inverse ??= createInverseReal(size * FINER);
     const values = inverse(weighted(cross, sums, first));
     return peaksOf(values, { fromMs, toMs, stepMs: 1000 / (sampleRateHz * FINER) });
   };
   return {
     add(kick, overhead) {
+      transforms ??= { kick: createRealTransform(size), overhead: createRealTransform(size) };
       const cross = addHit(sums, {
-        kick: transforms.kick.spectrum(tapered(kick)),
-        overhead: transforms.overhead.spectrum(tapered(overhead)),
+        kick: transforms.kick.spectrum(tapered(kick), bins),
+        overhead: transforms.overhead.spectrum(tapered(overhead), bins),
       });
       hits += 1;
-      if (single.length < HITS_KEPT) single.push(cross);
+      if (keptBefore + single.length < HITS_KEPT) single.push(cross);
+    },
+    sums: () => ({ hits, sums, single }),
+    include(later) {
+      hits += later.hits;
+      for (const name of ['re', 'im', 'kick', 'overhead'] as const) {
+        for (let i = 0; i < bins; i += 1) sums[name][i] += later.sums[name][i];
+      }
+      single.push(...later.single.slice(0, HITS_KEPT - single.length));
     },
     peaks: ({ fromMs, toMs }) => (hits === 0 ? [] : maxima(sums, fromMs, toMs)),
     lagsPerHit: (lagMs) =>
@@ -110,12 +140,25 @@ function weighted({ re, im }: CrossSpectrum, sums: Sums, first: number): RealSpe
     weights += coherence;
   }
   if (weights === 0) return result;
-  return { re: result.re.map((value) => value / weights), im: result.im.map((value) => value / weights) };
+  for (let i = first; i < re.length; i += 1) {
+    result.re[i] /= weights;
+    result.im[i] /= weights;
+  }
+  return result;
 }
 
-function tapered(samples: Float64Array): Float64Array {
-  // A sine lobe: soft ends, and still much weight on the hit's beginning.
-  return samples.map((sample, i) => sample * Math.sin((Math.PI * (i + 0.5)) / samples.length));
+/** A sine lobe: soft ends, and still much weight on the hit's beginning. What it gives is good until the next one. */
+function createTaper(): (samples: Float32Array | Float64Array) => Float64Array {
+  let lobe = new Float64Array(0);
+  let room = new Float64Array(0);
+  return (samples) => {
+    if (lobe.length !== samples.length) {
+      lobe = Float64Array.from(samples, (_unused, i) => Math.sin((Math.PI * (i + 0.5)) / samples.length));
+      room = new Float64Array(samples.length);
+    }
+    for (let i = 0; i < room.length; i += 1) room[i] = samples[i] * lobe[i];
+    return room;
+  };
 }
 
 /** @param values - with the 1/N of the inverse transform, which the heights don't have */

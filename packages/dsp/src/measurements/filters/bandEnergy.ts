@@ -19,7 +19,7 @@ const SMALLEST_STATE = 1e-30;
  * @param sections - with a first coefficient that isn't 0
  */
 export function createBandEnergy([first, second]: readonly [Biquad, Biquad]): BandEnergy {
-  const coefficients = Float64Array.of(...stateForm(first), ...stateForm(second));
+  const coefficients = Float64Array.from(bandEnergyCoefficients([first, second]));
   const gain = (first.b0 * second.b0) ** 2;
   const state = new Float64Array(4);
   return {
@@ -96,6 +96,11 @@ export function createButterworthEnergy(band: {
       return gain * energy;
     },
   };
+}
+
+/** @returns for each of the two sections b1/b0 − a1, b2/b0 − a2, a1 and a2 */
+export function bandEnergyCoefficients([first, second]: readonly [Biquad, Biquad]): readonly number[] {
+  return [...stateForm(first), ...stateForm(second)];
 }
 
 function stateForm({ b0, b1, b2, a1, a2 }: Biquad): readonly [number, number, number, number] {

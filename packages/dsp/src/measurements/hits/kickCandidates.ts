@@ -1,4 +1,4 @@
-import { createHopEnergy, HOP_MS, hopSamples } from './hopMeter';
+import { HOP_MS, hopSamples } from './hopMeter';
 import { createLevelHistogram, flooredPowerDb } from './levelHistogram';
 import { createRiseFinder, type RiseState } from './riseFinder';
 
@@ -25,17 +25,12 @@ export interface LowHops {
 }
 
 export interface KickCandidateFinder {
-  /**
-   * The same stretch of both microphones.
-   *
-   * @returns the 30–150 Hz power of the hops that this stretch completed
-   */
-  push(kick: Float32Array, overhead: Float32Array): LowHops;
+  push(hops: LowHops): void;
   result(): KickCandidates;
 }
 
 /** The band a kick is found in (section 3). */
-const BAND = { lowHz: 30, highHz: 150 };
+export const LOW_BAND = { lowHz: 30, highHz: 150 };
 /** A rise of more than 6 dB in 30 ms; tried on 2,231 real channels. */
 const RISE = { riseDb: 6, withinMs: 30, over: 'lowest' } as const;
 /**
@@ -60,7 +55,6 @@ interface OpenCandidate {
  * Which of them are hits is decided by {@link selectKicks} once the whole take is known.
  */
 export function createKickCandidates(sampleRateHz: number): KickCandidateFinder {
-  const meters = [createHopEnergy(sampleRateHz, BAND), createHopEnergy(sampleRateHz, BAND)];
   const kickRises = createRiseFinder({ windowMs: WINDOW_MS, ...RISE });
   const overheadLevel = createRiseFinder({ windowMs: WINDOW_MS, ...RISE });
   const histogram = createLevelHistogram();
@@ -86,11 +80,8 @@ export function createKickCandidates(sampleRateHz: number): KickCandidateFinder 
     hop += 1;
   };
   return {
-    push(kick, overhead) {
-      const kickHops = meters[0].push(kick);
-      const overheadHops = meters[1].push(overhead);
-      for (let i = 0; i < kickHops.length; i += 1) next(kickHops[i], overheadHops[i]);
-      return { kick: kickHops, overhead: overheadHops };
+    push({ kick, overhead }) {
+      for (let i = 0; i < kick.length; i += 1) next(kick[i], overhead[i]);
     },
     result() {
       close();

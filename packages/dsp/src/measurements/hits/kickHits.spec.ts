@@ -1,3 +1,4 @@
+import { createLowHops } from '../../testing/lowHops';
 import { smallKit } from '../../testing/smallKit';
 import { createKickCandidates, type KickCandidate } from './kickCandidates';
 import { onset, onsetStretch } from './onset';
@@ -5,8 +6,9 @@ import { selectKicks } from './selectKicks';
 
 const find = (kick: Float32Array, overhead: Float32Array, { sampleRateHz = 48000, block = 4096 } = {}) => {
   const finder = createKickCandidates(sampleRateHz);
+  const hops = createLowHops(sampleRateHz);
   for (let start = 0; start < kick.length; start += block) {
-    finder.push(kick.subarray(start, start + block), overhead.subarray(start, start + block));
+    finder.push(hops.push(kick.subarray(start, start + block), overhead.subarray(start, start + block)));
   }
   return finder.result();
 };

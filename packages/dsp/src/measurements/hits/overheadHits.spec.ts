@@ -1,4 +1,5 @@
 import { randomNumbers } from '../../testing/randomNumbers';
+import { createTrackPass } from '../pass/trackPass';
 import { listHits, loudestHitDbfs } from './listHits';
 import { createOverheadHits } from './overheadHits';
 
@@ -23,8 +24,16 @@ const bursts = (lowHz: number, highHz: number, count = 6): Float32Array => {
   return samples;
 };
 const hitsIn = (overhead: Float32Array, rate = sampleRateHz) => {
-  const finder = createOverheadHits({ sampleRateHz: rate, trackCount: 2, overhead: 1 });
-  finder.push([new Float32Array(overhead.length).fill(0.25), overhead]);
+  const finder = createOverheadHits(rate);
+  const hops = [new Float32Array(overhead.length).fill(0.25), overhead].map((samples) =>
+    createTrackPass({
+      sampleRateHz: rate,
+      quantisationStep: null,
+      frames: overhead.length,
+      listens: true,
+    }).push(samples),
+  );
+  finder.push({ body: hops[1].body, bright: hops[1].bright, peaks: hops.map(({ peaks }) => peaks) });
   return finder.result();
 };
 

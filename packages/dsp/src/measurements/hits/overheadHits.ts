@@ -1,6 +1,6 @@
 import type { HitKind } from '../../facts';
 import { median } from '../statistics';
-import { createHopEnergy, createHopPeak, HOP_MS, hopSamples } from './hopMeter';
+import { HOP_MS, hopSamples } from './hopMeter';
 import { createLevelHistogram, flooredPowerDb } from './levelHistogram';
 import { createRiseFinder } from './riseFinder';
 
@@ -15,16 +15,22 @@ export interface OverheadHit {
   readonly peaks: readonly number[];
 }
 
+/** Hops of 2 ms: the overhead's bands, and the largest |x| of every track. */
+export interface StruckHops {
+  readonly body: Float64Array;
+  readonly bright: Float64Array;
+  readonly peaks: readonly Float64Array[];
+}
+
 export interface OverheadHitFinder {
-  /** The same stretch of every track. */
-  push(tracks: readonly Float32Array[]): void;
+  push(hops: StruckHops): void;
   /** @returns in order of time; kick hits are among them */
   result(): OverheadHit[];
 }
 
 /** Bands and limits of section 3: over 12 dB a drum, under 0 dB a cymbal, between them told as mixed. */
-const BODY_BAND = { lowHz: 100, highHz: 1000 };
-const BRIGHT_BAND = { lowHz: 5000, highHz: 15000 };
+export const BODY_BAND = { lowHz: 100, highHz: 1000 };
+export const BRIGHT_BAND = { lowHz: 5000, highHz: 15000 };
 const DRUM_OVER_DB = 12;
 const CYMBAL_UNDER_DB = 0;
 /** Below this rate too little of the bright band is left to judge by. */
@@ -57,25 +63,14 @@ const nothingYet = {
   struck: false,
 };
 
-export interface OverheadHitsOptions {
-  readonly sampleRateHz: number;
-  readonly trackCount: number;
-  /** Which of the tracks is the overhead. */
-  readonly overhead: number;
-}
-
 /** Finds what the overhead hears struck, in the one pass over all tracks; memory only for the hits. */
-export function createOverheadHits(options: OverheadHitsOptions): OverheadHitFinder {
-  const { sampleRateHz, trackCount, overhead } = options;
-  const body = createHopEnergy(sampleRateHz, BODY_BAND);
-  const bright = createHopEnergy(sampleRateHz, BRIGHT_BAND);
-  const peakMeters = Array.from({ length: trackCount }, () => createHopPeak(sampleRateHz));
+export function createOverheadHits(sampleRateHz: number): OverheadHitFinder {
   const rises = createRiseFinder(RISE);
   const brightRises = createRiseFinder(RISE);
   const histogram = createLevelHistogram();
   const hits: OpenHit[] = [];
   let hop = 0;
-  const next = (hops: Hops, index: number): void => {
+  const next = (hops: StruckHops, index: number): void => {
     const rise = rises.push(hops.body[index] + hops.bright[index]);
     histogram.add(rise.levelDb);
     const brightRising = brightRises.push(hops.bright[index]).rising;
@@ -93,26 +88,14 @@ export function createOverheadHits(options: OverheadHitsOptions): OverheadHitFin
     hop += 1;
   };
   return {
-    push(tracks) {
-      const hops = {
-        body: body.push(tracks[overhead]),
-        bright: bright.push(tracks[overhead]),
-        peaks: peakMeters.map((meter, track) => meter.push(tracks[track])),
-      };
+    push(hops) {
       for (let i = 0; i < hops.body.length; i += 1) next(hops, i);
     },
     result: () => select(hits, histogram.percentileDb(0.1)).map((hit) => told(hit, sampleRateHz)),
   };
 }
 
-/** What the hops of one block hold, band by band and track by track. */
-interface Hops {
-  readonly body: Float64Array;
-  readonly bright: Float64Array;
-  readonly peaks: readonly Float64Array[];
-}
-
-function follow(open: OpenHit, { body, bright, peaks }: Hops, index: number): void {
+function follow(open: OpenHit, { body, bright, peaks }: StruckHops, index: number): void {
   open.body += body[index];
   open.bright += bright[index];
   for (let track = 0; track < peaks.length; track += 1) {

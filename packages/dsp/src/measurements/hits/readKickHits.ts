@@ -24,18 +24,26 @@ export interface ReadKickHitsOptions {
   readonly afterMs: number;
 }
 
-/** Reads the hits one after the other, each once and the next one ahead: memory holds two however many there are. */
+/** A hit is good until the one after the next is asked for; the next one is read ahead meanwhile. */
+const roomsForHits = 3;
+
+/** Reads the hits one after the other, each once and the next one ahead: memory holds three however many there are. */
 export async function* readKickHits(options: ReadKickHitsOptions): AsyncGenerator<KickHitRead> {
   const { kick, overhead, candidates } = options;
   const { sampleRateHz } = kick;
   const samples = (ms: number): number => Math.ceil((ms / 1000) * sampleRateHz);
   const before = samples(options.beforeMs);
   const after = samples(options.afterMs);
+  const rooms = Array.from({ length: roomsForHits }, () => {
+    const length = before + after + samples(onsetStretch.beforeMs) + samples(onsetStretch.afterMs);
+    return { kick: new Float32Array(length), overhead: new Float32Array(length) };
+  });
   const startOf = (atSample: number): number => atSample - before - samples(onsetStretch.beforeMs);
   const read = (index: number): Promise<[Float32Array, Float32Array]> => {
     const { atSample } = candidates[index];
     const [start, end] = [startOf(atSample), atSample + after + samples(onsetStretch.afterMs)];
-    const both = Promise.all([kick.read(start, end), overhead.read(start, end)]);
+    const room = rooms[index % roomsForHits];
+    const both = Promise.all([kick.read(start, end, room.kick), overhead.read(start, end, room.overhead)]);
     // Whoever stops early doesn't wait for it, so its failure is nobody's.
     both.catch(() => undefined);
     return both;

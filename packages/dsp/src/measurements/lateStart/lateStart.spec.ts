@@ -1,4 +1,5 @@
 import { delayedSamples } from '../../testing/delayedSamples';
+import { createLowHops } from '../../testing/lowHops';
 import { smallKit } from '../../testing/smallKit';
 import { createKickCandidates } from '../hits/kickCandidates';
 import { selectKicks } from '../hits/selectKicks';
@@ -12,8 +13,11 @@ const kit = smallKit({ kicks: 10, everyS: 0.47, delayMs: 2, hats: true, swingS: 
 const found = (kick: Float32Array, overhead: Float32Array, block = 9973) => {
   const candidates = createKickCandidates(sampleRateHz);
   const meter = createLateStart(sampleRateHz);
+  const hops = createLowHops(sampleRateHz);
   for (let start = 0; start < kick.length; start += block) {
-    meter.push(candidates.push(kick.subarray(start, start + block), overhead.subarray(start, start + block)));
+    const low = hops.push(kick.subarray(start, start + block), overhead.subarray(start, start + block));
+    candidates.push(low);
+    meter.push(low);
   }
   return meter.result(selectKicks(candidates.result(), sampleRateHz).length);
 };

@@ -10,6 +10,6 @@ export function playedEarlier(track: TrackSource, samples: number): TrackSource 
   return {
     ...track,
     blocks: () => track.blocks(),
-    read: (startFrame, endFrame) => track.read(startFrame + samples, endFrame + samples),
+    read: (startFrame, endFrame, into) => track.read(startFrame + samples, endFrame + samples, into),
   };
 }

@@ -14,6 +14,8 @@ export interface TrackLevelOptions {
   readonly sampleRateHz: number;
   /** One quantisation step of the file (2^-15 for 16-bit); null for float files. */
   readonly quantisationStep: number | null;
+  /** Which of the spans' filters is the K-weighting; unless told, samples are weighted here. */
+  readonly weighted?: number;
 }
 
 export type TrackLevelFacts = Omit<TrackFacts, 'role' | 'loudestHitDbfs' | 'hum'>;

@@ -1,10 +1,10 @@
 import { assertPositive } from '../../assert';
 import { dbPower, powerDb } from '../../decibel';
-import { createBandEnergy } from '../filters/bandEnergy';
+import { createSpanCutter, type Border, type Spans } from '../spans';
 import { kWeighting } from './kWeighting';
 
 export interface Loudness {
-  push(block: Float32Array): void;
+  push(block: Float32Array, spans?: Spans): void;
   result(): { readonly integratedLufs: number | null };
 }
 
@@ -14,6 +14,21 @@ const stepsInBlock = 4;
 const offsetDb = -0.691;
 const absoluteGateLufs = -70;
 const relativeGateDb = -10;
+
+export interface LoudnessOptions {
+  readonly sampleRateHz: number;
+  /** Which of the spans' filters is the K-weighting; unless told, samples are weighted here. */
+  readonly weighted?: number;
+}
+
+/** @returns where spans must end so that loudness can be told from them */
+export function loudnessBorder(sampleRateHz: number): Border {
+  let step = 0;
+  return (at) => {
+    while (endOfStep(step, sampleRateHz) <= at) step += 1;
+    return endOfStep(step, sampleRateHz);
+  };
+}
 
 /**
  * Integrated loudness of one microphone: K-weighted power of the 400 ms blocks that pass both gates, one channel of
@@ -31,37 +46,43 @@ const relativeGateDb = -10;
  * loudness.push(Float32Array.from({ length: 96000 }, (_, n) => Math.sin((2 * Math.PI * 997 * n) / 48000)));
  * loudness.result().integratedLufs // -3.01
  */
-export function createLoudness(options: { readonly sampleRateHz: number }): Loudness {
-  assertPositive(options.sampleRateHz, 'sampleRateHz');
-  const weighted = createBandEnergy(kWeighting(options.sampleRateHz));
-  const stepEnd = (step: number): number => Math.round((step + 1) * stepS * options.sampleRateHz);
+export function createLoudness(options: LoudnessOptions): Loudness {
+  const { sampleRateHz, weighted } = options;
+  assertPositive(sampleRateHz, 'sampleRateHz');
+  const alone = createSpanCutter([loudnessBorder(sampleRateHz)], [kWeighting(sampleRateHz)]);
   const steps: { energy: number; length: number }[] = [];
   const blockPowers: number[] = [];
   let current = { energy: 0, length: 0 };
   let stepCount = 0;
+  let stepEnd = endOfStep(0, sampleRateHz);
   let position = 0;
 
   const closeStep = (): void => {
     steps.push(current);
     stepCount += 1;
+    stepEnd = endOfStep(stepCount, sampleRateHz);
     current = { energy: 0, length: 0 };
     if (steps.length > stepsInBlock) steps.shift();
     if (steps.length === stepsInBlock) blockPowers.push(powerOf(steps));
   };
 
   return {
-    push(block) {
-      for (let from = 0; from < block.length;) {
-        const to = Math.min(block.length, from + stepEnd(stepCount) - position);
-        current.energy += weighted.next(block, from, to);
-        current.length += to - from;
-        position += to - from;
-        from = to;
-        if (position === stepEnd(stepCount)) closeStep();
+    push(block, spans) {
+      const cut = spans && weighted !== undefined ? spans : alone.cut(block);
+      const energies = cut.heard[weighted ?? 0];
+      for (let span = 0, from = 0; span < cut.count; from = cut.ends[span], span += 1) {
+        current.energy += energies[span];
+        current.length += cut.ends[span] - from;
+        position += cut.ends[span] - from;
+        if (position === stepEnd) closeStep();
       }
     },
     result: () => ({ integratedLufs: gatedLoudness(blockPowers) }),
   };
+}
+
+function endOfStep(step: number, sampleRateHz: number): number {
+  return Math.round((step + 1) * stepS * sampleRateHz);
 }
 
 function powerOf(steps: readonly { energy: number; length: number }[]): number {

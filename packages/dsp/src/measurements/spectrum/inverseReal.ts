@@ -6,13 +6,14 @@ import { halfTurn, type RealSpectrum } from './realSpectrum';
  *
  * @param size - a power of two
  * @returns a function from bins 0 … M, M < size/2, to the real signal that has them; what is missing counts as zero, so a
- *   larger `size` interpolates between samples. Results are new arrays.
+ *   larger `size` interpolates between samples. A result is good until the next call.
  */
 export function createInverseReal(size: number): (spectrum: RealSpectrum) => Float64Array {
   // The way of createRealTransform backwards: half the size, even samples as real parts, odd ones as imaginary parts.
   const half = size / 2;
   const fft = new FFT(half);
   const bins = new Float64Array(size);
+  const samples = new Float64Array(size);
   const { cosines, sines } = halfTurn(size);
   return ({ re, im }) => {
     bins.fill(0);
@@ -28,7 +29,6 @@ export function createInverseReal(size: number): (spectrum: RealSpectrum) => Flo
       bins[mirrored] += re[k] + turnedIm;
       bins[mirrored + 1] += turnedRe - im[k];
     }
-    const samples = new Float64Array(size);
     fft.inverseTransform(samples, bins);
     // Both halves of the spectrum were added up, over half as many points.
     for (let i = 0; i < size; i += 1) samples[i] /= 2;

@@ -9,10 +9,11 @@ export interface RealSpectrum {
 export interface RealTransform {
   readonly size: number;
   /**
+   * @param binCount - how many bins are wanted; all of them unless told
    * @returns the spectrum of `samples`, followed by zeros up to `size`; unscaled (a unit impulse has 1 everywhere).
    *   Valid until the next call: one transform for each spectrum that is needed at the same time
    */
-  spectrum(samples: Float64Array): RealSpectrum;
+  spectrum(samples: Float32Array | Float64Array, binCount?: number): RealSpectrum;
 }
 
 /**
@@ -31,14 +32,20 @@ export function createRealTransform(size: number): RealTransform {
   const im = new Float64Array(half + 1);
   return {
     size,
-    spectrum(samples) {
+    spectrum(samples, binCount = half + 1) {
       const length = Math.min(size, samples.length);
       input.set(length < samples.length ? samples.subarray(0, length) : samples);
       input.fill(0, length);
       fft.transform(output, input);
-      for (let k = 0; k <= half; k += 1) {
-        const at = 2 * (k % half);
-        const mirrored = 2 * ((half - k) % half);
+      // Bins 0 and N/2 stand in the first point together.
+      re[0] = output[0] + output[1];
+      re[half] = output[0] - output[1];
+      im[0] = 0;
+      im[half] = 0;
+      const last = Math.min(binCount, half);
+      for (let k = 1; k < last; k += 1) {
+        const at = 2 * k;
+        const mirrored = 2 * (half - k);
         const evenRe = (output[at] + output[mirrored]) / 2;
         const evenIm = (output[at + 1] - output[mirrored + 1]) / 2;
         const oddRe = (output[at + 1] + output[mirrored + 1]) / 2;

@@ -1,5 +1,4 @@
 import { Box } from '@chakra-ui/react';
-import type { ShareSubject } from '@thudline/contracts';
 import { useState } from 'react';
 import { Button } from '../../../components/Button';
 import { ShareDialog } from './ShareDialog';
@@ -7,15 +6,14 @@ import { ShareList } from './ShareList';
 
 /** At the head of the margin: send the sheet to somebody who can help, and what became of the links. */
 export function SendSheet({ takeId }: { takeId: string }) {
-  const subject: ShareSubject = { kind: 'take', takeId };
   const [open, setOpen] = useState(false);
   return (
     <Box paddingLeft={{ base: 0, lg: '20px' }} _print={{ display: 'none' }}>
       <Button type="button" look="outline" onClick={() => setOpen(true)}>
         Send this sheet
       </Button>
-      <ShareList subject={subject} />
-      {open && <ShareDialog subject={subject} onClose={() => setOpen(false)} />}
+      <ShareList takeId={takeId} />
+      {open && <ShareDialog takeId={takeId} onClose={() => setOpen(false)} />}
     </Box>
   );
 }

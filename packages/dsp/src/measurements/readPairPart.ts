@@ -1,29 +1,29 @@
-import type { AgreementFacts, ArrivalFacts, HitFacts, PairSpectrum } from '../facts';
 import type { TrackSource } from '../trackSource';
-import { agreement } from './agreement/agreement';
 import { hitBalance, type HitBalance } from './agreement/hitBalance';
-import { matchGainDb } from './agreement/matchGain';
-import { createPairGatherer, kickWindow } from './agreement/pairSpectrum';
-import { arrivalStretch, createArrivalMeter } from './arrival/arrival';
+import { createPairGatherer, kickWindow, type PairSums } from './agreement/pairSpectrum';
+import { arrivalStretch, createArrivalMeter, type ArrivalPart } from './arrival/arrival';
 import { attackDb } from './comparing/attack';
 import type { KickCandidate } from './hits/kickCandidates';
 import { readKickHits, type KickHitRead } from './hits/readKickHits';
 import type { KickHit } from './hits/listHits';
 
-/** What was gathered from the kick hits of one pair; told by {@link PairReading.facts} once all hits are listed. */
-export interface PairReading {
+/** What was gathered from some of a pair's kick hits, one after the other; can cross a thread. */
+export interface PairPart {
   /** Peaks in the order [kick microphone, overhead]. */
   readonly kickHits: readonly KickHit[];
-  readonly arrival: ArrivalFacts;
-  readonly spectrum: PairSpectrum | null;
-  /** @param places - of the two in the hits' peaks */
-  agreement(hits: readonly HitFacts[], places: { readonly a: number; readonly b: number }): AgreementFacts;
+  readonly balances: readonly HitBalance[];
+  readonly arrival: ArrivalPart;
+  readonly spectrum: PairSums;
 }
 
-export interface ReadPairOptions {
+export interface ReadPairPartOptions {
   readonly kick: TrackSource;
   readonly overhead: TrackSource;
+  /** All of the take. */
   readonly candidates: readonly KickCandidate[];
+  /** Which of the candidates are read; `to` is not included. */
+  readonly from: number;
+  readonly to: number;
   readonly onProgress: (progress01: number) => void;
 }
 
@@ -31,11 +31,11 @@ export interface ReadPairOptions {
 const PEAK_BEFORE_MS = 10;
 const PEAK_AFTER_MS = 100;
 
-/** Reads the kick hits of a pair, each once, and gathers arrival, pair spectrum and peaks from them. */
-export async function readPair(options: ReadPairOptions): Promise<PairReading> {
-  const { kick, overhead, candidates, onProgress } = options;
+/** Reads some of a pair's kick hits, each once, and gathers arrival, pair spectrum and peaks from them. */
+export async function readPairPart(options: ReadPairPartOptions): Promise<PairPart> {
+  const { kick, overhead, candidates, from, to, onProgress } = options;
   const { sampleRateHz } = kick;
-  const arrivalMeter = createArrivalMeter(sampleRateHz);
+  const arrivalMeter = createArrivalMeter(sampleRateHz, from);
   const gatherer = createPairGatherer({ sampleRateHz, perHit: hitBalance });
   const balances: HitBalance[] = [];
   const kickHits: KickHit[] = [];
@@ -52,25 +52,18 @@ export async function readPair(options: ReadPairOptions): Promise<PairReading> {
       peaks: peaksOf(hit, { toNext, sampleRateHz }),
       figures: { attackDb: attackOf(hit, { toEnd, sampleRateHz }), lowEnergy, overheadThirdOctavesDbfs },
     });
-    onProgress(kickHits.length / candidates.length);
+    onProgress(kickHits.length / (to - from));
   };
-  // One hit is held back, since where it ends depends on the next one's onset.
+  // One hit is held back, since where it ends depends on the next one's onset; the one after the last is read for that.
   let waiting: KickHitRead | null = null;
+  const wanted = candidates.slice(from, to + 1);
   const stretch = { beforeMs: arrivalStretch.beforeMs, afterMs: kickWindow.afterMs };
-  for await (const hit of readKickHits({ kick, overhead, candidates, ...stretch })) {
+  for await (const hit of readKickHits({ kick, overhead, candidates: wanted, ...stretch })) {
     if (waiting) take(waiting, Math.max(1, hit.onsetSample - waiting.onsetSample));
     waiting = hit;
   }
-  if (waiting) take(waiting, Infinity);
-  const arrival = arrivalMeter.result();
-  const spectrum = gatherer.result();
-  return {
-    kickHits,
-    arrival,
-    spectrum,
-    agreement: (hits, places) =>
-      agreement({ spectrum, balances, arrival, matchGainDb: matchGainDb(hits, places) }),
-  };
+  if (waiting && kickHits.length < to - from) take(waiting, Infinity);
+  return { kickHits, balances, arrival: arrivalMeter.part(), spectrum: gatherer.sums() };
 }
 
 function peaksOf(
@@ -80,9 +73,7 @@ function peaksOf(
   const count = (ms: number): number => Math.round((ms / 1000) * sampleRateHz);
   const start = Math.max(0, onsetAt - count(PEAK_BEFORE_MS));
   const end = onsetAt + Math.min(count(PEAK_AFTER_MS), toNext);
-  return [kick, overhead].map((samples) =>
-    samples.subarray(start, end).reduce((peak, sample) => Math.max(peak, Math.abs(sample)), 0),
-  );
+  return [largestSample(kick, start, end), largestSample(overhead, start, end)];
 }
 
 /** Null where the hit is cut off, by the next one or by the end of the file. */
@@ -92,4 +83,13 @@ function attackOf(
 ): number | null {
   const startAt = onsetAt - (onsetSample - startSample);
   return attackDb(kick.subarray(0, onsetAt + toEnd), { sampleRateHz, startAt });
+}
+
+function largestSample(samples: Float32Array, start: number, end: number): number {
+  let largest = 0;
+  for (let i = start; i < Math.min(end, samples.length); i += 1) {
+    const size = Math.abs(samples[i]);
+    if (size > largest) largest = size;
+  }
+  return largest;
 }
