@@ -22,6 +22,7 @@ import { Measured, MeasurementClaims } from '../src/measuring/measurement-claims
 import { MeasureQueue } from '../src/measuring/measure-queue';
 import { MeasurementSweep } from '../src/measuring/measurement-sweep';
 import { Report } from '../src/reports/entities/report.entity';
+import { ObjectStoreService } from '../src/storage/object-store.service';
 import { TakeFile } from '../src/takes/entities/take-file.entity';
 import { joined, Person } from './support/person';
 import { monoTracks, shortTake, UploadFile, wav } from './support/recordings';
@@ -222,6 +223,16 @@ describe('measuring', () => {
       await juno.get(paths.report(take.id)).expect(404);
     });
 
+    it('fails with a sentence when the stored recording is gone', async () => {
+      const take = await juno.makeTake(groove);
+      const [file] = await test.em().find(TakeFile, { take: take.id });
+      await test.app.get(ObjectStoreService, { strict: false }).removeAll(file.objectKey);
+      expect(await reaches(take, 'done', 'failed')).toMatchObject({
+        state: 'failed',
+        reason: 'The stored recordings of this take are damaged. Upload it again.',
+      });
+    });
+
     it('takes up a take whose job was lost', async () => {
       const take = await juno.makeTake(groove);
       await test.em().getConnection().execute('delete from pgboss.job');
@@ -324,6 +335,15 @@ describe('measuring', () => {
       await parts().sweep.run();
       expect(await measurementOf(take)).toMatchObject({ state: 'failed', attempt: 3 });
       expect((await measurementOf(take)).reason).toMatch(/broken off three times/);
+    });
+
+    it('waits for a store that is down as often as it takes', async () => {
+      const { take, claim } = await claimed();
+      for (let time = 0; time < 5; time++) {
+        await parts().claims.waitForStore(claim);
+        expect(await measurementOf(take)).toMatchObject({ state: 'queued', attempt: 0, reason: null });
+        expect(await parts().claims.claim(claim.measurementId)).toMatchObject({ attempt: 1 });
+      }
     });
 
     it('that beats is left alone by the sweep', async () => {

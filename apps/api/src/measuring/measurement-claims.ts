@@ -106,6 +106,12 @@ export class MeasurementClaims {
     await this.requeue(claim, { attempt: claim.attempt - 1, afterS: 0 });
   }
 
+  /** The take is not to blame for a store that is down: this try doesn't count, and the next one comes a little later. */
+  async waitForStore(claim: Claim): Promise<void> {
+    const afterS = waitS[claim.renewal ? 'renewal' : 'fresh'];
+    await this.requeue(claim, { attempt: claim.attempt - 1, afterS });
+  }
+
   /** Tries again after a while, or gives up after the last attempt. */
   async retryLater(claim: Claim, reason: string): Promise<void> {
     if (claim.attempt >= mostAttempts) return this.fail(claim, reason);

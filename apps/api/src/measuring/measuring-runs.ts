@@ -10,7 +10,6 @@ import { wholeProgress } from './measurement-progress';
 import { TakeOutlines } from './take-outlines';
 import { StoredBytesDiffer, TakeFetcher } from './take-fetcher';
 
-const unreachable = 'The recordings of this take could not be fetched. Measure it again later.';
 const bytesDiffer = 'The stored recordings of this take are damaged. Upload it again.';
 const broke = 'Measuring this take failed on our side. Measure it again, or tell whoever runs this site.';
 
@@ -116,6 +115,6 @@ export class MeasuringRuns {
     this.logger.error(error, `Attempt ${claim.attempt} at measurement ${claim.measurementId} failed`);
     if (error instanceof StoredBytesDiffer) return this.claims.fail(claim, bytesDiffer);
     const isStoreDown = error instanceof AppError && error.code === 'storage-unavailable';
-    return this.claims.retryLater(claim, isStoreDown ? unreachable : broke);
+    return isStoreDown ? this.claims.waitForStore(claim) : this.claims.retryLater(claim, broke);
   }
 }

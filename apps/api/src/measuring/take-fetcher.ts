@@ -1,10 +1,13 @@
 import { createHash } from 'node:crypto';
 import { createWriteStream } from 'node:fs';
 import { join } from 'node:path';
+import { Readable } from 'node:stream';
 import { pipeline } from 'node:stream/promises';
+import { NoSuchKey } from '@aws-sdk/client-s3';
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { MeasureJob } from '@thudline/measure';
+import { AppError } from '../errors/app-error';
 import { ObjectStoreService } from '../storage/object-store.service';
 import { TakeFile } from '../takes/entities/take-file.entity';
 import { TakeTrack } from '../takes/entities/take-track.entity';
@@ -15,7 +18,7 @@ interface FetchOptions {
   signal: AbortSignal;
 }
 
-/** The stored bytes aren't those that were uploaded: nothing is measured from them. */
+/** The stored bytes are gone, or aren't those that were uploaded: nothing is measured from them. */
 export class StoredBytesDiffer extends Error {}
 
 /** Copies the recordings of a take from the object store to scratch. */
@@ -51,8 +54,19 @@ export class TakeFetcher {
         yield chunk;
       }
     }
-    await pipeline(await this.objects.stream(file.objectKey), hashed, createWriteStream(path), { signal });
+    await pipeline(await this.stored(file), hashed, createWriteStream(path), { signal });
     if (hash.digest('hex') !== file.sha256) throw new StoredBytesDiffer(`${file.objectKey} has other bytes`);
     return path;
+  }
+
+  private async stored(file: TakeFile): Promise<Readable> {
+    try {
+      return await this.objects.stream(file.objectKey);
+    } catch (error) {
+      // A store that doesn't answer is waited for; one that answers and has nothing never will have.
+      if (error instanceof AppError && error.cause instanceof NoSuchKey)
+        throw new StoredBytesDiffer(`${file.objectKey} is gone`);
+      throw error;
+    }
   }
 }
