@@ -24,7 +24,12 @@ export default tseslint.config(
     extends: [tseslint.configs.recommendedTypeChecked],
     languageOptions: {
       parserOptions: {
-        project: ['./tsconfig.spec.json', './apps/web/tsconfig.json', './apps/web/tsconfig.node.json'],
+        project: [
+          './tsconfig.spec.json',
+          './apps/api/checks/tsconfig.json',
+          './apps/web/tsconfig.json',
+          './apps/web/tsconfig.node.json',
+        ],
         tsconfigRootDir: import.meta.dirname,
       },
     },
