@@ -55,7 +55,7 @@ describe('show on my phone', () => {
       phone.patch(paths.take(take.id), { tickedActions: [], title: 'Changed' }),
       phone.delete(paths.take(take.id)),
       phone.post(paths.cancelMeasurement(take.id)),
-      phone.post(paths.shares(take.id), {}),
+      phone.post(paths.shares, { subject: { kind: 'take', takeId: take.id } }),
       phone.post(paths.takes),
       phone.patch(paths.me, { name: 'Someone' }),
       phone.post(paths.phoneLinks),

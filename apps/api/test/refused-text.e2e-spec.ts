@@ -35,7 +35,10 @@ describe('what the database can’t keep is refused in a sentence', () => {
 
   it.each([nul, half])('in a name and in a question: %j', async (text) => {
     await refused(juno.patch(paths.me, { name: text }), '^name');
-    await refused(juno.post(paths.shares(take.id), { question: text }), '^question');
+    await refused(
+      juno.post(paths.shares, { subject: { kind: 'take', takeId: take.id }, question: text }),
+      '^question',
+    );
   });
 
   it('in what a list is asked for', async () => {

@@ -50,10 +50,13 @@ describe('shares', () => {
   it('gives an address with a token that is kept only as a hash', async () => {
     const share = await sharedBy(juno, take, { question: ' What would you change first? ' });
     expect(share).toMatchObject({
-      takeId: take.id,
+      subject: { kind: 'take', takeId: take.id },
+      label: '',
       question: 'What would you change first?',
       canListen: true,
       canDownload: false,
+      canNote: false,
+      hasPassphrase: false,
       revokedAt: null,
       openCount: 0,
     });
@@ -67,12 +70,13 @@ describe('shares', () => {
   it('opens the sheet to somebody signed out, and hides what leads elsewhere', async () => {
     const share = await sharedBy(juno, take, { question: 'Flip it?', expiresInDays: null });
     expect(await openedBy(guest, share)).toEqual({
-      takeId: take.id,
+      subject: { kind: 'take', takeId: take.id },
       from: 'Juno',
       question: 'Flip it?',
       expiresAt: null,
       canListen: true,
       canDownload: false,
+      canNote: false,
     });
     const seen = takeResponse.parse((await guest.get(paths.take(take.id)).expect(200)).body);
     expect(seen).toMatchObject({
@@ -125,7 +129,7 @@ describe('shares', () => {
     await openedBy(oda, await sharedBy(juno, take));
     await oda.get(paths.take(take.id)).expect(200);
     expect((await oda.get(paths.takes)).body).toMatchObject({ total: 0 });
-    await oda.get(paths.shares(take.id)).expect(403);
+    await oda.get(paths.sharesOf({ kind: 'take', takeId: take.id })).expect(404);
   });
 
   it('ends at once when its owner ends it, also for whoever has it open', async () => {
@@ -171,7 +175,7 @@ describe('shares', () => {
     const second = await sharedBy(juno, shared, { question: 'And now?' });
     await openedBy(guest, first);
     await openedBy(guest, first);
-    const response = await juno.get(paths.shares(shared.id)).expect(200);
+    const response = await juno.get(paths.sharesOf({ kind: 'take', takeId: shared.id })).expect(200);
     const { items } = listSharesResponse.parse(response.body);
     expect(items).toMatchObject([
       { id: second.id, question: 'And now?', openCount: 0, openedAt: null },

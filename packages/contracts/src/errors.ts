@@ -11,6 +11,8 @@ export const errorCodes = [
   'wrong-sign-in',
   'session-ended',
   'link-ended',
+  'passphrase-needed',
+  'wrong-passphrase',
   'read-only',
   'too-large',
   'too-many-files',

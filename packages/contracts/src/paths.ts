@@ -1,3 +1,5 @@
+import type { ShareSubject } from './shares';
+
 /** Every path of the API, so that neither side spells one by hand. */
 export const paths = {
   join: '/api/auth/join',
@@ -14,6 +16,12 @@ export const paths = {
   me: '/api/me',
   events: '/api/events',
   sampleSheet: '/api/sample-sheet',
+  shares: '/api/shares',
+  /** The links of one subject; ids and kinds need no escaping. */
+  sharesOf: (subject: ShareSubject) =>
+    `/api/shares?${Object.entries(subject)
+      .map((pair) => pair.join('='))
+      .join('&')}`,
   openShare: '/api/shares/open',
   share: (shareId: string) => `/api/shares/${shareId}`,
   photo: (photoId: string) => `/api/photos/${photoId}`,
@@ -32,7 +40,6 @@ export const paths = {
   cancelMeasurement: (takeId: string) => `/api/takes/${takeId}/measurement/cancel`,
   measureAgain: (takeId: string) => `/api/takes/${takeId}/measurement/again`,
   restoreTake: (takeId: string) => `/api/takes/${takeId}/restore`,
-  shares: (takeId: string) => `/api/takes/${takeId}/shares`,
   peaks: (takeId: string) => `/api/takes/${takeId}/peaks`,
   report: (takeId: string) => `/api/takes/${takeId}/report`,
   pairSpectrum: (takeId: string) => `/api/takes/${takeId}/pair-spectrum`,

@@ -5,14 +5,14 @@ import type { TakeRight } from './take-rights';
 
 export const ACCESS = Symbol('access');
 
-/** The route parameter that names a second take. */
-export const OTHER_TAKE = 'otherId';
+/** What a route is about, where rights to it are given. */
+export type SubjectKind = 'take' | 'deleted-take' | 'comparison' | 'try-out' | 'room';
 
 export type AccessRule =
   | { kind: 'anyone' }
   | { kind: 'signed-in' }
   | { kind: 'role'; role: Role }
-  | { kind: 'take'; right: TakeRight; alsoDeleted?: true; alsoOf?: typeof OTHER_TAKE };
+  | { kind: SubjectKind; right: TakeRight };
 
 function access(rule: AccessRule, told: string) {
   const decorators = [SetMetadata(ACCESS, rule), ApiExtension('x-access', told)];
@@ -26,10 +26,13 @@ export const Access = {
   role: (role: Role) => access({ kind: 'role', role }, `role ${role}`),
   /** The take is the one whose id is the route's `:id`. */
   take: (right: TakeRight) => access({ kind: 'take', right }, `right to ${right} the take`),
-  /** The same for two takes, `:id` and `:otherId`: the right is needed to each of them. */
-  takePair: (right: TakeRight) =>
-    access({ kind: 'take', right, alsoOf: OTHER_TAKE }, `right to ${right} both takes`),
-  /** The same where the take may have been deleted by its player. */
+  /** The two takes are `:id` and `:otherId`. */
+  comparison: (right: TakeRight) => access({ kind: 'comparison', right }, `right to ${right} the comparison`),
+  /** The try-out is `:id`. */
+  tryOut: (right: TakeRight) => access({ kind: 'try-out', right }, `right to ${right} the try-out`),
+  /** The room is `:roomId`. */
+  room: (right: TakeRight) => access({ kind: 'room', right }, `right to ${right} the room`),
+  /** A take that may have been deleted by its player. */
   deletedTake: (right: TakeRight) =>
-    access({ kind: 'take', right, alsoDeleted: true }, `right to ${right} the take, deleted or not`),
+    access({ kind: 'deleted-take', right }, `right to ${right} the take, deleted or not`),
 };

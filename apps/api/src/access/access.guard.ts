@@ -8,14 +8,14 @@ import { CONFIG } from '../config/config.module';
 import { AppError, notFound } from '../errors/app-error';
 import { shareIdsOf } from '../shares/share-cookie';
 import { ThrottleService } from '../throttle/throttle.service';
-import { ACCESS, AccessRule } from './access.decorator';
+import { ACCESS, AccessRule, SubjectKind } from './access.decorator';
 import { AccessService } from './access.service';
 import { readMethods } from './origin.guard';
 import { OPEN_TO_READ_ONLY, readOnly } from './read-only';
-import { shared, TakeRights } from './take-rights';
+import { TakeRights } from './take-rights';
 import { Asker, notSignedIn, Viewer, ViewerRequest } from './viewer';
 
-type TakeRule = Extract<AccessRule, { kind: 'take' }>;
+type SubjectRule = Extract<AccessRule, { kind: SubjectKind }>;
 
 /** Holds every route to the access it declares. */
 @Injectable()
@@ -37,13 +37,10 @@ export class AccessGuard implements CanActivate {
     const asker = await this.askerOf(request);
     if (asker.viewer) request.viewer = asker.viewer;
     if (asker.viewer?.readOnly) this.checkReadOnly(request, targets);
-    if (rule.kind === 'take') {
+    request.asker = asker;
+    if (isAboutSubject(rule)) {
       if (!asker.viewer) await this.countGuest(request.ip ?? '');
-      request.rights = await this.rightsTo(String(request.params.id), asker, rule);
-      if (rule.alsoOf) {
-        const others = await this.rightsTo(String(request.params[rule.alsoOf]), asker, rule);
-        request.rights = shared(request.rights, others);
-      }
+      request.rights = await this.rightsTo(request, asker, rule);
       return true;
     }
     if (!asker.viewer) throw notSignedIn();
@@ -77,16 +74,34 @@ export class AccessGuard implements CanActivate {
     if (!viewer.user.roles.includes(role)) throw forbidden();
   }
 
-  private async rightsTo(takeId: string, asker: Asker, rule: TakeRule): Promise<TakeRights> {
-    const { right, alsoDeleted } = rule;
-    const rights = await (alsoDeleted
-      ? this.access.deletedTake(asker, takeId)
-      : this.access.take(asker, takeId));
-    const isStranger = !asker.viewer && asker.shareIds.length === 0;
-    if (!rights.read) throw isStranger ? notSignedIn() : notFound();
-    if (!rights[right]) throw forbidden();
+  private async rightsTo(request: ViewerRequest, asker: Asker, rule: SubjectRule): Promise<TakeRights> {
+    const rights = await this.found(request.params, asker, rule);
+    // What may only be heard is not there for whoever wants to read it.
+    if (!rights.read && !rights[rule.right]) throw isStranger(asker) ? notSignedIn() : notFound();
+    if (!rights[rule.right]) throw forbidden();
     return rights;
   }
+
+  private found(params: ViewerRequest['params'], asker: Asker, { kind }: SubjectRule): Promise<TakeRights> {
+    const id = String(params.id);
+    switch (kind) {
+      case 'take':
+        return this.access.take(asker, id);
+      case 'deleted-take':
+        return this.access.deletedTake(asker, id);
+      case 'comparison':
+        return this.access.comparison(asker, id, String(params.otherId));
+      case 'try-out':
+        return this.access.tryOut(asker, id);
+      case 'room':
+        return this.access.room(asker, String(params.roomId));
+    }
+  }
 }
+
+const isStranger = ({ viewer, shareIds }: Asker) => !viewer && shareIds.length === 0;
+
+const isAboutSubject = (rule: AccessRule): rule is SubjectRule =>
+  rule.kind !== 'anyone' && rule.kind !== 'signed-in' && rule.kind !== 'role';
 
 const forbidden = () => new AppError('forbidden', 'This is not open to you.');

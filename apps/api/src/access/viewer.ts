@@ -20,7 +20,9 @@ export interface Asker {
 
 export interface ViewerRequest extends Request {
   viewer?: Viewer;
-  /** What may be done with the take the route is about; set by the guard. */
+  /** Set by the guard on every route that isn't open to anyone. */
+  asker?: Asker;
+  /** What may be done with the take, comparison, try-out or room the route is about; set by the guard. */
   rights?: TakeRights;
 }
 
@@ -38,9 +40,16 @@ export const OptionalViewer = createParamDecorator(
     context.switchToHttp().getRequest<ViewerRequest>().viewer ?? null,
 );
 
-/** For routes that declare a right to a take. */
+/** Who asks, with the links they have opened. */
+export const CurrentAsker = createParamDecorator((_: unknown, context: ExecutionContext): Asker => {
+  const { asker } = context.switchToHttp().getRequest<ViewerRequest>();
+  if (!asker) throw notSignedIn();
+  return asker;
+});
+
+/** For routes that declare a right to a take, a comparison, a try-out or a room. */
 export const CurrentRights = createParamDecorator((_: unknown, context: ExecutionContext): TakeRights => {
   const { rights } = context.switchToHttp().getRequest<ViewerRequest>();
-  if (!rights) throw new Error('This route declares no right to a take.');
+  if (!rights) throw new Error('This route declares no right to anything.');
   return rights;
 });

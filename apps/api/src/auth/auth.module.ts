@@ -36,6 +36,6 @@ const jwt = JwtModule.registerAsync({
     PasswordsService,
     SessionsService,
   ],
-  exports: [SessionsService],
+  exports: [PasswordsService, SessionsService],
 })
 export class AuthModule {}

@@ -14,7 +14,7 @@ export class ComparisonsController {
 
   /** What changed from the first take to the other, and how surely. */
   @Get()
-  @Access.takePair('read')
+  @Access.comparison('read')
   @ZodResponse({ status: 200, type: ComparisonResponseDto })
   get(
     @Param('id') beforeId: string,

@@ -37,6 +37,9 @@ const environment = z.object({
   GUEST_READ_LIMIT_PER_ADDRESS: count.default(3_000),
   /** Links opened in a quarter of an hour; common practice, no source. */
   OPEN_LINK_LIMIT_PER_ADDRESS: count.default(120),
+  /** Tries of a link's passphrase from one address in a quarter of an hour, and from all in a day: common practice, no source. */
+  PASSPHRASE_LIMIT_PER_ADDRESS: count.default(10),
+  PASSPHRASE_LIMIT_PER_LINK: count.default(500),
   /** Mails and phone links in an hour for one account, mails asked for by one address; common practice, no source. */
   MAIL_LIMIT_PER_ACCOUNT: count.default(5),
   MAIL_LIMIT_PER_ADDRESS: count.default(30),
@@ -89,6 +92,8 @@ function grouped(env: z.output<typeof environment>) {
       mailsPerAddress: env.MAIL_LIMIT_PER_ADDRESS,
       guestReadsPerAddress: env.GUEST_READ_LIMIT_PER_ADDRESS,
       openLinkPerAddress: env.OPEN_LINK_LIMIT_PER_ADDRESS,
+      passphrasePerAddress: env.PASSPHRASE_LIMIT_PER_ADDRESS,
+      passphrasePerLink: env.PASSPHRASE_LIMIT_PER_LINK,
     },
     mail: {
       smtpUrl: env.SMTP_URL,

@@ -8,6 +8,8 @@ const statusOfCode: Record<ErrorCode, number> = {
   'session-ended': 401,
   forbidden: 403,
   'read-only': 403,
+  'passphrase-needed': 403,
+  'wrong-passphrase': 403,
   'not-found': 404,
   'not-measured-yet': 404,
   conflict: 409,

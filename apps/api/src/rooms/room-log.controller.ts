@@ -2,7 +2,8 @@ import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post } from '@ne
 import { ApiNoContentResponse, ApiTags } from '@nestjs/swagger';
 import { ZodResponse } from 'nestjs-zod';
 import { Access } from '../access/access.decorator';
-import { CurrentViewer, Viewer } from '../access/viewer';
+import { TakeRights } from '../access/take-rights';
+import { CurrentRights, CurrentViewer, Viewer } from '../access/viewer';
 import {
   CreateRoomChangeDto,
   ListRoomChangesResponseDto,
@@ -18,9 +19,10 @@ export class RoomLogController {
   constructor(private readonly log: RoomLogService) {}
 
   @Get()
+  @Access.room('read')
   @ZodResponse({ status: 200, type: ListRoomChangesResponseDto })
-  list(@CurrentViewer() viewer: Viewer, @Param('roomId') roomId: string) {
-    return this.log.list(viewer, roomId);
+  list(@Param('roomId') roomId: string, @CurrentRights() rights: TakeRights) {
+    return this.log.list(roomId, rights);
   }
 
   @Post()

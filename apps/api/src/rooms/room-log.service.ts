@@ -9,6 +9,7 @@ import {
 } from '@thudline/contracts';
 import { validate } from 'uuid';
 import { z } from 'zod';
+import { TakeRights } from '../access/take-rights';
 import { Viewer } from '../access/viewer';
 import { AppError, notFound } from '../errors/app-error';
 import { ChangeSide, RoomChangeTake } from './entities/room-change-take.entity';
@@ -31,9 +32,10 @@ export class RoomLogService {
     private readonly comparisons: RoomComparisons,
   ) {}
 
-  async list(viewer: Viewer, roomId: string): Promise<ListRoomChangesResponse> {
-    const room = await ownRoom(this.em, viewer, roomId);
-    const takes = await this.sides.choosable(room);
+  /** For whoever may read the room; the guard has asked. Only its player is told of takes to choose from. */
+  async list(roomId: string, { own }: TakeRights): Promise<ListRoomChangesResponse> {
+    const room = await this.em.findOneOrFail(Room, { id: roomId });
+    const takes = own ? await this.sides.choosable(room) : [];
     return { items: (await this.whole(room)).reverse(), takes: takes.map(choosableTakeOf) };
   }
 

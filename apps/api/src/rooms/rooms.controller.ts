@@ -36,9 +36,10 @@ export class RoomsController {
   }
 
   @Get(':roomId')
+  @Access.room('read')
   @ZodResponse({ status: 200, type: RoomResponseDto })
-  get(@CurrentViewer() viewer: Viewer, @Param('roomId') roomId: string) {
-    return this.rooms.get(viewer, roomId);
+  get(@Param('roomId') roomId: string) {
+    return this.rooms.get(roomId);
   }
 
   @Patch(':roomId')
@@ -55,8 +56,9 @@ export class RoomsController {
   }
 
   @Get(':roomId/trend')
+  @Access.room('read')
   @ZodResponse({ status: 200, type: RoomTrendResponseDto })
-  trend(@CurrentViewer() viewer: Viewer, @Param('roomId') roomId: string, @Query() query: RoomTrendDto) {
-    return this.trends.get(viewer, roomId, query);
+  trend(@Param('roomId') roomId: string, @Query() query: RoomTrendDto) {
+    return this.trends.get(roomId, query);
   }
 }

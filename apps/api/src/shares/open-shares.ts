@@ -1,11 +1,14 @@
 import { FilterQuery } from '@mikro-orm/postgresql';
 import { Share } from './entities/share.entity';
 
-/** What a share has to be to open anything: neither ended nor over, and its take still there. */
+/** What a share has to be to open anything: neither ended nor over, and its takes still there. */
 export function isOpen(now = new Date()): FilterQuery<Share> {
   return {
     revokedAt: null,
-    take: { deletedAt: null },
-    $or: [{ expiresAt: null }, { expiresAt: { $gt: now } }],
+    $and: [
+      { $or: [{ expiresAt: null }, { expiresAt: { $gt: now } }] },
+      { $or: [{ take: null }, { take: { deletedAt: null } }] },
+      { $or: [{ otherTake: null }, { otherTake: { deletedAt: null } }] },
+    ],
   };
 }

@@ -1,7 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { ReportsService } from '../reports/reports.service';
 import { settingsOf } from '../users/user-settings';
-import { SharesService } from './shares.service';
+import { OpeningSharesService } from './opening-shares.service';
 
 export interface SharePreview {
   title: string;
@@ -12,14 +12,15 @@ export interface SharePreview {
 @Injectable()
 export class SharePreviewService {
   constructor(
-    private readonly shares: SharesService,
+    private readonly opening: OpeningSharesService,
     private readonly reports: ReportsService,
   ) {}
 
   /** @returns null for a link that has ended or never was */
   async find(token: string): Promise<SharePreview | null> {
-    const share = await this.shares.findOpen(token);
-    if (!share) return null;
+    const share = await this.opening.findOpen(token);
+    // What asks for a passphrase says nothing before it is given.
+    if (!share?.take || share.otherTake || share.passphraseHash) return null;
     const take = share.take.unwrap();
     const reportId = take.currentReportId ?? '';
     const settings = settingsOf(share.owner.unwrap());

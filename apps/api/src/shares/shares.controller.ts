@@ -1,4 +1,16 @@
-import { Body, Controller, Delete, HttpCode, Inject, Param, Post, Req, Res } from '@nestjs/common';
+import {
+  Body,
+  Controller,
+  Delete,
+  Get,
+  HttpCode,
+  Inject,
+  Param,
+  Post,
+  Query,
+  Req,
+  Res,
+} from '@nestjs/common';
 import { ApiNoContentResponse, ApiTags } from '@nestjs/swagger';
 import { Request, Response } from 'express';
 import { ZodResponse } from 'nestjs-zod';
@@ -6,7 +18,15 @@ import { Access } from '../access/access.decorator';
 import { CurrentViewer, Viewer } from '../access/viewer';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
-import { OpenedShareResponseDto, OpenShareDto } from './dto/share.dto';
+import {
+  CreatedShareResponseDto,
+  CreateShareDto,
+  ListSharesDto,
+  ListSharesResponseDto,
+  OpenedShareResponseDto,
+  OpenShareDto,
+} from './dto/share.dto';
+import { OpeningSharesService } from './opening-shares.service';
 import { addShareToCookie } from './share-cookie';
 import { openedShareResponseOf } from './shares.mapper';
 import { SharesService } from './shares.service';
@@ -16,19 +36,36 @@ import { SharesService } from './shares.service';
 export class SharesController {
   constructor(
     private readonly shares: SharesService,
+    private readonly opening: OpeningSharesService,
     @Inject(CONFIG) private readonly config: Config,
   ) {}
+
+  /** Every link of the player's, or those of one subject. */
+  @Get()
+  @Access.signedIn()
+  @ZodResponse({ status: 200, type: ListSharesResponseDto })
+  list(@CurrentViewer() viewer: Viewer, @Query() query: ListSharesDto) {
+    return this.shares.list(viewer, query);
+  }
+
+  /** The address is told here and never again. */
+  @Post()
+  @Access.signedIn()
+  @ZodResponse({ status: 201, type: CreatedShareResponseDto })
+  create(@CurrentViewer() viewer: Viewer, @Body() body: CreateShareDto) {
+    return this.shares.create(viewer, body);
+  }
 
   /** Exchanges the token of a link for a cookie, so that no address of the API carries it. */
   @Post('open')
   @Access.anyone()
   @ZodResponse({ status: 200, type: OpenedShareResponseDto })
   async open(
-    @Body() { token }: OpenShareDto,
+    @Body() body: OpenShareDto,
     @Req() request: Request,
     @Res({ passthrough: true }) response: Response,
   ) {
-    const share = await this.shares.open(token, request.ip ?? '');
+    const share = await this.opening.open(body, request.ip ?? '');
     const { jwtSecret: secret, isHttps } = this.config;
     addShareToCookie(request, response, share.id, { secret, isHttps });
     return openedShareResponseOf(share);

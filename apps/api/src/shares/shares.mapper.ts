@@ -1,16 +1,20 @@
 import { OpenedShareResponse, ShareResponse } from '@thudline/contracts';
 import { Share } from './entities/share.entity';
+import { subjectOf } from './share-subject';
 
 const told = (date: Date | null | undefined) => date?.toISOString() ?? null;
 
 export function shareResponseOf(share: Share): ShareResponse {
-  const { id, question, canListen, canDownload, openCount } = share;
+  const { id, label, question, canListen, canDownload, canNote, openCount } = share;
   return {
     id,
-    takeId: share.take.id,
+    subject: subjectOf(share),
+    label,
     question,
     canListen,
     canDownload,
+    canNote,
+    hasPassphrase: Boolean(share.passphraseHash),
     createdAt: share.createdAt.toISOString(),
     expiresAt: told(share.expiresAt),
     revokedAt: told(share.revokedAt),
@@ -21,13 +25,14 @@ export function shareResponseOf(share: Share): ShareResponse {
 
 /** @param share - with its owner */
 export function openedShareResponseOf(share: Share): OpenedShareResponse {
-  const { question, canListen, canDownload } = share;
+  const { question, canListen, canDownload, canNote } = share;
   return {
-    takeId: share.take.id,
+    subject: subjectOf(share),
     from: share.owner.unwrap().name,
     question,
     expiresAt: told(share.expiresAt),
     canListen,
     canDownload,
+    canNote,
   };
 }

@@ -1,91 +1,98 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Inject, Injectable } from '@nestjs/common';
-import { createShareRequest, CreatedShareResponse, ListSharesResponse } from '@thudline/contracts';
+import {
+  createShareRequest,
+  CreatedShareResponse,
+  ListSharesRequest,
+  ListSharesResponse,
+  shareLimits,
+  ShareSubject,
+  shareSubject,
+} from '@thudline/contracts';
 import { validate } from 'uuid';
 import { z } from 'zod';
 import { Viewer } from '../access/viewer';
 import { AuditService } from '../audit/audit.service';
+import { PasswordsService } from '../auth/passwords.service';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
 import { AppError, notFound } from '../errors/app-error';
-import { ThrottleService } from '../throttle/throttle.service';
+import { Room } from '../rooms/entities/room.entity';
+import { Take } from '../takes/entities/take.entity';
 import { randomToken, tokenHash } from '../tokens/random-token';
+import { TryOut } from '../tryouts/entities/try-out.entity';
 import { Share } from './entities/share.entity';
-import { isOpen } from './open-shares';
+import { expiryOf } from './share-expiry';
+import { isAbout, subjectColumns } from './share-subject';
 import { shareResponseOf } from './shares.mapper';
 
-const dayMs = 24 * 60 * 60 * 1000;
-
+/** A player's own links. */
 @Injectable()
 export class SharesService {
   constructor(
     private readonly em: EntityManager,
-    private readonly throttle: ThrottleService,
     private readonly audit: AuditService,
+    private readonly passwords: PasswordsService,
     @Inject(CONFIG) private readonly config: Config,
   ) {}
 
   async create(
-    { user }: Viewer,
-    takeId: string,
-    { expiresInDays, ...rest }: z.output<typeof createShareRequest>,
+    viewer: Viewer,
+    { subject, passphrase, expiresInDays, expiresAt, ...rest }: z.output<typeof createShareRequest>,
   ): Promise<CreatedShareResponse> {
+    const owner = viewer.user;
+    await this.checkOwn(viewer, subject);
+    if ((await this.em.count(Share, { owner: owner.id })) >= shareLimits.most)
+      throw new AppError('conflict', `You have made ${shareLimits.most} links, and no more can be kept.`);
     const token = randomToken();
-    const expiresAt = expiresInDays === null ? null : new Date(Date.now() + expiresInDays * dayMs);
     const share = this.em.create(Share, {
-      owner: user,
-      take: takeId,
+      owner,
+      ...subjectColumns(subject),
       tokenHash: tokenHash(token),
+      passphraseHash: passphrase === undefined ? null : await this.passwords.hash(passphrase),
       openCount: 0,
-      expiresAt,
+      expiresAt: expiryOf({ expiresInDays, expiresAt }),
       ...rest,
     });
     await this.em.flush();
-    this.audit.record({ kind: 'share-made', userId: user.id, subjectId: share.id });
+    this.audit.record({ kind: 'share-made', userId: owner.id, subjectId: share.id });
     await this.em.flush();
     return { ...shareResponseOf(share), url: new URL(`/s/${token}`, this.config.publicUrl).href };
   }
 
-  async list(takeId: string): Promise<ListSharesResponse> {
-    const shares = await this.em.find(Share, { take: takeId }, { orderBy: { id: 'desc' } });
+  async list(viewer: Viewer, { kind, ...ids }: ListSharesRequest): Promise<ListSharesResponse> {
+    const parsed = kind && shareSubject.safeParse({ kind, ...ids });
+    if (parsed && !parsed.success)
+      throw new AppError('bad-request', 'Say which take, comparison, try-out or room the links are to.');
+    if (parsed) await this.checkOwn(viewer, parsed.data);
+    const about = parsed ? isAbout(parsed.data) : {};
+    const where = { $and: [{ owner: viewer.user.id }, about] };
+    const shares = await this.em.find(Share, where, { orderBy: { id: 'desc' } });
     return { items: shares.map(shareResponseOf) };
   }
 
   /** Whoever has the sheet open can't read on. Safe to call twice. */
-  async end({ user }: Viewer, shareId: string): Promise<void> {
-    const share = validate(shareId) ? await this.em.findOne(Share, { id: shareId, owner: user.id }) : null;
-    if (!share) throw notFound();
+  async end(viewer: Viewer, shareId: string): Promise<void> {
+    const share = await this.getOwn(viewer, shareId);
     if (share.revokedAt) return;
     share.revokedAt = new Date();
-    this.audit.record({ kind: 'share-ended', userId: user.id, subjectId: share.id });
+    this.audit.record({ kind: 'share-ended', userId: viewer.user.id, subjectId: share.id });
     await this.em.flush();
   }
 
-  /** @returns the share with its owner, counted as opened once more */
-  async open(token: string, address: string): Promise<Share> {
-    await this.throttle.count({
-      key: 'open-share',
-      address,
-      limit: this.config.limits.openLinkPerAddress,
-      windowS: 900,
-    });
-    const share = await this.findOpen(token);
-    if (!share) throw linkEnded();
-    await this.em
-      .getConnection()
-      .execute('update share set opened_at = now(), open_count = open_count + 1 where id = ?', [share.id]);
+  private async getOwn({ user }: Viewer, shareId: string): Promise<Share> {
+    const share = validate(shareId) ? await this.em.findOne(Share, { id: shareId, owner: user.id }) : null;
+    if (!share) throw notFound();
     return share;
   }
 
-  /** @returns null for a link that has ended or never was */
-  async findOpen(token: string): Promise<Share | null> {
-    return this.em.findOne(
-      Share,
-      { tokenHash: tokenHash(token), ...(isOpen() as object) },
-      { populate: ['owner', 'take'] },
-    );
+  /** @throws {AppError} `not-found` where any of it is somebody else's, as if there were none */
+  private async checkOwn({ user }: Viewer, subject: ShareSubject): Promise<void> {
+    const owner = user.id;
+    const { take, otherTake, tryOut, room } = subjectColumns(subject);
+    for (const id of [take, otherTake])
+      if (id && !(await this.em.count(Take, { id, owner, deletedAt: null }))) throw notFound();
+    if (tryOut && !(await this.em.count(TryOut, { id: tryOut, owner }))) throw notFound();
+    if (room && !(await this.em.count(Room, { id: room, owner }))) throw notFound();
   }
 }
-
-const linkEnded = () =>
-  new AppError('link-ended', 'This link has ended, or is not whole. Ask whoever sent it for a new one.');

@@ -2,7 +2,8 @@ import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post, Query } fr
 import { ApiNoContentResponse, ApiTags } from '@nestjs/swagger';
 import { ZodResponse } from 'nestjs-zod';
 import { Access } from '../access/access.decorator';
-import { CurrentViewer, Viewer } from '../access/viewer';
+import { TakeRights } from '../access/take-rights';
+import { CurrentRights, CurrentViewer, Viewer } from '../access/viewer';
 import {
   CreateTryOutDto,
   ListTryOutsResponseDto,
@@ -15,7 +16,7 @@ import {
 import { TryOutRankingService } from './try-out-ranking.service';
 import { TryOutsService } from './try-outs.service';
 
-/** Each is its owner's alone: the service answers 404 to everybody else. */
+/** What changes one is its owner's alone: the service answers 404 to everybody else. */
 @ApiTags('try-outs')
 @Controller('api/tryouts')
 export class TryOutsController {
@@ -39,10 +40,10 @@ export class TryOutsController {
   }
 
   @Get(':id')
-  @Access.signedIn()
+  @Access.tryOut('read')
   @ZodResponse({ status: 200, type: TryOutResponseDto })
-  get(@CurrentViewer() viewer: Viewer, @Param('id') id: string) {
-    return this.tryOuts.get(viewer, id);
+  get(@Param('id') id: string, @CurrentRights() rights: TakeRights) {
+    return this.tryOuts.get(id, rights);
   }
 
   @Patch(':id')
@@ -81,9 +82,9 @@ export class TryOutsController {
   }
 
   @Get(':id/ranking')
-  @Access.signedIn()
+  @Access.tryOut('read')
   @ZodResponse({ status: 200, type: TryOutRankingResponseDto })
-  rank(@CurrentViewer() viewer: Viewer, @Param('id') id: string, @Query() query: TryOutRankingDto) {
-    return this.rankings.rank(viewer, id, query);
+  rank(@Param('id') id: string, @Query() query: TryOutRankingDto) {
+    return this.rankings.rank(id, query);
   }
 }

@@ -59,3 +59,9 @@ export function tryOutListItemOf(tryOut: TryOut, filled: FilledPlace[]): TryOutL
     winner: winner ? placeResponseOf(winner) : null,
   };
 }
+
+/** What whoever only reads it is told: nothing of uploads, neither made nor to come. */
+export function readersTryOut(whole: TryOutResponse): TryOutResponse {
+  const there = whole.places.filter(({ take }) => take);
+  return { ...whole, places: there.map((place) => ({ ...place, uploadKey: place.id, fileNames: [] })) };
+}

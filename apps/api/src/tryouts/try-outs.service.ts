@@ -9,13 +9,14 @@ import {
 } from '@thudline/contracts';
 import { validate } from 'uuid';
 import { z } from 'zod';
+import { TakeRights } from '../access/take-rights';
 import { Viewer } from '../access/viewer';
 import { AppError, notFound } from '../errors/app-error';
 import { MeasurementsService } from '../measuring/measurements.service';
 import { Take } from '../takes/entities/take.entity';
 import { TryOutPlace } from './entities/try-out-place.entity';
 import { TryOut } from './entities/try-out.entity';
-import { FilledPlace, tryOutListItemOf, tryOutResponseOf } from './try-outs.mapper';
+import { FilledPlace, readersTryOut, tryOutListItemOf, tryOutResponseOf } from './try-outs.mapper';
 
 type PlaceRequest = z.output<typeof createTryOutRequest>['places'][number];
 
@@ -50,8 +51,10 @@ export class TryOutsService {
     return this.whole(tryOut);
   }
 
-  async get(viewer: Viewer, id: string): Promise<TryOutResponse> {
-    return this.whole(await this.getOwn(viewer, id));
+  /** For whoever may read it; the guard has asked. */
+  async get(id: string, { own }: TakeRights): Promise<TryOutResponse> {
+    const whole = await this.whole(await this.em.findOneOrFail(TryOut, { id }));
+    return own ? whole : readersTryOut(whole);
   }
 
   async update(

@@ -5,18 +5,25 @@ import {
   OpenedShareResponse,
   openedShareResponse,
   paths,
+  ShareSubject,
   TakeResponse,
 } from '@thudline/contracts';
 import { Browser, Person } from './person';
 
-export async function sharedBy(
+export async function linkTo(
   person: Person,
-  take: TakeResponse,
-  request: CreateShareRequest = {},
+  subject: ShareSubject,
+  request: Partial<CreateShareRequest> = {},
 ): Promise<CreatedShareResponse> {
-  const response = await person.post(paths.shares(take.id), request).expect(201);
+  const response = await person.post(paths.shares, { subject, ...request }).expect(201);
   return createdShareResponse.parse(response.body);
 }
+
+export const sharedBy = (
+  person: Person,
+  take: TakeResponse,
+  request: Partial<CreateShareRequest> = {},
+): Promise<CreatedShareResponse> => linkTo(person, { kind: 'take', takeId: take.id }, request);
 
 export const tokenOf = ({ url }: { url: string }) => url.split('/').at(-1) ?? '';
 

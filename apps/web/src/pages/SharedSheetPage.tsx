@@ -17,15 +17,15 @@ export function SharedSheetPage() {
   usePageTitle(opened ? `A sheet from ${opened.from}` : 'A sheet');
   return (
     <PageFrame corner={opened && <SentBy opened={opened} />}>
-      {opened ? (
+      {opened?.subject.kind === 'take' ? (
         <ReadOnlySheet
-          takeId={opened.takeId}
+          takeId={opened.subject.takeId}
           above={<GuestQuestion opened={opened} />}
           gone={(cause) => isEnded(cause) && <LinkEnded />}
         />
-      ) : !error ? (
+      ) : !error && !opened ? (
         <PageLoading />
-      ) : isEnded(error) ? (
+      ) : !error || isEnded(error) ? (
         <LinkEnded />
       ) : (
         <PageMessage strong="The sheet could not be opened." rest={error.message}>

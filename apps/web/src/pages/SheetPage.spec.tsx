@@ -29,7 +29,7 @@ const report = sampleReport();
 const served: FakeRoutes = {
   [`GET ${paths.me}`]: json(sampleMe),
   [`GET ${paths.take(takeId)}`]: json(sampleTake()),
-  [`GET ${paths.shares(takeId)}`]: json({ items: [] }),
+  [`GET ${paths.sharesOf({ kind: 'take', takeId })}`]: json({ items: [] }),
   [`GET ${paths.report(takeId)}`]: json(report),
   [`GET ${paths.pairSpectrum(takeId)}`]: () => ({ bytes: samplePairSpectrumBytes(report.pairSpectrum!) }),
   [`GET ${paths.excerpt(takeId)}`]: () => sampleExcerpt(),

@@ -31,7 +31,7 @@ function open(take: Partial<TakeResponse>, routes: FakeRoutes = {}) {
   const server = fakeServer({
     ...servedSheet(take),
     [`GET ${paths.me}`]: json(sampleMe),
-    [`GET ${paths.shares(takeId)}`]: json({ items: [] }),
+    [`GET ${paths.sharesOf({ kind: 'take', takeId })}`]: json({ items: [] }),
     ...reports,
     ...routes,
   });

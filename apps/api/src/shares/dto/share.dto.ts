@@ -1,6 +1,7 @@
 import {
   createdShareResponse,
   createShareRequest,
+  listSharesRequest,
   listSharesResponse,
   openedShareResponse,
   openShareRequest,
@@ -9,6 +10,7 @@ import { createZodDto } from 'nestjs-zod';
 
 export class CreateShareDto extends createZodDto(createShareRequest) {}
 export class CreatedShareResponseDto extends createZodDto(createdShareResponse) {}
+export class ListSharesDto extends createZodDto(listSharesRequest) {}
 export class ListSharesResponseDto extends createZodDto(listSharesResponse) {}
 export class OpenShareDto extends createZodDto(openShareRequest) {}
 export class OpenedShareResponseDto extends createZodDto(openedShareResponse) {}

@@ -4,10 +4,13 @@ import { isOpen, openedWords, openUntilWords, rightsWords } from './shareWords';
 const now = new Date('2026-12-04T20:00:00');
 const share = (overrides: Partial<ShareResponse> = {}): ShareResponse => ({
   id: '01890000-0000-7000-8000-000000000101',
-  takeId: '01890000-0000-7000-8000-000000000001',
+  subject: { kind: 'take', takeId: '01890000-0000-7000-8000-000000000001' },
+  label: '',
   question: '',
   canListen: true,
   canDownload: false,
+  canNote: false,
+  hasPassphrase: false,
   createdAt: '2026-12-02T19:00:00.000Z',
   expiresAt: '2026-12-11T12:00:00.000Z',
   revokedAt: null,

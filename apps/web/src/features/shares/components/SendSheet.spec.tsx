@@ -7,10 +7,12 @@ import { takeId } from '../../../testing/sampleData';
 import { sampleCreatedShare, sampleShare } from '../../../testing/sampleShares';
 import { SendSheet } from './SendSheet';
 
+const subject = { kind: 'take', takeId } as const;
+
 function open(routes: FakeRoutes = {}, shares: ShareResponse[] = []) {
   const server = fakeServer({
-    [`GET ${paths.shares(takeId)}`]: () => ({ json: { items: shares } }),
-    [`POST ${paths.shares(takeId)}`]: json(sampleCreatedShare(), 201),
+    [`GET ${paths.sharesOf(subject)}`]: () => ({ json: { items: shares } }),
+    [`POST ${paths.shares}`]: json(sampleCreatedShare(), 201),
     ...routes,
   });
   renderPage([{ path: '/', element: <SendSheet takeId={takeId} /> }], '/');
@@ -35,8 +37,8 @@ describe('sending a sheet', () => {
     await screen.findByRole('dialog', { name: 'The link is ready' });
     expect(server.requests).toContainEqual({
       method: 'POST',
-      path: paths.shares(takeId),
-      body: { question: '', expiresInDays: 7, canListen: true, canDownload: false },
+      path: paths.shares,
+      body: { subject, question: '', expiresInDays: 7, canListen: true, canDownload: false },
     });
   });
 
@@ -51,8 +53,9 @@ describe('sending a sheet', () => {
     await waitFor(() =>
       expect(server.requests).toContainEqual({
         method: 'POST',
-        path: paths.shares(takeId),
+        path: paths.shares,
         body: {
+          subject,
           question: 'What would you change first?',
           expiresInDays: null,
           canListen: false,
@@ -86,7 +89,7 @@ describe('sending a sheet', () => {
   });
 
   it('keeps what was written when the link could not be made', async () => {
-    open({ [`POST ${paths.shares(takeId)}`]: refusal(429, 'too-many-requests', 'Wait a minute.') });
+    open({ [`POST ${paths.shares}`]: refusal(429, 'too-many-requests', 'Wait a minute.') });
     const dialog = await openDialog();
     await userEvent.type(within(dialog).getByLabelText(/Your question/), 'Why so thin?');
     await userEvent.click(within(dialog).getByRole('button', { name: 'Make the link' }));
@@ -140,7 +143,7 @@ describe('sending a sheet', () => {
   it('offers another try when the links could not be loaded', async () => {
     let working = false;
     open({
-      [`GET ${paths.shares(takeId)}`]: () =>
+      [`GET ${paths.sharesOf(subject)}`]: () =>
         working ? { json: { items: [] } } : refusal(500, 'internal', 'Try again in a moment.')(),
     });
     expect(await screen.findByRole('alert')).toHaveTextContent('The links could not be loaded.');

@@ -1,4 +1,5 @@
 import { Box } from '@chakra-ui/react';
+import type { ShareSubject } from '@thudline/contracts';
 import { useState } from 'react';
 import { Button } from '../../../components/Button';
 import { ShareDialog } from './ShareDialog';
@@ -6,14 +7,15 @@ import { ShareList } from './ShareList';
 
 /** At the head of the margin: send the sheet to somebody who can help, and what became of the links. */
 export function SendSheet({ takeId }: { takeId: string }) {
+  const subject: ShareSubject = { kind: 'take', takeId };
   const [open, setOpen] = useState(false);
   return (
     <Box paddingLeft={{ base: 0, lg: '20px' }} _print={{ display: 'none' }}>
       <Button type="button" look="outline" onClick={() => setOpen(true)}>
         Send this sheet
       </Button>
-      <ShareList takeId={takeId} />
-      {open && <ShareDialog takeId={takeId} onClose={() => setOpen(false)} />}
+      <ShareList subject={subject} />
+      {open && <ShareDialog subject={subject} onClose={() => setOpen(false)} />}
     </Box>
   );
 }

@@ -1,5 +1,5 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
-import type { CreatedShareResponse } from '@thudline/contracts';
+import type { CreatedShareResponse, ShareSubject } from '@thudline/contracts';
 import { useState, type FormEvent } from 'react';
 import { Button, TextButton } from '../../../components/Button';
 import { CheckBox } from '../../../components/CheckBox';
@@ -13,13 +13,13 @@ const maxQuestionLength = 300;
 
 /** What to ask, how long the link opens, and what may be done with it. */
 export function ShareForm({
-  takeId,
+  subject,
   onCreated,
 }: {
-  takeId: string;
+  subject: ShareSubject;
   onCreated: (share: CreatedShareResponse) => void;
 }) {
-  const { create } = useShareActions(takeId);
+  const { create } = useShareActions(subject);
   const [question, setQuestion] = useState('');
   const [expiresInDays, setExpiresInDays] = useState<number | null>(7);
   const [canListen, setCanListen] = useState(true);

@@ -1,4 +1,5 @@
 import { Box, chakra } from '@chakra-ui/react';
+import type { ShareSubject } from '@thudline/contracts';
 import { TextButton } from '../../../components/Button';
 import { plural } from '../../../lib/format';
 import { useNow } from '../../takes/hooks/useNow';
@@ -7,8 +8,8 @@ import { isOpen, openedWords } from '../shareWords';
 import { ShareRow } from './ShareRow';
 
 /** The links to this sheet: whether and when they were opened, and the way to end them. */
-export function ShareList({ takeId }: { takeId: string }) {
-  const { shares, error, retry } = useShares(takeId);
+export function ShareList({ subject }: { subject: ShareSubject }) {
+  const { shares, error, retry } = useShares(subject);
   const now = useNow();
   if (error)
     return (

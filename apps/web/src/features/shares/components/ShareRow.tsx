@@ -21,7 +21,7 @@ export function ShareRow({ share, now }: { share: ShareResponse; now: Date }) {
 }
 
 function EndQuestion({ share, onKeep }: { share: ShareResponse; onKeep: () => void }) {
-  const { end } = useShareActions(share.takeId);
+  const { end } = useShareActions(share.subject);
   const keep = useRef<HTMLButtonElement>(null);
   const [busy, setBusy] = useState(false);
   const [failure, setFailure] = useState('');
