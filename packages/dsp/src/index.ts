@@ -66,6 +66,8 @@ export {
 export * from './measurements/comparing/tryOutFigures';
 export type { ChoiceRule, TryOutMeasure, TryOutReason } from './measurements/comparing/tryOutMeasures';
 export * from './measurements/room/absorptionTable';
+export * from './measurements/room/modeGroups';
+export * from './measurements/room/modePressure';
 export * from './measurements/room/reverberation';
 export {
   roomModes,

@@ -1,7 +1,9 @@
 import { SignalError } from '../../assert';
 import { absorptionTable, type BandAbsorption } from './absorptionTable';
 import { absorptionArea, eyringS, sabineS } from './reverberation';
-import { roomModes } from './roomModes';
+import { modeGroups } from './modeGroups';
+import { modePressure } from './modePressure';
+import { roomModes, type RoomMode } from './roomModes';
 import { roomReverberation } from './roomReverberation';
 import { schroederFrequencyHz } from './schroederFrequency';
 
@@ -53,6 +55,57 @@ describe('the modes of a room', () => {
     expect(() => roomModes({ ...options, size: { ...size, heightM: 0 } })).toThrow(SignalError);
     expect(() => roomModes({ ...options, speedOfSoundMPerS: NaN })).toThrow(SignalError);
     expect(() => roomModes({ ...options, highestHz: 1e6 })).toThrow('modes');
+  });
+});
+
+describe('the pressure of a mode', () => {
+  const size = { lengthM: 5.2, widthM: 3.1, heightM: 2.4 };
+  const at = (xM: number, yM = 0, zM = 0) => ({ xM, yM, zM });
+
+  it('is all of it at every wall, and nothing where a half wave turns', () => {
+    expect(modePressure([2, 0, 0], size, at(0))).toBe(1);
+    expect(modePressure([2, 0, 0], size, at(5.2, 3.1, 2.4))).toBeCloseTo(1, 12);
+    expect(modePressure([2, 0, 0], size, at(2.6))).toBeCloseTo(1, 12);
+    for (const xM of [1.3, 3.9]) expect(modePressure([2, 0, 0], size, at(xM))).toBeCloseTo(0, 12);
+  });
+
+  it('is the product along the three directions', () => {
+    const place = at(1, 1, 1);
+    const alone = (
+      [
+        [1, 0, 0],
+        [0, 2, 0],
+        [0, 0, 1],
+      ] as const
+    ).map((order) => modePressure(order, size, place));
+    expect(modePressure([1, 2, 1], size, place)).toBeCloseTo(alone[0] * alone[1] * alone[2], 12);
+  });
+
+  it('is refused in a room that can’t be', () => {
+    expect(() => modePressure([1, 0, 0], { ...size, widthM: -3 }, at(0))).toThrow(SignalError);
+  });
+});
+
+describe('modes that lie close together', () => {
+  const of = (size: { lengthM: number; widthM: number; heightM: number }, highestHz: number) =>
+    roomModes({ size, speedOfSoundMPerS: HANDBOOK_SPEED, highestHz });
+  const names = (groups: RoomMode[][]) => groups.map((group) => group.map(({ order }) => order.join('')));
+
+  it('are those that a handbook’s room has at one frequency', () => {
+    // Ballou, Table 6-4: 16 × 12 × 8 ft has 70.63 Hz along the length, twice, and along the height.
+    const size = { lengthM: 16 * FOOT_M, widthM: 12 * FOOT_M, heightM: 8 * FOOT_M };
+    expect(names(modeGroups(of(size, 75), 2))).toEqual([['001', '200']]);
+  });
+
+  it('are all three of a cube, and none where each stands alone', () => {
+    const cube = { lengthM: 3, widthM: 3, heightM: 3 };
+    expect(names(modeGroups(of(cube, 60), 2))[0]).toEqual(['001', '010', '100']);
+    expect(modeGroups(of({ lengthM: 5.2, widthM: 3.1, heightM: 2.4 }, 60), 2)).toEqual([]);
+    expect(modeGroups([], 2)).toEqual([]);
+  });
+
+  it('need a distance', () => {
+    expect(() => modeGroups([], 0)).toThrow(SignalError);
   });
 });
 
@@ -109,7 +162,7 @@ describe('Sabine and Eyring', () => {
 describe('the reverberation of a room', () => {
   // Everest, The Master Handbook of Acoustics, 4th ed., p. 163, Examples 1 and 2: 23.3 × 16 × 10 ft.
   const FT2_M2 = FOOT_M * FOOT_M;
-  const size = { lengthM: 23.3 * FOOT_M, widthM: 16 * FOOT_M, heightM: 10 * FOOT_M };
+  const volumeM3 = 23.3 * 16 * 10 * FOOT_M ** 3;
   const surfaces = [
     { areaM2: 373 * FT2_M2, absorption: [0.01, 0.01, 0.015, 0.02, 0.02, 0.02] as BandAbsorption },
     { areaM2: 1159 * FT2_M2, absorption: [0.29, 0.1, 0.05, 0.04, 0.07, 0.09] as BandAbsorption },
@@ -119,7 +172,7 @@ describe('the reverberation of a room', () => {
     absorption: [0.09, 0.28, 0.78, 0.84, 0.73, 0.64] as BandAbsorption,
     covers: null,
   };
-  const room = { size, surfaces, speedOfSoundMPerS: HANDBOOK_SPEED };
+  const room = { volumeM3, surfaces, speedOfSoundMPerS: HANDBOOK_SPEED };
 
   it('is Everest’s Example 2 with the tiles, and Example 1 without', () => {
     const { before, after } = roomReverberation({ ...room, treatments: [tile] });

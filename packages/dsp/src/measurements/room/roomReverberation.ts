@@ -1,7 +1,6 @@
 import { assertPositive, SignalError } from '../../assert';
 import { ABSORPTION_BANDS_HZ, type BandAbsorption } from './absorptionTable';
 import { absorptionArea, eyringS, sabineS, type AbsorbingArea } from './reverberation';
-import { assertRoomSize, type RoomSize } from './roomModes';
 
 /** A floor, a ceiling, a wall or a part of one. */
 export interface RoomSurface {
@@ -16,7 +15,7 @@ export interface RoomTreatment extends RoomSurface {
 }
 
 export interface RoomReverberationOptions {
-  readonly size: RoomSize;
+  readonly volumeM3: number;
   readonly surfaces: readonly RoomSurface[];
   readonly treatments?: readonly RoomTreatment[];
   readonly speedOfSoundMPerS: number;
@@ -39,19 +38,16 @@ export interface RoomReverberation {
 /**
  * Reverberation by octave from what a room is made of, before and after what is brought in. An estimate.
  *
- * @throws {SignalError} `option` for a size, area or absorption that can't be, a treatment of a surface there isn't, and one
+ * @throws {SignalError} `option` for a volume, area or absorption that can't be, a treatment of a surface there isn't, and one
  *   that covers more than is left of its surface
  * @see sabineS and eyringS for the formulas
  * @example
- * const size = { lengthM: 5, widthM: 4, heightM: 2.5 };
  * const surfaces = [{ areaM2: 85, absorption: [0.1, 0.1, 0.1, 0.1, 0.1, 0.1] }];
  * const treatments = [{ areaM2: 10, absorption: [0.3, 0.8, 1, 1, 1, 1], covers: 0 }];
- * roomReverberation({ size, surfaces, treatments, speedOfSoundMPerS: 343 }).after[0].sabineS // 0.767
+ * roomReverberation({ volumeM3: 50, surfaces, treatments, speedOfSoundMPerS: 343 }).after[0].sabineS // 0.767
  */
 export function roomReverberation(options: RoomReverberationOptions): RoomReverberation {
-  const { size, surfaces, treatments = [], speedOfSoundMPerS } = options;
-  assertRoomSize(size);
-  const volumeM3 = size.lengthM * size.widthM * size.heightM;
+  const { volumeM3, surfaces, treatments = [], speedOfSoundMPerS } = options;
   const treated = [...uncovered(surfaces, treatments), ...treatments];
   const told = (parts: readonly RoomSurface[]): BandReverberation[] =>
     ABSORPTION_BANDS_HZ.map((centreHz, band) => {
