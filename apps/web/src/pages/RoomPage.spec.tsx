@@ -181,6 +181,41 @@ describe('a room’s log', () => {
     expect(sent.shape.lengthM).toBeCloseTo(5, 3);
   });
 
+  it('takes parts of its sides and the place of the kit, by key and by number', async () => {
+    const server = open({ [`PATCH ${paths.room(roomId)}`]: json(sampleRoom()) });
+    await userEvent.click(await screen.findByRole('button', { name: 'change what is written down' }));
+    const form = screen.getByRole('dialog', { name: 'The garage' });
+    await userEvent.click(within(form).getByRole('button', { name: 'add a part to: Left wall' }));
+    await userEvent.type(within(form).getByLabelText('Part, m²'), '2,1');
+    const kit = within(form).getByRole('button', {
+      name: /^Kit, 3.00 m from the left, 1.60 m from the front/,
+    });
+    kit.focus();
+    await userEvent.keyboard('{ArrowLeft}{ArrowLeft}{ArrowUp}');
+    expect(within(form).getByLabelText('From the left, m')).toHaveValue('2.8');
+    await userEvent.clear(within(form).getByLabelText('Turned, °'));
+    await userEvent.type(within(form).getByLabelText('Turned, °'), '90');
+    await userEvent.click(within(form).getByRole('button', { name: 'Keep this room' }));
+    await waitFor(() => expect(screen.queryByRole('dialog')).not.toBeInTheDocument());
+    expect(server.requests.find(({ method }) => method === 'PATCH')?.body).toMatchObject({
+      surfaces: [
+        { place: 'floor', materialId: 'concrete-floor', areaM2: null },
+        { place: 'left', materialId: 'timber-door', areaM2: 2.1 },
+      ],
+      kit: { xM: 2.8, yM: 1.7, turnedDeg: 90 },
+    });
+  });
+
+  it('takes the kit off its plan, and puts it in the middle', async () => {
+    open();
+    await userEvent.click(await screen.findByRole('button', { name: 'change what is written down' }));
+    const form = screen.getByRole('dialog', { name: 'The garage' });
+    await userEvent.click(within(form).getByRole('button', { name: 'take the kit off the plan' }));
+    expect(within(form).getByLabelText('From the left, m')).toHaveValue('');
+    await userEvent.click(within(form).getByRole('button', { name: 'Put the kit on the plan' }));
+    expect(within(form).getByRole('button', { name: /^Kit, 2.60 m from the left/ })).toBeInTheDocument();
+  });
+
   it('on a phone that reads along can’t be written in', async () => {
     open({ [`GET ${paths.me}`]: json({ ...sampleMe, readOnly: true }) });
     await screen.findByRole('heading', { level: 1 });

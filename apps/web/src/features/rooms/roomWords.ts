@@ -1,4 +1,11 @@
-import type { ChangeCategory, ChangeFigure, RoomResponse, TrendFigure } from '@thudline/contracts';
+import type {
+  ChangeCategory,
+  ChangeFigure,
+  PlanPlace,
+  RoomResponse,
+  RoomSurface,
+  TrendFigure,
+} from '@thudline/contracts';
 import { absorptionTable } from '@thudline/dsp';
 import { number, plural, signed } from '../../lib/format';
 
@@ -92,4 +99,20 @@ export const dayWords = (day: string): string => dayMonth.format(new Date(`${day
 export function logWords({ name, changeCount, takeCount, firstTakeAt }: RoomResponse): string {
   const since = firstTakeAt ? ` since ${dayWords(firstTakeAt)}` : '';
   return `${name} · room log · ${plural(changeCount, 'change')}, ${plural(takeCount, 'take')}${since}`;
+}
+
+export const surfaceWords: Record<RoomSurface['place'], string> = {
+  floor: 'Floor',
+  ceiling: 'Ceiling',
+  front: 'Front wall',
+  back: 'Back wall',
+  left: 'Left wall',
+  right: 'Right wall',
+};
+
+/** "3.4 m from the left, 1.5 m from the front". */
+export function placeWords({ xM, yM }: PlanPlace, unit: 'metre' | 'foot'): string {
+  const told = (metres: number) =>
+    unit === 'metre' ? `${number(metres, 2)} m` : `${number(metres * feet)} ft`;
+  return `${told(xM)} from the left, ${told(yM)} from the front`;
 }

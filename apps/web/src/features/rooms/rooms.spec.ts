@@ -2,8 +2,8 @@ import { defaultUserSettings } from '@thudline/contracts';
 import { openChange, sampleChange, sampleLog, sampleRoom } from '../../testing/sampleRooms';
 import { offeredTakes, suggestedTakes } from './changeDraft';
 import { headSentence } from './headSentence';
-import { planLayout } from './pictures/planLayout';
-import { draftOf, roomRequest } from './roomDraft';
+import { planLayout, planPlace } from './pictures/planLayout';
+import { draftKit, draftOf, draftShape, kitFields, roomRequest } from './roomDraft';
 import { changeWords, sizeWords } from './roomWords';
 
 describe('the sentence a log opens with', () => {
@@ -59,8 +59,12 @@ describe('what is written down of a room', () => {
         { place: 'left', materialId: 'timber-door', areaM2: 4.4 },
       ],
     });
-    const request = roomRequest(draftOf(room, units), units, room.surfaces)!;
-    expect(request.surfaces).toEqual(room.surfaces);
+    const request = roomRequest(draftOf(room, units), units)!;
+    const whole = ({ areaM2, ...rest }: (typeof room.surfaces)[number]) => ({
+      ...rest,
+      areaM2: areaM2 === null ? null : Math.round(areaM2 * 100) / 100,
+    });
+    expect(request.surfaces.map(whole)).toEqual(room.surfaces);
     expect(request.temperatureC).toBeCloseTo(12, 1);
     expect(request.kit!.xM).toBeCloseTo(3, 2);
     expect(request.shape).toMatchObject({ kind: 'box' });
@@ -79,6 +83,30 @@ describe('what is written down of a room', () => {
     expect(roomRequest({ ...draft, width: 'three' }, defaultUserSettings)).toBeNull();
   });
 
+  it('has its patches with their area, and none without one', () => {
+    const draft = draftOf(null, defaultUserSettings);
+    const patch = { place: 'left' as const, materialId: 'timber-door', area: '2,1' };
+    const request = roomRequest(
+      { ...draft, patches: [patch, { ...patch, area: ' ' }] },
+      defaultUserSettings,
+    )!;
+    expect(request.surfaces).toEqual([{ place: 'left', materialId: 'timber-door', areaM2: 2.1 }]);
+    expect(roomRequest({ ...draft, patches: [{ ...patch, area: 'two' }] }, defaultUserSettings)).toBeNull();
+  });
+
+  it('has a plan as soon as its length and width are typed, and a kit as soon as its place is', () => {
+    const draft = draftOf(null, defaultUserSettings);
+    expect(draftShape({ ...draft, length: '5' }, defaultUserSettings)).toBeNull();
+    expect(draftShape({ ...draft, length: '5', width: '3' }, defaultUserSettings)).toMatchObject({
+      lengthM: 5,
+      widthM: 3,
+    });
+    expect(draftKit({ ...draft, kitX: '2' }, defaultUserSettings)).toBeNull();
+    const feet = { ...defaultUserSettings, lengthUnit: 'foot' as const };
+    const kit = draftKit({ ...draft, ...kitFields({ xM: 2, yM: 1 }, feet) }, feet)!;
+    expect(kit.xM).toBeCloseTo(2, 2);
+  });
+
   it('reads in the reader’s units', () => {
     expect(sizeWords({ kind: 'other', volumeM3: 38, surfaceM2: null }, 'metre')).toBe('38 m³');
     expect(sizeWords(sampleRoom().shape, 'foot')).toBe('17.1 × 10.2 × 7.9 ft');
@@ -91,6 +119,15 @@ describe('the plan', () => {
     expect((plan.widthPx - 6) / (plan.heightPx - 6)).toBeCloseTo(5.2 / 3.1, 6);
     expect(plan.at({ xM: 0, yM: 0 })).toEqual({ x: 3, y: plan.heightPx - 3 });
     expect(plan.at({ xM: 99, yM: 99 })).toEqual({ x: plan.widthPx - 3, y: 3 });
+  });
+
+  it('gives back the place under a finger, inside the room, to five centimetres', () => {
+    const shape = sampleRoom().shape;
+    const plan = planLayout(shape, 288)!;
+    const at = (place: { xM: number; yM: number }) => planPlace(plan, shape, plan.at(place));
+    expect(at({ xM: 3, yM: 1.6 })).toEqual({ xM: 3, yM: 1.6 });
+    expect(planPlace(plan, shape, { x: -40, y: 9999 })).toEqual({ xM: 0, yM: 0 });
+    expect(planPlace(plan, shape, { x: 9999, y: -40 })).toEqual({ xM: 5.2, yM: 3.1 });
   });
 
   it('is not drawn from half its measures', () => {

@@ -1,14 +1,15 @@
-import { Box, Flex, Grid, chakra } from '@chakra-ui/react';
+import { Box, Flex, Grid } from '@chakra-ui/react';
 import type { CreateRoomRequest, RoomResponse, UserSettings } from '@thudline/contracts';
-import { absorptionTable } from '@thudline/dsp';
 import { useState, type FormEvent } from 'react';
 import { Button } from '../../../components/Button';
 import { CheckBox } from '../../../components/CheckBox';
 import { Dialog } from '../../../components/Dialog';
 import { FieldError } from '../../../components/FieldError';
-import { FieldLabel, TextField } from '../../../components/TextField';
-import { draftOf, roomRequest, surfacePlaces, type RoomDraft } from '../roomDraft';
+import { TextField } from '../../../components/TextField';
+import { draftOf, roomRequest, type RoomDraft, type RoomPartProps } from '../roomDraft';
+import { KitFields } from './KitFields';
 import { NumberField } from './NumberField';
+import { SurfaceFields } from './SurfaceFields';
 
 /** A room's name and whatever else is known of it. */
 export function RoomForm({
@@ -30,7 +31,7 @@ export function RoomForm({
   const set = (change: Partial<RoomDraft>) => setDraft((before) => ({ ...before, ...change }));
   const save = async (event: FormEvent) => {
     event.preventDefault();
-    const request = roomRequest(draft, settings, room?.surfaces);
+    const request = roomRequest(draft, settings);
     if (!request) return setFailure('One of the numbers can’t be read.');
     setBusy(true);
     try {
@@ -52,7 +53,7 @@ export function RoomForm({
             required
           />
           <Measures draft={draft} settings={settings} set={set} />
-          <Materials draft={draft} set={set} />
+          <SurfaceFields draft={draft} settings={settings} set={set} />
           <KitFields draft={draft} settings={settings} set={set} />
         </Flex>
         {failure && <FieldError id="room-failure">{failure}</FieldError>}
@@ -64,13 +65,7 @@ export function RoomForm({
   );
 }
 
-interface PartProps {
-  draft: RoomDraft;
-  settings: UserSettings;
-  set: (change: Partial<RoomDraft>) => void;
-}
-
-function Measures({ draft, settings, set }: PartProps) {
+function Measures({ draft, settings, set }: RoomPartProps) {
   const unit = settings.lengthUnit === 'metre' ? 'm' : 'ft';
   const degrees = settings.temperatureUnit === 'celsius' ? '°C' : '°F';
   return (
@@ -106,53 +101,5 @@ function Measures({ draft, settings, set }: PartProps) {
         onChange={(temperature) => set({ temperature })}
       />
     </>
-  );
-}
-
-function Materials({ draft, set }: Omit<PartProps, 'settings'>) {
-  return (
-    <Grid templateColumns={{ base: '1fr', md: 'repeat(2, 1fr)' }} gap="14px">
-      {surfacePlaces.map((place) => (
-        <FieldLabel key={place} as="label" css={{ '&': { display: 'block' } }}>
-          {`${place.charAt(0).toUpperCase()}${place.slice(1)}`}
-          <chakra.select
-            value={draft.materials[place]}
-            onChange={(event) => set({ materials: { ...draft.materials, [place]: event.target.value } })}
-            display="block"
-            width="100%"
-            minHeight="44px"
-            bg="transparent"
-            color="ink"
-            fontSize="body"
-            borderBottom="2px solid"
-            borderColor="edge"
-            css={{ '& option': { background: 'sheet', color: 'ink' } }}
-          >
-            <option value="">not said</option>
-            {absorptionTable.map(({ id, name }) => (
-              <option key={id} value={id}>
-                {name}
-              </option>
-            ))}
-          </chakra.select>
-        </FieldLabel>
-      ))}
-    </Grid>
-  );
-}
-
-function KitFields({ draft, settings, set }: PartProps) {
-  const unit = settings.lengthUnit === 'metre' ? 'm' : 'ft';
-  return (
-    <Box>
-      <Box fontSize="small" color="ink.muted">
-        Where you sit, on the plan: the length runs from left to right.
-      </Box>
-      <Grid templateColumns="repeat(3, 1fr)" gap="14px" marginTop="8px">
-        <NumberField label={`From the left, ${unit}`} text={draft.kitX} onChange={(kitX) => set({ kitX })} />
-        <NumberField label={`From the front, ${unit}`} text={draft.kitY} onChange={(kitY) => set({ kitY })} />
-        <NumberField label="Turned, °" text={draft.kitTurned} onChange={(kitTurned) => set({ kitTurned })} />
-      </Grid>
-    </Box>
   );
 }

@@ -1,6 +1,7 @@
 import { Box, chakra } from '@chakra-ui/react';
 import type { RoomChangeResponse, RoomResponse, UserSettings } from '@thudline/contracts';
 import { TextButton } from '../../../components/Button';
+import { TextLink } from '../../../components/TextLink';
 import { RoomPlan } from '../pictures/RoomPlan';
 import { roomMeasures } from '../roomWords';
 
@@ -42,8 +43,19 @@ export function RoomMargin({
           </Box>
         )}
       </Box>
+      <TextLink
+        to={`/rooms/${room.id}/calculator`}
+        display="inline-block"
+        fontSize="small"
+        fontWeight={600}
+        marginTop="8px"
+        paddingY="8px"
+        _print={{ display: 'none' }}
+      >
+        Estimate a change before you make it
+      </TextLink>
       {onEdit && (
-        <TextButton fontSize="small" marginTop="8px" paddingY="8px" onClick={onEdit}>
+        <TextButton display="block" fontSize="small" marginTop="8px" paddingY="8px" onClick={onEdit}>
           change what is written down
         </TextButton>
       )}

@@ -2,8 +2,9 @@ import { Box } from '@chakra-ui/react';
 import type { RoomChangeResponse, RoomResponse } from '@thudline/contracts';
 import { useWidth } from '../../../lib/useWidth';
 import { ink } from '../../sheet/pictures/ink';
+import { KitOnPlan } from './KitOnPlan';
 import { NumberRing } from './NumberRing';
-import { kitPieces, planLayout, type PlanLayout } from './planLayout';
+import { planLayout } from './planLayout';
 
 /** The room from above, to scale, with the kit and the changes where they were made. */
 export function RoomPlan({ room, changes }: { room: RoomResponse; changes: readonly RoomChangeResponse[] }) {
@@ -29,7 +30,7 @@ export function RoomPlan({ room, changes }: { room: RoomResponse; changes: reado
             stroke={ink.ink}
             strokeWidth="3"
           />
-          {room.kit && <Kit plan={plan} kit={room.kit} />}
+          {room.kit && <KitOnPlan plan={plan} kit={room.kit} outlined />}
           {placed.map(({ id, number, place }) => {
             const at = plan.at(place!);
             return <NumberRing key={id} number={number} {...at} />;
@@ -37,44 +38,6 @@ export function RoomPlan({ room, changes }: { room: RoomResponse; changes: reado
         </svg>
       )}
     </Box>
-  );
-}
-
-function Kit({ plan, kit }: { plan: PlanLayout; kit: NonNullable<RoomResponse['kit']> }) {
-  const { x, y } = plan.at(kit);
-  const { pxPerM } = plan;
-  return (
-    <g transform={`translate(${x} ${y}) rotate(${-kit.turnedDeg})`}>
-      <rect
-        x={-0.7 * pxPerM}
-        y={-1 * pxPerM}
-        width={1.7 * pxPerM}
-        height={2 * pxPerM}
-        fill="none"
-        stroke={ink.muted}
-        strokeDasharray="4 3"
-      />
-      {kitPieces.map((piece) => (
-        <circle
-          key={piece.name}
-          cx={piece.xM * pxPerM}
-          cy={-piece.yM * pxPerM}
-          r={piece.radiusM * pxPerM}
-          fill={ink.sheet}
-          stroke={ink.ink}
-          strokeWidth="1.4"
-        />
-      ))}
-      <circle cx={0.55 * pxPerM} cy={0} r={2.8} fill={ink.kick} />
-      <circle
-        cx={0.2 * pxPerM}
-        cy={-0.1 * pxPerM}
-        r={2.8}
-        fill={ink.sheet}
-        stroke={ink.overhead}
-        strokeWidth="1.6"
-      />
-    </g>
   );
 }
 

@@ -30,6 +30,24 @@ export function planLayout(
   };
 }
 
+const placeStepM = 0.05;
+
+/** The other way round: the place under a point of the picture, inside the room, to five centimetres. */
+export function planPlace(
+  { at, pxPerM }: PlanLayout,
+  shape: RoomResponse['shape'],
+  point: { x: number; y: number },
+): { xM: number; yM: number } {
+  const [lengthM, widthM] = shape.kind === 'box' ? [shape.lengthM ?? 0, shape.widthM ?? 0] : [0, 0];
+  const origin = at({ xM: 0, yM: 0 });
+  const within = (metres: number, mostM: number) =>
+    Number(Math.max(0, Math.min(mostM, Math.round(metres / placeStepM) * placeStepM)).toFixed(2));
+  return {
+    xM: within((point.x - origin.x) / pxPerM, lengthM),
+    yM: within((origin.y - point.y) / pxPerM, widthM),
+  };
+}
+
 /** A kit from above, in metres around its player's place: kick in front of the player, the rest around. */
 export const kitPieces = [
   { name: 'kick', xM: 0.45, yM: 0, radiusM: 0.28 },
