@@ -14,6 +14,7 @@ import { HealthModule } from './health/health.module';
 import { loggerModule } from './logging/logger.module';
 import { MeasurementsModule } from './measuring/measurements.module';
 import { PhotosModule } from './photos/photos.module';
+import { ProgressModule } from './progress/progress.module';
 import { ReportsModule } from './reports/reports.module';
 import { SampleSheetModule } from './sample-sheet/sample-sheet.module';
 import { SetupsModule } from './setups/setups.module';
@@ -43,6 +44,7 @@ export class AppModule {
         MeasurementsModule,
         ReportsModule,
         ComparisonsModule,
+        ProgressModule,
         SoundModule,
         AddedFilesModule,
         SharesModule,

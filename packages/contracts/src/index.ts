@@ -6,6 +6,7 @@ export * from './events';
 export * from './health';
 export * from './paths';
 export * from './photos';
+export * from './progress';
 export * from './reports';
 export * from './rooms';
 export * from './setups';

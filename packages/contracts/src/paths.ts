@@ -14,6 +14,7 @@ export const paths = {
   phoneLinks: '/api/auth/phone-links',
   openPhoneLink: '/api/auth/phone-links/open',
   me: '/api/me',
+  progress: '/api/me/progress',
   events: '/api/events',
   sampleSheet: '/api/sample-sheet',
   shares: '/api/shares',
