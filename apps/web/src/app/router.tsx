@@ -75,12 +75,22 @@ export const router = createBrowserRouter([
             lazy: async () => ({ Component: (await import('../pages/SetupPage')).SetupPage }),
           },
           {
+            path: '/progress',
+            lazy: async () => ({ Component: (await import('../pages/ProgressPage')).ProgressPage }),
+          },
+          {
             path: '/rooms',
             lazy: async () => ({ Component: (await import('../pages/RoomsPage')).RoomsPage }),
           },
           {
             path: '/rooms/:roomId',
             lazy: async () => ({ Component: (await import('../pages/RoomPage')).RoomPage }),
+          },
+          {
+            path: '/rooms/:roomId/calculator',
+            lazy: async () => ({
+              Component: (await import('../pages/RoomCalculatorPage')).RoomCalculatorPage,
+            }),
           },
           {
             path: '/settings',

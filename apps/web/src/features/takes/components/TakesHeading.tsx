@@ -14,6 +14,7 @@ export function TakesHeading() {
       </Box>
       <TextLink to="/setups">Setups</TextLink>
       <TextLink to="/tryouts">Try-outs</TextLink>
+      <TextLink to="/progress">Progress</TextLink>
       <ButtonLink to="/takes/new">Add a take</ButtonLink>
     </Flex>
   );
