@@ -10,6 +10,7 @@ import { ConfigModule } from './config/config.module';
 import { databaseModule } from './database/database.module';
 import { AppErrorFilter } from './errors/app-error.filter';
 import { EventsModule } from './events/events.module';
+import { ExportsModule } from './exports/exports.module';
 import { HealthModule } from './health/health.module';
 import { loggerModule } from './logging/logger.module';
 import { MeasurementsModule } from './measuring/measurements.module';
@@ -50,6 +51,7 @@ export class AppModule {
         SharesModule,
         TryOutsModule,
         SampleSheetModule,
+        ExportsModule,
         EventsModule,
         HealthModule,
       ],

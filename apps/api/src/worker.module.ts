@@ -6,10 +6,17 @@ import { AddingWorker } from './added-files/adding-worker';
 import { Config } from './config/config';
 import { ConfigModule } from './config/config.module';
 import { databaseModule } from './database/database.module';
+import { ExportClaims } from './exports/export-claims';
+import { ExportQueue } from './exports/export-queue';
+import { ExportRuns } from './exports/export-runs';
+import { ExportWorker } from './exports/export-worker';
+import { AccountPurge } from './housekeeping/account-purge';
+import { ExportPurge } from './housekeeping/export-purge';
 import { HousekeepingService } from './housekeeping/housekeeping.service';
 import { StoreRepair } from './housekeeping/store-repair';
 import { TakePurge } from './housekeeping/take-purge';
 import { loggerModule } from './logging/logger.module';
+import { AccountMailWriter } from './mail/account-mail-writer';
 import { MailWorker } from './mail/mail-worker';
 import { MailWriter } from './mail/mail-writer';
 import { Mailer } from './mail/mailer';
@@ -54,10 +61,17 @@ export class WorkerModule {
         AddingWorker,
         OneTimeTokensService,
         Mailer,
+        ExportQueue,
+        ExportClaims,
+        ExportRuns,
+        ExportWorker,
+        AccountMailWriter,
         MailWriter,
         MailWorker,
         TakePurge,
         StoreRepair,
+        AccountPurge,
+        ExportPurge,
         HousekeepingService,
       ],
     };

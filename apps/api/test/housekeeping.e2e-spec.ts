@@ -2,6 +2,8 @@ import { EntityManager } from '@mikro-orm/postgresql';
 import { listTakesResponse, paths } from '@thudline/contracts';
 import { Session } from '../src/auth/entities/session.entity';
 import { AuditEvent } from '../src/audit/entities/audit-event.entity';
+import { AccountPurge } from '../src/housekeeping/account-purge';
+import { ExportPurge } from '../src/housekeeping/export-purge';
 import { HousekeepingService } from '../src/housekeeping/housekeeping.service';
 import { StoreRepair } from '../src/housekeeping/store-repair';
 import { TakePurge } from '../src/housekeeping/take-purge';
@@ -29,7 +31,13 @@ describe('housekeeping', () => {
 
   const housekeeper = (objects = test.app.get(ObjectStoreService, { strict: false })) => {
     const em = test.app.get(EntityManager);
-    return new HousekeepingService(em, new TakePurge(em, objects), new StoreRepair(em, objects));
+    return new HousekeepingService(
+      em,
+      new TakePurge(em, objects),
+      new StoreRepair(em, objects),
+      new AccountPurge(em, objects),
+      new ExportPurge(em, objects),
+    );
   };
 
   it('removes takes and their recordings thirty days after they were deleted, not before', async () => {

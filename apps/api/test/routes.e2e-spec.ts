@@ -30,6 +30,7 @@ const openToAnyone = new Set([
   `post ${paths.forgot}`,
   `post ${paths.reset}`,
   `post ${paths.verify}`,
+  `post ${paths.confirmEmail}`,
   `post ${paths.openPhoneLink}`,
   `post ${paths.openShare}`,
   `get ${paths.sampleSheet}`,

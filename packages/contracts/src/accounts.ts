@@ -6,7 +6,7 @@ export const role = z.enum(roles);
 /** Roles add up; everyone is a player. */
 export type Role = z.infer<typeof role>;
 
-const email = z
+export const email = z
   .string({ error: 'Write your e-mail address.' })
   .trim()
   .max(254, 'An e-mail address has at most 254 characters.')
@@ -57,6 +57,11 @@ export const userSettings = z.object({
   target,
   /** Single keys act (Space, 1, 2, 3 …); some people need them off (WCAG 2.1.4). */
   singleKeys: z.boolean(),
+  /** About what mails are wanted; mails that keep the account safe always come. */
+  mailNotes: z.boolean(),
+  mailSent: z.boolean(),
+  mailOpened: z.boolean(),
+  mailDigest: z.boolean(),
 });
 export type UserSettings = z.infer<typeof userSettings>;
 
@@ -67,7 +72,23 @@ export const defaultUserSettings: UserSettings = {
   temperatureC: 20,
   target: { lowDbfs: -12, highDbfs: -6, aimDbfs: -9 },
   singleKeys: true,
+  mailNotes: true,
+  mailSent: true,
+  mailOpened: true,
+  mailDigest: false,
 };
+
+/** About what somebody can choose to get mails. */
+export const mailChoices = ['notes', 'sent', 'opened', 'digest'] as const;
+export type MailChoice = (typeof mailChoices)[number];
+
+/** Which setting says so. */
+export const mailSettings = {
+  notes: 'mailNotes',
+  sent: 'mailSent',
+  opened: 'mailOpened',
+  digest: 'mailDigest',
+} as const satisfies Record<MailChoice, keyof UserSettings>;
 
 /** PATCH: absent leaves as it is. */
 export const updateMeRequest = z.object({
@@ -85,6 +106,8 @@ export const meResponse = z.object({
   settings: userSettings,
   /** True on a phone that was let in to read along: nothing can be changed from it. */
   readOnly: z.boolean(),
+  /** When the account goes, where its deletion was asked for. */
+  deleteAfter: z.iso.datetime().nullable(),
 });
 export type MeResponse = z.infer<typeof meResponse>;
 
@@ -112,3 +135,34 @@ export type PhoneLinkResponse = z.infer<typeof phoneLinkResponse>;
 
 export const openPhoneLinkRequest = z.object({ token: oneTimeToken });
 export type OpenPhoneLinkRequest = z.infer<typeof openPhoneLinkRequest>;
+
+const ownPassword = z.string({ error: 'Write your password.' }).min(1, 'Write your password.').max(200);
+
+/** The address changes when the link in the mail to it is opened. */
+export const changeEmailRequest = z.object({ email, password: ownPassword });
+export type ChangeEmailRequest = z.infer<typeof changeEmailRequest>;
+
+export const confirmEmailRequest = z.object({ token: oneTimeToken });
+export type ConfirmEmailRequest = z.infer<typeof confirmEmailRequest>;
+
+export const sessionResponse = z.object({
+  id: z.uuid(),
+  /** "Firefox on Linux"; what a browser says of itself. */
+  device: z.string(),
+  /** The one that asks. */
+  current: z.boolean(),
+  readOnly: z.boolean(),
+  /** To a quarter of an hour. */
+  usedAt: z.iso.datetime(),
+});
+export type SessionResponse = z.infer<typeof sessionResponse>;
+
+/** This one first, then what was used last. */
+export const listSessionsResponse = z.object({ items: z.array(sessionResponse) });
+export type ListSessionsResponse = z.infer<typeof listSessionsResponse>;
+
+/** How long somebody can change their mind. */
+export const deletionGraceDays = 7;
+
+export const deleteAccountRequest = z.object({ password: ownPassword });
+export type DeleteAccountRequest = z.infer<typeof deleteAccountRequest>;

@@ -3,6 +3,7 @@ export * from './comparisons';
 export * from './addedFiles';
 export * from './errors';
 export * from './events';
+export * from './exports';
 export * from './health';
 export * from './paths';
 export * from './photos';

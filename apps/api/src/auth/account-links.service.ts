@@ -5,13 +5,13 @@ import { Viewer } from '../access/viewer';
 import { AuditService } from '../audit/audit.service';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
-import { AppError } from '../errors/app-error';
 import { MailQueue } from '../mail/mail-queue';
 import { ThrottleService } from '../throttle/throttle.service';
 import { OneTimeToken } from '../tokens/entities/one-time-token.entity';
 import { linkEnded, OneTimeTokensService } from '../tokens/one-time-tokens.service';
 import { User } from '../users/entities/user.entity';
 import { mailsKey } from './auth.service';
+import { OwnPassword } from './own-password';
 import { PasswordsService } from './passwords.service';
 import { SessionsService } from './sessions.service';
 
@@ -25,6 +25,7 @@ export class AccountLinksService {
     private readonly tokens: OneTimeTokensService,
     private readonly mails: MailQueue,
     private readonly passwords: PasswordsService,
+    private readonly ownPassword: OwnPassword,
     private readonly sessions: SessionsService,
     private readonly throttle: ThrottleService,
     private readonly audit: AuditService,
@@ -73,11 +74,8 @@ export class AccountLinksService {
 
   /** Ends every session but the one that asks. */
   async changePassword(viewer: Viewer, request: ChangePasswordRequest, address: string): Promise<void> {
-    const key = `change-password:${viewer.user.id}`;
-    await this.throttle.count({ key, limit: this.config.limits.signInPerAccount, windowS: 900 });
     const { user } = viewer;
-    if (!(await this.passwords.matches(user.passwordHash, request.oldPassword))) throw wrongPassword();
-    await this.throttle.clear(key);
+    await this.ownPassword.check(user, request.oldPassword, 'oldPassword');
     const passwordHash = await this.passwords.hash(request.password);
     await this.em.transactional(async () => {
       this.audit.record({ kind: 'password-changed', userId: user.id, address });
@@ -92,7 +90,7 @@ export class AccountLinksService {
   private async replacePassword(user: User, passwordHash: string, savedSessionId?: string): Promise<void> {
     user.passwordHash = passwordHash;
     await this.em.flush();
-    const open = { user, kind: { $in: ['reset', 'phone'] as const }, usedAt: null };
+    const open = { user, kind: { $in: ['reset', 'phone', 'new-address'] as const }, usedAt: null };
     await this.em.nativeUpdate(OneTimeToken, open, { usedAt: new Date() });
     await this.sessions.endAll(user, savedSessionId);
   }
@@ -103,8 +101,3 @@ export class AccountLinksService {
     return this.throttle.count({ key: 'account-link', address, limit, windowS: 900 });
   }
 }
-
-const wrongPassword = () =>
-  new AppError('bad-request', 'That is not your password.', {
-    details: { fields: { oldPassword: 'That is not your password.' } },
-  });

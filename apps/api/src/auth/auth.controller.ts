@@ -15,6 +15,7 @@ import { JoinDto } from './dto/join.dto';
 import { SignInDto } from './dto/sign-in.dto';
 import { SessionsService } from './sessions.service';
 import { SignInGuard } from './sign-in.guard';
+import { userAgentOf } from './device-words';
 
 @ApiTags('accounts')
 @Controller('api/auth')
@@ -30,7 +31,7 @@ export class AuthController {
   @ZodResponse({ status: 201, type: MeResponseDto })
   async join(@Body() body: JoinDto, @Req() request: Request, @Res({ passthrough: true }) response: Response) {
     const user = await this.auth.join(body, request.ip ?? '');
-    return this.signedIn(user, true, response);
+    return this.signedIn(user, true, request, response);
   }
 
   @Post('sign-in')
@@ -42,7 +43,7 @@ export class AuthController {
     @Req() request: Request & { user: User },
     @Res({ passthrough: true }) response: Response,
   ) {
-    return this.signedIn(request.user, stay, response);
+    return this.signedIn(request.user, stay, request, response);
   }
 
   @Post('refresh')
@@ -64,8 +65,9 @@ export class AuthController {
     clearSessionCookies(response, this.config.isHttps);
   }
 
-  private async signedIn(user: User, stay: boolean, response: Response) {
-    setSessionCookies(response, await this.sessions.start(user, stay), this.config.isHttps);
+  private async signedIn(user: User, stay: boolean, request: Request, response: Response) {
+    const tokens = await this.sessions.start(user, stay, userAgentOf(request));
+    setSessionCookies(response, tokens, this.config.isHttps);
     return meResponseOf(user, { readOnly: false });
   }
 }

@@ -10,7 +10,10 @@ import { AccountLinksController } from './account-links.controller';
 import { AccountLinksService } from './account-links.service';
 import { AuthController } from './auth.controller';
 import { AuthService } from './auth.service';
+import { EmailAddressController } from './email-address.controller';
+import { EmailAddressService } from './email-address.service';
 import { LocalStrategy } from './local.strategy';
+import { OwnPassword } from './own-password';
 import { PasswordsService } from './passwords.service';
 import { PhoneLinksController } from './phone-links.controller';
 import { PhoneLinksService } from './phone-links.service';
@@ -27,15 +30,17 @@ const jwt = JwtModule.registerAsync({
 
 @Module({
   imports: [jwt, AuditModule, MailModule, ThrottleModule, TokensModule],
-  controllers: [AuthController, AccountLinksController, PhoneLinksController],
+  controllers: [AuthController, AccountLinksController, EmailAddressController, PhoneLinksController],
   providers: [
     AuthService,
     AccountLinksService,
     PhoneLinksService,
     LocalStrategy,
     PasswordsService,
+    OwnPassword,
+    EmailAddressService,
     SessionsService,
   ],
-  exports: [PasswordsService, SessionsService],
+  exports: [PasswordsService, SessionsService, OwnPassword],
 })
 export class AuthModule {}

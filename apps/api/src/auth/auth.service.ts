@@ -7,6 +7,7 @@ import { CONFIG } from '../config/config.module';
 import { AppError } from '../errors/app-error';
 import { MailQueue } from '../mail/mail-queue';
 import { ThrottleService } from '../throttle/throttle.service';
+import { isClosed } from '../users/closed-account';
 import { User } from '../users/entities/user.entity';
 import { PasswordsService } from './passwords.service';
 
@@ -50,7 +51,7 @@ export class AuthService {
     await this.throttle.count({ key: account, limit: signInPerAccount, windowS: 900 });
     const user = await this.em.findOne(User, { emailLower });
     const isRight = await this.passwords.matches(user?.passwordHash ?? null, request.password);
-    if (!user || !isRight || user.lockedAt) {
+    if (!user || !isRight || isClosed(user)) {
       this.audit.record({ kind: 'sign-in-failed', userId: user?.id, address });
       await this.em.flush();
       throw new AppError('wrong-sign-in', 'That e-mail address and password do not belong together.');
@@ -64,7 +65,7 @@ export class AuthService {
 /** Counts the mails to others that one address of the net asks for, whatever they are about. */
 export const mailsKey = 'mails';
 
-const emailTaken = () =>
+export const emailTaken = () =>
   new AppError('email-taken', 'This e-mail address has an account already. Sign in instead.', {
     details: { fields: { email: 'This e-mail address has an account already.' } },
   });

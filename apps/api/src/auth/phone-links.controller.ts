@@ -9,6 +9,7 @@ import { CONFIG } from '../config/config.module';
 import { MeResponseDto } from '../users/dto/me.dto';
 import { meResponseOf } from '../users/users.mapper';
 import { accessCookieOf, setSessionCookies } from './auth-cookies';
+import { userAgentOf } from './device-words';
 import { OpenPhoneLinkDto, PhoneLinkResponseDto } from './dto/phone-links.dto';
 import { PhoneLinksService } from './phone-links.service';
 import { SessionsService } from './sessions.service';
@@ -42,7 +43,7 @@ export class PhoneLinksController {
     const cookie = accessCookieOf(request);
     const viewer = cookie ? await this.sessions.findViewer(cookie) : null;
     if (viewer && viewer.user.id === user.id) return meResponseOf(viewer.user, viewer);
-    const tokens = await this.sessions.startReadOnly(user);
+    const tokens = await this.sessions.startReadOnly(user, userAgentOf(request));
     setSessionCookies(response, tokens, this.config.isHttps);
     return meResponseOf(user, { readOnly: true });
   }

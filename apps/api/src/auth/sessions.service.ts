@@ -1,11 +1,13 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Inject, Injectable } from '@nestjs/common';
 import { JwtService } from '@nestjs/jwt';
+import { validate } from 'uuid';
 import { Viewer } from '../access/viewer';
 import { AuditService } from '../audit/audit.service';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
-import { AppError } from '../errors/app-error';
+import { AppError, notFound } from '../errors/app-error';
+import { isClosed } from '../users/closed-account';
 import { User } from '../users/entities/user.entity';
 import { SessionTokens } from './auth-cookies';
 import { Session } from './entities/session.entity';
@@ -36,14 +38,14 @@ export class SessionsService {
     @Inject(CONFIG) private readonly config: Config,
   ) {}
 
-  async start(user: User, stay: boolean): Promise<SessionTokens> {
-    return this.begin(user, { stay, readOnly: false, expiresAt: expiry(stay, new Date()) });
+  async start(user: User, stay: boolean, userAgent: string | null): Promise<SessionTokens> {
+    return this.begin(user, { stay, readOnly: false, expiresAt: expiry(stay, new Date()), userAgent });
   }
 
   /** A session from which nothing can be changed. */
-  async startReadOnly(user: User): Promise<SessionTokens> {
+  async startReadOnly(user: User, userAgent: string | null): Promise<SessionTokens> {
     const expiresAt = new Date(Date.now() + readOnlyMs);
-    return this.begin(user, { stay: true, readOnly: true, expiresAt });
+    return this.begin(user, { stay: true, readOnly: true, expiresAt, userAgent });
   }
 
   /** Reads session and user every time, so that signing out and locking act at once. */
@@ -56,7 +58,7 @@ export class SessionsService {
       { populate: ['user'] },
     );
     const user = session?.user.unwrap();
-    return session && user && !user.lockedAt
+    return session && user && !isClosed(user)
       ? { user, sessionId: session.id, readOnly: session.readOnly }
       : null;
   }
@@ -64,7 +66,9 @@ export class SessionsService {
   /** Asked outside of any request, by what stays open. @returns those of the sessions that are not over */
   async liveAmong(sessionIds: string[]): Promise<Set<string>> {
     const id = { $in: sessionIds };
-    const live = { id, revokedAt: null, expiresAt: { $gt: new Date() }, user: { lockedAt: null } };
+    const now = new Date();
+    const user = { lockedAt: null, $or: [{ deleteAfter: null }, { deleteAfter: { $gt: now } }] };
+    const live = { id, revokedAt: null, expiresAt: { $gt: now }, user };
     const sessions = await this.em.fork().find(Session, live);
     return new Set(sessions.map((session) => session.id));
   }
@@ -74,7 +78,7 @@ export class SessionsService {
     const session = await this.findGenuine(refreshToken);
     const generation = parseRefreshToken(refreshToken)?.generation;
     if (!session || session.revokedAt || session.expiresAt <= new Date()) throw sessionEnded();
-    if (session.user.unwrap().lockedAt) throw sessionEnded();
+    if (isClosed(session.user.unwrap())) throw sessionEnded();
     if (generation === session.generation) return this.rotate(session);
     const isRecent = Date.now() - session.rotatedAt.getTime() < previousTokenGraceMs;
     if (generation === session.generation - 1 && isRecent) return this.tokensOf(session);
@@ -102,9 +106,27 @@ export class SessionsService {
     await this.em.nativeUpdate(Session, { user, revokedAt: null, ...others }, { revokedAt: new Date() });
   }
 
+  /** @returns those that are not over: the viewer's own first, then by when they were used */
+  async list(viewer: Viewer): Promise<Session[]> {
+    const live = { user: viewer.user, revokedAt: null, expiresAt: { $gt: new Date() } };
+    const sessions = await this.em.find(Session, live, { orderBy: { rotatedAt: 'desc' }, limit: 100 });
+    const isOwn = ({ id }: Session) => id === viewer.sessionId;
+    return [...sessions.filter(isOwn), ...sessions.filter((session) => !isOwn(session))];
+  }
+
+  /** @throws {AppError} `not-found` where it is over or somebody else's */
+  async endOne({ user }: Viewer, sessionId: string): Promise<void> {
+    const live = { id: sessionId, user, revokedAt: null };
+    const session = validate(sessionId) ? await this.em.findOne(Session, live) : null;
+    if (!session) throw notFound();
+    this.audit.record({ kind: 'signed-out', userId: user.id });
+    session.revokedAt = new Date();
+    await this.em.flush();
+  }
+
   private async begin(
     user: User,
-    kind: Pick<Session, 'stay' | 'readOnly' | 'expiresAt'>,
+    kind: Pick<Session, 'stay' | 'readOnly' | 'expiresAt' | 'userAgent'>,
   ): Promise<SessionTokens> {
     const rotatedAt = new Date();
     const session = this.em.create(Session, {

@@ -1,6 +1,7 @@
 import { AddedFile } from '../added-files/entities/added-file.entity';
 import { AuditEvent } from '../audit/entities/audit-event.entity';
 import { Session } from '../auth/entities/session.entity';
+import { Export } from '../exports/entities/export.entity';
 import { Measurement } from '../measuring/entities/measurement.entity';
 import { Photo } from '../photos/entities/photo.entity';
 import { PairSpectrum } from '../reports/entities/pair-spectrum.entity';
@@ -42,4 +43,5 @@ export const entities = [
   TryOutPlace,
   Photo,
   Setup,
+  Export,
 ];

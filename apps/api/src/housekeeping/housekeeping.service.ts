@@ -4,6 +4,8 @@ import { Session } from '../auth/entities/session.entity';
 import { OneTimeToken } from '../tokens/entities/one-time-token.entity';
 import { Throttle } from '../throttle/entities/throttle.entity';
 import { StoreRepair } from './store-repair';
+import { AccountPurge } from './account-purge';
+import { ExportPurge } from './export-purge';
 import { TakePurge } from './take-purge';
 
 const hourMs = 60 * 60 * 1000;
@@ -21,6 +23,8 @@ export class HousekeepingService implements OnApplicationBootstrap, BeforeApplic
     private readonly em: EntityManager,
     private readonly purge: TakePurge,
     private readonly repair: StoreRepair,
+    private readonly accounts: AccountPurge,
+    private readonly exports: ExportPurge,
   ) {}
 
   onApplicationBootstrap(): void {
@@ -41,5 +45,7 @@ export class HousekeepingService implements OnApplicationBootstrap, BeforeApplic
     await em.nativeDelete(OneTimeToken, { expiresAt: { $lt: new Date(now.getTime() - dayMs) } });
     await em.nativeDelete(Session, { expiresAt: { $lt: new Date(now.getTime() - endedSessionKeptMs) } });
     await this.purge.run(now);
+    await this.exports.run(now);
+    await this.accounts.run(now);
   }
 }

@@ -3,4 +3,11 @@
  * that none lies in the queue's tables; and whether an address has an account at all is looked up there, not while
  * somebody waits for an answer.
  */
-export type MailJob = { kind: 'verify'; userId: string } | { kind: 'reset'; email: string };
+export type MailJob =
+  | { kind: 'verify'; userId: string }
+  | { kind: 'reset'; email: string }
+  /** To the address that is to be the account's. */
+  | { kind: 'new-address'; userId: string; email: string }
+  /** To the address as it is: that another is asked for. */
+  | { kind: 'address-notice'; userId: string; email: string; newEmail: string }
+  | { kind: 'deletion'; userId: string };

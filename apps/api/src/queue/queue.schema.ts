@@ -2,18 +2,20 @@ import PgBoss from 'pg-boss';
 
 export const measureQueue = 'measure';
 export const addedFileQueue = 'added-file';
+export const exportQueue = 'export';
 export const mailQueue = 'mail';
 
 /**
  * A measuring job is only the knock on the door: state, attempts and progress live on `measurement`. So pg-boss retries
  * nothing, and a job that takes longer than an hour is given up (common practice, no source: ten minutes of sound take
- * seconds). The same holds for added files.
+ * seconds). The same holds for added files and exports.
  *
  * A mail is tried again for about half a day, with longer and longer waits (common practice, no source).
  */
 const queues: PgBoss.Queue[] = [
   { name: measureQueue, policy: 'standard', retryLimit: 0, expireInSeconds: 3_600 },
   { name: addedFileQueue, policy: 'standard', retryLimit: 0, expireInSeconds: 3_600 },
+  { name: exportQueue, policy: 'standard', retryLimit: 0, expireInSeconds: 6 * 3_600 },
   {
     name: mailQueue,
     policy: 'standard',
@@ -26,7 +28,7 @@ const queues: PgBoss.Queue[] = [
 
 export function createBoss(
   databaseUrl: string,
-  part: 'sends' | 'works' | 'adds' | 'mails' | 'migrates',
+  part: 'sends' | 'works' | 'adds' | 'exports' | 'mails' | 'migrates',
 ): PgBoss {
   return new PgBoss({
     connectionString: databaseUrl,

@@ -10,8 +10,18 @@ interface AddedIn {
   attempt: number;
 }
 
+interface ExportedIn {
+  ownerId: string;
+  exportId: string;
+  attempt: number;
+}
+
 /** A key is never used twice: ids are new for every upload. */
 export const objectKeys = {
+  /** Each attempt writes its own. */
+  export: ({ ownerId, exportId, attempt }: ExportedIn) => `exports/${ownerId}/${exportId}-${attempt}.zip`,
+  /** Every archive there is of an account. */
+  exports: (ownerId: string) => `exports/${ownerId}/`,
   /** Each attempt writes its own. */
   addedFile: ({ takeId, addedFileId, attempt }: AddedIn) =>
     `takes/${takeId}/added/${addedFileId}-${attempt}.wav`,

@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { createReadStream } from 'node:fs';
-import { Readable } from 'node:stream';
+import { PassThrough, Readable } from 'node:stream';
 import { pipeline } from 'node:stream/promises';
 import {
   DeleteObjectCommand,
@@ -14,11 +14,20 @@ import {
   PutObjectCommand,
   S3Client,
 } from '@aws-sdk/client-s3';
+import { Upload } from '@aws-sdk/lib-storage';
 import { Inject, Injectable, Logger, OnApplicationShutdown } from '@nestjs/common';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
 import { AppError } from '../errors/app-error';
 import { createS3Client } from './s3-client';
+
+export interface StoredStream {
+  bytes: number;
+  sha256: string;
+}
+
+/** At 10,000 parts, the most there may be, an object has 80 GB. */
+const partSize = 8 * 1024 * 1024;
 
 interface StoredFile {
   key: string;
@@ -63,6 +72,29 @@ export class ObjectStoreService implements OnApplicationShutdown {
     const hash = createHash('sha256');
     await this.answered(async () => pipeline(await this.body(key), hash));
     if (hash.digest('hex') !== sha256) throw unavailable(new Error(`${key} was stored with other bytes`));
+  }
+
+  /**
+   * Puts what is written while it is read, in parts, so that it may be larger than memory. Parts of what was broken off
+   * are removed.
+   *
+   * @throws the error of `body` where that breaks
+   */
+  async putStream(key: string, body: Readable, signal: AbortSignal): Promise<StoredStream> {
+    const hash = createHash('sha256');
+    let bytes = 0;
+    const counted = new PassThrough();
+    counted.on('data', (chunk: Buffer) => {
+      hash.update(chunk);
+      bytes += chunk.length;
+    });
+    const piped = pipeline(body, counted, { signal });
+    const params = { Bucket: this.bucket, Key: key, Body: counted, ContentType: 'application/zip' };
+    const upload = new Upload({ client: this.client, params, partSize, queueSize: 2 });
+    const [, put] = await Promise.allSettled([piped, this.answered(() => upload.done())]);
+    await piped;
+    if (put.status === 'rejected') throw put.reason;
+    return { bytes, sha256: hash.digest('hex') };
   }
 
   async put(key: string, bytes: Uint8Array): Promise<void> {

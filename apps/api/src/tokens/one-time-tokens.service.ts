@@ -1,6 +1,7 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { AppError } from '../errors/app-error';
+import { isClosed } from '../users/closed-account';
 import { User } from '../users/entities/user.entity';
 import { OneTimeToken, OneTimeTokenKind } from './entities/one-time-token.entity';
 import { randomToken, tokenHash } from './random-token';
@@ -13,6 +14,7 @@ export const tokenLifetimeMs: Record<OneTimeTokenKind, number> = {
   verify: 7 * dayMs,
   reset: 60 * minuteMs,
   phone: 10 * minuteMs,
+  'new-address': dayMs,
 };
 
 export interface MadeToken {
@@ -24,11 +26,20 @@ export interface MadeToken {
 export class OneTimeTokensService {
   constructor(private readonly em: EntityManager) {}
 
-  /** Writes a token with the database's own transaction of `em`. */
-  async make(kind: OneTimeTokenKind, user: User, em: EntityManager = this.em): Promise<MadeToken> {
+  /**
+   * Writes a token with the database's own transaction of `em`.
+   *
+   * @param email - the address it is sent to, where that isn't the account's
+   */
+  async make(
+    kind: OneTimeTokenKind,
+    user: User,
+    em: EntityManager = this.em,
+    email = user.emailLower,
+  ): Promise<MadeToken> {
     const token = randomToken();
     const expiresAt = new Date(Date.now() + tokenLifetimeMs[kind]);
-    em.create(OneTimeToken, { kind, hash: tokenHash(token), user, email: user.emailLower, expiresAt });
+    em.create(OneTimeToken, { kind, hash: tokenHash(token), user, email, expiresAt });
     await em.flush();
     return { token, expiresAt };
   }
@@ -51,7 +62,7 @@ export class OneTimeTokensService {
   async use(kind: OneTimeTokenKind, token: string): Promise<User> {
     const found = await this.find(kind, token);
     const user = found?.user.unwrap();
-    if (!found || !user || user.lockedAt || found.email !== user.emailLower) throw linkEnded();
+    if (!found || !user || isClosed(user) || found.email !== user.emailLower) throw linkEnded();
     const isFirst = await this.em.nativeUpdate(
       OneTimeToken,
       { id: found.id, usedAt: null },

@@ -13,5 +13,6 @@ export function meResponseOf(user: User, { readOnly }: { readOnly: boolean }): M
     roles,
     settings: settingsOf(user),
     readOnly,
+    deleteAfter: user.deleteAfter?.toISOString() ?? null,
   };
 }

@@ -1,4 +1,5 @@
 import { chakra } from '@chakra-ui/react';
+import { lazy, Suspense } from 'react';
 import { Link, Outlet, useLocation } from 'react-router-dom';
 import { PageFrame } from '../components/PageFrame';
 import { Swell } from '../components/Swell';
@@ -15,6 +16,29 @@ function NavLink({ to, also, children }: { to: string; also?: string; children: 
       </Link>
       {here && <Swell depthPx={5} linePx={1.5} />}
     </chakra.span>
+  );
+}
+
+const GoesOn = lazy(async () => ({
+  default: (await import('../features/settings/components/GoesOn')).GoesOn,
+}));
+
+/** On every page until it is stopped; the settings say it in their own place. */
+function AccountGoes({ deleteAfter }: { deleteAfter: string }) {
+  const here = useLocation().pathname === '/settings';
+  if (here) return null;
+  return (
+    <chakra.aside
+      aria-label="Your account"
+      bg="sheet"
+      paddingX={{ base: '18px', md: '40px', lg: '64px' }}
+      paddingTop="20px"
+      _print={{ display: 'none' }}
+    >
+      <Suspense fallback={null}>
+        <GoesOn deleteAfter={deleteAfter} />
+      </Suspense>
+    </chakra.aside>
   );
 }
 
@@ -35,6 +59,7 @@ export function Layout() {
       }
       corner={<AccountCorner />}
     >
+      {me?.deleteAfter && <AccountGoes deleteAfter={me.deleteAfter} />}
       <Outlet />
     </PageFrame>
   );

@@ -40,6 +40,10 @@ export const router = createBrowserRouter([
         lazy: async () => ({ Component: (await import('../pages/ResetPage')).ResetPage }),
       },
       {
+        path: '/new-address/:token',
+        lazy: async () => ({ Component: (await import('../pages/NewAddressPage')).NewAddressPage }),
+      },
+      {
         path: '/verify/:token',
         lazy: async () => ({ Component: (await import('../pages/VerifyPage')).VerifyPage }),
       },

@@ -1,7 +1,10 @@
 import {
+  listSessionsResponse,
   listTakesResponse,
+  myExportResponse,
   meResponse,
   paths,
+  type ExportResponse,
   type MeResponse,
   type UpdateMeRequest,
 } from '@thudline/contracts';
@@ -18,6 +21,23 @@ const takes = [
   sampleListItem({ number: 12, kickPeakDbfs: -8.6 }),
   sampleListItem({ number: 11, kickPeakDbfs: -14.2 }),
 ];
+const sessions = [
+  {
+    id: listId(90),
+    device: 'Firefox on Linux',
+    current: true,
+    readOnly: false,
+    usedAt: '2026-12-01T10:00:00.000Z',
+  },
+  {
+    id: listId(91),
+    device: 'Safari on an iPhone',
+    current: false,
+    readOnly: true,
+    usedAt: '2026-11-02T10:00:00.000Z',
+  },
+];
+const holds = { takes: 20, rooms: 3, notes: 0, bytes: 310e6 };
 const listPath = `${paths.takes}?limit=100`;
 
 /** A server that keeps what it is told of the player. */
@@ -30,6 +50,8 @@ function open(routes: FakeRoutes = {}, start: Partial<MeResponse> = {}) {
       me = { ...me, name: name ?? me.name, settings: { ...me.settings, ...settings } };
       return { json: meResponse.parse(me) };
     },
+    [`GET ${paths.sessions}`]: json(listSessionsResponse.parse({ items: sessions })),
+    [`GET ${paths.export}`]: json(myExportResponse.parse({ export: null, holds })),
     [`GET ${listPath}`]: json(listTakesResponse.parse(sampleList(takes))),
     [`GET ${paths.report(listId(14))}`]: json(sampleReport({ takeId: listId(14) })),
     ...routes,
@@ -270,8 +292,10 @@ describe('units', () => {
 it('switches single keys off, and lists what they do', async () => {
   const { changes } = open();
   const keys = within(await region('Keys'));
+  expect(keys.queryByText('Space')).not.toBeInTheDocument();
+  await userEvent.click(keys.getByRole('button', { name: 'see all keys' }));
   expect(keys.getByText('Space')).toBeInTheDocument();
-  await userEvent.click(keys.getByRole('checkbox', { name: 'Single keys work on a sheet' }));
+  await userEvent.click(keys.getByRole('checkbox', { name: /^Single keys:/ }));
   await waitFor(() => expect(changes()).toEqual([{ settings: { singleKeys: false } }]));
   expect(await keys.findByText('kept')).toBeInTheDocument();
   expect(keys.getByRole('checkbox')).not.toBeChecked();
@@ -294,7 +318,7 @@ it('keeps the last of several quick changes', async () => {
         ];
       }),
   });
-  const box = await screen.findByRole('checkbox', { name: 'Single keys work on a sheet' });
+  const box = await screen.findByRole('checkbox', { name: /^Single keys:/ });
   await userEvent.click(box);
   await userEvent.click(box);
   expect(changes()).toEqual([{ settings: { singleKeys: false } }]);
@@ -302,4 +326,143 @@ it('keeps the last of several quick changes', async () => {
   await waitFor(() => expect(changes()).toHaveLength(2));
   await act(() => Promise.resolve(held[1]()));
   expect(box).toBeChecked();
+});
+
+it('keeps about what mails are wanted', async () => {
+  const { changes } = open();
+  const mail = within(await region('Mail me when'));
+  expect(mail.getByRole('checkbox', { name: /^a week has gone by/ })).not.toBeChecked();
+  await userEvent.click(mail.getByRole('checkbox', { name: 'somebody answers or leaves a note' }));
+  await waitFor(() => expect(changes()).toEqual([{ settings: { mailNotes: false } }]));
+  expect(await mail.findByText('kept')).toBeInTheDocument();
+});
+
+describe('another address', () => {
+  const ask = async () => {
+    await userEvent.click(await screen.findByRole('button', { name: 'change the e-mail address' }));
+    await userEvent.type(screen.getByLabelText('E-mail'), 'juno@new.example');
+    await userEvent.type(screen.getByLabelText('Your password'), 'drumsdrums');
+    await userEvent.click(screen.getByRole('button', { name: 'Send the mail' }));
+  };
+
+  it('is asked for with the password, and counts once its mail was opened', async () => {
+    const { requests } = open({ [`POST ${paths.changeEmail}`]: () => ({ status: 204 }) });
+    await ask();
+    expect(await screen.findByText(/Your address changes when you open its link/)).toBeInTheDocument();
+    expect(requests.find(({ path }) => path === paths.changeEmail)?.body).toEqual({
+      email: 'juno@new.example',
+      password: 'drumsdrums',
+    });
+    expect(screen.getByText('juno@example.org')).toBeInTheDocument();
+  });
+
+  it('says beside the field whose it is already', async () => {
+    open({
+      [`POST ${paths.changeEmail}`]: refusal(409, 'email-taken', 'This address has an account already.'),
+    });
+    await ask();
+    await waitFor(() =>
+      expect(screen.getByLabelText('E-mail')).toHaveAccessibleDescription(
+        'This address has an account already.',
+      ),
+    );
+  });
+});
+
+describe('the devices', () => {
+  it('are listed, and all but this one can be signed out', async () => {
+    const { requests } = open({ [`DELETE ${paths.session(listId(91))}`]: () => ({ status: 204 }) });
+    const devices = within(await region('Signed in on'));
+    expect(await devices.findByText('Firefox on Linux')).toBeInTheDocument();
+    expect(devices.getByText('this one, now')).toBeInTheDocument();
+    expect(devices.getByText('Safari on an iPhone, reads along')).toBeInTheDocument();
+    expect(devices.getAllByRole('button', { name: /^sign out [A-Z]/ })).toHaveLength(1);
+    await userEvent.click(devices.getByRole('button', { name: 'sign out Safari on an iPhone' }));
+    await waitFor(() =>
+      expect(requests.map(({ method, path }) => `${method} ${path}`)).toContain(
+        `DELETE ${paths.session(listId(91))}`,
+      ),
+    );
+  });
+
+  it('are signed out all at once', async () => {
+    const { requests } = open({ [`DELETE ${paths.sessions}`]: () => ({ status: 204 }) });
+    await userEvent.click(await screen.findByRole('button', { name: 'sign out everywhere else' }));
+    await waitFor(() => expect(requests.some(({ method }) => method === 'DELETE')).toBe(true));
+  });
+
+  it('are asked for again when they could not be listed', async () => {
+    let away = true;
+    open({
+      [`GET ${paths.sessions}`]: () =>
+        away ? refusal(500, 'internal', 'Something went wrong.')() : json({ items: sessions })(),
+    });
+    const devices = within(await region('Signed in on'));
+    expect(await devices.findByRole('alert')).toHaveTextContent('Something went wrong.');
+    away = false;
+    await userEvent.click(devices.getByRole('button', { name: 'Try again' }));
+    expect(await devices.findByText('Firefox on Linux')).toBeInTheDocument();
+  });
+});
+
+describe('the archive of everything', () => {
+  const made: ExportResponse = {
+    id: listId(92),
+    createdAt: '2026-12-01T10:00:00.000Z',
+    state: 'done',
+    progress: 1,
+    reason: null,
+    file: { name: 'thudline 2026-12-01.zip', bytes: 305e6, expiresAt: '2026-12-08T10:00:00.000Z' },
+  };
+
+  it('is asked for, followed, and downloaded', async () => {
+    let latest: ExportResponse | null = null;
+    const running: ExportResponse = { ...made, state: 'running', progress: 0.4, file: null };
+    open({
+      [`GET ${paths.export}`]: () => json({ export: latest, holds })(),
+      [`POST ${paths.export}`]: () => {
+        latest = running;
+        return { json: latest };
+      },
+    });
+    expect(await screen.findByText('20 takes, 3 rooms: one ZIP of about 310.0 MB.')).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Export everything' }));
+    expect(await screen.findByRole('progressbar', { name: 'Your archive' })).toHaveAttribute(
+      'aria-valuenow',
+      '40',
+    );
+    latest = made;
+    expect(
+      await screen.findByRole('link', { name: 'thudline 2026-12-01.zip' }, { timeout: 4_000 }),
+    ).toHaveAttribute('href', paths.exportFile(made.id));
+  });
+
+  it('says why it was not made', async () => {
+    const failed = { ...made, state: 'failed', file: null, reason: 'Your recordings could not be fetched.' };
+    open({ [`GET ${paths.export}`]: json({ export: failed, holds }) });
+    expect(await screen.findByText('Your recordings could not be fetched.')).toBeInTheDocument();
+    expect(screen.getByRole('button', { name: 'Export everything' })).toHaveAttribute(
+      'aria-disabled',
+      'false',
+    );
+  });
+});
+
+describe('deleting the account', () => {
+  const deleteAfter = '2026-12-08T10:00:00.000Z';
+
+  it('asks for the password, says when it goes, and can be stopped', async () => {
+    const { requests } = open({
+      [`POST ${paths.deletion}`]: json({ ...sampleMe, deleteAfter }, 201),
+      [`DELETE ${paths.deletion}`]: json(sampleMe),
+    });
+    await userEvent.click(await screen.findByRole('button', { name: 'Delete the account' }));
+    const dialog = within(screen.getByRole('dialog', { hidden: true }));
+    await userEvent.type(dialog.getByLabelText('Your password'), 'drumsdrums');
+    await userEvent.click(dialog.getByText('Delete it in 7 days'));
+    expect(await screen.findByText(/This account goes on 8 Dec/)).toBeInTheDocument();
+    expect(requests.find(({ path }) => path === paths.deletion)?.body).toEqual({ password: 'drumsdrums' });
+    await userEvent.click(screen.getByRole('button', { name: 'Keep the account' }));
+    expect(await screen.findByRole('button', { name: 'Delete the account' })).toBeInTheDocument();
+  });
 });

@@ -19,6 +19,7 @@ export const sampleMe: MeResponse = {
   roles: ['player'],
   settings: defaultUserSettings,
   readOnly: false,
+  deleteAfter: null,
 };
 
 export const measurement = (overrides: Partial<MeasurementResponse> = {}): MeasurementResponse => ({

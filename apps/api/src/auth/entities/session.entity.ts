@@ -19,6 +19,8 @@ export const Session = defineEntity({
     stay: p.boolean(),
     /** A phone that was let in to read along: nothing can be changed from it. */
     readOnly: p.boolean().default(false),
+    /** What the browser says of itself; null for sessions that began before it was kept. */
+    userAgent: p.string().length(300).nullable(),
   },
 });
 export type Session = InferEntity<typeof Session>;

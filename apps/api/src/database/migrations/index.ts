@@ -13,6 +13,7 @@ import { Migration20261201133500_findSameFiles } from './20261201133500-find-sam
 import { Migration20261201134300_rooms } from './20261201134300-rooms';
 import { Migration20261201135100_addedFiles } from './20261201135100-added-files';
 import { Migration20261201152212_sharesOfMore } from './20261201152212-shares-of-more';
+import { Migration20261201153500_settingsOfAnAccount } from './20261201153500-settings-of-an-account';
 
 /** In order; a new migration is added at the end and never changed once merged. */
 export const migrations = [
@@ -31,4 +32,5 @@ export const migrations = [
   { name: '20261201134300-rooms', class: Migration20261201134300_rooms },
   { name: '20261201135100-added-files', class: Migration20261201135100_addedFiles },
   { name: '20261201152212-shares-of-more', class: Migration20261201152212_sharesOfMore },
+  { name: '20261201153500-settings-of-an-account', class: Migration20261201153500_settingsOfAnAccount },
 ];

@@ -2,7 +2,7 @@ import { defineEntity, InferEntity, p } from '@mikro-orm/core';
 import { identity } from '../../database/identity';
 import { User } from '../../users/entities/user.entity';
 
-export const oneTimeTokenKinds = ['verify', 'reset', 'phone'] as const;
+export const oneTimeTokenKinds = ['verify', 'reset', 'phone', 'new-address'] as const;
 export type OneTimeTokenKind = (typeof oneTimeTokenKinds)[number];
 
 /** A link that does one thing once. */

@@ -22,6 +22,12 @@ export const User = defineEntity({
     /** Number of the next take; raised inside the transaction that makes a take, whose row lock it is. */
     nextTakeNumber: p.integer().default(1),
     lockedAt: p.datetime().nullable(),
+    /** From then on the account is closed, and goes for good with the next housekeeping; null unless it was asked for. */
+    deleteAfter: p.datetime().nullable().index(),
+    /** The end of the week that was told last; null before the first. */
+    digestAt: p.datetime().nullable(),
+    /** Where this account may keep more, or less, than others. */
+    quotaBytes: p.bigint('number').nullable(),
   },
 });
 export type User = InferEntity<typeof User>;

@@ -28,10 +28,10 @@ export function useAccountLinks() {
 }
 
 /** Redeems the link of a mail, once, however often the page is drawn. */
-export function useVerification(token: string) {
+export function useVerification(token: string, path: string = paths.verify) {
   const { mutate } = useSWRConfig();
-  const verify = async ([path]: [string, string]) => {
-    await requestNothing(path, { method: 'POST', body: { token } });
+  const verify = async ([to]: [string, string]) => {
+    await requestNothing(to, { method: 'POST', body: { token } });
     await mutate(paths.me);
     return 'verified' as const;
   };
@@ -39,7 +39,7 @@ export function useVerification(token: string) {
     data,
     error,
     mutate: again,
-  } = useSWR<'verified', Error, [string, string]>([paths.verify, token], verify, {
+  } = useSWR<'verified', Error, [string, string]>([path, token], verify, {
     revalidateIfStale: false,
     revalidateOnReconnect: false,
     revalidateOnFocus: false,

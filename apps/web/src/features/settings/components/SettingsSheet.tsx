@@ -2,7 +2,11 @@ import { Box } from '@chakra-ui/react';
 import type { MeResponse } from '@thudline/contracts';
 import { Headline } from '../../../components/Headline';
 import { SheetPaper } from '../../../components/SheetPaper';
+import { DeletionSection } from './DeletionSection';
+import { DevicesSection } from './DevicesSection';
+import { ExportSection } from './ExportSection';
 import { KeysSection } from './KeysSection';
+import { MailSection } from './MailSection';
 import { TargetSection } from './TargetSection';
 import { UnitsSection } from './UnitsSection';
 import { YouSection } from './YouSection';
@@ -19,12 +23,19 @@ export function SettingsSheet({ me }: { me: MeResponse }) {
         display="grid"
         gridTemplateColumns={{ base: 'minmax(0, 1fr)', lg: 'repeat(2, minmax(0, 1fr))' }}
         columnGap="56px"
+        rowGap={{ base: '18px', lg: 0 }}
       >
         <Box>
           <YouSection me={me} />
           <UnitsSection settings={me.settings} />
+          <KeysSection singleKeys={me.settings.singleKeys} />
         </Box>
-        <KeysSection singleKeys={me.settings.singleKeys} />
+        <Box>
+          <MailSection settings={me.settings} />
+          <DevicesSection />
+        </Box>
+        <ExportSection />
+        <DeletionSection deleteAfter={me.deleteAfter} />
       </Box>
     </SheetPaper>
   );

@@ -2,16 +2,17 @@ import { Box } from '@chakra-ui/react';
 import { updateMeRequest, type MeResponse } from '@thudline/contracts';
 import { useState } from 'react';
 import { TextButton } from '../../../components/Button';
-import { FieldLabel, TextField } from '../../../components/TextField';
+import { TextField } from '../../../components/TextField';
 import { useKept } from '../hooks/useKept';
+import { EmailShown, NewEmail } from './EmailPart';
 import { Kept } from './Kept';
 import { NewPassword } from './NewPassword';
 import { SettingsSection } from './SettingsSection';
-import { VerifiedWords } from './VerifiedWords';
 
 /** Name, address and password. */
 export function YouSection({ me }: { me: MeResponse }) {
-  const [settingPassword, setSettingPassword] = useState(false);
+  const [open, setOpen] = useState<'password' | 'email' | null>(null);
+  const close = () => setOpen(null);
   return (
     <SettingsSection title="You">
       <Box
@@ -21,13 +22,13 @@ export function YouSection({ me }: { me: MeResponse }) {
         rowGap="12px"
       >
         <NameField name={me.name} />
-        <Email me={me} />
+        <EmailShown me={me} onChange={() => setOpen('email')} />
       </Box>
-      <Box marginTop={{ base: '12px', sm: settingPassword ? '16px' : '-24px' }}>
-        {settingPassword ? (
-          <NewPassword onDone={() => setSettingPassword(false)} />
-        ) : (
-          <TextButton minHeight="32px" onClick={() => setSettingPassword(true)}>
+      <Box marginTop={{ base: '12px', sm: open ? '16px' : '-24px' }}>
+        {open === 'email' && <NewEmail onDone={close} />}
+        {open === 'password' && <NewPassword onDone={close} />}
+        {!open && (
+          <TextButton minHeight="32px" onClick={() => setOpen('password')}>
             Set a new password
           </TextButton>
         )}
@@ -62,26 +63,5 @@ function NameField({ name }: { name: string }) {
       error={refusal || (failure && `Not kept. ${failure}`)}
       end={<Kept kept={kept && typed === null} />}
     />
-  );
-}
-
-function Email({ me }: { me: MeResponse }) {
-  return (
-    <Box minWidth={0}>
-      <FieldLabel as="div">E-mail</FieldLabel>
-      <Box
-        display="flex"
-        alignItems="center"
-        minHeight="46px"
-        paddingX="3px"
-        borderBottom="2px solid"
-        borderColor="rule"
-        fontWeight={600}
-        overflowWrap="anywhere"
-      >
-        {me.email}
-      </Box>
-      <VerifiedWords verified={me.emailVerified} />
-    </Box>
   );
 }
