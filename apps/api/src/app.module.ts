@@ -3,6 +3,7 @@ import { APP_FILTER, APP_INTERCEPTOR, APP_PIPE } from '@nestjs/core';
 import { ZodSerializerInterceptor, ZodValidationPipe } from 'nestjs-zod';
 import { AddedFilesModule } from './added-files/added-files.module';
 import { AccessModule } from './access/access.module';
+import { AdminModule } from './admin/admin.module';
 import { AuthModule } from './auth/auth.module';
 import { ComparisonsModule } from './comparisons/comparisons.module';
 import { Config } from './config/config';
@@ -36,6 +37,7 @@ export class AppModule {
         loggerModule,
         databaseModule,
         AccessModule,
+        AdminModule,
         AuthModule,
         RoomsModule,
         UsersModule,

@@ -17,6 +17,11 @@ import { StoreRepair } from './housekeeping/store-repair';
 import { TakePurge } from './housekeeping/take-purge';
 import { loggerModule } from './logging/logger.module';
 import { AccountMailWriter } from './mail/account-mail-writer';
+import { ChosenMail } from './mail/chosen-mail';
+import { DigestMailWriter } from './mail/digest-mail-writer';
+import { Digests } from './mail/digests';
+import { InvitationMailWriter } from './mail/invitation-mail-writer';
+import { MailQueue } from './mail/mail-queue';
 import { MailWorker } from './mail/mail-worker';
 import { MailWriter } from './mail/mail-writer';
 import { Mailer } from './mail/mailer';
@@ -65,6 +70,11 @@ export class WorkerModule {
         ExportClaims,
         ExportRuns,
         ExportWorker,
+        ChosenMail,
+        DigestMailWriter,
+        InvitationMailWriter,
+        MailQueue,
+        Digests,
         AccountMailWriter,
         MailWriter,
         MailWorker,

@@ -80,7 +80,7 @@ describe('an account', () => {
   describe('another address', () => {
     const ask = (person: Person, email: string, password = rightPassword) =>
       person.post(paths.changeEmail, { email, password });
-    const fresh = () => `new-${Math.random().toString(36).slice(2)}@Example.org`;
+    const fresh = () => `New-${Math.random().toString(36).slice(2)}@example.org`;
 
     it('is the account’s once the mail to it was opened; the old one is told at once', async () => {
       const juno = await settled();

@@ -79,7 +79,7 @@ describe('everything of an account', () => {
     });
   }
   const downloaded = async (browser: Browser, { id }: ExportResponse) => {
-    const answer = await browser.get(paths.exportFile(id)).buffer(true).expect(200);
+    const answer = await browser.get(paths.exportFile(id)).responseType('blob').expect(200);
     return {
       files: await unzipped(answer.body as Buffer),
       headers: answer.headers as Record<string, string>,

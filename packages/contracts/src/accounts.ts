@@ -27,6 +27,8 @@ export const joinRequest = z.object({
   name: personName,
   email,
   password,
+  /** From the mail of an invitation, where joining needs one. */
+  invitation: z.string().max(600).optional(),
 });
 export type JoinRequest = z.infer<typeof joinRequest>;
 

@@ -9,5 +9,6 @@ import { AddedFilesService } from './added-files.service';
   imports: [QueueModule, StorageModule],
   controllers: [AddedFilesController],
   providers: [AddedFileQueue, AddedFilesService],
+  exports: [AddedFilesService],
 })
 export class AddedFilesModule {}

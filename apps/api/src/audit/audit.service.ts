@@ -22,4 +22,10 @@ export class AuditService {
       address: address ?? null,
     });
   }
+
+  /** Written at once, where nothing else is. */
+  async write(happening: Happening): Promise<void> {
+    this.record(happening);
+    await this.em.flush();
+  }
 }

@@ -4,6 +4,7 @@ import { AuditModule } from '../audit/audit.module';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
 import { MailModule } from '../mail/mail.module';
+import { SettingsModule } from '../settings/settings.module';
 import { ThrottleModule } from '../throttle/throttle.module';
 import { TokensModule } from '../tokens/tokens.module';
 import { AccountLinksController } from './account-links.controller';
@@ -29,7 +30,7 @@ const jwt = JwtModule.registerAsync({
 });
 
 @Module({
-  imports: [jwt, AuditModule, MailModule, ThrottleModule, TokensModule],
+  imports: [jwt, AuditModule, MailModule, SettingsModule, ThrottleModule, TokensModule],
   controllers: [AuthController, AccountLinksController, EmailAddressController, PhoneLinksController],
   providers: [
     AuthService,

@@ -6,9 +6,11 @@ import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
 import { AppError } from '../errors/app-error';
 import { MailQueue } from '../mail/mail-queue';
+import { InstallationService } from '../settings/installation.service';
 import { ThrottleService } from '../throttle/throttle.service';
 import { isClosed } from '../users/closed-account';
 import { User } from '../users/entities/user.entity';
+import { isInvited } from './invitation-token';
 import { PasswordsService } from './passwords.service';
 
 @Injectable()
@@ -19,6 +21,7 @@ export class AuthService {
     private readonly throttle: ThrottleService,
     private readonly audit: AuditService,
     private readonly mails: MailQueue,
+    private readonly installation: InstallationService,
     @Inject(CONFIG) private readonly config: Config,
   ) {}
 
@@ -28,6 +31,7 @@ export class AuthService {
     await this.throttle.count({ key: 'join', address, limit: joinPerAddress, windowS: 3_600 });
     await this.throttle.count({ key: mailsKey, address, limit: mailsPerAddress, windowS: 3_600 });
     const { name, email, password } = request;
+    await this.checkInvited(request);
     const passwordHash = await this.passwords.hash(password);
     try {
       return await this.em.transactional(async (em) => {
@@ -41,6 +45,11 @@ export class AuthService {
       if (error instanceof UniqueConstraintViolationException) throw emailTaken();
       throw error;
     }
+  }
+
+  private async checkInvited(request: JoinRequest): Promise<void> {
+    const { signUp } = await this.installation.get();
+    if (signUp === 'invited' && !isInvited(this.config.jwtSecret, request)) throw notInvited();
   }
 
   async signIn(request: SignInRequest, address: string): Promise<User> {
@@ -64,6 +73,12 @@ export class AuthService {
 
 /** Counts the mails to others that one address of the net asks for, whatever they are about. */
 export const mailsKey = 'mails';
+
+const notInvited = () =>
+  new AppError(
+    'forbidden',
+    'Here one joins by invitation: open the link of the mail, and join with the address it came to.',
+  );
 
 export const emailTaken = () =>
   new AppError('email-taken', 'This e-mail address has an account already. Sign in instead.', {

@@ -2,6 +2,7 @@ import { AddedFile } from '../added-files/entities/added-file.entity';
 import { AuditEvent } from '../audit/entities/audit-event.entity';
 import { Session } from '../auth/entities/session.entity';
 import { Export } from '../exports/entities/export.entity';
+import { MailRefusal } from '../mail/entities/mail-refusal.entity';
 import { Measurement } from '../measuring/entities/measurement.entity';
 import { Photo } from '../photos/entities/photo.entity';
 import { PairSpectrum } from '../reports/entities/pair-spectrum.entity';
@@ -44,4 +45,5 @@ export const entities = [
   Photo,
   Setup,
   Export,
+  MailRefusal,
 ];

@@ -31,6 +31,7 @@ export const leftOutTables: Readonly<Record<string, string>> = {
   measurement: 'is how a report came about; reports are whole',
   report: 'is report.json beside each take',
   pair_spectrum: 'is told by the report',
+  mail_refusal: 'is of addresses without an account',
   setting: 'is the installation’s',
   throttle: 'only counts tries',
 };

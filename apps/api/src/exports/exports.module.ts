@@ -10,5 +10,6 @@ import { ExportsService } from './exports.service';
   imports: [AuditModule, QueueModule, StorageModule],
   controllers: [ExportsController],
   providers: [ExportsService, ExportQueue],
+  exports: [ExportQueue],
 })
 export class ExportsModule {}

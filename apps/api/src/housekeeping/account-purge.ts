@@ -70,6 +70,7 @@ export class AccountPurge {
       const takes = await em.find(Take, { owner: ownerId }, { fields: ['id'] });
       await em.nativeDelete(Setting, { key: 'sample-take', value: { $in: takes.map(({ id }) => id) } });
       await em.nativeDelete(AuditEvent, { userId: ownerId });
+      await em.nativeUpdate(AuditEvent, { subjectId: ownerId }, { subjectId: null });
       await em.execute('delete from throttle where key like ?', [`%${ownerId}%`]);
       await em.execute('delete from pgboss.job where data::text like ?', [`%${ownerId}%`]);
       await em.nativeDelete(User, { id: ownerId });

@@ -10,4 +10,8 @@ export type MailJob =
   | { kind: 'new-address'; userId: string; email: string }
   /** To the address as it is: that another is asked for. */
   | { kind: 'address-notice'; userId: string; email: string; newEmail: string }
-  | { kind: 'deletion'; userId: string };
+  | { kind: 'deletion'; userId: string }
+  /** To an address that has no account yet: that it may join. */
+  | { kind: 'join-invitation'; email: string; fromUserId: string }
+  /** What happened in the week before this moment. */
+  | { kind: 'digest'; userId: string; until: string };

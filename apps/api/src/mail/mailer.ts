@@ -17,12 +17,16 @@ export class Mailer implements OnApplicationShutdown {
   }
 
   /** @throws what the mail server refuses, or that it doesn't answer */
-  async send(to: string, { subject, text, html }: MailContent): Promise<void> {
+  async send(
+    to: string,
+    { subject, text, html }: MailContent,
+    headers: Record<string, string> = {},
+  ): Promise<void> {
     if (!this.transport) {
       this.logger.warn(`Not sent, because SMTP_URL is not set: ${subject}`);
       return;
     }
-    await this.transport.sendMail({ from: this.from, to, subject, text, html });
+    await this.transport.sendMail({ from: this.from, to, subject, text, html, headers });
   }
 
   onApplicationShutdown(): void {

@@ -16,6 +16,7 @@ import { Take } from './entities/take.entity';
 import { findUsedSetup } from './used-setup';
 import { CheckedFile, checkedFiles } from './upload/checked-files';
 import { TakeUpload } from './upload/take-uploads.service';
+import { UploadQuota } from './upload/upload-quota';
 
 interface StoredFile extends CheckedFile {
   id: string;
@@ -40,6 +41,7 @@ export class TakeCreationService {
     private readonly em: EntityManager,
     private readonly objects: ObjectStoreService,
     private readonly measurements: MeasurementsService,
+    private readonly quota: UploadQuota,
   ) {}
 
   async create(viewer: Viewer, { request, files }: TakeUpload): Promise<CreatedTake> {
@@ -47,6 +49,10 @@ export class TakeCreationService {
     if (earlier) return { take: earlier, isNew: false };
     await findFollowed(this.em, viewer, request);
     await findUsedSetup(this.em, viewer.user.id, request.setupId);
+    await this.quota.check(
+      viewer.user,
+      files.reduce((sum, { bytes }) => sum + bytes, 0),
+    );
     const checked = await checkedFiles(files, request.tracks);
     const takeId = v7();
     const stored = checked.map((file) => stamped(file, takeId));

@@ -19,7 +19,8 @@ import { TakeCreationService } from './take-creation.service';
 import { TakeListsService } from './take-lists.service';
 import { TakesService } from './takes.service';
 import { ApiTakeUpload } from './upload/api-take-upload.decorator';
-import { TakeUploadsService } from './upload/take-uploads.service';
+import { TakeUploadsService, textBytes } from './upload/take-uploads.service';
+import { UploadQuota } from './upload/upload-quota';
 
 @ApiTags('takes')
 @Controller('api/takes')
@@ -30,6 +31,7 @@ export class TakesController {
     private readonly files: SameFilesService,
     private readonly creation: TakeCreationService,
     private readonly uploads: TakeUploadsService,
+    private readonly quota: UploadQuota,
   ) {}
 
   @Get()
@@ -48,6 +50,8 @@ export class TakesController {
     @Req() request: Request,
     @Res({ passthrough: true }) response: Response,
   ) {
+    // Where the length is told, what has no room is refused before it is sent.
+    await this.quota.check(viewer.user, Number(request.get('Content-Length') ?? 0) - textBytes);
     const created = await this.uploads.receive(request, response, (upload) =>
       this.creation.create(viewer, upload),
     );

@@ -44,6 +44,10 @@ export const router = createBrowserRouter([
         lazy: async () => ({ Component: (await import('../pages/NewAddressPage')).NewAddressPage }),
       },
       {
+        path: '/unsubscribe/:token',
+        lazy: async () => ({ Component: (await import('../pages/UnsubscribePage')).UnsubscribePage }),
+      },
+      {
         path: '/verify/:token',
         lazy: async () => ({ Component: (await import('../pages/VerifyPage')).VerifyPage }),
       },

@@ -1,6 +1,6 @@
 import { defineEntity, InferEntity, p } from '@mikro-orm/core';
 
-export const settingKeys = ['sample-take'] as const;
+export const settingKeys = ['sample-take', 'account-bytes', 'sign-up'] as const;
 export type SettingKey = (typeof settingKeys)[number];
 
 /** What whoever runs this installation decides, one row a decision. */

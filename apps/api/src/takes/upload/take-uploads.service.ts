@@ -17,7 +17,7 @@ export interface TakeUpload {
 }
 
 /** Room for the text fields and the boundaries of a multipart body. */
-const textBytes = 256 * 1024;
+export const textBytes = 256 * 1024;
 
 /** Receives an upload into scratch, hands it on, and removes the scratch whatever happens. */
 @Injectable()
