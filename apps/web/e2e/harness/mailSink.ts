@@ -7,7 +7,7 @@ interface SunkMail {
 }
 
 /** Waits until a mail to somebody is there whose text holds a link of this kind; gives back the newest such link. */
-export async function linkFromMail(email: string, path: 'verify' | 'reset'): Promise<string> {
+export async function linkFromMail(email: string, path: 'verify' | 'reset' | 'new-address'): Promise<string> {
   const { mailSinkUrl, publicUrl } = browserSettings();
   const link = new RegExp(`${publicUrl}/${path}/\\S+`);
   const newest = async () => {

@@ -101,6 +101,10 @@ export const router = createBrowserRouter([
             }),
           },
           {
+            path: '/admin',
+            lazy: async () => ({ Component: (await import('../pages/AdminPage')).AdminPage }),
+          },
+          {
             path: '/settings',
             lazy: async () => ({ Component: (await import('../pages/SettingsPage')).SettingsPage }),
           },

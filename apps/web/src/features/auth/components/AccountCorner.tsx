@@ -15,7 +15,7 @@ export function AccountCorner() {
   const { me } = useMe();
   const { pathname } = useLocation();
   if (me === undefined) return null;
-  if (me) return <AccountList name={me.name} readOnly={me.readOnly} />;
+  if (me) return <AccountList name={me.name} readOnly={me.readOnly} isAdmin={me.roles.includes('admin')} />;
   if (pathname === '/sign-in')
     return (
       <>
@@ -41,8 +41,8 @@ export function AccountCorner() {
   );
 }
 
-function AccountList({ name, readOnly }: { name: string; readOnly: boolean }) {
-  const here = useLocation().pathname === '/settings';
+function AccountList({ name, readOnly, isAdmin }: { name: string; readOnly: boolean; isAdmin: boolean }) {
+  const here = ['/settings', '/admin'].includes(useLocation().pathname);
   const [open, setOpen] = useState(false);
   const box = useRef<HTMLDivElement>(null);
   useCloseOnLeave(open, box, () => setOpen(false));
@@ -61,12 +61,12 @@ function AccountList({ name, readOnly }: { name: string; readOnly: boolean }) {
         {name}
       </chakra.button>
       {here && <Swell depthPx={5} linePx={1.5} />}
-      {open && <OpenList canSet={!readOnly} onDone={() => setOpen(false)} />}
+      {open && <OpenList canSet={!readOnly} isAdmin={isAdmin && !readOnly} onDone={() => setOpen(false)} />}
     </Box>
   );
 }
 
-function OpenList({ canSet, onDone }: { canSet: boolean; onDone: () => void }) {
+function OpenList({ canSet, isAdmin, onDone }: { canSet: boolean; isAdmin: boolean; onDone: () => void }) {
   const { signOut } = useAuthActions();
   const navigate = useNavigate();
   const [mode, setMode] = useState(storedColorMode);
@@ -126,6 +126,13 @@ function OpenList({ canSet, onDone }: { canSet: boolean; onDone: () => void }) {
         <Box marginBottom="8px">
           <TextLink to="/settings" fontWeight={600} onClick={onDone}>
             Settings
+          </TextLink>
+        </Box>
+      )}
+      {isAdmin && (
+        <Box marginBottom="8px">
+          <TextLink to="/admin" fontWeight={600} onClick={onDone}>
+            Admin
           </TextLink>
         </Box>
       )}
