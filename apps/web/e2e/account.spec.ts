@@ -12,7 +12,7 @@ test('a newcomer records, takes everything along in one archive, changes the add
 }) => {
   const { email, password } = await joinAsNewcomer(page, 'Tove');
   await page.goto('/takes/new');
-  await uploadTake(page, 'good');
+  await uploadTake(page, 'hot-kick-opposite-overhead');
   await waitForSheet(page);
   await page.goto('/settings');
   await expect(page.getByText('this one, now')).toBeVisible();
@@ -31,7 +31,7 @@ test('a newcomer records, takes everything along in one archive, changes the add
   const recordings = names.filter((name) => name.endsWith('.wav'));
   expect(recordings.map((name) => name.split('/').at(-1)).sort()).toEqual(['kick in.wav', 'oh.wav']);
   expect(names.some((name) => name.endsWith('/report.json'))).toBe(true);
-  const { kick } = takeFiles('good');
+  const { kick } = takeFiles('hot-kick-opposite-overhead');
   expect(archive.includes(Buffer.from(kick))).toBe(true);
 
   await page.getByRole('button', { name: 'change the e-mail address' }).click();
