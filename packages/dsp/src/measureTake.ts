@@ -66,7 +66,9 @@ export async function measureTake({
   const kickHits = kickHitsOfTake(readings, { kick, others, tracks: tracks.length });
   const hits = listHits(kickHits, streamed.overheadHits, { sampleRateHz, lateSamples });
   const overheadFacts =
-    others.length > 0 ? awaited((beside ?? here).overhead({ hits, place: others[0] })) : null;
+    others.length > 0
+      ? awaited((beside ?? here).overhead({ hits: hits.map(withoutFigures), place: others[0] }))
+      : null;
   const pairs = readings.map((reading, index) => {
     const facts = pairFacts(reading, hits, { places: { a: kick, b: others[index] }, onStage });
     return index === 0 && lateStart ? notLinedUp(facts, lateStart) : facts;
@@ -126,6 +128,11 @@ async function readHalves(
     return [await elsewhere, own];
   }
   return [await here.pairPart(first, half(0)), await here.pairPart(second, half(1))];
+}
+
+/** What isn't asked for needn't cross a thread. */
+function withoutFigures({ timeS, kind, peaksDbfs }: HitFacts): HitFacts {
+  return { timeS, kind, peaksDbfs };
 }
 
 /** It is awaited later; until then its failure is not unheard of. */

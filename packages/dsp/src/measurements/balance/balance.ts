@@ -2,7 +2,7 @@ import { powerDb } from '../../decibel';
 import type { BalanceFacts, BalanceReason, HitFacts } from '../../facts';
 import type { TrackSource } from '../../trackSource';
 import { evenly } from '../evenly';
-import { filtered } from '../filters/filterChain';
+import { createBandEnergy } from '../filters/bandEnergy';
 import { kWeighting } from '../loudness/kWeighting';
 import { rounded } from '../rounded';
 import { median } from '../statistics';
@@ -89,9 +89,9 @@ async function levelLufs(overhead: TrackSource, { fromS, toS }: AloneHit): Promi
   const from = Math.round(fromS * sampleRateHz);
   const settle = Math.round((SETTLE_MS / 1000) * sampleRateHz);
   const samples = await overhead.read(from - settle, Math.round(toS * sampleRateHz));
-  const weighted = filtered(samples, kWeighting(sampleRateHz));
-  let energy = 0;
-  for (let i = settle; i < weighted.length; i += 1) energy += weighted[i] * weighted[i];
+  const weighted = createBandEnergy(kWeighting(sampleRateHz));
+  weighted.next(samples, 0, settle);
+  const energy = weighted.next(samples, settle, samples.length);
   const level = powerDb(energy / ((LEVEL_MS / 1000) * sampleRateHz));
   return level === null ? null : level + LUFS_OFFSET_DB;
 }

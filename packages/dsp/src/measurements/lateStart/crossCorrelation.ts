@@ -1,37 +1,51 @@
 import FFT from 'fft.js';
-import { powerOfTwoFrom } from '../spectrum/realSpectrum';
+import { createRealTransform, powerOfTwoFrom } from '../spectrum/realSpectrum';
+
+/** Pieces are so many times as long as the lags are far, at least: short enough for a processor's memory, our choice. */
+const PIECE_PER_LAG = 2;
 
 /**
  * How alike two signals are when the second is taken to be `lag` steps later, for lags from −`mostLag` to `mostLag`.
+ *
+ * Piece by piece of the first, against what of the second lies within reach: their spectra add up, so that one transform
+ * back is enough.
  *
  * @param a - of the length of `b`
  * @returns −1 … 1 at index `lag + mostLag`, normalised by the energy of both; zeros where one is silent
  */
 export function crossCorrelation(a: Float64Array, b: Float64Array, mostLag: number): Float64Array {
-  const size = powerOfTwoFrom(a.length + mostLag + 1);
-  const fft = new FFT(size);
-  const spectrum = (samples: Float64Array): Float64Array => {
-    const input = new Float64Array(size);
-    input.set(samples);
-    const output = new Float64Array(2 * size);
-    fft.realTransform(output, input);
-    fft.completeSpectrum(output);
-    return output;
-  };
-  const [first, second] = [spectrum(a), spectrum(b)];
+  const size = powerOfTwoFrom((PIECE_PER_LAG + 2) * mostLag + 1);
+  const transforms = { a: createRealTransform(size), b: createRealTransform(size) };
+  const piece = size - 2 * mostLag;
+  const reached = new Float64Array(size);
   const cross = new Float64Array(2 * size);
-  for (let i = 0; i < cross.length; i += 2) {
-    cross[i] = first[i] * second[i] + first[i + 1] * second[i + 1];
-    cross[i + 1] = first[i] * second[i + 1] - first[i + 1] * second[i];
+  for (let start = 0; start < a.length; start += piece) {
+    reached.fill(0);
+    reached.set(
+      b.subarray(Math.max(0, start - mostLag), start + piece + mostLag),
+      Math.max(0, mostLag - start),
+    );
+    const first = transforms.a.spectrum(a.subarray(start, start + piece));
+    const second = transforms.b.spectrum(reached);
+    for (let k = 0; k <= size / 2; k += 1) {
+      cross[2 * k] += first.re[k] * second.re[k] + first.im[k] * second.im[k];
+      cross[2 * k + 1] += first.re[k] * second.im[k] - first.im[k] * second.re[k];
+    }
+  }
+  for (let k = 1; k < size / 2; k += 1) {
+    cross[2 * (size - k)] = cross[2 * k];
+    cross[2 * (size - k) + 1] = -cross[2 * k + 1];
   }
   const sums = new Float64Array(2 * size);
-  fft.inverseTransform(sums, cross);
+  new FFT(size).inverseTransform(sums, cross);
   const scale = Math.sqrt(energy(a) * energy(b));
   return Float64Array.from({ length: 2 * mostLag + 1 }, (_unused, i) =>
-    scale > 0 ? sums[2 * ((i - mostLag + size) % size)] / scale : 0,
+    scale > 0 ? sums[2 * i] / scale : 0,
   );
 }
 
 function energy(samples: Float64Array): number {
-  return samples.reduce((sum, sample) => sum + sample * sample, 0);
+  let sum = 0;
+  for (let i = 0; i < samples.length; i += 1) sum += samples[i] * samples[i];
+  return sum;
 }

@@ -14,18 +14,21 @@ const FLOOR_BELOW_LOUDEST_DB = 30;
  */
 export function onsetEnvelope(powers: ArrayLike<number>): Float64Array {
   const smooth = movingSum(powers);
-  const loudest = smooth.reduce((most, power) => Math.max(most, power), 0);
+  let loudest = 0;
+  for (let i = 0; i < smooth.length; i += 1) if (smooth[i] > loudest) loudest = smooth[i];
   const envelope = new Float64Array(smooth.length);
   if (loudest === 0) return envelope;
   const floor = loudest * 10 ** (-FLOOR_BELOW_LOUDEST_DB / 10);
-  const levelsDb = smooth.map((power) => 10 * Math.log10(power + floor));
+  const levelsDb = smooth;
+  for (let i = 0; i < smooth.length; i += 1) levelsDb[i] = 10 * Math.log10(smooth[i] + floor);
   let sum = 0;
   for (let i = RISE_HOPS; i < envelope.length; i += 1) {
     envelope[i] = Math.max(0, levelsDb[i] - levelsDb[i - RISE_HOPS]);
     sum += envelope[i];
   }
   const mean = sum / envelope.length;
-  return envelope.map((rise) => rise - mean);
+  for (let i = 0; i < envelope.length; i += 1) envelope[i] -= mean;
+  return envelope;
 }
 
 function movingSum(powers: ArrayLike<number>): Float64Array {

@@ -114,7 +114,9 @@ export function createFlatTops(options: FlatTopsOptions): FlatTops {
 
   return {
     push(block, spans = alone.cut(block)) {
-      for (let span = 0; span < spans.count; span += 1) peak = Math.max(peak, largestOfSpan(spans, span));
+      let most = peak;
+      for (let span = 0; span < spans.count; span += 1) most = Math.max(most, largestOfSpan(spans, span));
+      peak = most;
       const least = Math.max(quietestPeak, peak * likeNearPeak) * (1 - likeWithin);
       let from = 0;
       for (let span = 0; span < spans.count; span += 1) {

@@ -46,8 +46,8 @@ export function createNoiseFloor(options: { readonly sampleRateHz: number }): No
   const frameLength = noiseFrameSamples(options.sampleRateHz);
   const alone = createSpanCutter([everySamples(frameLength)]);
   const frames: Frame[] = [];
-  let sum = 0;
-  let energy = 0;
+  /** Sum and energy of the open frame; an array, since a number that a closure keeps is written to the heap each time. */
+  const open = new Float64Array(2);
   let filled = 0;
   let lowestPower: number | null = null;
   let lowestEnd = 0;
@@ -56,9 +56,10 @@ export function createNoiseFloor(options: { readonly sampleRateHz: number }): No
   let sawSilence = false;
 
   const closeFrame = () => {
-    frames.push({ sum, energy });
+    frames.push({ sum: open[0], energy: open[1] });
     closedFrames += 1;
-    [sum, energy, filled] = [0, 0, 0];
+    open.fill(0);
+    filled = 0;
     if (frames.length > framesInStretch) frames.shift();
     if (frames.length < framesInStretch) return;
     sawStretch = true;
@@ -74,8 +75,8 @@ export function createNoiseFloor(options: { readonly sampleRateHz: number }): No
     push(block, spans = alone.cut(block)) {
       for (let span = 0, from = 0; span < spans.count; from = spans.ends[span], span += 1) {
         filled += spans.ends[span] - from;
-        sum += spans.sums[span];
-        energy += spans.energies[span];
+        open[0] += spans.sums[span];
+        open[1] += spans.energies[span];
         if (filled === frameLength) closeFrame();
       }
     },

@@ -32,15 +32,19 @@ export function createPeakAndPower(options: { readonly sampleRateHz: number }): 
 
   return {
     push(block, spans = alone.cut(block)) {
+      // Locals: a number that a closure keeps is written to the heap each time.
+      let [sumHere, energyHere] = [sum, energy];
       for (let span = 0, from = 0; span < spans.count; from = spans.ends[span], span += 1) {
-        sum += spans.sums[span];
-        energy += spans.energies[span];
+        sumHere += spans.sums[span];
+        energyHere += spans.energies[span];
         const largest = largestOfSpan(spans, span);
         if (largest > peak) {
           peak = largest;
           peakAt = count + firstOfSize(block, from, largest);
         }
       }
+      sum = sumHere;
+      energy = energyHere;
       if (!Number.isFinite(energy)) {
         throw new SignalError('not-finite', 'The track holds a value that is no number.');
       }

@@ -53,17 +53,21 @@ export function createTruePeak(options: { readonly sampleRateHz: number }): True
       }
       joined.set(block, historyLength);
       const samples = joined.subarray(0, length);
+      // Locals: a number that a closure keeps is written to the heap each time.
+      let [most, last] = [peak, before];
       for (let span = 0, from = 0; span < spans.count; from = spans.ends[span], span += 1) {
         const here = largestOfSpan(spans, span);
-        peak = Math.max(peak, here);
+        most = Math.max(most, here);
         const to = spans.ends[span];
-        if (Math.max(before, here) * mostGain > peak) {
+        if (Math.max(last, here) * mostGain > most) {
           const stretch = { start: historyLength + from, end: historyLength + to };
-          peak = largestOf(samples, stretch, { phases, mostGain, atLeast: peak });
+          most = largestOf(samples, stretch, { phases, mostGain, atLeast: most });
         }
         // A short span doesn't hold all the filter remembers.
-        before = to - from < historyLength ? Math.max(before, here) : here;
+        last = to - from < historyLength ? Math.max(last, here) : here;
       }
+      peak = most;
+      before = last;
       joined.copyWithin(0, length - historyLength, length);
     },
     result() {

@@ -20,7 +20,8 @@ export interface SpanHops {
 
 export function createSpanHops({ samplesPerHop, low, body, bright }: SpanHopsOptions): SpanHops {
   const filters = [low, body, bright].filter((filter) => filter !== null);
-  const open = { energies: new Float64Array(filters.length), peak: 0, samples: 0 };
+  const energies = new Float64Array(filters.length);
+  const open = { peak: 0, samples: 0 };
   let rooms = filters.map(() => new Float64Array(0));
   let peaks = new Float64Array(0);
   return {
@@ -30,19 +31,25 @@ export function createSpanHops({ samplesPerHop, low, body, bright }: SpanHopsOpt
         peaks = new Float64Array(spans.count);
         rooms = filters.map(() => new Float64Array(spans.count));
       }
+      // Locals: a number that is kept elsewhere is written to the heap each time.
+      let { peak, samples } = open;
       let count = 0;
       for (let span = 0, from = 0; span < spans.count; from = spans.ends[span], span += 1) {
-        open.samples += spans.ends[span] - from;
-        open.peak = Math.max(open.peak, largestOfSpan(spans, span));
-        for (let f = 0; f < filters.length; f += 1) open.energies[f] += spans.heard[filters[f]][span];
-        if (open.samples < samplesPerHop) continue;
-        for (let f = 0; f < filters.length; f += 1) rooms[f][count] = open.energies[f] / samplesPerHop;
-        peaks[count] = open.peak;
-        open.energies.fill(0);
-        open.peak = 0;
-        open.samples = 0;
+        samples += spans.ends[span] - from;
+        peak = Math.max(peak, largestOfSpan(spans, span));
+        for (let f = 0; f < filters.length; f += 1) energies[f] += spans.heard[filters[f]][span];
+        if (samples < samplesPerHop) continue;
+        for (let f = 0; f < filters.length; f += 1) {
+          rooms[f][count] = energies[f] / samplesPerHop;
+          energies[f] = 0;
+        }
+        peaks[count] = peak;
+        peak = 0;
+        samples = 0;
         count += 1;
       }
+      open.peak = peak;
+      open.samples = samples;
       const band = (filter: number | null): Float64Array =>
         filter === null ? nothing : rooms[filters.indexOf(filter)].subarray(0, count);
       return { low: band(low), peaks: peaks.subarray(0, count), body: band(body), bright: band(bright) };

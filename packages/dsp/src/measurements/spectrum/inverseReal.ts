@@ -1,5 +1,4 @@
-import FFT from 'fft.js';
-import { halfTurn, type RealSpectrum } from './realSpectrum';
+import { tablesFor, type RealSpectrum } from './realSpectrum';
 
 /**
  * A backward transform of fixed size, 1/N scaled, that reuses its tables.
@@ -11,10 +10,9 @@ import { halfTurn, type RealSpectrum } from './realSpectrum';
 export function createInverseReal(size: number): (spectrum: RealSpectrum) => Float64Array {
   // The way of createRealTransform backwards: half the size, even samples as real parts, odd ones as imaginary parts.
   const half = size / 2;
-  const fft = new FFT(half);
+  const { fft, cosines, sines } = tablesFor(size);
   const bins = new Float64Array(size);
   const samples = new Float64Array(size);
-  const { cosines, sines } = halfTurn(size);
   return ({ re, im }) => {
     bins.fill(0);
     const count = Math.min(re.length, half);

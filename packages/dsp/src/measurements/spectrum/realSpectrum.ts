@@ -24,10 +24,9 @@ export interface RealTransform {
 export function createRealTransform(size: number): RealTransform {
   // Even samples as real parts, odd ones as imaginary parts: a transform of half the size, taken apart afterwards.
   const half = size / 2;
-  const fft = new FFT(half);
+  const { fft, cosines, sines } = tablesFor(size);
   const input = new Float64Array(size);
   const output = new Float64Array(size);
-  const { cosines, sines } = halfTurn(size);
   const re = new Float64Array(half + 1);
   const im = new Float64Array(half + 1);
   return {
@@ -58,11 +57,35 @@ export function createRealTransform(size: number): RealTransform {
   };
 }
 
+interface Tables {
+  /** Of half the size. */
+  readonly fft: FFT;
+  readonly cosines: Float64Array;
+  readonly sines: Float64Array;
+}
+
+/** They depend on nothing but the size and take longer to make than a transform, so the last few are kept. */
+const kept = new Map<number, Tables>();
+const largestKept = 2 ** 15;
+
+/** @returns tables for a real signal of `size` points */
+export function tablesFor(size: number): Tables {
+  const known = kept.get(size);
+  if (known) return known;
+  const made = { fft: new FFT(size / 2), ...halfTurn(size) };
+  if (size <= largestKept) kept.set(size, made);
+  return made;
+}
+
 /** @returns cos and sin of 2πk/size, k = 0 … size/2 */
-export function halfTurn(size: number): { readonly cosines: Float64Array; readonly sines: Float64Array } {
+function halfTurn(size: number): { readonly cosines: Float64Array; readonly sines: Float64Array } {
   const turn = (2 * Math.PI) / size;
-  const cosines = new Float64Array(size / 2 + 1).map((_, k) => Math.cos(turn * k));
-  const sines = new Float64Array(size / 2 + 1).map((_, k) => Math.sin(turn * k));
+  const cosines = new Float64Array(size / 2 + 1);
+  const sines = new Float64Array(size / 2 + 1);
+  for (let k = 0; k <= size / 2; k += 1) {
+    cosines[k] = Math.cos(turn * k);
+    sines[k] = Math.sin(turn * k);
+  }
   return { cosines, sines };
 }
 
