@@ -1,4 +1,6 @@
+import { randomNumbers } from '../../testing/randomNumbers';
 import { createInverseReal } from './inverseReal';
+import { lowSpectrum } from './lowSpectrum';
 import { createRealTransform, powerOfTwoFrom } from './realSpectrum';
 
 describe('the transform of a real signal', () => {
@@ -35,6 +37,23 @@ describe('the transform of a real signal', () => {
     createInverseReal(2 * size)(spectrum).forEach((value, i) =>
       expect(2 * value).toBeCloseTo(tone(i / 2), 9),
     );
+  });
+
+  it('is the same in its lowest bins by short transforms, of a signal of any length', () => {
+    const random = randomNumbers(11);
+    for (const [length, size] of [
+      [30_000, 32_768],
+      [32_768, 32_768],
+      [500, 1024],
+    ]) {
+      const samples = Float64Array.from({ length }, random);
+      const whole = createRealTransform(size).spectrum(samples);
+      const { re, im } = lowSpectrum(samples, { size, binCount: 300 });
+      expect(re).toHaveLength(300);
+      // Sums of 32,768 numbers below 1.
+      re.forEach((value, k) => expect(Math.abs(value - whole.re[k])).toBeLessThan(1e-9));
+      im.forEach((value, k) => expect(Math.abs(value - whole.im[k])).toBeLessThan(1e-9));
+    }
   });
 
   it('rounds lengths up to powers of two', () => {
