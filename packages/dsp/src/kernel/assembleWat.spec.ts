@@ -3,10 +3,10 @@ import { kernelInstance, compiledKernel } from './webAssembly';
 
 const run = (text: string, ...operands: number[]): Float64Array => {
   const module = compiledKernel(text);
-  if (!module) throw new Error('It does not compile.');
-  const { functions, memory } = kernelInstance(module, 8);
-  functions['it'](...operands);
-  return new Float64Array(memory);
+  const instance = module && kernelInstance(module, 8);
+  if (!instance) throw new Error('It does not compile.');
+  instance.functions['it'](...operands);
+  return new Float64Array(instance.memory);
 };
 
 describe('the assembler of kernels', () => {

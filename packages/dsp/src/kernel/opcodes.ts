@@ -16,6 +16,7 @@ export const opcodes: Readonly<Record<string, number>> = {
   'i32.ge_u': 0x4f,
   'i32.add': 0x6a,
   'i32.sub': 0x6b,
+  'i32.mul': 0x6c,
   'i32.and': 0x71,
   'i32.shl': 0x74,
   'f32.min': 0x96,

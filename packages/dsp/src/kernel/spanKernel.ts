@@ -55,7 +55,9 @@ export function createSpanKernel(filters: readonly BandFilter[]): SpanKernel | n
   compiled = compiled === undefined ? compiledKernel(spanKernelText) : compiled;
   if (!compiled) return null;
   const pairs = Math.ceil(filters.length / filtersAtOnce);
-  const { functions, memory } = kernelInstance(compiled, places.filters + pairs * filterBytes);
+  const instance = kernelInstance(compiled, places.filters + pairs * filterBytes);
+  if (!instance) return null;
+  const { functions, memory } = instance;
   const samples = new Float32Array(memory, places.samples, mostSamples);
   const spanEnds = new Int32Array(memory, places.ends, mostSpans);
   const extremes = new Float64Array(memory, places.extremes, 4 * mostSpans);

@@ -26,11 +26,15 @@ export function compiledKernel(text: string): object | null {
   }
 }
 
-/** A kernel with a memory of its own. */
-export function kernelInstance(module: object, memoryBytes: number): KernelInstance {
-  const memory = new (door().Memory)({ initial: Math.ceil(memoryBytes / pageBytes) });
-  const { exports } = new (door().Instance)(module, { own: { memory } });
-  return { functions: exports, memory: memory.buffer };
+/** A kernel with a memory of its own. @returns null where no memory is to be had */
+export function kernelInstance(module: object, memoryBytes: number): KernelInstance | null {
+  try {
+    const memory = new (door().Memory)({ initial: Math.ceil(memoryBytes / pageBytes) });
+    const { exports } = new (door().Instance)(module, { own: { memory } });
+    return { functions: exports, memory: memory.buffer };
+  } catch {
+    return null;
+  }
 }
 
 function door(): WebAssemblyDoor {

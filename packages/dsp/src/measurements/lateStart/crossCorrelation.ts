@@ -1,4 +1,4 @@
-import FFT from 'fft.js';
+import { createComplexTransform } from '../../kernel/complexTransform';
 import { createRealTransform, powerOfTwoFrom } from '../spectrum/realSpectrum';
 
 /** Pieces are so many times as long as the lags are far, at least: short enough for a processor's memory, our choice. */
@@ -18,7 +18,9 @@ export function crossCorrelation(a: Float64Array, b: Float64Array, mostLag: numb
   const transforms = { a: createRealTransform(size), b: createRealTransform(size) };
   const piece = size - 2 * mostLag;
   const reached = new Float64Array(size);
-  const cross = new Float64Array(2 * size);
+  const back = createComplexTransform(size);
+  // Its conjugate: forward from there is backward, as the outcome is real.
+  const cross = back.input.fill(0);
   for (let start = 0; start < a.length; start += piece) {
     reached.fill(0);
     reached.set(
@@ -29,18 +31,17 @@ export function crossCorrelation(a: Float64Array, b: Float64Array, mostLag: numb
     const second = transforms.b.spectrum(reached);
     for (let k = 0; k <= size / 2; k += 1) {
       cross[2 * k] += first.re[k] * second.re[k] + first.im[k] * second.im[k];
-      cross[2 * k + 1] += first.re[k] * second.im[k] - first.im[k] * second.re[k];
+      cross[2 * k + 1] += first.im[k] * second.re[k] - first.re[k] * second.im[k];
     }
   }
   for (let k = 1; k < size / 2; k += 1) {
     cross[2 * (size - k)] = cross[2 * k];
     cross[2 * (size - k) + 1] = -cross[2 * k + 1];
   }
-  const sums = new Float64Array(2 * size);
-  new FFT(size).inverseTransform(sums, cross);
+  const sums = back.transform();
   const scale = Math.sqrt(energy(a) * energy(b));
   return Float64Array.from({ length: 2 * mostLag + 1 }, (_unused, i) =>
-    scale > 0 ? sums[2 * i] / scale : 0,
+    scale > 0 ? sums[2 * i] / size / scale : 0,
   );
 }
 

@@ -1,4 +1,5 @@
-import { tablesFor, type RealSpectrum } from './realSpectrum';
+import { createComplexTransform } from '../../kernel/complexTransform';
+import { halfTurn, type RealSpectrum } from './realSpectrum';
 
 /**
  * A backward transform of fixed size, 1/N scaled, that reuses its tables.
@@ -10,10 +11,12 @@ import { tablesFor, type RealSpectrum } from './realSpectrum';
 export function createInverseReal(size: number): (spectrum: RealSpectrum) => Float64Array {
   // The way of createRealTransform backwards: half the size, even samples as real parts, odd ones as imaginary parts.
   const half = size / 2;
-  const { fft, cosines, sines } = tablesFor(size);
-  const bins = new Float64Array(size);
+  // Forward, with real and imaginary parts changed over on both sides, is backward.
+  const complex = createComplexTransform(half);
+  const { cosines, sines } = halfTurn(size);
   const samples = new Float64Array(size);
   return ({ re, im }) => {
+    const bins = complex.input;
     bins.fill(0);
     const count = Math.min(re.length, half);
     if (count > 0) [bins[0], bins[1]] = [re[0], re[0]];
@@ -21,15 +24,18 @@ export function createInverseReal(size: number): (spectrum: RealSpectrum) => Flo
       // Even and odd samples' spectra share a bin and its mirror; here the mirror itself is 0 or adds to what is there.
       const turnedRe = re[k] * cosines[k] - im[k] * sines[k];
       const turnedIm = re[k] * sines[k] + im[k] * cosines[k];
-      bins[2 * k] += re[k] - turnedIm;
-      bins[2 * k + 1] += im[k] + turnedRe;
+      bins[2 * k + 1] += re[k] - turnedIm;
+      bins[2 * k] += im[k] + turnedRe;
       const mirrored = 2 * (half - k);
-      bins[mirrored] += re[k] + turnedIm;
-      bins[mirrored + 1] += turnedRe - im[k];
+      bins[mirrored + 1] += re[k] + turnedIm;
+      bins[mirrored] += turnedRe - im[k];
     }
-    fft.inverseTransform(samples, bins);
+    const output = complex.transform();
     // Both halves of the spectrum were added up, over half as many points.
-    for (let i = 0; i < size; i += 1) samples[i] /= 2;
+    for (let i = 0; i < size; i += 2) {
+      samples[i] = output[i + 1] / size;
+      samples[i + 1] = output[i] / size;
+    }
     return samples;
   };
 }

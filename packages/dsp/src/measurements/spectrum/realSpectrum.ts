@@ -1,4 +1,4 @@
-import FFT from 'fft.js';
+import { createComplexTransform } from '../../kernel/complexTransform';
 
 /** Bins 0 … N/2 of a real signal's spectrum. */
 export interface RealSpectrum {
@@ -24,18 +24,17 @@ export interface RealTransform {
 export function createRealTransform(size: number): RealTransform {
   // Even samples as real parts, odd ones as imaginary parts: a transform of half the size, taken apart afterwards.
   const half = size / 2;
-  const { fft, cosines, sines } = tablesFor(size);
-  const input = new Float64Array(size);
-  const output = new Float64Array(size);
+  const complex = createComplexTransform(half);
+  const { cosines, sines } = halfTurn(size);
   const re = new Float64Array(half + 1);
   const im = new Float64Array(half + 1);
   return {
     size,
     spectrum(samples, binCount = half + 1) {
       const length = Math.min(size, samples.length);
-      input.set(length < samples.length ? samples.subarray(0, length) : samples);
-      input.fill(0, length);
-      fft.transform(output, input);
+      complex.input.set(length < samples.length ? samples.subarray(0, length) : samples);
+      complex.input.fill(0, length);
+      const output = complex.transform();
       // Bins 0 and N/2 stand in the first point together.
       re[0] = output[0] + output[1];
       re[half] = output[0] - output[1];
@@ -57,28 +56,19 @@ export function createRealTransform(size: number): RealTransform {
   };
 }
 
-interface Tables {
-  /** Of half the size. */
-  readonly fft: FFT;
+interface Turns {
   readonly cosines: Float64Array;
   readonly sines: Float64Array;
 }
 
-/** They depend on nothing but the size and take longer to make than a transform, so the last few are kept. */
-const kept = new Map<number, Tables>();
+/** They depend on nothing but the size, and take as long to make as some transforms. */
+const kept = new Map<number, Turns>();
 const largestKept = 2 ** 15;
 
-/** @returns tables for a real signal of `size` points */
-export function tablesFor(size: number): Tables {
+/** @returns cos and sin of 2πk/size, k = 0 … size/2 */
+export function halfTurn(size: number): Turns {
   const known = kept.get(size);
   if (known) return known;
-  const made = { fft: new FFT(size / 2), ...halfTurn(size) };
-  if (size <= largestKept) kept.set(size, made);
-  return made;
-}
-
-/** @returns cos and sin of 2πk/size, k = 0 … size/2 */
-function halfTurn(size: number): { readonly cosines: Float64Array; readonly sines: Float64Array } {
   const turn = (2 * Math.PI) / size;
   const cosines = new Float64Array(size / 2 + 1);
   const sines = new Float64Array(size / 2 + 1);
@@ -86,6 +76,7 @@ function halfTurn(size: number): { readonly cosines: Float64Array; readonly sine
     cosines[k] = Math.cos(turn * k);
     sines[k] = Math.sin(turn * k);
   }
+  if (size <= largestKept) kept.set(size, { cosines, sines });
   return { cosines, sines };
 }
 
