@@ -1,5 +1,10 @@
 import type { PairSpectrum } from '../../facts';
-import { createRealTransform, powerOfTwoFrom, type RealTransform } from '../spectrum/realSpectrum';
+import {
+  createRealTransform,
+  powerOfTwoFrom,
+  type RealSpectrum,
+  type RealTransform,
+} from '../spectrum/realSpectrum';
 
 /** One kick hit in both microphones, and how far its sound may be followed. */
 export interface PairHit {
@@ -93,28 +98,21 @@ export function createPairGatherer<Told>(options: PairGathererOptions<Told>): Pa
       transforms ??= { kick: createRealTransform(size), overhead: createRealTransform(size) };
       const k = transforms.kick.spectrum(windowed(hit.kick, hit), binCount);
       const o = transforms.overhead.spectrum(windowed(hit.overhead, hit), binCount);
-      for (let i = 0; i < binCount; i += 1) {
-        hitBins.skk[i] = k.re[i] ** 2 + k.im[i] ** 2;
-        hitBins.soo[i] = o.re[i] ** 2 + o.im[i] ** 2;
-        hitBins.skoRe[i] = k.re[i] * o.re[i] + k.im[i] * o.im[i];
-        hitBins.skoIm[i] = k.im[i] * o.re[i] - k.re[i] * o.im[i];
-        skk[i] += hitBins.skk[i];
-        soo[i] += hitBins.soo[i];
-        skoRe[i] += hitBins.skoRe[i];
-        skoIm[i] += hitBins.skoIm[i];
-      }
+      multiply(k, o, hitBins);
+      addTo(skk, hitBins.skk);
+      addTo(soo, hitBins.soo);
+      addTo(skoRe, hitBins.skoRe);
+      addTo(skoIm, hitBins.skoIm);
       hitCount += 1;
       return perHit(hitBins);
     },
     sums: () => ({ hitCount, skk, soo, skoRe, skoIm }),
     include(other) {
       hitCount += other.hitCount;
-      for (let i = 0; i < binCount; i += 1) {
-        skk[i] += other.skk[i];
-        soo[i] += other.soo[i];
-        skoRe[i] += other.skoRe[i];
-        skoIm[i] += other.skoIm[i];
-      }
+      addTo(skk, other.skk);
+      addTo(soo, other.soo);
+      addTo(skoRe, other.skoRe);
+      addTo(skoIm, other.skoIm);
     },
     result: () =>
       hitCount === 0
@@ -130,6 +128,25 @@ export function createPairGatherer<Told>(options: PairGathererOptions<Told>): Pa
   };
 }
 
+/** Energy of both and kick × conj(overhead), as far as there is room. */
+function multiply(
+  { re: kickRe, im: kickIm }: RealSpectrum,
+  { re: overheadRe, im: overheadIm }: RealSpectrum,
+  { skk, soo, skoRe, skoIm }: HitBins,
+): void {
+  for (let i = 0; i < skk.length; i += 1) {
+    const [a, b, c, d] = [kickRe[i], kickIm[i], overheadRe[i], overheadIm[i]];
+    skk[i] = a * a + b * b;
+    soo[i] = c * c + d * d;
+    skoRe[i] = a * c + b * d;
+    skoIm[i] = b * c - a * d;
+  }
+}
+
+function addTo(sums: Float64Array, values: Float64Array): void {
+  for (let i = 0; i < sums.length; i += 1) sums[i] += values[i];
+}
+
 /** Σ w² of a whole window: the mean square of a raised-cosine end is 3/8. */
 function windowEnergy(sampleRateHz: number): number {
   const lengthMs = kickWindow.beforeMs + kickWindow.afterMs;
@@ -142,18 +159,19 @@ function createHitWindow(sampleRateHz: number): (samples: Float32Array, hit: Pai
   const count = (ms: number): number => Math.round((ms / 1000) * sampleRateHz);
   const longest = count(kickWindow.beforeMs) + count(kickWindow.afterMs);
   const room = new Float64Array(longest);
-  // Nearly every hit is as long as the window, so that its weights are the same.
+  const fadeIn = count(FADE_IN_MS);
+  // Both microphones have the same window, and so have most hits.
   const weights = { length: -1, values: new Float64Array(longest) };
   const weightsFor = (length: number): Float64Array => {
     if (weights.length === length) return weights.values;
-    const fadeIn = count(FADE_IN_MS);
+    weights.length = length;
     const fadeOut = length * FADE_OUT_SHARE;
+    const { values } = weights;
     for (let i = 0; i < length; i += 1) {
       const nearest = Math.min((i + 0.5) / fadeIn, (length - i - 0.5) / fadeOut);
-      weights.values[i] = nearest < 1 ? 0.5 * (1 - Math.cos(Math.PI * nearest)) : 1;
+      values[i] = nearest < 1 ? 0.5 * (1 - Math.cos(Math.PI * nearest)) : 1;
     }
-    weights.length = length;
-    return weights.values;
+    return values;
   };
   return (samples, { onsetAt, toNext }) => {
     const start = Math.max(0, onsetAt - count(kickWindow.beforeMs));

@@ -13,6 +13,13 @@ const SETTLE_MS = 20;
 /** Stretch to read around a candidate, ms before and after it. */
 export const onsetStretch = { beforeMs: BEFORE_MS + SETTLE_MS + RISE_MS, afterMs: AFTER_MS + RISE_MS };
 
+/** Memory that is used again from hit to hit; what was in it doesn't matter. */
+export interface OnsetRoom {
+  /** At least as many numbers as samples, and one more in the second. */
+  readonly band: Float64Array;
+  readonly energyBefore: Float64Array;
+}
+
 /**
  * Where a hit begins: the place with the greatest rise of energy from one 2 ms span to the next, 150–4000 Hz, from 30 ms
  * before the candidate to 20 ms after.
@@ -23,10 +30,16 @@ export const onsetStretch = { beforeMs: BEFORE_MS + SETTLE_MS + RISE_MS, afterMs
  */
 export function onset(
   samples: Float32Array,
-  { sampleRateHz, candidateAt }: { readonly sampleRateHz: number; readonly candidateAt: number },
+  {
+    sampleRateHz,
+    candidateAt,
+    room,
+  }: { readonly sampleRateHz: number; readonly candidateAt: number; readonly room?: OnsetRoom },
 ): number {
-  const band = filtered(samples, butterworthBand({ sampleRateHz, lowHz: LOW_HZ, highHz: HIGH_HZ }));
-  const energyBefore = new Float64Array(band.length + 1);
+  const sections = butterworthBand({ sampleRateHz, lowHz: LOW_HZ, highHz: HIGH_HZ });
+  const band = filtered(samples, sections, room?.band);
+  const energyBefore = room?.energyBefore ?? new Float64Array(band.length + 1);
+  energyBefore[0] = 0;
   for (let i = 0; i < band.length; i += 1) energyBefore[i + 1] = energyBefore[i] + band[i] * band[i];
   const span = Math.max(1, Math.round((RISE_MS / 1000) * sampleRateHz));
   const first = Math.max(span, candidateAt - Math.round((BEFORE_MS / 1000) * sampleRateHz));

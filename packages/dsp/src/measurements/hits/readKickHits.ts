@@ -1,7 +1,7 @@
 import type { TrackSource } from '../../trackSource';
 import type { KickCandidate } from './kickCandidates';
 import { foot } from './foot';
-import { onset, onsetStretch } from './onset';
+import { onset, onsetStretch, type OnsetRoom } from './onset';
 
 /** A kick hit read from both microphones around its onset. */
 export interface KickHitRead {
@@ -38,6 +38,11 @@ export async function* readKickHits(options: ReadKickHitsOptions): AsyncGenerato
     const length = before + after + samples(onsetStretch.beforeMs) + samples(onsetStretch.afterMs);
     return { kick: new Float32Array(length), overhead: new Float32Array(length) };
   });
+  const aroundLength = samples(onsetStretch.beforeMs) + samples(onsetStretch.afterMs);
+  const onsetRoom: OnsetRoom = {
+    band: new Float64Array(aroundLength),
+    energyBefore: new Float64Array(aroundLength + 1),
+  };
   const startOf = (atSample: number): number => atSample - before - samples(onsetStretch.beforeMs);
   const read = (index: number): Promise<[Float32Array, Float32Array]> => {
     const { atSample } = candidates[index];
@@ -56,7 +61,7 @@ export async function* readKickHits(options: ReadKickHitsOptions): AsyncGenerato
     ahead = index + 1 < candidates.length ? read(index + 1) : null;
     const around = kickStretch.subarray(before, kickStretch.length - after);
     const candidateAt = atSample - start - before;
-    const onsetAt = before + onset(around, { sampleRateHz, candidateAt });
+    const onsetAt = before + onset(around, { sampleRateHz, candidateAt, room: onsetRoom });
     const onsetSample = Math.max(0, start + onsetAt);
     // The onset was looked for behind `before` samples, so `from` is never negative.
     const from = onsetSample - start - before;
