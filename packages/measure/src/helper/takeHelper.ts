@@ -24,6 +24,8 @@ export interface TakeHelper {
 type Answered = (answer: HelperAnswer) => void;
 
 const file = join(__dirname, 'helperThread.js');
+/** Room for young objects: it has few that live, and would otherwise take more the longer a take is. */
+const youngMb = 8;
 let resting: TakeHelper | null = null;
 
 /** Starts one ahead of being asked for, so that it is ready sooner. */
@@ -39,7 +41,7 @@ export function takeHelper(): TakeHelper | null {
 }
 
 function startedHelper(): TakeHelper {
-  const worker = new Worker(file);
+  const worker = new Worker(file, { resourceLimits: { maxYoungGenerationSizeMb: youngMb } });
   const waiting = new Map<number, Answered>();
   let lastId = 0;
   let broken: Error | null = null;
