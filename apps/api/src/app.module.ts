@@ -5,6 +5,7 @@ import { AddedFilesModule } from './added-files/added-files.module';
 import { AccessModule } from './access/access.module';
 import { AdminModule } from './admin/admin.module';
 import { AuthModule } from './auth/auth.module';
+import { ComplaintsModule } from './complaints/complaints.module';
 import { ComparisonsModule } from './comparisons/comparisons.module';
 import { Config } from './config/config';
 import { ConfigModule } from './config/config.module';
@@ -15,6 +16,7 @@ import { ExportsModule } from './exports/exports.module';
 import { HealthModule } from './health/health.module';
 import { loggerModule } from './logging/logger.module';
 import { MeasurementsModule } from './measuring/measurements.module';
+import { NotesModule } from './notes/notes.module';
 import { PhotosModule } from './photos/photos.module';
 import { ProgressModule } from './progress/progress.module';
 import { ReportsModule } from './reports/reports.module';
@@ -51,6 +53,8 @@ export class AppModule {
         SoundModule,
         AddedFilesModule,
         SharesModule,
+        NotesModule,
+        ComplaintsModule,
         TryOutsModule,
         SampleSheetModule,
         ExportsModule,

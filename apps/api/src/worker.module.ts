@@ -24,6 +24,7 @@ import { InvitationMailWriter } from './mail/invitation-mail-writer';
 import { MailQueue } from './mail/mail-queue';
 import { MailWorker } from './mail/mail-worker';
 import { MailWriter } from './mail/mail-writer';
+import { NoteMailWriter } from './mail/note-mail-writer';
 import { Mailer } from './mail/mailer';
 import { MeasurePool } from './measuring/measure-pool';
 import { MeasureQueue } from './measuring/measure-queue';
@@ -76,6 +77,7 @@ export class WorkerModule {
         MailQueue,
         Digests,
         AccountMailWriter,
+        NoteMailWriter,
         MailWriter,
         MailWorker,
         TakePurge,

@@ -33,6 +33,7 @@ describe('the connection that listens', () => {
     notices.listen({
       onMeasurement: (id) => heard.push(id),
       onTakeAdded: () => undefined,
+      onNotes: () => undefined,
       onGap: () => (gaps += 1),
     });
     await notices.onApplicationBootstrap();

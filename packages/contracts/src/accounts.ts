@@ -17,7 +17,7 @@ const password = z
   .min(10, 'A password needs at least 10 characters.')
   .max(200, 'A password has at most 200 characters.');
 
-const personName = text('Write the name others should see.')
+export const personName = text('Write the name others should see.')
   .min(1, 'Write the name others should see.')
   .max(60, 'A name has at most 60 characters.')
   // Names stand in mails to addresses that nobody has shown to be theirs; mail programs make links of such text.

@@ -24,4 +24,4 @@ export const takeAddedEvent = z.object({ takeId: z.uuid(), followsTakeId: z.uuid
 export type TakeAddedEvent = z.infer<typeof takeAddedEvent>;
 
 /** Names of the server-sent events of `GET /api/events`. */
-export const eventNames = { measurement: 'measurement', takeAdded: 'take-added' } as const;
+export const eventNames = { measurement: 'measurement', takeAdded: 'take-added', notes: 'notes' } as const;

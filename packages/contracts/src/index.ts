@@ -7,6 +7,7 @@ export * from './events';
 export * from './exports';
 export * from './health';
 export * from './mailChoices';
+export * from './notes';
 export * from './paths';
 export * from './photos';
 export * from './progress';

@@ -172,6 +172,9 @@ export const takeListItem = z.object({
   /** Low end of the two added as recorded, matched levels, against no help and no harm; dB, at most +3.01. */
   lowEndDb: z.number().nullable(),
   tags: z.array(z.string()),
+  /** Notes on its sheet, and those of them that others wrote since the player looked last. */
+  notes: z.int().nonnegative(),
+  newNotes: z.int().nonnegative(),
   /** Set for takes that were deleted and can still be brought back; they go for good after 30 days. */
   deletedAt: z.iso.datetime().nullable(),
 });

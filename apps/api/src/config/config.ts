@@ -40,6 +40,11 @@ const environment = z.object({
   /** Tries of a link's passphrase from one address in a quarter of an hour, and from all in a day: common practice, no source. */
   PASSPHRASE_LIMIT_PER_ADDRESS: count.default(10),
   PASSPHRASE_LIMIT_PER_LINK: count.default(500),
+  /** Notes in an hour of one account and through one link, and in a quarter of an hour of one guest's address; common practice, no source. */
+  NOTE_LIMIT_PER_ACCOUNT: count.default(120),
+  GUEST_NOTE_LIMIT_PER_LINK: count.default(60),
+  GUEST_NOTE_LIMIT_PER_ADDRESS: count.default(10),
+  COMPLAINT_LIMIT_PER_ADDRESS: count.default(10),
   /** Mails and phone links in an hour for one account, mails asked for by one address; common practice, no source. */
   MAIL_LIMIT_PER_ACCOUNT: count.default(5),
   MAIL_LIMIT_PER_ADDRESS: count.default(30),
@@ -94,6 +99,10 @@ function grouped(env: z.output<typeof environment>) {
       openLinkPerAddress: env.OPEN_LINK_LIMIT_PER_ADDRESS,
       passphrasePerAddress: env.PASSPHRASE_LIMIT_PER_ADDRESS,
       passphrasePerLink: env.PASSPHRASE_LIMIT_PER_LINK,
+      notesPerAccount: env.NOTE_LIMIT_PER_ACCOUNT,
+      guestNotesPerLink: env.GUEST_NOTE_LIMIT_PER_LINK,
+      guestNotesPerAddress: env.GUEST_NOTE_LIMIT_PER_ADDRESS,
+      complaintsPerAddress: env.COMPLAINT_LIMIT_PER_ADDRESS,
     },
     mail: {
       smtpUrl: env.SMTP_URL,

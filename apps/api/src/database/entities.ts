@@ -1,9 +1,14 @@
+import { EntitySchema } from '@mikro-orm/core';
 import { AddedFile } from '../added-files/entities/added-file.entity';
 import { AuditEvent } from '../audit/entities/audit-event.entity';
 import { Session } from '../auth/entities/session.entity';
 import { Export } from '../exports/entities/export.entity';
 import { MailRefusal } from '../mail/entities/mail-refusal.entity';
+import { Complaint } from '../complaints/entities/complaint.entity';
 import { Measurement } from '../measuring/entities/measurement.entity';
+import { NextItem } from '../notes/entities/next-item.entity';
+import { Note } from '../notes/entities/note.entity';
+import { ReadMark } from '../notes/entities/read-mark.entity';
 import { Photo } from '../photos/entities/photo.entity';
 import { PairSpectrum } from '../reports/entities/pair-spectrum.entity';
 import { Report } from '../reports/entities/report.entity';
@@ -22,7 +27,8 @@ import { TryOutPlace } from '../tryouts/entities/try-out-place.entity';
 import { TryOut } from '../tryouts/entities/try-out.entity';
 import { User } from '../users/entities/user.entity';
 
-export const entities = [
+/** Named, since the compiler writes no type as long as all of theirs together. */
+export const entities: EntitySchema[] = [
   User,
   Session,
   Room,
@@ -46,4 +52,8 @@ export const entities = [
   Setup,
   Export,
   MailRefusal,
+  Note,
+  NextItem,
+  ReadMark,
+  Complaint,
 ];

@@ -17,6 +17,8 @@ export type TakeAddedNotice = z.infer<typeof takeAddedNotice>;
 export interface NoticeListener {
   onMeasurement(takeId: string): void;
   onTakeAdded(notice: TakeAddedNotice): void;
+  /** A note on the take came, went or changed, or something it asks for was ticked. */
+  onNotes(takeId: string): void;
   /** The connection was away for a while: what happened then wasn't heard. */
   onGap(): void;
 }
@@ -84,7 +86,7 @@ export class DatabaseNotices implements OnApplicationBootstrap, BeforeApplicatio
     this.client = client;
     try {
       await client.connect();
-      await client.query('listen thudline_measurement; listen thudline_take_added');
+      await client.query('listen thudline_measurement; listen thudline_take_added; listen thudline_notes');
     } catch (error) {
       this.close(client);
       throw error;
@@ -113,6 +115,7 @@ export class DatabaseNotices implements OnApplicationBootstrap, BeforeApplicatio
     if (payload === undefined) return;
     for (const listener of this.listeners) {
       if (channel === 'thudline_measurement') listener.onMeasurement(payload);
+      else if (channel === 'thudline_notes') listener.onNotes(payload);
       else listener.onTakeAdded(takeAddedNotice.parse(JSON.parse(payload)));
     }
   }

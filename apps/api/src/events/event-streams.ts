@@ -31,7 +31,12 @@ export class EventStreams implements OnApplicationBootstrap, BeforeApplicationSh
     this.notices.listen({
       onMeasurement: (takeId) => this.tell([takeId]),
       onTakeAdded: (notice) => this.tellOfTake(notice),
-      onGap: () => this.tell([...this.streams].flatMap(({ takeIds }) => [...takeIds])),
+      onNotes: (takeId) => this.tellOfNotes(takeId),
+      onGap: () => {
+        const takeIds = [...this.streams].flatMap((stream) => [...stream.takeIds]);
+        this.tell(takeIds);
+        for (const takeId of new Set(takeIds)) this.tellOfNotes(takeId);
+      },
     });
     this.beating = setInterval(() => void this.beat(), beatMs);
   }
@@ -83,6 +88,11 @@ export class EventStreams implements OnApplicationBootstrap, BeforeApplicationSh
   private tellOfTake({ ownerId, ...event }: TakeAddedNotice): void {
     for (const stream of this.streams)
       if (stream.viewer.userId === ownerId) stream.send(eventNames.takeAdded, event);
+  }
+
+  private tellOfNotes(takeId: string): void {
+    for (const stream of this.streams)
+      if (stream.takeIds.has(takeId)) stream.send(eventNames.notes, { takeId });
   }
 
   private close(stream: EventStream): void {

@@ -20,7 +20,7 @@ export class EventsController {
   @Get()
   @Access.signedIn()
   @ApiProduces('text/event-stream')
-  @ApiOkResponse({ description: 'Server-sent events `measurement` and `take-added`, without end.' })
+  @ApiOkResponse({ description: 'Server-sent events `measurement`, `take-added` and `notes`, without end.' })
   async listen(
     @CurrentViewer() viewer: Viewer,
     @Query() { takes }: EventsDto,

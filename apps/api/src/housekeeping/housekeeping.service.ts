@@ -1,6 +1,7 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { BeforeApplicationShutdown, Injectable, Logger, OnApplicationBootstrap } from '@nestjs/common';
 import { Session } from '../auth/entities/session.entity';
+import { purgeNotes } from '../notes/note-purge';
 import { OneTimeToken } from '../tokens/entities/one-time-token.entity';
 import { Throttle } from '../throttle/entities/throttle.entity';
 import { StoreRepair } from './store-repair';
@@ -44,6 +45,7 @@ export class HousekeepingService implements OnApplicationBootstrap, BeforeApplic
     await em.nativeDelete(Throttle, { windowStart: { $lt: new Date(now.getTime() - dayMs) } });
     await em.nativeDelete(OneTimeToken, { expiresAt: { $lt: new Date(now.getTime() - dayMs) } });
     await em.nativeDelete(Session, { expiresAt: { $lt: new Date(now.getTime() - endedSessionKeptMs) } });
+    await purgeNotes(em, now);
     await this.purge.run(now);
     await this.exports.run(now);
     await this.accounts.run(now);

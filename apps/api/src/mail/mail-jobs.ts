@@ -14,4 +14,9 @@ export type MailJob =
   /** To an address that has no account yet: that it may join. */
   | { kind: 'join-invitation'; email: string; fromUserId: string }
   /** What happened in the week before this moment. */
-  | { kind: 'digest'; userId: string; until: string };
+  | { kind: 'digest'; userId: string; until: string }
+  /** Somebody wrote a note, or answered one; to one of those it is for. */
+  | { kind: 'note'; noteId: string; userId: string }
+  | { kind: 'answer'; noteId: string; userId: string }
+  /** The player ticked what the note asked for, the last at this moment. */
+  | { kind: 'ticked'; noteId: string; doneAt: string };

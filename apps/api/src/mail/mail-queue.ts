@@ -10,8 +10,8 @@ export class MailQueue {
   constructor(private readonly sender: QueueSender) {}
 
   /** Within the transaction of `em`: the mail is sent if and only if the rows are there. */
-  sendWith(em: EntityManager, job: MailJob): Promise<void> {
-    return this.sender.sendWith(em, mailQueue, job);
+  sendWith(em: EntityManager, job: MailJob, options?: { startAfter: number }): Promise<void> {
+    return this.sender.sendWith(em, mailQueue, job, options);
   }
 
   send(job: MailJob): Promise<void> {

@@ -3,6 +3,7 @@ import { AccountMailWriter } from './account-mail-writer';
 import { DigestMailWriter } from './digest-mail-writer';
 import { InvitationMailWriter } from './invitation-mail-writer';
 import { MailJob } from './mail-jobs';
+import { NoteMailWriter } from './note-mail-writer';
 
 /** Turns a job into a mail, or into nothing where there is nobody to write to any more. */
 @Injectable()
@@ -11,11 +12,14 @@ export class MailWriter {
     private readonly accounts: AccountMailWriter,
     private readonly digests: DigestMailWriter,
     private readonly invitations: InvitationMailWriter,
+    private readonly notes: NoteMailWriter,
   ) {}
 
   async write(job: MailJob): Promise<void> {
     if (job.kind === 'digest') return this.digests.write(job);
     if (job.kind === 'join-invitation') return this.invitations.write(job);
+    if (job.kind === 'note' || job.kind === 'answer') return this.notes.writeNote(job);
+    if (job.kind === 'ticked') return this.notes.writeTicked(job);
     return this.accounts.write(job);
   }
 }

@@ -1,11 +1,13 @@
 import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
-import { ListTakesRequest, ListTakesResponse, NamedSetup, UserSettings } from '@thudline/contracts';
+import { ListTakesRequest, ListTakesResponse, NamedSetup } from '@thudline/contracts';
 import { Viewer } from '../access/viewer';
 import { measurementResponseOf } from '../measuring/measurement.mapper';
 import { MeasurementsService } from '../measuring/measurements.service';
+import { noteCounts } from '../notes/note-counts';
 import { noListFigures } from '../reports/reports.mapper';
 import { ReportsService } from '../reports/reports.service';
+import { User } from '../users/entities/user.entity';
 import { settingsOf } from '../users/user-settings';
 import { restorableSince } from './deleted-takes';
 import { Take } from './entities/take.entity';
@@ -25,6 +27,8 @@ const usedTags = `
 const usedSetups = `
   select id, name from setup where owner_id = ? and id in
     (select setup_id from take where owner_id = ? and deleted_at is null) order by lower(name), id`;
+
+const noNotes = { notes: 0, newNotes: 0 };
 
 /** A player's takes, as the sentence above the list asks for them. */
 @Injectable()
@@ -50,8 +54,8 @@ export class TakeListsService {
     const last = page.at(-1);
     return {
       items: await this.items(
+        user,
         page.map(({ id }) => id),
-        settings,
       ),
       nextCursor: rows.length > request.limit && last ? cursorText(last) : null,
       total: fitting?.total ?? 0,
@@ -66,13 +70,14 @@ export class TakeListsService {
     return this.em.getConnection().execute<Row[]>(text, values);
   }
 
-  private async items(takeIds: string[], settings: UserSettings): Promise<ListTakesResponse['items']> {
+  private async items(user: User, takeIds: string[]): Promise<ListTakesResponse['items']> {
     const takes = await this.em.find(Take, { id: { $in: takeIds } });
-    const [measurements, reported] = await Promise.all([
+    const [measurements, notes, reported] = await Promise.all([
       this.measurements.latestOf(takeIds),
+      noteCounts(this.em, user.id, takeIds),
       this.reports.listFigures(
         takes.flatMap((take) => take.currentReportId ?? []),
-        settings,
+        settingsOf(user),
       ),
     ]);
     const byId = new Map(takes.map((take) => [take.id, take]));
@@ -87,6 +92,7 @@ export class TakeListsService {
         measurement: measurementResponseOf(measurement),
         ...(reported.get(take.currentReportId ?? '') ?? noListFigures),
         tags: take.tags,
+        ...(notes.get(id) ?? noNotes),
         deletedAt: take.deletedAt?.toISOString() ?? null,
       };
     });

@@ -1,6 +1,13 @@
 import { get, IncomingMessage } from 'node:http';
 import { AddressInfo } from 'node:net';
-import { eventNames, measurementEvent, MeasurementEvent, paths, TakeAddedEvent } from '@thudline/contracts';
+import {
+  eventNames,
+  measurementEvent,
+  MeasurementEvent,
+  NotesEvent,
+  paths,
+  TakeAddedEvent,
+} from '@thudline/contracts';
 import { cookieOf } from './raw-upload';
 import { Person } from './person';
 import { TestApp } from './test-app';
@@ -11,6 +18,8 @@ export interface EventListener {
   headers: IncomingMessage['headers'];
   measurements(takeId: string): MeasurementEvent[];
   added(): TakeAddedEvent[];
+  /** Ids of the takes whose notes changed, in order. */
+  notes(): string[];
   isOver(): boolean;
   close(): void;
 }
@@ -48,6 +57,7 @@ export async function listenAs(
         .map((event) => measurementEvent.parse(event))
         .filter((event) => event.takeId === takeId),
     added: () => told(eventNames.takeAdded) as TakeAddedEvent[],
+    notes: () => (told(eventNames.notes) as NotesEvent[]).map(({ takeId }) => takeId),
     isOver: () => isOver,
     close: () => response.destroy(),
   };

@@ -17,6 +17,8 @@ export const sampleListItem = (overrides: Partial<TakeListItem> = {}): TakeListI
   overheadClipped: false,
   lowEndDb: -0.7,
   tags: [],
+  notes: 0,
+  newNotes: 0,
   deletedAt: null,
   ...overrides,
 });

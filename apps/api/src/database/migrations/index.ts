@@ -15,6 +15,7 @@ import { Migration20261201135100_addedFiles } from './20261201135100-added-files
 import { Migration20261201152212_sharesOfMore } from './20261201152212-shares-of-more';
 import { Migration20261201153500_settingsOfAnAccount } from './20261201153500-settings-of-an-account';
 import { Migration20261201160500_mailRefusals } from './20261201160500-mail-refusals';
+import { Migration20261201161841_notes } from './20261201161841-notes';
 
 /** In order; a new migration is added at the end and never changed once merged. */
 export const migrations = [
@@ -35,4 +36,5 @@ export const migrations = [
   { name: '20261201152212-shares-of-more', class: Migration20261201152212_sharesOfMore },
   { name: '20261201153500-settings-of-an-account', class: Migration20261201153500_settingsOfAnAccount },
   { name: '20261201160500-mail-refusals', class: Migration20261201160500_mailRefusals },
+  { name: '20261201161841-notes', class: Migration20261201161841_notes },
 ];
