@@ -5,6 +5,7 @@ import { fakeServer, json, refusal, type FakeRoutes } from '../testing/fakeServe
 import { renderPage } from '../testing/renderPage';
 import { measurement, sampleReport, sampleTake, takeId } from '../testing/sampleData';
 import { sampleList, sampleListItem } from '../testing/sampleList';
+import { noteId, sampleNotes, sampleThread } from '../testing/sampleNotes';
 import { servedSheet } from '../testing/sampleSheet';
 import { BigPrintPage } from './BigPrintPage';
 
@@ -49,6 +50,27 @@ describe('Big print', () => {
   it('waits without jumping', () => {
     open({ [`GET ${paths.take(takeId)}`]: () => new Promise(() => undefined) });
     expect(screen.getByRole('status', { name: 'Loading' })).toBeInTheDocument();
+  });
+
+  it('shows what notes ask for below that, and ticks it', async () => {
+    const item = { id: noteId(50), text: 'Play eight bars again', doneAt: null, isNews: false };
+    const { server } = open({
+      [`GET ${paths.notes(takeId)}`]: json(sampleNotes([sampleThread({ nextItems: [item] })])),
+      [`PATCH ${paths.nextItem(takeId, item.id)}`]: json({ ...item, doneAt: '2026-12-03T10:00:00.000Z' }),
+    });
+    expect(await screen.findByRole('heading', { name: 'Play eight bars again' })).toBeInTheDocument();
+    expect(screen.getByText('Oda asks for this.')).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Play eight bars again: done' }));
+    expect(
+      await screen.findByRole('button', { name: 'Play eight bars again: done', pressed: true }),
+    ).toBeInTheDocument();
+    expect(server.requests).toContainEqual(
+      expect.objectContaining({
+        method: 'PATCH',
+        path: paths.nextItem(takeId, item.id),
+        body: { done: true },
+      }),
+    );
   });
 
   it('shows only what to do', async () => {

@@ -15,6 +15,7 @@ import {
   sampleTake,
   takeId,
 } from '../testing/sampleData';
+import { sampleNotes } from '../testing/sampleNotes';
 import { sampleSetupItem } from '../testing/sampleSetups';
 import { system } from '../theme/system';
 import { SheetPage } from './SheetPage';
@@ -35,6 +36,7 @@ const served: FakeRoutes = {
   [`GET ${paths.excerpt(takeId)}`]: () => sampleExcerpt(),
   [`GET ${paths.peaks(takeId)}`]: () => samplePeaks(),
   [`GET ${paths.addedFiles(takeId)}`]: json({ items: [] }),
+  [`GET ${paths.notes(takeId)}`]: json(sampleNotes()),
 };
 
 function open(routes: FakeRoutes) {

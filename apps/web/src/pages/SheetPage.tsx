@@ -7,6 +7,7 @@ import { useMe } from '../features/auth/hooks/useMe';
 import { BigPrintButton } from '../features/big-print/components/BigPrintButton';
 import { BigPrintLinks } from '../features/big-print/components/BigPrintLinks';
 import { comparePath } from '../features/compare/takeWords';
+import { LazySheetNotes } from '../features/notes/lazySheetNotes';
 import { SetupOfTake } from '../features/setups/components/SetupOfTake';
 import { SendSheet } from '../features/shares/components/SendSheet';
 import { MeasuredSheet } from '../features/sheet/components/MeasuredSheet';
@@ -35,6 +36,7 @@ export function SheetPage() {
       key={take.id}
       {...{ take, report }}
       settings={me.settings}
+      Notes={LazySheetNotes}
       above={<OlderVersion {...{ take, report }} />}
       marginHead={
         <>

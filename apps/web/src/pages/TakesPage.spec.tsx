@@ -48,6 +48,18 @@ describe('the list of takes', () => {
     expect(await screen.findByRole('table', { name: 'Takes' })).toBeInTheDocument();
   });
 
+  it('counts the notes on each sheet, and those that are new', async () => {
+    const takes = [
+      sampleListItem({ number: 14, notes: 3, newNotes: 2 }),
+      sampleListItem({ number: 13, title: 'felt', notes: 1 }),
+      sampleListItem({ number: 12, title: 'no felt' }),
+    ];
+    open({ [`GET ${paths.takes}`]: list(sampleList(takes)) });
+    expect(await screen.findByRole('row', { name: /8 cm inside, again.*2 new notes/ })).toBeInTheDocument();
+    expect(screen.getByRole('row', { name: /felt.* 1 note/ })).toBeInTheDocument();
+    expect(screen.getByRole('row', { name: /no felt/ })).not.toHaveAccessibleName(/\bnotes?\b/);
+  });
+
   it('asks for a first take where there is none', async () => {
     open({ [`GET ${paths.takes}`]: list(sampleList([])) });
     expect(

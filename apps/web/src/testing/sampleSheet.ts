@@ -1,5 +1,6 @@
 import { paths, type TakeResponse } from '@thudline/contracts';
 import { json, type FakeRoutes } from './fakeServer';
+import { sampleNotes } from './sampleNotes';
 import { sampleExcerpt, samplePairSpectrumBytes, sampleReport, sampleTake, takeId } from './sampleData';
 
 /** Everything a sheet asks for, answered for one measured take. */
@@ -10,5 +11,6 @@ export function servedSheet(take: Partial<TakeResponse> = {}): FakeRoutes {
     [`GET ${paths.report(takeId)}`]: json(report),
     [`GET ${paths.pairSpectrum(takeId)}`]: () => ({ bytes: samplePairSpectrumBytes(report.pairSpectrum!) }),
     [`GET ${paths.excerpt(takeId)}`]: () => sampleExcerpt(),
+    [`GET ${paths.notes(takeId)}`]: json(sampleNotes([], { mayNote: false, isOwn: false, needsName: true })),
   };
 }

@@ -5,6 +5,7 @@ import { useNow } from '../../takes/hooks/useNow';
 import { relativeDate } from '../../takes/relativeDate';
 import { isMeasuring } from '../../takes/rowWords';
 import { bigActions } from '../bigActions';
+import { AskedNext } from './AskedNext';
 import { BigPaper } from './BigPaper';
 import { BigTicks } from './BigTicks';
 import { BigWords } from './BigWords';
@@ -38,6 +39,7 @@ export function BigPrint({
           <BigWords key={action.id} {...action} done={take.tickedActions.includes(action.id)} />
         ))}
         {actions.length === 0 && <NothingToDo report={report} />}
+        <AskedNext take={take} />
       </Flex>
     </BigPaper>
   );

@@ -5,6 +5,7 @@ import { Button } from '../../../components/Button';
 import { PageLoading } from '../../../components/PageLoading';
 import { PageMessage } from '../../../components/PageMessage';
 import { useMe } from '../../auth/hooks/useMe';
+import { LazySheetNotes } from '../../notes/lazySheetNotes';
 import { MeasuredSheet } from '../../sheet/components/MeasuredSheet';
 import { useReport } from '../../sheet/hooks/useReport';
 import { useTake } from '../../sheet/hooks/useTake';
@@ -37,6 +38,7 @@ export function ReadOnlySheet({
       report={report}
       settings={me?.settings ?? defaultUserSettings}
       above={above}
+      Notes={LazySheetNotes}
       moreButtons={readOnly.rights.listen && <PhoneSpeakers />}
     />
   );

@@ -1,6 +1,7 @@
 import { Flex } from '@chakra-ui/react';
 import type { ReportResponse } from '@thudline/contracts';
 import { StatusMark } from '../../../components/StatusMark';
+import { NotePlace } from '../notePlaces';
 import { findingsOf } from './sectionWords';
 import { SectionText } from './SheetSection';
 
@@ -12,7 +13,8 @@ export function FilesFindings({ report }: { report: ReportResponse }) {
         <Flex key={finding.sentence} gap="12px" marginTop="16px" alignItems="flex-start">
           <StatusMark status={finding.status} sizePx={24} />
           <SectionText marginTop="-2px">
-            {finding.sentence} {finding.why} {finding.next}
+            {finding.sentence}
+            <NotePlace as="span" name="mark:files" /> {finding.why} {finding.next}
           </SectionText>
         </Flex>
       ))}

@@ -1,6 +1,8 @@
 import { Box, Flex } from '@chakra-ui/react';
 import type { Finding } from '@thudline/contracts';
+import { Fragment } from 'react';
 import { StatusMark } from '../../../components/StatusMark';
+import { NotePlace } from '../notePlaces';
 import { SectionText } from './SheetSection';
 
 /**
@@ -15,21 +17,35 @@ export function Findings({ findings }: { findings: Finding[] }) {
   return (
     <>
       <SectionText>
-        {first.sentence} {first.status !== 'good' && first.why}
+        {first.sentence}
+        <NoteMarks finding={first} /> {first.status !== 'good' && first.why}
       </SectionText>
       {asking.map((finding) => (
         <Flex key={finding.topic} gap="10px" marginTop="8px" alignItems="flex-start">
           <Box paddingTop="3px">
             <StatusMark status={finding.status} sizePx={18} />
           </Box>
-          <Box>{finding.sentence}</Box>
+          <Box>
+            {finding.sentence}
+            <NoteMarks finding={finding} />
+          </Box>
         </Flex>
       ))}
       {good.length > 0 && (
         <Box color="ink.muted" fontSize="small" lineHeight="22px" marginTop="8px">
-          {good.map((finding) => finding.sentence).join(' ')}
+          {good.map((finding) => (
+            <Fragment key={finding.topic}>
+              {finding.sentence}
+              <NoteMarks finding={finding} />{' '}
+            </Fragment>
+          ))}
         </Box>
       )}
     </>
   );
 }
+
+/** Letters of the notes that speak of a finding stand behind its sentence. */
+const NoteMarks = ({ finding: { topic } }: { finding: Finding }) => (
+  <NotePlace as="span" name={`mark:${topic}`} />
+);

@@ -2,6 +2,7 @@ import { Box, Flex, chakra } from '@chakra-ui/react';
 import type { NextAction, TakeResponse } from '@thudline/contracts';
 import { useState } from 'react';
 import { CheckBox } from '../../../components/CheckBox';
+import { NotePlace } from '../notePlaces';
 import { useTakeEdits } from '../hooks/useTakeEdits';
 
 /** "Before the next take": what to do, in order of what matters, to tick as you go. */
@@ -17,10 +18,15 @@ export function NextActions({ take, actions }: { take: TakeResponse; actions: Ne
       setFailure(error instanceof Error ? error.message : 'The tick could not be kept. Try again.');
     }
   };
-  if (actions.length === 0) return null;
   const { change } = take.rights;
   return (
-    <Box as="section" aria-labelledby="next-head" marginTop="18px">
+    <Box
+      as="section"
+      aria-labelledby="next-head"
+      marginTop="18px"
+      // Notes may ask for something where the sheet itself doesn’t.
+      css={{ '&:not(:has(li))': { display: 'none' } }}
+    >
       <Flex justifyContent="space-between" alignItems="baseline" gap="16px" paddingBottom="7px">
         <chakra.h2 id="next-head" fontWeight={600} fontSize="body">
           Before the next take
@@ -44,6 +50,7 @@ export function NextActions({ take, actions }: { take: TakeResponse; actions: Ne
           />
         ))}
       </chakra.ul>
+      <NotePlace as="ul" name="next" />
       {failure && (
         <Box role="alert" color="fix" fontSize="small" marginTop="8px">
           {failure}

@@ -60,6 +60,8 @@ export function SheetRow({ children, note }: { children: ReactNode; note?: React
           marginTop={{ base: '14px', lg: 0 }}
           minWidth={0}
           _print={{ padding: 0, marginTop: 0 }}
+          // Nothing to say, and no note yet in the place kept for them.
+          css={{ '&:not(:has(> :not(:empty)))': { display: 'none' } }}
         >
           {note}
         </Box>

@@ -1,6 +1,7 @@
 import { Flex, chakra } from '@chakra-ui/react';
 import type { FindingStatus } from '@thudline/contracts';
 import { statusColor } from '../../../components/StatusMark';
+import { NotePlace } from '../notePlaces';
 
 export interface ContentsEntry {
   id: string;
@@ -31,6 +32,7 @@ export function SheetContents({ entries }: { entries: ContentsEntry[] }) {
             </chakra.a>
           </li>
         ))}
+        <NotePlace as="li" name="contents" />
       </Flex>
     </chakra.nav>
   );

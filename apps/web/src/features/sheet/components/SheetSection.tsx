@@ -2,6 +2,7 @@ import { Box, chakra } from '@chakra-ui/react';
 import type { FindingStatus } from '@thudline/contracts';
 import type { ReactNode } from 'react';
 import { StatusMark, statusColor } from '../../../components/StatusMark';
+import { NotePlace } from '../notePlaces';
 import { SheetRow } from './RuledSheet';
 
 /** One section: its pen mark left of the head, the head with its word, then sentences, then pictures. */
@@ -27,7 +28,14 @@ export function SheetSection({
       marginTop={{ base: '34px', _print: '22px' }}
       scrollMarginTop="12px"
     >
-      <SheetRow note={note}>
+      <SheetRow
+        note={
+          <>
+            <NotePlace name={`margin:${id}`} />
+            {note}
+          </>
+        }
+      >
         <Box position="relative" display="flex" alignItems="center" gap="10px">
           {status && (
             <Box position={{ base: 'static', lg: 'absolute' }} left="-45px" lineHeight={0}>

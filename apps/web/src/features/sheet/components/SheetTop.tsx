@@ -2,6 +2,7 @@ import { Flex } from '@chakra-ui/react';
 import type { ReportResponse } from '@thudline/contracts';
 import { ButtonLink } from '../../../components/ButtonLink';
 import type { Listening } from '../hooks/useListening';
+import { NotePlace } from '../notePlaces';
 import { FilesFindings } from './FilesFindings';
 import { HearTake } from './HearTake';
 import type { MeasuredSheetProps } from './MeasuredSheet';
@@ -35,6 +36,7 @@ export function SheetTop({ take, report, listening, above, marginHead, moreButto
         <>
           {marginHead}
           <TakeNote take={take} />
+          <NotePlace name="margin:top" />
         </>
       }
     >
@@ -48,6 +50,7 @@ export function SheetTop({ take, report, listening, above, marginHead, moreButto
         {listen && (
           <HearTake listening={listening} durationS={report.durationS} look={change ? 'outline' : 'solid'} />
         )}
+        <NotePlace name="button" />
       </Flex>
       <SheetContents entries={contents(report)} />
       <FilesFindings report={report} />

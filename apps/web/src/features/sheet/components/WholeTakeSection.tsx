@@ -5,6 +5,7 @@ import { TextButton } from '../../../components/Button';
 import { plural } from '../../../lib/format';
 import type { Listening } from '../hooks/useListening';
 import { usePeaks } from '../hooks/usePeaks';
+import { NotePlace } from '../notePlaces';
 import { SectionText, SheetSection } from './SheetSection';
 
 const WholeTake = lazy(async () => ({ default: (await import('../pictures/WholeTake')).WholeTake }));
@@ -32,6 +33,7 @@ export function WholeTakeSection({
           <chakra.span _print={{ display: 'none' }}>Click or drag to choose where it plays. </chakra.span>
         )}
         Each microphone is drawn to its own peak.
+        <NotePlace as="span" name="mark:whole-take" />
       </SectionText>
       {error ? (
         <Box role="alert" minHeight={pictureHeight} paddingTop="14px">

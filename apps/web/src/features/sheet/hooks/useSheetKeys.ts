@@ -19,6 +19,7 @@ export const sheetKeyWords: [keys: string, does: string][] = [
   ['Space', 'play the hit on repeat, and stop it'],
   ['1 2 3 …', 'the choices, from left to right'],
   ['← →', 'the hit before, the hit after'],
+  ['N', 'write a note'],
   ['?', 'this list'],
   ['+ − 0', 'in the pair trace: closer, wider, as it was; Shift with the arrows moves it'],
   ['↑ ↓', 'in a number of the choice: more, less'],

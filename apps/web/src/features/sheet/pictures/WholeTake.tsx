@@ -8,6 +8,7 @@ import { useWidth } from '../../../lib/useWidth';
 import type { Listening } from '../hooks/useListening';
 import type { TakePeaks } from '../hooks/usePeaks';
 import { PlayMark } from '../components/PlayMark';
+import { NotePlace } from '../notePlaces';
 import { WholeTakeMarks } from './WholeTakeMarks';
 
 const outlinePx = 62;
@@ -35,6 +36,7 @@ export function WholeTake({ report, peaks, listening, chosenHit, canListen }: Wh
     <Box ref={ref} position="relative" marginTop="10px">
       <Box ref={outlines} paddingTop="16px" paddingBottom="26px" aria-hidden />
       <WholeTakeMarks {...{ report, chosenHit, widthPx, outlinePx }} />
+      <NotePlace name="pins" />
       {canListen && (
         <Flex gap="16px" alignItems="center" marginTop="8px" _print={{ display: 'none' }}>
           <Button

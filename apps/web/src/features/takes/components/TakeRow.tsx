@@ -46,7 +46,12 @@ export function TakeRow({
       <Box role="cell" gridArea="low" position="relative">
         <LowEndPicture lowEndDb={take.lowEndDb} />
       </Box>
-      <ActionCell>{action}</ActionCell>
+      <ActionCell>
+        <Flex flexDirection="column" alignItems="flex-end">
+          <NotesCount take={take} />
+          {action}
+        </Flex>
+      </ActionCell>
     </RuledRow>
   );
 }
@@ -76,6 +81,23 @@ export function RuledRow({
     >
       {children}
     </Box>
+  );
+}
+
+/** How many notes stand on the sheet; where somebody else wrote since it was read last, how many of them. */
+function NotesCount({ take: { notes, newNotes } }: { take: TakeListItem }) {
+  if (notes === 0) return null;
+  return (
+    <chakra.span
+      fontSize="small"
+      lineHeight="20px"
+      whiteSpace="nowrap"
+      fontWeight={newNotes > 0 ? 600 : 400}
+      marginRight={{ base: 0, lg: '12px' }}
+    >
+      {newNotes > 0 ? `${newNotes} new` : notes}
+      <chakra.span srOnly> {(newNotes || notes) === 1 ? 'note' : 'notes'}</chakra.span>
+    </chakra.span>
   );
 }
 

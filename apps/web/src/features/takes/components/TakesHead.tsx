@@ -27,8 +27,16 @@ export function TakesHead({ target }: { target: Target }) {
         <ColumnName area="says">What it says</ColumnName>
         <LevelAxis target={target} />
         <LowEndAxis />
-        <Box role="columnheader" gridArea={{ lg: 'action' }} srOnly>
-          What can be done
+        <Box
+          role="columnheader"
+          gridArea={{ lg: 'action' }}
+          alignSelf="end"
+          paddingBottom="14px"
+          paddingRight="12px"
+          textAlign="right"
+          srOnly={{ base: true, lg: false }}
+        >
+          Notes<VisuallyHidden>, and what can be done</VisuallyHidden>
         </Box>
       </Box>
     </Box>
