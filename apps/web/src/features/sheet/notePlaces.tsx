@@ -23,7 +23,10 @@ export const NotePlacesProvider = Register.Provider;
 export function useNotePlaces() {
   const [places, setPlaces] = useState<NotePlaces>({});
   const register = useCallback((name: string, element: HTMLElement | null) => {
-    setPlaces(({ [name]: _gone, ...others }) => (element ? { ...others, [name]: element } : others));
+    setPlaces((before) => {
+      const others = Object.entries(before).filter(([other]) => other !== name);
+      return Object.fromEntries(element ? [...others, [name, element]] : others);
+    });
   }, []);
   return { places, register };
 }
