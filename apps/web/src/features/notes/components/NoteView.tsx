@@ -70,7 +70,14 @@ function NoteFoot({ note }: { note: NoteResponse }) {
   };
   return (
     <>
-      <Flex columnGap="12px" wrap="wrap" fontSize="caption" lineHeight="26px" color="ink.muted">
+      <Flex
+        columnGap="12px"
+        wrap="wrap"
+        fontSize="caption"
+        lineHeight="26px"
+        color="ink.muted"
+        _print={{ display: 'none' }}
+      >
         <PlayFromThere pin={note.pin} isAnswer={note.parentId !== null} />
         {list.mayNote && (
           <TextButton onClick={() => setWriting({ what: 'answer', to: note.parentId ?? note.id })}>

@@ -16,20 +16,29 @@ export function NotesSection({ lettered }: { lettered: LetteredThread[] }) {
   if (list.items.length === 0 && !list.mayNote) return null;
   const isGuest = list.mayNote && list.needsName;
   return (
-    <SheetSection id="notes" title={isGuest ? 'Your answer' : 'Notes'}>
-      {list.items.length === 0 && !isGuest && (
-        <Box color="ink.muted" marginTop="4px">
-          Nobody has written on this sheet yet.
-        </Box>
-      )}
-      {others.map((thread) => (
-        <Box key={thread.id} marginTop="14px" paddingLeft="14px" borderLeft="1px solid" borderColor="margin">
-          <ThreadView thread={thread} />
-        </Box>
-      ))}
-      {lettered.length > 0 && <PinnedAbove lettered={lettered} />}
-      {list.mayNote && <NoteBox />}
-    </SheetSection>
+    // What is pinned stands in the margins; on paper a section of nothing else is left out.
+    <Box _print={others.length === 0 ? { display: 'none' } : undefined}>
+      <SheetSection id="notes" title={isGuest ? 'Your answer' : 'Notes'}>
+        {list.items.length === 0 && !isGuest && (
+          <Box color="ink.muted" marginTop="4px">
+            Nobody has written on this sheet yet.
+          </Box>
+        )}
+        {others.map((thread) => (
+          <Box
+            key={thread.id}
+            marginTop="14px"
+            paddingLeft="14px"
+            borderLeft="1px solid"
+            borderColor="margin"
+          >
+            <ThreadView thread={thread} />
+          </Box>
+        ))}
+        {lettered.length > 0 && <PinnedAbove lettered={lettered} />}
+        {list.mayNote && <NoteBox />}
+      </SheetSection>
+    </Box>
   );
 }
 
