@@ -19,6 +19,12 @@ export const exportedTables: Readonly<Record<string, string>> = {
   try_out_place: `try_out_id in (${ownTryOuts})`,
   photo: 'owner_id = :owner',
   share: 'owner_id = :owner',
+  /** The whole conversation on their sheets, and what they wrote on those of others. */
+  note: `deleted_at is null and (author_id = :owner or take_id in (${ownTakes}))`,
+  next_item: `note_id in
+    (select id from note where deleted_at is null and (author_id = :owner or take_id in (${ownTakes})))`,
+  read_mark: 'user_id = :owner',
+  complaint: 'reporter_id = :owner',
   audit_event: 'user_id = :owner',
 };
 

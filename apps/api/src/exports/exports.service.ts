@@ -14,7 +14,9 @@ import { exportResponseOf } from './exports.mapper';
 const holds = `
   select
     (select count(*)::int from take where owner_id = u.id and deleted_at is null) as takes,
-    (select count(*)::int from room where owner_id = u.id) as rooms, 0 as notes,
+    (select count(*)::int from room where owner_id = u.id) as rooms,
+    (select count(*)::int from note n join take t on t.id = n.take_id
+      where t.owner_id = u.id and t.deleted_at is null and n.deleted_at is null) as notes,
     (select coalesce(sum(f.bytes), 0)::float8 from take_file f join take t on t.id = f.take_id
       where t.owner_id = u.id and t.deleted_at is null)
     + (select coalesce(sum(a.bytes), 0)::float8 from added_file a join take t on t.id = a.take_id

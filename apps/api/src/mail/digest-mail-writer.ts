@@ -2,6 +2,7 @@ import { EntityManager } from '@mikro-orm/postgresql';
 import { Inject, Injectable } from '@nestjs/common';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
+import { Note } from '../notes/entities/note.entity';
 import { ReportsService } from '../reports/reports.service';
 import { RoomChange } from '../rooms/entities/room-change.entity';
 import { Share } from '../shares/entities/share.entity';
@@ -36,10 +37,16 @@ export class DigestMailWriter {
 }
 
 async function weekOf(em: EntityManager, user: User, during: { $gte: Date; $lt: Date }): Promise<Week> {
-  const [takes, opened, changes] = await Promise.all([
+  const [takes, opened, changes, notes] = await Promise.all([
     em.find(Take, { owner: user, createdAt: during, deletedAt: null }, { orderBy: { number: 'asc' } }),
     em.count(Share, { owner: user, openedAt: during }),
     em.find(RoomChange, { room: { owner: user }, createdAt: during }, { populate: ['room'] }),
+    em.count(Note, {
+      take: { owner: user, deletedAt: null },
+      $or: [{ author: null }, { author: { $ne: user } }],
+      createdAt: during,
+      deletedAt: null,
+    }),
   ]);
   const reportIds = takes.flatMap(({ currentReportId }) => currentReportId ?? []);
   const figures = await new ReportsService(em).listFigures(reportIds, settingsOf(user));
@@ -49,7 +56,7 @@ async function weekOf(em: EntityManager, user: User, during: { $gte: Date; $lt: 
       title,
       summary: figures.get(currentReportId ?? '')?.summary ?? null,
     })),
-    notes: 0,
+    notes,
     opened,
     changes: changes.map(({ what, room }) => ({ what, room: room.unwrap().name })),
   };
