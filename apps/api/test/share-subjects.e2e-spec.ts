@@ -155,7 +155,7 @@ describe('a link', () => {
       const em = test.em();
       await em.nativeUpdate(Share, { id }, { owner, grantee, tokenHash: null });
       const theirs = new Set([...reads, ...hears]);
-      const own = [paths.takes, paths.tryOuts, paths.rooms, paths.setups, paths.shares, paths.me];
+      const own: string[] = [paths.takes, paths.tryOuts, paths.rooms, paths.setups, paths.shares, paths.me];
       expect((await openTo(oda)).filter((name) => !own.includes(name)).sort()).toEqual([...theirs].sort());
       expect((await oda.get(paths.takes)).body).toMatchObject({ total: 0 });
       const lio = await joined(test, 'Lio');
