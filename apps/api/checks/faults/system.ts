@@ -49,7 +49,7 @@ export async function startSystem(): Promise<System> {
   const storeDir = join(folder, 'objects');
   mkdirSync(storeDir);
   const hasOwnDisk = mountDisk(storeDir);
-  const database = await makePostgres(postgresPort, logPath('postgres'));
+  const database = makePostgres(postgresPort, logPath('postgres'));
   await database.start();
   const url = `http://127.0.0.1:${linePort}`;
   const keys = { S3_ACCESS_KEY: 'check', S3_SECRET_KEY: 'check-check-check', S3_BUCKET: 'thudline' };

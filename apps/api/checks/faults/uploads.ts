@@ -17,7 +17,7 @@ export interface SentTake {
 export interface Uploads {
   sent: readonly SentTake[];
   /** Lets one more take be sent. */
-  allow(): void;
+  allow: () => void;
   /** Waits for what is on its way. */
   end(): Promise<void>;
 }

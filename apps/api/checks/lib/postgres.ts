@@ -17,7 +17,7 @@ export interface PostgresServer {
 }
 
 /** A server of its own with everything on that keeps data safe, in a folder under /tmp; `root` runs it as `postgres`. */
-export async function makePostgres(port: number, logPath: string): Promise<PostgresServer> {
+export function makePostgres(port: number, logPath: string): PostgresServer {
   const bin = newestServer();
   const isRoot = process.getuid?.() === 0;
   const run = (command: string, ...args: string[]) => {

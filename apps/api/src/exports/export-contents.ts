@@ -80,7 +80,7 @@ export class ExportContents {
 
   private async *take(take: Take): AsyncGenerator<ZipEntry> {
     const folder = `takes/${folderName(take)}`;
-    yield jsonEntry(`${folder}/take.json`, await this.takeTold(take));
+    yield jsonEntry(`${folder}/take.json`, this.takeTold(take));
     if (take.currentReportId) yield jsonEntry(`${folder}/report.json`, await this.reportOf(take));
     const files = await this.em.find(TakeFile, { take }, { orderBy: { position: 'asc' } });
     const names = differentNames(files.map(({ name }) => name));
@@ -111,7 +111,7 @@ export class ExportContents {
     return new ReportsService(this.em).get({ takeId: take.id, reader });
   }
 
-  private async takeTold(take: Take) {
+  private takeTold(take: Take) {
     const { number, title, note, recordedAt, tags, tickedActions, doneActions, room, setup } = take;
     return {
       number,
