@@ -43,7 +43,7 @@ export function ModeTable({ resonances, chosen, showsAll, onChoose }: ModeTableP
   );
 }
 
-const columns = '62px minmax(0, 1fr)';
+const columns = '52px minmax(0, 1fr)';
 const row = {
   columnGap: '14px',
   paddingY: '4px',

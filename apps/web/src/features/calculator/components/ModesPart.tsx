@@ -43,7 +43,7 @@ export function ModesPart({ room, known, resonances, plan, lengthUnit }: ModesPa
           </Box>
           <ModeStrip {...{ resonances, chosen }} onChoose={(mode) => setChosenKey(modeKey(mode))} />
           <Grid
-            templateColumns={{ base: 'minmax(0, 1fr)', md: 'minmax(0, 1fr) 208px' }}
+            templateColumns={{ base: 'minmax(0, 1fr)', md: 'minmax(0, 1fr) 228px' }}
             gap={{ base: '14px', md: '16px' }}
             marginTop="10px"
           >

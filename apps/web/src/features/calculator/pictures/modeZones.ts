@@ -25,7 +25,8 @@ export interface ModeZones {
 }
 
 const levels = 4;
-/** Steps in a half wave: fine enough for bands that look like bands, coarse enough to draw at once. */
+/** Fine enough for zones that look like zones, coarse enough to draw at once. */
+const stepsAcross = 64;
 const stepsInAHalfWave = 16;
 
 /** Where a mode is strong and where there is none, seen from above at the floor; x from the left, y from the front. */
@@ -40,7 +41,7 @@ export function modeZones([alongLength, alongWidth]: RoomMode['order']): ModeZon
 }
 
 function stretches(halfWaves: number): Stretch[] {
-  const count = Math.max(1, halfWaves * stepsInAHalfWave);
+  const count = halfWaves === 0 ? 1 : Math.max(stepsAcross, halfWaves * stepsInAHalfWave);
   return Array.from({ length: count }, (_, i) => ({
     from: i / count,
     to: (i + 1) / count,

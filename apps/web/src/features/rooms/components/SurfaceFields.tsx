@@ -81,8 +81,9 @@ function PatchRow({
   const name = surfaceWords[patch.place].toLowerCase();
   return (
     <Grid
-      templateColumns={{ base: '84px minmax(0, 1fr)', md: '96px minmax(0, 1fr)' }}
-      gap="14px"
+      templateColumns={{ base: 'minmax(0, 1fr)', md: '96px minmax(0, 1fr)' }}
+      columnGap="14px"
+      rowGap="6px"
       marginTop="8px"
       paddingLeft="14px"
       borderLeft="2px solid"
