@@ -48,7 +48,7 @@ test('a room is written down, a treatment tried on paper and put in its log', as
   await page.keyboard.press('ArrowDown');
   await expect(page.getByText('72 Hz stands between floor and ceiling')).toBeVisible();
   await page.getByLabel('Material').selectOption('curtain');
-  await page.getByLabel('Where').selectOption('back');
+  await page.getByLabel('Where', { exact: true }).selectOption('back');
   await expect(head).toHaveText(/^8 m² of curtain/);
   await page.reload();
   await expect(head).toHaveText(/^8 m² of curtain/);

@@ -28,7 +28,7 @@ test('calculator', async ({ page }) => {
   await takeShots(page, 'calculator');
   await page.getByRole('radio', { name: /^64.4 Hz/ }).focus();
   await page.keyboard.press('Space');
-  await page.getByLabel('Where').selectOption('floor');
+  await page.getByLabel('Where', { exact: true }).selectOption('floor');
   await takeShots(page, 'calculator-two-ways');
 });
 
