@@ -112,6 +112,8 @@ export const agreement = z.object({
   hitsUsed: z.int().nonnegative(),
   /** Hits whose own low end says the same as the sum over hits. */
   agreeingHits: z.int().nonnegative(),
+  /** 0–1: coherence over the kick hits, 30–150 Hz; null without hits and in a take measured before it was. */
+  hitsAlike: figure,
   verdict,
   sure: z.boolean(),
   reason: z.string().nullable(),

@@ -165,7 +165,13 @@ export interface ArrivalFacts {
 
 export type Verdict = 'keep' | 'flip' | 'either-way' | 'cannot-tell';
 export type VerdictReason =
-  'no-kick-hits' | 'hits-disagree' | 'arrival-spread' | 'bands-disagree' | 'overhead-silent' | 'late-start';
+  | 'no-kick-hits'
+  | 'hits-disagree'
+  | 'hits-unlike'
+  | 'arrival-spread'
+  | 'bands-disagree'
+  | 'overhead-silent'
+  | 'late-start';
 export type ChoiceName = 'as-recorded' | 'flipped' | 'shifted' | 'shifted-flipped' | 'best-shift';
 
 /** How the second microphone is played against the first. */
@@ -193,6 +199,11 @@ export interface AgreementFacts {
   readonly matchGainDb: number | null;
   readonly hitsUsed: number;
   readonly agreeingHits: number;
+  /**
+   * How far all hits tell of the same way between the two microphones, 0–1 (coherence over hits, 30–150 Hz); null without
+   * hits, missing in facts measured before it was.
+   */
+  readonly hitsAlike?: number | null;
   readonly verdict: Verdict;
   readonly sure: boolean;
   readonly reason: VerdictReason | null;

@@ -29,7 +29,7 @@ describe('a measured take', () => {
     const { facts, pairSpectra } = await take(kit());
     const [pair] = facts.pairs;
     expect(facts.hits.map((hit) => hit.kind)).toEqual(Array(6).fill('kick'));
-    // Wanted on synthetic takes (section 4): 0.05 ms.
+    // Wanted on synthetic takes (docs/measurements.md, 4): 0.05 ms.
     expect(Math.abs((pair.arrival.arrivalMs ?? NaN) - 1.6)).toBeLessThan(0.05);
     expect(pair.agreement).toMatchObject({ verdict: 'keep', sure: true, agreeingHits: 6 });
     // The overhead hears the kick at 0.4: matched by 20·lg(1/0.4) = 7.96 dB; noise of −80 dBFS moves it little.
@@ -76,7 +76,7 @@ describe('a measured take', () => {
     const overhead = delayed(uneven.overhead, 0.32 * 48000);
     const { facts: late, pairSpectra } = await take({ ...uneven, overhead });
     const [pair] = late.pairs;
-    // Wanted (section 4): within 5 ms; the kit's own 1.6 ms can't be told apart.
+    // Wanted (docs/measurements.md, 4): within 5 ms; the kit's own 1.6 ms can't be told apart.
     expect(Math.abs((pair.lateStart?.overheadLateMs ?? NaN) - 321.6)).toBeLessThan(5);
     expect(pair.arrival).toMatchObject({ arrivalMs: null, confidence: 0, reason: 'late-start' });
     expect(pair.agreement).toMatchObject({ verdict: 'cannot-tell', sure: false, reason: 'late-start' });

@@ -23,17 +23,17 @@ const folder = process.argv[2] ?? join(__dirname, '../../../../shared/recordings
 
 /** An event is where a hit's file begins; its sound starts up to 100 samples later, and an overhead hit is told to 12 ms. */
 const WITHIN_S = 0.03;
-/** Section 3: kicks 1.00/1.00 on grooves. Of hats under a ringing crash a quarter is missed on one kit, known: 0.75. */
+/** measurements.md, 3: kicks 1.00/1.00 on grooves. Of hats under a ringing crash a quarter is missed on one kit, known: 0.75. */
 const LEAST_KICKS = 1;
 const LEAST_OTHERS_PRECISION = 0.9;
 const LEAST_OTHERS_RECALL = 0.75;
-/** Section 4: the same kit's isolated hits, and D ± 1 sample. */
+/** docs/measurements.md, 4: the same kit's isolated hits, and D ± 1 sample. */
 const ISOLATED_WITHIN_MS = 0.4;
 const MOVED_WITHIN_SAMPLES = 1;
 const MOVES = [-200, -37, 1, 100, 441];
 /** "Done means" of the polarity: the figure changes its sign within 0.05 dB. */
 const TURNED_WITHIN_DB = 0.05;
-/** Section 4: files that don't start together are found within 5 ms, the way of the sound on top. */
+/** docs/measurements.md, 4: files that don't start together are found within 5 ms, the way of the sound on top. */
 const LATE_MS = 320;
 const LATE_WITHIN_MS = 5;
 /** Sixteenths at 220 beats per minute, of a kit's hits in turn. Known: one kit reaches 0.67, where soft hits stand in loud ones' ringing. */

@@ -1,4 +1,4 @@
 /** Named on every measurement; counts up. A change of what is measured, or how, gets a new one: sheets are then renewed. */
-export const dspVersion = '5';
+export const dspVersion = '6';
 
 export const isOlder = (version: string): boolean => Number(version) < Number(dspVersion);

@@ -143,6 +143,7 @@ export const sampleReport = (overrides: Partial<ReportResponse> = {}): ReportRes
     matchGainDb: 5.7,
     hitsUsed: 3,
     agreeingHits: 3,
+    hitsAlike: 0.97,
     verdict: 'flip',
     sure: true,
     reason: null,

@@ -14,7 +14,7 @@ export function addingUpFinding({ agreement }: ReportFigures): Finding {
   return { topic: 'adding-up', status: addingUpStatus(agreement), ...said(agreement) };
 }
 
-/** Section 5: a sure flip is a *fix*, a sure keep is *good*, what is unsure is a *watch*. */
+/** docs/measurements.md, 5: a sure flip is a *fix*, a sure keep is *good*, what is unsure is a *watch*. */
 export function addingUpStatus(agreement: AgreementReport): FindingStatus {
   if (agreement.verdict === 'cannot-tell') return 'cannot-tell';
   if (agreement.verdict === 'either-way') return isMixed(agreement) || !agreement.sure ? 'watch' : 'good';
@@ -22,7 +22,7 @@ export function addingUpStatus(agreement: AgreementReport): FindingStatus {
   return agreement.verdict === 'flip' ? 'fix' : 'good';
 }
 
-/** Section 5: with fewer than three hits nothing is sure. */
+/** docs/measurements.md, 5: with fewer than three hits nothing is sure. */
 export function hasFewHits({ hitsUsed }: AgreementReport): boolean {
   return hitsUsed < FEW_HITS;
 }
@@ -111,6 +111,7 @@ function mixed(agreement: AgreementReport): Said {
 
 const whyNot: Record<Exclude<VerdictReason, 'hits-disagree'>, string> = {
   'no-kick-hits': 'no kick hit was found, so nothing can be added up',
+  'hits-unlike': 'the two files fit together differently at every kick, as two takes would',
   'arrival-spread': 'the kick reaches the overhead differently from hit to hit',
   'bands-disagree': 'the lowest octaves contradict each other, so either polarity could win',
   'overhead-silent': 'the overhead is silent at the kicks',
@@ -127,6 +128,13 @@ function cannotTell({ reason, agreeingHits, hitsUsed }: AgreementReport): Said {
       sentence: `Can’t tell: ${because}; export both from the same start.`,
       why: 'A polarity is told only of two files that line up to a part of a millisecond.',
       next: 'Line the files up, export both from the same start and add them again.',
+    };
+  }
+  if (reason === 'hits-unlike') {
+    return {
+      sentence: `Can’t tell: ${because}; record eight hard kicks with nothing else.`,
+      why: 'Two microphones that heard one pass stand alike at every kick.',
+      next: 'See that both files are of one take. If they are, record eight hard kicks with nothing else.',
     };
   }
   return {

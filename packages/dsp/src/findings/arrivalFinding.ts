@@ -7,6 +7,8 @@ const FAR_MS = 12;
 /** Earlier than this is no matter of placement: the overhead is never nearer to the drum by so much; our choice. */
 const EARLY_MS = -0.5;
 const CONFIDENT = 0.5;
+/** From this many hits on it isn't their number that leaves a doubt. */
+const ENOUGH_HITS = 6;
 
 /** How much later the overhead hears the kick, and how far that is. */
 export function arrivalFinding(figures: ReportFigures, reader: Pick<Reader, 'lengthUnit'>): Finding {
@@ -17,10 +19,11 @@ export function arrivalFinding(figures: ReportFigures, reader: Pick<Reader, 'len
   const when = arrivalMs >= 0 ? 'later' : 'earlier';
   const where = `about ${lengthText(pathDifferenceM ?? 0, reader.lengthUnit)} ${arrivalMs >= 0 ? 'further away' : 'nearer'}`;
   if (confidence < CONFIDENT) {
+    const doubt = hitsUsed < ENOUGH_HITS ? 'few hits show it' : 'other sounds may hide it';
     return {
       topic: 'arrival',
       status: 'watch',
-      sentence: `The overhead seems to hear the kick ${ms} ms ${when}, ${where}, but few hits show it; record eight kicks.`,
+      sentence: `The overhead seems to hear the kick ${ms} ms ${when}, ${where}, but ${doubt}; record eight kicks.`,
       why: `It was seen clearly in ${counted(hitsUsed, 'hit')}.`,
       next: 'Record eight hard kicks with nothing else.',
     };

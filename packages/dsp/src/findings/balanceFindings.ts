@@ -1,7 +1,7 @@
 import type { BalanceReport, Finding, ReportFigures } from '../report/reportTypes';
 import { counted, wholeDbText } from './words';
 
-/** Section 6: *watch* above this; common practice, no source. */
+/** docs/measurements.md, 6: *watch* above this; common practice, no source. */
 const WATCH_DB = 3;
 /** Nearer than this nobody hears which is louder; our choice. */
 const ALIKE_DB = 1;

@@ -2,7 +2,7 @@ import { amplitudeDb } from '../decibel';
 import type { Finding, ReportFigures } from '../report/reportTypes';
 import { wholeDbfsText } from './words';
 
-/** Section 2: *watch* above −60 dBFS. */
+/** docs/measurements.md, 2: *watch* above −60 dBFS. */
 const WATCH_DBFS = -60;
 
 /** Only said where a file is off its centre: that it isn't is nothing to read about. */

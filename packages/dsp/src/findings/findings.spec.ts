@@ -142,6 +142,16 @@ describe('the adding-up finding', () => {
         'Can’t tell: only 4 of 7 kick hits agree, so either polarity could win; record eight hard kicks with nothing else.',
     });
   });
+
+  it("can't tell where the files look like two passes", () => {
+    const told = addingUp({ verdict: 'cannot-tell', sure: false, reason: 'hits-unlike', agreeingHits: 6 });
+    expect(told).toMatchObject({
+      status: 'cannot-tell',
+      sentence:
+        'Can’t tell: the two files fit together differently at every kick, as two takes would; record eight hard kicks with nothing else.',
+      next: 'See that both files are of one take. If they are, record eight hard kicks with nothing else.',
+    });
+  });
 });
 
 describe('the finding of a late start', () => {
@@ -204,7 +214,14 @@ describe('the arrival finding', () => {
       arrivalFinding(reportOf({ arrival: { ...reportOf().arrival, ...change } }), reader);
     expect(arrival({ arrivalMs: -8 }).sentence).toContain('8.0 ms earlier, which no placement explains');
     expect(arrival({ arrivalMs: 25 }).status).toBe('watch');
-    expect(arrival({ confidence: 0.2, hitsUsed: 1 }).status).toBe('watch');
+    expect(arrival({ confidence: 0.2, hitsUsed: 1 }).sentence).toContain(
+      'but few hits show it; record eight kicks.',
+    );
+    expect(arrival({ confidence: 0.4, hitsUsed: 8 })).toMatchObject({
+      status: 'watch',
+      sentence:
+        'The overhead seems to hear the kick 1.6 ms later, about 56 cm further away, but other sounds may hide it; record eight kicks.',
+    });
     expect(arrival({ arrivalMs: null, reason: 'hits-disagree' }).status).toBe('cannot-tell');
   });
 });
@@ -311,6 +328,7 @@ const verdicts: VerdictReason[] = [
   'late-start',
   'no-kick-hits',
   'hits-disagree',
+  'hits-unlike',
   'arrival-spread',
   'bands-disagree',
   'overhead-silent',

@@ -1,5 +1,6 @@
 import type { AgreementFacts, ArrivalFacts, HitFacts, PairSpectrum } from '../facts';
 import { agreement } from './agreement/agreement';
+import { createHitsAlike } from './agreement/hitsAlike';
 import { hitBalance } from './agreement/hitBalance';
 import { matchGainDb } from './agreement/matchGain';
 import { createPairGatherer } from './agreement/pairSpectrum';
@@ -25,8 +26,13 @@ export interface PairReading {
 /** @param parts - in order of time */
 export function pairReading(parts: readonly PairPart[], sampleRateHz: number): PairReading {
   const gatherer = createPairGatherer({ sampleRateHz, perHit: hitBalance });
-  for (const part of parts) gatherer.include(part.spectrum);
+  const alike = createHitsAlike();
+  for (const part of parts) {
+    gatherer.include(part.spectrum);
+    alike.include(part.alike);
+  }
   const spectrum = gatherer.result();
+  const hitsAlike = alike.result();
   const balances = parts.flatMap((part) => part.balances);
   return {
     kickHits: parts.flatMap((part) => part.kickHits),
@@ -37,6 +43,6 @@ export function pairReading(parts: readonly PairPart[], sampleRateHz: number): P
       return meter.result();
     },
     agreement: (arrival, hits, places) =>
-      agreement({ spectrum, balances, arrival, matchGainDb: matchGainDb(hits, places) }),
+      agreement({ spectrum, balances, hitsAlike, arrival, matchGainDb: matchGainDb(hits, places) }),
   };
 }

@@ -1,4 +1,5 @@
 import type { TrackSource } from '../trackSource';
+import { createHitsAlike, type AlikeSums } from './agreement/hitsAlike';
 import { hitBalance, type HitBalance } from './agreement/hitBalance';
 import { createPairGatherer, kickWindow, type PairSums } from './agreement/pairSpectrum';
 import { arrivalStretch, createArrivalMeter, type ArrivalPart } from './arrival/arrival';
@@ -14,6 +15,7 @@ export interface PairPart {
   readonly balances: readonly HitBalance[];
   readonly arrival: ArrivalPart;
   readonly spectrum: PairSums;
+  readonly alike: AlikeSums;
 }
 
 export interface ReadPairPartOptions {
@@ -36,7 +38,14 @@ export async function readPairPart(options: ReadPairPartOptions): Promise<PairPa
   const { kick, overhead, candidates, from, to, onProgress } = options;
   const { sampleRateHz } = kick;
   const arrivalMeter = createArrivalMeter(sampleRateHz, from);
-  const gatherer = createPairGatherer({ sampleRateHz, perHit: hitBalance });
+  const alike = createHitsAlike();
+  const gatherer = createPairGatherer({
+    sampleRateHz,
+    perHit(bins) {
+      alike.add(bins);
+      return hitBalance(bins);
+    },
+  });
   const balances: HitBalance[] = [];
   const kickHits: KickHit[] = [];
   const take = (hit: KickHitRead, toNext: number): void => {
@@ -63,7 +72,7 @@ export async function readPairPart(options: ReadPairPartOptions): Promise<PairPa
     waiting = hit;
   }
   if (waiting && kickHits.length < to - from) take(waiting, Infinity);
-  return { kickHits, balances, arrival: arrivalMeter.part(), spectrum: gatherer.sums() };
+  return { kickHits, balances, arrival: arrivalMeter.part(), spectrum: gatherer.sums(), alike: alike.sums() };
 }
 
 function peaksOf(

@@ -1,7 +1,7 @@
 import { interquartileRange, median, quantile } from './statistics';
 
 describe('medians and quartiles', () => {
-  // check-values section 12: linear interpolation, type 7.
+  // Linear interpolation, type 7 of Hyndman and Fan 1996; values from numpy.
   const six = [36, 7, 41, 15, 40, 39];
 
   it('are those of the published example', () => {

@@ -5,11 +5,11 @@ export interface LevelFigures {
   readonly clipping: { readonly runCount: number };
 }
 
-/** "At least 9 dB down" (section 2): how far over the top a clipped hit went can't be seen. Common practice, no source. */
+/** "At least 9 dB down" (measurements.md, 2): how far over the top a clipped hit went can't be seen. Common practice, no source. */
 const CLIPPED_CHANGE_DB = -9;
-/** A low take is a *watch* below this, or where raising it to the aim lifts the noise above the next one (section 2). */
+/** A low take is a *watch* below this, or where raising it to the aim lifts the noise above the next one (measurements.md, 2). */
 const LOW_WATCH_DBFS = -18;
-/** Noise above this is a *watch* (section 2). */
+/** Noise above this is a *watch* (docs/measurements.md, 2). */
 export const NOISE_WATCH_DBFS = -60;
 
 /** How the loudest hit stands to the target; anything clipped is *clipped*. @returns null without a hit */

@@ -1,6 +1,6 @@
 import { assertBetween } from '../assert';
 
-/** Speed at 0 °C and the kelvins that make up 0 °C: the ideal-gas form of section 4, 343.2 m/s at 20 °C. */
+/** Speed at 0 °C and the kelvins that make up 0 °C: the ideal-gas form, 343.2 m/s at 20 °C as in ISO 9613-1. */
 const SPEED_AT_0_M_PER_S = 331.3;
 const ZERO_C_IN_K = 273.15;
 

@@ -49,7 +49,7 @@ describe('the level of a microphone', () => {
 });
 
 describe('the path difference', () => {
-  // check-values section 4 and 13.9: 343.2 m/s at 20 °C (ISO 9613-1); the ideal-gas form gives 343.2.
+  // 343.2 m/s at 20 °C (ISO 9613-1); the ideal-gas form gives the same.
   it('follows the temperature', () => {
     expect(speedOfSoundMPerS(0)).toBe(331.3);
     expect(speedOfSoundMPerS(20)).toBeCloseTo(343.2, 1);

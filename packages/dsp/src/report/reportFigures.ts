@@ -102,6 +102,7 @@ function roomReport(room: TakeFacts['room']): ReportFigures['room'] {
 function agreementReport({ agreement }: PairFacts): AgreementReport {
   return {
     ...agreement,
+    hitsAlike: agreement.hitsAlike ?? null,
     bands: [...agreement.bands],
     contraryBands: [...agreement.contraryBands],
     choices: [...agreement.choices],

@@ -92,6 +92,8 @@ export interface AgreementReport {
   matchGainDb: number | null;
   hitsUsed: number;
   agreeingHits: number;
+  /** Null without kick hits and in a take measured before it was. */
+  hitsAlike: number | null;
   verdict: Verdict;
   sure: boolean;
   reason: VerdictReason | null;

@@ -2,7 +2,7 @@ import { butterworthHighPass, butterworthLowPass } from '../measurements/filters
 import { createFilterChain } from '../measurements/filters/filterChain';
 import type { TrackSource } from '../trackSource';
 
-/** A kick microphone holds most of its energy below this, an overhead little (2-measurements.md uses 30–150 Hz). */
+/** A kick microphone holds most of its energy below this, an overhead little (the measurements use 30–150 Hz). */
 const lowEndHz = 150;
 /** Keeps a constant offset from looking like low end; below any drum. */
 const lowestHz = 20;

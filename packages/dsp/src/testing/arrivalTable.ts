@@ -5,13 +5,14 @@ import type { ArrivalCase } from './arrivalCases';
 
 export interface ArrivalRow {
   readonly name: string;
+  readonly isHidden: boolean;
   readonly arrival: ArrivalFacts;
   /** Null where nothing is told. */
   readonly errorMs: number | null;
 }
 
 /** Makes and measures one case. */
-export async function arrivalRow({ name, trueMs, make }: ArrivalCase): Promise<ArrivalRow> {
+export async function arrivalRow({ name, trueMs, isHidden, make }: ArrivalCase): Promise<ArrivalRow> {
   const { kick, overhead, sampleRateHz } = make();
   const { facts } = await measureTake({
     tracks: [
@@ -20,5 +21,5 @@ export async function arrivalRow({ name, trueMs, make }: ArrivalCase): Promise<A
     ],
   });
   const { arrival } = facts.pairs[0];
-  return { name, arrival, errorMs: arrival.arrivalMs === null ? null : arrival.arrivalMs - trueMs };
+  return { name, isHidden, arrival, errorMs: arrival.arrivalMs === null ? null : arrival.arrivalMs - trueMs };
 }

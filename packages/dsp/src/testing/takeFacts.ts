@@ -84,6 +84,7 @@ export function takeFacts(made: MadeTake = {}): TakeFacts {
           matchGainDb: 6.0206,
           hitsUsed: kicks,
           agreeingHits: kicks,
+          hitsAlike: 0.97,
           verdict: 'keep',
           sure: true,
           reason: null,

@@ -28,7 +28,7 @@ describe('chunks that tell about a file', () => {
   });
 
   it('lie where EBU Tech 3285 v2 puts them', () => {
-    // check-values.md section 10: version at 346, unused loudness 7FFFh at 412, coding history from 602; 8 for id and size.
+    // EBU Tech 3285 2.3: version at 346, unused loudness 7FFFh at 412, coding history from 602; 8 for id and size.
     const chunk = broadcastChunk({ codingHistory: 'A=PCM,F=48000' });
     const view = new DataView(chunk.buffer);
     expect([view.getUint32(4, true), view.getUint16(8 + 346, true), view.getUint16(8 + 412, true)]).toEqual([

@@ -13,7 +13,7 @@ const written = {
   originator: 'Field recorder',
   date: '2026-11-30',
   time: '18:05:09',
-  // EBU Tech 3285 2.3: 13:30:00 at 96 kHz needs more than 32 bits (check-values.md section 10).
+  // EBU Tech 3285 2.3: 13:30:00 at 96 kHz needs more than 32 bits.
   timeReference: 4_665_600_000n,
 };
 

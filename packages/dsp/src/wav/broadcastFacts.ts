@@ -32,7 +32,7 @@ export const broadcastBytes = 346;
  *
  * @param body - may be shorter than the standard has it
  * @returns null where it says nothing at all
- * @see EBU Tech 3285 v2 (2011), 2.3 and 2.4; check-values.md section 10
+ * @see EBU Tech 3285 v2 (2011), 2.3 and 2.4
  */
 export function broadcastFacts(body: DataView): BroadcastFacts | null {
   const date = dateOf(ascii(body, ...fields.date));

@@ -35,7 +35,7 @@ describe('encodeWav', () => {
 
   it('writes a 44-byte header for integers and pads an odd number of bytes', () => {
     const file = encodeWav({ channels: [Float32Array.of(0)], sampleRateHz: 44100, bitDepth: 24 });
-    // check-values.md section 10: 5 bytes of sound make a RIFF size of 42; 3 bytes, 40.
+    // As SoX writes it: 5 bytes of sound make a RIFF size of 42; 3 bytes, 40.
     expect(file.length).toBe(48);
     expect(new DataView(file.buffer).getUint32(4, true)).toBe(40);
     expect(new DataView(file.buffer).getUint32(40, true)).toBe(3);

@@ -26,7 +26,7 @@ const tagNames: Readonly<Record<number, { name: string; lossy?: true }>> = {
   0x674f: { name: 'Ogg Vorbis', lossy: true },
 };
 
-/** Bytes 2–15 of every sub-format GUID that stands for a plain format tag (mmreg.h; check-values.md section 10). */
+/** Bytes 2–15 of every sub-format GUID that stands for a plain format tag (Microsoft's mmreg.h; as ffmpeg writes it). */
 const guidTail = [0, 0, 0, 0, 0x10, 0, 0x80, 0, 0, 0xaa, 0, 0x38, 0x9b, 0x71];
 
 /**

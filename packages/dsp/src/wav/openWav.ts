@@ -33,7 +33,7 @@ const blockBytes = 256 * 1024;
  * Only the header is read here; the sound is read in blocks, never as a whole.
  *
  * @throws {WavError} a file that can't be measured, with one sentence for people
- * @see check-values.md section 10 for the sources of each field
+ * @see Microsoft's mmreg.h and ksmedia.h, ITU-R BS.2088 (RF64, BW64), EBU Tech 3285 (`bext`)
  * @example
  * const wav = encodeWav({ channels: [Float32Array.of(0, 0.5, -1)], sampleRateHz: 48000, bitDepth: 24 });
  * const opened = await openWav(bytesSource(wav));

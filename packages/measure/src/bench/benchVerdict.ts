@@ -8,7 +8,7 @@ export interface Judgement {
   readonly text: string;
 }
 
-/** 2-measurements.md, "Speed and memory"; half of ffmpeg's time is the aim beyond it. */
+/** docs/measurements.md, "Speed and memory"; half of ffmpeg's time is the aim beyond it. */
 const mostRatio = 1;
 const aimedRatio = 0.5;
 const mostMb = 300;

@@ -21,8 +21,8 @@ const names: Readonly<Record<keyof ToolFigures, string>> = {
 
 /**
  * How far two may lie apart: how the tools round (SoX two decimals, `ebur128` one); for the true peak also what four times
- * may read low near half the rate, 0.69 dB (BS.1770-5 Annex 2; check-values section 1.4), since the tools sample elsewhere;
- * for the loudness also the low cut that ffmpeg leaves unscaled (section 13.1).
+ * may read low near half the rate, 0.69 dB (BS.1770-5 Annex 2, 20·lg cos(π·0.5/4)), since the tools sample elsewhere;
+ * for the loudness also the low cut that ffmpeg leaves unscaled at other rates (`f_ebur128.c`).
  */
 function mostAt(sampleRateHz: number): Most {
   const [, lowCut] = kWeighting(sampleRateHz);

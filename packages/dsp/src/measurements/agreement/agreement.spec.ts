@@ -24,6 +24,7 @@ describe('agreement of a pair', () => {
     const facts = agreement({
       spectrum: delayedPair({ delayMs: 1 }),
       balances,
+      hitsAlike: 1,
       matchGainDb: 0,
       arrival: arrival(1),
     });
@@ -41,6 +42,7 @@ describe('agreement of a pair', () => {
     const facts = agreement({
       spectrum: delayedPair({ delayMs: 1 }),
       balances,
+      hitsAlike: 1,
       matchGainDb: 0,
       arrival: arrival(1),
     });
@@ -51,8 +53,8 @@ describe('agreement of a pair', () => {
 
   it('names no third-octave that holds next to nothing, nor one beyond 31.5 Hz to 5 kHz', () => {
     const named = (spectrum: PairSpectrum): number[] =>
-      agreement({ spectrum, balances, matchGainDb: 0, arrival: arrival(1) }).contraryBands.map((band) =>
-        Math.round(band.centreHz),
+      agreement({ spectrum, balances, hitsAlike: 1, matchGainDb: 0, arrival: arrival(1) }).contraryBands.map(
+        (band) => Math.round(band.centreHz),
       );
     const pair = delayedPair({ delayMs: 1 });
     // 447–562 Hz is 115 of the 770 Hz from 30 to 800: 15 % of white sound, under 1 % once a hundredth as strong.
@@ -69,18 +71,24 @@ describe('agreement of a pair', () => {
     const pair = delayedPair();
     const opposite = { ...pair, skoRe: pair.skoRe.map((x) => -x) };
     const facts = (spectrum: typeof pair) =>
-      agreement({ spectrum, balances, matchGainDb: 0, arrival: arrival(0) });
+      agreement({ spectrum, balances, hitsAlike: 1, matchGainDb: 0, arrival: arrival(0) });
     expect(facts(pair).lowCorrelation).toBeCloseTo(1, 6);
     expect(facts(opposite).lowCorrelation).toBeCloseTo(-1, 6);
   });
 
   it('leaves out shifts without an arrival', () => {
-    const facts = agreement({ spectrum: delayedPair(), balances, matchGainDb: 0, arrival: arrival(null) });
+    const facts = agreement({
+      spectrum: delayedPair(),
+      balances,
+      hitsAlike: 1,
+      matchGainDb: 0,
+      arrival: arrival(null),
+    });
     expect(facts.choices.map((choice) => choice.name)).toEqual(['as-recorded', 'flipped']);
   });
 
   it('says why nothing can be told', () => {
-    const none = { balances: [], matchGainDb: null, arrival: arrival(null) };
+    const none = { balances: [], hitsAlike: null, matchGainDb: null, arrival: arrival(null) };
     expect(agreement({ ...none, spectrum: null })).toMatchObject({
       verdict: 'cannot-tell',
       reason: 'no-kick-hits',

@@ -10,12 +10,14 @@ import { verdictOf, type VerdictResult } from './verdict';
 export interface AgreementInput {
   readonly spectrum: PairSpectrum | null;
   readonly balances: readonly HitBalance[];
+  /** How alike the hits are, see {@link createHitsAlike}. */
+  readonly hitsAlike: number | null;
   readonly matchGainDb: number | null;
   readonly arrival: ArrivalFacts;
 }
 
 const BANDS_TO_HZ = [120, 150, 200];
-/** Section 5: a third-octave that moves the other way by this much is named. */
+/** docs/measurements.md, 5: a third-octave that moves the other way by this much is named. */
 const CONTRARY_FROM_DB = 1.5;
 /** Only where it can be heard: 31.5 Hz to 5 kHz, with 1 % of what lies where a kick sounds; common practice, no source. */
 const NAMED_CENTRES: Band = { lowHz: 30, highHz: 5100 };
@@ -23,16 +25,19 @@ const KICK_BAND: Band = { lowHz: 30, highHz: 800 };
 const NAMED_SHARE = 0.01;
 
 /** What the two microphones do to each other at the kick: the heart of the sheet. */
-export function agreement({ spectrum, balances, matchGainDb, arrival }: AgreementInput): AgreementFacts {
+export function agreement(input: AgreementInput): AgreementFacts {
+  const { spectrum, balances, hitsAlike, matchGainDb, arrival } = input;
   if (!spectrum || matchGainDb === null) return nothingToAdd(balances.length, spectrum !== null);
   const sums = judge(spectrum, {
     crosses: balances.map((hit) => hit.lowEnergy.cross),
     gainDb: matchGainDb,
+    hitsAlike,
     arrival,
   });
   const cut = judge(withLowCut(spectrum), {
     crosses: balances.map((hit) => hit.lowCrossLowCut),
     gainDb: matchGainDb,
+    hitsAlike,
     arrival,
   });
   return {
@@ -42,6 +47,7 @@ export function agreement({ spectrum, balances, matchGainDb, arrival }: Agreemen
     matchGainDb,
     hitsUsed: balances.length,
     agreeingHits: sums.agreeingHits,
+    hitsAlike,
     verdict: sums.verdict,
     sure: sums.sure,
     reason: sums.reason,
@@ -58,10 +64,12 @@ interface Judged extends VerdictResult {
   readonly bands: AgreementFacts['bands'];
 }
 
-function judge(
-  spectrum: PairSpectrum,
-  { crosses, gainDb, arrival }: { crosses: readonly number[]; gainDb: number; arrival: ArrivalFacts },
-): Judged {
+interface JudgedBy extends Pick<AgreementInput, 'hitsAlike' | 'arrival'> {
+  readonly crosses: readonly number[];
+  readonly gainDb: number;
+}
+
+function judge(spectrum: PairSpectrum, { crosses, gainDb, hitsAlike, arrival }: JudgedBy): Judged {
   const flipGainDb = flipGain(spectrum, { gainDb });
   const bands = BANDS_TO_HZ.flatMap((highHz) => {
     const bandGainDb = flipGain(spectrum, { gainDb, highHz });
@@ -72,6 +80,7 @@ function judge(
   const verdict = verdictOf({
     hits: crosses.length,
     agreeingHits,
+    hitsAlike,
     arrivalIqrMs: arrival.arrivalIqrMs,
     arrives: arrival.reason !== 'too-few-hits',
     flipGainDb,
@@ -136,6 +145,7 @@ function nothingToAdd(hitsUsed: number, hasHits: boolean): AgreementFacts {
     matchGainDb: null,
     hitsUsed,
     agreeingHits: 0,
+    hitsAlike: null,
     verdict: 'cannot-tell',
     sure: false,
     reason: hasHits ? 'overhead-silent' : 'no-kick-hits',

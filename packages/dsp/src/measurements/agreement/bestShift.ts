@@ -2,9 +2,9 @@ import type { ArrivalFacts, Choice, PairSpectrum } from '../../facts';
 import { choiceLowEnd } from './choiceLevels';
 import { thirdOctaves } from './thirdOctaves';
 
-/** Third-octaves 31.5–800 Hz; a search on the low band alone ran to its edge on every real case (section 5). */
+/** Third-octaves 31.5–800 Hz; a search on the low band alone ran to its edge on every real case (measurements.md, 5). */
 const judged = thirdOctaves.filter((band) => band.centreHz > 30 && band.centreHz < 900);
-/** Section 5: from 0 to this much beyond the arrival. */
+/** docs/measurements.md, 5: from 0 to this much beyond the arrival. */
 const BEYOND_ARRIVAL_MS = 1.5;
 const WORTH_DB = 0.5;
 /** Our choice: from here on an arrival is called confident. */

@@ -15,7 +15,7 @@ export interface BandEnergies {
   readonly powerSum: number;
 }
 
-/** The low end: what the verdict counts (section 5). */
+/** The low end: what the verdict counts (docs/measurements.md, 5). */
 export const lowEnd: Band = { lowHz: 30, highHz: 150 };
 
 /**

@@ -9,7 +9,7 @@ const overOne = (levelDb: number | null): number => (levelDb ?? NaN) + 10 * Math
 
 describe('two microphones added', () => {
   it('gain 6.02 dB over one of them when they are the same', () => {
-    // Master Handbook of Acoustics p. 201: 20 lg 2; check-values section 6–7.
+    // Master Handbook of Acoustics p. 201: 20 lg 2.
     expect(overOne(choiceLowEnd(delayedPair(), choice))).toBeCloseTo(6.0206, 3);
   });
 
@@ -17,7 +17,7 @@ describe('two microphones added', () => {
     expect(choiceLowEnd(delayedPair(), choice)).toBeCloseTo(3.0103, 4);
   });
 
-  // Closed form 20·lg(2·cos(φ/2)), check-values section 6–7; φ = 360·f·t at 100 Hz. ±0.02 dB: the bins that make
+  // Closed form 20·lg(2·cos(φ/2)); φ = 360·f·t at 100 Hz. ±0.02 dB: the bins that make
   // up "100 Hz" span 2.8 Hz.
   it.each([
     [30, 5.7195],
@@ -40,7 +40,7 @@ describe('two microphones added', () => {
   });
 
   it('differ by 20·lg of (1 + r)/(1 − r) between the polarities when one is r times the other', () => {
-    // check-values: r = 0.5 gives +3.522 and −6.021 dB.
+    // 20·lg(1 ± r): r = 0.5 gives +3.522 and −6.021 dB.
     expect(flipGain(delayedPair({ gain: 0.5 }), { gainDb: 0 })).toBeCloseTo(-6.021 - 3.522, 2);
   });
 

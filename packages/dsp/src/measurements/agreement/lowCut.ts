@@ -1,6 +1,6 @@
 import type { PairSpectrum } from '../../facts';
 
-/** The low cut found on most preamps and mixers: 80 Hz, 12 dB per octave (section 5; common practice, no source). */
+/** The low cut found on most preamps and mixers: 80 Hz, 12 dB per octave (measurements.md, 5; common practice, no source). */
 const CUTOFF_HZ = 80;
 
 /** Complex response at f. */

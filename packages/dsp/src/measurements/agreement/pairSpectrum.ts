@@ -47,10 +47,10 @@ export interface PairSums {
   readonly skoIm: Float64Array;
 }
 
-/** Window of a kick hit (section 5); the pair trace reads the same. */
+/** Window of a kick hit (docs/measurements.md, 5); the pair trace reads the same. */
 export const kickWindow = { beforeMs: 10, afterMs: 200 } as const;
 
-/** Bins are kept up to here (section "Architecture": about 70 kB a pair). */
+/** Bins are kept up to here (about 70 kB a pair). */
 const HIGHEST_KEPT_HZ = 12000;
 /** 16,384 points at 44.1 and 48 kHz give 2.69 and 2.93 Hz; other rates get the power of two next below 3 Hz. */
 const WIDEST_BIN_HZ = 3;

@@ -4,7 +4,7 @@ import { forBins, lowEnd } from './choiceEnergy';
 /**
  * Whether the polarity between the two microphones changed from one take to another, 30–150 Hz.
  *
- * The real part of Σ Sko₁·conj(Sko₂) over √(Σ|Sko₁|²·Σ|Sko₂|²) (2-measurements, section 8). How hard the drum was hit and
+ * The real part of Σ Sko₁·conj(Sko₂) over √(Σ|Sko₁|²·Σ|Sko₂|²) (docs/measurements.md, 8). How hard the drum was hit and
  * how the preamps stood cancels out.
  *
  * @returns −1 … 1: near −1 flipped between the takes, near 1 as before, near 0 moved too far to say; null where a pair is

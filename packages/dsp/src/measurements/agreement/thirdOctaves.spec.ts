@@ -1,7 +1,7 @@
 import { thirdOctaves, zones } from './thirdOctaves';
 
 describe('third-octave bands', () => {
-  // IEC 61260-1:2014 equations 1–5, table as in check-values section 5; it prints three decimals.
+  // IEC 61260-1:2014 equations 1–5, as python-acoustics tabulates them; three decimals.
   it.each([
     ['25', 25.119, 22.387, 28.184],
     ['31.5', 31.623, 28.184, 35.481],

@@ -3,6 +3,7 @@ import { verdictOf, type VerdictEvidence } from './verdict';
 const clear: VerdictEvidence = {
   hits: 8,
   agreeingHits: 8,
+  hitsAlike: 0.97,
   arrivalIqrMs: 0.1,
   arrives: true,
   flipGainDb: 1.4,
@@ -53,6 +54,22 @@ describe('the verdict', () => {
       reason: 'hits-disagree',
     });
     expect(verdict({ agreeingHits: 6 }).verdict).toBe('flip');
+  });
+
+  it("can't be told where the hits are no more alike than chance makes them", () => {
+    // 1.5/√8 = 0.530.
+    expect(verdict({ hitsAlike: 0.53 })).toEqual({
+      verdict: 'cannot-tell',
+      sure: false,
+      reason: 'hits-unlike',
+    });
+    expect(verdict({ hitsAlike: 0.54 }).verdict).toBe('flip');
+    expect(verdict({ hitsAlike: null }).verdict).toBe('flip');
+    expect(verdict({ hits: 3, agreeingHits: 3, hitsAlike: 0.86 }).reason).toBe('hits-unlike');
+    expect(verdict({ hits: 2, agreeingHits: 2, hitsAlike: 0.5 })).toMatchObject({
+      verdict: 'flip',
+      sure: false,
+    });
   });
 
   it("can't be told where the arrival spreads by more than a millisecond or isn't there", () => {

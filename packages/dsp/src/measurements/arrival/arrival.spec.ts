@@ -1,7 +1,7 @@
 import { arrivalCases } from '../../testing/arrivalCases';
 import { arrivalRow } from '../../testing/arrivalTable';
 
-/** Section 4: 0.3 ms. The whole table: `npm run check:arrival`. */
+/** docs/measurements.md, 4: 0.3 ms. The whole table: `npm run check:arrival`. */
 const WITHIN_MS = 0.3;
 /** One of each situation, and the two that go wrong most: a kick hardly heard under hats. */
 const chosen = [
@@ -22,6 +22,10 @@ const chosen = [
   'low level, 2.9',
   'walls, 5.2',
   'walls, hats, turned over, 2.9',
+  'hats on every eighth, 1.37',
+  'near walls, 2.9',
+  'hidden by hats, 8',
+  'a snare with each kick, 2.9',
 ];
 const cases = chosen.map((name) => {
   const found = arrivalCases.find((each) => each.name.startsWith(`${name} ms`));
@@ -35,6 +39,6 @@ describe('the arrival of made takes', () => {
     const isRight = errorMs !== null && Math.abs(errorMs) <= WITHIN_MS;
     expect(isRight || arrival.confidence < 0.7).toBe(true);
     // What is hardly heard may be wrong, and one hit isn't enough; everything else is told, and right.
-    if (!each.name.startsWith('soft, under hats')) expect(isRight).toBe(true);
+    if (!each.isHidden && !each.name.startsWith('soft, under hats')) expect(isRight).toBe(true);
   });
 });

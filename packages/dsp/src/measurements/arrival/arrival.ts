@@ -5,6 +5,7 @@ import { interquartileRange, median } from '../statistics';
 import { chooseArrival, type ArrivalEvidence } from './chooseArrival';
 import { firstArrival, type FirstArrival } from './firstArrival';
 import { createPhaseTransform, PHASE_STRETCH_MS, type PhaseSums } from './phaseTransform';
+import { repeats } from './repeats';
 
 /** One kick hit in both microphones. */
 export interface HitStretch {
@@ -34,7 +35,7 @@ export interface ArrivalPart {
 /** What a {@link HitStretch} must hold around its onset for the arrival. */
 export const arrivalStretch = { beforeMs: 60, afterMs: 32 };
 
-/** Both microphones alike, so that the filter delays both alike (section 4). */
+/** Both microphones alike, so that the filter delays both alike (docs/measurements.md, 4). */
 const BAND = { lowHz: 100, highHz: 1500 };
 /** The onset is where the energy rises most, up to 8 ms after the sound began; an overhead is seldom 9 m away. */
 const FROM_MS = -20;
@@ -44,9 +45,16 @@ const CLEAR_HITS_WANTED = 3;
 /** The first swing is told where this share of the hits agree on it; the share the verdict asks for too. */
 const SWING_SHARE = 0.75;
 
+/** What follows the first sound in the overhead must repeat from hit to hit, to be the drum's: from 0.5 ms before it. */
+const BEGINNING_MS = { before: 0.5, after: 5 };
+/** More than are compared; a long take's need not all be kept. */
+const BEGINNINGS_KEPT = 60;
+
 interface HitArrival {
   readonly kick: FirstArrival;
   readonly overhead: FirstArrival;
+  /** The overhead's band around its first sound; null beyond the first hits. */
+  readonly beginning: Float64Array | null;
 }
 
 /**
@@ -69,18 +77,26 @@ export function createArrivalMeter(sampleRateHz: number, hitsBefore = 0): Arriva
       Math.max(0, onsetAt - Math.round(before * samplesPerMs)),
       onsetAt + Math.round(after * samplesPerMs),
     );
-  const first = (samples: Float32Array, onsetAt: number): FirstArrival | null => {
+  const first = (samples: Float32Array, onsetAt: number): FirstSound | null => {
     const around = { before: arrivalStretch.beforeMs, after: arrivalStretch.afterMs };
     const band = filtered(cut(samples, onsetAt, around), sections, room);
     const at = Math.min(onsetAt, Math.round(around.before * samplesPerMs));
     const [from, to] = [FROM_MS, TO_MS].map((ms) => at + Math.round(ms * samplesPerMs));
-    return firstArrival(band, { sampleRateHz, from, to });
+    const arrival = firstArrival(band, { sampleRateHz, from, to });
+    return arrival && { arrival, band };
   };
   return {
     add({ kick, overhead, onsetAt }) {
       hits += 1;
-      const arrival = { kick: first(kick, onsetAt), overhead: first(overhead, onsetAt) };
-      if (arrival.kick && arrival.overhead) arrivals.push({ kick: arrival.kick, overhead: arrival.overhead });
+      const inKick = first(kick, onsetAt)?.arrival;
+      // Both are filtered in one room, so the overhead comes last.
+      const inOverhead = first(overhead, onsetAt);
+      if (inKick && inOverhead)
+        arrivals.push({
+          kick: inKick,
+          overhead: inOverhead.arrival,
+          beginning: arrivals.length < BEGINNINGS_KEPT ? beginningOf(inOverhead, samplesPerMs) : null,
+        });
       overheadSounds ||= overhead.some((sample) => sample !== 0);
       const [k, o] = [kick, overhead].map((samples) => cut(samples, onsetAt, PHASE_STRETCH_MS));
       phase.add(k, o);
@@ -96,6 +112,17 @@ export function createArrivalMeter(sampleRateHz: number, hitsBefore = 0): Arriva
   };
 }
 
+/** A first arrival, and the band in which it was found; the band is good until the next one. */
+interface FirstSound {
+  readonly arrival: FirstArrival;
+  readonly band: Float64Array;
+}
+
+function beginningOf({ arrival, band }: FirstSound, samplesPerMs: number): Float64Array {
+  const at = (ms: number): number => Math.round(arrival.at + ms * samplesPerMs);
+  return band.slice(Math.max(0, at(-BEGINNING_MS.before)), at(BEGINNING_MS.after));
+}
+
 interface Around {
   readonly before: number;
   readonly after: number;
@@ -108,7 +135,12 @@ function told(
   const clear = arrivals.filter((arrival) => arrival.kick.clear && arrival.overhead.clear);
   const used = clear.length >= CLEAR_HITS_WANTED ? clear : arrivals;
   const delaysMs = used.map((arrival) => (arrival.overhead.at - arrival.kick.at) / samplesPerMs);
-  const first = { medianMs: median(delaysMs), iqrMs: interquartileRange(delaysMs), hits: used.length };
+  const first = {
+    medianMs: median(delaysMs),
+    iqrMs: interquartileRange(delaysMs),
+    hits: used.length,
+    repeats: repeats(used.flatMap((arrival) => arrival.beginning ?? [])),
+  };
   const chosen = chooseArrival({ ...evidence, first });
   return {
     ...chosen,

@@ -1,12 +1,13 @@
 import { chooseArrival, type ArrivalEvidence } from './chooseArrival';
 
+const first = { medianMs: 1.6, iqrMs: 0.1, hits: 8, repeats: 0.9 };
 const evidence = (
   change: Partial<ArrivalEvidence> = {},
   peaks: [number, number][] = [[5, 0.3]],
 ): ArrivalEvidence => ({
   hits: 8,
   overheadSounds: true,
-  first: { medianMs: 1.6, iqrMs: 0.1, hits: 8 },
+  first,
   phase: {
     peaks: () => peaks.map(([lagMs, height]) => ({ lagMs, height })),
     lagsPerHit: (lagMs) => [lagMs, lagMs, lagMs],
@@ -26,7 +27,7 @@ describe('the choice of an arrival', () => {
 
   it('is surer where a peak agrees', () => {
     const alone = chooseArrival(evidence()).confidence;
-    expect(chooseArrival(evidence({}, [[1.7, -0.3]])).confidence).toBeGreaterThan(alone);
+    expect(chooseArrival(evidence({}, [[1.7, -0.4]])).confidence).toBeGreaterThan(alone);
     expect(alone).toBeGreaterThan(0.5);
   });
 
@@ -59,16 +60,44 @@ describe('the choice of an arrival', () => {
       expect([arrivalMs, confidence]).toEqual([null, 0]);
       return why;
     };
-    const none = { medianMs: null, iqrMs: null, hits: 0 };
+    const none = { medianMs: null, iqrMs: null, hits: 0, repeats: null };
     expect(reason({ hits: 0, first: none })).toBe('no-kick-hits');
     expect(reason({ overheadSounds: false, first: none })).toBe('overhead-silent');
     expect(reason({ first: none })).toBe('too-few-hits');
-    expect(reason({ first: { medianMs: 3, iqrMs: 1.2, hits: 8 } })).toBe('hits-disagree');
-    expect(reason({ first: { medianMs: 9, iqrMs: 0.1, hits: 8 } }, [[2, 0.8]])).toBe('methods-disagree');
+    expect(reason({ first: { ...first, medianMs: 3, iqrMs: 1.2 } })).toBe('hits-disagree');
+    expect(reason({ first: { ...first, medianMs: 9 } }, [[2, 0.8]])).toBe('methods-disagree');
+  });
+
+  it('is surest where the highest peak is the one next to the first arrivals', () => {
+    const sure = (...peaks: [number, number][]) => chooseArrival(evidence({}, peaks)).confidence;
+    expect(sure([1.5, 0.8])).toBeCloseTo(0.9, 9);
+    expect(sure([1.7, 0.46], [1.2, 0.44])).toBeCloseTo(0.9, 9);
+    expect(sure([2.5, 0.8], [1.5, 0.75])).toBeLessThan(0.7);
+    // A weak peak nearby may be chance, as may be the second of several.
+    expect(sure([1.6, 0.3])).toBeLessThan(0.7);
+    expect(sure([5, 0.4], [1.6, 0.38])).toBeLessThan(0.7);
+  });
+
+  it('is not confident where what is heard first is new noise at every hit, as under hats', () => {
+    const hat = { first: { ...first, repeats: 0.3 } };
+    expect(chooseArrival(evidence(hat))).toMatchObject({ arrivalMs: 1.6 });
+    expect(chooseArrival(evidence(hat)).confidence).toBeLessThan(0.5);
+    // A high peak doesn't need the first arrivals.
+    expect(chooseArrival(evidence(hat, [[3, 0.8]])).confidence).toBeGreaterThan(0.5);
+  });
+
+  it('is not confident in a peak that is contradicted and low, or comes before the kick itself', () => {
+    expect(chooseArrival(evidence({}, [[3, 0.55]])).confidence).toBeLessThan(0.5);
+    expect(chooseArrival(evidence({}, [[-2, 0.9]])).confidence).toBeLessThan(0.5);
+    expect(
+      chooseArrival(evidence({ first: { ...first, medianMs: -2 } }, [[-2, 0.9]])).confidence,
+    ).toBeGreaterThan(0.7);
   });
 
   it('is not confident on one hit', () => {
-    const one = chooseArrival(evidence({ hits: 1, first: { medianMs: 1.6, iqrMs: null, hits: 1 } }));
+    const one = chooseArrival(
+      evidence({ hits: 1, first: { medianMs: 1.6, iqrMs: null, hits: 1, repeats: null } }),
+    );
     expect(one.arrivalMs).toBe(1.6);
     expect(one.confidence).toBeLessThan(0.5);
   });

@@ -15,7 +15,7 @@ export interface FirstArrivalOptions {
   readonly to: number;
 }
 
-/** Both from section 2-measurements "Arrival"; tried on two real kits, see docs/decisions/0002-arrival.md. */
+/** docs/measurements.md, 4; both tried on two real kits, see docs/decisions/0002-arrival.md. */
 const SHARE_OF_PEAK = 0.1;
 const OVER_BEFORE = 2;
 /** What sounds before a hit may be this share of its peak; seen: up to 0.16 the time holds, from 0.28 it is late. */

@@ -50,7 +50,7 @@ const NEAR_MS = 2;
  * Generalised cross-correlation with phase transform, each bin weighted by how alike the two microphones are over the
  * hits (magnitude-squared coherence). One hit alone has coherence 1 everywhere: then it is the plain phase transform.
  *
- * @see C. H. Knapp and G. C. Carter, IEEE Trans. ASSP-24(4), 1976, Table I (as cited in ../check-values.md, section 8)
+ * @see C. H. Knapp and G. C. Carter, IEEE Trans. ASSP-24(4), 1976, Table I (as cited by phonometry and pyroomacoustics; not seen)
  */
 export function createPhaseTransform(sampleRateHz: number, keptBefore = 0): PhaseTransform {
   const stretch = ((PHASE_STRETCH_MS.before + PHASE_STRETCH_MS.after) / 1000) * sampleRateHz;

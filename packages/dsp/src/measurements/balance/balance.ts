@@ -7,12 +7,12 @@ import { kWeighting } from '../loudness/kWeighting';
 import { rounded } from '../rounded';
 import { median } from '../statistics';
 
-/** Section 6: the level is taken over this, and only of hits with nothing for so long before. */
+/** docs/measurements.md, 6: the level is taken over this, and only of hits with nothing for so long before. */
 const LEVEL_MS = 400;
 const ALONE_BEFORE_MS = 150;
 /** Our choice: what comes sooner after a hit leaves too little of it to judge by. */
 const ALONE_AFTER_MS = 150;
-/** Section 6. */
+/** docs/measurements.md, 6. */
 const FEWEST_HITS = 5;
 /** Enough for a steady median; our choice. */
 const MOST_HITS = 100;
@@ -39,7 +39,7 @@ interface AloneHit {
  * @param overhead - read around each hit, at most 100 of each kind, spread over the take
  * @param hits - all hits of the take in order of time
  * @returns LUFS (full-scale sine at 997 Hz: −3.01); null with a reason below five hits of a kind
- * @see ITU-R BS.1770-5 Annex 1 for the weighting; the rule is 2-measurements.md section 6
+ * @see ITU-R BS.1770-5 Annex 1 for the weighting; the rule is in docs/measurements.md, 6
  */
 export async function balance(overhead: TrackSource, hits: readonly HitFacts[]): Promise<BalanceFacts> {
   const alone = aloneHits(hits);

@@ -2,7 +2,7 @@ import { assertPositive } from '../../assert';
 import { ratioDb } from '../agreement/choiceEnergy';
 import { createButterworthEnergy } from '../filters/bandEnergy';
 
-/** The beater's click against the drum's weight (section 8); filters settle over ten periods of their low edge before. */
+/** The beater's click against the drum's weight (measurements.md, 8); filters settle over ten periods of their low edge before. */
 const CLICK = { lowHz: 2000, highHz: 6000, lengthS: 0.02, settleS: 0.005 };
 const WEIGHT = { lowHz: 40, highHz: 150, lengthS: 0.2, settleS: 0.25 };
 

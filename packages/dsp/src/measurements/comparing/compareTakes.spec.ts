@@ -41,7 +41,7 @@ describe('two takes compared', () => {
         gainKnownSame: true,
       }),
     ).flat();
-    // 2–3 % with eight hits a side (section 8); of 680 figures.
+    // 2–3 % with eight hits a side (docs/measurements.md, 8); of 680 figures.
     expect(told.filter((figure) => figure.clear).length / told.length).toBeLessThan(0.03);
   });
 

@@ -93,7 +93,7 @@ describe('a change from take to take', () => {
           spread(random, 8, { middle: -9 + change, sigma: 1.2 }),
         ),
       ).filter(({ clear }) => clear).length / 150;
-    // 2–3 % seen with eight hits a side (section 8); two standard errors of 150 pairs more.
+    // 2–3 % seen with eight hits a side (docs/measurements.md, 8); two standard errors of 150 pairs more.
     expect(told(0)).toBeLessThan(0.06);
     expect(told(3)).toBeGreaterThan(0.9);
   });

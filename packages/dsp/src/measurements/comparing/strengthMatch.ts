@@ -6,7 +6,7 @@ export interface StrengthMatch {
   readonly after: readonly number[];
 }
 
-/** Section 8. */
+/** docs/measurements.md, 8. */
 export const WITHIN_DB = 3;
 
 /**

@@ -6,14 +6,14 @@ import { interval95, logarithm, minus, uncertainMedian, type Uncertain } from '.
 export type WorthStep =
   { readonly kind: 'difference'; readonly size: number } | { readonly kind: 'share'; readonly size: number };
 
-/** Steps worth mentioning: the first three of section 8; what the others rest on is said beside them. */
+/** Steps worth mentioning: the first three of docs/measurements.md, 8; what the others rest on is said beside them. */
 export const worthSteps = {
   peakDb: { kind: 'difference', size: 1 },
   lowEndDb: { kind: 'difference', size: 0.5 },
   decayS: { kind: 'share', size: 0.1 },
   /** Our choice: a quiet second is told within 0.7 dB, in two takes. */
   noiseDb: { kind: 'difference', size: 2 },
-  /** What an arrival is told within in 95 % of takes (section 4): 10 cm. */
+  /** What an arrival is told within in 95 % of takes (docs/measurements.md, 4): 10 cm. */
   arrivalMs: { kind: 'difference', size: 0.3 },
   /** The least difference of early-to-late energy that is heard (ISO 3382-1 Annex A for C80, from memory). */
   earlyToLateDb: { kind: 'difference', size: 1 },
@@ -21,7 +21,7 @@ export const worthSteps = {
   levelDb: { kind: 'difference', size: 1 },
 } as const satisfies Record<string, WorthStep>;
 
-/** Section 8: false changes in 20–30 % of pairs with two hits a side, in 2–3 % with eight. */
+/** docs/measurements.md, 8: false changes in 20–30 % of pairs with two hits a side, in 2–3 % with eight. */
 export const FEWEST_HITS = 6;
 
 /** How a figure moved, surely or not. */

@@ -4,7 +4,7 @@ import { FEWEST_HITS, worthSteps } from './takeChange';
 import { lowEndSign, type KickHitTold, type TakeSide } from './takeSide';
 import { minus, uncertain, uncertainIqr, uncertainMedian, type Uncertain } from './uncertain';
 
-/** Section 8. */
+/** docs/measurements.md, 8. */
 export type TryOutMeasure = 'low-end' | 'agreement' | 'bleed' | 'evenness' | 'attack';
 
 /** How each take's overhead is played: by the polarity that gives more low end, as it was, or turned over. */

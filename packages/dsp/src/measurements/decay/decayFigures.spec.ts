@@ -14,7 +14,7 @@ const wandering = (power: Float64Array, seed: number): Float64Array => {
 };
 
 describe('the decay of one band', () => {
-  // check-values 9.4: exponentials read as what they are, ±1e-4 s.
+  // By theory; pyroomacoustics reads the same, ±1e-4 s.
   it.each([0.3, 0.8, 2])('of an exponential is what it was made with: %d s', (decayS) => {
     const { earlyS, t20S, earlyToLateDb } = decayFigures(exponential(decayS, 2.5 * decayS));
     expect(Math.abs((t20S ?? NaN) - decayS)).toBeLessThan(1e-4);
@@ -25,18 +25,18 @@ describe('the decay of one band', () => {
   });
 
   it('is right for one cut after 36 dB, which reads 1 % short without the correction', () => {
-    // check-values 9.4: T = 1 s cut at 0.6 s reads 0.9875 uncorrected.
+    // Closed form: T = 1 s cut at 0.6 s reads 0.9875 uncorrected.
     expect(Math.abs((decayFigures(exponential(1, 0.6)).t20S ?? NaN) - 1)).toBeLessThan(0.002);
   });
 
   it('leaves out the background it sinks into, 45 dB down', () => {
     const noise = new Float64Array(2000).fill(10 ** -4.5);
-    // 2.7 s where the background is integrated as well (check-values 9.4).
+    // 2.7 s where the background is integrated as well (computed with SciPy).
     expect(Math.abs((decayFigures(sum(exponential(1, 2), noise)).t20S ?? NaN) - 1)).toBeLessThan(0.02);
   });
 
   it('tells the early part of a bent decay apart', () => {
-    // check-values 9.4: 0.3 s with a tail of 1.5 s 20 dB down, early 0.3354 ± 0.002.
+    // Computed with SciPy: 0.3 s with a tail of 1.5 s 20 dB down, early 0.3354 ± 0.002.
     const bent = sum(exponential(0.3, 4), exponential(1.5, 4, 0.01));
     expect(Math.abs((decayFigures(bent).earlyS ?? NaN) - 0.3354)).toBeLessThan(0.002);
   });
@@ -46,7 +46,7 @@ describe('the decay of one band', () => {
       const noise = new Float64Array(1500).fill(10 ** -5);
       return decayFigures(wandering(sum(exponential(decayS, 1.5), noise), seed + 1)).t20S ?? NaN;
     });
-    // 6 % seen for single noise bursts (check-values 9.4), and this is the worst of twenty; their mean is nearer.
+    // 6 % seen for single noise bursts in SciPy, and this is the worst of twenty; their mean is nearer.
     for (const t20S of read) expect(Math.abs(t20S / decayS - 1)).toBeLessThan(0.15);
     expect(Math.abs(read.reduce((all, value) => all + value, 0) / read.length / decayS - 1)).toBeLessThan(
       0.02,

@@ -5,7 +5,7 @@ import { filtered } from '../filters/filterChain';
 import { DECAY_HOP_MS, decayFigures, type DecayFigures } from './decayFigures';
 import type { LoudHit } from './snareHits';
 
-/** Section 7: below 500 Hz a drum rings longer than the room. */
+/** docs/measurements.md, 7: below 500 Hz a drum rings longer than the room. */
 export const DECAY_BANDS_HZ = [500, 1000, 2000, 4000] as const;
 
 /** Half an octave of IEC 61260-1: G^(1/2) with G = 10^(3/10). */

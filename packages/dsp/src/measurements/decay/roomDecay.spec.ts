@@ -44,7 +44,7 @@ describe('the decay of the room', () => {
     const { bands, reason, snareHits, decayS: middleS } = await told(played({ decayS, sampleRateHz }));
     expect([reason, snareHits]).toEqual([null, 8]);
     expect(bands.map((band) => band.centreHz)).toEqual([500, 1000, 2000, 4000]);
-    // Median of eight noise bursts, each within 6 % (check-values 9.4).
+    // Median of eight noise bursts, each within 6 %.
     for (const { t20S, earlyS } of bands) {
       expect(Math.abs((t20S?.median ?? NaN) / decayS - 1)).toBeLessThan(0.06);
       expect(Math.abs((earlyS?.median ?? NaN) / decayS - 1)).toBeLessThan(0.15);

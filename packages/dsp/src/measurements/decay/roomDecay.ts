@@ -6,7 +6,7 @@ import type { DecayFigures } from './decayFigures';
 import { DECAY_BANDS_HZ, readDecay, type SnareRead } from './readDecay';
 import { loudDrumHits } from './snareHits';
 
-/** Section 7. */
+/** docs/measurements.md, 7. */
 const FEWEST_HITS = 6;
 /** ISO 3382-1 Annex A averages these two octaves into one number for the decay (from memory). */
 const MIDDLE_BANDS_HZ: readonly number[] = [500, 1000];

@@ -11,7 +11,7 @@ export interface LoudHit {
 /** Softer hits than this under the loud ones sink into the noise too soon; our choice. */
 const LOUD_WITHIN_DB = 6;
 const LOUD_SHARE = 0.25;
-/** As for drums and cymbals (section 6). */
+/** As for drums and cymbals (docs/measurements.md, 6). */
 const ALONE_BEFORE_S = 0.15;
 /** 35 dB take 0.2 s even in a dry room of 0.35 s per 60 dB. */
 const QUIET_AFTER_S = 0.2;

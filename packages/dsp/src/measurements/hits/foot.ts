@@ -2,7 +2,7 @@ import { firstArrival } from '../arrival/firstArrival';
 import { butterworthBand } from '../filters/butterworth';
 import { filtered } from '../filters/filterChain';
 
-/** The onset's band (section 3), so that a beater's click is seen and a drum that still rings is not. */
+/** The onset's band (docs/measurements.md, 3), so that a beater's click is seen and a drum that still rings is not. */
 const BAND = { lowHz: 150, highHz: 4000 };
 /** A rise that takes longer is another hit's; the greatest rise is seen up to 8 ms after the first sound. */
 const BEFORE_MS = 10;

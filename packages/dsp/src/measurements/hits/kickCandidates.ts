@@ -16,6 +16,8 @@ export interface KickCandidates {
   readonly candidates: readonly KickCandidate[];
   /** 10th percentile of the kick microphone's 30–150 Hz level, dB. */
   readonly floorDb: number;
+  /** The same of the overhead. */
+  readonly overheadFloorDb: number;
 }
 
 /** The 30–150 Hz power of hops of 2 ms, the same stretch of both microphones. */
@@ -29,7 +31,7 @@ export interface KickCandidateFinder {
   result(): KickCandidates;
 }
 
-/** The band a kick is found in (section 3). */
+/** The band a kick is found in (docs/measurements.md, 3). */
 export const LOW_BAND = { lowHz: 30, highHz: 150 };
 /** A rise of more than 6 dB in 30 ms; tried on 2,231 real channels. */
 const RISE = { riseDb: 6, withinMs: 30, over: 'lowest' } as const;
@@ -58,6 +60,7 @@ export function createKickCandidates(sampleRateHz: number): KickCandidateFinder 
   const kickRises = createRiseFinder({ windowMs: WINDOW_MS, ...RISE });
   const overheadLevel = createRiseFinder({ windowMs: WINDOW_MS, ...RISE });
   const histogram = createLevelHistogram();
+  const overheadHistogram = createLevelHistogram();
   const candidates: KickCandidate[] = [];
   const samplesPerHop = hopSamples(sampleRateHz);
   let open: OpenCandidate | null = null;
@@ -72,6 +75,7 @@ export function createKickCandidates(sampleRateHz: number): KickCandidateFinder 
     const rise = kickRises.push(kickPower);
     const overheadDb = overheadLevel.push(overheadPower).levelDb;
     histogram.add(rise.levelDb);
+    overheadHistogram.add(overheadDb);
     if (rise.begins || (open && hop - open.startHop > PEAK_AFTER_HOPS)) close();
     if (rise.begins) {
       open = { ...nothingYet, startHop: hop, steepestHop: hop };
@@ -85,7 +89,11 @@ export function createKickCandidates(sampleRateHz: number): KickCandidateFinder 
     },
     result() {
       close();
-      return { candidates, floorDb: histogram.percentileDb(FLOOR_SHARE) };
+      return {
+        candidates,
+        floorDb: histogram.percentileDb(FLOOR_SHARE),
+        overheadFloorDb: overheadHistogram.percentileDb(FLOOR_SHARE),
+      };
     },
   };
 }

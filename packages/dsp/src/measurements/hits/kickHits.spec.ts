@@ -62,7 +62,7 @@ describe('the choice of kick hits', () => {
     overheadDb,
   });
   const chosen = (candidates: KickCandidate[], floorDb = -80) =>
-    selectKicks({ candidates, floorDb }, 48000).map((kick) => kick.atSample);
+    selectKicks({ candidates, floorDb, overheadFloorDb: -90 }, 48000).map((kick) => kick.atSample);
   const loud = [at(0, -10), at(48000, -11), at(96000, -10), at(144000, -12)];
 
   it('are three kicks among the bleed of many snares', () => {
@@ -72,13 +72,15 @@ describe('the choice of kick hits', () => {
       at(96000 + i * 57600, -44.8, -24.2),
       at(98500 + i * 57600, -45.1, -29.9),
     ]).flat();
-    expect(selectKicks({ candidates: [...kicks, ...bleed], floorDb: -85 }, 48000)).toEqual(kicks);
+    expect(
+      selectKicks({ candidates: [...kicks, ...bleed], floorDb: -85, overheadFloorDb: -90 }, 48000),
+    ).toEqual(kicks);
     // Two that are far louder than all others are knocks, not kicks.
     const hits = Array.from({ length: 16 }, (_, i) => at(96000 + i * 24000, -40));
     const knocks = [at(0, -10, -60), at(48000, -11, -60)];
-    expect(selectKicks({ candidates: [...knocks, ...hits], floorDb: -85 }, 48000)).toEqual(
-      expect.arrayContaining(hits),
-    );
+    expect(
+      selectKicks({ candidates: [...knocks, ...hits], floorDb: -85, overheadFloorDb: -90 }, 48000),
+    ).toEqual(expect.arrayContaining(hits));
   });
 
   it('keeps what stands 15 dB over the floor', () => {
@@ -99,6 +101,17 @@ describe('the choice of kick hits', () => {
       at(1200000, 3),
     ];
     expect(chosen(knock)).toHaveLength(17);
+  });
+
+  it('leaves out knocks on the stand, which the overhead doesn’t hear, also where there are few hits', () => {
+    const hits = Array.from({ length: 6 }, (_, i) => at(i * 48000, -30, -42));
+    const knocks = [at(300000, -2, -88), at(350000, -3, -87)];
+    expect(chosen([...hits, ...knocks])).toEqual(hits.map(({ atSample }) => atSample));
+    // Where the overhead hears none of them, loudness alone remains.
+    const unheard = hits.map((hit) => ({ ...hit, overheadDb: -89 }));
+    expect(chosen([...unheard, ...knocks])).toEqual([300000, 350000]);
+    // A hard kick is heard in both.
+    expect(chosen([...hits, at(300000, -2, -20)])).toContain(300000);
   });
 
   it('takes a softer hit only with the balance of a kick', () => {

@@ -1,7 +1,7 @@
 import { butterworthBand } from '../filters/butterworth';
 import { filtered } from '../filters/filterChain';
 
-/** The band of a beater's click, and the span whose rise is looked for (section 3). */
+/** The band of a beater's click, and the span whose rise is looked for (docs/measurements.md, 3). */
 const LOW_HZ = 150;
 const HIGH_HZ = 4000;
 const RISE_MS = 2;

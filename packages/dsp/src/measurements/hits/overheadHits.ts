@@ -28,7 +28,7 @@ export interface OverheadHitFinder {
   result(): OverheadHit[];
 }
 
-/** Bands and limits of section 3: over 12 dB a drum, under 0 dB a cymbal, between them told as mixed. */
+/** Bands and limits of docs/measurements.md, 3: over 12 dB a drum, under 0 dB a cymbal, between them told as mixed. */
 export const BODY_BAND = { lowHz: 100, highHz: 1000 };
 export const BRIGHT_BAND = { lowHz: 5000, highHz: 15000 };
 const DRUM_OVER_DB = 12;

@@ -25,7 +25,7 @@ const lateMs = (ms: number) =>
   found(kit.kick, delayedSamples(kit.overhead, Math.round(ms * MS)))?.overheadLateMs ?? null;
 
 describe('a file that starts late', () => {
-  // Wanted by section 4: offsets of 0.02–1.5 s within 5 ms. Of an overhead 2 ms away, so 18 and 22 come to 20 and 24.
+  // Wanted (measurements.md, 4): offsets of 0.02–1.5 s within 5 ms. Of an overhead 2 ms away, so 18 and 22 come to 20 and 24.
   it.each([22, -30, 47, 95, -140, 233, 320, -470, 611, 780, -905, 1130, 1290, 1480])(
     'is found to run %i ms late',
     (ms) => {

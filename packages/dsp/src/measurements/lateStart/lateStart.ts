@@ -12,7 +12,7 @@ export interface LateStartMeter {
 
 /** So much of a take is looked at, whatever its length: memory stays at 1 MB and a transform at 2^17. */
 const MOST_HOPS = 120_000;
-/** Section 4: 0.02–1.5 s. Nearer than that it may be the way the sound goes; further, a bar could be taken for a start. */
+/** measurements.md, 4: 0.02–1.5 s. Nearer than that it may be the way the sound goes; further, a bar could be taken for a start. */
 const LEAST_MS = 20;
 const MOST_MS = 1500;
 /** Seen: 0.50 and more at the true lag of a take; two files of different takes stay below or have rivals. */

@@ -26,6 +26,7 @@ export function notLinedUp(pair: PairFacts, lateStart: LateStartFacts): PairFact
       matchGainDb: agreement.matchGainDb,
       hitsUsed: agreement.hitsUsed,
       agreeingHits: 0,
+      hitsAlike: null,
       verdict: 'cannot-tell',
       sure: false,
       reason: 'late-start',

@@ -7,7 +7,7 @@ export interface Clipping {
   result(): TrackFacts['clipping'];
 }
 
-/** A run is at least this long; one or two samples at full scale may be chance (2-measurements.md section 2). */
+/** A run is at least this long; one or two samples at full scale may be chance (docs/measurements.md, 2). */
 const shortestRun = 3;
 /** "At full scale" for integers: within this many quantisation steps of ±1 (same source). */
 const stepsFromFullScale = 2;

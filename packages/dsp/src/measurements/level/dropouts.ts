@@ -12,7 +12,7 @@ export interface DropoutsOptions {
 }
 
 /*
- * Section 2 names zero runs and impossible jumps inside sound; the figures are our choice, and no real recording at hand
+ * Zero runs and impossible jumps inside sound (measurements.md, 2); the figures are our choice, and no real recording at hand
  * holds one by them.
  */
 /** An audio interface's buffer holds 16 samples at least and 8192 at most, which is 186 ms at 44.1 kHz. */

@@ -19,7 +19,7 @@ export interface FlatTopsOptions {
   readonly fullScale: number;
 }
 
-/** All of 2-measurements.md section 2: how long, how near the take's own peak, how loud and how often. */
+/** All of docs/measurements.md, 2: how long, how near the take's own peak, how loud and how often. */
 const shortestAt48 = 4;
 const nearPeak = 10 ** (-0.1 / 20);
 const quietestPeak = 10 ** (-30 / 20);
@@ -32,7 +32,7 @@ const likeNearPeak = 10 ** (-1 / 20);
 /**
  * The round top of a slow wave stands still too once it is quantised, for four samples and more at low frequencies. It is
  * left and entered by at most four steps in all (a parabola that stays within one step over four samples), a cut one by
- * far more. Our choice, beyond the rule of section 2.
+ * far more. Our choice.
  */
 const stepsOfRoundTop = 6;
 /** A float file may hold what once was 16-bit. */

@@ -20,7 +20,7 @@ interface Frame {
   readonly energy: number;
 }
 
-/** All four from 2-measurements.md section 2, tried there on real takes (error at most 0.7 dB). */
+/** All four of docs/measurements.md, 2; on real takes the error was at most 0.7 dB. */
 const frameS = 0.05;
 const framesInStretch = 20;
 const widestSpreadDb = 6;

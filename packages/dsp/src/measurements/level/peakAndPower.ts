@@ -17,7 +17,7 @@ export interface PeakAndPower {
  * Sample peak and where it first is, headroom, plain RMS, crest factor and mean of one microphone's whole file.
  *
  * dBFS is peak-referenced: a full-scale sine has an RMS of −3.01 dBFS. AES17's convention reads 3.01 dB higher
- * (check-values.md section 3). Silence has no level: null.
+ * (AES17-2015 3.12). Silence has no level: null.
  *
  * @param options.sampleRateHz - > 0
  * @returns a meter; `push` throws {SignalError} `not-finite`

@@ -25,7 +25,7 @@ function sine(options: {
 
 describe('peak and power', () => {
   it('reads a full-scale sine at −3.01 dBFS RMS and a square at 0, peak-referenced', () => {
-    // check-values.md section 3, peak convention (SoX stats, ffmpeg astats): −3.01 and 0.00, tolerance 0.01.
+    // Peak convention (SoX stats, ffmpeg astats): −3.01 and 0.00, tolerance 0.01.
     const tone = level(sine({ frequencyHz: 1000, seconds: 1, phase: Math.PI / 2 }));
     expect(tone.rmsDbfs).toBeCloseTo(-3.0103, 3);
     expect(tone.samplePeakDbfs).toBeCloseTo(0, 6);
@@ -37,7 +37,7 @@ describe('peak and power', () => {
   });
 
   it('reads a −20 dBFS peak tone at −23.01 dBFS RMS', () => {
-    // check-values.md section 8: tone A on a bin, A²/2.
+    // A tone of amplitude A has the power A²/2.
     expect(level(sine({ frequencyHz: 997, seconds: 1, amplitude: 0.1 })).rmsDbfs).toBeCloseTo(-23.0103, 3);
   });
 
@@ -50,7 +50,7 @@ describe('peak and power', () => {
     expect(level(samples).headroomDb).toBeCloseTo(6.0206, 4);
   });
 
-  // check-values.md section 11: SNR = 20·lg(2^N·√1.5), and what SciPy reads of an undithered 997 Hz tone; tolerance 0.25.
+  // SNR = 20·lg(2^N·√1.5) (Analog Devices MT-001), and what SciPy reads of an undithered 997 Hz tone; tolerance 0.25.
   it.each([
     [8, 49.95],
     [16, 98.07],

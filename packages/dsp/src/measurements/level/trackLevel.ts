@@ -41,7 +41,7 @@ export function levelBorder(sampleRateHz: number): Border {
  * Every level of one microphone that needs no hits, in one pass.
  *
  * @throws {SignalError} a rate or a step that can't be
- * @see 2-measurements.md section 2, whose names and definitions these are
+ * @see docs/measurements.md, 2
  * @example
  * const level = createTrackLevel({ sampleRateHz: 48000, quantisationStep: null });
  * level.push(Float32Array.from({ length: 48000 }, (_, n) => 0.5 * Math.sin((2 * Math.PI * n) / 48)));

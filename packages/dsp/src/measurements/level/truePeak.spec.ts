@@ -41,7 +41,7 @@ function tone(options: {
 
 describe('the true peak', () => {
   // EBU Tech 3341 (November 2023), Table 1, cases 15–19: all +0.2 / −0.4 dB. The last column is what the filter of
-  // BS.1770-5 reads, computed with SciPy (check-values.md section 2); 0.005 for the fades.
+  // BS.1770-5 reads, computed with SciPy; 0.005 for the fades.
   it.each([
     ['15', 4, 0.5, 0, -6, -6.021],
     ['16', 4, 0.5, 45, -6, -5.976],

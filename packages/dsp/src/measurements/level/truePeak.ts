@@ -8,7 +8,7 @@ export interface TruePeak {
   result(): { readonly truePeakDbtp: number | null };
 }
 
-/** From these rates on a take is interpolated 2 times, and not at all (BS.1770-5 Annex 2, and section 2 of the design). */
+/** From these rates on a take is interpolated 2 times, and not at all (BS.1770-5 Annex 2; docs/measurements.md, 2). */
 const twofoldFromHz = 96_000;
 const singleFromHz = 192_000;
 /** Samples that are looked at together within a span; short enough that one hit doesn't drag its decay along. Our choice, for speed. */

@@ -15,7 +15,7 @@ const gainDb = (sections: readonly Biquad[], frequencyHz: number, sampleRateHz: 
 
 describe('the K-weighting', () => {
   // 48 kHz: BS.1770-5 Annex 1, Tables 1 and 2, printed with 14 decimals. 44.1 and 96 kHz: the same response through the
-  // bilinear transform, the low cut's numerator scaled to it (check-values.md 1.3, computed with SciPy).
+  // bilinear transform, the low cut's numerator scaled to it (libebur128's parametric form, computed with SciPy).
   it.each([
     [
       48000,
@@ -40,7 +40,7 @@ describe('the K-weighting', () => {
     [lowCut.a1, lowCut.a2].forEach((value, i) => expect(value).toBeCloseTo(poles[i], 11));
   });
 
-  // check-values 1.3, gain of the tables; "same frequency response" at other rates, ±0.01 dB suggested there.
+  // Gain of BS.1770-5's tables, "the same frequency response" at other rates; ±0.01 dB is our reading of same.
   const response = [
     [20, -13.2754],
     [31.5, -7.79],

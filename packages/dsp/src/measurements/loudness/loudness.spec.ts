@@ -38,7 +38,7 @@ describe('the integrated loudness', () => {
   });
 
   // EBU Tech 3341 (November 2023), Table 1: stereo in phase, each channel at the level named, −23 or −33 ±0.1. One channel
-  // of the two carries half the power: 3.0103 dB less. The last column is the SciPy reference (check-values.md section 2).
+  // of the two carries half the power: 3.0103 dB less. The last column was computed with SciPy.
   it.each([
     ['1', [[20, -23]], -23, -22.9933],
     ['2', [[20, -33]], -33, -32.9933],

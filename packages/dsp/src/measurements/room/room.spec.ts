@@ -16,7 +16,7 @@ describe('the modes of a room', () => {
   const modes = roomModes({ size, speedOfSoundMPerS: HANDBOOK_SPEED, highestHz: 142 });
   const hz = (name: string): number => modes.find(({ order }) => order.join('') === name)?.frequencyHz ?? NaN;
 
-  // Ballou (ed.), Handbook for Sound Engineers, 4th ed., Table 6-4, p. 130; 110 and 111 computed (check-values 9.1).
+  // Ballou (ed.), Handbook for Sound Engineers, 4th ed., Table 6-4, p. 130; 110 and 111 computed from the formula.
   it.each([
     ['100', 35.31],
     ['010', 47.08],
@@ -110,7 +110,7 @@ describe('modes that lie close together', () => {
 });
 
 describe('the Schroeder frequency', () => {
-  // check-values 9.2, computed from the formula.
+  // Computed from the formula, 2000·√(T/V).
   it.each([
     [0.54, 105.565, 143.04],
     [0.4, 50, 178.89],

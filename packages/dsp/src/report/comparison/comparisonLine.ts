@@ -13,7 +13,7 @@ export interface ComparisonLineOptions {
 }
 
 const SENTENCES = 2;
-/** Low end worth mentioning between two takes (section 8). */
+/** Low end worth mentioning between two takes (docs/measurements.md, 8). */
 const LOW_END_STEP_DB = 0.5;
 
 /**

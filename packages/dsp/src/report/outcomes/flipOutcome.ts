@@ -3,7 +3,7 @@ import type { AgreementReport } from '../reportTypes';
 import { said, type OutcomeRule, type OutcomeSaid } from './outcomeRule';
 import { seenFlip } from './seenFlip';
 
-/** Low end worth mentioning between two takes (2-measurements, section 8). */
+/** Low end worth mentioning between two takes (docs/measurements.md, 8). */
 const LOW_END_STEP_DB = 0.5;
 
 /**

@@ -5,7 +5,7 @@ import type { TrackReport } from '../reportTypes';
 
 type Role = 'kick' | 'overhead';
 
-/** A change of peaks worth mentioning between two takes (2-measurements, section 8). */
+/** A change of peaks worth mentioning between two takes (docs/measurements.md, 8). */
 const PEAK_STEP_DB = 1;
 
 /**

@@ -36,7 +36,7 @@ export function fmt(fields: {
   return chunk('fmt ', new Uint8Array(view.buffer));
 }
 
-/** GUID bytes of PCM sound, check-values.md section 10. */
+/** GUID bytes of PCM sound: KSDATAFORMAT_SUBTYPE_PCM of Microsoft's ksmedia.h, as ffmpeg writes it. */
 export const pcmGuid = [1, 0, 0, 0, 0, 0, 0x10, 0, 0x80, 0, 0, 0xaa, 0, 0x38, 0x9b, 0x71];
 
 /** @returns a file of these chunks behind a RIFF (or other) head */

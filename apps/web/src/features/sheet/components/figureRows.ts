@@ -228,6 +228,12 @@ function pairRows({ arrival, agreement, lateStart }: ReportResponse, settings: U
       `${agreement.agreeingHits} of ${agreement.hitsUsed}`,
       'Hits whose own low end says the same as all of them together. Below three in four nothing is told.',
     ),
+    one(
+      'Kick hits alike',
+      '0–1',
+      orMissing(agreement.hitsAlike, 2),
+      'Coherence over the hits, 30–150 Hz. Files of two passes reach about 0.9 by the root of their number.',
+    ),
   ];
 }
 
