@@ -151,6 +151,21 @@ describe('comparing two takes', () => {
     ]);
   });
 
+  it('says in which rooms they were recorded, and when that was the same', async () => {
+    const roomOf = async (name: string) =>
+      (await juno.post(paths.rooms, { name }).expect(201)).body as { id: string };
+    const [garage, hall] = [await roomOf('the garage'), await roomOf('the hall')];
+    const [one, two, three] = [
+      await takeOf(hot, { roomId: garage.id }),
+      await takeOf(hot, { roomId: hall.id }),
+      await takeOf(hot, { roomId: garage.id }),
+    ];
+    expect((await compared(one, two)).differed).toEqual([
+      { what: 'room', before: 'the garage', after: 'the hall' },
+    ]);
+    expect(await compared(one, three)).toMatchObject({ differed: [], same: 'Room of both: the garage.' });
+  });
+
   it('sets what is written down of both setups beside each other, and takes a flip from there', async () => {
     const setupOf = async (fields: UpdateSetupRequest) =>
       (await juno.post(paths.setups, fields).expect(201)).body as SetupResponse;

@@ -201,18 +201,39 @@ describe('a link', () => {
       }
   });
 
-  it('goes with what it names', async () => {
-    const { id } = tryOutResponse.parse(
-      (
-        await juno.post(paths.tryOuts, {
-          subject: 'overhead-height',
-          unit: 'cm',
-          places: [{ takeId: takes.low.id }, { takeId: takes.high.id }],
-        })
-      ).body,
-    );
-    const share = await linkTo(juno, { kind: 'try-out', tryOutId: id });
+  it('goes with the try-out it names, and with each take that is taken out; both come back', async () => {
+    const about = {
+      subject: 'overhead-height',
+      unit: 'cm',
+      places: [{ takeId: takes.low.id }, { takeId: takes.high.id }],
+    };
+    const { id, places } = tryOutResponse.parse((await juno.post(paths.tryOuts, about)).body);
+    const guest = new Browser(test);
+    await openedBy(guest, await linkTo(juno, { kind: 'try-out', tryOutId: id }));
+    const statuses = async () =>
+      Promise.all(
+        [paths.tryOut(id), paths.listen(takes.low.id), paths.listen(takes.high.id)].map(
+          async (path) => (await guest.get(path)).status,
+        ),
+      );
+    expect(await statuses()).toEqual([200, 200, 200]);
+    await juno.delete(paths.tryOutPlace(id, places[0].id)).expect(200);
+    expect(await statuses()).toEqual([200, 404, 200]);
+    await juno.post(paths.restoreTryOutPlace(id, places[0].id)).expect(200);
     await juno.delete(paths.tryOut(id)).expect(204);
-    expect(await test.em().count(Share, { id: share.id })).toBe(0);
+    expect(await statuses()).toEqual([404, 404, 404]);
+    await juno.post(paths.shares, { subject: { kind: 'try-out', tryOutId: id } }).expect(404);
+    await juno.post(paths.restoreTryOut(id)).expect(200);
+    expect(await statuses()).toEqual([200, 200, 200]);
+  });
+
+  it('to a try-out doesn’t name the setup its winner was made to', async () => {
+    const body = { winnerPlaceId: tryOut.places[0].id, reason: '' };
+    const kept = await juno.post(paths.tryOutSetup(tryOut.id), body).expect(201);
+    expect(tryOutResponse.parse(kept.body).winnerSetup).not.toBeNull();
+    const guest = new Browser(test);
+    await openedBy(guest, await linkTo(juno, subjects['try-out']));
+    expect((await guest.get(paths.tryOut(tryOut.id)).expect(200)).body).toMatchObject({ winnerSetup: null });
+    await juno.delete(paths.tryOutSetup(tryOut.id)).expect(200);
   });
 });

@@ -1,8 +1,10 @@
 import { randomUUID } from 'node:crypto';
 import {
   CreateTryOutRequest,
+  listSetupsResponse,
   listTryOutsResponse,
   paths,
+  setupResponse,
   TakeResponse,
   tryOutRankingResponse,
   TryOutResponse,
@@ -92,6 +94,124 @@ describe('try-outs', () => {
     await juno.get(paths.take(takes[1].id)).expect(200);
   });
 
+  it('has a place back where it stood, and itself, when it is undone', async () => {
+    const { id, places } = await made();
+    await juno.patch(paths.tryOut(id), { winnerPlaceId: places[0].id }).expect(200);
+    await juno.delete(paths.tryOutPlace(id, places[0].id)).expect(200);
+    const back = await juno.post(paths.restoreTryOutPlace(id, places[0].id)).expect(200);
+    expect(back.body).toMatchObject({ winnerPlaceId: places[0].id, places });
+    await juno.delete(paths.tryOut(id)).expect(204);
+    expect((await juno.get(paths.tryOuts).expect(200)).body).not.toMatchObject({
+      items: expect.arrayContaining([expect.objectContaining({ id })]) as unknown,
+    });
+    await juno.delete(paths.tryOut(id)).expect(404);
+    expect((await juno.post(paths.restoreTryOut(id)).expect(200)).body).toMatchObject({ id, places });
+  });
+
+  it('takes more takes in at its end, none twice', async () => {
+    const { id, places } = await made();
+    const [more, later] = [await juno.makeTake({ title: 'Higher' }), randomUUID()];
+    const added = await juno
+      .post(paths.tryOutPlaces(id), { places: [{ takeId: more.id, position: 110 }, { uploadKey: later }] })
+      .expect(201);
+    const now = tryOutResponse.parse(added.body).places;
+    expect(now.map(({ position }) => position)).toEqual([90, 100, 110, null]);
+    expect(now[2].take?.title).toBe('Higher');
+    const twice = await juno.post(paths.tryOutPlaces(id), { places: [{ takeId: more.id }] }).expect(400);
+    expect(twice.body).toMatchObject({ message: 'A take stands in a try-out only once.' });
+    await juno.post(paths.tryOutPlaces(id), { places: [] }).expect(400);
+    await juno.delete(paths.tryOutPlace(id, places[0].id)).expect(200);
+    const again = await juno
+      .post(paths.tryOutPlaces(id), { places: [{ takeId: takes[0].id, position: 95 }] })
+      .expect(201);
+    expect(tryOutResponse.parse(again.body).places.map(({ position }) => position)).toEqual([
+      100,
+      110,
+      null,
+      95,
+    ]);
+    const many = Array.from({ length: 21 }, () => ({ uploadKey: randomUUID() }));
+    const full = await juno.post(paths.tryOutPlaces(id), { places: many }).expect(400);
+    expect(full.body).toMatchObject({ message: 'A try-out has at most 24 takes.' });
+  });
+
+  describe('its winner', () => {
+    const current = async (who: Person) =>
+      listSetupsResponse.parse((await who.get(paths.setups).expect(200)).body).currentId;
+    const newSetup = async (who: Person, body: object) =>
+      setupResponse.parse((await who.post(paths.setups, body).expect(201)).body);
+    const setupOf = async (who: Person, id: string) =>
+      setupResponse.parse((await who.get(paths.setup(id)).expect(200)).body);
+
+    it('becomes the setup that the next upload begins with, and can be taken back', async () => {
+      const high = await newSetup(juno, { name: 'high', overhead: { aboveSnareCm: 90, tiltedDeg: 10 } });
+      const other = await newSetup(juno, { name: 'other' });
+      const recorded = await juno.makeTake({ setupId: high.id });
+      await juno.makeTake({ setupId: other.id });
+      expect(await current(juno)).toBe(other.id);
+      const places = [
+        { takeId: recorded.id, position: 112 },
+        { takeId: takes[0].id, position: 90 },
+      ];
+      const { id, places: made2 } = await made({ places });
+      const body = { winnerPlaceId: made2[0].id, reason: 'Fullest.' };
+      const kept = tryOutResponse.parse((await juno.post(paths.tryOutSetup(id), body).expect(201)).body);
+      expect(kept).toMatchObject({
+        ...body,
+        winnerSetup: { name: 'high, overhead 112 cm', isCurrent: true, copiedFrom: { id: high.id } },
+      });
+      const madeId = kept.winnerSetup?.id ?? '';
+      expect(await setupOf(juno, madeId)).toMatchObject({ overhead: { aboveSnareCm: 112, tiltedDeg: 10 } });
+      expect(await setupOf(juno, high.id)).toMatchObject({ overhead: { aboveSnareCm: 90 } });
+      expect(await current(juno)).toBe(madeId);
+
+      const undone = await juno.delete(paths.tryOutSetup(id)).expect(200);
+      expect(undone.body).toMatchObject({ winnerSetup: null, winnerPlaceId: made2[0].id });
+      expect(await current(juno)).toBe(other.id);
+      await juno.get(paths.setup(madeId)).expect(404);
+      const twice = await juno.delete(paths.tryOutSetup(id)).expect(409);
+      expect(twice.body).toMatchObject({ message: 'No setup was made of this try-out’s winner.' });
+    });
+
+    it('starts from how things stood where its take has no setup', async () => {
+      const mia = await joined(test, 'Mia');
+      const [one, two] = [await mia.makeTake(), await mia.makeTake()];
+      const places = [
+        { takeId: one.id, label: 'felt' },
+        { takeId: two.id, label: 'wood' },
+      ];
+      const request = { subject: 'other', differs: 'the beater', unit: 'label', places };
+      const tryOut = tryOutResponse.parse((await mia.post(paths.tryOuts, request).expect(201)).body);
+      const win = async (index: number) => {
+        const answer = await mia.post(paths.tryOutSetup(tryOut.id), {
+          winnerPlaceId: tryOut.places[index].id,
+          reason: '',
+        });
+        return tryOutResponse.parse(answer.body).winnerSetup?.id ?? '';
+      };
+      const first = await win(0);
+      expect(await setupOf(mia, first)).toMatchObject({ rest: 'the beater: felt', copiedFrom: null });
+      const second = await win(1);
+      expect(await setupOf(mia, second)).toMatchObject({ rest: 'the beater: wood', copiedFrom: null });
+      await mia.get(paths.setup(first)).expect(404);
+      await mia.makeTake({ setupId: second });
+      await mia.delete(paths.tryOutSetup(tryOut.id)).expect(200);
+      expect(await setupOf(mia, second)).toMatchObject({ takeCount: 1 });
+    });
+
+    it('is refused without a position, and for a place of another try-out', async () => {
+      const { id, places } = await made({ places: takes.map(({ id: takeId }) => ({ takeId })) });
+      const refused = await juno
+        .post(paths.tryOutSetup(id), { winnerPlaceId: places[0].id, reason: '' })
+        .expect(400);
+      expect(refused.body).toMatchObject({ message: expect.stringContaining('Write down where') as unknown });
+      const other = await made();
+      const foreign = { winnerPlaceId: other.places[0].id, reason: '' };
+      await juno.post(paths.tryOutSetup(id), foreign).expect(404);
+      await juno.post(paths.tryOutSetup(id), {}).expect(400);
+    });
+  });
+
   it('ranks what is measured, by the measure and the polarity asked for', async () => {
     const made3 = [await juno.makeTake(), await juno.makeTake(), await juno.makeTake()];
     const waiting = await juno.makeTake();
@@ -156,7 +276,12 @@ describe('try-outs', () => {
     await oda.patch(paths.tryOut(id), { reason: 'mine' }).expect(404);
     await oda.patch(paths.tryOutPlace(id, places[0].id), { position: 1 }).expect(404);
     await oda.delete(paths.tryOutPlace(id, places[0].id)).expect(404);
+    await oda.post(paths.restoreTryOutPlace(id, places[0].id)).expect(404);
+    await oda.post(paths.tryOutPlaces(id), { places: [{ uploadKey: randomUUID() }] }).expect(404);
+    await oda.post(paths.tryOutSetup(id), { winnerPlaceId: places[0].id, reason: '' }).expect(404);
+    await oda.delete(paths.tryOutSetup(id)).expect(404);
     await oda.delete(paths.tryOut(id)).expect(404);
+    await oda.post(paths.restoreTryOut(id)).expect(404);
     expect((await oda.get(paths.tryOuts).expect(200)).body).toEqual({ items: [] });
     await juno.get(paths.tryOut('nonsense')).expect(404);
   });
@@ -171,7 +296,12 @@ describe('try-outs', () => {
     await nobody.patch(paths.tryOut(id), {}).expect(401);
     await nobody.patch(paths.tryOutPlace(id, places[0].id), {}).expect(401);
     await nobody.delete(paths.tryOutPlace(id, places[0].id)).expect(401);
+    await nobody.post(paths.restoreTryOutPlace(id, places[0].id)).expect(401);
+    await nobody.post(paths.tryOutPlaces(id), { places: [] }).expect(401);
+    await nobody.post(paths.tryOutSetup(id), {}).expect(401);
+    await nobody.delete(paths.tryOutSetup(id)).expect(401);
     await nobody.delete(paths.tryOut(id)).expect(401);
+    await nobody.post(paths.restoreTryOut(id)).expect(401);
   });
 });
 

@@ -110,8 +110,22 @@ test.describe('the demo’s try-out', () => {
     await page.getByRole('button', { name: 'B is best' }).click();
     await page.getByRole('radio', { name: /^112 cm/ }).check();
     await page.getByLabel('Why 112 cm wins, in your words').fill('Fullest kick.');
-    await page.getByRole('button', { name: 'Keep 112 cm as the winner' }).click();
-    await expect(page.getByText('112 cm is kept as the winner.')).toBeVisible();
+    await page.getByRole('button', { name: 'Make 112 cm the setup' }).click();
+    await expect(page.getByText('112 cm is the setup now.')).toBeVisible();
     await expectReadable(page, 'a try-out with a winner');
+    await page.getByRole('link', { name: /overhead 112 cm$/ }).click();
+    await expect(page.getByLabel('Above the snare')).toHaveValue('112');
+    await page.goBack();
+    await page.getByRole('button', { name: 'Undo' }).click();
+    await expect(page.getByRole('button', { name: 'Make 112 cm the setup' })).toBeVisible();
+    await page.getByRole('button', { name: 'change its takes' }).click();
+    await expectReadable(page, 'a try-out whose takes are being changed');
+    await page
+      .getByRole('button', { name: /^Take out/ })
+      .first()
+      .click();
+    await expect(page.getByRole('button', { name: /^Take out/ })).toHaveCount(4);
+    await page.getByRole('button', { name: 'Undo' }).click();
+    await expect(page.getByRole('button', { name: /^Take out/ })).toHaveCount(5);
   });
 });

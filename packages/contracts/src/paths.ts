@@ -85,7 +85,13 @@ export const paths = {
   takeFile: (takeId: string, fileId: string) => `/api/takes/${takeId}/files/${fileId}`,
   tryOuts: '/api/tryouts',
   tryOut: (tryOutId: string) => `/api/tryouts/${tryOutId}`,
+  restoreTryOut: (tryOutId: string) => `/api/tryouts/${tryOutId}/restore`,
+  tryOutPlaces: (tryOutId: string) => `/api/tryouts/${tryOutId}/places`,
+  restoreTryOutPlace: (tryOutId: string, placeId: string) =>
+    `/api/tryouts/${tryOutId}/places/${placeId}/restore`,
   tryOutPlace: (tryOutId: string, placeId: string) => `/api/tryouts/${tryOutId}/places/${placeId}`,
+  /** POST makes the winner the setup, DELETE undoes it. */
+  tryOutSetup: (tryOutId: string) => `/api/tryouts/${tryOutId}/setup`,
   tryOutRanking: (tryOutId: string) => `/api/tryouts/${tryOutId}/ranking`,
   health: '/api/health',
   docs: '/api/docs',

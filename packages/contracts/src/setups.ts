@@ -121,7 +121,11 @@ export const setupListItem = setupResponse
 export type SetupListItem = z.infer<typeof setupListItem>;
 
 /** The one recorded with last comes first, then the newest. */
-export const listSetupsResponse = z.object({ items: z.array(setupListItem) });
+export const listSetupsResponse = z.object({
+  items: z.array(setupListItem),
+  /** How things stand now: the one of the newest upload, or what a try-out's winner made since. */
+  currentId: z.uuid().nullable(),
+});
 export type ListSetupsResponse = z.infer<typeof listSetupsResponse>;
 
 /** Far more than anybody keeps apart; common practice, no source. */

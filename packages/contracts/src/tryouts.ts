@@ -77,6 +77,16 @@ export const updateTryOutRequest = z.object({
 });
 export type UpdateTryOutRequest = z.input<typeof updateTryOutRequest>;
 
+/** The winner becomes how things stand: its setup, copied with what was varied. */
+export const makeTryOutSetupRequest = z.object({ winnerPlaceId: z.uuid(), reason });
+export type MakeTryOutSetupRequest = z.input<typeof makeTryOutSetupRequest>;
+
+/** More takes of a try-out that is there. */
+export const addTryOutPlacesRequest = z.object({
+  places: z.array(tryOutPlaceRequest).min(1, 'Name at least one take.').max(tryOutLimits.mostTakes),
+});
+export type AddTryOutPlacesRequest = z.input<typeof addTryOutPlacesRequest>;
+
 export const updateTryOutPlaceRequest = z.object({
   position: position.optional(),
   label: label.optional(),
@@ -103,6 +113,15 @@ export const tryOutPlaceResponse = z.object({
 });
 export type TryOutPlaceResponse = z.infer<typeof tryOutPlaceResponse>;
 
+const winnerSetup = z.object({
+  id: z.uuid(),
+  name: z.string(),
+  /** The setup it is a copy of. */
+  copiedFrom: z.object({ id: z.uuid(), name: z.string() }).nullable(),
+  /** Whether the next upload begins with it. */
+  isCurrent: z.boolean(),
+});
+
 export const tryOutResponse = z.object({
   id: z.uuid(),
   createdAt: z.iso.datetime(),
@@ -113,12 +132,14 @@ export const tryOutResponse = z.object({
   reason: z.string(),
   winnerPlaceId: z.uuid().nullable(),
   currentPlaceId: z.uuid().nullable(),
+  /** What the winner was made to; null before, and after it was undone. */
+  winnerSetup: winnerSetup.nullable(),
   places: z.array(tryOutPlaceResponse),
 });
 export type TryOutResponse = z.infer<typeof tryOutResponse>;
 
 export const tryOutListItem = tryOutResponse
-  .omit({ places: true, reason: true })
+  .omit({ places: true, reason: true, winnerSetup: true })
   .extend({ takeCount: z.int().nonnegative(), winner: tryOutPlaceResponse.nullable() });
 export type TryOutListItem = z.infer<typeof tryOutListItem>;
 

@@ -43,7 +43,7 @@ export class AccessService {
 
   async tryOut(asker: Asker, tryOutId: string): Promise<TakeRights> {
     if (!validate(tryOutId)) return nothing;
-    const tryOut = await this.em.findOne(TryOut, { id: tryOutId });
+    const tryOut = await this.em.findOne(TryOut, { id: tryOutId, deletedAt: null });
     return this.ownOrSent(asker, tryOut, { tryOut: tryOutId });
   }
 

@@ -19,9 +19,9 @@ export const isSheet = ({ take, otherTake }: Share): boolean => Boolean(take && 
 /** Which of these try-outs and rooms speak of the take: by its place, and by the log's changes. */
 const speakOfTake = `
   select p.try_out_id as id from try_out_place p
-    join try_out o on o.id = p.try_out_id
+    join try_out o on o.id = p.try_out_id and o.deleted_at is null
     join take t on t.owner_id = o.owner_id and t.upload_key = p.upload_key
-  where t.id = ? and p.try_out_id = any(?::uuid[])
+  where t.id = ? and p.removed_at is null and p.try_out_id = any(?::uuid[])
   union
   select c.room_id from room_change_take ct join room_change c on c.id = ct.change_id
   where ct.take_id = ? and c.room_id = any(?::uuid[])`;

@@ -17,7 +17,7 @@ export interface Between {
 }
 
 interface BetweenParts {
-  /** With their setups. */
+  /** With their setups and rooms. */
   before: Take;
   after: Take;
   rights: TakeRights;
@@ -30,22 +30,32 @@ export function between({ before, after, rights, lengthUnit }: BetweenParts): Be
   const noted = follower?.doneActions ?? [];
   const { done, leftAlone } = doneWords(noted);
   const setups = setupsBetween(before, after, lengthUnit);
+  const [roomBefore, roomAfter] = [roomOf(before), roomOf(after)];
+  const room = { what: 'room', before: roomBefore, after: roomAfter };
+  const sameRoom = roomBefore && before.room?.id === after.room?.id && `Room of both: ${roomBefore}.`;
   const doneOf = (take: Take) => (take === follower ? done.join(', ') : '');
   return {
     doneActions: follower === after ? noted : [],
     flip: setups.flip || noted.includes('flip-overhead'),
     gain: before.id === after.id ? 'same' : gainBetween(noted, setups.gain),
     differed: [
+      ...(rights.own ? [room] : []),
       ...(rights.own ? setups.rows : []),
       { what: 'done in between', before: doneOf(before), after: doneOf(after) },
       ...(rights.own ? [{ what: 'tags', before: before.tags.join(', '), after: after.tags.join(', ') }] : []),
       { what: 'note', before: before.note, after: after.note },
     ].filter((row) => row.before !== row.after),
-    same: [rights.own && setups.same, leftAlone.length > 0 && `Left alone, as noted: ${listed(leftAlone)}.`]
+    same: [
+      rights.own && sameRoom,
+      rights.own && setups.same,
+      leftAlone.length > 0 && `Left alone, as noted: ${listed(leftAlone)}.`,
+    ]
       .filter(Boolean)
       .join(' '),
   };
 }
+
+const roomOf = ({ room }: Take) => room?.unwrap().name ?? '';
 
 interface SetupsBetween {
   rows: DifferedRow[];

@@ -7,6 +7,8 @@ import { Throttle } from '../throttle/entities/throttle.entity';
 import { StoreRepair } from './store-repair';
 import { AccountPurge } from './account-purge';
 import { ExportPurge } from './export-purge';
+import { restorableSince } from '../takes/deleted-takes';
+import { TryOut } from '../tryouts/entities/try-out.entity';
 import { TakePurge } from './take-purge';
 
 const hourMs = 60 * 60 * 1000;
@@ -46,6 +48,7 @@ export class HousekeepingService implements OnApplicationBootstrap, BeforeApplic
     await em.nativeDelete(OneTimeToken, { expiresAt: { $lt: new Date(now.getTime() - dayMs) } });
     await em.nativeDelete(Session, { expiresAt: { $lt: new Date(now.getTime() - endedSessionKeptMs) } });
     await purgeNotes(em, now);
+    await em.nativeDelete(TryOut, { deletedAt: { $lt: restorableSince(now) } });
     await this.purge.run(now);
     await this.exports.run(now);
     await this.accounts.run(now);

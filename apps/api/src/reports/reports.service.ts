@@ -63,7 +63,7 @@ export class ReportsService {
   async getMeasured(takeId: string): Promise<MeasuredTake> {
     const { take, report, owner } = await this.getReport({ takeId });
     const spectrum = await this.spectrumOf(report);
-    await this.em.populate(take, ['setup']);
+    await this.em.populate(take, ['setup', 'room']);
     return {
       take,
       owner,

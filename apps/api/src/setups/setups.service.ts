@@ -21,13 +21,17 @@ export class SetupsService {
   ) {}
 
   async list({ user }: Viewer): Promise<ListSetupsResponse> {
-    const [setups, uses] = await Promise.all([
+    const [setups, uses, { currentSetupId }] = await Promise.all([
       this.em.find(Setup, { owner: user.id }, { orderBy: { id: 'desc' } }),
       this.uses.ofAll(user.id),
+      this.em.findOneOrFail(User, user.id),
     ]);
     const lastUsed = ({ id }: Setup) => uses.get(id)?.lastUsedAt.getTime() ?? 0;
     const sorted = [...setups].sort((one, other) => lastUsed(other) - lastUsed(one));
-    return { items: sorted.map((setup) => setupListItemOf(setup, uses.get(setup.id))) };
+    return {
+      items: sorted.map((setup) => setupListItemOf(setup, uses.get(setup.id))),
+      currentId: setups.find(({ id }) => id === currentSetupId)?.id ?? null,
+    };
   }
 
   async get(viewer: Viewer, setupId: string): Promise<SetupResponse> {

@@ -92,7 +92,7 @@ export class SharesService {
     const { take, otherTake, tryOut, room } = subjectColumns(subject);
     for (const id of [take, otherTake])
       if (id && !(await this.em.count(Take, { id, owner, deletedAt: null }))) throw notFound();
-    if (tryOut && !(await this.em.count(TryOut, { id: tryOut, owner }))) throw notFound();
+    if (tryOut && !(await this.em.count(TryOut, { id: tryOut, owner, deletedAt: null }))) throw notFound();
     if (room && !(await this.em.count(Room, { id: room, owner }))) throw notFound();
   }
 }

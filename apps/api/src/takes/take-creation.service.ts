@@ -104,6 +104,8 @@ export class TakeCreationService {
       });
       const earlier = await findUploaded(em, viewer, request.uploadKey);
       if (earlier) return { take: earlier, isNew: false };
+      const setup = await findUsedSetup(em, owner.id, request.setupId);
+      if (setup) owner.currentSetupId = setup.id;
       const take = em.create(Take, {
         id: takeId,
         owner,
@@ -116,7 +118,7 @@ export class TakeCreationService {
         followsTake: await findFollowed(em, viewer, request),
         room: await findRoom(em, viewer.user.id, request.roomId),
         doneActions: request.doneActions,
-        setup: await findUsedSetup(em, owner.id, request.setupId),
+        setup,
       });
       const fileRows = files.map((file, position) =>
         em.create(TakeFile, { take, position, ...fileColumns(file) }),

@@ -5,15 +5,19 @@ import { Access } from '../access/access.decorator';
 import { TakeRights } from '../access/take-rights';
 import { CurrentRights, CurrentViewer, Viewer } from '../access/viewer';
 import {
+  AddTryOutPlacesDto,
   CreateTryOutDto,
   ListTryOutsResponseDto,
+  MakeTryOutSetupDto,
   TryOutRankingDto,
   TryOutRankingResponseDto,
   TryOutResponseDto,
   UpdateTryOutDto,
   UpdateTryOutPlaceDto,
 } from './dto/try-out.dto';
+import { TryOutPlacesService } from './try-out-places.service';
 import { TryOutRankingService } from './try-out-ranking.service';
+import { TryOutSetupService } from './try-out-setup.service';
 import { TryOutsService } from './try-outs.service';
 
 /** What changes one is its owner's alone: the service answers 404 to everybody else. */
@@ -22,7 +26,9 @@ import { TryOutsService } from './try-outs.service';
 export class TryOutsController {
   constructor(
     private readonly tryOuts: TryOutsService,
+    private readonly places: TryOutPlacesService,
     private readonly rankings: TryOutRankingService,
+    private readonly winners: TryOutSetupService,
   ) {}
 
   @Get()
@@ -61,6 +67,21 @@ export class TryOutsController {
     return this.tryOuts.remove(viewer, id);
   }
 
+  @Post(':id/restore')
+  @Access.signedIn()
+  @HttpCode(200)
+  @ZodResponse({ status: 200, type: TryOutResponseDto })
+  restore(@CurrentViewer() viewer: Viewer, @Param('id') id: string) {
+    return this.tryOuts.restore(viewer, id);
+  }
+
+  @Post(':id/places')
+  @Access.signedIn()
+  @ZodResponse({ status: 201, type: TryOutResponseDto })
+  addPlaces(@CurrentViewer() viewer: Viewer, @Param('id') id: string, @Body() body: AddTryOutPlacesDto) {
+    return this.places.add(viewer, id, body);
+  }
+
   @Patch(':id/places/:placeId')
   @Access.signedIn()
   @ZodResponse({ status: 200, type: TryOutResponseDto })
@@ -70,7 +91,7 @@ export class TryOutsController {
     @Param('placeId') placeId: string,
     @Body() body: UpdateTryOutPlaceDto,
   ) {
-    return this.tryOuts.updatePlace(viewer, { id, placeId }, body);
+    return this.places.update(viewer, { id, placeId }, body);
   }
 
   /** The take stays among the takes. */
@@ -78,7 +99,31 @@ export class TryOutsController {
   @Access.signedIn()
   @ZodResponse({ status: 200, type: TryOutResponseDto })
   removePlace(@CurrentViewer() viewer: Viewer, @Param('id') id: string, @Param('placeId') placeId: string) {
-    return this.tryOuts.removePlace(viewer, { id, placeId });
+    return this.places.remove(viewer, { id, placeId });
+  }
+
+  @Post(':id/places/:placeId/restore')
+  @Access.signedIn()
+  @HttpCode(200)
+  @ZodResponse({ status: 200, type: TryOutResponseDto })
+  restorePlace(@CurrentViewer() viewer: Viewer, @Param('id') id: string, @Param('placeId') placeId: string) {
+    return this.places.restore(viewer, { id, placeId });
+  }
+
+  /** Copies the winner's setup with what was varied; the next upload begins with it. */
+  @Post(':id/setup')
+  @Access.signedIn()
+  @ZodResponse({ status: 201, type: TryOutResponseDto })
+  makeSetup(@CurrentViewer() viewer: Viewer, @Param('id') id: string, @Body() body: MakeTryOutSetupDto) {
+    return this.winners.make(viewer, id, body);
+  }
+
+  /** The setup that stood before stands again. */
+  @Delete(':id/setup')
+  @Access.signedIn()
+  @ZodResponse({ status: 200, type: TryOutResponseDto })
+  undoSetup(@CurrentViewer() viewer: Viewer, @Param('id') id: string) {
+    return this.winners.undo(viewer, id);
   }
 
   @Get(':id/ranking')

@@ -47,8 +47,26 @@ function headOf(tryOut: TryOut, filled: FilledPlace[]) {
   };
 }
 
+/** @param tryOut - with its owner and the setup its winner was made to */
 export function tryOutResponseOf(tryOut: TryOut, filled: FilledPlace[]): TryOutResponse {
-  return { ...headOf(tryOut, filled), reason: tryOut.reason, places: filled.map(placeResponseOf) };
+  return {
+    ...headOf(tryOut, filled),
+    reason: tryOut.reason,
+    winnerSetup: winnerSetupOf(tryOut),
+    places: filled.map(placeResponseOf),
+  };
+}
+
+function winnerSetupOf({ winnerSetup, owner }: TryOut): TryOutResponse['winnerSetup'] {
+  if (!winnerSetup) return null;
+  const { id, name, copiedFrom } = winnerSetup.unwrap();
+  const source = copiedFrom?.unwrap();
+  return {
+    id,
+    name,
+    copiedFrom: source ? { id: source.id, name: source.name } : null,
+    isCurrent: owner.unwrap().currentSetupId === id,
+  };
 }
 
 export function tryOutListItemOf(tryOut: TryOut, filled: FilledPlace[]): TryOutListItem {
@@ -63,5 +81,9 @@ export function tryOutListItemOf(tryOut: TryOut, filled: FilledPlace[]): TryOutL
 /** What whoever only reads it is told: nothing of uploads, neither made nor to come. */
 export function readersTryOut(whole: TryOutResponse): TryOutResponse {
   const there = whole.places.filter(({ take }) => take);
-  return { ...whole, places: there.map((place) => ({ ...place, uploadKey: place.id, fileNames: [] })) };
+  return {
+    ...whole,
+    winnerSetup: null,
+    places: there.map((place) => ({ ...place, uploadKey: place.id, fileNames: [] })),
+  };
 }

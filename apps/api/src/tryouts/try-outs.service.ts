@@ -4,7 +4,6 @@ import {
   createTryOutRequest,
   ListTryOutsResponse,
   TryOutResponse,
-  updateTryOutPlaceRequest,
   updateTryOutRequest,
 } from '@thudline/contracts';
 import { validate } from 'uuid';
@@ -16,14 +15,11 @@ import { MeasurementsService } from '../measuring/measurements.service';
 import { Take } from '../takes/entities/take.entity';
 import { TryOutPlace } from './entities/try-out-place.entity';
 import { TryOut } from './entities/try-out.entity';
+import { keyedPlaces } from './keyed-places';
 import { FilledPlace, readersTryOut, tryOutListItemOf, tryOutResponseOf } from './try-outs.mapper';
 
-type PlaceRequest = z.output<typeof createTryOutRequest>['places'][number];
-
-interface PlaceOfTryOut {
-  id: string;
-  placeId: string;
-}
+/** What the mapper reads beside its own columns. */
+const told = ['winnerSetup.copiedFrom', 'owner'] as const;
 
 @Injectable()
 export class TryOutsService {
@@ -33,7 +29,11 @@ export class TryOutsService {
   ) {}
 
   async list({ user }: Viewer): Promise<ListTryOutsResponse> {
-    const tryOuts = await this.em.find(TryOut, { owner: user.id }, { orderBy: { id: 'desc' }, limit: 200 });
+    const tryOuts = await this.em.find(
+      TryOut,
+      { owner: user.id, deletedAt: null },
+      { orderBy: { id: 'desc' }, limit: 200 },
+    );
     const filled = await this.filled(user.id, tryOuts);
     return { items: tryOuts.map((tryOut) => tryOutListItemOf(tryOut, filled.get(tryOut.id) ?? [])) };
   }
@@ -42,19 +42,24 @@ export class TryOutsService {
     viewer: Viewer,
     { places, currentIndex, ...about }: z.output<typeof createTryOutRequest>,
   ): Promise<TryOutResponse> {
-    const keyed = await this.withKeys(viewer, places);
+    const keyed = await keyedPlaces(this.em, viewer.user.id, places);
     const tryOut = this.em.create(TryOut, { owner: viewer.user, reason: '', ...about });
     const rows = keyed.map((place, rank) => this.em.create(TryOutPlace, { tryOut, rank, ...place }));
     await this.em.flush();
     tryOut.currentPlaceId = currentIndex === null ? null : (rows[currentIndex]?.id ?? null);
     await this.em.flush();
-    return this.whole(tryOut);
+    return this.getWhole(viewer, tryOut.id);
   }
 
   /** For whoever may read it; the guard has asked. */
   async get(id: string, { own }: TakeRights): Promise<TryOutResponse> {
-    const whole = await this.whole(await this.em.findOneOrFail(TryOut, { id }));
+    const whole = await this.whole(await this.em.findOneOrFail(TryOut, { id }, { populate: told }));
     return own ? whole : readersTryOut(whole);
+  }
+
+  /** For its owner. */
+  async getWhole(viewer: Viewer, id: string): Promise<TryOutResponse> {
+    return this.whole(await this.getOwn(viewer, id));
   }
 
   async update(
@@ -63,7 +68,7 @@ export class TryOutsService {
     { winnerPlaceId, currentPlaceId, ...words }: z.output<typeof updateTryOutRequest>,
   ): Promise<TryOutResponse> {
     const tryOut = await this.getOwn(viewer, id);
-    for (const placeId of [winnerPlaceId, currentPlaceId]) if (placeId) await this.getPlace(tryOut, placeId);
+    await this.checkPlaces(tryOut, [winnerPlaceId, currentPlaceId]);
     const changes = { ...words, winnerPlaceId, currentPlaceId };
     this.em.assign(
       tryOut,
@@ -76,32 +81,23 @@ export class TryOutsService {
   }
 
   async remove(viewer: Viewer, id: string): Promise<void> {
-    await this.em.removeAndFlush(await this.getOwn(viewer, id));
+    const tryOut = await this.getOwn(viewer, id);
+    tryOut.deletedAt = new Date();
+    await this.em.flush();
   }
 
-  async updatePlace(
-    viewer: Viewer,
-    { id, placeId }: PlaceOfTryOut,
-    { position, label }: z.output<typeof updateTryOutPlaceRequest>,
-  ): Promise<TryOutResponse> {
-    const tryOut = await this.getOwn(viewer, id);
-    const place = await this.getPlace(tryOut, placeId);
-    if (position !== undefined) place.position = position;
-    if (label !== undefined) place.label = label;
+  async restore(viewer: Viewer, id: string): Promise<TryOutResponse> {
+    const tryOut = await this.findOwn(viewer, id);
+    if (!tryOut) throw notFound();
+    tryOut.deletedAt = null;
     await this.em.flush();
     return this.whole(tryOut);
   }
 
-  async removePlace(viewer: Viewer, { id, placeId }: PlaceOfTryOut): Promise<TryOutResponse> {
-    const tryOut = await this.getOwn(viewer, id);
-    await this.em.removeAndFlush(await this.getPlace(tryOut, placeId));
-    return this.whole(tryOut);
-  }
-
   /** @throws {AppError} `not-found` for another player's, as if there were none */
-  async getOwn({ user }: Viewer, id: string): Promise<TryOut> {
-    const tryOut = validate(id) ? await this.em.findOne(TryOut, { id, owner: user.id }) : null;
-    if (!tryOut) throw notFound();
+  async getOwn(viewer: Viewer, id: string): Promise<TryOut> {
+    const tryOut = await this.findOwn(viewer, id);
+    if (!tryOut || tryOut.deletedAt) throw notFound();
     return tryOut;
   }
 
@@ -110,21 +106,26 @@ export class TryOutsService {
     return (await this.filled(tryOut.owner.id, [tryOut])).get(tryOut.id) ?? [];
   }
 
-  private async whole(tryOut: TryOut): Promise<TryOutResponse> {
-    return tryOutResponseOf(tryOut, await this.placesOf(tryOut));
+  /** A deleted one, too. */
+  private async findOwn({ user }: Viewer, id: string): Promise<TryOut | null> {
+    return validate(id) ? this.em.findOne(TryOut, { id, owner: user.id }, { populate: told }) : null;
   }
 
-  private async getPlace(tryOut: TryOut, placeId: string): Promise<TryOutPlace> {
-    const place = validate(placeId) ? await this.em.findOne(TryOutPlace, { id: placeId, tryOut }) : null;
-    if (!place) throw notFound();
-    return place;
+  private async checkPlaces(tryOut: TryOut, placeIds: (string | null | undefined)[]): Promise<void> {
+    const named = new Set(placeIds.filter((placeId) => typeof placeId === 'string'));
+    const found = await this.em.count(TryOutPlace, { id: { $in: [...named] }, tryOut, removedAt: null });
+    if (found < named.size) throw notFound();
+  }
+
+  private async whole(tryOut: TryOut): Promise<TryOutResponse> {
+    return tryOutResponseOf(tryOut, await this.placesOf(tryOut));
   }
 
   /** Deleted takes leave their places, and come back into them when they are restored. */
   private async filled(ownerId: string, tryOuts: TryOut[]): Promise<Map<string, FilledPlace[]>> {
     const places = await this.em.find(
       TryOutPlace,
-      { tryOut: { $in: tryOuts.map(({ id }) => id) } },
+      { tryOut: { $in: tryOuts.map(({ id }) => id) }, removedAt: null },
       { orderBy: { rank: 'asc' } },
     );
     const keys = places.map(({ uploadKey }) => uploadKey);
@@ -140,19 +141,5 @@ export class TryOutsService {
       filled.set(place.tryOut.id, of);
     }
     return filled;
-  }
-
-  /** Takes that are there already have the key they were uploaded with. */
-  private async withKeys({ user }: Viewer, places: PlaceRequest[]) {
-    const takeIds = places.flatMap(({ takeId }) => takeId ?? []);
-    const takes = await this.em.find(Take, { id: { $in: takeIds }, owner: user.id, deletedAt: null });
-    const keyOf = new Map(takes.map(({ id, uploadKey }) => [id, uploadKey]));
-    const keyed = places.map(({ takeId, uploadKey = keyOf.get(takeId ?? ''), ...place }) => {
-      if (!uploadKey) throw new AppError('bad-request', 'One of these takes is not there any more.');
-      return { uploadKey, ...place };
-    });
-    if (new Set(keyed.map(({ uploadKey }) => uploadKey)).size < keyed.length)
-      throw new AppError('bad-request', 'A take stands in a try-out only once.');
-    return keyed;
   }
 }

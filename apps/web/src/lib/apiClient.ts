@@ -47,17 +47,17 @@ interface RequestOptions {
   method?: 'GET' | 'POST' | 'PATCH' | 'DELETE';
   body?: unknown;
   signal?: AbortSignal;
-  /** Only this many bytes from the start. */
-  firstBytes?: number;
+  /** Only the bytes from `start` to `end` (exclusive). */
+  range?: { start: number; end: number };
 }
 
 async function send(
   path: string,
-  { method = 'GET', body, signal, firstBytes }: RequestOptions,
+  { method = 'GET', body, signal, range }: RequestOptions,
 ): Promise<Response> {
   const headers: Record<string, string> = { [appHeader.name]: appHeader.value };
   if (body !== undefined) headers['Content-Type'] = 'application/json';
-  if (firstBytes !== undefined) headers['Range'] = `bytes=0-${firstBytes - 1}`;
+  if (range) headers['Range'] = `bytes=${range.start}-${range.end - 1}`;
   try {
     return await fetch(path, {
       method,

@@ -12,7 +12,7 @@ import { ComparePage } from './ComparePage';
 const played: string[] = [];
 jest.mock('../lib/audio/takesPlayer', () => ({
   TakesPlayer: class {
-    constructor(_takes: unknown, _zerosS: unknown, selected: number) {
+    constructor({ selected }: { selected: number }) {
       played.push(`ready, take ${selected}`);
     }
     play = (fromS: number) => Promise.resolve(void played.push(`play from ${fromS.toFixed(2)}`));
@@ -104,6 +104,8 @@ describe('a comparison', () => {
     const row = (name: RegExp) => within(changed).getByRole('row', { name });
     expect(row(/^low end, added up/)).toHaveTextContent(/−0\.7 → 0\.6 dB.*\+1\.1 to \+1\.5.*fuller/);
     expect(row(/^hardest kick hit/)).toHaveTextContent(/−2\.7 → −8\.9 dBFS.*lower/);
+    expect(within(changed).queryByRole('row', { name: /^decay, 500 Hz/ })).not.toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: /^all \d+ figures$/ }));
     expect(row(/^decay, 500 Hz/)).toHaveTextContent(/−4 to \+8 %.*no clear change/);
     expect(row(/^attack/)).toHaveTextContent(/strength can’t be matched.*can’t tell/);
     expect(screen.getByRole('complementary', { name: 'Thudline, matching' })).toBeInTheDocument();

@@ -102,25 +102,33 @@ describe('files that were sent before', () => {
 });
 
 describe('the setup of a new take', () => {
-  const setups = { [`GET ${paths.setups}`]: json({ items: [sampleSetupItem()] }) };
-  afterEach(() => localStorage.clear());
+  const setups = (currentId: string | null) => ({
+    [`GET ${paths.setups}`]: json({ items: [sampleSetupItem()], currentId }),
+  });
 
-  it('is sent along, and the next take begins with it', async () => {
-    const page = open(setups);
+  it('is sent along', async () => {
+    const page = open(setups(null));
     await pick(page.container, kick(), overhead());
     await headlineIs(/^Both files are here/);
     await userEvent.selectOptions(await screen.findByLabelText('Setup'), 'one overhead, high');
     await measure();
     await waitFor(() => expect(page.uploads).toHaveLength(1));
     expect(page.uploads[0].form?.get('setupId')).toBe(sampleSetupItem().id);
-    page.unmount();
-    const next = open(setups);
-    await pick(next.container, kick(), overhead());
+  });
+
+  it('begins with how things stand now, and may be none', async () => {
+    const page = open(setups(sampleSetupItem().id));
+    await pick(page.container, kick(), overhead());
+    await headlineIs(/^Both files are here/);
     expect(await screen.findByLabelText('Setup')).toHaveDisplayValue('one overhead, high');
+    await userEvent.selectOptions(screen.getByLabelText('Setup'), 'none written down');
+    await measure();
+    await waitFor(() => expect(page.uploads).toHaveLength(1));
+    expect(page.uploads[0].form?.get('setupId')).toBeNull();
   });
 
   it('is not asked for before there is one', async () => {
-    const page = open({ [`GET ${paths.setups}`]: json({ items: [] }) });
+    const page = open({ [`GET ${paths.setups}`]: json({ items: [], currentId: null }) });
     await pick(page.container, kick(), overhead());
     await headlineIs(/^Both files are here/);
     expect(screen.queryByLabelText('Setup')).not.toBeInTheDocument();

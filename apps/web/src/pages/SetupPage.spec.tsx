@@ -1,5 +1,5 @@
 import { paths, setupResponse, type SetupResponse } from '@thudline/contracts';
-import { screen, waitFor } from '@testing-library/react';
+import { screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { fakeServer, json, refusal, type FakeRoutes } from '../testing/fakeServer';
 import { renderPage } from '../testing/renderPage';
@@ -50,6 +50,18 @@ describe('a setup', () => {
     open({});
     expect(await screen.findByRole('alert')).toHaveTextContent('There is no such setup here.');
     expect(screen.getByRole('link', { name: 'Go to your setups' })).toHaveAttribute('href', '/setups');
+  });
+
+  it('asks before what was written is lost, and not when nothing was', async () => {
+    opened();
+    await rewrite('Above the snare', '95');
+    await userEvent.click(screen.getByRole('link', { name: 'Setups' }));
+    const question = await screen.findByRole('alertdialog', { name: 'This setup isn’t kept yet' });
+    await userEvent.click(within(question).getByRole('button', { name: 'Stay here' }));
+    expect(await field('Above the snare')).toHaveValue('95');
+    await rewrite('Above the snare', '90');
+    await userEvent.click(screen.getByRole('link', { name: 'Setups' }));
+    await waitFor(() => expect(screen.queryByRole('textbox')).not.toBeInTheDocument());
   });
 
   it('sets the tape beside the sound, in words and in the picture', async () => {

@@ -7,7 +7,7 @@ import { sampleMe } from '../testing/sampleData';
 import { sampleSetupItem } from '../testing/sampleSetups';
 import { SetupsPage } from './SetupsPage';
 
-const list = (items: SetupListItem[]) => json(listSetupsResponse.parse({ items }));
+const list = (items: SetupListItem[]) => json(listSetupsResponse.parse({ items, currentId: null }));
 const open = (routes: FakeRoutes) => {
   fakeServer({ [`GET ${paths.me}`]: json(sampleMe), ...routes });
   return renderPage([{ path: '/setups', element: <SetupsPage /> }], '/setups');

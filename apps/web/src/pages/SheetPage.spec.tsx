@@ -68,7 +68,7 @@ describe('the sheet', () => {
     let take = sampleTake({ setup: { id: low.id, name: low.name } });
     const { requests } = open({
       [`GET ${paths.take(takeId)}`]: () => json(take)(),
-      [`GET ${paths.setups}`]: json({ items: [high, low] }),
+      [`GET ${paths.setups}`]: json({ items: [high, low], currentId: null }),
       [`PATCH ${paths.take(takeId)}`]: () => {
         take = sampleTake({ setup: { id: high.id, name: high.name } });
         return json(take)();

@@ -412,7 +412,7 @@ describe('the setup of chosen takes', () => {
     const high = sampleSetupItem();
     const routes: FakeRoutes = {
       [`GET ${paths.takes}`]: list(twoTakes),
-      [`GET ${paths.setups}`]: json({ items: [high] }),
+      [`GET ${paths.setups}`]: json({ items: [high], currentId: null }),
     };
     for (const number of [13, 14]) {
       const take = sampleTake({ id: listId(number), setup: before[number] });

@@ -10,8 +10,10 @@ import userEvent from '@testing-library/user-event';
 import { fakeServer, json, refusal, type FakeRoutes } from '../testing/fakeServer';
 import { renderPage } from '../testing/renderPage';
 import { measurement, sampleMe } from '../testing/sampleData';
+import { listId, sampleList, sampleListItem } from '../testing/sampleList';
 import { samplePlace, sampleRanking, sampleTryOut, tryOutId } from '../testing/sampleTryOut';
 import { TryOutPage } from './TryOutPage';
+import { TryOutsPage } from './TryOutsPage';
 
 const answers = (tryOut: TryOutResponse, ranking: TryOutRankingResponse): FakeRoutes => ({
   [`GET ${paths.tryOut(tryOutId)}`]: json(tryOutResponse.parse(tryOut)),
@@ -20,9 +22,22 @@ const answers = (tryOut: TryOutResponse, ranking: TryOutRankingResponse): FakeRo
 
 function open(routes: FakeRoutes = answers(sampleTryOut(), sampleRanking())) {
   const server = fakeServer({ [`GET ${paths.me}`]: json(sampleMe), ...routes });
-  const page = renderPage([{ path: '/tryouts/:tryOutId', element: <TryOutPage /> }], `/tryouts/${tryOutId}`);
+  const page = renderPage(
+    [
+      { path: '/tryouts/:tryOutId', element: <TryOutPage /> },
+      { path: '/tryouts', element: <TryOutsPage /> },
+    ],
+    `/tryouts/${tryOutId}`,
+  );
   return { ...server, ...page };
 }
+
+const winnerSetup = {
+  id: listId(90),
+  name: 'one overhead, high, overhead 100 cm',
+  copiedFrom: { id: listId(91), name: 'one overhead, high' },
+  isCurrent: true,
+};
 
 const line = () => screen.findByRole('heading', { level: 1 });
 
@@ -85,11 +100,15 @@ describe('a try-out', () => {
     expect(screen.getByRole('row', { name: '110 cm 19 +1.7 dB +1.4 to +1.9 16' })).toBeInTheDocument();
   });
 
-  it('hides which is which until one is chosen, and keeps that one as the winner with a reason', async () => {
+  it('hides which is which until one is chosen, makes that one the setup with a reason, and takes it back', async () => {
     const { requests } = open({
       ...answers(sampleTryOut(), sampleRanking()),
-      [`PATCH ${paths.tryOut(tryOutId)}`]: (body) => ({
-        json: tryOutResponse.parse({ ...sampleTryOut(), ...(body as object) }),
+      [`POST ${paths.tryOutSetup(tryOutId)}`]: (body) => ({
+        status: 201,
+        json: sampleTryOut({ ...(body as object), winnerSetup }),
+      }),
+      [`DELETE ${paths.tryOutSetup(tryOutId)}`]: () => ({
+        json: sampleTryOut({ winnerPlaceId: sampleTryOut().places[2].id }),
       }),
     });
     await line();
@@ -100,13 +119,21 @@ describe('a try-out', () => {
     const chosen = await screen.findByRole('radio', { checked: true });
     const name = /^(\d+ cm)/.exec(chosen.getAttribute('aria-label') ?? '')?.[1] ?? '';
     await userEvent.type(screen.getByLabelText(`Why ${name} wins, in your words`), 'Fullest.');
-    await userEvent.click(screen.getByRole('button', { name: `Keep ${name} as the winner` }));
-    expect(await screen.findByText(`${name} is kept as the winner.`)).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: `Make ${name} the setup` }));
+    expect(await screen.findByText(`${name} is the setup now.`)).toBeInTheDocument();
+    expect(screen.getByRole('link', { name: winnerSetup.name })).toHaveAttribute(
+      'href',
+      `/setups/${winnerSetup.id}`,
+    );
+    expect(screen.queryByRole('button', { name: /^Make / })).not.toBeInTheDocument();
     const winner = sampleTryOut().places.find(({ position }) => `${position} cm` === name);
-    expect(requests.find(({ method }) => method === 'PATCH')?.body).toEqual({
+    expect(requests.find(({ method }) => method === 'POST')?.body).toEqual({
       winnerPlaceId: winner?.id,
       reason: 'Fullest.',
     });
+    await userEvent.click(screen.getByRole('button', { name: 'Undo' }));
+    await waitFor(() => expect(screen.queryByText(/is the setup now/)).not.toBeInTheDocument());
+    expect(requests.at(-1)).toMatchObject({ method: 'DELETE', path: paths.tryOutSetup(tryOutId) });
   });
 
   it('chooses what is heard with the keys', async () => {
@@ -150,6 +177,62 @@ describe('a try-out', () => {
     await waitFor(() => expect(requests.some(({ method }) => method === 'DELETE')).toBe(true));
   });
 
+  it('moves its takes, takes them out and back in, and takes more in', async () => {
+    const all = sampleTryOut();
+    const [first] = all.places;
+    const without = sampleTryOut({ places: all.places.slice(1) });
+    const other = sampleListItem({ id: listId(40), number: 40, title: 'at noon' });
+    const { requests } = open({
+      ...answers(all, sampleRanking()),
+      [`GET ${paths.takes}`]: json(sampleList([other])),
+      [`PATCH ${paths.tryOutPlace(tryOutId, first.id)}`]: json(all),
+      [`DELETE ${paths.tryOutPlace(tryOutId, first.id)}`]: json(without),
+      [`POST ${paths.restoreTryOutPlace(tryOutId, first.id)}`]: json(all),
+      [`POST ${paths.tryOutPlaces(tryOutId)}`]: json(all, 201),
+    });
+    await line();
+    await userEvent.click(screen.getByRole('button', { name: 'change its takes' }));
+    const position = screen.getByLabelText('Overhead at, take 1');
+    await userEvent.clear(position);
+    await userEvent.type(position, 'high');
+    expect(screen.getByText('Write the position as a number.')).toBeInTheDocument();
+    await userEvent.clear(position);
+    await userEvent.type(position, '82{Enter}');
+    await waitFor(() => expect(requests.at(-1)?.body).toEqual({ position: 82, label: '' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Take out take 16' }));
+    expect(await screen.findByText(/take 16 is out of this try-out/)).toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: 'Take out take 16' })).not.toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Undo' }));
+    expect(await screen.findByRole('button', { name: 'Take out take 16' })).toBeInTheDocument();
+    await userEvent.selectOptions(screen.getByLabelText('Add a take that is there'), 'take 40, at noon');
+    await waitFor(() =>
+      expect(requests.find(({ path }) => path === paths.tryOutPlaces(tryOutId))?.body).toEqual({
+        places: [{ takeId: other.id }],
+      }),
+    );
+    expect(screen.getByRole('link', { name: 'new recordings' })).toHaveAttribute(
+      'href',
+      `/tryouts/new?to=${tryOutId}`,
+    );
+  });
+
+  it('is deleted at once, and can be brought back where its list is', async () => {
+    const { requests } = open({
+      ...answers(sampleTryOut(), sampleRanking()),
+      [`GET ${paths.takes}`]: json(sampleList([])),
+      [`GET ${paths.tryOuts}`]: json({ items: [] }),
+      [`DELETE ${paths.tryOut(tryOutId)}`]: () => ({ status: 204 }),
+      [`POST ${paths.restoreTryOut(tryOutId)}`]: json(sampleTryOut()),
+    });
+    await line();
+    await userEvent.click(screen.getByRole('button', { name: 'change its takes' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Delete this try-out' }));
+    expect(await screen.findByText('The try-out is deleted. Its takes stay.')).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Undo' }));
+    expect(await screen.findByText('The try-out is back.')).toBeInTheDocument();
+    expect(requests.some(({ path }) => path === paths.restoreTryOut(tryOutId))).toBe(true);
+  });
+
   it('changes nothing on a phone that may only read', async () => {
     open({
       ...answers(sampleTryOut(), sampleRanking()),
@@ -157,6 +240,6 @@ describe('a try-out', () => {
     });
     await line();
     expect(screen.queryByRole('radio')).not.toBeInTheDocument();
-    expect(screen.queryByRole('button', { name: /as the winner/ })).not.toBeInTheDocument();
+    expect(screen.queryByRole('button', { name: /the setup$/ })).not.toBeInTheDocument();
   });
 });

@@ -7,6 +7,7 @@ import { PageMessage } from '../components/PageMessage';
 import { PageTitle } from '../components/PageTitle';
 import { SheetPaper } from '../components/SheetPaper';
 import { useMe } from '../features/auth/hooks/useMe';
+import { DeletedTryOut } from '../features/tryouts/components/DeletedTryOut';
 import { TryOutsList } from '../features/tryouts/components/TryOutsList';
 import { useTryOuts } from '../features/tryouts/hooks/useTryOuts';
 
@@ -40,6 +41,7 @@ export function TryOutsPage() {
           <ButtonLink to="/tryouts/new">Start a try-out</ButtonLink>
         </Box>
       )}
+      <DeletedTryOut />
     </SheetPaper>
   );
 }

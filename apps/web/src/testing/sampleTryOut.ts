@@ -40,6 +40,7 @@ export const sampleTryOut = (overrides: Partial<TryOutResponse> = {}): TryOutRes
   reason: '',
   winnerPlaceId: null,
   currentPlaceId: placeId(1),
+  winnerSetup: null,
   places: [0, 1, 2, 3, 4].map((index) => samplePlace(index)),
   ...overrides,
 });

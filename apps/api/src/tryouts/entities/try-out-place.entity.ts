@@ -19,6 +19,8 @@ export const TryOutPlace = defineEntity({
     fileNames: p.json<string[]>(),
     position: p.double().$type<number>().nullable(),
     label: p.string().length(40),
+    /** Taken out of the try-out; kept, so that it can be undone. */
+    removedAt: p.datetime().nullable(),
   },
 });
 export type TryOutPlace = InferEntity<typeof TryOutPlace>;

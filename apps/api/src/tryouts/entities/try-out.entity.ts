@@ -1,6 +1,7 @@
 import { defineEntity, InferEntity, p } from '@mikro-orm/core';
 import { TryOutSubject, TryOutUnit } from '@thudline/contracts';
 import { identity } from '../../database/identity';
+import { Setup } from '../../setups/entities/setup.entity';
 import { User } from '../../users/entities/user.entity';
 
 /** Several takes that differ in one thing on purpose. */
@@ -20,6 +21,12 @@ export const TryOut = defineEntity({
     winnerPlaceId: p.uuid().nullable(),
     /** The place that is how things stand now. */
     currentPlaceId: p.uuid().nullable(),
+    /** What the winner was made to. */
+    winnerSetup: () => p.manyToOne(Setup).ref().nullable().index().deleteRule('set null'),
+    /** The player's setup before that, to go back to. */
+    setupBeforeId: p.uuid().nullable(),
+    /** Kept for a while, so that it can be undone. */
+    deletedAt: p.datetime().nullable(),
   },
 });
 export type TryOut = InferEntity<typeof TryOut>;

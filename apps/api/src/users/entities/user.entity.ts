@@ -21,6 +21,8 @@ export const User = defineEntity({
     settings: p.json<Partial<UserSettings>>().onCreate((): Partial<UserSettings> => defaultUserSettings),
     /** Number of the next take; raised inside the transaction that makes a take, whose row lock it is. */
     nextTakeNumber: p.integer().default(1),
+    /** How the microphones stand now; the setup may have been removed since. */
+    currentSetupId: p.uuid().nullable(),
     lockedAt: p.datetime().nullable(),
     /** From then on the account is closed, and goes for good with the next housekeeping; null unless it was asked for. */
     deleteAfter: p.datetime().nullable().index(),

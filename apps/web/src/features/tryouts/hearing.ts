@@ -6,10 +6,9 @@ export interface HeardPlace {
   takeId: string;
   flipped: boolean;
   overheadGainDb: number;
-  sampleRateHz: number;
   /** The common beginning. */
-  zeroS: number;
-  /** How much of it is read. */
+  startS: number;
+  /** All are heard for the same time, so that they begin again together. */
   endS: number;
 }
 
@@ -20,13 +19,19 @@ const heardS = 20;
 
 /** The measured takes of a try-out, in the order they were played. */
 export function heardPlaces(tryOut: TryOutResponse, rows: readonly TryOutRankingRow[]): HeardPlace[] {
-  return tryOut.places.flatMap(({ id, take }) => {
+  const heard = tryOut.places.flatMap(({ id, take }) => {
     const row = rows.find(({ placeId }) => placeId === id);
-    if (!take || !row) return [];
-    const { firstKickS, durationS, sampleRateHz, overheadGainDb } = row.heard;
-    const zeroS = Math.max(0, firstKickS - beforeS);
-    const endS = Math.min(durationS, zeroS + heardS);
-    return { placeId: id, takeId: take.id, flipped: row.flipped, overheadGainDb, sampleRateHz, zeroS, endS };
+    return take && row ? [{ placeId: id, takeId: take.id, row }] : [];
+  });
+  const leadS = Math.min(beforeS, ...heard.map(({ row }) => row.heard.firstKickS));
+  const lengthS = Math.min(
+    heardS,
+    ...heard.map(({ row: { heard: of } }) => of.durationS - of.firstKickS + leadS),
+  );
+  return heard.map(({ row, ...place }) => {
+    const { firstKickS, overheadGainDb } = row.heard;
+    const startS = firstKickS - leadS;
+    return { ...place, flipped: row.flipped, overheadGainDb, startS, endS: startS + lengthS };
   });
 }
 

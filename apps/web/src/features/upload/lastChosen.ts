@@ -26,9 +26,10 @@ export const lastChosen = (storageKey: string): LastChosen => ({
  * What is chosen among those there are: one that is not there any more is none.
  *
  * @param here - what was chosen on this page: an id, empty for none, null for nothing yet
+ * @param beforeId - what evenings go on with
  */
 export const chosenAmong = (
   those: readonly { id: string }[],
   here: string | null,
-  last: LastChosen,
-): string | null => those.find(({ id }) => id === (here ?? last.read()))?.id ?? null;
+  beforeId: string | null,
+): string | null => those.find(({ id }) => id === (here ?? beforeId))?.id ?? null;

@@ -26,10 +26,12 @@ class FakeNode {
   }
 }
 class FakeSource extends FakeNode {
+  loops: boolean;
   begun: { atS: number; offsetS: number } | null = null;
   onended: () => void = () => undefined;
-  constructor() {
+  constructor(_context?: unknown, { loop = false }: { loop?: boolean } = {}) {
     super();
+    this.loops = loop;
     sources.push(this);
   }
   start(atS: number, offsetS: number) {
@@ -49,7 +51,8 @@ class FakeContext {
 
 const take = { sampleRateHz: 48_000, samples: new Float32Array(48_000), gainDb: 0, matchDb: 0 };
 let ended: jest.Mock;
-const player = (selected: number) => new TakesPlayer([take, take], [3.2, 0.5], selected, ended);
+const player = (selected: number, loops = false) =>
+  new TakesPlayer({ takes: [take, take], zerosS: [3.2, 0.5], selected, loops, onEnded: ended });
 /** The second gain of each take is its fade. */
 const heard = () => fades.slice(-4).flatMap((node, i) => (i % 2 === 1 ? node.gain.value : []));
 
@@ -105,6 +108,11 @@ describe('two takes playing in step', () => {
     expect(ended).not.toHaveBeenCalled();
     sources[1].onended();
     expect(ended).toHaveBeenCalledTimes(1);
+  });
+
+  it('begin again together where they loop', async () => {
+    await player(0, true).play(0);
+    expect(sources.map(({ loops }) => loops)).toEqual([true, true]);
   });
 
   it('are silent after a stop, also one that came before the browser allowed sound', async () => {

@@ -1,4 +1,5 @@
 import { fadeTo } from './crossfade';
+import { loopEnds } from './loopBuffer';
 import type { HeardTake } from './matchedTakes';
 
 /** It starts quiet: from about −14 dB to full in this time. Common practice for protecting ears, no source. */
@@ -12,6 +13,16 @@ interface Track {
   fade: GainNode;
 }
 
+export interface TakesPlaying {
+  takes: readonly HeardTake[];
+  /** Where the common time is 0 in each take, such as its first kick hit. */
+  zerosS: readonly number[];
+  selected: number;
+  /** All begin again together; they are of one length, then. */
+  loops?: boolean;
+  onEnded: () => void;
+}
+
 /** Takes that play in step, one of them heard: choosing another crossfades at the same musical moment. */
 export class TakesPlayer {
   private context: AudioContext | null = null;
@@ -21,13 +32,11 @@ export class TakesPlayer {
   /** Raised by every start and stop: whoever waited meanwhile sees that it is no longer wanted. */
   private run = 0;
 
-  constructor(
-    private readonly takes: readonly HeardTake[],
-    /** Where the common time is 0 in each take, such as its first kick hit. */
-    private readonly zerosS: readonly number[],
-    private selected: number,
-    private readonly onEnded: () => void,
-  ) {}
+  private selected: number;
+
+  constructor(private readonly playing: TakesPlaying) {
+    this.selected = playing.selected;
+  }
 
   /** @param fromS - on the common time; a take that hasn't begun by then joins in later */
   async play(fromS: number): Promise<void> {
@@ -38,10 +47,11 @@ export class TakesPlayer {
     if (run !== this.run) return;
     const beginS = context.currentTime + leadS;
     const output = quietOutput(context, beginS);
-    this.tracks = this.takes.map((take, i) => {
-      const track = createTrack(context, take, i === this.selected);
+    const { takes, zerosS, loops = false, onEnded } = this.playing;
+    this.tracks = takes.map((take, i) => {
+      const track = createTrack(context, take, { on: i === this.selected, loops });
       track.fade.connect(output);
-      const offsetS = fromS + this.zerosS[i];
+      const offsetS = fromS + zerosS[i];
       track.source.start(beginS + Math.max(0, -offsetS), Math.max(0, offsetS));
       return track;
     });
@@ -51,7 +61,7 @@ export class TakesPlayer {
     for (const { source } of this.tracks) {
       source.onended = () => {
         left--;
-        if (left === 0 && run === this.run) this.onEnded();
+        if (left === 0 && run === this.run) onEnded();
       };
     }
   }
@@ -103,15 +113,15 @@ function quietOutput(context: AudioContext, beginS: number): GainNode {
 function createTrack(
   context: AudioContext,
   { samples, sampleRateHz, gainDb }: HeardTake,
-  on: boolean,
+  { on, loops }: { on: boolean; loops: boolean },
 ): Track {
   const buffer = new AudioBuffer({
     numberOfChannels: 1,
     length: Math.max(1, samples.length),
     sampleRate: sampleRateHz,
   });
-  buffer.copyToChannel(samples, 0);
-  const source = new AudioBufferSourceNode(context, { buffer });
+  buffer.copyToChannel(loops ? loopEnds(samples, sampleRateHz) : samples, 0);
+  const source = new AudioBufferSourceNode(context, { buffer, loop: loops });
   const level = new GainNode(context, { gain: 10 ** (gainDb / 20) });
   const fade = new GainNode(context, { gain: on ? 1 : 0 });
   source.connect(level).connect(fade);

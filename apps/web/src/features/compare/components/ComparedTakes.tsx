@@ -8,9 +8,11 @@ import { LineWords } from '../../sheet/components/TakeLine';
 import { compareKeyWords, useCompareKeys } from '../hooks/useCompareKeys';
 import { useSameHit } from '../hooks/useSameHit';
 import { useTwoTakes } from '../hooks/useTwoTakes';
+import { letteredCaveats, lettersOf, type LetteredCaveat } from '../letteredCaveats';
 import { BothSpectra } from './BothSpectra';
 import { CompareHead } from './CompareHead';
 import { HearBoth } from './HearBoth';
+import { Letters } from './Letters';
 import { SameHit } from './SameHit';
 import { WhatChanged } from './WhatChanged';
 import { WhatDiffered } from './WhatDiffered';
@@ -38,22 +40,24 @@ export function ComparedTakes({ comparison, before, after, settings }: ComparedT
     stepHit: sameHit.step,
     onHelp: () => setHelping(true),
   });
+  const { ofFlip, ofFigures } = letteredCaveats(comparison.caveats);
   const names = [`take ${comparison.before.number}`, `take ${comparison.after.number}`] as const;
   return (
     <RuledSheet>
-      <SheetRow note={<Caveats comparison={comparison} about={(about) => about === 'the flip'} />}>
+      <SheetRow note={<Caveats caveats={ofFlip} />}>
         <CompareHead before={comparison.before} after={comparison.after} />
         <Headline marginTop="8px">
           <LineWords line={comparison.line} />
         </Headline>
-        <WhatDiffered {...comparison} />
+        <WhatDiffered {...comparison} letters={lettersOf(ofFlip)} />
       </SheetRow>
       <Section title="What each take says">
         <WhatEachSays {...{ comparison, reports }} />
       </Section>
       <Section
         title="What changed, and how surely"
-        note={<Caveats comparison={comparison} about={(about) => about !== 'the flip'} />}
+        letters={lettersOf(ofFigures)}
+        note={<Caveats caveats={ofFigures} />}
       >
         <WhatChanged {...comparison} />
       </Section>
@@ -71,12 +75,20 @@ export function ComparedTakes({ comparison, before, after, settings }: ComparedT
   );
 }
 
-function Section({ title, note, children }: { title: string; note?: ReactNode; children: ReactNode }) {
+interface SectionProps {
+  title: string;
+  /** Of the notes beside it. */
+  letters?: readonly string[];
+  note?: ReactNode;
+  children: ReactNode;
+}
+
+function Section({ title, letters = [], note, children }: SectionProps) {
   return (
     <Box as="section" aria-label={title} marginTop={{ base: '26px', _print: '20px' }}>
       <SheetRow note={note}>
         <chakra.h2 fontSize={{ base: '22px', lg: 'section' }} fontWeight={900} lineHeight="30px">
-          {title}
+          {title} <Letters letters={letters} />
         </chakra.h2>
         {children}
       </SheetRow>
@@ -84,19 +96,11 @@ function Section({ title, note, children }: { title: string; note?: ReactNode; c
   );
 }
 
-/** Cautions about the comparison itself, beside what they speak of. */
-function Caveats({
-  comparison,
-  about,
-}: {
-  comparison: ComparisonResponse;
-  about: (about: string) => boolean;
-}) {
-  return comparison.caveats
-    .filter((caveat) => about(caveat.about))
-    .map((caveat) => (
-      <MarginNote key={caveat.about} from="Thudline" about={caveat.about}>
-        {caveat.text}
-      </MarginNote>
-    ));
+/** Cautions about the comparison itself, lettered in their order, beside what they speak of. */
+function Caveats({ caveats }: { caveats: readonly LetteredCaveat[] }) {
+  return caveats.map(({ letter, about, text }) => (
+    <MarginNote key={about} from={`${letter} Thudline`} about={about}>
+      {text}
+    </MarginNote>
+  ));
 }

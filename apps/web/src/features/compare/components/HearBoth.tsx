@@ -2,13 +2,13 @@ import { Box, Flex, chakra } from '@chakra-ui/react';
 import type { ReportResponse } from '@thudline/contracts';
 import { Button } from '../../../components/Button';
 import { Swell } from '../../../components/Swell';
-import { decibels, plural } from '../../../lib/format';
+import { decibels } from '../../../lib/format';
 import { HitSteps } from '../../sheet/components/ChoiceRow';
 import { PlayMark } from '../../sheet/components/PlayMark';
 import type { SameHitChoice } from '../hooks/useSameHit';
 import type { Heard, TwoTakes } from '../hooks/useTwoTakes';
 import { HitRows } from '../pictures/HitRows';
-import { heardS } from '../takeSound';
+import { stretchS } from '../commonTime';
 import { TakeMark } from './TakeMark';
 
 export interface HearBothProps {
@@ -54,8 +54,8 @@ export function HearBoth(props: HearBothProps) {
       <Box fontSize="caption" color="ink.muted" marginTop="6px" lineHeight="19px">
         Heard as recorded, levels of both microphones matched. It starts quiet. Phone speakers can’t play this
         low: listen on headphones, not too loud.
-        {Math.max(...reports.map(({ durationS }) => durationS)) > heardS &&
-          ` Long takes are heard for their first ${plural(heardS / 60, 'minute')}.`}
+        {Math.max(...reports.map(({ durationS }) => durationS)) > stretchS &&
+          ` Long takes are fetched ${stretchS / 60} minutes at a time.`}
       </Box>
     </Box>
   );

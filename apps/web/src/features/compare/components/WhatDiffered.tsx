@@ -3,13 +3,17 @@ import type { ComparisonResponse } from '@thudline/contracts';
 import { dateTime, missing } from '../../../lib/format';
 import { useNow } from '../../takes/hooks/useNow';
 import { relativeDate } from '../../takes/relativeDate';
+import { Letters } from './Letters';
 import { MarkedName, PairColumns, PairTable } from './PairTable';
 import { TakeMark } from './TakeMark';
 
-type Props = Pick<ComparisonResponse, 'before' | 'after' | 'differed' | 'same' | 'polarity'>;
+interface Props extends Pick<ComparisonResponse, 'before' | 'after' | 'differed' | 'same' | 'polarity'> {
+  /** Of the notes beside it. */
+  letters: readonly string[];
+}
 
 /** What was written down about both takes and differs, and whether the sound says the same of the polarity. */
-export function WhatDiffered({ before, after, differed, same, polarity }: Props) {
+export function WhatDiffered({ before, after, differed, same, polarity, letters }: Props) {
   const now = useNow();
   const head = (which: 'before' | 'after', take: typeof before) => (
     <th role="columnheader" scope="col">
@@ -48,7 +52,8 @@ export function WhatDiffered({ before, after, differed, same, polarity }: Props)
       <chakra.p fontSize="small" lineHeight="23px" marginTop="10px" textWrap="pretty">
         {[differed.length === 0 && 'Nothing was noted that differs.', same, polarity.sentence]
           .filter(Boolean)
-          .join(' ')}
+          .join(' ')}{' '}
+        <Letters letters={letters} />
       </chakra.p>
     </>
   );

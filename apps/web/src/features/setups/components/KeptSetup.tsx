@@ -2,13 +2,15 @@ import type { SetupResponse, UserSettings } from '@thudline/contracts';
 import { useNavigate } from 'react-router-dom';
 import { Button } from '../../../components/Button';
 import { TextLink } from '../../../components/TextLink';
-import { useKeeping } from '../hooks/useKeeping';
+import { useKeeping } from '../../../lib/useKeeping';
+import { onPurpose } from '../../../lib/useLeaveGuard';
 import { useSetupActions } from '../hooks/useSetupActions';
 import { fieldsOf, useSetupDraft } from '../hooks/useSetupDraft';
 import { agreementWords, takesOfSetup, usedWords } from '../setupWords';
 import { PhotoPart } from './PhotoPart';
 import { SetupButtons } from './SetupButtons';
 import { SetupSheet } from './SetupSheet';
+import { UnkeptQuestion } from './UnkeptQuestion';
 
 /** A setup that is kept: corrected here, copied where something was moved. */
 export function KeptSetup({
@@ -24,11 +26,12 @@ export function KeptSetup({
   const { update, remove } = useSetupActions();
   const { busy, failure, isKept, keep } = useKeeping();
   const navigate = useNavigate();
-  const copy = () => void navigate(`/setups/new?from=${setup.id}`, { state: { fields: draft.fields } });
+  const copy = () =>
+    void navigate(`/setups/new?from=${setup.id}`, { state: { fields: draft.fields, ...onPurpose } });
   const removeIt = () =>
     keep(async () => {
       await remove(setup.id);
-      await navigate('/setups');
+      await navigate('/setups', { state: onPurpose });
     });
   const state = draft.isChanged ? 'Not kept yet.' : isKept ? 'Kept.' : '';
   return (
@@ -52,6 +55,7 @@ export function KeptSetup({
             <Button type="button" look="outline" onClick={copy}>
               Copy with changes
             </Button>
+            <UnkeptQuestion isChanged={draft.isChanged} />
             {setup.takeCount === 0 && (
               <Button type="button" look="plain" aria-disabled={busy} onClick={() => void removeIt()}>
                 Remove it

@@ -3,7 +3,7 @@ import { paths, photoLimits, type SetupResponse } from '@thudline/contracts';
 import { useEffect, useRef } from 'react';
 import { TextButton } from '../../../components/Button';
 import { FieldError } from '../../../components/FieldError';
-import { useKeeping } from '../hooks/useKeeping';
+import { useKeeping } from '../../../lib/useKeeping';
 import { useSetupActions } from '../hooks/useSetupActions';
 
 /** A photo of how it stood: added, shown, taken away again. */

@@ -9,7 +9,13 @@ export function useSetups(asked = true) {
     asked ? paths.setups : null,
     (path: string) => requestJson(path, listSetupsResponse),
   );
-  return { setups: data?.items, error: errorToShow(data, error), retry: () => void mutate() };
+  return {
+    setups: data?.items,
+    /** How things stand now. */
+    currentId: data?.currentId ?? null,
+    error: errorToShow(data, error),
+    retry: () => void mutate(),
+  };
 }
 
 /** One setup; null asks for none. */

@@ -1,10 +1,10 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
+import { Lettered } from '../../../components/Lettered';
 import { Button, TextButton } from '../../../components/Button';
 import { FieldError } from '../../../components/FieldError';
 import { Swell } from '../../../components/Swell';
 import { PlayMark } from '../../sheet/components/PlayMark';
 import type { HearAll } from '../hooks/useHearAll';
-import { Lettered } from './Lettered';
 
 export interface HeardChoice {
   placeId: string;

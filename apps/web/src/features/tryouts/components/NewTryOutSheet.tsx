@@ -1,23 +1,30 @@
 import { Box, Flex } from '@chakra-ui/react';
-import type { MeResponse, TakeResponse } from '@thudline/contracts';
+import type { MeResponse, TakeResponse, TryOutResponse } from '@thudline/contracts';
 import { Button } from '../../../components/Button';
 import { FieldError } from '../../../components/FieldError';
 import { Headline } from '../../../components/Headline';
 import { SheetPaper } from '../../../components/SheetPaper';
 import { DropAnywhere } from '../../upload/components/DropAnywhere';
 import { useTryOutDraft } from '../hooks/useTryOutDraft';
+import { subjectWords } from '../subjectWords';
 import { draftWords } from '../upload/draftWords';
 import { DraftFiles } from './DraftFiles';
 import { DraftPlaces } from './DraftPlaces';
 import { SubjectSentence } from './SubjectSentence';
 
 /** Many pairs at once, or takes that are there, become one try-out. */
-export function NewTryOutSheet({ takes, me }: { takes: readonly TakeResponse[]; me: MeResponse }) {
+export function NewTryOutSheet({
+  takes,
+  to,
+  me,
+}: {
+  takes: readonly TakeResponse[];
+  /** The try-out that gets more takes; null for a new one. */
+  to: TryOutResponse | null;
+  me: MeResponse;
+}) {
   const { lengthUnit } = me.settings;
-  const bench = useTryOutDraft(
-    takes.map(({ id }) => id),
-    lengthUnit,
-  );
+  const bench = useTryOutDraft({ takeIds: takes.map(({ id }) => id), to, lengthUnit });
   const { draft, dispatch, problem, busy } = bench;
   const { strong, rest } = draftWords(draft);
   const sends = draft.pairs.length > 0;
@@ -28,13 +35,17 @@ export function NewTryOutSheet({ takes, me }: { takes: readonly TakeResponse[]; 
           <Headline marginTop="5px">
             <b>{strong}</b> {rest}
           </Headline>
-          <SubjectSentence draft={draft} onChange={dispatch} />
+          {to ? (
+            <Box marginTop="16px">What differs is {subjectWords(to).differs}.</Box>
+          ) : (
+            <SubjectSentence draft={draft} onChange={dispatch} />
+          )}
           <DraftPlaces {...{ draft, dispatch, takes, lengthUnit }} />
           <DraftFiles draft={draft} dispatch={dispatch} onChoose={() => choose()} />
           {problem && <FieldError>{problem}</FieldError>}
           <Flex marginTop="18px" columnGap="14px" rowGap="12px" alignItems="center" wrap="wrap">
             <Button type="button" aria-disabled={busy} onClick={() => void bench.make()}>
-              {sends ? 'Send and rank them' : 'Make the try-out'}
+              {sends || to ? 'Send and rank them' : 'Make the try-out'}
             </Button>
             <Box marginLeft={{ base: 0, lg: 'auto' }} fontSize="small" color="ink.muted">
               {sends

@@ -2,6 +2,7 @@ import { Box, Flex, chakra } from '@chakra-ui/react';
 import { unitWord, type LengthUnit } from '../positionWords';
 import { subjectWords } from '../subjectWords';
 import { unitOf, type DraftAction, type TryOutDraft } from '../upload/tryOutDraft';
+import { StandsHere } from './StandsHere';
 
 /** Where one take stood, and whether that is how things stand now. */
 export function PositionCells({
@@ -50,21 +51,11 @@ export function PositionCells({
         <chakra.span color="ink.muted">{unitWord(unit, lengthUnit)}</chakra.span>
       </Flex>
       <Box gridColumn={{ base: '2 / -1', lg: 'auto' }}>
-        <chakra.label display="inline-flex" alignItems="center" gap="8px" minHeight="44px" cursor="pointer">
-          <chakra.input
-            type="radio"
-            name="stands-now"
-            aria-label={`Take ${number} is how things stand now`}
-            checked={draft.currentKey === placeKey}
-            onChange={() => dispatch({ type: 'currentChosen', key: placeKey })}
-            width="18px"
-            height="18px"
-            accentColor="var(--chakra-colors-ink)"
-          />
-          <chakra.span fontSize="small" color="ink.muted">
-            stands here now
-          </chakra.span>
-        </chakra.label>
+        <StandsHere
+          number={number}
+          checked={draft.currentKey === placeKey}
+          onChoose={() => dispatch({ type: 'currentChosen', key: placeKey })}
+        />
       </Box>
     </>
   );

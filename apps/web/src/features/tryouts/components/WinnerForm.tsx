@@ -4,43 +4,37 @@ import { useState } from 'react';
 import { Button } from '../../../components/Button';
 import { FieldError } from '../../../components/FieldError';
 import { TextField } from '../../../components/TextField';
+import { useKeeping } from '../../../lib/useKeeping';
 import { useTryOutActions } from '../hooks/useTryOutActions';
+import { WinnerSetup } from './WinnerSetup';
 
-/** Why the chosen one wins, and keeping it as how things stand from now on. */
-export function WinnerForm({
-  tryOut,
-  winnerId,
-  winnerName,
-}: {
+interface WinnerFormProps {
   tryOut: TryOutResponse;
   winnerId: string;
   winnerName: string;
-}) {
-  const { update } = useTryOutActions();
+}
+
+/** Why the chosen one wins, and making it how things stand from now on. */
+export function WinnerForm({ tryOut, winnerId, winnerName }: WinnerFormProps) {
+  const { update, makeSetup, undoSetup } = useTryOutActions();
   const [written, setWritten] = useState<string | null>(null);
-  const [busy, setBusy] = useState(false);
-  const [failure, setFailure] = useState('');
+  const { busy, failure, keep } = useKeeping();
   const reason = written ?? tryOut.reason;
-  const isKept = tryOut.winnerPlaceId === winnerId && tryOut.reason === reason.trim();
-  const keep = async () => {
-    setBusy(true);
-    setFailure('');
-    try {
-      await update(tryOut.id, { winnerPlaceId: winnerId, reason });
+  const made = tryOut.winnerPlaceId === winnerId ? tryOut.winnerSetup : null;
+  const isTold = tryOut.reason === reason.trim();
+  const keepWinner = () =>
+    keep(async () => {
+      if (made) await update(tryOut.id, { reason });
+      else await makeSetup(tryOut.id, { winnerPlaceId: winnerId, reason });
       setWritten(null);
-    } catch (error) {
-      setFailure(error instanceof Error ? error.message : 'That did not work. Try again.');
-    } finally {
-      setBusy(false);
-    }
-  };
+    });
   return (
     <Box
       as="form"
       marginTop="24px"
       onSubmit={(event) => {
         event.preventDefault();
-        if (!busy) void keep();
+        void keepWinner();
       }}
     >
       <Flex wrap="wrap" alignItems="flex-end" columnGap="18px" rowGap="14px">
@@ -52,13 +46,13 @@ export function WinnerForm({
             maxLength={1000}
           />
         </Box>
-        <Button type="submit" aria-disabled={busy}>
-          {busy ? 'Keeping…' : `Keep ${winnerName} as the winner`}
-        </Button>
+        {(!made || !isTold) && (
+          <Button type="submit" aria-disabled={busy}>
+            {busy ? 'Keeping…' : made ? 'Keep the reason' : `Make ${winnerName} the setup`}
+          </Button>
+        )}
       </Flex>
-      <Box role="status" marginTop="8px" minHeight="20px" fontSize="caption" color="ink.muted">
-        {isKept && `${winnerName} is kept as the winner.`}
-      </Box>
+      <WinnerSetup {...{ made, winnerName, busy }} onUndo={() => void keep(() => undoSetup(tryOut.id))} />
       {failure && <FieldError>{failure}</FieldError>}
     </Box>
   );

@@ -1,96 +1,45 @@
-import { useEffect, useRef, useState } from 'react';
-import { matchedTakes } from '../../../lib/audio/matchedTakes';
-import { TakesPlayer } from '../../../lib/audio/takesPlayer';
+import { useState } from 'react';
+import { useTakesPlayer } from '../../../lib/audio/useTakesPlayer';
+import { loadTakeSound } from '../../sheet/takeSound';
 import type { HeardPlace } from '../hearing';
-import { loadHeardPlace } from '../tryOutSound';
 
-type State = 'stopped' | 'loading' | 'playing';
-
-/** Hearing all takes of a try-out in step, equally loud, one at a time. Nothing is loaded before it is wanted. */
+/** Hearing all takes of a try-out in step and round and round, equally loud, one at a time. */
 export function useHearAll(places: readonly HeardPlace[]) {
-  const key = JSON.stringify(places);
-  const [told, setTold] = useState<{ key: string; state: State }>({ key, state: 'stopped' });
   const [chosenId, setChosenId] = useState<string | null>(null);
-  const [matched, setMatched] = useState<{ key: string; turnedDownDb: number } | null>(null);
-  const [failure, setFailure] = useState('');
-  const player = useRef<TakesPlayer | null>(null);
-  const loading = useRef<AbortController | null>(null);
   const heardIndex = Math.max(
     0,
     places.findIndex(({ placeId }) => placeId === chosenId),
   );
-  const latestIndex = useRef(heardIndex);
-  // Other takes or polarities are other sounds: what is told of the earlier ones no longer holds.
-  const state = told.key === key ? told.state : 'stopped';
-  const setState = (next: State) => setTold({ key, state: next });
-
-  const end = () => {
-    loading.current?.abort();
-    player.current?.close();
-    player.current = null;
-  };
-  // … and what was loaded is let go.
-  useEffect(() => end, [key]);
-
-  const load = async (signal: AbortSignal): Promise<TakesPlayer> => {
-    const sounds = await Promise.all(places.map((place) => loadHeardPlace(place, signal)));
-    signal.throwIfAborted();
-    const takes = matchedTakes(
-      sounds.map((sound, i) => ({ sound, overheadGainDb: places[i].overheadGainDb })),
-    );
-    setMatched({ key, turnedDownDb: Math.max(0, ...takes.map(({ matchDb }) => -matchDb)) });
-    return new TakesPlayer(
-      takes,
-      takes.map(() => 0),
-      latestIndex.current,
-      () => setState('stopped'),
-    );
-  };
-
-  const play = async () => {
-    loading.current?.abort();
-    const asked = (loading.current = new AbortController());
-    setFailure('');
-    setState(player.current ? 'playing' : 'loading');
-    try {
-      player.current ??= await load(asked.signal);
-      if (asked.signal.aborted) return;
-      setState('playing');
-      await player.current.play(0);
-    } catch (error) {
-      if (asked.signal.aborted) return;
-      setState('stopped');
-      setFailure(failureWords(error));
-    }
-  };
-
+  const load = async (_fromS: number, signal: AbortSignal) => ({
+    takes: await Promise.all(places.map((place) => loadHeardPlace(place, signal))),
+    zerosS: places.map(() => 0),
+    startS: 0,
+    endS: Infinity,
+    loops: true,
+  });
+  const { play, matchesDb, ...player } = useTakesPlayer({
+    key: JSON.stringify(places),
+    load,
+    selected: heardIndex,
+  });
   return {
-    state,
+    ...player,
     /** The place that is heard, or will be. */
     heardId: places[heardIndex]?.placeId ?? null,
     /** How far the loudest is turned down to be as loud as the quietest; null until the sound is there. */
-    turnedDownDb: matched?.key === key ? matched.turnedDownDb : null,
-    failure,
-    play: () => void play(),
-    stop: () => {
-      loading.current?.abort();
-      player.current?.stop();
-      setState('stopped');
-    },
+    turnedDownDb: matchesDb && Math.max(0, ...matchesDb.map((matchDb) => -matchDb)),
+    play: () => play(0),
     choose: (placeId: string) => {
-      const index = places.findIndex((place) => place.placeId === placeId);
-      if (index === -1) return;
-      latestIndex.current = index;
-      setChosenId(placeId);
-      player.current?.select(index);
+      if (places.some((place) => place.placeId === placeId)) setChosenId(placeId);
     },
   };
 }
 
 export type HearAll = ReturnType<typeof useHearAll>;
 
-function failureWords(error: unknown): string {
-  return error instanceof DOMException && error.name === 'NotAllowedError'
-    ? 'This browser did not play it. Allow sound for this page, then try again.'
-    : 'The takes could not be loaded. Check the connection, then try again.';
+/** A flipped overhead comes turned over. */
+async function loadHeardPlace({ flipped, overheadGainDb, ...stretch }: HeardPlace, signal: AbortSignal) {
+  const sound = await loadTakeSound(stretch, signal);
+  const overhead = flipped ? sound.overhead.map((sample) => -sample) : sound.overhead;
+  return { sound: { ...sound, overhead }, overheadGainDb };
 }

@@ -1,3 +1,4 @@
+import type { TryOutResponse } from '@thudline/contracts';
 import { useCallback, useReducer, useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import type { FileReading } from '../../upload/pickedFile';
@@ -9,12 +10,19 @@ import { useReadFiles } from './useReadFiles';
 import { useSendPairs } from './useSendQueue';
 import { useTryOutActions } from './useTryOutActions';
 
+interface DraftOf {
+  takeIds: readonly string[];
+  /** The try-out that gets more takes; null for a new one. */
+  to: TryOutResponse | null;
+  lengthUnit: LengthUnit;
+}
+
 /** Putting a try-out together, and making it: the pairs are then sent while its page is open. */
-export function useTryOutDraft(takeIds: readonly string[], lengthUnit: LengthUnit) {
-  const [draft, dispatch] = useReducer(draftReducer, takeIds, emptyDraft);
+export function useTryOutDraft({ takeIds, to, lengthUnit }: DraftOf) {
+  const [draft, dispatch] = useReducer(draftReducer, { takeIds, to }, (of) => emptyDraft(of.takeIds, of.to));
   const [problem, setProblem] = useState('');
   const [busy, setBusy] = useState(false);
-  const { create } = useTryOutActions();
+  const { create, addPlaces } = useTryOutActions();
   const sendPairs = useSendPairs();
   const navigate = useNavigate();
   const onRead = useCallback(
@@ -31,7 +39,7 @@ export function useTryOutDraft(takeIds: readonly string[], lengthUnit: LengthUni
     setBusy(true);
     try {
       const { body, pairs } = tryOutPlan(draft, { lengthUnit, newKey: newUploadKey, nowMs: Date.now() });
-      const tryOut = await create(body);
+      const tryOut = to ? await addPlaces(to.id, { places: body.places }) : await create(body);
       if (pairs.length > 0) sendPairs(tryOut.id, pairs);
       void navigate(`/tryouts/${tryOut.id}`, { replace: true });
     } catch (error) {

@@ -3,7 +3,13 @@ import { signed } from '../../../lib/format';
 import { useWidth } from '../../../lib/useWidth';
 import { ink } from '../../sheet/pictures/ink';
 import { halo, PictureText } from '../../sheet/pictures/PictureText';
-import { tryOutPlotLayout, type PlotLayout, type PlotMark, type PlotPoint } from './tryOutPlotLayout';
+import {
+  belowRowPx,
+  tryOutPlotLayout,
+  type PlotLayout,
+  type PlotMark,
+  type PlotPoint,
+} from './tryOutPlotLayout';
 
 export interface PlotWords {
   /** "take 18" */
@@ -135,16 +141,9 @@ function Mark({ mark, words }: { mark: PlotMark; words: PlotWords }) {
         <circle cx={x} cy={y} r={7} fill={ink.sheet} stroke={ink.ink} strokeWidth="2.4" />
       )}
       {mark.mark === 'plain' && <path d={`M${x - 9} ${y}h18`} stroke={ink.ink} strokeWidth="3.4" />}
-      {mark.room !== 'none' && (
-        <text
-          x={mark.wordsLeft ? x - 14 : x + 14}
-          y={mark.mark === 'plain' ? y + 5 : y + 33}
-          textAnchor={mark.wordsLeft ? 'end' : 'start'}
-          fill={ink.muted}
-          style={{ fontSize: '13px' }}
-          {...halo}
-        >
-          {mark.room === 'whole' && (
+      {mark.words !== 'none' && (
+        <text {...wordsPlace(mark)} fill={ink.muted} style={{ fontSize: '13px' }} {...halo}>
+          {mark.words === 'beside' && (
             <tspan fill={ink.ink} style={{ fontWeight: 600 }}>
               {words.take}{' '}
             </tspan>
@@ -156,8 +155,18 @@ function Mark({ mark, words }: { mark: PlotMark; words: PlotWords }) {
   );
 }
 
+/** Beside the mark, clear of ring and disc, or over the upper end of its bar. */
+function wordsPlace({ words, wordsLeft, mark, x, y, highY }: PlotMark) {
+  if (words === 'over')
+    return { x, y: Math.min(highY, y - (mark === 'plain' ? 2 : 8)) - 7, textAnchor: 'middle' } as const;
+  const beside = { y: mark === 'plain' ? y + 5 : y + 33 };
+  return wordsLeft
+    ? ({ ...beside, x: x - 14, textAnchor: 'end' } as const)
+    : ({ ...beside, x: x + 14, textAnchor: 'start' } as const);
+}
+
 function PositionTick({
-  mark: { x, mark },
+  mark: { x, mark, isNamed, belowRow },
   bottom,
   words,
   unit,
@@ -170,20 +179,22 @@ function PositionTick({
   return (
     <g>
       <path d={`M${x} ${bottom}v5`} stroke={ink.edge} strokeWidth="1.2" />
-      <PictureText
-        x={x}
-        y={bottom + 19}
-        textAnchor="middle"
-        bold={mark !== 'plain'}
-        fill={mark === 'plain' ? ink.muted : ink.ink}
-      >
-        {words.position}
-        {unit && (unit === '°' ? unit : ` ${unit}`)}
-      </PictureText>
+      {isNamed && (
+        <PictureText
+          x={x}
+          y={bottom + 19}
+          textAnchor="middle"
+          bold={mark !== 'plain'}
+          fill={mark === 'plain' ? ink.muted : ink.ink}
+        >
+          {words.position}
+          {unit && (unit === '°' ? unit : ` ${unit}`)}
+        </PictureText>
+      )}
       {words.below && (
         <PictureText
           x={x}
-          y={bottom + 36}
+          y={bottom + 36 + belowRow * belowRowPx}
           textAnchor="middle"
           bold={mark === 'best'}
           fill={mark === 'best' ? ink.ink : ink.muted}

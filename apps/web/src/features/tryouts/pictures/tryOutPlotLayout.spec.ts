@@ -72,7 +72,28 @@ describe('the plot of a try-out', () => {
       const { marks, left, right } = layout(five, widthPx);
       for (const { x } of marks) expect(x > left && x < right).toBe(true);
     }
-    expect(layout(five, 704).marks.map((mark) => mark.room)).toEqual(Array(5).fill('whole'));
-    expect(layout(five, 324).marks.some((mark) => mark.room === 'whole')).toBe(false);
+    expect(layout(five, 704).marks.map(({ words }) => words)).toEqual(Array(5).fill('beside'));
+  });
+
+  it('writes every figure over its bar on a phone, and gives ring and disc two lines for their words', () => {
+    const phone = layout(five, 324);
+    expect(phone.marks.map(({ words }) => words)).toEqual(Array(5).fill('over'));
+    expect(phone.marks.every(({ isNamed }) => isNamed)).toBe(true);
+    expect(phone.marks.map(({ belowRow }) => belowRow)).toEqual([0, 0, 1, 0, 0]);
+    expect(phone.heightPx).toBeGreaterThan(layout(five, 704).heightPx);
+  });
+
+  it('names only the ends, ring and disc where twelve stand close', () => {
+    const twelve = Array.from({ length: 12 }, (_, i) =>
+      point(String(i), 1 + i / 10, {
+        position: 40 + 6 * i,
+        mark: i === 5 ? 'now' : i === 11 ? 'best' : 'plain',
+        asGood: i === 11,
+      }),
+    );
+    const { marks } = layout(twelve, 324);
+    const named = marks.filter(({ isNamed }) => isNamed).map(({ id }) => id);
+    expect(named).toEqual(['0', '5', '11']);
+    expect(marks.filter(({ words }) => words === 'over').map(({ id }) => id)).toEqual(['5', '11']);
   });
 });

@@ -17,10 +17,14 @@ export interface PlotMark extends PlotPoint {
   y: number;
   lowY: number;
   highY: number;
-  /** How much room there is for words beside it. */
-  room: 'whole' | 'value' | 'none';
+  /** Take and figure beside it, or its figure alone over its bar, as there is room. */
+  words: 'beside' | 'over' | 'none';
   /** Words stand left of the mark where the right edge is near. */
   wordsLeft: boolean;
+  /** Whether there is room to write its position under the axis. */
+  isNamed: boolean;
+  /** Line of what stands under the position: the best gives way to how things stand now beside it. */
+  belowRow: 0 | 1;
 }
 
 export interface PlotLayout {
@@ -38,9 +42,13 @@ export interface PlotLayout {
 }
 
 const room = { left: 52, right: 16, top: 32, plotPx: 226, below: 44 };
+/** From one line under the axis to the next. */
+export const belowRowPx = 17;
 const endPads = 0.14;
 const wholeWordsPx = 88;
-const valuePx = 46;
+const valuePx = 36;
+const namePx = 30;
+const belowPx = 96;
 
 /** Where everything of the plot stands: measure up, position across. */
 export function tryOutPlotLayout({
@@ -65,13 +73,13 @@ export function tryOutPlotLayout({
   const y = (value: number) => bottom - ((value - axis.min) / (axis.max - axis.min)) * (bottom - top);
   const x = acrossScale(points, { left, right });
   const marks = points.map((point, index) => markOf(point, { x: x(index), y, left, right }));
-  const spaced = withRoom(marks, right);
+  const spaced = withWords(marks, right);
   return {
     left,
     right,
     top,
     bottom,
-    heightPx: bottom + room.below,
+    heightPx: bottom + room.below + (spaced.some(({ belowRow }) => belowRow > 0) ? belowRowPx : 0),
     ticks: axis.ticks.map((value) => ({ value, y: y(value), digits: axis.digits })),
     zeroY: axis.min <= 0 && axis.max >= 0 ? y(0) : null,
     band: bandOf(points, y),
@@ -106,23 +114,43 @@ function markOf(
     y: y(value),
     lowY: y(interval?.low ?? value),
     highY: y(interval?.high ?? value),
-    room: 'none',
+    words: 'none',
     wordsLeft: false,
+    isNamed: true,
+    belowRow: 0,
   };
 }
 
-/** Words need the gap to the next mark; the last one may write to its left. */
-function withRoom(marks: PlotMark[], right: number): PlotMark[] {
+/** Words stand beside every mark or over every mark; ring and disc always have their figure and their position. */
+function withWords(marks: PlotMark[], right: number): PlotMark[] {
   const across = [...marks].sort((a, b) => a.x - b.x);
+  const gapsPx = across.slice(1).map(({ x }, i) => x - across[i].x);
+  const closestPx = Math.min(Infinity, ...gapsPx);
+  const last = across.at(-1);
+  const lastLeft =
+    last !== undefined && right - last.x < wholeWordsPx && (gapsPx.at(-1) ?? Infinity) > 2 * wholeWordsPx;
+  const beside = across.every((mark, i) =>
+    mark === last && lastLeft ? true : Math.min(gapsPx[i] ?? Infinity, right - mark.x) >= wholeWordsPx,
+  );
+  const now = marks.find(({ mark }) => mark === 'now');
   return marks.map((mark) => {
-    const place = across.indexOf(mark);
-    const after = (across[place + 1]?.x ?? Infinity) - mark.x;
-    const before = mark.x - (across[place - 1]?.x ?? -Infinity);
-    const toEdge = right - mark.x;
-    const wordsLeft = after === Infinity && toEdge < wholeWordsPx && before > 2 * wholeWordsPx;
-    const gap = wordsLeft ? before : Math.min(after, toEdge);
-    return { ...mark, wordsLeft, room: gap >= wholeWordsPx ? 'whole' : gap >= valuePx ? 'value' : 'none' };
+    const isSpecial = mark.mark !== 'plain';
+    const fits = (px: number) => closestPx >= px || isSpecial || farFromSpecial(mark, marks, px);
+    return {
+      ...mark,
+      words: beside ? 'beside' : closestPx >= valuePx || isSpecial ? 'over' : 'none',
+      wordsLeft: beside && lastLeft && mark === last,
+      isNamed: fits(namePx),
+      belowRow: mark.mark === 'best' && now && Math.abs(now.x - mark.x) < belowPx ? 1 : 0,
+    };
   });
+}
+
+/** The first and the last position are told too, where they don't run into ring or disc. */
+function farFromSpecial(mark: PlotMark, marks: readonly PlotMark[], px: number): boolean {
+  const xs = marks.map(({ x }) => x);
+  const isEnd = mark.x === Math.min(...xs) || mark.x === Math.max(...xs);
+  return isEnd && marks.every((other) => other.mark === 'plain' || Math.abs(other.x - mark.x) >= px);
 }
 
 /**

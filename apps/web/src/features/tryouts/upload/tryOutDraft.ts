@@ -1,4 +1,10 @@
-import type { TrackRole, TryOutSubject, TryOutUnit } from '@thudline/contracts';
+import {
+  tryOutLimits,
+  type TrackRole,
+  type TryOutResponse,
+  type TryOutSubject,
+  type TryOutUnit,
+} from '@thudline/contracts';
 import { isReady, type FileReading, type PickedFile } from '../../upload/pickedFile';
 import { toShown, type LengthUnit } from '../positionWords';
 import { groupFiles, pairFile, placed, positionOfName, swapped, withoutFile, type Pair } from './pairs';
@@ -16,6 +22,8 @@ export interface TryOutDraft {
   /** Where the subject is another. */
   differs: string;
   otherUnit: TryOutUnit;
+  fewestTakes: number;
+  mostTakes: number;
   /** The place that is how things stand now. */
   currentKey: string | null;
 }
@@ -34,15 +42,21 @@ export type DraftAction =
   | { type: 'unitChosen'; unit: TryOutUnit }
   | { type: 'currentChosen'; key: string | null };
 
-export const emptyDraft = (takeIds: readonly string[] = []): TryOutDraft => ({
+/** @param to - the try-out that gets more takes; null for a new one */
+export const emptyDraft = (
+  takeIds: readonly string[] = [],
+  to: TryOutResponse | null = null,
+): TryOutDraft => ({
   takeIds,
   files: [],
   pairs: [],
   corrected: false,
   positions: {},
-  subject: 'overhead-height',
-  differs: '',
-  otherUnit: 'label',
+  subject: to?.subject ?? 'overhead-height',
+  differs: to?.differs ?? '',
+  otherUnit: to?.unit ?? 'label',
+  fewestTakes: to ? 1 : tryOutLimits.fewestTakes,
+  mostTakes: tryOutLimits.mostTakes - (to?.places.length ?? 0),
   currentKey: null,
 });
 

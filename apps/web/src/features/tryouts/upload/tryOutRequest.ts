@@ -1,7 +1,8 @@
 import { tryOutLimits, type CreateTryOutRequest, type TryOutPlaceRequest } from '@thudline/contracts';
 import { isReady, type ReadyFile } from '../../upload/pickedFile';
 import { recordedAt, type RecordedFile } from '../../upload/recordedAt';
-import { positionWords, toKept, type LengthUnit } from '../positionWords';
+import { typedPosition } from '../positionInput';
+import { positionWords, type LengthUnit } from '../positionWords';
 import { subjectWords } from '../subjectWords';
 import { pairRoles, type Pair } from './pairs';
 import type { PairToSend } from './sendQueue';
@@ -12,24 +13,25 @@ interface Plan {
   pairs: PairToSend[];
 }
 
-const typedNumber = (text: string) => Number(text.trim().replace(',', '.').replace('\u2212', '-'));
-
 /** Why it can't be made yet, for whoever tries; empty where it can. */
 export function draftProblem(draft: TryOutDraft, lengthUnit: LengthUnit): string {
   const { files, pairs, takeIds } = draft;
   if (files.some(({ reading }) => reading.kind === 'reading'))
     return 'One moment: the files are still being looked at.';
   const count = pairs.length + takeIds.length;
-  if (count < tryOutLimits.fewestTakes) return 'A try-out needs at least two takes. Drop their files here.';
-  if (count > tryOutLimits.mostTakes)
-    return `A try-out has at most ${tryOutLimits.mostTakes} takes. Clear ${count - tryOutLimits.mostTakes}.`;
+  if (count < draft.fewestTakes)
+    return draft.fewestTakes === 1
+      ? 'Drop the files of at least one take here.'
+      : 'A try-out needs at least two takes. Drop their files here.';
+  if (count > draft.mostTakes)
+    return `A try-out has at most ${tryOutLimits.mostTakes} takes. Clear ${count - draft.mostTakes}.`;
   if (draft.subject === 'other' && !draft.differs.trim()) return 'Say in a few words what differs.';
   for (const [index, pair] of pairs.entries()) {
     const problem = pairProblem(draft, pair);
     if (problem) return `Pair ${index + 1}: ${problem}`;
   }
   const wrong = placeTexts(draft, lengthUnit).findIndex(
-    (text) => unitOf(draft) !== 'label' && text.trim() !== '' && !Number.isFinite(typedNumber(text)),
+    (text) => typedPosition(text, unitOf(draft), lengthUnit) === null,
   );
   return wrong === -1 ? '' : `Write the position of take ${wrong + 1} as a number.`;
 }
@@ -64,11 +66,8 @@ export function tryOutPlan(
   const { subject } = draft;
   const unit = unitOf(draft);
   const texts = placeTexts(draft, lengthUnit);
-  const positionOf = (index: number) => {
-    const text = texts[index].trim();
-    if (unit === 'label' || text === '') return { position: null, label: text };
-    return { position: toKept(typedNumber(text), unit, lengthUnit), label: '' };
-  };
+  const positionOf = (index: number) =>
+    typedPosition(texts[index], unit, lengthUnit) ?? { position: null, label: '' };
   const keys = draft.pairs.map(newKey);
   const differs = subject === 'other' ? draft.differs.trim() : '';
   const places: TryOutPlaceRequest[] = [

@@ -1,5 +1,6 @@
 import { chakra } from '@chakra-ui/react';
 import { Headline } from '../../../components/Headline';
+import { LeaveQuestion } from '../../../components/LeaveQuestion';
 import { PageLoading } from '../../../components/PageLoading';
 import { SheetPaper } from '../../../components/SheetPaper';
 import { headline } from '../headline';
@@ -11,7 +12,6 @@ import { DropAnywhere, type ChooseFiles } from './DropAnywhere';
 import { DropBox } from './DropBox';
 import { FileRows } from './FileRows';
 import { FirstRun } from './FirstRun';
-import { LeaveQuestion } from './LeaveQuestion';
 import { SendRow } from './SendRow';
 import { WhatChanged } from './WhatChanged';
 
@@ -36,7 +36,14 @@ export function NewTakeSheet({
             ) : (
               <Upload newTake={newTake} choose={choose} />
             )}
-            {newTake.leaving.asking && <LeaveQuestion {...newTake.leaving} />}
+            {newTake.leaving.asking && (
+              <LeaveQuestion
+                {...newTake.leaving}
+                strong="Files are still on their way."
+                rest="Leaving stops them."
+                leaveWords="Leave and stop them"
+              />
+            )}
           </SheetPaper>
         );
       }}

@@ -1,3 +1,4 @@
+import { useLeaveGuard } from '../../../lib/useLeaveGuard';
 import { useEffect, useReducer, useRef, type Dispatch } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { arrangement, type ChosenRole } from '../arrangement';
@@ -12,7 +13,6 @@ import {
   type UploadAction,
   type UploadState,
 } from '../uploadState';
-import { useLeaveGuard } from './useLeaveGuard';
 import { useSending } from './useSending';
 import { useUploadRooms } from './useUploadRooms';
 import { useUploadSetups } from './useUploadSetups';
@@ -45,10 +45,7 @@ export function useNewTake(previous: PreviousTake | null) {
     done,
     setups: setups.all,
     setupId,
-    chooseSetup: (id: string) => {
-      setups.remember(id);
-      dispatch({ type: 'setupChosen', setupId: id });
-    },
+    chooseSetup: (id: string) => dispatch({ type: 'setupChosen', setupId: id }),
     rooms: rooms.all,
     roomId,
     chooseRoom: (id: string) => {

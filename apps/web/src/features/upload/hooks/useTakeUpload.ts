@@ -35,6 +35,7 @@ export function useTakeUpload() {
     const take = await withWordsNow(await readTake(answer), wordsNow());
     await mutate(paths.take(take.id), take, { revalidate: false });
     void mutate(isTakesKey);
+    if (request.setupId) void mutate(paths.setups);
     return take;
   };
 

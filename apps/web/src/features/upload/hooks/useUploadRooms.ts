@@ -8,7 +8,7 @@ export function useUploadRooms() {
   const { rooms = [] } = useRooms();
   return {
     all: rooms,
-    chosen: (here: string | null) => chosenAmong(rooms, here, last),
+    chosen: (here: string | null) => chosenAmong(rooms, here, last.read()),
     remember: last.write,
   };
 }

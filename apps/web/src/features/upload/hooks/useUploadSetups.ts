@@ -1,14 +1,8 @@
 import { useSetups } from '../../setups/hooks/useSetups';
-import { chosenAmong, lastChosen } from '../lastChosen';
+import { chosenAmong } from '../lastChosen';
 
-const last = lastChosen('thudline.setup');
-
-/** The setups a take can have, and the one chosen last. */
+/** The setups a take can have, and how things stand now. */
 export function useUploadSetups() {
-  const { setups = [] } = useSetups();
-  return {
-    all: setups,
-    chosen: (here: string | null) => chosenAmong(setups, here, last),
-    remember: last.write,
-  };
+  const { setups = [], currentId } = useSetups();
+  return { all: setups, chosen: (here: string | null) => chosenAmong(setups, here, currentId) };
 }

@@ -1,16 +1,26 @@
 import { Box, Flex } from '@chakra-ui/react';
 import { useEffect, useRef } from 'react';
-import { Button } from '../../../components/Button';
-import type { NewTake } from '../hooks/useNewTake';
+import { Button } from './Button';
 
-/** Asked when somebody goes to another page while files are on their way. */
-export function LeaveQuestion({ stay, leave }: Omit<NewTake['leaving'], 'asking'>) {
+interface LeaveQuestionProps {
+  /** "Files are still on their way." */
+  strong: string;
+  /** What leaving does. */
+  rest: string;
+  /** "Leave and stop them" */
+  leaveWords: string;
+  stay: () => void;
+  leave: () => void;
+}
+
+/** Asked when somebody goes to another page and something would be lost. */
+export function LeaveQuestion({ strong, rest, leaveWords, stay, leave }: LeaveQuestionProps) {
   const stayButton = useRef<HTMLButtonElement>(null);
   useEffect(() => stayButton.current?.focus(), []);
   return (
     <Flex
       role="alertdialog"
-      aria-label="Files are still on their way"
+      aria-label={strong.replace(/\.$/, '')}
       position="fixed"
       zIndex={15}
       left={{ base: '12px', md: '50%' }}
@@ -30,14 +40,14 @@ export function LeaveQuestion({ stay, leave }: Omit<NewTake['leaving'], 'asking'
       onKeyDown={(event) => event.key === 'Escape' && stay()}
     >
       <Box>
-        <b>Files are still on their way.</b> Leaving stops them.
+        <b>{strong}</b> {rest}
       </Box>
       <Flex gap="10px">
         <Button type="button" ref={stayButton} onClick={stay}>
           Stay here
         </Button>
         <Button type="button" look="outline" onClick={leave}>
-          Leave and stop them
+          {leaveWords}
         </Button>
       </Flex>
     </Flex>
