@@ -108,7 +108,7 @@ describe('a comparison', () => {
     await userEvent.click(screen.getByRole('button', { name: /^all \d+ figures$/ }));
     expect(row(/^decay, 500 Hz/)).toHaveTextContent(/−4 to \+8 %.*no clear change/);
     expect(row(/^attack/)).toHaveTextContent(/strength can’t be matched.*can’t tell/);
-    expect(screen.getByRole('complementary', { name: 'Thudline, matching' })).toBeInTheDocument();
+    expect(screen.getByRole('complementary', { name: 'a Thudline, matching' })).toBeInTheDocument();
   });
 
   it('has the figures as a table with steps and hits', async () => {
