@@ -68,6 +68,6 @@ export const tryOutsCsv = Object.assign(
       from try_out o join try_out_place p on p.try_out_id = o.id
         left join take t on t.owner_id = o.owner_id and t.upload_key = p.upload_key and t.deleted_at is null
         left join report r on r.measurement_id = t.current_report_id
-      where o.owner_id = ? order by o.id, p.rank`,
+      where o.owner_id = ? and o.deleted_at is null and p.removed_at is null order by o.id, p.rank`,
   },
 );
