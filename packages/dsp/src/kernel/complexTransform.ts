@@ -54,7 +54,8 @@ export function createKernelTransform(size: number): ComplexTransform | null {
   const instance = kernelInstance(compiled, turns);
   if (!instance) return null;
   const { functions, memory } = instance;
-  for (const { groups, turns: at } of stages) writeTurns(new Float64Array(memory, at), groups);
+  const allTurns = new Float64Array(memory, 2 * size * bytesOfOne);
+  allTurns.set(turnsFor(size, stages));
   const views = rooms.map((at) => new Float64Array(memory, at, 2 * size));
   return {
     input: views[0],
@@ -73,12 +74,26 @@ export function createKernelTransform(size: number): ComplexTransform | null {
   };
 }
 
-function writeTurns(into: Float64Array, groups: number): void {
-  for (let group = 0, at = 0; group < groups; group += 1) {
-    for (let times = 1; times <= turnsOfGroup; times += 1, at += 2) {
-      const turn = (-2 * Math.PI * group * times) / (4 * groups);
-      into[at] = Math.cos(turn);
-      into[at + 1] = Math.sin(turn);
+/** They depend on nothing but the size, and take as long to make as some transforms. */
+const keptTurns = new Map<number, Float64Array>();
+const largestKept = 2 ** 14;
+
+/** @returns the turns of every stage, one stage after the other */
+function turnsFor(size: number, stages: readonly Stage[]): Float64Array {
+  const known = keptTurns.get(size);
+  if (known) return known;
+  const count = stages.reduce((sum, { groups }) => sum + groups, 0);
+  const turns = new Float64Array(2 * turnsOfGroup * count);
+  let at = 0;
+  for (const { groups } of stages) {
+    for (let group = 0; group < groups; group += 1) {
+      for (let times = 1; times <= turnsOfGroup; times += 1, at += 2) {
+        const turn = (-2 * Math.PI * group * times) / (4 * groups);
+        turns[at] = Math.cos(turn);
+        turns[at + 1] = Math.sin(turn);
+      }
     }
   }
+  if (size <= largestKept) keptTurns.set(size, turns);
+  return turns;
 }
