@@ -111,6 +111,9 @@ function checked(tracks: MeasureTakeOptions['tracks']): {
   return { kick: kicks[0], others, sampleRateHz: tracks[0].source.sampleRateHz };
 }
 
+/** Of fewer hits another thread's part takes as long to get going as it saves; for speed. */
+const fewestShared = 200;
+
 /** Always in the same two halves, so that the sums are the same to the last bit whoever adds them up. */
 async function readHalves(
   { here, beside }: { readonly here: TakeSteps; readonly beside: TakeSteps | undefined },
@@ -121,8 +124,8 @@ async function readHalves(
   const middle = Math.ceil(count / 2);
   const first = { ...request, from: 0, to: middle };
   const second = { ...request, from: middle, to: count };
-  const elsewhere = beside && awaited(beside.pairPart(first, () => undefined));
-  const half = (at: number) => (progress: number) => onProgress(beside ? progress : (at + progress) / 2);
+  const elsewhere = beside && count >= fewestShared ? awaited(beside.pairPart(first, () => undefined)) : null;
+  const half = (at: number) => (progress: number) => onProgress(elsewhere ? progress : (at + progress) / 2);
   if (elsewhere) {
     const own = await here.pairPart(second, half(1));
     return [await elsewhere, own];

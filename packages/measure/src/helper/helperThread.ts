@@ -1,9 +1,10 @@
 import { parentPort } from 'node:worker_threads';
-import { createTakeSteps, type TakeSteps, type TrackHops } from '@thudline/dsp/measuring';
+import { createTakeSteps, type TakeSteps } from '@thudline/dsp/measuring';
 import { withOpenFiles } from '../openFiles';
 import { chosenTracks } from '../trackChoice';
 import { blocksAhead } from './blocksAhead';
 import type { HelperAnswer, HelperRequest, OpenTake } from './helperMessages';
+import { packedHops } from './packedHops';
 
 /** The other end of `takeHelper.ts`, in a worker thread: does steps of the take it was told to open. */
 interface OpenedTake {
@@ -13,7 +14,7 @@ interface OpenedTake {
 
 let take: OpenedTake | null = null;
 /** By the id of a pass: lets it go on by one more block. */
-const takenOf = new Map<number, () => void>();
+const takenOf = new Map<number, (room: ArrayBuffer) => void>();
 
 parentPort?.on('message', (request: HelperRequest) => {
   const { id } = request;
@@ -43,7 +44,7 @@ async function done(
       take = null;
       return null;
     case 'taken':
-      takenOf.get(request.id)?.();
+      takenOf.get(request.id)?.(request.room);
       return undefined;
     case 'pass':
       return pass(request);
@@ -78,15 +79,17 @@ function opened({ paths, tracks }: OpenTake): OpenedTake {
 async function pass({ id, track, options }: Extract<HelperRequest, { task: 'pass' }>) {
   let ahead = 0;
   let goOn = (): void => undefined;
-  takenOf.set(id, () => {
+  const rooms: ArrayBuffer[] = [];
+  takenOf.set(id, (room) => {
+    rooms.push(room);
     ahead -= 1;
     goOn();
   });
   const reading = (await steps()).pass(track, options);
   try {
     for (let hops = await reading.next(); hops; hops = await reading.next()) {
-      const copied = copyOf(hops);
-      tell({ id, hops: copied }, [copied.low, copied.peaks, copied.body, copied.bright].map(bufferOf));
+      const packed = packedHops(hops, rooms.pop());
+      tell({ id, hops: packed }, [packed.buffer]);
       ahead += 1;
       if (ahead >= blocksAhead) {
         await new Promise<void>((resolve) => {
@@ -99,13 +102,4 @@ async function pass({ id, track, options }: Extract<HelperRequest, { task: 'pass
     takenOf.delete(id);
     await reading.close();
   }
-}
-
-/** The next block is put where this one is. */
-function copyOf({ low, peaks, body, bright }: TrackHops): TrackHops {
-  return { low: low.slice(), peaks: peaks.slice(), body: body.slice(), bright: bright.slice() };
-}
-
-function bufferOf(hops: Float64Array): ArrayBuffer {
-  return hops.buffer as ArrayBuffer;
 }

@@ -1,15 +1,9 @@
 import { existsSync } from 'node:fs';
 import { join } from 'node:path';
 import { Worker } from 'node:worker_threads';
-import type {
-  OverheadFacts,
-  PairPart,
-  PassedTrack,
-  TakeSteps,
-  TrackHops,
-  TrackReading,
-} from '@thudline/dsp/measuring';
+import type { OverheadFacts, PairPart, PassedTrack, TakeSteps, TrackReading } from '@thudline/dsp/measuring';
 import type { HelperAnswer, HelperTask, OpenTake } from './helperMessages';
+import { unpackedHops, type PackedHops } from './packedHops';
 
 /** A second thread that takes half of the work off a measurement. */
 export interface TakeHelper {
@@ -102,7 +96,8 @@ function asked<Result>(ask: Ask, task: HelperTask): Promise<Result> {
 
 /** A pass that sends its blocks ahead of being asked for them. */
 function remotePass(ask: Ask, worker: Worker, task: HelperTask): TrackReading {
-  const blocks: TrackHops[] = [];
+  const blocks: PackedHops[] = [];
+  let given: PackedHops | null = null;
   let arrived = (): void => undefined;
   let isOver = false;
   const id: { value: number } = { value: 0 };
@@ -119,18 +114,21 @@ function remotePass(ask: Ask, worker: Worker, task: HelperTask): TrackReading {
   passed.catch(() => undefined);
   return {
     async next() {
+      if (given) {
+        worker.postMessage({ task: 'taken', id: id.value, room: given.buffer }, [given.buffer]);
+        given = null;
+      }
       while (blocks.length === 0 && !isOver) {
         await new Promise<void>((resolve) => {
           arrived = resolve;
         });
       }
-      const hops = blocks.shift();
-      if (!hops) {
+      given = blocks.shift() ?? null;
+      if (!given) {
         await passed;
         return null;
       }
-      worker.postMessage({ task: 'taken', id: id.value });
-      return hops;
+      return unpackedHops(given);
     },
     result: () => passed,
     close: () => Promise.resolve(),
