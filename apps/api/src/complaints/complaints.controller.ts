@@ -2,6 +2,7 @@ import { Body, Controller, Get, HttpCode, Param, Patch, Post } from '@nestjs/com
 import { ApiNoContentResponse, ApiTags } from '@nestjs/swagger';
 import { ZodResponse } from 'nestjs-zod';
 import { Access } from '../access/access.decorator';
+import { CurrentViewer, Viewer } from '../access/viewer';
 import { Asked, CurrentAsked } from '../notes/asked';
 import { NoteReadersService } from '../notes/note-readers.service';
 import { ComplaintsService } from './complaints.service';
@@ -36,7 +37,11 @@ export class ComplaintsController {
   @Access.role('admin')
   @HttpCode(204)
   @ApiNoContentResponse({ description: 'It is off the list of what is open.' })
-  settle(@Param('complaintId') complaintId: string, @Body() body: SettleComplaintDto): Promise<void> {
-    return this.complaints.settle(complaintId, body);
+  settle(
+    @CurrentViewer() viewer: Viewer,
+    @Param('complaintId') complaintId: string,
+    @Body() body: SettleComplaintDto,
+  ): Promise<void> {
+    return this.complaints.settle(viewer, complaintId, body);
   }
 }

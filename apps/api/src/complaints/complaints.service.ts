@@ -2,6 +2,8 @@ import { EntityManager } from '@mikro-orm/postgresql';
 import { Inject, Injectable } from '@nestjs/common';
 import { ComplaintResponse, CreateComplaintRequest, ListComplaintsResponse } from '@thudline/contracts';
 import { validate } from 'uuid';
+import { Viewer } from '../access/viewer';
+import { AuditService } from '../audit/audit.service';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
 import { notFound } from '../errors/app-error';
@@ -19,6 +21,7 @@ export class ComplaintsService {
     private readonly em: EntityManager,
     private readonly notes: NotesService,
     private readonly throttle: ThrottleService,
+    private readonly audit: AuditService,
     @Inject(CONFIG) private readonly config: Config,
   ) {}
 
@@ -30,7 +33,15 @@ export class ComplaintsService {
     const limit = this.config.limits.complaintsPerAddress;
     await this.throttle.count({ key: 'complaint', address, limit, windowS: 3_600 });
     const note = noteId === undefined ? null : await this.notes.getReadable(reader, noteId);
-    this.em.create(Complaint, { take: reader.takeId, note, reporter: reader.userId, reason });
+    const complaint = this.em.create(Complaint, {
+      take: reader.takeId,
+      note,
+      reporter: reader.userId,
+      reason,
+    });
+    const userId = reader.userId ?? undefined;
+    await this.em.flush();
+    this.audit.record({ kind: 'complaint-made', userId, subjectId: complaint.id, address });
     await this.em.flush();
   }
 
@@ -49,7 +60,11 @@ export class ComplaintsService {
   }
 
   /** Safe to call twice. */
-  async settle(complaintId: string, { removeNote }: { removeNote: boolean }): Promise<void> {
+  async settle(
+    { user }: Viewer,
+    complaintId: string,
+    { removeNote }: { removeNote: boolean },
+  ): Promise<void> {
     const found = validate(complaintId)
       ? await this.em.findOne(Complaint, { id: complaintId }, { populate: ['note'] })
       : null;
@@ -59,6 +74,7 @@ export class ComplaintsService {
     // One that its writer took away stays away, too.
     if (note && removeNote)
       Object.assign(note, { deletedAt: note.deletedAt ?? new Date(), removedBy: 'admin' });
+    this.audit.record({ kind: 'complaint-settled', userId: user.id, subjectId: found.id });
     await this.em.flush();
   }
 }

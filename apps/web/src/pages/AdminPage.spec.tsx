@@ -1,4 +1,5 @@
 import {
+  complaintResponse,
   paths,
   type AccountResponse,
   type AuditEntry,
@@ -52,6 +53,7 @@ function open(routes: FakeRoutes = {}, me: Partial<MeResponse> = { roles: ['play
     [`GET ${paths.me}`]: json({ ...sampleMe, ...me }),
     [`GET ${paths.adminAccounts}`]: json({ items: [mika], next: null, total: 1, bytes: 15e6 }),
     [`GET ${paths.adminWork}`]: json({ items: [failed] }),
+    [`GET ${paths.complaints}`]: json({ items: [] }),
     [`GET ${paths.adminAudit}`]: json({ items: [joined], next: null }),
     [`GET ${paths.adminSettings}`]: json(settings),
     ...routes,
@@ -124,6 +126,32 @@ describe('the page of whoever runs the installation', () => {
     await userEvent.click(await screen.findByRole('button', { name: 'try measuring, take 3 again' }));
     expect(await screen.findByText('Nothing has failed.')).toBeInTheDocument();
     expect(screen.getByText('Nothing failed.')).toBeInTheDocument();
+  });
+
+  it('settles a complaint, and takes the note away', async () => {
+    const complaint = complaintResponse.parse({
+      id: listId(60),
+      createdAt: '2026-11-02T10:00:00.000Z',
+      reason: 'An advertisement.',
+      from: 'Juno',
+      take: { id: listId(61), number: 14, player: 'Juno' },
+      note: { id: listId(62), name: 'Bex', body: 'Buy my pills.', isRemoved: false },
+      settledAt: null,
+    });
+    let items = [complaint];
+    const { writes } = open({
+      [`GET ${paths.complaints}`]: () => ({ json: { items } }),
+      [`PATCH ${paths.complaint(complaint.id)}`]: () => {
+        const note = { ...complaint.note!, isRemoved: true };
+        items = [{ ...complaint, note, settledAt: '2026-11-02T11:00:00.000Z' }];
+        return { status: 204 };
+      },
+    });
+    const complaints = await table('Complaints');
+    expect(complaints.getByText('Buy my pills.')).toBeInTheDocument();
+    await userEvent.click(complaints.getByRole('button', { name: 'remove the note' }));
+    expect(await screen.findByText('removed')).toBeInTheDocument();
+    expect(writes()).toMatchObject([{ path: paths.complaint(complaint.id), body: { removeNote: true } }]);
   });
 
   it('tells what happened', async () => {

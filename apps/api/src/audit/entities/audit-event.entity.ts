@@ -27,6 +27,8 @@ export const auditKinds = [
   'take-purged',
   'share-made',
   'share-ended',
+  'complaint-made',
+  'complaint-settled',
 ] as const;
 export type AuditKind = (typeof auditKinds)[number];
 

@@ -58,6 +58,8 @@ const happened: Readonly<Record<string, string>> = {
   'take-purged': 'a deleted take went for good',
   'share-made': 'made a link',
   'share-ended': 'ended a link',
+  'complaint-made': 'said what is wrong with a note or a sheet',
+  'complaint-settled': 'settled a complaint',
 };
 
 /** "Ada locked Mika"; a kind that is not known yet stays as it is. */

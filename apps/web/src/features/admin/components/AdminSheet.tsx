@@ -7,6 +7,7 @@ import { useFailedWork } from '../hooks/useFailedWork';
 import { useInstallation } from '../hooks/useInstallation';
 import { AccountsSection } from './AccountsSection';
 import { AuditSection } from './AuditSection';
+import { ComplaintsSection } from './ComplaintsSection';
 import { InstallationSection } from './InstallationSection';
 import { WorkSection } from './WorkSection';
 
@@ -22,6 +23,7 @@ export function AdminSheet() {
         {every ? accountsWords(every.total, every.bytes) : 'Counting the accounts…'}
       </Headline>
       <WorkSection />
+      <ComplaintsSection />
       <AccountsSection limitBytes={installation.settings?.accountBytes} />
       <InstallationSection installation={installation} />
       <AuditSection />
