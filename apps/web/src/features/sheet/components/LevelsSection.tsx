@@ -1,10 +1,15 @@
+import { Box } from '@chakra-ui/react';
 import type { ReportResponse } from '@thudline/contracts';
+import { lazy, Suspense } from 'react';
 import { number } from '../../../lib/format';
-import { HitStrip } from '../pictures/HitStrip';
 import { Findings } from './Findings';
 import { MarginNote } from './RuledSheet';
 import { findingsOf, levelTopics, levelsWord, worstStatus } from './sectionWords';
 import { SheetSection } from './SheetSection';
+
+/** The pictures come after the words; as tall as the strip will be, whose layout isn’t there yet. */
+const HitStrip = lazy(async () => ({ default: (await import('../pictures/HitStrip')).HitStrip }));
+const stripHeight = '180px';
 
 /** Levels: both microphones' hits against the target, and what to turn at the preamp. */
 export function LevelsSection({
@@ -32,7 +37,9 @@ export function LevelsSection({
       }
     >
       <Findings findings={findings} />
-      <HitStrip report={report} chosenHit={chosenHit} onChoose={onChooseHit} />
+      <Suspense fallback={<Box height={stripHeight} marginTop="14px" />}>
+        <HitStrip report={report} chosenHit={chosenHit} onChoose={onChooseHit} />
+      </Suspense>
     </SheetSection>
   );
 }
