@@ -13,6 +13,8 @@ test('a guest leaves a note on a phone, the player sees the pin, gets a mail and
   page,
   browser,
 }) => {
+  // Four readings of whole sheets by axe, each in two themes.
+  test.slow();
   const player = await joinAsNewcomer(page);
   await page.goto(await linkFromMail(player.email, 'verify'));
   await page.goto('/takes/new');

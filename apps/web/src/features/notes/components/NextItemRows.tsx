@@ -40,7 +40,7 @@ function ItemRow({ item, from }: AskedItem) {
       listStyleType="none"
       borderBottom="1px solid"
       borderColor="rule"
-      paddingY={{ base: '8px', _print: '5px' }}
+      paddingY={{ base: '8px', _print: '3px' }}
     >
       {take.rights.change ? (
         <CheckBox checked={done} onChange={(next) => void tick(next)}>

@@ -56,6 +56,8 @@ export function TakePins({ lettered }: { lettered: LetteredThread[] }) {
       role="group"
       aria-label="Notes on the take"
       position="relative"
+      // On paper the letters behind the sentences do.
+      _print={{ display: 'none' }}
       height={`${rows * (pinPx + 6) + 4}px`}
     >
       {pinned.map(({ thread, letter, timeS }, i) => (

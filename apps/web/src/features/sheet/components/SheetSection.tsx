@@ -25,7 +25,7 @@ export function SheetSection({
     <chakra.section
       id={id}
       aria-labelledby={`${id}-head`}
-      marginTop={{ base: '34px', _print: '22px' }}
+      marginTop={{ base: '34px', _print: '18px' }}
       scrollMarginTop="12px"
     >
       <SheetRow
