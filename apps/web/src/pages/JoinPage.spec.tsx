@@ -7,14 +7,15 @@ import { renderPage } from '../testing/renderPage';
 import { sampleMe } from '../testing/sampleData';
 import { JoinPage } from './JoinPage';
 
-function open(routes: FakeRoutes) {
+function open(routes: FakeRoutes, at = '/join') {
   const server = fakeServer({
     [`GET ${paths.me}`]: refusal(401, 'not-signed-in', 'Sign in first.'),
     [`POST ${paths.refresh}`]: refusal(401, 'session-ended', 'Sign in again.'),
+    [`GET ${paths.signUp}`]: json({ signUp: 'open' }),
     ...routes,
   });
   const pages = [{ element: <GuestOnly />, children: [{ path: '/join', element: <JoinPage /> }] }];
-  return { ...server, ...renderPage(pages, '/join') };
+  return { ...server, ...renderPage(pages, at) };
 }
 
 async function join(password = 'drumsdrums') {
@@ -75,5 +76,29 @@ describe('joining', () => {
     open({ [`POST ${paths.join}`]: refusal(429, 'too-many-requests', 'Too many tries. Wait a minute.') });
     await join();
     expect(await screen.findByRole('alert')).toHaveTextContent('Too many tries. Wait a minute.');
+  });
+});
+
+describe('joining by invitation', () => {
+  const byInvitation = { [`GET ${paths.signUp}`]: json({ signUp: 'invited' }) };
+
+  it('says so to whoever has none', async () => {
+    open(byInvitation);
+    expect(await screen.findByRole('heading', { name: /^By invitation\./ })).toBeInTheDocument();
+    expect(screen.queryByLabelText('Name')).not.toBeInTheDocument();
+  });
+
+  it('hands in the one of the mail', async () => {
+    const { requests } = open(
+      { ...byInvitation, [`POST ${paths.join}`]: json(sampleMe, 201) },
+      '/join?invitation=a-token-of-the-mail',
+    );
+    await join();
+    await waitFor(() =>
+      expect(requests.find(({ path }) => path === paths.join)?.body).toMatchObject({
+        name: 'Juno',
+        invitation: 'a-token-of-the-mail',
+      }),
+    );
   });
 });

@@ -1,7 +1,10 @@
+import { useSearchParams } from 'react-router-dom';
+import { ButtonLink } from '../components/ButtonLink';
 import { PageTitle } from '../components/PageTitle';
 import { TextLink } from '../components/TextLink';
 import { AuthSheet } from '../features/auth/components/AuthSheet';
 import { JoinForm } from '../features/auth/components/JoinForm';
+import { useSignUp } from '../features/auth/hooks/useSignUp';
 
 const margin = [
   {
@@ -19,10 +22,22 @@ const margin = [
 ];
 
 export function JoinPage() {
+  const [search] = useSearchParams();
+  const invitation = search.get('invitation') ?? undefined;
+  const { needsInvitation } = useSignUp();
+  if (needsInvitation && !invitation)
+    return (
+      <AuthSheet strong="By invitation." rest="Open the link of the mail that invites you." margin={margin}>
+        <PageTitle>Join</PageTitle>
+        <ButtonLink to="/sign-in" look="outline">
+          Sign in
+        </ButtonLink>
+      </AuthSheet>
+    );
   return (
     <AuthSheet strong="Join." rest="Your first sheet is a take away." margin={margin}>
       <PageTitle>Join</PageTitle>
-      <JoinForm />
+      <JoinForm invitation={invitation} />
     </AuthSheet>
   );
 }

@@ -8,12 +8,13 @@ import { AuthForm } from './AuthForm';
 import { EmailField } from './EmailField';
 import { SubmitRow } from './SubmitRow';
 
-export function JoinForm() {
+/** @param invitation - from the mail that invited; undefined where nobody did */
+export function JoinForm({ invitation }: { invitation?: string }) {
   const { join } = useAuthActions();
   const { form, values, errors, formError, busy, set, submit } = useAuthForm({
     schema: joinRequest,
     initial: { name: '', email: '', password: '' },
-    send: join,
+    send: (body) => join({ ...body, invitation }),
     place: (error) =>
       error.code === 'email-taken' ? { email: error.message } : (error.details?.fields ?? null),
   });
