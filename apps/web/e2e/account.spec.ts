@@ -36,7 +36,7 @@ test('a newcomer records, takes everything along in one archive, changes the add
 
   await page.getByRole('button', { name: 'change the e-mail address' }).click();
   const other = `new-${email}`;
-  await page.getByLabel('E-mail').fill(other);
+  await page.getByRole('textbox', { name: 'E-mail' }).fill(other);
   await page.getByLabel('Your password').fill(password);
   await expectReadable(page, 'settings, another address');
   await page.getByRole('button', { name: 'Send the mail' }).click();

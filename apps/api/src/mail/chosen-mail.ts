@@ -3,6 +3,7 @@ import { Inject, Injectable } from '@nestjs/common';
 import { MailChoice, mailSettings, paths } from '@thudline/contracts';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
+import { isClosed } from '../users/closed-account';
 import { User } from '../users/entities/user.entity';
 import { settingsOf } from '../users/user-settings';
 import { MailRefusal } from './entities/mail-refusal.entity';
@@ -24,7 +25,7 @@ export class ChosenMail {
   ) {}
 
   toUser(user: User, choice: MailChoice, content: MailContent): Promise<void> {
-    if (!settingsOf(user)[mailSettings[choice]]) return Promise.resolve();
+    if (isClosed(user) || !settingsOf(user)[mailSettings[choice]]) return Promise.resolve();
     return this.send({ email: user.email, userId: user.id }, choice, content);
   }
 

@@ -5,7 +5,7 @@ import { PageTitle } from '../components/PageTitle';
 import { useMe } from '../features/auth/hooks/useMe';
 import { SettingsSheet } from '../features/settings/components/SettingsSheet';
 
-/** Target and aim, units, keys, name and password. */
+/** Everything that is the player's own to set, and the ways out: an archive of everything, and deleting the account. */
 export function SettingsPage() {
   const { me } = useMe();
   if (!me) return <PageLoading />;

@@ -21,7 +21,13 @@ export function DevicesSection() {
       {!sessions && !error && <Box minHeight="88px" role="status" aria-label="Loading your devices" />}
       {sessions && (
         <>
-          <chakra.table width="100%" fontSize="16px" lineHeight="22px" borderCollapse="collapse">
+          <chakra.table
+            aria-label="Devices"
+            width="100%"
+            fontSize="16px"
+            lineHeight="22px"
+            borderCollapse="collapse"
+          >
             <tbody>
               {sessions.map((session) => (
                 <DeviceRow key={session.id} {...{ session }} onSignOut={() => void signOut(session.id)} />
