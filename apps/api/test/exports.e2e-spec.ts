@@ -14,7 +14,10 @@ import { Export } from '../src/exports/entities/export.entity';
 import { exportedTables, leftOutTables } from '../src/exports/export-tables';
 import { AccountPurge } from '../src/housekeeping/account-purge';
 import { ExportPurge } from '../src/housekeeping/export-purge';
+import { Note } from '../src/notes/entities/note.entity';
 import { ObjectStoreService } from '../src/storage/object-store.service';
+import { Take } from '../src/takes/entities/take.entity';
+import { User } from '../src/users/entities/user.entity';
 import { Browser, joined, Person, rightPassword } from './support/person';
 import { shortTake } from './support/recordings';
 import { giveReport, shortTakeFacts } from './support/reported-take';
@@ -218,6 +221,11 @@ describe('everything of an account', () => {
     const oda = await full('Oda');
     await made(person);
     await made(oda.person);
+    const em = test.em();
+    const take = em.getReference(Take, oda.takes[0].id);
+    const author = em.getReference(User, person.me.id);
+    const note = em.create(Note, { take, author, pinKind: 'take', body: 'Left behind.' });
+    await em.flush();
     const ids = [person.me.id, share.id, room.id, ...takes.map(({ id }: TakeResponse) => id)];
     const objectsOf = async () =>
       (await test.bucket.keys()).filter((key) => ids.some((id) => key.includes(id))).length;
@@ -236,6 +244,8 @@ describe('everything of an account', () => {
     );
     expect(await rowsNaming([oda.person.me.id])).toEqual(othersBefore);
     await oda.person.get(paths.take(oda.takes[0].id)).expect(200);
+    const left = await test.em().findOneOrFail(Note, note.id);
+    expect(left).toMatchObject({ author: null, body: 'Left behind.' });
     await person.get(paths.me).expect(401);
   });
 });
