@@ -20,7 +20,7 @@ export function InlineText({
       autoComplete="name"
       value={value}
       onChange={(event) => onChange(event.target.value)}
-      width={`${Math.max(9, value.length + 2)}ch`}
+      width={`${Math.max(11, value.length + 2)}ch`}
       maxWidth="100%"
       minHeight="30px"
       paddingX="3px"

@@ -31,6 +31,7 @@ export function ItemFields({
                 type="button"
                 fontSize="caption"
                 padding="8px 3px"
+                whiteSpace="nowrap"
                 aria-label={`Leave out to do next, ${i + 1}`}
                 onClick={() => onChange(items.filter((_, other) => other !== i))}
               >

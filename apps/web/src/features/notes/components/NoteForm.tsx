@@ -75,7 +75,7 @@ export function NoteForm({ label, send, start, about, listOf, remark, ...props }
           onChange={setBody}
           maxLength={4000}
           required
-          minHeight={wide ? '112px' : '74px'}
+          rows={wide ? 4 : 2}
         />
       </Box>
       {listOf && <ItemFields {...{ listOf, items }} onChange={setItems} />}
