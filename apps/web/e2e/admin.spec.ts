@@ -16,7 +16,7 @@ test('whoever is made an admin by the command sees every account, and locks one;
   await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
   execFileSync(process.execPath, [makeAdmin, email], { env: adminEnvironment() });
   await page.reload();
-  await expect(page.getByRole('heading', { name: 'Accounts' })).toBeVisible();
+  await expect(page.getByRole('heading', { name: 'Accounts', exact: true })).toBeVisible();
 
   const other = await browser.newContext();
   const otherPage = await other.newPage();
