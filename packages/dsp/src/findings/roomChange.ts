@@ -85,14 +85,20 @@ export function roomChange(figures: readonly ComparedFigure[]): RoomChangeTold {
 
 /** The largest of each kind, two at most: the rows below hold the others. */
 function sentence(clear: readonly ComparedFigure[]): { strong: string; rest: string } {
-  const kinds = clear.filter(
-    (figure, i) => clear.findIndex(({ key }) => kindOf(key) === kindOf(figure.key)) === i,
+  const byEar = [...clear].sort((one, other) => earOrder(one) - earOrder(other));
+  const kinds = byEar.filter(
+    (figure, i) => byEar.findIndex(({ key }) => kindOf(key) === kindOf(figure.key)) === i,
   );
   const said = kinds.slice(0, 2).map((figure) => tellings[figure.key]?.(figure) ?? '');
   const rest = clear.some(({ key, word }) => key.startsWith('noise') && word === 'noisier')
     ? 'Switch it off while you record.'
     : surely(clear);
   return { strong: `${capitalised(said.join(', and '))}.`, rest };
+}
+
+/** How long a snare rings says more than where its energy lies, and most in the band where it changed by most seconds. */
+function earOrder({ key, before, after }: ComparedFigure): number {
+  return key.startsWith('decay') ? -Math.abs((after ?? 0) - (before ?? 0)) : 0;
 }
 
 /** How many hits stand behind it. */
