@@ -13,9 +13,9 @@ import {
   takeResponse,
   TakeResponse,
 } from '@thudline/contracts';
-import { TakeFacts } from '@thudline/dsp';
 import { Browser, joined, Person, Upload } from './support/person';
 import { giveReport, shortTakeFacts } from './support/reported-take';
+import { withDecay, withNoise } from './support/room-facts';
 import { startTestApp, TestApp } from './support/test-app';
 
 const garage: CreateRoomRequest = {
@@ -285,31 +285,4 @@ describe('rooms', () => {
       await juno.get(`${paths.roomTrend(room.id)}?figure=warmth`).expect(400);
     });
   });
-});
-
-const withNoise = (facts: TakeFacts, noiseFloorDbfs: number): TakeFacts => ({
-  ...facts,
-  tracks: facts.tracks.map((track) => ({
-    ...track,
-    noiseFloorDbfs: track.role === 'overhead' ? noiseFloorDbfs : -80,
-    noiseFloorReason: null,
-  })),
-});
-
-const withDecay = (facts: TakeFacts, decayS: number | null): TakeFacts => ({
-  ...facts,
-  room: {
-    snareHits: 8,
-    decayS,
-    earlyS: null,
-    reason: null,
-    bands: [
-      {
-        centreHz: 500,
-        t20S: decayS === null ? null : { median: decayS, iqr: 0.04 },
-        earlyS: null,
-        earlyToLateDb: null,
-      },
-    ],
-  },
 });

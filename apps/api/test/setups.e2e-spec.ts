@@ -11,6 +11,7 @@ import {
 import sharp from 'sharp';
 import { Photo } from '../src/photos/entities/photo.entity';
 import { Setup } from '../src/setups/entities/setup.entity';
+import { cameraPhoto } from './support/camera-photo';
 import { Browser, joined, Person } from './support/person';
 import { giveReport, shortTakeFacts } from './support/reported-take';
 import { openedBy, sharedBy } from './support/shares';
@@ -189,13 +190,6 @@ describe('setups', () => {
   describe('with a photo', () => {
     const addPhoto = (id: string, bytes: Buffer, name = 'photo.jpg') =>
       juno.written(juno.agent.post(paths.setupPhoto(id))).attach('photo', bytes, name);
-    /** As a camera leaves it: on its side, with its place. */
-    const cameraPhoto = () =>
-      sharp({ create: { width: 3000, height: 1500, channels: 3, background: '#a05030' } })
-        .jpeg()
-        .withExif({ IFD0: { Copyright: 'SECRET-EXIF' }, IFD3: { GPSLatitude: '52/1 30/1 0/1' } })
-        .withMetadata({ orientation: 6 })
-        .toBuffer();
 
     it('keep it upright and small, without what the camera wrote into it', async () => {
       const { id } = await make();

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { photoResponse } from './photos';
 import { findingStatus } from './reports';
 import { text, textOfLines } from './text';
 
@@ -82,6 +83,7 @@ export const roomResponse = z.object({
   firstTakeAt: z.iso.datetime().nullable(),
   lastTakeAt: z.iso.datetime().nullable(),
   changeCount: z.int().nonnegative(),
+  photo: photoResponse.nullable(),
 });
 export type RoomResponse = z.infer<typeof roomResponse>;
 
@@ -172,12 +174,23 @@ export const roomChangeResponse = z.object({
   note: z.string(),
   before: z.array(takeOfRoom),
   after: z.array(takeOfRoom),
+  /** False where it is still to be told: only as many as were asked for are compared at once. */
+  isTold: z.boolean(),
   /** What it did, in words: strong, then rest; a question mark where it can't be told. */
   did: z.object({ status: findingStatus, strong: z.string(), rest: z.string() }),
+  /** Sentences: what else lies between the takes, and what is therefore not compared. */
+  caveats: z.array(z.string()),
   /** The most telling figures first; none where nothing can be compared. */
   figures: z.array(changeFigure),
+  photo: photoResponse.nullable(),
 });
 export type RoomChangeResponse = z.infer<typeof roomChangeResponse>;
+
+/** Comparing takes time: the first sight of a long log asks for its newest changes only. */
+export const listRoomChangesRequest = z.object({
+  told: z.coerce.number().int().min(0).max(maxChanges).default(maxChanges),
+});
+export type ListRoomChangesRequest = z.output<typeof listRoomChangesRequest>;
 
 export const listRoomChangesResponse = z.object({
   /** Newest first. */
@@ -193,28 +206,32 @@ export const trendFigures = [
   'decay-2000',
   'decay-4000',
   'early-to-late-500',
+  'brightness',
   'noise-kick',
   'noise-overhead',
   'cymbals-over-drums',
   'hardest-kick',
+  'hardest-overhead',
+  'low-end',
+  'arrival',
 ] as const;
 export type TrendFigure = (typeof trendFigures)[number];
 
 export const roomTrendRequest = z.object({ figure: z.enum(trendFigures).default('decay-500') });
 export type RoomTrendRequest = z.infer<typeof roomTrendRequest>;
 
-/** Every take of the room that holds the figure, oldest first. */
-export const roomTrendResponse = z.object({
-  figure: z.enum(trendFigures),
-  points: z.array(
-    z.object({
-      takeId: z.uuid(),
-      number: z.int().positive(),
-      recordedAt: z.iso.datetime(),
-      value: z.number(),
-      /** Distance between the quartiles over its hits; null for figures of a whole take. */
-      iqr: z.number().nonnegative().nullable(),
-    }),
-  ),
+export const trendPoint = z.object({
+  takeId: z.uuid(),
+  number: z.int().positive(),
+  recordedAt: z.iso.datetime(),
+  value: z.number(),
+  /** Distance between the quartiles over its hits; null for figures of a whole take. */
+  iqr: z.number().nonnegative().nullable(),
+  /** What it was recorded with. */
+  setup: z.object({ id: z.uuid(), name: z.string() }).nullable(),
 });
+export type TrendPoint = z.infer<typeof trendPoint>;
+
+/** Every take of the room, or of the setup, that holds the figure, oldest first. */
+export const roomTrendResponse = z.object({ figure: z.enum(trendFigures), points: z.array(trendPoint) });
 export type RoomTrendResponse = z.infer<typeof roomTrendResponse>;

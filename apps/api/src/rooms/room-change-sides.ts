@@ -23,7 +23,7 @@ export class RoomChangeSides {
     const rows = await this.em.find(
       RoomChangeTake,
       { change: { $in: changeIds }, take: { deletedAt: null } },
-      { populate: ['take'], orderBy: { take: { recordedAt: 'asc', id: 'asc' } } },
+      { populate: ['take', 'take.setup'], orderBy: { take: { recordedAt: 'asc', id: 'asc' } } },
     );
     for (const { change, take, side } of rows) sides.get(change.id)?.[side].push(take.unwrap());
     return sides;

@@ -1,11 +1,15 @@
-import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post } from '@nestjs/common';
+import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post, Query, Req, Res } from '@nestjs/common';
 import { ApiNoContentResponse, ApiTags } from '@nestjs/swagger';
+import { Request, Response } from 'express';
 import { ZodResponse } from 'nestjs-zod';
 import { Access } from '../access/access.decorator';
 import { TakeRights } from '../access/take-rights';
 import { CurrentRights, CurrentViewer, Viewer } from '../access/viewer';
+import { ApiPhotoUpload } from '../photos/api-photo-upload.decorator';
+import { receivedPhoto } from '../photos/received-photo';
 import {
   CreateRoomChangeDto,
+  ListRoomChangesDto,
   ListRoomChangesResponseDto,
   RoomChangeResponseDto,
   UpdateRoomChangeDto,
@@ -21,8 +25,12 @@ export class RoomLogController {
   @Get()
   @Access.room('read')
   @ZodResponse({ status: 200, type: ListRoomChangesResponseDto })
-  list(@Param('roomId') roomId: string, @CurrentRights() rights: TakeRights) {
-    return this.log.list(roomId, rights);
+  list(
+    @Param('roomId') roomId: string,
+    @CurrentRights() rights: TakeRights,
+    @Query() { told }: ListRoomChangesDto,
+  ) {
+    return this.log.list(roomId, rights, told);
   }
 
   @Post()
@@ -53,5 +61,25 @@ export class RoomLogController {
     @Param() where: { roomId: string; changeId: string },
   ): Promise<void> {
     return this.log.remove(viewer, where);
+  }
+
+  /** Takes the place of the photo there was. */
+  @Post(':changeId/photo')
+  @ApiPhotoUpload()
+  @ZodResponse({ status: 200, type: RoomChangeResponseDto })
+  async addPhoto(
+    @CurrentViewer() viewer: Viewer,
+    @Param() where: { roomId: string; changeId: string },
+    @Req() request: Request,
+    @Res({ passthrough: true }) response: Response,
+  ) {
+    await this.log.get(viewer, where);
+    return this.log.addPhoto(viewer, where, await receivedPhoto(request, response));
+  }
+
+  @Delete(':changeId/photo')
+  @ZodResponse({ status: 200, type: RoomChangeResponseDto })
+  removePhoto(@CurrentViewer() viewer: Viewer, @Param() where: { roomId: string; changeId: string }) {
+    return this.log.removePhoto(viewer, where);
   }
 }

@@ -1,8 +1,13 @@
-import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post, Query } from '@nestjs/common';
-import { ApiNoContentResponse, ApiTags } from '@nestjs/swagger';
+import { Body, Controller, Delete, Get, HttpCode, Param, Patch, Post } from '@nestjs/common';
+import { Query, Req, Res, StreamableFile } from '@nestjs/common';
+import { ApiNoContentResponse, ApiOkResponse, ApiProduces, ApiTags } from '@nestjs/swagger';
+import { Request, Response } from 'express';
 import { ZodResponse } from 'nestjs-zod';
 import { Access } from '../access/access.decorator';
-import { CurrentViewer, Viewer } from '../access/viewer';
+import { TakeRights } from '../access/take-rights';
+import { CurrentRights, CurrentViewer, Viewer } from '../access/viewer';
+import { ApiPhotoUpload } from '../photos/api-photo-upload.decorator';
+import { receivedPhoto } from '../photos/received-photo';
 import {
   CreateRoomDto,
   ListRoomsResponseDto,
@@ -11,6 +16,7 @@ import {
   RoomTrendResponseDto,
   UpdateRoomDto,
 } from './dto/room.dto';
+import { RoomFiles } from './room-files';
 import { RoomTrends } from './room-trends';
 import { RoomsService } from './rooms.service';
 
@@ -21,6 +27,7 @@ export class RoomsController {
   constructor(
     private readonly rooms: RoomsService,
     private readonly trends: RoomTrends,
+    private readonly files: RoomFiles,
   ) {}
 
   @Get()
@@ -38,8 +45,8 @@ export class RoomsController {
   @Get(':roomId')
   @Access.room('read')
   @ZodResponse({ status: 200, type: RoomResponseDto })
-  get(@Param('roomId') roomId: string) {
-    return this.rooms.get(roomId);
+  get(@Param('roomId') roomId: string, @CurrentRights() rights: TakeRights) {
+    return this.rooms.get(roomId, rights);
   }
 
   @Patch(':roomId')
@@ -58,7 +65,39 @@ export class RoomsController {
   @Get(':roomId/trend')
   @Access.room('read')
   @ZodResponse({ status: 200, type: RoomTrendResponseDto })
-  trend(@Param('roomId') roomId: string, @Query() query: RoomTrendDto) {
-    return this.trends.get(roomId, query);
+  trend(@Param('roomId') roomId: string, @Query() query: RoomTrendDto, @CurrentRights() rights: TakeRights) {
+    return this.trends.get(roomId, query, rights);
+  }
+
+  /** Takes the place of the photo there was. */
+  @Post(':roomId/photo')
+  @ApiPhotoUpload()
+  @ZodResponse({ status: 200, type: RoomResponseDto })
+  async addPhoto(
+    @CurrentViewer() viewer: Viewer,
+    @Param('roomId') roomId: string,
+    @Req() request: Request,
+    @Res({ passthrough: true }) response: Response,
+  ) {
+    await this.rooms.getOwn(viewer, roomId);
+    return this.rooms.addPhoto(viewer, roomId, await receivedPhoto(request, response));
+  }
+
+  @Delete(':roomId/photo')
+  @ZodResponse({ status: 200, type: RoomResponseDto })
+  removePhoto(@CurrentViewer() viewer: Viewer, @Param('roomId') roomId: string) {
+    return this.rooms.removePhoto(viewer, roomId);
+  }
+
+  /** Everything of the room in one file: its measures, its log, every figure over time, its photos. */
+  @Get(':roomId/room.zip')
+  @ApiProduces('application/zip')
+  @ApiOkResponse({ description: 'A ZIP with JSON, CSV and photos.' })
+  async file(@CurrentViewer() viewer: Viewer, @Param('roomId') roomId: string): Promise<StreamableFile> {
+    const { name, archive } = await this.files.get(viewer, roomId);
+    return new StreamableFile(archive, {
+      type: 'application/zip',
+      disposition: `attachment; filename="${name}"`,
+    });
   }
 }

@@ -11,8 +11,13 @@ export interface RoomChangeTold {
   readonly figures: readonly ComparedFigure[];
 }
 
-/** What a room can change; what only says how somebody played is left out. */
-const ROOM_KEYS: readonly ComparedKey[] = [
+/**
+ * What a room can change; what only says how somebody played is left out.
+ *
+ * @example
+ * roomChangeKeys.includes('evenness') // false
+ */
+export const roomChangeKeys: readonly ComparedKey[] = [
   'decay-500',
   'decay-1000',
   'decay-2000',
@@ -70,7 +75,7 @@ const kindOf = (key: ComparedKey): string => key.split('-')[0];
  * roomChange(compared).status // 'cannot-tell'
  */
 export function roomChange(figures: readonly ComparedFigure[]): RoomChangeTold {
-  const ofRoom = ROOM_KEYS.flatMap((key) => figures.filter((figure) => figure.key === key));
+  const ofRoom = roomChangeKeys.flatMap((key) => figures.filter((figure) => figure.key === key));
   const told = ofRoom.filter(({ reason }) => reason === null);
   const clear = told.filter((figure) => figure.clear).sort((one, other) => steps(other) - steps(one));
   if (told.length === 0) return cannotTell(ofRoom);

@@ -17,6 +17,7 @@ import { Migration20261201153500_settingsOfAnAccount } from './20261201153500-se
 import { Migration20261201160500_mailRefusals } from './20261201160500-mail-refusals';
 import { Migration20261201161841_notes } from './20261201161841-notes';
 import { Migration20261201164500_winnersAndUndo } from './20261201164500-winners-and-undo';
+import { Migration20261201165900_roomPhotos } from './20261201165900-room-photos';
 
 /** In order; a new migration is added at the end and never changed once merged. */
 export const migrations = [
@@ -39,4 +40,5 @@ export const migrations = [
   { name: '20261201160500-mail-refusals', class: Migration20261201160500_mailRefusals },
   { name: '20261201161841-notes', class: Migration20261201161841_notes },
   { name: '20261201164500-winners-and-undo', class: Migration20261201164500_winnersAndUndo },
+  { name: '20261201165900-room-photos', class: Migration20261201165900_roomPhotos },
 ];

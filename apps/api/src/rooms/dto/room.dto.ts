@@ -1,6 +1,7 @@
 import {
   createRoomChangeRequest,
   createRoomRequest,
+  listRoomChangesRequest,
   listRoomChangesResponse,
   listRoomsResponse,
   roomChangeResponse,
@@ -19,6 +20,7 @@ export class ListRoomsResponseDto extends createZodDto(listRoomsResponse) {}
 export class CreateRoomChangeDto extends createZodDto(createRoomChangeRequest) {}
 export class UpdateRoomChangeDto extends createZodDto(updateRoomChangeRequest) {}
 export class RoomChangeResponseDto extends createZodDto(roomChangeResponse) {}
+export class ListRoomChangesDto extends createZodDto(listRoomChangesRequest) {}
 export class ListRoomChangesResponseDto extends createZodDto(listRoomChangesResponse) {}
 export class RoomTrendDto extends createZodDto(roomTrendRequest) {}
 export class RoomTrendResponseDto extends createZodDto(roomTrendResponse) {}

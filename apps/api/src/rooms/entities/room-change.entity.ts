@@ -1,6 +1,7 @@
 import { defineEntity, InferEntity, p } from '@mikro-orm/core';
 import { ChangeCategory, PlanPlace } from '@thudline/contracts';
 import { identity } from '../../database/identity';
+import { Photo } from '../../photos/entities/photo.entity';
 import { Room } from './room.entity';
 
 /** One entry of a room's log. */
@@ -19,6 +20,7 @@ export const RoomChange = defineEntity({
     place: p.json<PlanPlace>().nullable(),
     cost: p.string().length(40),
     note: p.text(),
+    photo: () => p.manyToOne(Photo).ref().nullable().index().deleteRule('set null'),
   },
 });
 export type RoomChange = InferEntity<typeof RoomChange>;

@@ -1,6 +1,7 @@
 import { defineEntity, InferEntity, p } from '@mikro-orm/core';
 import { KitPlace, RoomShape, RoomSurface } from '@thudline/contracts';
 import { identity } from '../../database/identity';
+import { Photo } from '../../photos/entities/photo.entity';
 import { User } from '../../users/entities/user.entity';
 
 /** Where takes are recorded. Nothing sorts or looks by its measures, so they are JSON; lengths are metres. */
@@ -15,6 +16,7 @@ export const Room = defineEntity({
     surfaces: p.json<RoomSurface[]>(),
     temperatureC: p.double().$type<number>().nullable(),
     kit: p.json<KitPlace>().nullable(),
+    photo: () => p.manyToOne(Photo).ref().nullable().index().deleteRule('set null'),
   },
 });
 export type Room = InferEntity<typeof Room>;

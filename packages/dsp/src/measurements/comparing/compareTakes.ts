@@ -16,6 +16,8 @@ export interface CompareTakesInput {
    * otherwise hits can't be matched by strength.
    */
   readonly gainKnownSame: boolean;
+  /** Which figures are wanted; every one there is where nothing is said. */
+  readonly keys?: readonly ComparedFigure['key'][];
 }
 
 /**
@@ -31,12 +33,15 @@ export interface CompareTakesInput {
  * const figures = compareTakes({ before: facts, after: facts, gainKnownSame: true });
  * figures.filter(({ clear }) => clear) // []
  */
-export function compareTakes({ before, after, gainKnownSame }: CompareTakesInput): ComparedFigure[] {
+export function compareTakes({ before, after, gainKnownSame, keys }: CompareTakesInput): ComparedFigure[] {
   const sides = { before: takeSide(before), after: takeSide(after) };
   const alike = gainKnownSame ? hitsAlike(sides) : null;
-  const perHit = perHitRules.map((rule) => hitFigure(rule, sides, alike));
+  const wanted = perHitRules.filter(({ key }) => !keys || keys.includes(key));
+  const perHit = wanted.map((rule) => hitFigure(rule, sides, alike));
   const figures = [...wholeTakeFigures(sides), arrivalFigure(sides), ...perHit];
-  return order.flatMap((key) => figures.filter((figure) => figure.key === key));
+  return order
+    .filter((key) => !keys || keys.includes(key))
+    .flatMap((key) => figures.filter((figure) => figure.key === key));
 }
 
 const order: readonly ComparedFigure['key'][] = [
