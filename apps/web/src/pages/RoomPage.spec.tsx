@@ -10,14 +10,28 @@ import { RoomPage } from './RoomPage';
 const trend: RoomTrendResponse = {
   figure: 'decay-500',
   points: [
-    { takeId: roomTakeId(1), number: 1, recordedAt: '2026-10-05T19:40:00.000Z', value: 0.62, iqr: 0.06 },
-    { takeId: roomTakeId(9), number: 9, recordedAt: '2026-12-01T19:40:00.000Z', value: 0.49, iqr: 0.05 },
+    {
+      takeId: roomTakeId(1),
+      number: 1,
+      recordedAt: '2026-10-05T19:40:00.000Z',
+      value: 0.62,
+      iqr: 0.06,
+      setup: null,
+    },
+    {
+      takeId: roomTakeId(9),
+      number: 9,
+      recordedAt: '2026-12-01T19:40:00.000Z',
+      value: 0.49,
+      iqr: 0.05,
+      setup: null,
+    },
   ],
 };
 const served: FakeRoutes = {
   [`GET ${paths.me}`]: json(sampleMe),
   [`GET ${paths.room(roomId)}`]: json(sampleRoom()),
-  [`GET ${paths.roomChanges(roomId)}`]: json(sampleLog()),
+  [`GET ${paths.roomChanges(roomId)}?told=8`]: json(sampleLog()),
   [`GET ${paths.roomTrend(roomId)}`]: json(trend),
 };
 
@@ -75,6 +89,51 @@ describe('a room’s log', () => {
     expect(within(oldest).getByRole('link', { name: 'Add the after take' })).toBeInTheDocument();
   });
 
+  it('shows a long log at once, and what its older changes did after that', async () => {
+    const did = { status: 'cannot-tell' as const, strong: 'Not measured yet.', rest: '' };
+    const older = sampleChange({ number: 1, what: 'Rug', isTold: false, did, figures: [] });
+    let tell: () => void = () => undefined;
+    const whole = new Promise<void>((resolve) => (tell = resolve));
+    open({
+      [`GET ${paths.roomChanges(roomId)}?told=8`]: json(sampleLog([sampleChange(), older])),
+      [`GET ${paths.roomChanges(roomId)}`]: async () => {
+        await whole;
+        return { json: sampleLog([sampleChange(), { ...older, isTold: true, did: sampleChange().did }]) };
+      },
+    });
+    expect(await screen.findByText('Comparing its takes…')).toBeInTheDocument();
+    tell();
+    await waitFor(() => expect(screen.queryByText('Comparing its takes…')).not.toBeInTheDocument());
+    expect(screen.getAllByText('A snare dies 0.11 s sooner at 500 Hz.')).toHaveLength(2);
+  });
+
+  it('says what lies between the takes as well, and where a photo shows it', async () => {
+    const photo = { id: roomTakeId(77), widthPx: 640, heightPx: 480 };
+    const change = sampleChange({ caveats: ['Change 1 lies between these takes as well.'], photo });
+    open({ [`GET ${paths.roomChanges(roomId)}?told=8`]: json(sampleLog([change])) });
+    expect(await screen.findByText('Change 1 lies between these takes as well.')).toBeInTheDocument();
+    expect(screen.getByRole('img', { name: `Change 2: ${change.what}` })).toHaveAttribute(
+      'src',
+      paths.photo(photo.id),
+    );
+  });
+
+  it('puts a change before another one of its day', async () => {
+    const later = sampleChange({ number: 3, what: 'Curtain' });
+    const server = open({
+      [`GET ${paths.roomChanges(roomId)}?told=8`]: json(sampleLog([later, sampleChange()])),
+      [`PATCH ${paths.roomChange(roomId, sampleChange().id)}`]: json(sampleChange()),
+      [`PATCH ${paths.roomChange(roomId, later.id)}`]: json(later),
+    });
+    await userEvent.click(await screen.findByRole('button', { name: 'put change 3 earlier that day' }));
+    await waitFor(() =>
+      expect(
+        server.requests.filter(({ method }) => method === 'PATCH').map(({ path, body }) => [path, body]),
+      ).toEqual([[paths.roomChange(roomId, sampleChange().id), { rank: 1 }]]),
+    );
+    expect(screen.queryByRole('button', { name: 'put change 3 later that day' })).not.toBeInTheDocument();
+  });
+
   it('draws a figure over time, and another when asked', async () => {
     const server = open();
     expect(
@@ -114,7 +173,7 @@ describe('a room’s log', () => {
     const shape = { kind: 'other' as const, volumeM3: 38, surfaceM2: null };
     open({
       [`GET ${paths.room(roomId)}`]: json(sampleRoom({ shape, changeCount: 0 })),
-      [`GET ${paths.roomChanges(roomId)}`]: json(sampleLog([])),
+      [`GET ${paths.roomChanges(roomId)}?told=8`]: json(sampleLog([])),
     });
     expect(await screen.findByRole('heading', { level: 1 })).toHaveTextContent(
       'Nothing is written down yet.',

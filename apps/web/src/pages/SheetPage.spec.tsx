@@ -65,23 +65,27 @@ describe('the sheet', () => {
       sampleSetupItem({ id: takeId, name: 'low' }),
       sampleSetupItem({ name: 'one overhead, high' }),
     ];
-    let take = sampleTake({ setup: { id: low.id, name: low.name } });
+    const withSetup = ({ id, name }: typeof low) => sampleTake({ setup: { id, name } });
+    let take = withSetup(low);
     const { requests } = open({
       [`GET ${paths.take(takeId)}`]: () => json(take)(),
       [`GET ${paths.setups}`]: json({ items: [high, low], currentId: null }),
       [`PATCH ${paths.take(takeId)}`]: () => {
-        take = sampleTake({ setup: { id: high.id, name: high.name } });
+        take = withSetup(take.setup?.id === low.id ? high : low);
         return json(take)();
       },
     });
     expect(await screen.findByRole('link', { name: 'low' })).toHaveAttribute('href', `/setups/${low.id}`);
-    await userEvent.click(screen.getByRole('button', { name: 'change' }));
+    await userEvent.click(screen.getByRole('button', { name: 'Recorded with: change' }));
     await userEvent.selectOptions(
       await screen.findByRole('combobox', { name: 'Recorded with' }),
       'one overhead, high',
     );
     expect(await screen.findByRole('link', { name: 'one overhead, high' })).toBeInTheDocument();
-    expect(requests.find(({ method }) => method === 'PATCH')?.body).toEqual({ setupId: high.id });
+    await userEvent.click(await screen.findByRole('button', { name: 'Undo' }));
+    expect(await screen.findByRole('link', { name: 'low' })).toBeInTheDocument();
+    const patches = requests.filter(({ method }) => method === 'PATCH').map(({ body }) => body);
+    expect(patches).toEqual([{ setupId: high.id }, { setupId: low.id }]);
   });
 
   it('opens with the line, then what to do before the next take', async () => {

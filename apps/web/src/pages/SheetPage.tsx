@@ -8,6 +8,7 @@ import { BigPrintButton } from '../features/big-print/components/BigPrintButton'
 import { BigPrintLinks } from '../features/big-print/components/BigPrintLinks';
 import { comparePath } from '../features/compare/takeWords';
 import { LazySheetNotes } from '../features/notes/lazySheetNotes';
+import { RoomOfTake } from '../features/rooms/components/RoomOfTake';
 import { SetupOfTake } from '../features/setups/components/SetupOfTake';
 import { SendSheet } from '../features/shares/components/SendSheet';
 import { MeasuredSheet } from '../features/sheet/components/MeasuredSheet';
@@ -42,6 +43,7 @@ export function SheetPage() {
         <>
           {take.rights.change && <SendSheet takeId={take.id} />}
           <SetupOfTake take={take} />
+          <RoomOfTake take={take} />
           <BigPrintLinks takeId={take.id} mayAddPhone={take.rights.change} />
         </>
       }

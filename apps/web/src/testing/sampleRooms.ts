@@ -18,6 +18,7 @@ export const sampleRoom = (overrides: Partial<RoomResponse> = {}): RoomResponse 
   firstTakeAt: '2026-10-05T19:40:00.000Z',
   lastTakeAt: '2026-12-01T19:40:00.000Z',
   changeCount: 2,
+  photo: null,
   ...overrides,
 });
 
@@ -35,6 +36,9 @@ export const sampleChange = (overrides: Partial<RoomChangeResponse> = {}): RoomC
   note: '',
   before: [takeOf(7)],
   after: [takeOf(8), takeOf(9)],
+  isTold: true,
+  caveats: [],
+  photo: null,
   did: {
     status: 'good',
     strong: 'A snare dies 0.11 s sooner at 500 Hz.',

@@ -6,6 +6,8 @@ export interface HeadPart {
 }
 
 const lower = (words: string) => words.charAt(0).toLowerCase() + words.slice(1);
+/** A second clause is read further down. */
+const firstClause = (sentence: string) => sentence.replace(/, and .*$/, '.');
 const named = (what: string) => what.replace(/[.:]+$/, '');
 
 /** What the newest changes did, two at most: "**Moving blankets:** a snare dies 0.11 s sooner at 500 Hz." */
@@ -14,7 +16,7 @@ export function headSentence(changes: readonly RoomChangeResponse[]): HeadPart[]
   if (compared.length > 0)
     return compared.map(({ what, did }) => ({
       strong: `${named(what)}:`,
-      rest: did.status === 'cannot-tell' ? 'no change we can measure.' : lower(did.strong),
+      rest: did.status === 'cannot-tell' ? 'no change we can measure.' : lower(firstClause(did.strong)),
     }));
   if (changes.length === 0)
     return [

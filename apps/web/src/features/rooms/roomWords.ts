@@ -24,17 +24,28 @@ export const trendWords: Record<TrendFigure, string> = {
   'decay-2000': 'decay at 2 kHz',
   'decay-4000': 'decay at 4 kHz',
   'early-to-late-500': 'early against late at 500 Hz',
+  brightness: 'brightness',
   'noise-kick': 'noise floor, kick',
   'noise-overhead': 'noise floor, overhead',
   'cymbals-over-drums': 'cymbals against drums',
   'hardest-kick': 'hardest kick',
+  'hardest-overhead': 'hardest hit, overhead',
+  'low-end': 'low end as recorded',
+  arrival: 'arrival',
 };
 
-export type TrendUnit = 's' | 'dB' | 'dBFS';
+export type TrendUnit = 's' | 'dB' | 'dBFS' | 'ms';
 
 export const trendUnit = (figure: TrendFigure): TrendUnit => {
   if (figure.startsWith('decay')) return 's';
-  return figure.startsWith('noise') || figure === 'hardest-kick' ? 'dBFS' : 'dB';
+  if (figure === 'arrival') return 'ms';
+  return figure.startsWith('noise') || figure.startsWith('hardest') ? 'dBFS' : 'dB';
+};
+
+/** A value of a figure over time, with its unit. */
+export const trendValue = (value: number, figure: TrendFigure): string => {
+  const unit = trendUnit(figure);
+  return `${number(value, unit === 's' || unit === 'ms' ? 2 : 1)} ${unit}`;
 };
 
 const figureWords: Record<string, string> = {

@@ -18,6 +18,15 @@ describe('the sentence a log opens with', () => {
     ]);
   });
 
+  it('leaves a second clause for further down', () => {
+    const did = {
+      status: 'good' as const,
+      strong: 'A snare dies 0.35 s sooner at 500 Hz, and less of a snare hangs on after 50 ms.',
+      rest: 'Sure: 7 hits before, 7 after.',
+    };
+    expect(headSentence([sampleChange({ did })])[0].rest).toBe('a snare dies 0.35 s sooner at 500 Hz.');
+  });
+
   it('says what is missing', () => {
     expect(headSentence([])[0].strong).toBe('Nothing is written down yet.');
     expect(headSentence([openChange])[0].strong).toBe('Nothing can be compared yet.');

@@ -1,16 +1,9 @@
 import type { ReportResponse, TakeResponse } from '@thudline/contracts';
+import { csvRow } from '../../lib/csv';
 import { type FigureGroup } from './components/figureRows';
 
 /** Spreadsheets read a hyphen as the minus sign, and nothing else. */
 const plainNumber = (text: string) => text.replaceAll('−', '-').replace(/^–$/, '');
-
-/** A cell that begins like a formula would be run as one by a spreadsheet; a number is left alone. */
-function cell(text: string): string {
-  const safe = /^[=+\-@\t\r]/.test(text) && !/^[+-]?[\d.]+$/.test(text) ? `'${text}` : text;
-  return /[",\n]/.test(safe) ? `"${safe.replaceAll('"', '""')}"` : safe;
-}
-
-const row = (cells: readonly string[]) => cells.map(cell).join(',');
 
 /** A figure with more columns than the two microphones becomes one for each of them: "Decay, 500 Hz". */
 const oneOrTwoValues = ({ columns, rows }: FigureGroup) =>
@@ -38,7 +31,7 @@ export function figuresCsv(groups: readonly FigureGroup[]): string {
       source,
     ]),
   );
-  return [head, ...rows].map(row).join('\r\n') + '\r\n';
+  return [head, ...rows].map(csvRow).join('\r\n') + '\r\n';
 }
 
 /** All figures for pasting into a message: one line a figure. */

@@ -1,17 +1,26 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
 import type { RoomChangeResponse } from '@thudline/contracts';
-import { TextButton } from '../../../components/Button';
 import { ButtonLink } from '../../../components/ButtonLink';
 import { StatusMark } from '../../../components/StatusMark';
-import { TextLink } from '../../../components/TextLink';
 import { ChangeRow } from '../pictures/ChangeRow';
-import { categoryWords, dayWords } from '../roomWords';
+import { dayWords } from '../roomWords';
+import { ChangeAbout, type EntryActions } from './ChangeAbout';
+import { ChangePhoto } from './ChangePhoto';
 import { FigureTable } from './FigureTable';
+import { HearChange } from './HearChange';
 
 const statusWords = { good: 'Good', watch: 'Watch', fix: 'Fix', 'cannot-tell': 'Can’t tell' } as const;
 
 /** One change of the log: when and what, what it did as a sentence, then the figures. */
-export function ChangeEntry({ change, onEdit }: { change: RoomChangeResponse; onEdit?: () => void }) {
+export function ChangeEntry({
+  roomId,
+  change,
+  actions,
+}: {
+  roomId: string;
+  change: RoomChangeResponse;
+  actions?: EntryActions;
+}) {
   const { status, strong, rest } = change.did;
   return (
     <Box
@@ -27,7 +36,7 @@ export function ChangeEntry({ change, onEdit }: { change: RoomChangeResponse; on
       breakInside="avoid"
     >
       <Flex gap="12px" alignItems="center" alignSelf="start" color="ink.muted" fontSize="small">
-        {change.before.length > 0 && change.after.length > 0 && (
+        {change.isTold && change.before.length > 0 && change.after.length > 0 && (
           <Box position={{ base: 'static', lg: 'absolute' }} left="-46px" top="18px" flexShrink={0}>
             <StatusMark status={status} />
           </Box>
@@ -38,7 +47,7 @@ export function ChangeEntry({ change, onEdit }: { change: RoomChangeResponse; on
         <chakra.h3 fontSize="finding" fontWeight={600} lineHeight="26px">
           <Ring number={change.number} /> {change.what}
         </chakra.h3>
-        <About change={change} onEdit={onEdit} />
+        <ChangeAbout change={change} actions={actions} />
         {change.note && (
           <Box
             whiteSpace="pre-wrap"
@@ -51,8 +60,14 @@ export function ChangeEntry({ change, onEdit }: { change: RoomChangeResponse; on
           </Box>
         )}
         <Box marginTop="6px" maxWidth="600px">
-          <chakra.span srOnly>{statusWords[status]}: </chakra.span>
-          <b>{strong}</b> {rest}
+          {change.isTold ? (
+            <>
+              <chakra.span srOnly>{statusWords[status]}: </chakra.span>
+              <b>{strong}</b> {rest}
+            </>
+          ) : (
+            <chakra.span color="ink.muted">Comparing its takes…</chakra.span>
+          )}
         </Box>
         {change.before.length > 0 && change.after.length === 0 && (
           <Box marginTop="12px" _print={{ display: 'none' }}>
@@ -61,18 +76,32 @@ export function ChangeEntry({ change, onEdit }: { change: RoomChangeResponse; on
             </ButtonLink>
           </Box>
         )}
-        {change.figures.length > 0 && (
-          <>
-            <Box role="list" aria-label={`Figures of change ${change.number}`} marginTop="10px">
-              {change.figures.map((figure) => (
-                <ChangeRow key={figure.key} figure={figure} />
-              ))}
-            </Box>
-            <FigureTable figures={change.figures} />
-          </>
-        )}
+        {change.caveats.map((caveat) => (
+          <Box key={caveat} fontSize="small" color="ink.muted" marginTop="4px" maxWidth="600px">
+            {caveat}
+          </Box>
+        ))}
+        {change.figures.length > 0 && <Figures change={change} />}
+        <ChangePhoto {...{ roomId, change }} canChange={actions !== undefined} />
       </Box>
     </Box>
+  );
+}
+
+function Figures({ change }: { change: RoomChangeResponse }) {
+  const [before, after] = [change.before.at(-1), change.after[0]];
+  return (
+    <>
+      <Box role="list" aria-label={`Figures of change ${change.number}`} marginTop="10px">
+        {change.figures.map((figure) => (
+          <ChangeRow key={figure.key} figure={figure} />
+        ))}
+      </Box>
+      <Flex wrap="wrap" columnGap="20px" alignItems="flex-start" marginTop="8px">
+        {before && after && <HearChange {...{ before, after }} />}
+        <FigureTable figures={change.figures} />
+      </Flex>
+    </>
   );
 }
 
@@ -92,46 +121,5 @@ function Ring({ number }: { number: number }) {
     >
       {number}
     </chakra.span>
-  );
-}
-
-function About({ change, onEdit }: { change: RoomChangeResponse; onEdit?: () => void }) {
-  const { category, cost, place, before, after } = change;
-  const words = [categoryWords[category], place && 'on the plan', cost].filter(Boolean).join(' · ');
-  return (
-    <Box fontSize="caption" color="ink.muted" lineHeight="22px">
-      {words}
-      {before.length > 0 && <Takes side="before" takes={before} />}
-      {after.length > 0 && <Takes side="after" takes={after} />}
-      {onEdit && (
-        <>
-          {' · '}
-          <TextButton
-            onClick={onEdit}
-            aria-label={`edit change ${change.number}`}
-            position="relative"
-            _after={{ content: '""', position: 'absolute', inset: '-12px -10px' }}
-          >
-            edit
-          </TextButton>
-        </>
-      )}
-    </Box>
-  );
-}
-
-function Takes({ side, takes }: { side: 'before' | 'after'; takes: RoomChangeResponse['before'] }) {
-  return (
-    <>
-      {` · ${side}: take${takes.length > 1 ? 's' : ''} `}
-      {takes.map(({ id, number }, i) => (
-        <span key={id}>
-          {i > 0 && ', '}
-          <TextLink to={`/takes/${id}`} aria-label={`take ${number}`}>
-            {number}
-          </TextLink>
-        </span>
-      ))}
-    </>
   );
 }

@@ -4,6 +4,7 @@ import {
   type CreateRoomChangeRequest,
   type ListRoomChangesResponse,
   type RoomChangeResponse,
+  type RoomResponse,
   type UserSettings,
 } from '@thudline/contracts';
 import { useState, type FormEvent } from 'react';
@@ -17,12 +18,14 @@ import { FieldLabel, TextField } from '../../../components/TextField';
 import { changeDraftOf, offeredTakes, suggestedTakes, type ChangeDraft } from '../changeDraft';
 import { categoryWords, dayWords } from '../roomWords';
 import { NumberField, numberOf } from './NumberField';
+import { PlaceOnPlan } from './PlaceOnPlan';
 
 type RoomTake = ListRoomChangesResponse['takes'][number];
 const feetInAMetre = 3.28084;
 
 /** One entry of the log: what, when, and which takes show it. */
 export function ChangeForm({
+  room,
   change = null,
   takes,
   lengthUnit,
@@ -30,6 +33,7 @@ export function ChangeForm({
   onRemove,
   onClose,
 }: {
+  room: RoomResponse;
   change?: RoomChangeResponse | null;
   takes: readonly RoomTake[];
   lengthUnit: UserSettings['lengthUnit'];
@@ -92,6 +96,11 @@ export function ChangeForm({
               onChange={(category) => set({ category })}
             />
           </Box>
+          <PlaceOnPlan
+            room={room}
+            place={requestOf(draft, m).place ?? null}
+            onPlace={({ xM, yM }) => set(inUnits({ ...draft, placeX: String(xM), placeY: String(yM) }, m))}
+          />
           <Grid templateColumns="repeat(2, 1fr)" gap="14px">
             <NumberField
               label={`On the plan, from the left, ${m === 1 ? 'm' : 'ft'}`}

@@ -8,7 +8,14 @@ const cell = { textAlign: 'right', paddingY: '3px', paddingLeft: '12px', whiteSp
 export function FigureTable({ figures }: { figures: readonly ChangeFigure[] }) {
   const hits = (count: number | null) => (count === null ? '–' : count);
   return (
-    <chakra.details marginTop="8px" fontSize="small" _print={{ display: 'none' }}>
+    <chakra.details
+      fontSize="small"
+      marginLeft={{ md: 'auto' }}
+      paddingY="6px"
+      // Opened it needs the whole width.
+      css={{ '&[open]': { flexBasis: '100%' } }}
+      _print={{ display: 'none' }}
+    >
       <chakra.summary cursor="pointer" color="ink.muted" width="fit-content" paddingY="4px">
         as a table
       </chakra.summary>

@@ -1,9 +1,10 @@
 import { Box, Flex, chakra } from '@chakra-ui/react';
-import type {
-  ListRoomChangesResponse,
-  RoomChangeResponse,
-  RoomResponse,
-  UserSettings,
+import {
+  paths,
+  type ListRoomChangesResponse,
+  type RoomChangeResponse,
+  type RoomResponse,
+  type UserSettings,
 } from '@thudline/contracts';
 import { useState } from 'react';
 import { Button } from '../../../components/Button';
@@ -11,12 +12,13 @@ import { Headline } from '../../../components/Headline';
 import { SheetPaper } from '../../../components/SheetPaper';
 import { headSentence } from '../headSentence';
 import { useRoomActions } from '../hooks/useRoomActions';
+import { ordersOfDay } from '../ordersOfDay';
 import { logWords } from '../roomWords';
 import { ChangeEntry } from './ChangeEntry';
 import { ChangeForm } from './ChangeForm';
 import { RoomForm } from './RoomForm';
 import { RoomMargin } from './RoomMargin';
-import { RoomTrend } from './RoomTrend';
+import { Trend } from './Trend';
 
 type Open = { form: 'room' } | { form: 'change'; change: RoomChangeResponse | null } | null;
 
@@ -36,10 +38,16 @@ export function RoomLog({
 }) {
   const [open, setOpen] = useState<Open>(null);
   const edit = readOnly ? undefined : () => setOpen({ form: 'room' });
+  const { putInOrder } = useRoomActions();
+  const moves = (change: RoomChangeResponse) => {
+    const { earlier, later } = ordersOfDay(changes, change);
+    return {
+      onEarlier: earlier && (() => void putInOrder(room.id, earlier)),
+      onLater: later && (() => void putInOrder(room.id, later)),
+    };
+  };
   return (
-    <SheetPaper
-      margin={<RoomMargin room={room} changes={changes} lengthUnit={settings.lengthUnit} onEdit={edit} />}
-    >
+    <SheetPaper margin={<RoomMargin {...{ room, changes }} lengthUnit={settings.lengthUnit} onEdit={edit} />}>
       <Box color="ink.muted" fontSize="small" lineHeight="22px">
         {logWords(room)}
       </Box>
@@ -58,7 +66,7 @@ export function RoomLog({
           Print this room
         </Button>
       </Flex>
-      <RoomTrend roomId={room.id} changes={changes} />
+      <Trend path={paths.roomTrend(room.id)} changes={changes} />
       {changes.length > 0 && (
         <>
           <chakra.h2
@@ -74,8 +82,13 @@ export function RoomLog({
             {changes.map((change) => (
               <ChangeEntry
                 key={change.id}
+                roomId={room.id}
                 change={change}
-                onEdit={readOnly ? undefined : () => setOpen({ form: 'change', change })}
+                actions={
+                  readOnly
+                    ? undefined
+                    : { onEdit: () => setOpen({ form: 'change', change }), ...moves(change) }
+                }
               />
             ))}
           </chakra.ol>
@@ -117,7 +130,7 @@ function OpenForm({
   const { change } = open;
   return (
     <ChangeForm
-      {...{ change, takes, onClose }}
+      {...{ room, change, takes, onClose }}
       lengthUnit={settings.lengthUnit}
       onSave={(request) =>
         change ? actions.updateChange(room.id, change.id, request) : actions.addChange(room.id, request)

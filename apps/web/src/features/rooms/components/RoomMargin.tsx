@@ -1,9 +1,19 @@
 import { Box, chakra } from '@chakra-ui/react';
-import type { RoomChangeResponse, RoomResponse, UserSettings } from '@thudline/contracts';
+import { paths, type RoomChangeResponse, type RoomResponse, type UserSettings } from '@thudline/contracts';
 import { TextButton } from '../../../components/Button';
 import { TextLink } from '../../../components/TextLink';
+import { DownloadLink } from '../../../components/DownloadLink';
+import { PhotoField } from '../../../components/PhotoField';
+import { useRoomActions } from '../hooks/useRoomActions';
 import { RoomPlan } from '../pictures/RoomPlan';
 import { roomMeasures } from '../roomWords';
+
+const keptLink = {
+  textDecoration: 'underline',
+  textUnderlineOffset: '3px',
+  display: 'inline-block',
+  paddingBlock: '8px',
+};
 
 /** Beside the log: the plan, the room in a line, and the caution. */
 export function RoomMargin({
@@ -17,6 +27,7 @@ export function RoomMargin({
   lengthUnit: UserSettings['lengthUnit'];
   onEdit?: () => void;
 }) {
+  const { addPhoto, removePhoto } = useRoomActions();
   const measures = roomMeasures(room, lengthUnit);
   const hasPlan = room.shape.kind === 'box' && room.shape.lengthM !== null && room.shape.widthM !== null;
   return (
@@ -59,6 +70,19 @@ export function RoomMargin({
           change what is written down
         </TextButton>
       )}
+      <Box marginTop="8px">
+        <PhotoField
+          photo={room.photo}
+          alt={room.name}
+          label="photo of the room"
+          canChange={onEdit !== undefined}
+          onAdd={(file, signal) => addPhoto(room.id, file, signal)}
+          onRemove={() => removePhoto(room.id)}
+        />
+      </Box>
+      <Box fontSize="small" marginTop="4px" _print={{ display: 'none' }} css={{ '& a': keptLink }}>
+        <DownloadLink href={paths.roomFile(room.id)}>keep all of this room as a file</DownloadLink>
+      </Box>
       <Box
         marginTop="14px"
         paddingTop="12px"

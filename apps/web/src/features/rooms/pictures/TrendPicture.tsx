@@ -4,9 +4,10 @@ import { number, plural } from '../../../lib/format';
 import { useWidth } from '../../../lib/useWidth';
 import { ink } from '../../sheet/pictures/ink';
 import { PictureText } from '../../sheet/pictures/PictureText';
-import { dayWords, trendUnit, trendWords } from '../roomWords';
+import { dayWords, trendUnit, trendValue, trendWords } from '../roomWords';
 import { NumberRing } from './NumberRing';
-import { trendLayout, type TrendLayout } from './trendLayout';
+import { shortName } from './shortName';
+import { trendLayout, type TimeView, type TrendLayout } from './trendLayout';
 
 const topPx = 58;
 const heightPx = 150;
@@ -16,12 +17,15 @@ const monthName = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'sho
 export function TrendPicture({
   trend,
   changes,
+  view = null,
 }: {
   trend: RoomTrendResponse;
   changes: readonly RoomChangeResponse[];
+  view?: TimeView | null;
 }) {
   const { ref, widthPx } = useWidth<HTMLDivElement>();
-  const layout = trendLayout(trend.points, changes, { widthPx, topPx, heightPx, leftPx: 46, rightPx: 8 });
+  const size = { widthPx, topPx, heightPx, leftPx: 46, rightPx: 8 };
+  const layout = trendLayout(trend.points, changes, size, view);
   return (
     <Box ref={ref} marginTop="10px">
       <svg
@@ -69,7 +73,7 @@ function Axis({
   widthPx: number;
 }) {
   const unit = trendUnit(trend.figure);
-  const digits = unit === 's' ? 2 : 1;
+  const digits = unit === 's' || unit === 'ms' ? 2 : 1;
   const whole = layout.ticks.every(({ value }) => Math.abs(value * 10 - Math.round(value * 10)) < 1e-6);
   return (
     <>
@@ -77,7 +81,7 @@ function Axis({
         <g key={value}>
           <path d={`M40 ${y}H${widthPx}`} stroke={ink.rule} />
           <PictureText x={34} y={y + 4} textAnchor="end" fill={ink.muted}>
-            {number(value, unit === 's' ? (whole ? 1 : digits) : 0)}
+            {number(value, digits === 2 ? (whole ? 1 : 2) : Number.isInteger(value) ? 0 : 1)}
             {i === layout.ticks.length - 1 ? ` ${unit}` : ''}
           </PictureText>
         </g>
@@ -97,9 +101,15 @@ function Axis({
   );
 }
 
-function Vertical({ change, x, labelX, hasTakesAfter }: TrendLayout['verticals'][number]) {
+function Vertical({ change, x, labelX, roomPx, hasTakesAfter }: TrendLayout['verticals'][number]) {
+  const name = shortName(change.what, roomPx);
   return (
     <g>
+      {name && (
+        <PictureText x={labelX + 15} y={18.5} fill={ink.muted}>
+          {name}
+        </PictureText>
+      )}
       <path
         d={`M${labelX} 26L${x} 40V${topPx + heightPx}`}
         fill="none"
@@ -113,8 +123,7 @@ function Vertical({ change, x, labelX, hasTakesAfter }: TrendLayout['verticals']
 }
 
 function describe({ figure, points }: RoomTrendResponse, changes: readonly RoomChangeResponse[]): string {
-  const unit = trendUnit(figure);
-  const told = (value: number) => `${number(value, unit === 's' ? 2 : 1)} ${unit}`;
+  const told = (value: number) => trendValue(value, figure);
   const [first, last] = [points[0], points[points.length - 1]];
   const marks = [...changes]
     .reverse()

@@ -1,4 +1,4 @@
-import { spread, trendLayout, valueScale } from './trendLayout';
+import { movedView, spread, trendLayout, valueScale, wholeTime } from './trendLayout';
 
 const size = { widthPx: 500, topPx: 50, heightPx: 100, leftPx: 40, rightPx: 10 };
 const point = (day: string, value: number, iqr: number | null = 0.04) => ({
@@ -7,6 +7,7 @@ const point = (day: string, value: number, iqr: number | null = 0.04) => ({
   recordedAt: `2026-${day}T12:00:00.000Z`,
   value,
   iqr,
+  setup: null,
 });
 const change = (number: number, day: string) => ({ number, happenedOn: `2026-${day}`, what: 'x' });
 
@@ -50,11 +51,47 @@ describe('a figure over time', () => {
     ]);
   });
 
+  it('seen nearer shows what lies in that time, its middle value cut at the edges', () => {
+    const view = { fromMs: Date.parse('2026-10-15'), toMs: Date.parse('2026-11-10') };
+    const near = trendLayout(points, [change(1, '11-30')], size, view);
+    expect(near.points.map(({ point: { value } }) => value)).toEqual([0.62]);
+    expect(near.verticals).toEqual([]);
+    expect(near.spans).toHaveLength(1);
+    expect(near.spans[0].fromX).toBe(40);
+    expect(near.spans[0].toX).toBe(490);
+  });
+
+  it('leaves room for a change’s name up to the next number', () => {
+    const [first, second] = layout.verticals;
+    expect(first.roomPx).toBeCloseTo(second.labelX - first.labelX - 26, 6);
+  });
+
   it('draws a single take without a spread', () => {
     const single = trendLayout([point('10-05', -61, null)], [], size);
     expect(single.points[0].lowY).toBe(single.points[0].y);
     for (const value of [single.points[0].x, single.points[0].y, single.spans[0].toX])
       expect(Number.isFinite(value)).toBe(true);
+  });
+});
+
+describe('the time that is shown', () => {
+  const dayMs = 86_400_000;
+  const whole = wholeTime([point('10-01', 1), point('12-01', 1)], []);
+
+  it('comes nearer around its middle, no nearer than two days, and goes no wider than all', () => {
+    const near = movedView(whole, whole, { factor: 0.5 });
+    expect(near.toMs - near.fromMs).toBeCloseTo((whole.toMs - whole.fromMs) / 2, 3);
+    expect((near.fromMs + near.toMs) / 2).toBeCloseTo((whole.fromMs + whole.toMs) / 2, 3);
+    const nearest = movedView(whole, whole, { factor: 1e-6 });
+    expect(nearest.toMs - nearest.fromMs).toBeCloseTo(2 * dayMs, 3);
+    expect(movedView(near, whole, { factor: 9 })).toEqual(whole);
+  });
+
+  it('moves along and stays inside', () => {
+    const near = movedView(whole, whole, { factor: 0.25 });
+    const later = movedView(near, whole, { shift: 0.5 });
+    expect(later.fromMs - near.fromMs).toBeCloseTo((near.toMs - near.fromMs) / 2, 3);
+    expect(movedView(near, whole, { shift: 99 }).toMs).toBeCloseTo(whole.toMs, 3);
   });
 });
 

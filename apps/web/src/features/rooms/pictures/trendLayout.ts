@@ -5,6 +5,19 @@ type Change = Pick<RoomChangeResponse, 'number' | 'happenedOn' | 'what'>;
 
 const dayMs = 24 * 60 * 60 * 1000;
 
+/** What of the time is shown, in ms since 1970. */
+export interface TimeView {
+  fromMs: number;
+  toMs: number;
+}
+
+export interface ViewMove {
+  /** Of the time shown: below 1 is nearer. */
+  factor?: number;
+  /** In widths of what is shown; later is positive. */
+  shift?: number;
+}
+
 export interface TrendSize {
   widthPx: number;
   topPx: number;
@@ -26,7 +39,8 @@ export interface TrendLayout {
   ticks: { value: number; y: number }[];
   months: { at: Date; x: number }[];
   points: { point: Point; x: number; y: number; lowY: number; highY: number }[];
-  verticals: { change: Change; x: number; labelX: number; hasTakesAfter: boolean }[];
+  /** `roomPx`: what is free to the right of the number, for the change's name. */
+  verticals: { change: Change; x: number; labelX: number; roomPx: number; hasTakesAfter: boolean }[];
   spans: TrendSpan[];
 }
 
@@ -35,10 +49,12 @@ export function trendLayout(
   points: readonly Point[],
   changes: readonly Change[],
   { widthPx, topPx, heightPx, leftPx, rightPx }: TrendSize,
+  view: TimeView | null = null,
 ): TrendLayout {
-  const marks = [...changes].sort((one, other) => one.number - other.number);
-  const times = [...points.map(timeOf), ...marks.map(dayOf)];
-  const [from, to] = spanOf(times);
+  const { fromMs: from, toMs: to } = view ?? wholeTime(points, changes);
+  const isShown = (time: number) => time >= from && time <= to;
+  const allMarks = [...changes].sort((one, other) => one.number - other.number);
+  const marks = allMarks.filter((mark) => isShown(dayOf(mark)));
   const scale = valueScale(points);
   const x = (time: number) => leftPx + ((time - from) / (to - from)) * (widthPx - leftPx - rightPx);
   const y = (value: number) => topPx + ((scale.max - value) / (scale.max - scale.min)) * heightPx;
@@ -49,36 +65,57 @@ export function trendLayout(
   return {
     ticks: scale.ticks.map((value) => ({ value, y: y(value) })),
     months: monthStarts(from, to).map((at) => ({ at, x: x(at.getTime()) })),
-    points: points.map((point) => {
-      const half = (point.iqr ?? 0) / 2;
-      return {
-        point,
-        x: x(timeOf(point)),
-        y: y(point.value),
-        lowY: y(point.value - half),
-        highY: y(point.value + half),
-      };
-    }),
+    points: points
+      .filter((point) => isShown(timeOf(point)))
+      .map((point) => {
+        const half = (point.iqr ?? 0) / 2;
+        return {
+          point,
+          x: x(timeOf(point)),
+          y: y(point.value),
+          lowY: y(point.value - half),
+          highY: y(point.value + half),
+        };
+      }),
     verticals: marks.map((change, i) => ({
       change,
       x: x(dayOf(change)),
       labelX: badges[i],
+      roomPx: (badges[i + 1] ?? widthPx) - badges[i] - badgePx,
       hasTakesAfter: points.some((point) => timeOf(point) >= dayOf(change)),
     })),
-    spans: spansBetween(points, marks, { x, y, to }),
+    spans: spansBetween(points, allMarks, { x, y, to }).flatMap((span) => clipped(span, x(from), x(to))),
   };
+}
+
+/** All takes and changes, with a day's room on both sides, so that a single take has a place. */
+export function wholeTime(points: readonly Point[], changes: readonly Change[]): TimeView {
+  const times = [...points.map(timeOf), ...changes.map(dayOf)];
+  const [fromMs, toMs] = [Math.min(...times), Math.max(...times)];
+  const roomMs = Math.max(dayMs, (toMs - fromMs) * 0.02);
+  return { fromMs: fromMs - roomMs, toMs: toMs + roomMs };
+}
+
+/** Nearer, wider or along; never beyond the whole time, and never nearer than two days. */
+export function movedView(
+  { fromMs, toMs }: TimeView,
+  whole: TimeView,
+  { factor = 1, shift = 0 }: ViewMove,
+): TimeView {
+  const wholeMs = whole.toMs - whole.fromMs;
+  const shownMs = Math.min(wholeMs, Math.max(2 * dayMs, (toMs - fromMs) * factor));
+  const middleMs = (fromMs + toMs) / 2 + shift * (toMs - fromMs);
+  const startMs = Math.min(Math.max(middleMs - shownMs / 2, whole.fromMs), whole.toMs - shownMs);
+  return { fromMs: startMs, toMs: startMs + shownMs };
+}
+
+function clipped(span: TrendSpan, leftX: number, rightX: number): TrendSpan[] {
+  if (span.toX < leftX || span.fromX > rightX) return [];
+  return [{ ...span, fromX: Math.max(span.fromX, leftX), toX: Math.min(span.toX, rightX) }];
 }
 
 const timeOf = ({ recordedAt }: Point) => Date.parse(recordedAt);
 const dayOf = ({ happenedOn }: Change) => Date.parse(`${happenedOn}T00:00:00Z`);
-
-/** A day's room on both sides, so that a single take has a place. */
-function spanOf(times: readonly number[]): [number, number] {
-  const from = Math.min(...times);
-  const to = Math.max(...times);
-  const room = Math.max(dayMs, (to - from) * 0.02);
-  return [from - room, to + room];
-}
 
 function spansBetween(
   points: readonly Point[],

@@ -9,6 +9,7 @@ import { fieldsOf, useSetupDraft } from '../hooks/useSetupDraft';
 import { agreementWords, takesOfSetup, usedWords } from '../setupWords';
 import { PhotoPart } from './PhotoPart';
 import { SetupButtons } from './SetupButtons';
+import { SetupOverTime } from './SetupOverTime';
 import { SetupSheet } from './SetupSheet';
 import { UnkeptQuestion } from './UnkeptQuestion';
 
@@ -40,7 +41,12 @@ export function KeptSetup({
       measured={setup.measured}
       caption={<SetupCaption setup={setup} />}
       says={agreementWords(draft.fields, setup.measured, settings)}
-      photo={<PhotoPart setup={setup} canChange={canChange} />}
+      photo={
+        <>
+          <PhotoPart setup={setup} canChange={canChange} />
+          <SetupOverTime setup={setup} />
+        </>
+      }
       buttons={
         canChange && (
           <SetupButtons

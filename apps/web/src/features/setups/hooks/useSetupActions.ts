@@ -1,9 +1,9 @@
 import { paths, setupResponse, type CreateSetupRequest, type SetupFields } from '@thudline/contracts';
 import type { SetupResponse } from '@thudline/contracts';
 import { useSWRConfig } from 'swr';
-import { errorFrom, parseJson, refreshSession, requestJson, requestNothing } from '../../../lib/apiClient';
+import { parseJson, requestJson, requestNothing } from '../../../lib/apiClient';
 import { isTakesKey } from '../../takes/hooks/takesKeys';
-import { postForm } from '../../upload/api/postForm';
+import { postPhoto } from '../../upload/api/postPhoto';
 
 /** A take carries its setup's name. */
 const isTakeKey = (key: unknown) => typeof key === 'string' && /^\/api\/takes\/[^/]+$/.test(key);
@@ -33,14 +33,7 @@ export function useSetupActions() {
       await mutate(paths.setups);
     },
     addPhoto: async (setupId: string, file: File, signal: AbortSignal) => {
-      const form = new FormData();
-      form.append('photo', file, file.name);
-      const post = () =>
-        postForm({ path: paths.setupPhoto(setupId), form, signal, onProgress: () => undefined });
-      let answer = await post();
-      if (answer.status === 401 && (await refreshSession())) answer = await post();
-      const { status, text } = answer;
-      if (status < 200 || status >= 300) throw await errorFrom({ status, text: () => Promise.resolve(text) });
+      const text = await postPhoto({ path: paths.setupPhoto(setupId), file, signal });
       await told(setupResponse.parse(parseJson(text)));
     },
     removePhoto: async (setupId: string) => {

@@ -2,6 +2,7 @@ import { Flex, chakra } from '@chakra-ui/react';
 import type { ReportResponse, TakeResponse } from '@thudline/contracts';
 import { useState } from 'react';
 import { TextButton } from '../../../components/Button';
+import { keepFile } from '../../../lib/keepFile';
 import { figuresCsv, figuresFileName, figuresJson, figuresText } from '../figuresFile';
 import type { FigureGroup } from './figureRows';
 
@@ -40,14 +41,4 @@ export function FiguresOut({
       </chakra.span>
     </Flex>
   );
-}
-
-function keepFile(name: string, text: string, type: string) {
-  const url = URL.createObjectURL(new Blob([text], { type: `${type};charset=utf-8` }));
-  const link = document.createElement('a');
-  link.href = url;
-  link.download = name;
-  link.click();
-  // The browser has taken the bytes by the next turn.
-  setTimeout(() => URL.revokeObjectURL(url), 0);
 }

@@ -9,10 +9,10 @@ export function useTakeEdits(take: TakeResponse) {
   const key = paths.take(take.id);
 
   const update = async (body: UpdateTakeRequest) => {
-    // The name of another setup is the server's to tell.
-    const { setupId, ...known } = body;
+    // The name of another setup or room is the server's to tell.
+    const { setupId, roomId, ...known } = body;
     await mutate(key, requestJson(key, takeResponse, { method: 'PATCH', body }), {
-      optimisticData: setupId === undefined ? { ...take, ...known } : take,
+      optimisticData: setupId === undefined && roomId === undefined ? { ...take, ...known } : take,
       rollbackOnError: true,
       revalidate: false,
     });
