@@ -6,7 +6,8 @@ const fewestLetters = 5;
 export function shortName(name: string, roomPx: number): string | null {
   const letters = Math.floor(roomPx / letterPx);
   if (name.length <= letters) return name;
-  const cut = name.slice(0, letters);
+  // One letter's room for the dots.
+  const cut = name.slice(0, Math.max(0, letters - 1));
   const words = cut.slice(0, Math.max(0, cut.lastIndexOf(' ')));
   return words.length >= fewestLetters ? `${words} …` : null;
 }
