@@ -10,7 +10,14 @@ import { RoomCalculatorPage } from './RoomCalculatorPage';
 const trend: RoomTrendResponse = {
   figure: 'decay-1000',
   points: [
-    { takeId: roomTakeId(8), number: 8, recordedAt: '2026-12-01T19:40:00.000Z', value: 0.38, iqr: 0.04 },
+    {
+      takeId: roomTakeId(8),
+      number: 8,
+      recordedAt: '2026-12-01T19:40:00.000Z',
+      value: 0.38,
+      iqr: 0.04,
+      setup: null,
+    },
   ],
 };
 const room = sampleRoom({ temperatureC: 20, kit: { xM: 3.45, yM: 1.5, turnedDeg: 0 } });

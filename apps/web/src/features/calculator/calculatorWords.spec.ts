@@ -122,7 +122,7 @@ describe('words of the calculator', () => {
   });
 
   it('keep what was measured and what is estimated apart', () => {
-    const point = { takeId: '', number: 8, recordedAt: '', value: 0.38, iqr: null };
+    const point = { takeId: '', number: 8, recordedAt: '', value: 0.38, iqr: null, setup: null };
     expect(measuredWords([point], 0.45)).toMatch(
       /^Take 8’s snare dies in 0.38 s at 1 kHz; the estimate says 0.45. They aren’t the same thing:/,
     );

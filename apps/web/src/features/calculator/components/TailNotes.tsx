@@ -1,12 +1,13 @@
 import { Box } from '@chakra-ui/react';
+import { paths } from '@thudline/contracts';
 import { MarginNote } from '../../sheet/components/RuledSheet';
-import { useRoomTrend } from '../../rooms/hooks/useRoomTrend';
+import { useTrend } from '../../rooms/hooks/useTrend';
 import { measuredWords } from '../calculatorWords';
 import type { BandEstimate } from '../tailEstimate';
 
 /** What was measured in this room beside what is estimated: not the same thing. */
 export function MeasuredNote({ roomId, bands }: { roomId: string; bands: readonly BandEstimate[] }) {
-  const { trend, error } = useRoomTrend(roomId, 'decay-1000');
+  const { trend, error } = useTrend(paths.roomTrend(roomId), 'decay-1000');
   const estimateS = bands.find(({ centreHz }) => centreHz === 1000)?.before.eyringS ?? null;
   return (
     <MarginNote from="a Thudline" about="measured beside it">

@@ -80,9 +80,11 @@ export function RoomMargin({
           onRemove={() => removePhoto(room.id)}
         />
       </Box>
-      <Box fontSize="small" marginTop="4px" _print={{ display: 'none' }} css={{ '& a': keptLink }}>
-        <DownloadLink href={paths.roomFile(room.id)}>keep all of this room as a file</DownloadLink>
-      </Box>
+      {onEdit && (
+        <Box fontSize="small" marginTop="4px" _print={{ display: 'none' }} css={{ '& a': keptLink }}>
+          <DownloadLink href={paths.roomFile(room.id)}>keep all of this room as a file</DownloadLink>
+        </Box>
+      )}
       <Box
         marginTop="14px"
         paddingTop="12px"
