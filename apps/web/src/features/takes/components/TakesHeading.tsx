@@ -5,8 +5,8 @@ import { TextLink } from '../../../components/TextLink';
 /** The name of the page and the way to another take. */
 export function TakesHeading() {
   return (
-    <Flex alignItems="center" gap="18px" minHeight="44px">
-      <chakra.h1 fontSize="28px" lineHeight="34px" fontWeight={900} flex="1">
+    <Flex wrap="wrap" alignItems="center" columnGap="18px" rowGap="6px" minHeight="44px">
+      <chakra.h1 fontSize="28px" lineHeight="34px" fontWeight={900} flex={{ base: '1 0 100%', sm: '1' }}>
         Takes
       </chakra.h1>
       <Box fontSize="small" color="ink.muted" display={{ base: 'none', lg: 'block' }}>
