@@ -16,7 +16,8 @@ export async function fillRoom(client: pg.Client, templateTakeId: string): Promi
        '{"kind": "box", "lengthM": 6, "widthM": 4, "heightM": 2.5}', '[]' from take where id = $1 returning id`,
     [templateTakeId],
   );
-  const roomId = rows[0].id;
+  const roomId = rows[0]?.id;
+  if (!roomId) throw new Error(`There is no take ${templateTakeId}.`);
   await copyTakes(client, templateTakeId, { roomId, count: takeCount, from: 10_000 });
   await copyTakes(client, templateTakeId, { roomId: null, count: otherTakes, from: 20_000 });
   await client.query(
