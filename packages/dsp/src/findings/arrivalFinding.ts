@@ -19,12 +19,15 @@ export function arrivalFinding(figures: ReportFigures, reader: Pick<Reader, 'len
   const when = arrivalMs >= 0 ? 'later' : 'earlier';
   const where = `about ${lengthText(pathDifferenceM ?? 0, reader.lengthUnit)} ${arrivalMs >= 0 ? 'further away' : 'nearer'}`;
   if (confidence < CONFIDENT) {
-    const doubt = hitsUsed < ENOUGH_HITS ? 'few hits show it' : 'other sounds may hide it';
+    const hasFew = hitsUsed < ENOUGH_HITS;
+    const doubt = hasFew ? 'few hits show it' : 'something may hide it';
     return {
       topic: 'arrival',
       status: 'watch',
       sentence: `The overhead seems to hear the kick ${ms} ms ${when}, ${where}, but ${doubt}; record eight kicks.`,
-      why: `It was seen clearly in ${counted(hitsUsed, 'hit')}.`,
+      why: hasFew
+        ? `It was seen clearly in ${counted(hitsUsed, 'hit')}.`
+        : 'What is struck together with a kick may reach the overhead before it.',
       next: 'Record eight hard kicks with nothing else.',
     };
   }

@@ -220,7 +220,7 @@ describe('the arrival finding', () => {
     expect(arrival({ confidence: 0.4, hitsUsed: 8 })).toMatchObject({
       status: 'watch',
       sentence:
-        'The overhead seems to hear the kick 1.6 ms later, about 56 cm further away, but other sounds may hide it; record eight kicks.',
+        'The overhead seems to hear the kick 1.6 ms later, about 56 cm further away, but something may hide it; record eight kicks.',
     });
     expect(arrival({ arrivalMs: null, reason: 'hits-disagree' }).status).toBe('cannot-tell');
   });
