@@ -26,6 +26,7 @@ import { MailWorker } from './mail/mail-worker';
 import { MailWriter } from './mail/mail-writer';
 import { NoteMailWriter } from './mail/note-mail-writer';
 import { Mailer } from './mail/mailer';
+import { ShareMailWriter } from './mail/share-mail-writer';
 import { MeasurePool } from './measuring/measure-pool';
 import { MeasureQueue } from './measuring/measure-queue';
 import { MeasurementClaims } from './measuring/measurement-claims';
@@ -78,6 +79,7 @@ export class WorkerModule {
         Digests,
         AccountMailWriter,
         NoteMailWriter,
+        ShareMailWriter,
         MailWriter,
         MailWorker,
         TakePurge,

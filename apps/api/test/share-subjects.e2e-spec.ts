@@ -1,3 +1,6 @@
+import { mkdtemp, rm, writeFile } from 'node:fs/promises';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import {
   listRoomChangesResponse,
   paths,
@@ -9,6 +12,7 @@ import {
   TryOutResponse,
   tryOutResponse,
 } from '@thudline/contracts';
+import request from 'supertest';
 import { Share } from '../src/shares/entities/share.entity';
 import { User } from '../src/users/entities/user.entity';
 import { Browser, joined, Person } from './support/person';
@@ -22,6 +26,7 @@ type Name = (typeof names)[number];
 
 describe('a link', () => {
   let test: TestApp;
+  let webDist: string;
   let juno: Person;
   let takes: Record<Name, TakeResponse>;
   let tryOut: TryOutResponse;
@@ -30,7 +35,9 @@ describe('a link', () => {
   let subjects: Record<ShareSubject['kind'], ShareSubject>;
 
   beforeAll(async () => {
-    test = await startTestApp();
+    webDist = await mkdtemp(join(tmpdir(), 'thudline-web-'));
+    await writeFile(join(webDist, 'index.html'), '<html><head><title>Thudline</title></head></html>');
+    test = await startTestApp({ WEB_DIST: webDist });
     juno = await joined(test);
     const setup = await juno.post(paths.setups, { name: 'Secret setup' }).expect(201);
     const { id: setupId } = setupResponse.parse(setup.body);
@@ -60,7 +67,10 @@ describe('a link', () => {
       room: { kind: 'room', roomId: room.id },
     };
   });
-  afterAll(async () => test?.close());
+  afterAll(async () => {
+    await test?.close();
+    await rm(webDist, { recursive: true, force: true });
+  });
 
   /** Everything that can be read of this player, by a name. */
   function routesOf(setupId: string): Map<string, string> {
@@ -69,6 +79,7 @@ describe('a link', () => {
       return [
         [`sheet of ${name}`, paths.take(id)],
         [`report of ${name}`, paths.report(id)],
+        [`notes of ${name}`, paths.notes(id)],
         [`added files of ${name}`, paths.addedFiles(id)],
         [`excerpt of ${name}`, `${paths.excerpt(id)}?startS=0&durationS=0.1`],
         [`sound of ${name}`, paths.listen(id)],
@@ -95,7 +106,7 @@ describe('a link', () => {
     return new Map(all);
   }
 
-  const sheetOf = (name: Name) => [`sheet of ${name}`, `report of ${name}`];
+  const sheetOf = (name: Name) => [`sheet of ${name}`, `report of ${name}`, `notes of ${name}`];
   const soundOf = (name: Name) => [`excerpt of ${name}`, `sound of ${name}`];
 
   /** What answers with anything but a refusal. */
@@ -111,13 +122,25 @@ describe('a link', () => {
   }
 
   const pages = {
-    take: { reads: sheetOf('before'), hears: soundOf('before') },
-    comparison: { reads: ['comparison'], hears: [...soundOf('before'), ...soundOf('after')] },
-    'try-out': { reads: ['try-out', 'ranking'], hears: [...soundOf('low'), ...soundOf('high')] },
-    room: { reads: ['room', 'log', 'trend'], hears: [...soundOf('bare'), ...soundOf('panels')] },
+    take: { reads: sheetOf('before'), hears: soundOf('before'), title: 'before' },
+    comparison: {
+      reads: ['comparison', 'report of before', 'report of after'],
+      hears: [...soundOf('before'), ...soundOf('after')],
+      title: 'before and after',
+    },
+    'try-out': {
+      reads: ['try-out', 'ranking'],
+      hears: [...soundOf('low'), ...soundOf('high')],
+      title: 'Try-out: how high the overhead hangs',
+    },
+    room: {
+      reads: ['room', 'log', 'trend'],
+      hears: [...soundOf('bare'), ...soundOf('panels')],
+      title: 'The garage',
+    },
   };
 
-  describe.each(Object.entries(pages))('to one %s', (kind, { reads, hears }) => {
+  describe.each(Object.entries(pages))('to one %s', (kind, { reads, hears, title }) => {
     const subject = () => subjects[kind as ShareSubject['kind']];
 
     it('opens what it names to a guest, and nothing beyond it', async () => {
@@ -162,6 +185,18 @@ describe('a link', () => {
       expect((await openTo(lio)).filter((name) => !own.includes(name))).toEqual([]);
       await em.nativeUpdate(Share, { id }, { revokedAt: new Date() });
       expect((await openTo(oda)).filter((name) => !own.includes(name))).toEqual([]);
+    });
+
+    it('has a head with title and verdict, for no search engine', async () => {
+      const { url } = await linkTo(juno, subject(), { question: 'Secret question?' });
+      const page = await request(test.server).get(new URL(url!).pathname).expect(200);
+      expect(page.text).toContain(`<meta property="og:title" content="${title}">`);
+      for (const secret of ['Secret', 'note of', 'Juno', 'hidden'])
+        expect([secret, page.text.includes(secret)]).toEqual([secret, false]);
+      expect(page.headers).toMatchObject({
+        'referrer-policy': 'no-referrer',
+        'x-robots-tag': 'noindex, nofollow',
+      });
     });
 
     it('tells of neither setups, files, addresses nor other takes, wherever it leads', async () => {

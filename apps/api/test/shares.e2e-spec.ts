@@ -12,6 +12,7 @@ import {
 import request from 'supertest';
 import { AuditEvent } from '../src/audit/entities/audit-event.entity';
 import { Share } from '../src/shares/entities/share.entity';
+import { User } from '../src/users/entities/user.entity';
 import { Browser, joined, Person } from './support/person';
 import { giveReport, shortTakeFacts } from './support/reported-take';
 import { openedBy, sharedBy, tokenOf } from './support/shares';
@@ -45,18 +46,21 @@ describe('shares', () => {
   });
 
   const stored = (id: string) => test.em().findOneOrFail(Share, { id });
+  const pagePath = ({ url }: { url: string | null }) => new URL(url ?? '').pathname;
   const ended = { code: 'link-ended', message: expect.any(String) as string };
 
   it('gives an address with a token that is kept only as a hash', async () => {
     const share = await sharedBy(juno, take, { question: ' What would you change first? ' });
     expect(share).toMatchObject({
       subject: { kind: 'take', takeId: take.id },
+      about: 'Loud & <clear>',
       label: '',
       question: 'What would you change first?',
       canListen: true,
       canDownload: false,
       canNote: false,
       hasPassphrase: false,
+      mailedTo: null,
       revokedAt: null,
       openCount: 0,
     });
@@ -146,11 +150,57 @@ describe('shares', () => {
     expect(again.body).toEqual(ended);
   });
 
+  it('is opened again when its owner takes the ending back, by the same address', async () => {
+    const share = await sharedBy(juno, take);
+    await openedBy(guest, share);
+    await juno.delete(paths.share(share.id)).expect(204);
+    await (await joined(test, 'Oda')).post(paths.restoreShare(share.id)).expect(404);
+    await guest.post(paths.restoreShare(share.id)).expect(401);
+    const restored = await juno.post(paths.restoreShare(share.id)).expect(200);
+    expect(restored.body).toMatchObject({ id: share.id, revokedAt: null });
+    await juno.post(paths.restoreShare(share.id)).expect(200);
+    await guest.get(paths.take(take.id)).expect(200);
+    await openedBy(guest, share);
+    expect(await test.em().count(AuditEvent, { kind: 'share-reopened', subjectId: share.id })).toBe(1);
+  });
+
+  it('is listed with all others of its owner’s, and nobody else’s', async () => {
+    const lio = await joined(test, 'Lio');
+    const other = await lio.makeTake();
+    const first = await sharedBy(lio, other, { label: 'Oda' });
+    const second = await sharedBy(lio, await lio.makeTake());
+    const { items } = listSharesResponse.parse((await lio.get(paths.shares).expect(200)).body);
+    expect(items.map(({ id, label }) => [id, label])).toEqual([
+      [second.id, ''],
+      [first.id, 'Oda'],
+    ]);
+    await lio.get(`${paths.shares}?kind=take`).expect(400);
+    await guest.get(paths.shares).expect(401);
+  });
+
+  it('ends at the moment that was chosen', async () => {
+    const expiresAt = new Date(Date.now() + 3_600_000).toISOString();
+    expect(await sharedBy(juno, take, { expiresAt })).toMatchObject({ expiresAt });
+    const subject = { kind: 'take', takeId: take.id };
+    const over = await juno.post(paths.shares, { subject, expiresAt: '2020-01-01T00:00:00Z' }).expect(400);
+    expect(over.body).toMatchObject({ message: 'Choose a day that is still to come.' });
+  });
+
   it('ends by itself when its time is over', async () => {
     const share = await sharedBy(juno, take, { expiresInDays: 1 });
     await openedBy(guest, share);
     await test.em().nativeUpdate(Share, { id: share.id }, { expiresAt: new Date(Date.now() - 1) });
     await guest.get(paths.take(take.id)).expect(404);
+    await guest.post(paths.openShare, { token: tokenOf(share) }).expect(410);
+  });
+
+  it('opens nothing while its owner’s account is locked', async () => {
+    const lio = await joined(test, 'Lio');
+    const locked = await lio.makeTake();
+    const share = await sharedBy(lio, locked);
+    await openedBy(guest, share);
+    await test.em().nativeUpdate(User, { id: lio.me.id }, { lockedAt: new Date() });
+    await guest.get(paths.take(locked.id)).expect(404);
     await guest.post(paths.openShare, { token: tokenOf(share) }).expect(410);
   });
 
@@ -187,7 +237,7 @@ describe('shares', () => {
   describe('the page behind a link', () => {
     it('tells title and verdict in its head, no other site its address, and no search engine anything', async () => {
       const share = await sharedBy(juno, take, { question: 'Secret question?' });
-      const { text, headers } = await request(test.server).get(new URL(share.url).pathname).expect(200);
+      const { text, headers } = await request(test.server).get(pagePath(share)).expect(200);
       expect(text).toContain('<meta property="og:title" content="Loud &amp; &lt;clear&gt;">');
       expect(text).toMatch(/<meta property="og:description" content="[^"]+">/);
       expect(text).not.toContain('Secret question');
@@ -203,7 +253,7 @@ describe('shares', () => {
     it('tells nothing of a link that has ended', async () => {
       const share = await sharedBy(juno, take);
       await juno.delete(paths.share(share.id)).expect(204);
-      const { text, headers } = await request(test.server).get(new URL(share.url).pathname).expect(200);
+      const { text, headers } = await request(test.server).get(pagePath(share)).expect(200);
       expect(text).toContain('<title>Thudline</title>');
       expect(text).not.toContain('og:title');
       expect(headers).toMatchObject({

@@ -24,6 +24,76 @@ test('a sheet is sent with a question, read and heard signed out on a phone, and
   await guest.context().close();
 });
 
+test('a link with a passphrase is told apart, opened on a phone, and found among all links', async ({
+  page,
+  browser,
+}) => {
+  const { id } = await getDemoTake(starTitle);
+  await page.goto(`/takes/${id}`);
+  await page.getByRole('button', { name: 'Send this sheet' }).click();
+  await page.getByLabel(/Who is it for/).fill('Bex, by phone');
+  await page.getByLabel(/A passphrase/).fill('brushes at noon');
+  await page.getByRole('button', { name: 'Make the link' }).click();
+  const url = await page.getByLabel('Address of the link').inputValue();
+  await page.getByRole('button', { name: 'Done' }).click();
+  const guest = await openAsGuest(browser, url);
+  await test.step('nothing is told before the passphrase', async () => {
+    await expect(guest.getByLabel('Passphrase')).toBeVisible();
+    await expect(guest.getByText('Juno')).toHaveCount(0);
+    await expectReadable(guest, 'passphrase');
+    await guest.setViewportSize(phone);
+    await guest.getByLabel('Passphrase').fill('sticks at noon');
+    await guest.getByRole('button', { name: 'Open it' }).click();
+    await expect(guest.getByText('This is not the passphrase')).toBeVisible();
+  });
+  await test.step('the right one opens the sheet, also when it is loaded again', async () => {
+    await guest.getByLabel('Passphrase').fill('brushes at noon');
+    await guest.getByRole('button', { name: 'Open it' }).click();
+    await expect(guest.getByRole('heading', { level: 1 })).toContainText('Flip the overhead');
+    await guest.reload();
+    await expect(guest.getByRole('heading', { level: 1 })).toContainText('Flip the overhead');
+  });
+  await test.step('its sender sees that it was opened, ends it and takes that back', async () => {
+    await page.goto('/links');
+    const row = page.getByRole('listitem').filter({ hasText: 'Bex, by phone' }).first();
+    await expect(row).toContainText('twice so far');
+    await expectReadable(page, 'my links');
+    await row.getByRole('button', { name: 'End the link for Bex, by phone' }).click();
+    await page.getByRole('button', { name: 'Undo' }).click();
+    await expect(row).toContainText('with listening and a passphrase');
+  });
+  await guest.context().close();
+});
+
+test('a comparison and a try-out are sent, read signed out, and open none of their sheets', async ({
+  page,
+  browser,
+}) => {
+  const [before, after] = [await getDemoTake(starTitle), await getDemoTake('Flipped, kick')];
+  await page.goto(`/compare/${before.id}/${after.id}`);
+  const comparison = await openAsGuest(browser, await send(page, 'Send this comparison'));
+  await expect(comparison.getByRole('table', { name: 'What differed' })).toBeVisible();
+  await expect(comparison.getByRole('combobox')).toHaveCount(0);
+  await expectReadable(comparison, 'shared comparison');
+  expect((await comparison.request.get(paths.take(before.id))).status()).toBe(404);
+  await comparison.context().close();
+  await page.goto('/tryouts');
+  await page.getByRole('link', { name: 'How high the overhead hangs' }).click();
+  const tryOut = await openAsGuest(browser, await send(page, 'Send this try-out'));
+  await expect(tryOut.getByRole('table', { name: 'The takes, best first' })).toBeVisible();
+  await expect(tryOut.getByRole('main').getByRole('link')).toHaveCount(0);
+  await expectReadable(tryOut, 'shared try-out');
+  await tryOut.context().close();
+});
+
+async function send(page: Page, name: string): Promise<string> {
+  await page.getByRole('button', { name }).click();
+  await page.getByRole('button', { name: 'Make the link' }).click();
+  const url = await page.getByLabel('Address of the link').inputValue();
+  await page.getByRole('button', { name: 'Done' }).click();
+  return url;
+}
+
 async function sendSheet(page: Page, takeId: string): Promise<string> {
   await page.goto(`/takes/${takeId}`);
   await page.getByRole('button', { name: 'Send this sheet' }).click();
@@ -77,9 +147,8 @@ async function listen(page: Page): Promise<void> {
 
 async function endLink(owner: Page, guest: Page, url: string): Promise<void> {
   await owner.getByRole('button', { name: 'End this link' }).first().click();
-  await owner.getByRole('button', { name: /^End it/ }).click();
-  await expect(owner.getByRole('button', { name: 'End this link' })).toHaveCount(0);
+  await expect(owner.getByText('The link is ended')).toBeVisible();
   await guest.goto(url);
-  await expect(guest.getByText('This link opens no sheet.')).toBeVisible();
+  await expect(guest.getByText('This link opens nothing any more.')).toBeVisible();
   await expectReadable(guest, 'link that has ended');
 }

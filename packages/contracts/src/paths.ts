@@ -45,6 +45,7 @@ export const paths = {
       .join('&')}`,
   openShare: '/api/shares/open',
   share: (shareId: string) => `/api/shares/${shareId}`,
+  restoreShare: (shareId: string) => `/api/shares/${shareId}/restore`,
   photo: (photoId: string) => `/api/photos/${photoId}`,
   setups: '/api/setups',
   setup: (setupId: string) => `/api/setups/${setupId}`,

@@ -38,6 +38,8 @@ export const createShareRequest = z
     expiresInDays: z.int().min(1).max(shareLimits.longestDays).nullable().default(7),
     /** A moment of the player's own in place of a number of days. */
     expiresAt: z.iso.datetime().optional(),
+    /** In place of an address told on the page: the link is mailed, and told to nobody else. */
+    mailTo: z.email('This is no mail address.').max(254).optional(),
     /** Asked of whoever opens it. */
     passphrase: passphrase.optional(),
     canListen: z.boolean().default(true),
@@ -54,12 +56,16 @@ export type CreateShareRequest = z.input<typeof createShareRequest>;
 export const shareResponse = z.object({
   id: z.uuid(),
   subject: shareSubject,
+  /** What it opens, by its own name: "Take 14, loud chorus". */
+  about: z.string(),
   label: z.string(),
   question: z.string(),
   canListen: z.boolean(),
   canDownload: z.boolean(),
   canNote: z.boolean(),
   hasPassphrase: z.boolean(),
+  /** Null where its address was told on the page. */
+  mailedTo: z.string().nullable(),
   createdAt: z.iso.datetime(),
   expiresAt: z.iso.datetime().nullable(),
   revokedAt: z.iso.datetime().nullable(),
@@ -69,8 +75,8 @@ export const shareResponse = z.object({
 });
 export type ShareResponse = z.infer<typeof shareResponse>;
 
-/** The address is told once: the token is stored hashed. */
-export const createdShareResponse = shareResponse.extend({ url: z.url() });
+/** The address is told once: the token is stored hashed. Null where it is mailed. */
+export const createdShareResponse = shareResponse.extend({ url: z.url().nullable() });
 export type CreatedShareResponse = z.infer<typeof createdShareResponse>;
 
 /** One subject's links, named by its kind and ids; without a kind, every link of the player's. */

@@ -12,7 +12,7 @@ import { added, everything, nothing, shared, TakeRights } from './take-rights';
 import { Asker, Viewer } from './viewer';
 
 /** The sheet that shows what this site does. */
-const forEverybody: TakeRights = { ...nothing, read: true, listen: true };
+const forEverybody: TakeRights = { ...nothing, read: true, figures: true, listen: true };
 
 const ownRights = ({ readOnly }: Viewer): TakeRights => ({ ...everything, change: !readOnly });
 

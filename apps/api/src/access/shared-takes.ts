@@ -6,13 +6,18 @@ import { added, nothing, TakeRights } from './take-rights';
 const sheetRights = ({ canListen, canDownload, canNote }: Share): TakeRights => ({
   ...nothing,
   read: true,
+  figures: true,
   listen: canListen,
   download: canDownload,
   note: canNote,
 });
 
-/** What speaks of several takes lets them be heard and opens none of their sheets. */
-const partRights = ({ canListen }: Share): TakeRights => ({ ...nothing, listen: canListen });
+/** What speaks of several takes lets them be heard and opens none of their sheets; a comparison draws from their figures. */
+const partRights = ({ canListen, otherTake }: Share): TakeRights => ({
+  ...nothing,
+  listen: canListen,
+  figures: Boolean(otherTake),
+});
 
 export const isSheet = ({ take, otherTake }: Share): boolean => Boolean(take && !otherTake);
 

@@ -1,9 +1,13 @@
-/** `own`: it is the asker's own take, also on a phone that reads along and may change nothing. */
-export type TakeRight = 'read' | 'listen' | 'download' | 'note' | 'own' | 'change';
+/**
+ * `figures`: all that is measured, without the sheet's words, notes and files. `own`: it is the asker's own take, also on a
+ * phone that reads along and may change nothing.
+ */
+export type TakeRight = 'read' | 'figures' | 'listen' | 'download' | 'note' | 'own' | 'change';
 export type TakeRights = Record<TakeRight, boolean>;
 
 export const everything: TakeRights = {
   read: true,
+  figures: true,
   listen: true,
   download: true,
   note: true,
@@ -12,6 +16,7 @@ export const everything: TakeRights = {
 };
 export const nothing: TakeRights = {
   read: false,
+  figures: false,
   listen: false,
   download: false,
   note: false,
@@ -23,6 +28,7 @@ export const nothing: TakeRights = {
 export function added(one: TakeRights, other: TakeRights): TakeRights {
   return {
     read: one.read || other.read,
+    figures: one.figures || other.figures,
     listen: one.listen || other.listen,
     download: one.download || other.download,
     note: one.note || other.note,
@@ -35,6 +41,7 @@ export function added(one: TakeRights, other: TakeRights): TakeRights {
 export function shared(one: TakeRights, other: TakeRights): TakeRights {
   return {
     read: one.read && other.read,
+    figures: one.figures && other.figures,
     listen: one.listen && other.listen,
     download: one.download && other.download,
     note: one.note && other.note,

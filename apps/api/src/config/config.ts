@@ -49,6 +49,8 @@ const environment = z.object({
   MAIL_LIMIT_PER_ACCOUNT: count.default(5),
   MAIL_LIMIT_PER_ADDRESS: count.default(30),
   PHONE_LINK_LIMIT_PER_ACCOUNT: count.default(30),
+  /** Links mailed in a day for one account; common practice, no source. */
+  SHARE_MAIL_LIMIT_PER_ACCOUNT: count.default(20),
   /** Without one no mail is sent, and the log says so. */
   SMTP_URL: z.url({ protocol: /^smtps?$/ }).optional(),
   MAIL_FROM: z.string().min(3).optional(),
@@ -103,6 +105,7 @@ function grouped(env: z.output<typeof environment>) {
       guestNotesPerLink: env.GUEST_NOTE_LIMIT_PER_LINK,
       guestNotesPerAddress: env.GUEST_NOTE_LIMIT_PER_ADDRESS,
       complaintsPerAddress: env.COMPLAINT_LIMIT_PER_ADDRESS,
+      shareMailsPerAccount: env.SHARE_MAIL_LIMIT_PER_ACCOUNT,
     },
     mail: {
       smtpUrl: env.SMTP_URL,

@@ -19,4 +19,5 @@ export type MailJob =
   | { kind: 'note'; noteId: string; userId: string }
   | { kind: 'answer'; noteId: string; userId: string }
   /** The player ticked what the note asked for, the last at this moment. */
-  | { kind: 'ticked'; noteId: string; doneAt: string };
+  | { kind: 'ticked'; noteId: string; doneAt: string }
+  | { kind: 'share'; shareId: string };

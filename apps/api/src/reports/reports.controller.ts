@@ -13,7 +13,7 @@ export class ReportsController {
   constructor(private readonly reports: ReportsService) {}
 
   @Get('report')
-  @Access.take('read')
+  @Access.take('figures')
   @ZodResponse({ status: 200, type: ReportResponseDto })
   get(
     @Param('id') takeId: string,
@@ -24,7 +24,7 @@ export class ReportsController {
   }
 
   @Get('pair-spectrum')
-  @Access.take('read')
+  @Access.take('figures')
   @ApiProduces('application/octet-stream')
   @ApiOkResponse({
     description: 'Little-endian float32: Skk, Soo, Re Sko, Im Sko; the report names the bins.',

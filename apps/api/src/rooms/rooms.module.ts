@@ -24,5 +24,6 @@ import { SetupTrendsController } from './setup-trends.controller';
     RoomComparisons,
     RoomFiles,
   ],
+  exports: [RoomLogService],
 })
 export class RoomsModule {}

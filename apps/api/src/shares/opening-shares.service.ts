@@ -9,6 +9,13 @@ import { ThrottleService } from '../throttle/throttle.service';
 import { tokenHash } from '../tokens/random-token';
 import { Share } from './entities/share.entity';
 import { isOpen } from './open-shares';
+import { withSubject } from './subject-name';
+
+interface Opener {
+  address: string;
+  /** What is open in this browser already. */
+  shareIds: string[];
+}
 
 /** What a guest does with a link: hands in its token, and its passphrase where it has one. */
 @Injectable()
@@ -21,12 +28,13 @@ export class OpeningSharesService {
   ) {}
 
   /** @returns the share with its owner, counted as opened once more */
-  async open({ token, passphrase }: OpenShareRequest, address: string): Promise<Share> {
+  async open({ token, passphrase }: OpenShareRequest, { address, shareIds }: Opener): Promise<Share> {
     const limit = this.config.limits.openLinkPerAddress;
     await this.throttle.count({ key: 'open-share', address, limit, windowS: 900 });
     const share = await this.findOpen(token);
     if (!share) throw linkEnded();
-    await this.checkPassphrase(share, passphrase, address);
+    // Whoever has it open in this browser gave the passphrase before: loading the page again doesn't ask anew.
+    if (!shareIds.includes(share.id)) await this.checkPassphrase(share, passphrase, address);
     await this.countOpening(share.id);
     return share;
   }
@@ -34,7 +42,7 @@ export class OpeningSharesService {
   /** @returns null for a link that has ended or never was */
   async findOpen(token: string): Promise<Share | null> {
     const where = { $and: [{ tokenHash: tokenHash(token) }, isOpen()] };
-    return this.em.findOne(Share, where, { populate: ['owner', 'take', 'otherTake', 'tryOut', 'room'] });
+    return this.em.findOne(Share, where, { populate: ['owner', ...withSubject] });
   }
 
   async countOpening(shareId: string): Promise<void> {

@@ -25,9 +25,10 @@ import {
   ListSharesResponseDto,
   OpenedShareResponseDto,
   OpenShareDto,
+  ShareResponseDto,
 } from './dto/share.dto';
 import { OpeningSharesService } from './opening-shares.service';
-import { addShareToCookie } from './share-cookie';
+import { addShareToCookie, shareIdsOf } from './share-cookie';
 import { openedShareResponseOf } from './shares.mapper';
 import { SharesService } from './shares.service';
 
@@ -65,10 +66,19 @@ export class SharesController {
     @Req() request: Request,
     @Res({ passthrough: true }) response: Response,
   ) {
-    const share = await this.opening.open(body, request.ip ?? '');
     const { jwtSecret: secret, isHttps } = this.config;
+    const shareIds = shareIdsOf(request, secret);
+    const share = await this.opening.open(body, { address: request.ip ?? '', shareIds });
     addShareToCookie(request, response, share.id, { secret, isHttps });
     return openedShareResponseOf(share);
+  }
+
+  /** Takes its ending back. Safe to call twice. */
+  @Post(':shareId/restore')
+  @Access.signedIn()
+  @ZodResponse({ status: 200, type: ShareResponseDto })
+  restore(@CurrentViewer() viewer: Viewer, @Param('shareId') shareId: string) {
+    return this.shares.restore(viewer, shareId);
   }
 
   @Delete(':shareId')

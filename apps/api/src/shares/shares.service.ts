@@ -6,6 +6,7 @@ import {
   ListSharesRequest,
   ListSharesResponse,
   shareLimits,
+  ShareResponse,
   ShareSubject,
   shareSubject,
 } from '@thudline/contracts';
@@ -17,13 +18,17 @@ import { PasswordsService } from '../auth/passwords.service';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
 import { AppError, notFound } from '../errors/app-error';
+import { MailQueue } from '../mail/mail-queue';
 import { Room } from '../rooms/entities/room.entity';
 import { Take } from '../takes/entities/take.entity';
+import { ThrottleService } from '../throttle/throttle.service';
 import { randomToken, tokenHash } from '../tokens/random-token';
 import { TryOut } from '../tryouts/entities/try-out.entity';
+import { User } from '../users/entities/user.entity';
 import { Share } from './entities/share.entity';
 import { expiryOf } from './share-expiry';
 import { isAbout, subjectColumns } from './share-subject';
+import { withSubject } from './subject-name';
 import { shareResponseOf } from './shares.mapper';
 
 /** A player's own links. */
@@ -33,31 +38,38 @@ export class SharesService {
     private readonly em: EntityManager,
     private readonly audit: AuditService,
     private readonly passwords: PasswordsService,
+    private readonly throttle: ThrottleService,
+    private readonly mails: MailQueue,
     @Inject(CONFIG) private readonly config: Config,
   ) {}
 
   async create(
     viewer: Viewer,
-    { subject, passphrase, expiresInDays, expiresAt, ...rest }: z.output<typeof createShareRequest>,
+    { subject, passphrase, expiresInDays, expiresAt, mailTo, ...rest }: z.output<typeof createShareRequest>,
   ): Promise<CreatedShareResponse> {
     const owner = viewer.user;
     await this.checkOwn(viewer, subject);
     if ((await this.em.count(Share, { owner: owner.id })) >= shareLimits.most)
       throw new AppError('conflict', `You have made ${shareLimits.most} links, and no more can be kept.`);
-    const token = randomToken();
-    const share = this.em.create(Share, {
-      owner,
+    if (mailTo) await this.checkMayMail(viewer);
+    const token = mailTo ? null : randomToken();
+    const row = {
       ...subjectColumns(subject),
-      tokenHash: tokenHash(token),
+      tokenHash: token && tokenHash(token),
+      mailedTo: mailTo ?? null,
       passphraseHash: passphrase === undefined ? null : await this.passwords.hash(passphrase),
       openCount: 0,
       expiresAt: expiryOf({ expiresInDays, expiresAt }),
       ...rest,
+    };
+    const share = await this.em.transactional(async (em) => {
+      const made = em.create(Share, { owner: em.getReference(User, owner.id), ...row });
+      await em.flush();
+      this.audit.record({ kind: 'share-made', userId: owner.id, subjectId: made.id });
+      if (mailTo) await this.mails.sendWith(em, { kind: 'share', shareId: made.id });
+      return em.populate(made, withSubject);
     });
-    await this.em.flush();
-    this.audit.record({ kind: 'share-made', userId: owner.id, subjectId: share.id });
-    await this.em.flush();
-    return { ...shareResponseOf(share), url: new URL(`/s/${token}`, this.config.publicUrl).href };
+    return { ...shareResponseOf(share), url: token && new URL(`/s/${token}`, this.config.publicUrl).href };
   }
 
   async list(viewer: Viewer, { kind, ...ids }: ListSharesRequest): Promise<ListSharesResponse> {
@@ -67,7 +79,7 @@ export class SharesService {
     if (parsed) await this.checkOwn(viewer, parsed.data);
     const about = parsed ? isAbout(parsed.data) : {};
     const where = { $and: [{ owner: viewer.user.id }, about] };
-    const shares = await this.em.find(Share, where, { orderBy: { id: 'desc' } });
+    const shares = await this.em.find(Share, where, { orderBy: { id: 'desc' }, populate: withSubject });
     return { items: shares.map(shareResponseOf) };
   }
 
@@ -80,8 +92,32 @@ export class SharesService {
     await this.em.flush();
   }
 
+  /** Takes its ending back: the address that was told opens it again, if its time isn't over. */
+  async restore(viewer: Viewer, shareId: string): Promise<ShareResponse> {
+    const share = await this.getOwn(viewer, shareId);
+    if (share.revokedAt) {
+      share.revokedAt = null;
+      this.audit.record({ kind: 'share-reopened', userId: viewer.user.id, subjectId: share.id });
+      await this.em.flush();
+    }
+    return shareResponseOf(share);
+  }
+
+  /** Mails go to people who never asked for them: only from an address that is known to be somebody's, and not without end. */
+  private async checkMayMail({ user }: Viewer): Promise<void> {
+    if (!user.emailVerifiedAt)
+      throw new AppError(
+        'forbidden',
+        'First open the link in the mail we sent you, so that we know your address is yours. Or make a link and send it yourself.',
+      );
+    const limit = this.config.limits.shareMailsPerAccount;
+    await this.throttle.count({ key: `share-mail:${user.id}`, limit, windowS: 86_400 });
+  }
+
   private async getOwn({ user }: Viewer, shareId: string): Promise<Share> {
-    const share = validate(shareId) ? await this.em.findOne(Share, { id: shareId, owner: user.id }) : null;
+    const share = validate(shareId)
+      ? await this.em.findOne(Share, { id: shareId, owner: user.id }, { populate: withSubject })
+      : null;
     if (!share) throw notFound();
     return share;
   }

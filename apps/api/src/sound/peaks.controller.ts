@@ -11,7 +11,7 @@ export class PeaksController {
   constructor(private readonly peaks: TakePeaksService) {}
 
   @Get()
-  @Access.take('read')
+  @Access.take('figures')
   @ApiProduces('application/octet-stream')
   @ApiOkResponse({ description: 'Int8, lowest and highest of each step, one track after the other.' })
   @ApiResponse({ status: 304, description: 'The caller has it already.' })

@@ -10,5 +10,6 @@ import { TryOutsService } from './try-outs.service';
   imports: [MeasurementsModule],
   controllers: [TryOutsController],
   providers: [TryOutsService, TryOutPlacesService, TryOutRankingService, TryOutSetupService],
+  exports: [TryOutsService, TryOutRankingService],
 })
 export class TryOutsModule {}

@@ -57,7 +57,7 @@ export async function startMailSink(): Promise<MailSink> {
 }
 
 /** The token of the one link in a mail, which leads to this page. */
-export function tokenIn(mail: ParsedMail, page: 'verify' | 'reset' | 'new-address'): string {
+export function tokenIn(mail: ParsedMail, page: 'verify' | 'reset' | 'new-address' | 's'): string {
   const [, token] =
     new RegExp(`^http://thudline\\.test/${page}/([\\w-]{43})$`, 'm').exec(mail.text ?? '') ?? [];
   if (!token) throw new Error(`There is no link to /${page} in this mail: ${mail.text}`);

@@ -25,9 +25,12 @@ export const sharedBy = (
   request: Partial<CreateShareRequest> = {},
 ): Promise<CreatedShareResponse> => linkTo(person, { kind: 'take', takeId: take.id }, request);
 
-export const tokenOf = ({ url }: { url: string }) => url.split('/').at(-1) ?? '';
+export const tokenOf = ({ url }: { url: string | null }) => (url ?? '').split('/').at(-1) ?? '';
 
-export async function openedBy(browser: Browser, share: { url: string }): Promise<OpenedShareResponse> {
+export async function openedBy(
+  browser: Browser,
+  share: { url: string | null },
+): Promise<OpenedShareResponse> {
   const response = await browser.post(paths.openShare, { token: tokenOf(share) }).expect(200);
   return openedShareResponse.parse(response.body);
 }

@@ -119,6 +119,12 @@ test('send-sheet', async ({ page }) => {
   await takeShots(page, 'shared-sheet');
 });
 
+test('my-links', async ({ page }) => {
+  await page.goto('/links');
+  await expect(line(page)).toBeVisible();
+  await takeShots(page, 'my-links');
+});
+
 test('show-on-phone', async ({ page }) => {
   const { id } = await getDemoTake(starTitle);
   await page.goto(`/takes/${id}`);

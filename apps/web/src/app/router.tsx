@@ -105,6 +105,10 @@ export const router = createBrowserRouter([
             lazy: async () => ({ Component: (await import('../pages/AdminPage')).AdminPage }),
           },
           {
+            path: '/links',
+            lazy: async () => ({ Component: (await import('../pages/LinksPage')).LinksPage }),
+          },
+          {
             path: '/settings',
             lazy: async () => ({ Component: (await import('../pages/SettingsPage')).SettingsPage }),
           },
@@ -131,7 +135,7 @@ export const router = createBrowserRouter([
     children: [
       {
         path: '/s/:token',
-        lazy: async () => ({ Component: (await import('../pages/SharedSheetPage')).SharedSheetPage }),
+        lazy: async () => ({ Component: (await import('../pages/SharedPage')).SharedPage }),
       },
       {
         path: '/phone/:token',

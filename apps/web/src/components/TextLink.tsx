@@ -1,8 +1,9 @@
 import { chakra } from '@chakra-ui/react';
+import type { ComponentProps } from 'react';
 import { Link } from 'react-router-dom';
+import { useLinksAsText } from './LinksAsText';
 
-/** A link in running text: a hairline under it. */
-export const TextLink = chakra(Link, {
+const Underlined = chakra(Link, {
   base: {
     color: 'inherit',
     textDecoration: 'underline',
@@ -10,3 +11,8 @@ export const TextLink = chakra(Link, {
     textUnderlineOffset: '3px',
   },
 });
+
+/** A link in running text: a hairline under it. */
+export function TextLink(props: ComponentProps<typeof Underlined>) {
+  return useLinksAsText() ? <span>{props.children}</span> : <Underlined {...props} />;
+}

@@ -25,7 +25,11 @@ jest.mock('../lib/audio/takesPlayer', () => ({
 beforeEach(() => played.splice(0));
 
 function open(routes: FakeRoutes = {}, comparison: Parameters<typeof servedComparison>[0] = {}) {
-  const server = fakeServer({ ...servedComparison(comparison), ...routes });
+  const server = fakeServer({
+    [`GET ${paths.shares}`]: json({ items: [] }),
+    ...servedComparison(comparison),
+    ...routes,
+  });
   const page = renderPage(
     [{ path: '/compare/:beforeId/:afterId', element: <ComparePage /> }],
     `/compare/${beforeId}/${afterId}`,

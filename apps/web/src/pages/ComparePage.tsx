@@ -6,6 +6,7 @@ import { PageMessage } from '../components/PageMessage';
 import { useMe } from '../features/auth/hooks/useMe';
 import { ComparedTakes } from '../features/compare/components/ComparedTakes';
 import { useComparison } from '../features/compare/hooks/useComparison';
+import { SendThis } from '../features/shares/components/SendThis';
 import { useReport } from '../features/sheet/hooks/useReport';
 import { ApiError } from '../lib/apiClient';
 import { usePageTitle } from '../lib/usePageTitle';
@@ -32,6 +33,9 @@ export function ComparePage() {
       key={`${beforeId} ${afterId}`}
       {...{ comparison, before: before.report, after: after.report }}
       settings={me.settings}
+      marginHead={
+        !me.readOnly && <SendThis subject={{ kind: 'comparison', takeId: beforeId, otherTakeId: afterId }} />
+      }
     />
   );
 }

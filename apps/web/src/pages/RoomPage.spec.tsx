@@ -30,6 +30,7 @@ const trend: RoomTrendResponse = {
 };
 const served: FakeRoutes = {
   [`GET ${paths.me}`]: json(sampleMe),
+  [`GET ${paths.shares}`]: json({ items: [] }),
   [`GET ${paths.room(roomId)}`]: json(sampleRoom()),
   [`GET ${paths.roomChanges(roomId)}?told=8`]: json(sampleLog()),
   [`GET ${paths.roomTrend(roomId)}`]: json(trend),

@@ -1,3 +1,4 @@
+import { Box } from '@chakra-ui/react';
 import { useParams } from 'react-router-dom';
 import { Button } from '../components/Button';
 import { ButtonLink } from '../components/ButtonLink';
@@ -6,6 +7,7 @@ import { PageMessage } from '../components/PageMessage';
 import { useMe } from '../features/auth/hooks/useMe';
 import { RoomLog } from '../features/rooms/components/RoomLog';
 import { useRoom } from '../features/rooms/hooks/useRoom';
+import { SendThis } from '../features/shares/components/SendThis';
 import { ApiError } from '../lib/apiClient';
 import { usePageTitle } from '../lib/usePageTitle';
 
@@ -32,6 +34,18 @@ export function RoomPage() {
     );
   if (!room || !changes || !me) return <PageLoading />;
   return (
-    <RoomLog key={room.id} {...{ room, changes, takes }} settings={me.settings} readOnly={me.readOnly} />
+    <RoomLog
+      key={room.id}
+      {...{ room, changes, takes }}
+      settings={me.settings}
+      readOnly={me.readOnly}
+      marginHead={
+        !me.readOnly && (
+          <Box marginBottom="22px">
+            <SendThis subject={{ kind: 'room', roomId }} inset={false} />
+          </Box>
+        )
+      }
+    />
   );
 }

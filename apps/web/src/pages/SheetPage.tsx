@@ -10,7 +10,7 @@ import { comparePath } from '../features/compare/takeWords';
 import { LazySheetNotes } from '../features/notes/lazySheetNotes';
 import { RoomOfTake } from '../features/rooms/components/RoomOfTake';
 import { SetupOfTake } from '../features/setups/components/SetupOfTake';
-import { SendSheet } from '../features/shares/components/SendSheet';
+import { SendThis } from '../features/shares/components/SendThis';
 import { MeasuredSheet } from '../features/sheet/components/MeasuredSheet';
 import { MeasuringSheet } from '../features/sheet/components/MeasuringSheet';
 import { OlderVersion } from '../features/sheet/components/OlderVersion';
@@ -41,7 +41,7 @@ export function SheetPage() {
       above={<OlderVersion {...{ take, report }} />}
       marginHead={
         <>
-          {take.rights.change && <SendSheet takeId={take.id} />}
+          {take.rights.change && <SendThis subject={{ kind: 'take', takeId: take.id }} />}
           <SetupOfTake take={take} />
           <RoomOfTake take={take} />
           <BigPrintLinks takeId={take.id} mayAddPhone={take.rights.change} />

@@ -21,7 +21,11 @@ const answers = (tryOut: TryOutResponse, ranking: TryOutRankingResponse): FakeRo
 });
 
 function open(routes: FakeRoutes = answers(sampleTryOut(), sampleRanking())) {
-  const server = fakeServer({ [`GET ${paths.me}`]: json(sampleMe), ...routes });
+  const server = fakeServer({
+    [`GET ${paths.me}`]: json(sampleMe),
+    [`GET ${paths.shares}`]: json({ items: [] }),
+    ...routes,
+  });
   const page = renderPage(
     [
       { path: '/tryouts/:tryOutId', element: <TryOutPage /> },

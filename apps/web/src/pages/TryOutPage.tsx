@@ -5,6 +5,7 @@ import { ButtonLink } from '../components/ButtonLink';
 import { PageLoading } from '../components/PageLoading';
 import { PageMessage } from '../components/PageMessage';
 import { useMe } from '../features/auth/hooks/useMe';
+import { SendThis } from '../features/shares/components/SendThis';
 import { TryOutSheet } from '../features/tryouts/components/TryOutSheet';
 import { useTryOut } from '../features/tryouts/hooks/useTryOut';
 import { defaultRank, useTryOutRanking } from '../features/tryouts/hooks/useTryOutRanking';
@@ -22,7 +23,14 @@ export function TryOutPage() {
   const error = tryOutError ?? rankingError;
   if (error) return <TryOutError error={error} retry={tryOutError ? retryTryOut : retryRanking} />;
   if (!tryOut || !ranking || !me) return <PageLoading />;
-  return <TryOutSheet key={tryOut.id} {...{ tryOut, ranking, by, me }} onRankBy={setBy} />;
+  return (
+    <TryOutSheet
+      key={tryOut.id}
+      {...{ tryOut, ranking, by, me }}
+      marginHead={!me.readOnly && <SendThis subject={{ kind: 'try-out', tryOutId }} />}
+      onRankBy={setBy}
+    />
+  );
 }
 
 function TryOutError({ error, retry }: { error: Error; retry: () => void }) {

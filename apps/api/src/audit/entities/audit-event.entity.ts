@@ -29,6 +29,7 @@ export const auditKinds = [
   'share-ended',
   'complaint-made',
   'complaint-settled',
+  'share-reopened',
 ] as const;
 export type AuditKind = (typeof auditKinds)[number];
 

@@ -1,16 +1,18 @@
 import type { ShareResponse } from '@thudline/contracts';
-import { isOpen, openedWords, openUntilWords, rightsWords } from './shareWords';
+import { isOpen, mayDoWords, openedWords, openUntilWords, rightsWords, whoHasItWords } from './shareWords';
 
 const now = new Date('2026-12-04T20:00:00');
 const share = (overrides: Partial<ShareResponse> = {}): ShareResponse => ({
   id: '01890000-0000-7000-8000-000000000101',
   subject: { kind: 'take', takeId: '01890000-0000-7000-8000-000000000001' },
+  about: 'Loud chorus',
   label: '',
   question: '',
   canListen: true,
   canDownload: false,
   canNote: false,
   hasPassphrase: false,
+  mailedTo: null,
   createdAt: '2026-12-02T19:00:00.000Z',
   expiresAt: '2026-12-11T12:00:00.000Z',
   revokedAt: null,
@@ -39,6 +41,20 @@ describe('words about a link', () => {
       'Open until 11 Dec, with listening and the files.',
     );
     expect(rightsWords(share({ canListen: false }))).toBe('Open until 11 Dec, to read only.');
+  });
+
+  it('says that notes may be left and that a passphrase is asked for', () => {
+    expect(rightsWords(share({ canNote: true, hasPassphrase: true }))).toBe(
+      'Open until 11 Dec, with listening, notes and a passphrase.',
+    );
+    expect(mayDoWords(share({ canNote: true }))).toBe('read, hear and leave notes on it');
+    expect(mayDoWords(share({ canListen: false }))).toBe('read it');
+  });
+
+  it('says who has it', () => {
+    expect(whoHasItWords(share())).toBe('');
+    expect(whoHasItWords(share({ label: 'Oda' }))).toBe('Oda has it.');
+    expect(whoHasItWords(share({ mailedTo: 'bex@example.org' }))).toBe('Mailed to bex@example.org.');
   });
 
   it('knows an ended and a timed-out link from an open one', () => {

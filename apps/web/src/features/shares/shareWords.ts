@@ -26,8 +26,34 @@ export function openedWords({ openedAt, openCount }: ShareResponse, now: Date): 
 
 /** "Open until 11 Dec, with listening." */
 export function rightsWords(share: ShareResponse): string {
-  const rights = [share.canListen && 'listening', share.canDownload && 'the files'].filter(Boolean);
+  const rights = [
+    share.canListen && 'listening',
+    share.canNote && 'notes',
+    share.canDownload && 'the files',
+    share.hasPassphrase && 'a passphrase',
+  ].filter((right) => right !== false);
   const until = openUntilWords(share);
   const capital = until.charAt(0).toUpperCase() + until.slice(1);
-  return `${capital}, ${rights.length > 0 ? `with ${rights.join(' and ')}` : 'to read only'}.`;
+  return `${capital}, ${rights.length > 0 ? `with ${listed(rights)}` : 'to read only'}.`;
+}
+
+/** "Oda has it.", "Mailed to bex@example.org."; empty for a link that was only copied. */
+export function whoHasItWords({ label, mailedTo }: Pick<ShareResponse, 'label' | 'mailedTo'>): string {
+  return [label && `${label} has it.`, mailedTo && `Mailed to ${mailedTo}.`].filter(Boolean).join(' ');
+}
+
+/** "read, hear and download it" */
+export function mayDoWords({ canListen, canNote, canDownload }: ShareResponse): string {
+  const may = [
+    'read',
+    canListen && 'hear',
+    canNote && 'leave notes on',
+    canDownload && 'download the files of',
+  ].filter((right) => right !== false);
+  return `${listed(may)} it`;
+}
+
+function listed(words: readonly string[]): string {
+  const last = words[words.length - 1] ?? '';
+  return words.length > 1 ? `${words.slice(0, -1).join(', ')} and ${last}` : last;
 }

@@ -124,6 +124,13 @@ function OpenList({ canSet, isAdmin, onDone }: { canSet: boolean; isAdmin: boole
       </chakra.fieldset>
       {canSet && (
         <Box marginBottom="8px">
+          <TextLink to="/links" fontWeight={600} onClick={onDone}>
+            My links
+          </TextLink>
+        </Box>
+      )}
+      {canSet && (
+        <Box marginBottom="8px">
           <TextLink to="/settings" fontWeight={600} onClick={onDone}>
             Settings
           </TextLink>

@@ -1,5 +1,5 @@
 import { Box, Flex } from '@chakra-ui/react';
-import type { ComparedTake } from '@thudline/contracts';
+import type { ComparedTake, ComparisonResponse } from '@thudline/contracts';
 import { useNavigate } from 'react-router-dom';
 import { InlineSelect } from '../../../components/InlineSelect';
 import { TextLink } from '../../../components/TextLink';
@@ -7,7 +7,7 @@ import { useTakeNames } from '../hooks/useTakeNames';
 import { comparePath, takeWords } from '../takeWords';
 
 /** "Compare **take 14** with **take 15**": either can be exchanged for another, or the two swapped. */
-export function CompareHead({ before, after }: { before: ComparedTake; after: ComparedTake }) {
+export function CompareHead({ before, after }: Pick<ComparisonResponse, 'before' | 'after'>) {
   const navigate = useNavigate();
   const listed = useTakeNames();
   const select = (label: string, value: ComparedTake, path: (id: string) => string) => {

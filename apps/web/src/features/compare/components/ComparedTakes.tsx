@@ -14,6 +14,7 @@ import { CompareHead } from './CompareHead';
 import { HearBoth } from './HearBoth';
 import { Letters } from './Letters';
 import { SameHit } from './SameHit';
+import { SentHead } from './SentHead';
 import { WhatChanged } from './WhatChanged';
 import { WhatDiffered } from './WhatDiffered';
 import { WhatEachSays } from './WhatEachSays';
@@ -24,10 +25,16 @@ export interface ComparedTakesProps {
   after: ReportResponse;
   /** Of the reader: keys. */
   settings: UserSettings;
+  /** Stands above the line: what a guest is asked. */
+  above?: ReactNode;
+  /** At the head of the margin: sending the comparison. */
+  marginHead?: ReactNode;
+  /** Whether it was sent to the reader: these two takes and no others. */
+  sent?: boolean;
 }
 
 /** Two takes compared, top to bottom. */
-export function ComparedTakes({ comparison, before, after, settings }: ComparedTakesProps) {
+export function ComparedTakes({ comparison, before, after, settings, ...slots }: ComparedTakesProps) {
   const reports = useMemo(() => [before, after] as const, [before, after]);
   const listening = useTwoTakes(reports);
   const sameHit = useSameHit(reports, listening.time);
@@ -44,8 +51,16 @@ export function ComparedTakes({ comparison, before, after, settings }: ComparedT
   const names = [`take ${comparison.before.number}`, `take ${comparison.after.number}`] as const;
   return (
     <RuledSheet>
-      <SheetRow note={<Caveats caveats={ofFlip} />}>
-        <CompareHead before={comparison.before} after={comparison.after} />
+      <SheetRow
+        note={
+          <>
+            {slots.marginHead}
+            <Caveats caveats={ofFlip} />
+          </>
+        }
+      >
+        {slots.above}
+        {slots.sent ? <SentHead {...comparison} /> : <CompareHead {...comparison} />}
         <Headline marginTop="8px">
           <LineWords line={comparison.line} />
         </Headline>

@@ -15,10 +15,12 @@ const statusWords = { good: 'Good', watch: 'Watch', fix: 'Fix', 'cannot-tell': '
 export function ChangeEntry({
   roomId,
   change,
+  canHear,
   actions,
 }: {
   roomId: string;
   change: RoomChangeResponse;
+  canHear: boolean;
   actions?: EntryActions;
 }) {
   const { status, strong, rest } = change.did;
@@ -81,14 +83,14 @@ export function ChangeEntry({
             {caveat}
           </Box>
         ))}
-        {change.figures.length > 0 && <Figures change={change} />}
+        {change.figures.length > 0 && <Figures change={change} canHear={canHear} />}
         <ChangePhoto {...{ roomId, change }} canChange={actions !== undefined} />
       </Box>
     </Box>
   );
 }
 
-function Figures({ change }: { change: RoomChangeResponse }) {
+function Figures({ change, canHear }: { change: RoomChangeResponse; canHear: boolean }) {
   const [before, after] = [change.before.at(-1), change.after[0]];
   return (
     <>
@@ -98,7 +100,7 @@ function Figures({ change }: { change: RoomChangeResponse }) {
         ))}
       </Box>
       <Flex wrap="wrap" columnGap="20px" alignItems="flex-start" marginTop="8px">
-        {before && after && <HearChange {...{ before, after }} />}
+        {canHear && before && after && <HearChange {...{ before, after }} />}
         <FigureTable figures={change.figures} />
       </Flex>
     </>

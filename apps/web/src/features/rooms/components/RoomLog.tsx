@@ -6,7 +6,7 @@ import {
   type RoomResponse,
   type UserSettings,
 } from '@thudline/contracts';
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { Button } from '../../../components/Button';
 import { Headline } from '../../../components/Headline';
 import { SheetPaper } from '../../../components/SheetPaper';
@@ -29,12 +29,21 @@ export function RoomLog({
   takes,
   settings,
   readOnly,
+  above,
+  marginHead,
+  canHear = true,
 }: {
   room: RoomResponse;
   changes: RoomChangeResponse[];
   takes: ListRoomChangesResponse['takes'];
   settings: UserSettings;
   readOnly: boolean;
+  /** Stands above the line: what a guest is asked. */
+  above?: ReactNode;
+  /** At the head of the margin: sending the log. */
+  marginHead?: ReactNode;
+  /** Hearing a change reads the sheets of both takes. */
+  canHear?: boolean;
 }) {
   const [open, setOpen] = useState<Open>(null);
   const edit = readOnly ? undefined : () => setOpen({ form: 'room' });
@@ -47,7 +56,15 @@ export function RoomLog({
     };
   };
   return (
-    <SheetPaper margin={<RoomMargin {...{ room, changes }} lengthUnit={settings.lengthUnit} onEdit={edit} />}>
+    <SheetPaper
+      margin={
+        <>
+          {marginHead}
+          <RoomMargin room={room} changes={changes} lengthUnit={settings.lengthUnit} onEdit={edit} />
+        </>
+      }
+    >
+      {above}
       <Box color="ink.muted" fontSize="small" lineHeight="22px">
         {logWords(room)}
       </Box>
@@ -84,6 +101,7 @@ export function RoomLog({
                 key={change.id}
                 roomId={room.id}
                 change={change}
+                canHear={canHear}
                 actions={
                   readOnly
                     ? undefined

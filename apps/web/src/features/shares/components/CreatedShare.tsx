@@ -2,24 +2,30 @@ import { Box, Flex } from '@chakra-ui/react';
 import type { CreatedShareResponse } from '@thudline/contracts';
 import { Button } from '../../../components/Button';
 import { CopyField } from '../../../components/CopyField';
-import { openUntilWords } from '../shareWords';
+import { mayDoWords, openUntilWords } from '../shareWords';
 
 /** The link, told this once. */
-export function CreatedShare({ share, onDone }: { share: CreatedShareResponse; onDone: () => void }) {
-  const may = ['read', share.canListen && 'hear', share.canDownload && 'download'].filter(Boolean);
-  const last = may.pop();
-  const mayDo = may.length > 0 ? `${may.join(', ')} and ${last}` : last;
+export function CreatedShare({
+  share,
+  url,
+  onDone,
+}: {
+  share: CreatedShareResponse;
+  url: string;
+  onDone: () => void;
+}) {
   return (
     <Box marginTop="12px">
       <Box>
-        <b>Copy it now: it is told only this once.</b> Whoever has it can {mayDo} this take; it stays{' '}
-        {openUntilWords(share)}. You can end it at any time in the margin of the sheet.
+        <b>Copy it now: it is told only this once.</b> Whoever has it can {mayDoWords(share)}
+        {share.hasPassphrase && ' once they give the passphrase'}; it stays {openUntilWords(share)}. You can
+        end it at any time.
       </Box>
       <Box marginTop="16px">
-        <CopyField label="Address of the link" value={share.url} />
+        <CopyField label="Address of the link" value={url} />
       </Box>
       <Flex marginTop="12px" gap="14px" wrap="wrap">
-        <SendOn url={share.url} />
+        <SendOn url={url} />
         <Button type="button" look="outline" onClick={onDone}>
           Done
         </Button>

@@ -11,7 +11,7 @@ export const isEnded = (error: Error) => error instanceof ApiError && endedCodes
 export function LinkEnded() {
   return (
     <PageMessage
-      strong="This link opens no sheet."
+      strong="This link opens nothing any more."
       rest="It has ended, or a part of it was lost on the way. Ask whoever sent it for a new one."
     >
       <ButtonLink to="/">See what Thudline does</ButtonLink>

@@ -1,29 +1,32 @@
-import { Flex, chakra } from '@chakra-ui/react';
+import { Box, Flex, chakra } from '@chakra-ui/react';
+import { FieldLabel } from '../../../components/TextField';
+import { openForChoices, type OpenForChoice } from '../shareDraft';
 
-const spans: { days: number | null; words: string }[] = [
-  { days: 1, words: '1 day' },
-  { days: 7, words: '7 days' },
-  { days: 30, words: '30 days' },
-  { days: null, words: 'until I end it' },
-];
+const words: Record<OpenForChoice, string> = {
+  '1': '1 day',
+  '7': '7 days',
+  '30': '30 days',
+  day: 'until a day',
+  never: 'until I end it',
+};
 
-/** How long a link opens the sheet. */
-export function OpenFor({
-  days,
-  onChange,
-}: {
-  days: number | null;
-  onChange: (days: number | null) => void;
-}) {
+interface OpenForProps {
+  choice: OpenForChoice;
+  day: string;
+  onChange: (changed: { openFor: OpenForChoice } | { day: string }) => void;
+}
+
+/** How long a link opens what it names. */
+export function OpenFor({ choice, day, onChange }: OpenForProps) {
   return (
     <chakra.fieldset marginTop="16px">
       <chakra.legend fontSize="caption" fontWeight={600} color="ink.muted" lineHeight="18px">
         Open for
       </chakra.legend>
       <Flex columnGap="20px" rowGap="2px" wrap="wrap" marginTop="2px">
-        {spans.map((span) => (
+        {openForChoices.map((each) => (
           <chakra.label
-            key={span.words}
+            key={each}
             display="inline-flex"
             gap="8px"
             minHeight="36px"
@@ -36,13 +39,29 @@ export function OpenFor({
               width="18px"
               height="18px"
               accentColor="ink"
-              checked={days === span.days}
-              onChange={() => onChange(span.days)}
+              checked={choice === each}
+              onChange={() => onChange({ openFor: each })}
             />
-            {span.words}
+            {words[each]}
           </chakra.label>
         ))}
       </Flex>
+      {choice === 'day' && (
+        <Box marginTop="6px">
+          <FieldLabel htmlFor="open-until">Until the end of</FieldLabel>
+          <chakra.input
+            id="open-until"
+            type="date"
+            value={day}
+            minHeight="44px"
+            bg="transparent"
+            color="ink"
+            borderBottom="2px solid"
+            borderColor="edge"
+            onChange={(event) => onChange({ day: event.target.value })}
+          />
+        </Box>
+      )}
     </chakra.fieldset>
   );
 }

@@ -1,5 +1,5 @@
 import type { MeResponse, TryOutRankingResponse, TryOutResponse } from '@thudline/contracts';
-import { useMemo, useState } from 'react';
+import { useMemo, useState, type ReactNode } from 'react';
 import { KeysDialog } from '../../sheet/components/KeysDialog';
 import { RuledSheet, SheetRow } from '../../sheet/components/RuledSheet';
 import { headline } from '../headline';
@@ -26,13 +26,26 @@ interface TryOutSheetProps {
   ranking: TryOutRankingResponse;
   by: RankBy;
   onRankBy: (by: RankBy) => void;
-  me: MeResponse;
+  me: Pick<MeResponse, 'settings' | 'readOnly'>;
+  /** Stands above the line: what a guest is asked. */
+  above?: ReactNode;
+  /** At the head of the margin: sending the try-out. */
+  marginHead?: ReactNode;
+  canListen?: boolean;
 }
 
 const hiddenLine = { strong: 'Which one is it?', rest: 'Listen, then choose.' };
 
 /** A try-out as a sheet: the line, the plot, all takes to hear in step, the ranking, the winner. */
-export function TryOutSheet({ tryOut, ranking, by, onRankBy, me }: TryOutSheetProps) {
+export function TryOutSheet({
+  tryOut,
+  ranking,
+  by,
+  onRankBy,
+  me,
+  canListen = true,
+  ...slots
+}: TryOutSheetProps) {
   const { lengthUnit, singleKeys } = me.settings;
   const [chosenId, setChosenId] = useState<string | null>(null);
   const [help, setHelp] = useState(false);
@@ -49,14 +62,15 @@ export function TryOutSheet({ tryOut, ranking, by, onRankBy, me }: TryOutSheetPr
   };
   return (
     <RuledSheet>
-      <SheetRow>
+      <SheetRow note={slots.marginHead}>
+        {slots.above}
         <TryOutHead tryOut={tryOut} words={hidden ? hiddenLine : headline(shown)} />
         <MeasuringPlaces tryOut={tryOut} />
         <UnsentPlaces tryOut={tryOut} mayChange={!me.readOnly} />
         {!hidden && ranked.length > 0 && <RankSentence by={by} onChange={onRankBy} />}
         {!hidden && <PlotSection {...shown} />}
       </SheetRow>
-      {choices.length > 0 && (
+      {canListen && choices.length > 0 && (
         <SheetRow note={<ListeningNote turnedDownDb={hearing.turnedDownDb} hideWords={hideWords} />}>
           <HearRow
             {...{ hearing, choices, hidden, hideWords }}

@@ -5,8 +5,9 @@ import { fakeServer, json, refusal, type FakeRoutes } from '../../../testing/fak
 import { renderPage } from '../../../testing/renderPage';
 import { takeId } from '../../../testing/sampleData';
 import { sampleCreatedShare, sampleShare } from '../../../testing/sampleShares';
-import { SendSheet } from './SendSheet';
+import { SendThis } from './SendThis';
 
+const createdUrl = sampleCreatedShare().url ?? '';
 const subject = { kind: 'take', takeId } as const;
 
 function open(routes: FakeRoutes = {}, shares: ShareResponse[] = []) {
@@ -15,7 +16,7 @@ function open(routes: FakeRoutes = {}, shares: ShareResponse[] = []) {
     [`POST ${paths.shares}`]: json(sampleCreatedShare(), 201),
     ...routes,
   });
-  renderPage([{ path: '/', element: <SendSheet takeId={takeId} /> }], '/');
+  renderPage([{ path: '/', element: <SendThis subject={subject} /> }], '/');
   return server;
 }
 
@@ -38,13 +39,24 @@ describe('sending a sheet', () => {
     expect(server.requests).toContainEqual({
       method: 'POST',
       path: paths.shares,
-      body: { subject, question: '', expiresInDays: 7, canListen: true, canDownload: false },
+      body: {
+        subject,
+        label: '',
+        question: '',
+        expiresInDays: 7,
+        canListen: true,
+        canDownload: false,
+        canNote: false,
+      },
     });
   });
 
   it('sends what was asked and chosen', async () => {
     const server = open();
     const dialog = await openDialog();
+    await userEvent.type(within(dialog).getByLabelText(/Who is it for/), 'Oda');
+    await userEvent.type(within(dialog).getByLabelText(/A passphrase/), 'brushes');
+    await userEvent.click(within(dialog).getByRole('checkbox', { name: 'They may leave notes' }));
     await userEvent.click(within(dialog).getByRole('button', { name: 'What would you change first?' }));
     await userEvent.click(within(dialog).getByRole('radio', { name: 'until I end it' }));
     await userEvent.click(within(dialog).getByRole('checkbox', { name: 'They may listen' }));
@@ -56,10 +68,13 @@ describe('sending a sheet', () => {
         path: paths.shares,
         body: {
           subject,
+          label: 'Oda',
+          passphrase: 'brushes',
           question: 'What would you change first?',
           expiresInDays: null,
           canListen: false,
           canDownload: true,
+          canNote: true,
         },
       }),
     );
@@ -71,10 +86,10 @@ describe('sending a sheet', () => {
     await user.click(within(await openDialog()).getByRole('button', { name: 'Make the link' }));
     const dialog = await screen.findByRole('dialog', { name: 'The link is ready' });
     expect(within(dialog).getByText(/told only this once/)).toBeInTheDocument();
-    expect(within(dialog).getByLabelText('Address of the link')).toHaveValue(sampleCreatedShare().url);
+    expect(within(dialog).getByLabelText('Address of the link')).toHaveValue(createdUrl);
     await user.click(within(dialog).getByRole('button', { name: 'Copy' }));
     expect(await within(dialog).findByText(/Copied\. Paste it/)).toBeInTheDocument();
-    expect(await navigator.clipboard.readText()).toBe(sampleCreatedShare().url);
+    expect(await navigator.clipboard.readText()).toBe(createdUrl);
   });
 
   it('selects the address where the browser does not copy', async () => {
@@ -85,7 +100,7 @@ describe('sending a sheet', () => {
     await user.click(screen.getByRole('button', { name: 'Copy' }));
     expect(await screen.findByText(/copy it by hand/)).toBeInTheDocument();
     const field: HTMLInputElement = screen.getByLabelText('Address of the link');
-    expect(field.selectionEnd).toBe(sampleCreatedShare().url.length);
+    expect(field.selectionEnd).toBe(createdUrl.length);
   });
 
   it('keeps what was written when the link could not be made', async () => {
@@ -110,24 +125,57 @@ describe('sending a sheet', () => {
     expect(screen.getByText('1 link ended')).toBeInTheDocument();
   });
 
-  it('ends a link only after asking', async () => {
-    const shares = [sampleShare()];
-    const server = open(
+  it('mails it instead where an address is given, and tells no link', async () => {
+    const mailed = { ...sampleCreatedShare({ mailedTo: 'bex@example.org', hasPassphrase: true }), url: null };
+    const server = open({ [`POST ${paths.shares}`]: json(mailed, 201) });
+    const dialog = await openDialog();
+    await userEvent.type(within(dialog).getByLabelText(/Mail it to/), 'bex@example.org');
+    await userEvent.click(within(dialog).getByRole('button', { name: 'Mail the link' }));
+    const done = await screen.findByRole('dialog', { name: 'The mail is on its way' });
+    expect(done).toHaveTextContent('It goes to bex@example.org.');
+    expect(done).toHaveTextContent('Tell them the passphrase yourself');
+    const sent = server.requests.find(({ method }) => method === 'POST');
+    expect(sent?.body).toMatchObject({ mailTo: 'bex@example.org' });
+  });
+
+  it('asks for the day before a link until a day is made', async () => {
+    const server = open();
+    const dialog = await openDialog();
+    await userEvent.click(within(dialog).getByRole('radio', { name: 'until a day' }));
+    await userEvent.click(within(dialog).getByRole('button', { name: 'Make the link' }));
+    expect(within(dialog).getByRole('alert')).toHaveTextContent('Choose the day until which it opens.');
+    expect(server.requests.some(({ method }) => method === 'POST')).toBe(false);
+  });
+
+  it('lets a room’s log be read, and offers neither sound nor files nor notes', async () => {
+    const room = { kind: 'room', roomId: takeId } as const;
+    fakeServer({ [`GET ${paths.sharesOf(room)}`]: json({ items: [] }) });
+    renderPage([{ path: '/', element: <SendThis subject={room} /> }], '/');
+    await userEvent.click(screen.getByRole('button', { name: 'Send this room log' }));
+    const dialog = await screen.findByRole('dialog', { name: 'Send this room log' });
+    expect(within(dialog).queryByRole('checkbox')).not.toBeInTheDocument();
+    expect(dialog).toHaveTextContent('It opens this room’s log, and none of its sheets.');
+  });
+
+  it('ends a link at once, and opens it again when that is taken back', async () => {
+    const shares = [sampleShare({ label: 'Oda' })];
+    const set = (revokedAt: string | null) => (shares[0] = { ...shares[0], revokedAt });
+    open(
       {
         [`DELETE ${paths.share(shares[0].id)}`]: () => {
-          shares[0] = { ...shares[0], revokedAt: '2026-12-01T00:00:00.000Z' };
+          set('2026-12-01T00:00:00.000Z');
           return { status: 204 };
         },
+        [`POST ${paths.restoreShare(shares[0].id)}`]: () => ({ json: set(null) }),
       },
       shares,
     );
-    await userEvent.click(await screen.findByRole('button', { name: 'End this link' }));
-    expect(screen.getByRole('button', { name: 'Keep it' })).toHaveFocus();
-    await userEvent.click(screen.getByRole('button', { name: 'Keep it' }));
-    expect(server.requests.some(({ method }) => method === 'DELETE')).toBe(false);
+    expect(await screen.findByText(/Oda has it/)).toBeInTheDocument();
     await userEvent.click(screen.getByRole('button', { name: 'End this link' }));
-    await userEvent.click(screen.getByRole('button', { name: 'End it' }));
     expect(await screen.findByText('1 link ended')).toBeInTheDocument();
+    await userEvent.click(screen.getByRole('button', { name: 'Undo' }));
+    expect(await screen.findByRole('button', { name: 'End this link' })).toBeInTheDocument();
+    expect(screen.queryByText('1 link ended')).not.toBeInTheDocument();
   });
 
   it('says why a link could not be ended', async () => {
@@ -136,8 +184,8 @@ describe('sending a sheet', () => {
       [sampleShare()],
     );
     await userEvent.click(await screen.findByRole('button', { name: 'End this link' }));
-    await userEvent.click(screen.getByRole('button', { name: 'End it' }));
     expect(await screen.findByText('Try again in a moment.')).toBeInTheDocument();
+    expect(screen.getByRole('button', { name: 'End this link' })).toBeInTheDocument();
   });
 
   it('offers another try when the links could not be loaded', async () => {
