@@ -40,8 +40,10 @@ function Act({ words, label, onClick }: { words: string; label: string; onClick?
       <TextButton
         onClick={onClick}
         aria-label={label}
-        position="relative"
-        _after={{ content: '""', position: 'absolute', inset: '-3px -4px' }}
+        display="inline-block"
+        minWidth="24px"
+        minHeight="24px"
+        paddingX="4px"
       >
         {words}
       </TextButton>

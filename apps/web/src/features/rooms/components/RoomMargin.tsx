@@ -66,7 +66,14 @@ export function RoomMargin({
         Estimate a change before you make it
       </TextLink>
       {onEdit && (
-        <TextButton display="block" fontSize="small" marginTop="8px" paddingY="8px" onClick={onEdit}>
+        <TextButton
+          display="block"
+          fontSize="small"
+          marginTop="8px"
+          paddingY="8px"
+          onClick={onEdit}
+          _print={{ display: 'none' }}
+        >
           change what is written down
         </TextButton>
       )}
