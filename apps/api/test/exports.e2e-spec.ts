@@ -149,7 +149,7 @@ describe('everything of an account', () => {
       .execute<{ secret: string }[]>(
         `select password_hash as secret from "user" union select token_hash from share where token_hash is not null`,
       );
-    for (const { secret } of [...secrets, { secret: share.url.split('/').at(-1) ?? '' }])
+    for (const { secret } of [...secrets, { secret: share.url!.split('/').at(-1) ?? '' }])
       expect(all).not.toContain(secret);
     expect(all).toContain(person.me.email);
     expect(all).not.toContain('juno-');
