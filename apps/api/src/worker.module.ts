@@ -26,6 +26,7 @@ import { MailWorker } from './mail/mail-worker';
 import { MailWriter } from './mail/mail-writer';
 import { NoteMailWriter } from './mail/note-mail-writer';
 import { Mailer } from './mail/mailer';
+import { OpenedMailWriter } from './mail/opened-mail-writer';
 import { ShareMailWriter } from './mail/share-mail-writer';
 import { MeasurePool } from './measuring/measure-pool';
 import { MeasureQueue } from './measuring/measure-queue';
@@ -80,6 +81,7 @@ export class WorkerModule {
         AccountMailWriter,
         NoteMailWriter,
         ShareMailWriter,
+        OpenedMailWriter,
         MailWriter,
         MailWorker,
         TakePurge,

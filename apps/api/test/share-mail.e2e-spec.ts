@@ -37,7 +37,7 @@ describe('a link that is sent by mail', () => {
     expect(await test.em().count(Share, { owner: juno.me.id })).toBe(0);
   });
 
-  it('reaches its reader and opens; neither page nor queue tells the token; a refused mail is tried again', async () => {
+  it('reaches its reader and opens; its owner hears of the first time; neither page nor queue tells the token; a refused mail is tried again', async () => {
     await verify(juno);
     sink.refuse(1);
     const response = await send({ mailTo: 'bex@example.org', question: 'Flip it?' }).expect(201);
@@ -51,11 +51,17 @@ describe('a link that is sent by mail', () => {
     const guest = new Browser(test);
     await guest.post(paths.openShare, { token: tokenIn(mail, 's') }).expect(200);
     await guest.get(paths.take(take.id)).expect(200);
+    await new Browser(test).post(paths.openShare, { token: tokenIn(mail, 's') }).expect(200);
+    const told = await sink.next(juno.me.email);
+    expect(told.subject).toBe(`The sheet of take ${take.number} was opened`);
+    expect(told.text).toContain(`/takes/${take.id}`);
+    expect(told.headers.has('list')).toBe(true);
     const queued = await test
       .em()
       .getConnection()
-      .execute(`select data::text from pgboss.job where name = 'mail'`);
+      .execute<{ data: { kind: string } }[]>(`select data from pgboss.job where name = 'mail'`);
     expect(JSON.stringify(queued)).not.toContain(tokenIn(mail, 's'));
+    expect(queued.filter(({ data }) => data.kind === 'opened')).toHaveLength(1);
   });
 
   it('is not sent for what is no address, nor without end', async () => {

@@ -20,4 +20,6 @@ export type MailJob =
   | { kind: 'answer'; noteId: string; userId: string }
   /** The player ticked what the note asked for, the last at this moment. */
   | { kind: 'ticked'; noteId: string; doneAt: string }
-  | { kind: 'share'; shareId: string };
+  | { kind: 'share'; shareId: string }
+  /** A link was opened for the first time; to whoever made it. */
+  | { kind: 'opened'; shareId: string };

@@ -4,6 +4,7 @@ import { DigestMailWriter } from './digest-mail-writer';
 import { InvitationMailWriter } from './invitation-mail-writer';
 import { MailJob } from './mail-jobs';
 import { NoteMailWriter } from './note-mail-writer';
+import { OpenedMailWriter } from './opened-mail-writer';
 import { ShareMailWriter } from './share-mail-writer';
 
 /** Turns a job into a mail, or into nothing where there is nobody to write to any more. */
@@ -14,6 +15,7 @@ export class MailWriter {
     private readonly digests: DigestMailWriter,
     private readonly invitations: InvitationMailWriter,
     private readonly notes: NoteMailWriter,
+    private readonly openings: OpenedMailWriter,
     private readonly shares: ShareMailWriter,
   ) {}
 
@@ -22,6 +24,7 @@ export class MailWriter {
     if (job.kind === 'join-invitation') return this.invitations.write(job);
     if (job.kind === 'note' || job.kind === 'answer') return this.notes.writeNote(job);
     if (job.kind === 'ticked') return this.notes.writeTicked(job);
+    if (job.kind === 'opened') return this.openings.write(job.shareId);
     if (job.kind === 'share') return this.shares.write(job.shareId);
     return this.accounts.write(job);
   }

@@ -7,7 +7,7 @@ import { isOpen } from '../shares/open-shares';
 import { subjectOf } from '../shares/share-subject';
 import { randomToken, tokenHash } from '../tokens/random-token';
 import { isClosed } from '../users/closed-account';
-import { Mailer } from './mailer';
+import { ChosenMail } from './chosen-mail';
 import { shareMail } from './templates/share-mail';
 
 /** Writes the mail that brings a link to somebody. */
@@ -15,7 +15,7 @@ import { shareMail } from './templates/share-mail';
 export class ShareMailWriter {
   constructor(
     private readonly em: EntityManager,
-    private readonly mailer: Mailer,
+    private readonly mail: ChosenMail,
     @Inject(CONFIG) private readonly config: Config,
   ) {}
 
@@ -29,7 +29,7 @@ export class ShareMailWriter {
     const token = randomToken();
     share.tokenHash = tokenHash(token);
     await em.flush();
-    const mail = shareMail({
+    const content = shareMail({
       from: owner.name,
       kind: subjectOf(share).kind,
       question: share.question,
@@ -37,6 +37,6 @@ export class ShareMailWriter {
       hasPassphrase: Boolean(share.passphraseHash),
       url: new URL(`/s/${token}`, this.config.publicUrl).href,
     });
-    await this.mailer.send(share.mailedTo, mail);
+    await this.mail.toAddress(share.mailedTo, 'sent', content);
   }
 }

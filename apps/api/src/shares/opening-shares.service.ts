@@ -5,6 +5,7 @@ import { PasswordsService } from '../auth/passwords.service';
 import { Config } from '../config/config';
 import { CONFIG } from '../config/config.module';
 import { AppError } from '../errors/app-error';
+import { MailQueue } from '../mail/mail-queue';
 import { ThrottleService } from '../throttle/throttle.service';
 import { tokenHash } from '../tokens/random-token';
 import { Share } from './entities/share.entity';
@@ -24,6 +25,7 @@ export class OpeningSharesService {
     private readonly em: EntityManager,
     private readonly throttle: ThrottleService,
     private readonly passwords: PasswordsService,
+    private readonly mails: MailQueue,
     @Inject(CONFIG) private readonly config: Config,
   ) {}
 
@@ -45,10 +47,15 @@ export class OpeningSharesService {
     return this.em.findOne(Share, where, { populate: ['owner', ...withSubject] });
   }
 
-  async countOpening(shareId: string): Promise<void> {
-    await this.em
-      .getConnection()
-      .execute('update share set opened_at = now(), open_count = open_count + 1 where id = ?', [shareId]);
+  /** Of the first one the owner hears by mail. */
+  private async countOpening(shareId: string): Promise<void> {
+    await this.em.fork().transactional(async (em) => {
+      const [counted] = await em.execute<{ open_count: number }[]>(
+        'update share set opened_at = now(), open_count = open_count + 1 where id = ? returning open_count',
+        [shareId],
+      );
+      if (counted?.open_count === 1) await this.mails.sendWith(em, { kind: 'opened', shareId });
+    });
   }
 
   /** Tries are counted for the link from one place, so that nobody can shut others out of it, and over all places. */
