@@ -8,6 +8,7 @@ import {
 import useSWR, { useSWRConfig } from 'swr';
 import useSWRInfinite from 'swr/infinite';
 import { errorToShow, requestJson, requestNothing } from '../../../lib/apiClient';
+import { auditKey } from './useAudit';
 
 const isAccountsKey = (key: unknown) => typeof key === 'string' && key.includes(paths.adminAccounts);
 
@@ -52,7 +53,8 @@ export function useAccountActions(readAgain: () => Promise<unknown>) {
   const { mutate } = useSWRConfig();
   const after = async () => {
     await readAgain();
-    await mutate((key) => isAccountsKey(key) || key === paths.adminAudit);
+    // A list of pages is found by its own key only.
+    await Promise.all([mutate(isAccountsKey), mutate(auditKey)]);
   };
   return {
     change: async (userId: string, body: UpdateAccountRequest) => {
