@@ -17,6 +17,7 @@ test('a guest leaves a note on a phone, the player sees the pin, gets a mail and
   test.slow();
   const player = await joinAsNewcomer(page);
   await page.goto(await linkFromMail(player.email, 'verify'));
+  await expect(page.getByRole('heading', { name: /Your address is right/ }).first()).toBeVisible();
   await page.goto('/takes/new');
   await uploadTake(page, 'hot-kick-opposite-overhead');
   await waitForSheet(page);
