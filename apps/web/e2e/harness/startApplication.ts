@@ -10,7 +10,11 @@ const webDist = join(root, 'apps/web/dist');
 const startedWithinMs = 60_000;
 const pauseMs = 150;
 
+/** Who is signed in stays so for a quarter of an hour without a page that refreshes it. */
+const signedInMs = 8 * 60_000;
+
 const children: ChildProcess[] = [];
+let signingIn: NodeJS.Timeout | undefined;
 
 /** Playwright's global setup: the built application on a fresh database, with the demo in it; gives back its end. */
 export default async function startApplication(): Promise<() => Promise<void>> {
@@ -24,6 +28,7 @@ export default async function startApplication(): Promise<() => Promise<void>> {
     await healthy(`${publicUrl}/api/health`, api);
     await finished('seed', 'fixtures/dist/seedDemo.js');
     await keepPlayerState();
+    signingIn = setInterval(() => void keepPlayerState(), signedInMs);
     await finished('sample', 'apps/api/dist/sample-take.js', (await getDemoTake(starTitle)).id);
   } catch (error) {
     await stopAll();
@@ -81,6 +86,7 @@ const logOf = (name: string) => join(browserSettings().resultsDir, `${name}.log`
 const isRunning = (child: ChildProcess) => child.exitCode === null && child.signalCode === null;
 
 async function stopAll(): Promise<void> {
+  clearInterval(signingIn);
   await Promise.all(children.filter(isRunning).map(stop));
 }
 
