@@ -44,6 +44,7 @@ describe('mails about notes', () => {
     const guest = new Browser(test);
     const share = await sharedBy(juno, take, { canNote: true });
     await openedBy(guest, share);
+    expect((await sink.next(juno.me.email)).subject).toBe('The sheet of take 1 was opened');
     return { guest, share };
   };
   /** A mail to somebody else that is sent later shows that the queue is past those before. */
@@ -79,7 +80,7 @@ describe('mails about notes', () => {
     await test.em().nativeUpdate(User, { id: juno.me.id }, { emailVerifiedAt: null });
     await noteBy(guest, take, { guestName: 'Bex' });
     await queuePassed();
-    expect([sink.count(juno.me.email), sink.count(oda.me.email)]).toEqual([2, 1]);
+    expect([sink.count(juno.me.email), sink.count(oda.me.email)]).toEqual([3, 1]);
   });
 
   it('tell whoever asked for something what was ticked, once for all of it', async () => {

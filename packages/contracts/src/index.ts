@@ -14,6 +14,7 @@ export * from './progress';
 export * from './reports';
 export * from './rooms';
 export * from './setups';
+export * from './openedShares';
 export * from './shares';
 export * from './takes';
 export * from './tryouts';

@@ -1,4 +1,4 @@
-import type { ShareSubject } from './shares';
+import type { ShareSubject } from './openedShares';
 
 /** Every path of the API, so that neither side spells one by hand. */
 export const paths = {

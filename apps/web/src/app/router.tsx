@@ -3,12 +3,11 @@ import { PageLoading } from '../components/PageLoading';
 import { ErrorPage } from '../pages/ErrorPage';
 import { NotFoundPage } from '../pages/NotFoundPage';
 import { GuestOnly, SignedIn } from './gates';
-import { Layout } from './Layout';
 
 /** Every page is loaded when it is first needed. */
 export const router = createBrowserRouter([
   {
-    element: <Layout />,
+    lazy: async () => ({ Component: (await import('./Layout')).Layout }),
     errorElement: <ErrorPage />,
     HydrateFallback: PageLoading,
     children: [

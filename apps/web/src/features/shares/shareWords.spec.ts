@@ -1,5 +1,6 @@
 import type { ShareResponse } from '@thudline/contracts';
-import { isOpen, mayDoWords, openedWords, openUntilWords, rightsWords, whoHasItWords } from './shareWords';
+import { isOpen, mayDoWords, openedWords, rightsWords, whoHasItWords } from './shareWords';
+import { openUntilWords } from './openUntilWords';
 
 const now = new Date('2026-12-04T20:00:00');
 const share = (overrides: Partial<ShareResponse> = {}): ShareResponse => ({

@@ -1,14 +1,8 @@
-import type { OpenedShareResponse, ShareResponse } from '@thudline/contracts';
+import type { ShareResponse } from '@thudline/contracts';
 import { relativeDate } from '../takes/relativeDate';
+import { openUntilWords } from './openUntilWords';
 
 export const exampleQuestion = 'What would you change first?';
-
-const dayMonth = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'short' });
-
-/** "open until 11 Dec", or until somebody ends it. */
-export function openUntilWords({ expiresAt }: Pick<OpenedShareResponse, 'expiresAt'>): string {
-  return expiresAt ? `open until ${dayMonth.format(new Date(expiresAt))}` : 'open until it is ended';
-}
 
 export const isOpen = ({ revokedAt, expiresAt }: ShareResponse, now: Date): boolean =>
   revokedAt === null && (expiresAt === null || new Date(expiresAt) > now);

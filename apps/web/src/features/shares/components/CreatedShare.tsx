@@ -2,7 +2,8 @@ import { Box, Flex } from '@chakra-ui/react';
 import type { CreatedShareResponse } from '@thudline/contracts';
 import { Button } from '../../../components/Button';
 import { CopyField } from '../../../components/CopyField';
-import { mayDoWords, openUntilWords } from '../shareWords';
+import { openUntilWords } from '../openUntilWords';
+import { mayDoWords } from '../shareWords';
 
 /** The link, told this once. */
 export function CreatedShare({

@@ -1,6 +1,7 @@
 import { Button } from '../../../components/Button';
 import { PageMessage } from '../../../components/PageMessage';
-import { isEnded, LinkEnded } from './LinkEnded';
+import { isEnded } from '../isEnded';
+import { LinkEnded } from './LinkEnded';
 
 /** What stands where a page that was sent could not be read: it has ended meanwhile, or another try is worth it. */
 export function GuestFailure({ error, retry }: { error: Error; retry: () => void }) {

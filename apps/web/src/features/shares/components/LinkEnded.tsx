@@ -1,11 +1,5 @@
 import { ButtonLink } from '../../../components/ButtonLink';
 import { PageMessage } from '../../../components/PageMessage';
-import { ApiError } from '../../../lib/apiClient';
-
-const endedCodes = ['link-ended', 'not-found', 'not-signed-in', 'bad-request'];
-
-/** Whether a link opens nothing: ended, timed out, mistyped; the guest can't tell and needn't. */
-export const isEnded = (error: Error) => error instanceof ApiError && endedCodes.includes(error.code);
 
 /** One page for every link that opens nothing, with the next step. */
 export function LinkEnded() {

@@ -1,7 +1,7 @@
 import { Box } from '@chakra-ui/react';
 import type { CreatedShareResponse } from '@thudline/contracts';
 import { Button } from '../../../components/Button';
-import { openUntilWords } from '../shareWords';
+import { openUntilWords } from '../openUntilWords';
 
 /** What becomes of a link that is mailed. */
 export function MailedShare({ share, onDone }: { share: CreatedShareResponse; onDone: () => void }) {

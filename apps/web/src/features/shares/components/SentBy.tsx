@@ -1,6 +1,6 @@
 import { Box } from '@chakra-ui/react';
 import type { OpenedShareResponse } from '@thudline/contracts';
-import { openUntilWords } from '../shareWords';
+import { openUntilWords } from '../openUntilWords';
 
 /** Stands where an owner would find their name: who sent the sheet, and until when it opens. */
 export function SentBy({ opened }: { opened: OpenedShareResponse }) {
