@@ -8,8 +8,8 @@ import { hear, tapSound } from './harness/soundTap';
 test.use({ storageState: browserSettings().playerState });
 
 const phone = { width: 390, height: 844 };
-/** The flip gives about 1.4 dB of low end back over all hits; one hit on repeat was heard 0.2 to 0.4 dB fuller. */
-const clearlyFullerDb = 0.1;
+/** The flip gives about 1.4 dB of low end back; what is played is matched above it. Half of that is beyond chance. */
+const clearlyFullerDb = 0.7;
 
 test('a sheet is sent with a question, read and heard signed out on a phone, and closed again', async ({
   page,
