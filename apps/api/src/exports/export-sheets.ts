@@ -1,18 +1,13 @@
-type Cell = string | number | boolean | null | Date;
+import { Cell, csvOf } from '../zip/csv';
+
 type Row = Record<string, Cell>;
 
-/** A table for a spreadsheet (RFC 4180): names first, lines end in CRLF. */
-export function csv(rows: readonly Row[], columns: readonly string[]): string {
-  const lines = [columns, ...rows.map((row) => columns.map((column) => row[column] ?? null))];
-  return lines.map((cells) => cells.map(cellText).join(',')).join('\r\n') + '\r\n';
-}
-
-function cellText(cell: Cell): string {
-  const text = cell instanceof Date ? cell.toISOString() : String(cell ?? '');
-  // A spreadsheet would take what begins so for a formula; numbers are ours.
-  const safe = typeof cell === 'string' && /^[=+\-@\t\r]/.test(text) ? `'${text}` : text;
-  return /[",\r\n]/.test(safe) ? `"${safe.replaceAll('"', '""')}"` : safe;
-}
+/** Rows of a query, those columns of theirs that are named; what isn't there is left empty. */
+export const csv = (rows: readonly Row[], columns: readonly string[]): string =>
+  csvOf(
+    columns,
+    rows.map((row) => columns.map((column) => row[column] ?? null)),
+  );
 
 const levelColumns = [
   'kick_peak_dbfs',

@@ -1,9 +1,10 @@
-type Cell = string | number | null;
+export type Cell = string | number | boolean | null | Date;
 
 /** A cell that begins like a formula would be run as one by a spreadsheet. */
 function cell(value: Cell): string {
   if (value === null) return '';
-  if (typeof value === 'number') return String(value);
+  if (value instanceof Date) return value.toISOString();
+  if (typeof value !== 'string') return String(value);
   const safe = /^[=+\-@\t\r]/.test(value) ? `'${value}` : value;
   return /[",\n\r]/.test(safe) ? `"${safe.replaceAll('"', '""')}"` : safe;
 }
