@@ -4,7 +4,8 @@ import { Count, lookAfterwards } from './faults/afterwards';
 import { FaultContext, FaultKind, faultKinds } from './faults/kinds';
 import { startSystem } from './faults/system';
 import { startUploads } from './faults/uploads';
-import { between, createRandom, Random, shuffled } from './lib/random';
+import { createRandom, Random } from '@thudline/fixtures';
+import { between, shuffled } from './lib/random';
 import { joinAs } from './lib/session';
 
 const playerName = 'Sabel';

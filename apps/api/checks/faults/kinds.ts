@@ -2,7 +2,8 @@ import { closeSync, openSync, rmSync, writeSync } from 'node:fs';
 import { join } from 'node:path';
 import { setTimeout as delay } from 'node:timers/promises';
 import { paths } from '@thudline/contracts';
-import { between, Random } from '../lib/random';
+import { Random } from '@thudline/fixtures';
+import { between } from '../lib/random';
 import { Session } from '../lib/session';
 import { System } from './system';
 

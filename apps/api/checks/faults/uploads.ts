@@ -1,8 +1,7 @@
 import { createHash, randomUUID } from 'node:crypto';
 import { setTimeout as delay } from 'node:timers/promises';
 import { paths, takeResponse } from '@thudline/contracts';
-import { takeFiles } from '@thudline/fixtures';
-import { Random } from '../lib/random';
+import { Random, takeFiles } from '@thudline/fixtures';
 import { Session } from '../lib/session';
 
 /** One take that somebody tried to send. */
@@ -55,7 +54,7 @@ export function startUploads(session: Session, random: Random): Uploads {
       const take = next();
       for (;;) {
         take.takeId = await sendTake(session, take).catch(() => null);
-        if (take.takeId || random() > retried) break;
+        if (take.takeId || random.uniform() > retried) break;
         await delay(200);
       }
     }
