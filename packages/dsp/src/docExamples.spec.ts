@@ -23,8 +23,7 @@ interface Told {
 /** Runs code as it stands, with all that the package offers in reach, and what it is given. @returns what it returns */
 function run(code: string, given: Record<string, unknown> = {}): Promise<Record<string, unknown>> {
   const reach = { ...dsp, ...given };
-  // The examples are our own text, and running them is what this is for.
-  // eslint-disable-next-line @typescript-eslint/no-implied-eval
+  // eslint-disable-next-line @typescript-eslint/no-implied-eval -- the examples are our own text, and running them is what this is for
   const made = new Function(...Object.keys(reach), `return (async () => { ${code} })();`) as (
     ...values: unknown[]
   ) => ReturnType<typeof run>;

@@ -2,8 +2,8 @@ import { defaultUserSettings } from '@thudline/contracts';
 import { commandDefaults, commandLine } from './commandLine';
 
 describe('commandLine', () => {
-  it('takes two files and the usual target, aim and temperature', () => {
-    expect(commandLine(['kick.wav', 'overhead.wav'])).toEqual({
+  it('takes two files and the usual target, aim and temperature', async () => {
+    expect(await commandLine(['kick.wav', 'overhead.wav'])).toEqual({
       paths: ['kick.wav', 'overhead.wav'],
       json: false,
       help: false,
@@ -17,20 +17,20 @@ describe('commandLine', () => {
     expect(defaultUserSettings).toMatchObject(commandDefaults);
   });
 
-  it('takes every option, negative values as they stand', () => {
+  it('takes every option, negative values as they stand', async () => {
     const words = 'both.wav --json --channel 0:1 --temperature-c -5.5 --target -14:-8 --aim -10'.split(' ');
-    expect(commandLine(words)).toMatchObject({
+    expect(await commandLine(words)).toMatchObject({
       paths: ['both.wav'],
       json: true,
       channels: { kick: 0, overhead: 1 },
       temperatureC: -5.5,
       target: { lowDbfs: -14, highDbfs: -8, aimDbfs: -10 },
     });
-    expect(commandLine(['a.wav', 'b.wav', '--aim=-7']).target.aimDbfs).toBe(-7);
+    expect((await commandLine(['a.wav', 'b.wav', '--aim=-7'])).target.aimDbfs).toBe(-7);
   });
 
-  it('moves the usual aim into a target that leaves it out', () => {
-    expect(commandLine(['a.wav', 'b.wav', '--target', '-20:-12']).target.aimDbfs).toBe(-12);
+  it('moves the usual aim into a target that leaves it out', async () => {
+    expect((await commandLine(['a.wav', 'b.wav', '--target', '-20:-12'])).target.aimDbfs).toBe(-12);
   });
 
   it.each([
@@ -45,8 +45,8 @@ describe('commandLine', () => {
     [['a.wav', '--aim', '-3'], /aim lies inside the target/],
     [['a.wav', '--target', '-90:-6'], /between −40 and −1/],
     [['a.wav', '--aim', 'loud'], /between −40 and −1/],
-  ])('refuses %j with one sentence', (words, sentence) => {
-    expect(() => commandLine(words)).toThrow(sentence);
-    expect(() => commandLine(words)).toThrow(/^[^\n]*\.$/);
+  ])('refuses %j with one sentence', async (words, sentence) => {
+    await expect(commandLine(words)).rejects.toThrow(sentence);
+    await expect(commandLine(words)).rejects.toThrow(/^[^\n]*\.$/);
   });
 });

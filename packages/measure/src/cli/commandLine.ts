@@ -47,7 +47,7 @@ const options = {
  * @param words - without node and the script
  * @throws {UsageError} one sentence about the word that can't be meant
  */
-export function commandLine(words: readonly string[]): CommandLine {
+export async function commandLine(words: readonly string[]): Promise<CommandLine> {
   const { values, positionals } = parsed(words);
   if (!values.help && (positionals.length < 1 || positionals.length > 2)) {
     throw new UsageError(
@@ -60,7 +60,7 @@ export function commandLine(words: readonly string[]): CommandLine {
     help: values.help ?? false,
     channels: values.channel === undefined ? null : channels(values.channel),
     temperatureC: temperature(values['temperature-c']),
-    target: target(values.target, values.aim),
+    target: await target(values.target, values.aim),
   };
 }
 
@@ -100,7 +100,7 @@ function temperature(text: string | undefined): number {
   return value;
 }
 
-function target(range: string | undefined, aim: string | undefined): Target {
+async function target(range: string | undefined, aim: string | undefined): Promise<Target> {
   const { lowDbfs, highDbfs, aimDbfs } = commandDefaults.target;
   if (range === undefined && aim === undefined) return commandDefaults.target;
   const ends = range?.split(':').map(number) ?? [lowDbfs, highDbfs];
@@ -109,18 +109,14 @@ function target(range: string | undefined, aim: string | undefined): Target {
     throw new UsageError(`--target takes two levels such as -12:-6, not "${range}".`);
   }
   const wanted = aim === undefined ? Math.min(high, Math.max(low, aimDbfs)) : number(aim);
-  const checked = targetSchema().safeParse({ lowDbfs: low, highDbfs: high, aimDbfs: wanted });
+  // Loaded only where it is needed.
+  const contracts = await import('@thudline/contracts');
+  const checked = contracts.target.safeParse({ lowDbfs: low, highDbfs: high, aimDbfs: wanted });
   if (checked.success) return checked.data;
   const issue = checked.error.issues[0];
   throw new UsageError(
     issue?.code === 'custom' ? issue.message : 'Target and aim are levels between −40 and −1 dBFS.',
   );
-}
-
-/** Loaded only where it is needed. */
-function targetSchema(): typeof import('@thudline/contracts').target {
-  // eslint-disable-next-line @typescript-eslint/no-require-imports -- an import() would be awaited, a word's meaning isn't
-  return (require('@thudline/contracts') as typeof import('@thudline/contracts')).target;
 }
 
 function number(text: string): number | null {

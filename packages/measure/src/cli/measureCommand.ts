@@ -23,7 +23,7 @@ export interface CommandResult {
 export async function measureCommand(words: readonly string[]): Promise<CommandResult> {
   let paths: readonly string[] = [];
   try {
-    const command = commandLine(words);
+    const command = await commandLine(words);
     paths = command.paths;
     return { exitCode: 0, stdout: command.help ? usage : await report(command), stderr: '' };
   } catch (error) {

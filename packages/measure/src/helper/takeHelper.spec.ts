@@ -4,8 +4,7 @@ import { simpleTake, takeFolder, type TakeFolder } from '../testing/takeFolder';
 import type { TrackChoice } from '../trackChoice';
 
 /** Only what is built has a thread to start: from source a take is measured in one. */
-// eslint-disable-next-line @typescript-eslint/no-require-imports -- in `dist` when this runs, which the compiler doesn't know
-const built = require(join(__dirname, '../../dist/measureFiles.js')) as typeof import('../measureFiles');
+let built: typeof import('../measureFiles');
 
 const tracks: readonly TrackChoice[] = [
   { role: 'kick', fileIndex: 0, channel: 0 },
@@ -14,6 +13,8 @@ const tracks: readonly TrackChoice[] = [
 let folder: TakeFolder;
 let files: { path: string }[];
 beforeAll(async () => {
+  // In `dist` when this runs, which the compiler doesn't know.
+  built = (await import(join(__dirname, '../../dist/measureFiles.js'))) as typeof built;
   folder = await takeFolder();
   const { kick, overhead } = simpleTake({ seconds: 12 });
   files = [
