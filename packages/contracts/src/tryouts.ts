@@ -16,14 +16,6 @@ export type TryOutSubject = (typeof tryOutSubjects)[number];
 export const tryOutUnits = ['cm', 'degree', 'dB', 'label'] as const;
 export type TryOutUnit = (typeof tryOutUnits)[number];
 
-/** The unit each subject is measured in; for anything else it is chosen. */
-export const unitOfSubject: Record<Exclude<TryOutSubject, 'other'>, TryOutUnit> = {
-  'overhead-height': 'cm',
-  'overhead-forward': 'cm',
-  'kick-depth': 'cm',
-  'kick-angle': 'degree',
-};
-
 export const tryOutLimits = { fewestTakes: 2, mostTakes: 24 } as const;
 
 const position = z.number().min(-1000).max(1000).nullable();

@@ -40,13 +40,6 @@ export const OptionalViewer = createParamDecorator(
     context.switchToHttp().getRequest<ViewerRequest>().viewer ?? null,
 );
 
-/** Who asks, with the links they have opened. */
-export const CurrentAsker = createParamDecorator((_: unknown, context: ExecutionContext): Asker => {
-  const { asker } = context.switchToHttp().getRequest<ViewerRequest>();
-  if (!asker) throw notSignedIn();
-  return asker;
-});
-
 /** For routes that declare a right to a take, a comparison, a try-out or a room. */
 export const CurrentRights = createParamDecorator((_: unknown, context: ExecutionContext): TakeRights => {
   const { rights } = context.switchToHttp().getRequest<ViewerRequest>();

@@ -61,5 +61,3 @@ export function useTryOutDraft({ takeIds, to, lengthUnit }: DraftOf) {
     make,
   };
 }
-
-export type TryOutBench = ReturnType<typeof useTryOutDraft>;
